@@ -1,0 +1,44 @@
+/** What a cell function is. Everything the product says or does about one derives from this object. */
+import type { CellResult } from './cell';
+import type { Parameter } from './parameters';
+
+export type Parameters = Readonly<Record<string, Parameter>>;
+
+/** The values a function runs on, as its parameters read them. */
+export type Values<P extends Parameters> = { readonly [K in keyof P]: P[K] extends Parameter<infer T> ? T : never };
+
+/** The parts of the job, in the order of the work. */
+export type Family = 'reading' | 'rate' | 'order';
+
+export interface Definition<P extends Parameters> {
+  /** Without the namespace: `TANGENT`. Three letters or more, no dot, no underscore, and never changed. */
+  readonly name: string;
+  readonly family: Family;
+  /** One sentence, for argument help and tables. */
+  readonly summary: string;
+  /** How it is worked out, for the help page: equation, method, what is taken for granted. */
+  readonly method: string;
+  readonly parameters: P;
+  readonly result: { readonly unit: string; readonly shape: 'one value' | 'as given' | 'column' | 'table' };
+  /** Typed into an empty cell it gives `equals`: the value, or the first cells of each row that spills. */
+  readonly example: { readonly formula: string; readonly equals: CellResult };
+  /** DOI or standard. */
+  readonly reference: string;
+  /** Where the work this serves can hurt someone. */
+  readonly caution?: string;
+  readonly run: (values: Values<P>) => CellResult;
+}
+
+/** A definition whose parameter types have been checked and can be forgotten. */
+export type CellFunction = Omit<Definition<Parameters>, 'run'> & {
+  readonly run: (values: Readonly<Record<string, unknown>>) => CellResult;
+};
+
+export const namespace = 'PACE';
+
+/** As it is typed: `PACE.TANGENT`. */
+export const typedName = (f: Pick<CellFunction, 'name'>): string => `${namespace}.${f.name}`;
+
+export function defineFunction<const P extends Parameters>(definition: Definition<P>): CellFunction {
+  return definition as unknown as CellFunction;
+}

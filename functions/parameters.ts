@@ -1,0 +1,315 @@
+/**
+ * The kinds of parameter a cell function can have. Each says what the user must know (help, unit,
+ * default, bounds) and reads its argument from cells, or refuses in words.
+ */
+import { InvalidInput, shown } from '../src/errors';
+import { convertQuantity, parseQuantity } from '../src/units';
+import { CellError, shownCell, type CellRange, type CellValue } from './cell';
+import { readColumn, requireLine, type Column } from './column';
+
+export interface Bounds {
+  readonly above?: number;
+  readonly atLeast?: number;
+  readonly below?: number;
+  readonly atMost?: number;
+  readonly whole?: boolean;
+}
+
+export interface Parameter<T = unknown> {
+  readonly kind: 'number' | 'quantity' | 'quantities' | 'column' | 'readings' | 'flag' | 'text' | 'endpoint' | 'uncertainties';
+  readonly help: string;
+  /** `1` for a pure number, `of the readings` and the like where the columns decide. */
+  readonly unit: string;
+  readonly dimension: 'scalar' | 'matrix';
+  readonly optional: boolean;
+  /** What leaving it out means, in words. */
+  readonly whenOmitted?: string;
+  readonly bounds?: Bounds;
+  /** Conversions keep an error cell in its place; elsewhere the error becomes the answer. */
+  readonly keepsErrors?: boolean;
+  /** @throws InvalidInput, or a CellError that stands in the range */
+  read(cells: CellRange | undefined, name: string): T;
+}
+
+interface About {
+  readonly help: string;
+  readonly unit?: string;
+}
+
+/** The single cell of an argument. @throws InvalidInput for a range, the cell's own error for an error cell */
+function single(cells: CellRange, name: string): CellValue {
+  if (cells.length !== 1 || cells[0].length !== 1) {
+    throw new InvalidInput(`${name} must be one value: got ${cells.length} × ${cells[0]?.length ?? 0} cells`);
+  }
+  const cell = cells[0][0];
+  if (cell instanceof CellError) throw cell;
+  return cell;
+}
+
+const withUnit = (value: number, unit: string): string => (unit === '1' || unit === '' ? shown(value) : `${shown(value)} ${unit}`);
+
+/** The rule a bound states: `above 0`, `a whole number from 1 to 5`. */
+export function boundsInWords({ above, atLeast, below, atMost, whole }: Bounds): string {
+  const parts: string[] = [];
+  if (above !== undefined) parts.push(`above ${above}`);
+  if (atLeast !== undefined) parts.push(`${atLeast} or more`);
+  if (below !== undefined) parts.push(`below ${below}`);
+  if (atMost !== undefined) parts.push(`${atMost} or less`);
+  const range = parts.join(' and ');
+  return whole ? `a whole number${range ? `, ${range}` : ''}` : range;
+}
+
+function isWithin(value: number, { above, atLeast, below, atMost, whole }: Bounds): boolean {
+  return (
+    (above === undefined || value > above) &&
+    (atLeast === undefined || value >= atLeast) &&
+    (below === undefined || value < below) &&
+    (atMost === undefined || value <= atMost) &&
+    (!whole || Number.isInteger(value))
+  );
+}
+
+/** @param where `: row 7` inside a range, empty for a single value */
+function requireWithin(value: number, bounds: Bounds, name: string, unit: string, where = ''): number {
+  if (isWithin(value, bounds)) return value;
+  throw new InvalidInput(
+    `${name} must be ${boundsInWords(bounds)}: ${where ? `${where} (${withUnit(value, unit)})` : `got ${withUnit(value, unit)}`}`,
+  );
+}
+
+/** Where in its range a reading stands, as a person would count it. */
+export function placeInWords(place: number, column: Pick<Column, 'rows' | 'columns'>): string {
+  if (column.columns === 1) return `row ${place + 1}`;
+  if (column.rows === 1) return `column ${place + 1}`;
+  return `row ${Math.floor(place / column.columns) + 1}, column ${(place % column.columns) + 1}`;
+}
+
+/** One pure number or one number in the unit of the columns. */
+export function number(about: About & Bounds): Parameter<number> {
+  const { help, unit = '1', ...bounds } = about;
+  return {
+    kind: 'number',
+    help,
+    unit,
+    dimension: 'scalar',
+    optional: false,
+    bounds,
+    read(cells, name) {
+      const cell = single(required(cells, name), name);
+      if (typeof cell !== 'number') throw new InvalidInput(`${name} must be a number: got ${shownCell(cell)}`);
+      return requireWithin(cell, bounds, name, unit);
+    },
+  };
+}
+
+/** One physical quantity: a bare number in `unit`, or text with a unit of its own. Read as a number of `to`. */
+export function quantity(about: About & Bounds & { readonly unit: string; readonly to: string }): Parameter<number> {
+  const { help, unit, to, ...bounds } = about;
+  return {
+    kind: 'quantity',
+    help,
+    unit,
+    dimension: 'scalar',
+    optional: false,
+    bounds,
+    read: (cells, name) => readQuantity(single(required(cells, name), name), { name, unit, to, bounds }),
+  };
+}
+
+/** The same for every reading, or one a reading: a quantity, or a range of them as long as the readings. */
+export function quantities(
+  about: About & Bounds & { readonly unit: string; readonly to: string },
+): Parameter<readonly number[]> {
+  const { help, unit, to, ...bounds } = about;
+  return {
+    kind: 'quantities',
+    help: `${help}; one value, or one a reading`,
+    unit,
+    dimension: 'matrix',
+    optional: false,
+    bounds,
+    read(cells, name) {
+      const rows = required(cells, name);
+      const shape = { rows: rows.length, columns: rows[0]?.length ?? 0 };
+      const flat = rows.flat();
+      return flat.map((cell, place) => {
+        if (cell instanceof CellError) throw cell;
+        const where = flat.length === 1 ? '' : placeInWords(place, shape);
+        return readQuantity(cell, { name, unit, to, bounds, where });
+      });
+    },
+  };
+}
+
+function readQuantity(
+  cell: CellValue,
+  { name, unit, to, bounds, where = '' }: { name: string; unit: string; to: string; bounds: Bounds; where?: string },
+): number {
+  const inUnit = typeof cell === 'string' && cell.trim() !== '' ? parseQuantity(cell, unit, name) : cell;
+  if (typeof inUnit !== 'number') {
+    throw new InvalidInput(`${name} must be a number or text with a unit: ${where ? `${where} is` : 'got'} ${shownCell(cell)}`);
+  }
+  return convertQuantity(requireWithin(inUnit, bounds, name, unit, where), unit, to);
+}
+
+/** Times or readings from which something is estimated: one column or one row; blank and text cells are gaps. */
+export function column(about: About): Parameter<Column> {
+  return {
+    kind: 'column',
+    help: about.help,
+    unit: about.unit ?? 'any',
+    dimension: 'matrix',
+    optional: false,
+    read(cells, name) {
+      const read = readColumn(required(cells, name));
+      requireLine(read, name);
+      return read;
+    },
+  };
+}
+
+/** Readings that are converted one by one, in any shape. */
+export function readings(about: About & Bounds): Parameter<Column> {
+  const { help, unit = 'any', ...bounds } = about;
+  return {
+    kind: 'readings',
+    help,
+    unit,
+    dimension: 'matrix',
+    optional: false,
+    bounds,
+    keepsErrors: true,
+    read(cells, name) {
+      const read = readColumn(required(cells, name));
+      read.numbers.forEach((value, place) => {
+        if (value !== null) requireWithin(value, bounds, name, unit, placeInWords(place, read));
+      });
+      return read;
+    },
+  };
+}
+
+/** TRUE or FALSE; 1 and 0 count as such. */
+export function flag(about: About): Parameter<boolean> {
+  return {
+    kind: 'flag',
+    help: about.help,
+    unit: '1',
+    dimension: 'scalar',
+    optional: false,
+    read(cells, name) {
+      const cell = single(required(cells, name), name);
+      if (typeof cell === 'boolean') return cell;
+      if (cell === 0 || cell === 1) return cell === 1;
+      throw new InvalidInput(`${name} must be TRUE or FALSE: got ${shownCell(cell)}`);
+    },
+  };
+}
+
+/** A word, a unit, a formula; a bare number where `orNumber` allows it. */
+export function text(about: About): Parameter<string>;
+export function text(about: About & { readonly orNumber: true }): Parameter<string | number>;
+export function text(about: About & { readonly orNumber?: true }): Parameter<string | number> {
+  return {
+    kind: 'text',
+    help: about.help,
+    unit: about.unit ?? 'text',
+    dimension: 'scalar',
+    optional: false,
+    read(cells, name) {
+      const cell = single(required(cells, name), name);
+      if (typeof cell === 'string' && cell.trim() !== '') return cell.trim();
+      if (about.orNumber && typeof cell === 'number') return cell;
+      throw new InvalidInput(`${name} must be text${about.orNumber ? ' or a number' : ''}: got ${shownCell(cell)}`);
+    },
+  };
+}
+
+/** The value at infinite time: a number, or `"free"` to have it fitted. */
+export type Endpoint = number | 'free' | undefined;
+
+export function endpoint(): Parameter<Endpoint> {
+  return {
+    kind: 'endpoint',
+    help: 'reading at infinite time: a number, or "free" to fit it',
+    unit: 'of the readings',
+    dimension: 'scalar',
+    optional: true,
+    whenOmitted: '0 for a falling column; a rising column needs one',
+    read(cells, name) {
+      if (cells === undefined) return undefined;
+      const cell = single(cells, name);
+      if (cell === null || cell === '') return undefined;
+      if (typeof cell === 'number') return cell;
+      if (typeof cell === 'string' && cell.trim().toLowerCase() === 'free') return 'free';
+      throw new InvalidInput(`${name} must be a number or "free": got ${shownCell(cell)}`);
+    },
+  };
+}
+
+/** Standard uncertainties of the readings: one a reading, or in proportion to each. */
+export type Uncertainties = Column | 'relative' | undefined;
+
+export function uncertainties(): Parameter<Uncertainties> {
+  return {
+    kind: 'uncertainties',
+    help: 'standard uncertainties, one a reading, or "relative" for the same share of each',
+    unit: 'of the readings',
+    dimension: 'matrix',
+    optional: true,
+    whenOmitted: 'equal for all readings',
+    read(cells, name) {
+      if (cells === undefined) return undefined;
+      if (cells.length === 1 && cells[0].length === 1) {
+        const cell = single(cells, name);
+        if (cell === null || cell === '') return undefined;
+        if (typeof cell === 'string' && cell.trim().toLowerCase() === 'relative') return 'relative';
+        throw new InvalidInput(`${name} must be a range, one a reading, or "relative": got ${shownCell(cell)}`);
+      }
+      const read = readColumn(cells);
+      requireLine(read, name);
+      return read;
+    },
+  };
+}
+
+/** Makes a parameter optional: left out (or an empty cell), it takes `fallback`. */
+export function optional<T>(parameter: Parameter<T>): Parameter<T | undefined>;
+export function optional<T, F>(parameter: Parameter<T>, fallback: F, whenOmitted?: string): Parameter<T | F>;
+export function optional<T, F>(parameter: Parameter<T>, fallback?: F, whenOmitted?: string): Parameter<T | F | undefined> {
+  return {
+    ...parameter,
+    optional: true,
+    whenOmitted: whenOmitted ?? (fallback === undefined ? undefined : String(fallback).toUpperCase()),
+    read: (cells, name) => (isLeftOut(cells) ? fallback : parameter.read(cells, name)),
+  };
+}
+
+/** `[detail]`, the last parameter wherever an estimate is given. */
+export const detail = (): Parameter<boolean> =>
+  optional(
+    flag({ help: 'TRUE for a row: value, standard uncertainty, lower 95 %, upper 95 %, degrees of freedom' }),
+    false,
+  );
+
+/** `[coefficient]`, wherever a rate is given. */
+export const stoichiometricNumber = (): Parameter<number | undefined> =>
+  optional(
+    { ...number({ help: 'signed stoichiometric number: −1 a reactant, +1 a product, −2 …' }), read: readStoichiometric },
+    undefined,
+    '−1 if the column falls, +1 if it rises',
+  );
+
+function readStoichiometric(cells: CellRange | undefined, name: string): number {
+  const value = number({ help: '' }).read(cells, name);
+  if (value === 0) throw new InvalidInput(`${name} must not be 0: a species that takes no part has no rate`);
+  return value;
+}
+
+const isLeftOut = (cells: CellRange | undefined): boolean =>
+  cells === undefined || (cells.length === 1 && cells[0].length === 1 && (cells[0][0] === null || cells[0][0] === ''));
+
+function required(cells: CellRange | undefined, name: string): CellRange {
+  if (cells === undefined || cells.length === 0) throw new InvalidInput(`${name} is needed: nothing was given`);
+  return cells;
+}

@@ -1,0 +1,55 @@
+/**
+ * All that the pane asks of a workbook. Two implementations: Excel through Office.js, and the local
+ * workbook. The pane never knows which.
+ */
+import type { CellRange, CellValue } from '../functions/cell';
+import type { Area } from '../functions/address';
+
+/** An area as it stands in the sheet now. `area.sheet` is always given. */
+export interface RangeReading {
+  readonly area: Area & { readonly sheet: string };
+  readonly cells: CellRange;
+}
+
+/** One cell to fill. A spilling formula is written to its first cell; `spills` says how far it will reach. */
+export interface CellToWrite {
+  readonly area: Area & { readonly sheet: string };
+  readonly content: { readonly value: CellValue } | { readonly formula: string };
+  readonly spills?: { readonly rows: number; readonly columns: number };
+  readonly numberFormat?: string;
+}
+
+/** What a write changed, enough to put it back. Opaque to the pane. */
+export interface WriteReceipt {
+  readonly description: string;
+  readonly area: Area & { readonly sheet: string };
+  readonly snapshot: unknown;
+}
+
+/** A write touched cells that are not empty, and nobody said so. Nothing was written. */
+export class CellsInUse extends Error {
+  override readonly name = 'CellsInUse';
+  constructor(readonly areas: readonly string[]) {
+    super(`these cells are not empty: ${areas.join(', ')}`);
+  }
+}
+
+export interface WorkbookPort {
+  /** For the notice line: `Excel`, `local workbook`. */
+  readonly host: string;
+  /** The selected cells, trimmed to the used part of the sheet; `null` when nothing sensible is selected. */
+  selection(): Promise<RangeReading | null>;
+  /** The block of filled cells around the active cell. */
+  regionAroundActiveCell(): Promise<RangeReading | null>;
+  read(area: Area & { readonly sheet: string }): Promise<RangeReading>;
+  /** @returns a function that stops listening */
+  onSelectionChange(listener: () => void): () => void;
+  /** Cells of the area that hold something. */
+  occupied(area: Area & { readonly sheet: string }): Promise<readonly string[]>;
+  /** Writes all or nothing. @throws CellsInUse unless `overwrite` */
+  write(cells: readonly CellToWrite[], options: { readonly overwrite: boolean; readonly description: string }): Promise<WriteReceipt>;
+  /** Puts back what a write changed. */
+  undo(receipt: WriteReceipt): Promise<void>;
+  /** Shows the cell to the person. */
+  reveal(area: Area & { readonly sheet: string }): Promise<void>;
+}

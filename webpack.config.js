@@ -1,0 +1,63 @@
+/**
+ * Three builds:
+ *   addin     what Excel loads: functions and pane in one bundle, one runtime   → dist/addin
+ *   workbook  the local workbook page: grid, pane, functions                    → dist/workbook
+ *   commands  recalc, start and the rest, for Node                              → dist/commands
+ * `webpack --config-name workbook` builds one of them.
+ */
+const path = require('node:path');
+const CopyWebpackPlugin = require('copy-webpack-plugin');
+const HtmlWebpackPlugin = require('html-webpack-plugin');
+const MiniCssExtractPlugin = require('mini-css-extract-plugin');
+const { EsbuildPlugin } = require('esbuild-loader');
+
+const base = (name) => ({
+  name,
+  mode: 'production',
+  context: __dirname,
+  resolve: { extensions: ['.ts', '.js'] },
+  module: {
+    rules: [
+      { test: /\.ts$/, loader: 'esbuild-loader', options: { target: 'es2022' } },
+      { test: /\.css$/, use: [MiniCssExtractPlugin.loader, 'css-loader'] },
+    ],
+  },
+  optimization: { minimizer: [new EsbuildPlugin({ target: 'es2022', css: true })] },
+  output: { path: path.join(__dirname, 'dist', name), filename: '[name].js', clean: true },
+  performance: { hints: false },
+  cache: { type: 'filesystem', cacheDirectory: path.join(__dirname, '.cache', name) },
+});
+
+const addin = {
+  ...base('addin'),
+  entry: { addin: './taskpane/addin.ts' },
+  plugins: [
+    new MiniCssExtractPlugin(),
+    new HtmlWebpackPlugin({ filename: 'taskpane.html', template: './taskpane/taskpane.html', scriptLoading: 'defer' }),
+    new CopyWebpackPlugin({ patterns: ['manifest.xml', 'functions/functions.json', { from: 'assets', to: 'assets' }] }),
+  ],
+};
+
+const workbook = {
+  ...base('workbook'),
+  entry: { workbook: './workbook/page/main.ts' },
+  plugins: [
+    new MiniCssExtractPlugin(),
+    new HtmlWebpackPlugin({ filename: 'index.html', template: './workbook/page/index.html', scriptLoading: 'defer' }),
+    new CopyWebpackPlugin({ patterns: [{ from: 'assets', to: 'assets' }] }),
+  ],
+};
+
+const commands = {
+  ...base('commands'),
+  target: 'node20',
+  entry: {
+    recalc: './workbook/commands/recalc.ts',
+    start: './workbook/commands/start.ts',
+    derive: './scripts/derive.ts',
+  },
+  output: { ...base('commands').output, filename: '[name].cjs' },
+  optimization: { minimize: false },
+};
+
+module.exports = [addin, workbook, commands];
