@@ -1,0 +1,166 @@
+/**
+ * Profile-likelihood limits: how far a quantity can be moved, everything else adapting, before the fit
+ * becomes significantly worse. The limits are where RSS reaches RSS_min [1 + F₀.₉₅(1, ν)/ν].
+ *
+ * Symmetric limits (estimate ± t u) mislead where the surface is skewed, as it is for rate coefficients.
+ *
+ * @see D. M. Bates and D. G. Watts, Nonlinear Regression Analysis and Its Applications (1988), 6.1
+ */
+import type { Estimate } from '../estimate';
+import { findRoot } from '../numerics/findRoot';
+import { studentQuantile } from '../numerics/studentT';
+import type { RateLawFit } from './fit';
+import { reducedHalfLife, shareLeft, shareSlope } from './law';
+import type { ReducedFit } from './reducedFit';
+import { followRate } from './search';
+
+/** Beyond this many standard uncertainties no limit is looked for. */
+const reachOfSearch = 40;
+
+/** k with its profile limits, at a fixed order. */
+export function rateCoefficientEstimate(fit: RateLawFit): Estimate {
+  const { search, order, rateCoefficient, standardUncertainties } = fit;
+  const squaresAt = order === 1 ? (logK: number) => search.fit.at(logK, 1).residualSumOfSquares : profileOfCoefficient(fit);
+  return logEstimate(fit, rateCoefficient, standardUncertainties.rateCoefficient, squaresAt);
+}
+
+/** Half life with its profile limits, at a fixed order: one to one with κ. */
+export function halfLifeEstimate(fit: RateLawFit): Estimate {
+  const { search, order, halfLife, standardUncertainties } = fit;
+  const reduced = Math.log(reducedHalfLife(order));
+  return logEstimate(fit, halfLife, standardUncertainties.halfLife, (logHalfLife) =>
+    search.fit.at(reduced - logHalfLife, order).residualSumOfSquares,
+  );
+}
+
+/** Order with its profile limits; the fit's order must have been free. */
+export function orderEstimate(fit: RateLawFit): Estimate {
+  const { search, order, standardUncertainties } = fit;
+  let followed = search.logRate;
+  const squaresAt = (n: number): number => {
+    followed = followRate(search.fit, n, followed);
+    return search.fit.at(followed, n).residualSumOfSquares;
+  };
+  return limits(fit, order, standardUncertainties.order, order, squaresAt, (n) => n, () => (followed = search.logRate));
+}
+
+function logEstimate(fit: RateLawFit, value: number, uncertainty: number | null, squaresAt: (log: number) => number): Estimate {
+  return limits(fit, value, uncertainty, Math.log(value), squaresAt, Math.exp);
+}
+
+/**
+ * @param at the estimate on the scale that is searched
+ * @param back from that scale to the quantity
+ * @param restart called before each side
+ */
+function limits(
+  { residualSumOfSquares, degreesOfFreedom, search }: RateLawFit,
+  value: number,
+  uncertainty: number | null,
+  at: number,
+  squaresAt: (place: number) => number,
+  back: (place: number) => number,
+  restart: () => void = () => undefined,
+): Estimate {
+  if (uncertainty === null) return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
+  const estimate = { value, standardUncertainty: uncertainty, degreesOfFreedom };
+  // readings that lie on the curve to the last digit leave no room
+  if (residualSumOfSquares <= roundingFloor(search.fit)) return { ...estimate, lower: value, upper: value };
+  const t = studentQuantile(0.975, degreesOfFreedom);
+  const rise = residualSumOfSquares * ((t * t) / degreesOfFreedom);
+  // the root of the rise is nearly straight in the quantity
+  const excess = (place: number): number => Math.sqrt(Math.max(0, squaresAt(place) - residualSumOfSquares)) - Math.sqrt(rise);
+  const step = back === Math.exp ? uncertainty / value : uncertainty;
+  const side = (sign: number): number | null => {
+    restart();
+    const found = limitOn(excess, at, sign * step, t);
+    return found === null ? null : back(found);
+  };
+  return { ...estimate, lower: side(-1), upper: side(1) };
+}
+
+function limitOn(excess: (place: number) => number, at: number, step: number, t: number): number | null {
+  let near = at;
+  for (let reach = t; reach <= reachOfSearch; reach *= 1.5) {
+    const far = at + reach * step;
+    if (excess(far) > 0) return findRoot(excess, near, far, 1e-12 * Math.max(1, Math.abs(at)));
+    near = far;
+  }
+  return null;
+}
+
+/** RSS that rounding alone leaves. */
+export function roundingFloor({ problem }: ReducedFit): number {
+  let sum = 0;
+  for (let i = 0; i < problem.values.length; i++) sum += (problem.rootWeights[i] * problem.values[i]) ** 2;
+  return sum * (8 * Number.EPSILON) ** 2;
+}
+
+/**
+ * RSS as a function of ln k where k belongs to the fitted distance: k = κ|A|¹⁻ⁿ. For a given k the
+ * distance is searched by Gauss–Newton, and κ follows from it.
+ */
+function profileOfCoefficient(fit: RateLawFit): (logK: number) => number {
+  const { problem } = fit.search.fit;
+  let logAmplitude = Math.log(Math.abs(fit.search.amplitude));
+  const sign = Math.sign(fit.search.amplitude);
+  return (logK) => {
+    let squares = Infinity;
+    let step = 0;
+    for (let iteration = 0; iteration < 60; iteration++) {
+      const trial = distanceStep(problem, fit.order, logK, logAmplitude, sign);
+      if (trial.squares > squares) {
+        // a step too far: halve it from where it came
+        logAmplitude -= step / 2;
+        step /= 2;
+        if (Math.abs(step) < 1e-13) break;
+        continue;
+      }
+      squares = trial.squares;
+      step = trial.step;
+      if (Math.abs(step) < 1e-13) break;
+      logAmplitude += step;
+    }
+    return squares;
+  };
+}
+
+/** RSS at one distance and k, and the Gauss–Newton step in the logarithm of the distance. */
+function distanceStep(
+  { times, values, rootWeights, offset, shape }: ReducedFit['problem'],
+  order: number,
+  logK: number,
+  logAmplitude: number,
+  sign: number,
+): { squares: number; step: number } {
+  const amplitude = sign * Math.exp(logAmplitude);
+  const rate = Math.exp(logK + (order - 1) * logAmplitude);
+  const count = times.length;
+  const sense = shape === 'left' ? 1 : -1;
+  let norm = 0;
+  let residualSum = 0;
+  let slopeSum = 0;
+  let squares = 0;
+  let product = 0;
+  let slopeSquares = 0;
+  for (let i = 0; i < count; i++) {
+    const w2 = rootWeights[i] ** 2;
+    const s = rate * times[i];
+    const left = shareLeft(s, order);
+    const g = shape === 'left' ? left : 1 - left;
+    const r = values[i] - amplitude * g;
+    const slope = amplitude * (g + sense * (order - 1) * shareSlope(s, order, left));
+    norm += w2;
+    residualSum += w2 * r;
+    slopeSum += w2 * slope;
+    squares += w2 * r * r;
+    product += w2 * r * slope;
+    slopeSquares += w2 * slope * slope;
+  }
+  if (offset) {
+    squares -= (residualSum * residualSum) / norm;
+    product -= (residualSum * slopeSum) / norm;
+    slopeSquares -= (slopeSum * slopeSum) / norm;
+  }
+  return { squares, step: slopeSquares > 0 ? product / slopeSquares : 0 };
+}

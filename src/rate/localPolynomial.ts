@@ -1,0 +1,132 @@
+/**
+ * Unweighted least-squares polynomial over a window of points, with its slope at one time.
+ *
+ * Built on polynomials that are orthogonal over the window's own times, by their three-term recurrence
+ * (G. E. Forsythe, J. SIAM 5 (1957) 74, doi:10.1137/0105007): no matrix, no loss of digits on uneven
+ * spacing, and no allocation, so that a column of slopes costs little more than a column of means.
+ */
+import { InvalidInput } from '../errors';
+
+export interface LocalFit {
+  /** Height of the polynomial at `at`. */
+  value: number;
+  slope: number;
+  /** Residual sum of squares in the window. */
+  residualSumOfSquares: number;
+  /** Variance of the slope in units of the readings' variance. */
+  slopeVariance: number;
+  /** Variance of the height in units of the readings' variance. */
+  valueVariance: number;
+  degreesOfFreedom: number;
+}
+
+export const emptyLocalFit = (): LocalFit => ({
+  value: 0,
+  slope: 0,
+  residualSumOfSquares: 0,
+  slopeVariance: 0,
+  valueVariance: 0,
+  degreesOfFreedom: 0,
+});
+
+export const highestDegree = 5;
+
+// scratch space for one window, grown as needed
+let current = new Float64Array(64);
+let previous = new Float64Array(64);
+let residuals = new Float64Array(64);
+
+function makeRoom(count: number): void {
+  if (current.length >= count) return;
+  current = new Float64Array(2 * count);
+  previous = new Float64Array(2 * count);
+  residuals = new Float64Array(2 * count);
+}
+
+/**
+ * Fits the points `first … first + count − 1` and writes the result into `fit`.
+ *
+ * @param at time at which height and slope are wanted
+ * @throws InvalidInput when the window holds fewer different times than degree + 1
+ */
+export function fitLocalPolynomial(
+  times: Float64Array,
+  values: Float64Array,
+  first: number,
+  count: number,
+  degree: number,
+  at: number,
+  fit: LocalFit,
+): LocalFit {
+  makeRoom(count);
+  // times are taken from `at` in units of the window's half-width, so that powers keep their digits
+  const scale = Math.max(at - times[first], times[first + count - 1] - at, times[first + count - 1] - times[first]) || 1;
+  fit.value = fit.slope = fit.slopeVariance = fit.valueVariance = 0;
+  for (let i = 0; i < count; i++) {
+    current[i] = 1;
+    previous[i] = 0;
+    residuals[i] = values[first + i];
+  }
+  // at the point itself: height and slope of the current and the previous polynomial
+  let height = 1;
+  let rise = 0;
+  let heightBefore = 0;
+  let riseBefore = 0;
+  let normBefore = 1;
+  for (let k = 0; ; k++) {
+    let norm = 0;
+    let product = 0;
+    let centre = 0;
+    for (let i = 0; i < count; i++) {
+      const p = current[i];
+      const square = p * p;
+      norm += square;
+      product += p * residuals[i];
+      centre += ((times[first + i] - at) / scale) * square;
+    }
+    if (!(norm > 1e-24 * normBefore)) {
+      throw new InvalidInput(`a polynomial of degree ${degree} needs ${degree + 1} different times in its window: got ${k}`);
+    }
+    const share = product / norm;
+    fit.value += share * height;
+    fit.slope += share * rise;
+    fit.valueVariance += (height * height) / norm;
+    fit.slopeVariance += (rise * rise) / norm;
+    for (let i = 0; i < count; i++) residuals[i] -= share * current[i];
+    if (k === degree) break;
+    const alpha = centre / norm;
+    const beta = k === 0 ? 0 : norm / normBefore;
+    for (let i = 0; i < count; i++) {
+      const next = ((times[first + i] - at) / scale - alpha) * current[i] - beta * previous[i];
+      previous[i] = current[i];
+      current[i] = next;
+    }
+    // the same recurrence and its derivative, at t = at where the scaled time is 0
+    const nextHeight = -alpha * height - beta * heightBefore;
+    const nextRise = height - alpha * rise - beta * riseBefore;
+    heightBefore = height;
+    riseBefore = rise;
+    height = nextHeight;
+    rise = nextRise;
+    normBefore = norm;
+  }
+  let sum = 0;
+  for (let i = 0; i < count; i++) sum += residuals[i] * residuals[i];
+  fit.residualSumOfSquares = sum;
+  fit.slope /= scale;
+  fit.slopeVariance /= scale * scale;
+  fit.degreesOfFreedom = count - degree - 1;
+  return fit;
+}
+
+/**
+ * The window of the `count` points nearest to a time, ties to the earlier; times in ascending order.
+ *
+ * @param from where to begin looking, a first index that is not too far right (a column walks forward)
+ * @returns first index
+ */
+export function nearestWindow(times: Float64Array, count: number, at: number, from = 0): number {
+  let first = from;
+  while (first + count < times.length && times[first + count] - at < at - times[first]) first++;
+  return first;
+}

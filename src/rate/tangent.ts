@@ -1,0 +1,98 @@
+/** Rate at one time or along a whole run: the slope of a local polynomial. */
+import { InvalidInput, NotDetermined, shown } from '../errors';
+import type { Estimate } from '../estimate';
+import { studentQuantile } from '../numerics/studentT';
+import { requireDistinctTimes, stoichiometricNumberFor, type Series } from '../series/series';
+import { emptyLocalFit, fitLocalPolynomial, highestDegree, nearestWindow, type LocalFit } from './localPolynomial';
+import { defaultWindow } from './window';
+
+export interface TangentOptions {
+  /** Readings in the window; left out, chosen from the data by {@link defaultWindow}. */
+  readonly points?: number;
+  /** Degree of the polynomial, 1 to 5; 2 when left out. */
+  readonly degree?: number;
+  /** Signed ν of the species; left out, the sign of the trend. */
+  readonly stoichiometricNumber?: number;
+}
+
+interface Window {
+  readonly points: number;
+  readonly degree: number;
+  readonly stoichiometricNumber: number;
+}
+
+function settle(series: Series, { points, degree = 2, stoichiometricNumber }: TangentOptions): Window {
+  if (!Number.isInteger(degree) || degree < 1 || degree > highestDegree) {
+    throw new InvalidInput(`degree must be a whole number from 1 to ${highestDegree}: got ${shown(degree)}`);
+  }
+  requireDistinctTimes(series, degree + 1, `a tangent of degree ${degree}`);
+  const count = series.times.length;
+  if (points !== undefined) {
+    if (!Number.isInteger(points) || points < degree + 1) {
+      throw new InvalidInput(`points must be a whole number, ${degree + 1} or more for degree ${degree}: got ${shown(points)}`);
+    }
+    if (points > count) throw new InvalidInput(`points must not exceed the ${count} readings there are: got ${points}`);
+  }
+  return {
+    points: points ?? defaultWindow(series, degree),
+    degree,
+    stoichiometricNumber: stoichiometricNumberFor(series, stoichiometricNumber),
+  };
+}
+
+/** A polynomial in its window, as a rate of reaction: r = (1/ν) dy/dt with Student's limits. */
+function asRate(fit: LocalFit, stoichiometricNumber: number): Estimate {
+  const value = fit.slope / stoichiometricNumber;
+  const { degreesOfFreedom } = fit;
+  if (degreesOfFreedom === 0) return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
+  const variance = (fit.residualSumOfSquares / degreesOfFreedom) * fit.slopeVariance;
+  const standardUncertainty = Math.sqrt(variance) / Math.abs(stoichiometricNumber);
+  const reach = studentQuantile(0.975, degreesOfFreedom) * standardUncertainty;
+  return { value, standardUncertainty, lower: value - reach, upper: value + reach, degreesOfFreedom };
+}
+
+/**
+ * Rate of reaction at one time: slope of the least-squares polynomial through the nearest readings.
+ *
+ * The standard uncertainty comes from the scatter about the polynomial inside the window; it does not
+ * know of the bend that the polynomial cannot follow, which grows with the window.
+ *
+ * @param series a run, times in any unit
+ * @param time where the rate is wanted, within the run
+ * @returns rate in reading units per time unit, with n − degree − 1 degrees of freedom
+ * @throws InvalidInput for a window that cannot be; NotDetermined outside the run or with too few times
+ * @see A. Savitzky and M. J. E. Golay, Anal. Chem. 36 (1964) 1627, doi:10.1021/ac60214a047 (even spacing);
+ *   W. S. Cleveland, J. Am. Stat. Assoc. 74 (1979) 829 (nearest neighbours)
+ */
+export function tangentRate(series: Series, time: number, options: TangentOptions = {}): Estimate {
+  const { points, degree, stoichiometricNumber } = settle(series, options);
+  const { times, values } = series;
+  requireWithinRun(times, time);
+  const first = nearestWindow(times, points, time);
+  return asRate(fitLocalPolynomial(times, values, first, points, degree, time, emptyLocalFit()), stoichiometricNumber);
+}
+
+/**
+ * The rate at every reading's own time.
+ *
+ * @returns one estimate a reading, in order of time
+ * @throws as {@link tangentRate}
+ */
+export function ratesAlong(series: Series, options: TangentOptions = {}): Estimate[] {
+  const { points, degree, stoichiometricNumber } = settle(series, options);
+  const { times, values } = series;
+  const fit = emptyLocalFit();
+  const rates: Estimate[] = new Array(times.length);
+  for (let i = 0, first = 0; i < times.length; i++) {
+    first = nearestWindow(times, points, times[i], first);
+    rates[i] = asRate(fitLocalPolynomial(times, values, first, points, degree, times[i], fit), stoichiometricNumber);
+  }
+  return rates;
+}
+
+function requireWithinRun(times: Float64Array, time: number): void {
+  const last = times[times.length - 1];
+  if (time < times[0] || time > last) {
+    throw new NotDetermined(`time must lie within the run, ${shown(times[0])} to ${shown(last)}: got ${shown(time)}`);
+  }
+}

@@ -1,0 +1,74 @@
+import { emptyLocalFit, fitLocalPolynomial, nearestWindow } from './localPolynomial';
+import type { Series } from '../series/series';
+
+/**
+ * How many readings a tangent should use when nobody says: the count that makes the mean squared error
+ * of the slopes, bias and scatter together, smallest over the run.
+ *
+ * For each count w the slopes s of degree d are set beside the slopes s⁺ of degree d + 1 over the same
+ * windows. The difference shows the bend that degree d misses; its own scatter is known, since in nested
+ * least squares var(s⁺ − s) = var(s⁺) − var(s). So each window's mean squared error is estimated without
+ * bias as (s⁺ − s)² − σ²[v⁺ − v] + σ²v, and averaged over the readings (the reasoning of C. L. Mallows,
+ * Technometrics 15 (1973) 661, applied to the slope). σ² is the scatter about the polynomials of degree
+ * d + 1 in small windows. The counts tried grow by about a quarter each; the smallest wins a tie.
+ *
+ * @param degree of the tangent
+ * @returns a count from degree + 3 (or all readings, if fewer) up to all readings
+ */
+export function defaultWindow({ times, values }: Series, degree: number): number {
+  const all = times.length;
+  const smallest = smallestWindow(times, degree);
+  if (smallest >= all) return all;
+  const variance = pooledVariance(times, values, Math.min(all, Math.max(smallest, 2 * degree + 3)), degree + 1);
+  let best = { count: smallest, error: Infinity };
+  for (let count = smallest; ; count = nextCount(count, all)) {
+    const error = slopeError(times, values, count, degree, variance);
+    if (error < best.error) best = { count, error };
+    if (count === all) return best.count;
+  }
+}
+
+const nextCount = (count: number, all: number): number => Math.min(all, Math.max(count + 2, Math.round(count * 1.25)));
+
+/** Mean over the run of the estimated squared error of the slopes from windows of `count`. */
+function slopeError(times: Float64Array, values: Float64Array, count: number, degree: number, variance: number): number {
+  const low = emptyLocalFit();
+  const high = emptyLocalFit();
+  let sum = 0;
+  for (let i = 0, first = 0; i < times.length; i++) {
+    first = nearestWindow(times, count, times[i], first);
+    fitLocalPolynomial(times, values, first, count, degree, times[i], low);
+    fitLocalPolynomial(times, values, first, count, degree + 1, times[i], high);
+    sum += (high.slope - low.slope) ** 2 + variance * (2 * low.slopeVariance - high.slopeVariance);
+  }
+  return sum / times.length;
+}
+
+/** Scatter of the readings: residual squares of all windows over their degrees of freedom. */
+function pooledVariance(times: Float64Array, values: Float64Array, count: number, degree: number): number {
+  const fit = emptyLocalFit();
+  let squares = 0;
+  let freedom = 0;
+  for (let first = 0; first + count <= times.length; first++) {
+    fitLocalPolynomial(times, values, first, count, degree, times[first], fit);
+    squares += fit.residualSumOfSquares;
+    freedom += fit.degreesOfFreedom;
+  }
+  return freedom > 0 ? squares / freedom : 0;
+}
+
+/** The smallest count, degree + 3 or more, whose every window can carry a polynomial of degree + 1. */
+function smallestWindow(times: Float64Array, degree: number): number {
+  let count = Math.min(times.length, degree + 3);
+  while (count < times.length && !everyWindowHolds(times, count, degree + 2)) count++;
+  return count;
+}
+
+function everyWindowHolds(times: Float64Array, count: number, distinct: number): boolean {
+  for (let first = 0; first + count <= times.length; first++) {
+    let different = 1;
+    for (let i = first + 1; i < first + count; i++) if (times[i] !== times[i - 1]) different++;
+    if (different < distinct) return false;
+  }
+  return true;
+}
