@@ -5,15 +5,18 @@
 import type { CellRange, CellValue } from '../functions/cell';
 import type { Area } from '../functions/address';
 
-/** An area as it stands in the sheet now. `area.sheet` is always given. */
+/** An area whose sheet is known. */
+export type SheetArea = Area & { readonly sheet: string };
+
+/** An area as it stands in the sheet now. */
 export interface RangeReading {
-  readonly area: Area & { readonly sheet: string };
+  readonly area: SheetArea;
   readonly cells: CellRange;
 }
 
 /** One cell to fill. A spilling formula is written to its first cell; `spills` says how far it will reach. */
 export interface CellToWrite {
-  readonly area: Area & { readonly sheet: string };
+  readonly area: SheetArea;
   readonly content: { readonly value: CellValue } | { readonly formula: string };
   readonly spills?: { readonly rows: number; readonly columns: number };
   readonly numberFormat?: string;
@@ -22,7 +25,7 @@ export interface CellToWrite {
 /** What a write changed, enough to put it back. Opaque to the pane. */
 export interface WriteReceipt {
   readonly description: string;
-  readonly area: Area & { readonly sheet: string };
+  readonly area: SheetArea;
   readonly snapshot: unknown;
 }
 
@@ -41,15 +44,20 @@ export interface WorkbookPort {
   selection(): Promise<RangeReading | null>;
   /** The block of filled cells around the active cell. */
   regionAroundActiveCell(): Promise<RangeReading | null>;
-  read(area: Area & { readonly sheet: string }): Promise<RangeReading>;
+  /** Where the person is, filled or not; `null` when no sheet is shown. */
+  activeCell(): Promise<SheetArea | null>;
+  read(area: SheetArea): Promise<RangeReading>;
   /** @returns a function that stops listening */
   onSelectionChange(listener: () => void): () => void;
   /** Cells of the area that hold something. */
-  occupied(area: Area & { readonly sheet: string }): Promise<readonly string[]>;
+  occupied(area: SheetArea): Promise<readonly string[]>;
   /** Writes all or nothing. @throws CellsInUse unless `overwrite` */
-  write(cells: readonly CellToWrite[], options: { readonly overwrite: boolean; readonly description: string }): Promise<WriteReceipt>;
+  write(
+    cells: readonly CellToWrite[],
+    options: { readonly overwrite: boolean; readonly description: string },
+  ): Promise<WriteReceipt>;
   /** Puts back what a write changed. */
   undo(receipt: WriteReceipt): Promise<void>;
   /** Shows the cell to the person. */
-  reveal(area: Area & { readonly sheet: string }): Promise<void>;
+  reveal(area: SheetArea): Promise<void>;
 }

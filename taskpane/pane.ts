@@ -1,0 +1,53 @@
+/** The pane: draws the steps whenever something changes, and listens to the workbook. */
+import { createActions, type Actions } from './actions';
+import { h } from './h';
+import { patch } from './patch';
+import type { WorkbookPort } from './port';
+import { putInStep } from './steps/putIn';
+import { rateStep } from './steps/rate';
+import { runStep } from './steps/run';
+import { createStore, type State } from './store';
+
+export interface PaneOptions {
+  /** Shows a notice in the host's own way as well. */
+  readonly notify?: (words: string, tone: 'good' | 'bad') => void;
+}
+
+/** @returns a function that takes the pane away again */
+export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: PaneOptions = {}): () => void {
+  const store = createStore();
+  const actions = createActions(store, port);
+  const pane = view(store.state, actions, port.host);
+  root.replaceChildren(pane);
+
+  let shown = store.state.notice;
+  const stopWatching = store.watch((state) => {
+    patch(pane, view(state, actions, port.host));
+    if (state.notice && state.notice !== shown) notify?.(state.notice.words, state.notice.tone);
+    shown = state.notice;
+  });
+  const refresh = (): void => void actions.refresh();
+  const stopListening = port.onSelectionChange(refresh);
+  window.addEventListener('focus', refresh);
+  refresh();
+
+  return () => {
+    stopWatching();
+    stopListening();
+    window.removeEventListener('focus', refresh);
+    root.replaceChildren();
+  };
+}
+
+export function view(state: State, actions: Actions, host: string): HTMLElement {
+  const { notice } = state;
+  return h(
+    'div',
+    { className: 'flaskpace' },
+    h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host)),
+    runStep(state, actions),
+    rateStep(state, actions),
+    putInStep(state, actions),
+    h('p', { className: `notice ${notice?.tone ?? ''}`, role: 'status' }, notice?.words ?? ''),
+  );
+}

@@ -1,0 +1,83 @@
+/** The axes of a small plot, with their names and units. */
+import { plainNumber } from '../format';
+import { svg } from '../h';
+import { linearScale, roundRange, ticks, type Scale } from './scale';
+
+export const size = { width: 300, height: 188 };
+const margin = { left: 46, right: 10, top: 20, bottom: 36 };
+const tickCount = { x: 5, y: 4 };
+
+export interface Frame {
+  readonly x: Scale;
+  readonly y: Scale;
+}
+
+export function frameFor(xs: readonly number[], ys: readonly number[]): Frame {
+  return {
+    x: linearScale(roundRange(xs, tickCount.x), [margin.left, size.width - margin.right]),
+    y: linearScale(roundRange(ys, tickCount.y), [size.height - margin.bottom, margin.top]),
+  };
+}
+
+/** A drawing with axes; `summary` is what someone hears who cannot see it. */
+export function plot(
+  { x, y }: Frame,
+  names: { readonly x: string; readonly y: string },
+  summary: string,
+  ...marks: readonly SVGElement[]
+): SVGElement {
+  const bottom = y.place(y.from);
+  const shape = {
+    viewBox: `0 0 ${size.width} ${size.height}`,
+    class: 'plot',
+    role: 'img',
+    'aria-label': summary,
+  };
+  return svg(
+    'svg',
+    shape,
+    ...ticks(y.from, y.to, tickCount.y).flatMap((value) => [
+      svg('line', {
+        class: 'grid',
+        x1: margin.left,
+        x2: size.width - margin.right,
+        y1: y.place(value),
+        y2: y.place(value),
+      }),
+      label(plainNumber(value), margin.left - 6, y.place(value) + 4, 'end'),
+    ]),
+    ...ticks(x.from, x.to, tickCount.x).flatMap((value) => [
+      svg('line', { class: 'tick', x1: x.place(value), x2: x.place(value), y1: bottom, y2: bottom + 4 }),
+      label(plainNumber(value), x.place(value), bottom + 15, 'middle'),
+    ]),
+    svg('path', { class: 'axis', d: `M${margin.left} ${margin.top}V${bottom}H${size.width - margin.right}` }),
+    label(names.y, 4, 11, 'start', 'name'),
+    label(names.x, size.width - margin.right, size.height - 5, 'end', 'name'),
+    ...marks,
+  );
+}
+
+function label(text: string, x: number, y: number, anchor: string, className = 'number'): SVGElement {
+  return svg('text', { x, y, 'text-anchor': anchor, class: className }, text);
+}
+
+/** Dots as one path of strokes without length: ten thousand cost no more than one element. */
+export function dots(
+  { x, y }: Frame,
+  points: readonly { x: number; y: number }[],
+  className: string,
+): SVGElement {
+  const places = points.map((point) => `M${short(x.place(point.x))} ${short(y.place(point.y))}h0`);
+  return svg('path', { class: className, d: places.join('') });
+}
+
+export function line(
+  { x, y }: Frame,
+  points: readonly { x: number; y: number }[],
+  className: string,
+): SVGElement {
+  const places = points.map((point) => `${short(x.place(point.x))} ${short(y.place(point.y))}`);
+  return svg('path', { class: className, d: places.length > 0 ? `M${places.join('L')}` : '' });
+}
+
+const short = (value: number): string => String(Math.round(value * 10) / 10);

@@ -1,0 +1,103 @@
+/** Labelled controls, drawn the same way in every step. */
+import { h, type Child } from '../h';
+
+export interface TextField {
+  readonly id: string;
+  readonly label: string;
+  readonly value: string;
+  readonly unit?: string;
+  /** What leaving it empty means, shown in the empty field. */
+  readonly whenEmpty?: string;
+  /** What is wrong with it, in words. */
+  readonly problem?: string | null;
+  readonly numeric?: boolean;
+  readonly onInput: (value: string) => void;
+}
+
+export function textField({
+  id,
+  label,
+  value,
+  unit,
+  whenEmpty,
+  problem,
+  numeric = true,
+  onInput,
+}: TextField): HTMLElement {
+  const problemId = `${id}-problem`;
+  return h(
+    'div',
+    { className: 'field' },
+    h('label', { for: id }, unit ? `${label} / ${unit}` : label),
+    h('input', {
+      id,
+      type: 'text',
+      inputmode: numeric ? 'decimal' : 'text',
+      autocomplete: 'off',
+      spellcheck: 'false',
+      value,
+      placeholder: whenEmpty,
+      'aria-invalid': problem ? 'true' : null,
+      'aria-describedby': problem ? problemId : null,
+      oninput: (event) => onInput((event.target as HTMLInputElement).value),
+    }),
+    problem && h('p', { id: problemId, className: 'problem', role: 'alert' }, problem),
+  );
+}
+
+export interface Choice {
+  readonly value: string;
+  readonly label: string;
+}
+
+export function selectField(
+  id: string,
+  label: string,
+  choices: readonly Choice[],
+  chosen: string,
+  onChange: (value: string) => void,
+): HTMLElement {
+  return h(
+    'div',
+    { className: 'field' },
+    h('label', { for: id }, label),
+    h(
+      'select',
+      { id, 'data-chosen': chosen, onchange: (event) => onChange((event.target as HTMLSelectElement).value) },
+      ...choices.map(({ value, label: words }) => h('option', { value, selected: value === chosen }, words)),
+    ),
+  );
+}
+
+export function checkField(
+  id: string,
+  label: string,
+  checked: boolean,
+  onChange: (checked: boolean) => void,
+): HTMLElement {
+  return h(
+    'label',
+    { className: 'check', for: id },
+    h('input', {
+      id,
+      type: 'checkbox',
+      checked,
+      onchange: (event) => onChange((event.target as HTMLInputElement).checked),
+    }),
+    label,
+  );
+}
+
+export function button(label: string, onClick: () => void, className = ''): HTMLElement {
+  return h('button', { type: 'button', className, onclick: onClick }, label);
+}
+
+/** One step of the work, under its heading. */
+export function step(id: string, title: string, ...children: readonly Child[]): HTMLElement {
+  return h(
+    'section',
+    { id, 'aria-labelledby': `${id}-title` },
+    h('h2', { id: `${id}-title` }, title),
+    ...children,
+  );
+}

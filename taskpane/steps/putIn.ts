@@ -1,0 +1,102 @@
+/** Third step: where the formula goes, and what it will fill. */
+import { areaName } from '../../functions/address';
+import type { Actions } from '../actions';
+import { h, type Child } from '../h';
+import { planFor, type Plan } from '../plan';
+import { answerFor } from '../rateCall';
+import type { State } from '../store';
+import { button, checkField, step, textField } from './fields';
+
+const title = '3 Put it in';
+
+export function putInStep(state: State, actions: Actions): HTMLElement {
+  const { table, run, rate, put } = state;
+  if (!table || !run)
+    return step(
+      'put-in',
+      title,
+      h('p', { className: 'hint' }, 'A rate can be written beside its run.'),
+      undoButton(state, actions),
+    );
+  const plan = planFor(table, run, rate, put);
+  const answer = answerFor(table, run, rate);
+  const isReady = typeof plan !== 'string' && answer.kind !== 'refused' && answer.kind !== 'absent';
+  return step(
+    'put-in',
+    title,
+    textField({
+      id: 'target',
+      label: 'Write to cell',
+      value: put.target,
+      numeric: false,
+      problem: typeof plan === 'string' ? plan : null,
+      onInput: (typed) => void actions.changeTarget(typed),
+    }),
+    button('Use the active cell', () => void actions.targetActiveCell(), 'small'),
+    h(
+      'div',
+      { className: 'checks' },
+      checkField(
+        'with-heading',
+        'Heading with unit above',
+        put.withHeading,
+        (withHeading) => void actions.changeOptions({ withHeading }),
+      ),
+      checkField(
+        'with-detail',
+        'Uncertainty and limits beside it',
+        put.withDetail,
+        (withDetail) => void actions.changeOptions({ withDetail }),
+      ),
+    ),
+    ...(typeof plan === 'string' ? [] : preview(plan, put.inUse)),
+    put.question && typeof plan !== 'string'
+      ? question(put.question, actions)
+      : h(
+          'button',
+          { type: 'button', className: 'main', disabled: !isReady, onclick: () => void actions.putIn(false) },
+          'Put it in',
+        ),
+    undoButton(state, actions),
+  );
+}
+
+function preview(plan: Plan, inUse: readonly string[]): Child[] {
+  const headings = plan.cells.flatMap(({ content }) => ('value' in content ? [String(content.value)] : []));
+  return [
+    h(
+      'p',
+      { className: 'hint' },
+      'Fills ',
+      h('span', { className: 'where' }, areaName(plan.area)),
+      headings.length > 0 && `, under “${headings.join('”, “')}”`,
+    ),
+    inUse.length > 0 && h('p', { className: 'warning' }, `Not empty now: ${list(inUse)}`),
+  ];
+}
+
+function question(areas: readonly string[], actions: Actions): HTMLElement {
+  return h(
+    'div',
+    { className: 'question', role: 'alertdialog', 'aria-labelledby': 'overwrite-question' },
+    h('p', { id: 'overwrite-question' }, `Something stands in ${list(areas)}. Replace it?`),
+    h(
+      'div',
+      { className: 'row' },
+      button('Keep it', () => actions.declineOverwrite(), 'main'),
+      button('Replace it', () => void actions.putIn(true)),
+    ),
+  );
+}
+
+const longestList = 4;
+
+const list = (names: readonly string[]): string =>
+  names.length <= longestList
+    ? names.join(', ')
+    : `${names.slice(0, longestList).join(', ')} and ${names.length - longestList} more`;
+
+function undoButton({ receipts }: State, actions: Actions): HTMLElement | null {
+  const last = receipts[receipts.length - 1];
+  return last ? button(`Undo: ${last.description}`, () => void actions.undoLast()) : null;
+}
