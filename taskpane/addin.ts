@@ -1,0 +1,26 @@
+/** What Excel loads: the cell functions at once, the pane when Office is ready; one runtime for both. */
+import { associateAll, keepLoadedWithWorkbook } from '../functions/runtime';
+import { excelPort } from './excel';
+import { hostName, notice } from './host';
+import { mountPane } from './pane';
+import './pane.css';
+
+// not inside onReady: a workbook may calculate before the pane is shown
+associateAll(globalThis);
+
+async function start(root: HTMLElement): Promise<void> {
+  if (typeof Office === 'undefined') {
+    root.textContent = 'Office.js could not be loaded: check the connection, then reopen this pane.';
+    return;
+  }
+  await Office.onReady();
+  const host = hostName();
+  if (host === null) {
+    root.textContent = 'Flaskpace works inside Excel: open it from the Home tab there.';
+    return;
+  }
+  mountPane(root, excelPort(host), { notify: (words, tone) => tone === 'bad' && notice(words) });
+  await keepLoadedWithWorkbook(globalThis);
+}
+
+void start(document.getElementById('pane')!);
