@@ -27,7 +27,7 @@ const fallingCurve = Array.from({ length: 60 }, (_, i) => left + ((right - left)
 
 const touch = 0.36;
 const slope = (fall / pace) * shareLeft(touch);
-const tangent = [-0.22, 0.31].map((step) => [touch + step, curveAt(touch) + slope * step]);
+const tangent = [-0.2, 0.2].map((step) => [touch + step, curveAt(touch) + slope * step]);
 
 function distanceToSegment([px, py], [ax, ay], [bx, by]) {
   const [dx, dy] = [bx - ax, by - ay];

@@ -133,7 +133,7 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
       else store.change({ hint: typeof found === 'string' ? found : '' });
       return;
     }
-    const isNew = found && typeof found === 'object' && areaName(found.area) !== areaName(table.area);
+    const isNew = found && typeof found === 'object' && !isSameBlock(found.area, table.area);
     store.change({ proposal: isNew ? block : null, hint: '' });
   }
 
@@ -182,6 +182,10 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
     refresh: guarded(refresh),
   };
 }
+
+/** A block that begins where the run's does and reaches as far down is the run, grown by what was written beside it. */
+const isSameBlock = (a: SheetArea, b: SheetArea): boolean =>
+  a.sheet === b.sheet && a.row === b.row && a.column === b.column && a.rows === b.rows;
 
 /** Times to begin with: the whole run for an average, the middle reading for a tangent. */
 function startingTimes(table: Table, run: Run): Partial<RateChoice> {

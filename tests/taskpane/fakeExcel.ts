@@ -1,0 +1,209 @@
+/**
+ * Excel's object model over cells in memory, as far as the port uses it, on office-addin-mock: a property
+ * read before load and sync is not there, and what is set takes effect at sync, as in Excel.
+ */
+import { OfficeMockObject } from 'office-addin-mock';
+import { parseArea, type Area } from '../../functions/address';
+import { CellError, type CellValue } from '../../functions/cell';
+import type { BenchSheets } from './portContract';
+
+interface Cell {
+  readonly value: unknown;
+  readonly type: string;
+  readonly formula: unknown;
+  readonly format: string;
+}
+
+const blank: Cell = { value: '', type: 'Empty', formula: '', format: 'General' };
+
+function cellOf(value: CellValue): Cell {
+  if (value === null) return blank;
+  if (value instanceof CellError) return { ...blank, value: value.code, type: 'Error', formula: value.code };
+  const types: Record<string, string> = { number: 'Double', string: 'String', boolean: 'Boolean' };
+  return { ...blank, value, type: types[typeof value], formula: value };
+}
+
+/** What Excel makes of something typed: an apostrophe keeps words words, a fraction is a date. */
+function typed(input: unknown): Cell {
+  if (typeof input !== 'string') return cellOf(input as CellValue);
+  if (input === '') return blank;
+  if (input.startsWith("'")) return cellOf(input.slice(1));
+  if (input.startsWith('=')) return { ...blank, value: 2, type: 'Double', formula: input };
+  return /^\d+\/\d+/.test(input) ? cellOf(45658) : cellOf(input);
+}
+
+type Loose = Record<string, unknown>;
+
+export function fakeExcel(sheets: BenchSheets): { select(reference: string): void } {
+  const names = Object.keys(sheets);
+  const cells = new Map<string, Cell>();
+  const key = (sheet: string, row: number, column: number): string => `${sheet}!${row}!${column}`;
+  for (const [sheet, rows] of Object.entries(sheets)) {
+    rows.forEach((row, r) =>
+      row.forEach((value, c) => value !== null && cells.set(key(sheet, r, c), cellOf(value))),
+    );
+  }
+  let [shownSheet, selected]: [string, Area] = [names[0], { row: 0, column: 0, rows: 1, columns: 1 }];
+  const handlers = new Set<() => Promise<void>>();
+  let created: { mock: OfficeMockObject; commit(): void }[] = [];
+
+  const grid = <T>({ rows, columns }: Area, pick: (r: number, c: number) => T): T[][] =>
+    Array.from({ length: rows }, (_, r) => Array.from({ length: columns }, (_, c) => pick(r, c)));
+
+  function rangeAt(sheet: string, area: Area): Loose {
+    const at = (r: number, c: number): Cell => cells.get(key(sheet, area.row + r, area.column + c)) ?? blank;
+    const pending: (() => void)[] = [];
+    const mock = new OfficeMockObject({
+      rowIndex: area.row,
+      columnIndex: area.column,
+      rowCount: area.rows,
+      columnCount: area.columns,
+      values: grid(area, (r, c) => at(r, c).value),
+      valueTypes: grid(area, (r, c) => at(r, c).type),
+      formulas: grid(area, (r, c) => at(r, c).formula),
+      numberFormat: grid(area, (r, c) => at(r, c).format),
+      clear: () =>
+        pending.push(() => grid(area, (r, c) => cells.delete(key(sheet, area.row + r, area.column + c)))),
+      select: () => pending.push(() => ((shownSheet = sheet), (selected = area))),
+      getCell: (r: number, c: number) =>
+        rangeAt(sheet, { row: area.row + r, column: area.column + c, rows: 1, columns: 1 }),
+      getSurroundingRegion: () => rangeAt(sheet, surrounding(sheet, area)),
+    });
+    created.push({ mock, commit: () => pending.splice(0).forEach((change) => change()) });
+    const put = (rows: unknown[][], merge: (old: Cell, next: unknown) => Cell): void => {
+      if (rows.length !== area.rows || rows[0].length !== area.columns)
+        throw new Error('the shape does not fit the range');
+      pending.push(() =>
+        rows.forEach((row, r) =>
+          row.forEach((next, c) =>
+            cells.set(key(sheet, area.row + r, area.column + c), merge(at(r, c), next)),
+          ),
+        ),
+      );
+    };
+    return settable(mock, {
+      values: (rows) => put(rows, (_, next) => typed(next)),
+      formulas: (rows) => put(rows, (_, next) => typed(next)),
+      numberFormat: (rows) => put(rows, (old, next) => ({ ...old, format: String(next) })),
+    });
+  }
+
+  function surrounding(sheet: string, start: Area): Area {
+    const filled = (row: number, column: number): boolean =>
+      (cells.get(key(sheet, row, column))?.type ?? 'Empty') !== 'Empty';
+    for (let area = start; ;) {
+      const ring = grid({ ...area, rows: area.rows + 2, columns: area.columns + 2 }, (r, c) => [
+        area.row + r - 1,
+        area.column + c - 1,
+      ]);
+      const all = ring.flat().filter(([row, column]) => filled(row, column));
+      const rows = [...all.map(([row]) => row), area.row, area.row + area.rows - 1];
+      const columns = [...all.map(([, column]) => column), area.column, area.column + area.columns - 1];
+      const next = boundsOf(rows, columns);
+      if (next.rows * next.columns === area.rows * area.columns) return area;
+      area = next;
+    }
+  }
+
+  function sheetObject(name: string): Loose {
+    const isThere = names.includes(name);
+    const mock = new OfficeMockObject({
+      name,
+      activate: () => (shownSheet = name),
+      getRangeByIndexes: (row: number, column: number, rows: number, columns: number) =>
+        rangeAt(name, { row, column, rows, columns }),
+      getUsedRangeOrNullObject: () => usedRange(name),
+    });
+    created.push({ mock, commit: () => undefined });
+    return settable(mock, {}, !isThere);
+  }
+
+  function usedRange(name: string): Loose {
+    const places = [...cells].filter(([place, { type }]) => place.startsWith(`${name}!`) && type !== 'Empty');
+    const used = places.map(([place]) => place.split('!').slice(1).map(Number));
+    if (used.length > 0)
+      return rangeAt(
+        name,
+        boundsOf(
+          used.map(([row]) => row),
+          used.map(([, column]) => column),
+        ),
+      );
+    const nothing = new OfficeMockObject({
+      rowIndex: 0,
+      columnIndex: 0,
+      rowCount: 0,
+      columnCount: 0,
+    });
+    created.push({ mock: nothing, commit: () => undefined });
+    return settable(nothing, {}, true);
+  }
+
+  const workbook = {
+    worksheets: {
+      getItemOrNullObject: (name: string) => sheetObject(name),
+      getActiveWorksheet: () => sheetObject(shownSheet),
+    },
+    getSelectedRange: () => rangeAt(shownSheet, selected),
+    getActiveCell: () => rangeAt(shownSheet, { ...selected, rows: 1, columns: 1 }),
+    onSelectionChanged: {
+      add: (handler: () => Promise<void>) => {
+        handlers.add(handler);
+        return { context, remove: () => handlers.delete(handler) };
+      },
+    },
+  };
+  const context = {
+    workbook,
+    async sync() {
+      created.forEach(({ commit }) => commit());
+      await Promise.all(created.map(({ mock }) => mock.sync()));
+    },
+  };
+
+  Object.assign(globalThis, {
+    Excel: {
+      run: async (...args: ((given: typeof context) => Promise<unknown>)[]) => {
+        const result = await args[args.length - 1](context);
+        await context.sync();
+        created = [];
+        return result;
+      },
+      RangeValueType: { empty: 'Empty', error: 'Error' },
+      ClearApplyTo: { contents: 'Contents' },
+    },
+  });
+
+  return {
+    select(reference) {
+      const { sheet = shownSheet, ...area } = parseArea(reference)!;
+      [shownSheet, selected] = [sheet, area];
+      handlers.forEach((handler) => void handler());
+    },
+  };
+}
+
+function boundsOf(rows: readonly number[], columns: readonly number[]): Area {
+  const [row, column] = [Math.min(...rows), Math.min(...columns)];
+  return { row, column, rows: Math.max(...rows) - row + 1, columns: Math.max(...columns) - column + 1 };
+}
+
+/** The mock as the code under test sees it: setting a property is a command; `isNullObject` needs no load of its own. */
+function settable(
+  mock: OfficeMockObject,
+  setters: Record<string, (rows: unknown[][]) => void>,
+  isNullObject = false,
+): Loose {
+  return new Proxy(mock as unknown as Loose, {
+    get(target, property: string) {
+      if (property === 'isNullObject') return isNullObject;
+      const value = target[property];
+      return typeof value === 'function' ? (value as (...args: unknown[]) => unknown).bind(target) : value;
+    },
+    set(_, property: string, value: unknown[][]) {
+      if (!(property in setters)) throw new Error(`${property} cannot be set`);
+      setters[property](value);
+      return true;
+    },
+  });
+}
