@@ -32,12 +32,14 @@ export function plainNumber(value: number, digits = 4): string {
 /**
  * The uncertainty to two digits, the value to the same decimal place.
  *
- * @param uncertainty a standard uncertainty; `null` where the data leave none
+ * @param uncertainty a standard uncertainty; `null` where the data leave none. What is left of one by the
+ *   rounding of the arithmetic, as in invented data without scatter, is not shown
  * @example valueWithUncertainty(0.48123, 0.00231) // '0.4812 ± 0.0023'
  * @see JCGM 100:2008 (GUM), 7.2.6
  */
 export function valueWithUncertainty(value: number, uncertainty: number | null): string {
-  if (uncertainty === null || uncertainty === 0 || !Number.isFinite(uncertainty)) return plainNumber(value);
+  const isRounding = uncertainty !== null && uncertainty <= 1e-10 * Math.abs(value);
+  if (uncertainty === null || isRounding || !Number.isFinite(uncertainty)) return plainNumber(value);
   const exponent = Math.max(exponentOf(value), exponentOf(uncertainty));
   const power = isPlain(exponent) ? 0 : exponent;
   const lastDigit = exponentOf(Number(uncertainty.toPrecision(2))) - 1;

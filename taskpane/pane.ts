@@ -6,6 +6,7 @@ import type { WorkbookPort } from './port';
 import { putInStep } from './steps/putIn';
 import { rateStep } from './steps/rate';
 import { runStep } from './steps/run';
+import { answerOf, remembering, type Scene } from './scene';
 import { createStore, type State } from './store';
 
 export interface PaneOptions {
@@ -17,12 +18,14 @@ export interface PaneOptions {
 export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: PaneOptions = {}): () => void {
   const store = createStore();
   const actions = createActions(store, port);
-  const pane = view(store.state, actions, port.host);
+  const draw = (state: State): HTMLElement => view({ state, answer: answer(state) }, actions, port.host);
+  const answer = remembering(answerOf);
+  const pane = draw(store.state);
   root.replaceChildren(pane);
 
   let shown = store.state.notice;
   const stopWatching = store.watch((state) => {
-    patch(pane, view(state, actions, port.host));
+    patch(pane, draw(state));
     if (state.notice && state.notice !== shown) notify?.(state.notice.words, state.notice.tone);
     shown = state.notice;
   });
@@ -39,15 +42,15 @@ export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: Pan
   };
 }
 
-export function view(state: State, actions: Actions, host: string): HTMLElement {
-  const { notice } = state;
+export function view(scene: Scene, actions: Actions, host: string): HTMLElement {
+  const { notice } = scene.state;
   return h(
     'div',
     { className: 'flaskpace' },
     h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host)),
-    runStep(state, actions),
-    rateStep(state, actions),
-    putInStep(state, actions),
+    runStep(scene.state, actions),
+    rateStep(scene, actions),
+    putInStep(scene, actions),
     h('p', { className: `notice ${notice?.tone ?? ''}`, role: 'status' }, notice?.words ?? ''),
   );
 }

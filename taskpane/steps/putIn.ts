@@ -3,13 +3,13 @@ import { areaName } from '../../functions/address';
 import type { Actions } from '../actions';
 import { h, type Child } from '../h';
 import { planFor, type Plan } from '../plan';
-import { answerFor } from '../rateCall';
+import type { Scene } from '../scene';
 import type { State } from '../store';
 import { button, checkField, step, textField } from './fields';
 
 const title = '3 Put it in';
 
-export function putInStep(state: State, actions: Actions): HTMLElement {
+export function putInStep({ state, answer }: Scene, actions: Actions): HTMLElement {
   const { table, run, rate, put } = state;
   if (!table || !run)
     return step(
@@ -19,8 +19,7 @@ export function putInStep(state: State, actions: Actions): HTMLElement {
       undoButton(state, actions),
     );
   const plan = planFor(table, run, rate, put);
-  const answer = answerFor(table, run, rate);
-  const isReady = typeof plan !== 'string' && answer.kind !== 'refused' && answer.kind !== 'absent';
+  const isReady = typeof plan !== 'string' && (answer?.kind === 'one' || answer?.kind === 'column');
   return step(
     'put-in',
     title,

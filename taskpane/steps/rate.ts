@@ -6,9 +6,10 @@ import { rateUnit } from '../headers';
 import { rateName } from '../plan';
 import { overlayFor } from '../plots/overlay';
 import { ratesPlot, runPlot } from '../plots/runPlot';
-import { answerFor, rateFormula, type Answer, type Rate } from '../rateCall';
+import { rateFormula, type Answer, type Rate } from '../rateCall';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
-import type { RateChoice, RateKind, State } from '../store';
+import type { Scene } from '../scene';
+import type { RateChoice, RateKind } from '../store';
 import { button, step, textField } from './fields';
 import { plainPlot } from './run';
 
@@ -18,9 +19,9 @@ const kinds: readonly (readonly [RateKind, string])[] = [
   ['column', 'Whole column'],
 ];
 
-export function rateStep({ table, run, rate, put }: State, actions: Actions): HTMLElement {
-  if (!table || !run) return step('rate', '2 Rate', h('p', { className: 'hint' }, 'Choose a run first.'));
-  const answer = answerFor(table, run, rate);
+export function rateStep({ state: { table, run, rate, put }, answer }: Scene, actions: Actions): HTMLElement {
+  if (!table || !run || !answer)
+    return step('rate', '2 Rate', h('p', { className: 'hint' }, 'Choose a run first.'));
   const unit = rateUnit(headingOf(table, run.readingColumn), headingOf(table, run.timeColumn));
   return step(
     'rate',
