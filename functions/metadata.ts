@@ -15,6 +15,8 @@ export interface FunctionMetadata {
   readonly helpUrl?: string;
   readonly parameters: readonly ParameterMetadata[];
   readonly result: { readonly type: 'any'; readonly dimensionality: Dimensionality };
+  /** Where its ranges stand in the sheet, so that a blank can be told from a zero. */
+  readonly options?: { readonly requiresParameterAddresses: true };
 }
 
 interface ParameterMetadata {
@@ -47,6 +49,7 @@ function describeFunction(f: CellFunction, helpBase: string | undefined): Functi
     ...(helpBase === undefined ? {} : { helpUrl: `${helpBase}/${f.name.toLowerCase()}` }),
     parameters: Object.entries(f.parameters).map(([name, parameter]) => describeParameter(name, parameter)),
     result: { type: 'any', dimensionality: canSpill(f) ? 'matrix' : 'scalar' },
+    ...(takesRanges(f) ? { options: { requiresParameterAddresses: true } } : {}),
   };
 }
 
@@ -74,3 +77,6 @@ const unitlessUnits = new Set(['', '1', 'any', 'text']);
 
 /** `[detail]` turns one value into a row. */
 const canSpill = (f: CellFunction): boolean => f.result.shape !== 'one value' || 'detail' in f.parameters;
+
+const takesRanges = (f: CellFunction): boolean =>
+  Object.values(f.parameters).some(({ dimension }) => dimension === 'matrix');

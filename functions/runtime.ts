@@ -32,11 +32,25 @@ const allowed: ReadonlySet<ErrorCode> = new Set([
   '#REF!',
 ]);
 
+/** Looks into the sheet: which cells of `'Gas run'!B2:B9` are blank, row by row. */
+export type BlanksIn = (address: string) => Promise<readonly (readonly boolean[])[]>;
+
 /** Does nothing where Excel is not: Office.js did not load, or this is another page. */
-export function associateAll(globals: object): void {
+export function associateAll(globals: object, blanksIn?: BlanksIn): void {
   const host = (globals as Globals).CustomFunctions;
   if (!host || typeof host.associate !== 'function') return;
-  for (const f of catalogue) host.associate(f.name, excelHandler(f, host));
+  const look = blanksIn && sharingLooks(blanksIn);
+  for (const f of catalogue) host.associate(f.name, excelHandler(f, host, look));
+}
+
+/** Twenty formulas over one run look at it once: those that ask while the answer is on its way share it. */
+function sharingLooks(blanksIn: BlanksIn): BlanksIn {
+  const underway = new Map<string, ReturnType<BlanksIn>>();
+  return (address) => {
+    const looking = underway.get(address) ?? blanksIn(address).finally(() => underway.delete(address));
+    underway.set(address, looking);
+    return looking;
+  };
 }
 
 /** A workbook saved with our formulas wakes the functions when it is opened. Does nothing where that is unknown. */
@@ -50,17 +64,58 @@ export async function keepLoadedWithWorkbook(globals: object): Promise<void> {
   }
 }
 
-/** @returns what Excel calls: it hands over every declared argument, null where left out, then its own context object */
-export function excelHandler(f: CellFunction, host: CustomFunctionsHost): (...args: unknown[]) => unknown {
+interface Invocation {
+  /** Where each argument stands in the sheet; nothing for one that is not a reference. */
+  readonly parameterAddresses?: readonly (string | null | undefined)[];
+}
+
+/**
+ * @returns what Excel calls: it hands over every declared argument, null where left out, then its own context
+ *   object. The answer comes at once, or as a promise where a zero had to be looked at in the sheet.
+ */
+export function excelHandler(
+  f: CellFunction,
+  host: CustomFunctionsHost,
+  blanksIn?: BlanksIn,
+): (...args: unknown[]) => unknown {
   const count = Object.keys(f.parameters).length;
-  return (...args) =>
-    forExcel(
-      callFunction(
-        f,
-        args.slice(0, count).map((argument) => fromExcel(argument, host)),
-      ),
-      host,
+  const answer = (args: readonly unknown[]): unknown => {
+    const cells = args.map((argument) => fromExcel(argument, host));
+    return forExcel(callFunction(f, cells), host);
+  };
+  return (...all) => {
+    const args = all.slice(0, count);
+    const addresses = (all[count] as Invocation | undefined)?.parameterAddresses ?? [];
+    const doubtful = args.some((argument, place) => addresses[place] && hasDoubtfulZero(argument));
+    if (!blanksIn || !doubtful) return answer(args);
+    return Promise.all(args.map((argument, place) => withBlanks(argument, addresses[place], blanksIn))).then(
+      answer,
     );
+  };
+}
+
+/** Excel hands a blank inside a range over as 0, which among other numbers would count as a reading. */
+function hasDoubtfulZero(argument: unknown): boolean {
+  if (!Array.isArray(argument)) return false;
+  const cells = argument.flat();
+  return cells.includes(0) && cells.some((cell) => typeof cell === 'number' && cell !== 0);
+}
+
+/** The argument with null for each zero that is a blank cell; as it came where the sheet cannot be read. */
+async function withBlanks(
+  argument: unknown,
+  address: string | null | undefined,
+  blanksIn: BlanksIn,
+): Promise<unknown> {
+  if (!address || !hasDoubtfulZero(argument)) return argument;
+  try {
+    const blanks = await blanksIn(address);
+    return (argument as unknown[][]).map((row, r) =>
+      row.map((cell, c) => (cell === 0 && blanks[r]?.[c] ? null : cell)),
+    );
+  } catch {
+    return argument;
+  }
 }
 
 function fromExcel(argument: unknown, host: CustomFunctionsHost): CellResult | undefined {
@@ -69,7 +124,7 @@ function fromExcel(argument: unknown, host: CustomFunctionsHost): CellResult | u
   return argument.map((row: unknown[]) => row.map((cell) => cellFromExcel(cell, host)));
 }
 
-/** A blank inside a range can arrive as "" or null; as 0 it cannot be told from a zero here. */
+/** A blank inside a range can arrive as "" or null, too. */
 function cellFromExcel(cell: unknown, host: CustomFunctionsHost): CellValue {
   if (cell === null || cell === undefined || cell === '') return null;
   if (typeof cell === 'number' || typeof cell === 'string' || typeof cell === 'boolean') return cell;

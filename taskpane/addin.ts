@@ -1,22 +1,29 @@
 /** What Excel loads: the cell functions at once, the pane when Office is ready; one runtime for both. */
 import { associateAll, keepLoadedWithWorkbook } from '../functions/runtime';
-import { excelPort } from './excel';
+import { blanksIn, excelPort } from './excel';
+import { h } from './h';
 import { hostName, notice } from './host';
 import { mountPane } from './pane';
 import './pane.css';
+import './taskpane.css';
 
 // not inside onReady: a workbook may calculate before the pane is shown
-associateAll(globalThis);
+associateAll(globalThis, async (address) => {
+  await Office.onReady();
+  return blanksIn(address);
+});
 
 async function start(root: HTMLElement): Promise<void> {
   if (typeof Office === 'undefined') {
-    root.textContent = 'Office.js could not be loaded: check the connection, then reopen this pane.';
+    root.replaceChildren(
+      h('p', {}, 'Office.js could not be loaded: check the connection, then reopen this pane.'),
+    );
     return;
   }
   await Office.onReady();
   const host = hostName();
   if (host === null) {
-    root.textContent = 'Flaskpace works inside Excel: open it from the Home tab there.';
+    root.replaceChildren(h('p', {}, 'Flaskpace works inside Excel: open it from the Home tab there.'));
     return;
   }
   mountPane(root, excelPort(host), { notify: (words, tone) => tone === 'bad' && notice(words) });

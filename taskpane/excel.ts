@@ -1,5 +1,5 @@
 /** The workbook port over Office.js, and the only caller of it. Each call is one batch with as few syncs as it can do with. */
-import { cellName, type Area } from '../functions/address';
+import { cellName, parseArea, type Area } from '../functions/address';
 import { CellError, type CellRange, type CellValue, type ErrorCode } from '../functions/cell';
 import {
   CellsInUse,
@@ -42,6 +42,19 @@ export function excelPort(host = 'Excel'): WorkbookPort {
         await context.sync();
       }),
   };
+}
+
+/** Which cells of an area are blank: a custom function is handed 0 for both a blank and a zero. */
+export function blanksIn(address: string): Promise<boolean[][]> {
+  const area = parseArea(address.replace(/\[[^\]]*\]/, '')); // the name of the workbook can stand before the sheet's
+  if (area?.sheet === undefined) return Promise.reject(new Error(`no place in a sheet: ${address}`));
+  const { sheet: name } = area;
+  return Excel.run(async (context) => {
+    const range = rangeOf(context.workbook.worksheets.getItem(name), area);
+    range.load({ valueTypes: true });
+    await context.sync();
+    return range.valueTypes.map((row) => row.map((type) => type === Excel.RangeValueType.empty));
+  });
 }
 
 async function sheetNamed(context: Excel.RequestContext, name: string): Promise<Excel.Worksheet> {

@@ -5,6 +5,7 @@
 import { emptyLocalFit, fitLocalPolynomial, nearestWindow } from '../../src/rate/localPolynomial';
 import { defaultWindow } from '../../src/rate/window';
 import { pairReadings, type Series } from '../../src/series/series';
+import { typedArgument } from '../rateCall';
 import type { RateChoice } from '../store';
 
 export interface Point {
@@ -24,10 +25,11 @@ export interface Overlay {
 
 const nothing: Overlay = { line: [], marks: [], curve: [], window: [] };
 
-const typedNumber = (typed: string): number | undefined => {
-  const value = Number(typed.trim().replace(',', '.').replace(/^[−–]/, '-'));
-  return typed.trim() === '' || !Number.isFinite(value) ? undefined : value;
-};
+/** `undefined` where left out, NaN where it is no number. */
+function typedNumber(typed: string): number | undefined {
+  const { value } = typedArgument(typed);
+  return value === undefined || typeof value === 'number' ? value : NaN;
+}
 
 /** @returns nothing to draw where the fields are not yet filled, or the run does not carry the line */
 export function overlayFor(points: readonly { time: number; value: number }[], rate: RateChoice): Overlay {

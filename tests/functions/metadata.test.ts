@@ -47,8 +47,15 @@ describe.each(metadata.functions.map((f) => [f.name, f] as const))(
       if (f.parameters.some(({ name }) => name === 'detail')) expect(f.result.dimensionality).toBe('matrix');
     });
 
+    test('where ranges come in, their addresses are asked for', () => {
+      const takesRanges = f.parameters.some(({ dimensionality }) => dimensionality === 'matrix');
+      expect(f.options?.requiresParameterAddresses ?? false).toBe(takesRanges);
+    });
+
     test('nothing but what the format knows', () => {
-      expect(Object.keys(f).sort()).toEqual(['description', 'id', 'name', 'parameters', 'result']);
+      const { options, ...others } = f;
+      expect(Object.keys(others).sort()).toEqual(['description', 'id', 'name', 'parameters', 'result']);
+      expect([undefined, { requiresParameterAddresses: true }]).toContainEqual(options);
       for (const parameter of f.parameters) {
         const { optional: isOptional, ...rest } = parameter;
         expect(Object.keys(rest).sort()).toEqual(['description', 'dimensionality', 'name', 'type']);

@@ -106,6 +106,60 @@ test('blank cells in a range, "" or null, are gaps', () => {
   expect(excelHandler(f, host)([[1], [''], [null], [0], ['n/a']], invocation)).toBe(3);
 });
 
+describe('a zero that may be a blank', () => {
+  const gaps = defineFunction({
+    ...shared,
+    name: 'GAPS',
+    parameters: { x: column({ help: '' }), y: column({ help: '' }) },
+    run: ({ x, y }) => [...x.numbers, ...y.numbers].map((value) => [value === null ? 'gap' : value]),
+  });
+  const x = [[0], [10], [0]];
+  const y = [[5], [6], [7]];
+  const at = { parameterAddresses: ['Run!A1:A3', 'Run!B1:B3'] };
+
+  test('is looked at in the sheet, and only there', async () => {
+    const blanksIn = jest.fn(async () => [[false], [false], [true]]);
+    const answer = await excelHandler(gaps, host, blanksIn)(x, y, at);
+    expect(answer).toEqual([[0], [10], ['gap'], [5], [6], [7]]);
+    expect(blanksIn.mock.calls).toEqual([['Run!A1:A3']]);
+  });
+
+  test('costs nothing in columns without zeros, or of zeros alone', () => {
+    const blanksIn = jest.fn();
+    expect(excelHandler(gaps, host, blanksIn)(y, [[0], [0]], at)).toEqual([[5], [6], [7], [0], [0]]);
+    expect(blanksIn).not.toHaveBeenCalled();
+  });
+
+  test('is believed in what is no reference, and where the sheet cannot be read', async () => {
+    const blanksIn = jest.fn(() => Promise.reject(new Error('busy')));
+    expect(excelHandler(gaps, host, blanksIn)(x, y, { parameterAddresses: [null, null] })).toHaveLength(6);
+    expect(excelHandler(gaps, host, blanksIn)(x, y)).toHaveLength(6);
+    expect(await excelHandler(gaps, host, blanksIn)(x, y, at)).toEqual([[0], [10], [0], [5], [6], [7]]);
+  });
+
+  test('an error still reaches the cell as one', async () => {
+    const call = excelHandler(gaps, host, async () => [[false], [true], [true]]);
+    const block = [
+      [0, 1],
+      [2, 3],
+    ];
+    await expect(call(block, y, at)).rejects.toMatchObject({ code: '#VALUE!' });
+  });
+
+  test('formulas that ask at once share one look', async () => {
+    const fresh = new FakeHost();
+    const blanksIn = jest.fn(async () => [[false], [false]]);
+    associateAll({ CustomFunctions: fresh }, blanksIn);
+    const event = fresh.handlers.get('EVENT')!;
+    const times = [[0], [25]];
+    const ask = async (): Promise<unknown> => event(times, null, null, at);
+    await Promise.allSettled([ask(), ask(), ask()]);
+    expect(blanksIn).toHaveBeenCalledTimes(1);
+    await Promise.allSettled([ask()]);
+    expect(blanksIn).toHaveBeenCalledTimes(2);
+  });
+});
+
 test('an error cell in a range is the answer, with its own code', () => {
   const f = defineFunction({
     ...shared,

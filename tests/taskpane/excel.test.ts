@@ -1,4 +1,4 @@
-import { excelPort } from '../../taskpane/excel';
+import { blanksIn, excelPort } from '../../taskpane/excel';
 import { fakeExcel } from './fakeExcel';
 import { portContract, portErrorCells, type BenchSheets, type PortBench } from './portContract';
 
@@ -23,4 +23,19 @@ test('a selection in several pieces is no selection', async () => {
       }),
   });
   expect(await excelPort().selection()).toBeNull();
+});
+
+test('blanksIn tells a blank from a zero', async () => {
+  open({
+    'Gas run': [
+      [0, null],
+      [null, 3],
+    ],
+  });
+  expect(await blanksIn("'Gas run'!A1:B2")).toEqual([
+    [false, true],
+    [true, false],
+  ]);
+  expect(await blanksIn("'[Week 3.xlsx]Gas run'!A1")).toEqual([[false]]);
+  await expect(blanksIn('not a place')).rejects.toThrow('not a place');
 });

@@ -141,6 +141,7 @@ export function fakeExcel(sheets: BenchSheets): { select(reference: string): voi
 
   const workbook = {
     worksheets: {
+      getItem: (name: string) => sheetObject(name),
       getItemOrNullObject: (name: string) => sheetObject(name),
       getActiveWorksheet: () => sheetObject(shownSheet),
     },
