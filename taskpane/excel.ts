@@ -121,16 +121,19 @@ function intersection(a: Area, b: Area): Area | null {
   return rows > 0 && columns > 0 ? { row, column, rows, columns } : null;
 }
 
+/** A block larger than this is no single run, and too much to carry over at every click. */
+const mostCells = 200_000;
+
 async function readRegion(context: Excel.RequestContext): Promise<RangeReading | null> {
   const region = context.workbook.getActiveCell().getSurroundingRegion();
   const sheet = context.workbook.worksheets.getActiveWorksheet();
-  region.load({ ...shape, ...contents });
+  region.load(shape);
   sheet.load({ name: true });
   await context.sync();
-  const cells = cellsOf(region);
-  return cells.flat().every((cell) => cell === null)
-    ? null
-    : { area: { sheet: sheet.name, ...areaOf(region) }, cells };
+  const area = areaOf(region);
+  if (area.rows * area.columns > mostCells) return null;
+  const reading = await readArea(context, sheet, { sheet: sheet.name, ...area });
+  return reading.cells.flat().every((cell) => cell === null) ? null : reading;
 }
 
 async function readActiveCell(context: Excel.RequestContext): Promise<SheetArea | null> {

@@ -29,7 +29,7 @@ export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: Pan
     if (state.notice && state.notice !== shown) notify?.(state.notice.words, state.notice.tone);
     shown = state.notice;
   });
-  const refresh = (): void => void actions.refresh();
+  const refresh = oneAtATime(() => actions.refresh());
   const stopListening = port.onSelectionChange(refresh);
   window.addEventListener('focus', refresh);
   refresh();
@@ -39,6 +39,20 @@ export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: Pan
     stopListening();
     window.removeEventListener('focus', refresh);
     root.replaceChildren();
+  };
+}
+
+/** While one look at the sheet is under way, however many are asked for make one more. */
+function oneAtATime(look: () => Promise<void>): () => void {
+  let isLooking = false;
+  let isAskedAgain = false;
+  return async function ask(): Promise<void> {
+    isAskedAgain = isLooking;
+    if (isLooking) return;
+    isLooking = true;
+    await look();
+    isLooking = false;
+    if (isAskedAgain) await ask();
   };
 }
 

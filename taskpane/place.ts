@@ -23,8 +23,9 @@ export async function withHeadingsAbove(port: WorkbookPort, selection: RangeRead
   return { area: cut, cells: wider.cells.slice(firstText) };
 }
 
-/** How far to the right a free place is looked for. */
-const reach = 60;
+/** How far to the right a free place is looked for; a sheet ends at column XFD. */
+const farthest = 60;
+const lastColumn = 16383;
 
 /** The first cell right of the block where the answer and a heading above it fit into empty cells. */
 export async function firstFree(
@@ -35,6 +36,7 @@ export async function firstFree(
 ): Promise<string> {
   const left = table.area.column + table.area.columns;
   const top = Math.max(run.firstRow - 1, 0);
+  const reach = Math.min(farthest, lastColumn - left + 1);
   const strip: SheetArea = {
     sheet: table.sheet,
     row: top,

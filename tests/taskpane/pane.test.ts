@@ -231,6 +231,14 @@ test('every control has a name, every id stands once', async () => {
   }
 });
 
+test('a hundred moves of the selection are not a hundred looks at the sheet', async () => {
+  await open();
+  const look = jest.spyOn(book.port, 'selection');
+  for (let row = 1; row <= 100; row++) book.select(`A${row}`);
+  await settled();
+  expect(look.mock.calls.length).toBeLessThanOrEqual(2);
+});
+
 test('an unmounted pane leaves nothing and listens no more', async () => {
   await open();
   unmount();
