@@ -1,0 +1,100 @@
+/** Serves the files of one folder, and nothing else, to this machine. */
+import { createReadStream, readdirSync } from 'node:fs';
+import { createServer, type IncomingMessage, type Server, type ServerResponse } from 'node:http';
+import { extname, join } from 'node:path';
+
+const types: Readonly<Record<string, string>> = {
+  '.html': 'text/html; charset=utf-8',
+  '.js': 'text/javascript; charset=utf-8',
+  '.css': 'text/css; charset=utf-8',
+  '.json': 'application/json',
+  '.png': 'image/png',
+  '.svg': 'image/svg+xml',
+  '.woff': 'font/woff',
+  '.woff2': 'font/woff2',
+  '.ttf': 'font/ttf',
+};
+
+/**
+ * Nothing from, and nothing to, any other address. The grid sets styles on its elements and draws
+ * pictures from data addresses; it runs no script but ours.
+ */
+const policy = [
+  "default-src 'self'",
+  "style-src 'self' 'unsafe-inline'",
+  "img-src 'self' data: blob:",
+  "font-src 'self' data:",
+  "object-src 'none'",
+  "base-uri 'none'",
+  "form-action 'none'",
+  "frame-ancestors 'none'",
+].join('; ');
+
+const headers = {
+  'Content-Security-Policy': policy,
+  'X-Content-Type-Options': 'nosniff',
+  'Referrer-Policy': 'no-referrer',
+  'Cross-Origin-Opener-Policy': 'same-origin',
+  'Cross-Origin-Resource-Policy': 'same-origin',
+  'Cache-Control': 'no-store', // the page may have been built anew
+};
+
+export function pageServer(folder: string): Server {
+  // what is not on this list is not served: no path is ever taken from a request
+  const files = filesBelow(folder);
+  return createServer((request, response) => answer(request, response, folder, files));
+}
+
+function answer(
+  request: IncomingMessage,
+  response: ServerResponse,
+  folder: string,
+  files: ReadonlySet<string>,
+): void {
+  if (!isOurs(request.headers.host)) return refuse(response, 421, 'this address is not served here');
+  if (request.method !== 'GET' && request.method !== 'HEAD') {
+    response.setHeader('Allow', 'GET, HEAD');
+    return refuse(response, 405, 'only reading is served here');
+  }
+  const name = fileAsked(request.url ?? '/');
+  if (name === null || !files.has(name)) return refuse(response, 404, 'there is no such file');
+  const type = types[extname(name)];
+  response.writeHead(200, { ...headers, 'Content-Type': type ?? 'application/octet-stream' });
+  if (request.method === 'HEAD') {
+    response.end();
+    return;
+  }
+  const stream = createReadStream(join(folder, name));
+  stream.on('error', () => response.destroy()); // built anew under our feet
+  stream.pipe(response);
+}
+
+function refuse(response: ServerResponse, status: number, words: string): void {
+  response.writeHead(status, { ...headers, 'Content-Type': 'text/plain; charset=utf-8' });
+  response.end(`${words}\n`);
+}
+
+/** Another name that resolves to this machine could belong to a foreign page that reads ours. */
+function isOurs(host: string | undefined): boolean {
+  return /^(127\.0\.0\.1|localhost)(:\d+)?$/.test(host ?? '');
+}
+
+function fileAsked(url: string): string | null {
+  try {
+    const path = decodeURIComponent(url.split(/[?#]/, 1)[0]);
+    return path === '/' ? 'index.html' : path.replace(/^\//, '');
+  } catch {
+    return null; // a broken escape
+  }
+}
+
+/** Paths from the folder on, with `/` between on every system. */
+function filesBelow(folder: string, under = ''): ReadonlySet<string> {
+  const found = new Set<string>();
+  for (const entry of readdirSync(join(folder, under), { withFileTypes: true })) {
+    const path = under === '' ? entry.name : `${under}/${entry.name}`;
+    if (entry.isDirectory()) for (const inner of filesBelow(folder, path)) found.add(inner);
+    else if (entry.isFile()) found.add(path);
+  }
+  return found;
+}
