@@ -48,5 +48,10 @@ export interface CalculatedBook {
   /** What any cell shows: its own value, or what spilled into it. */
   shown(sheet: string, row: number, column: number): CellValue;
   /** Cells whose formula ended in an error, in reading order, with our words where we have them. */
-  readonly errors: readonly { readonly sheet: string; readonly row: number; readonly column: number; readonly error: CellError }[];
+  readonly errors: readonly {
+    readonly sheet: string;
+    readonly row: number;
+    readonly column: number;
+    readonly error: CellError;
+  }[];
 }
