@@ -62,23 +62,19 @@ export function noteMessages(): void {
 
 function note(runtime: FormulaRuntimeService, result: Result): void {
   const { currentUnitId, currentSubUnitId, currentRow, currentColumn } = runtime;
-  const key = sheetKey(currentUnitId, currentSubUnitId);
-  const found = messagesIn(result);
-  const sheet = sheets.get(key) ?? {
-    cells: new Map<string, Entry>(),
-    byFormula: new Map<string, string[]>(),
-  };
+  const sheet = sheetOf(currentUnitId, currentSubUnitId);
   const formula = cellKey(currentRow, currentColumn);
   sheet.byFormula.get(formula)?.forEach((cell) => sheet.cells.delete(cell));
-  sheet.cells.delete(formula);
   sheet.byFormula.delete(formula);
+  sheet.cells.delete(formula);
+  const found = messagesIn(result);
   if (found.length === 0) return;
-  const cells = found.map(({ row, column, code, words }) => {
+  const filled = found.map(({ row, column, code, words }) => {
     const cell = cellKey(currentRow + row, currentColumn + column);
     sheet.cells.set(cell, { code, words });
     return cell;
   });
-  sheet.byFormula.set(formula, cells);
+  sheet.byFormula.set(formula, filled);
 }
 
 function sheetOf(unitId: string, sheetId: string): Sheet {
