@@ -37,7 +37,8 @@ export function areaName({ sheet, row, column, rows, columns }: Area): string {
   return sheet === undefined ? cells : `${quotedSheet(sheet)}!${cells}`;
 }
 
-const reference = /^(?:(?:'((?:[^']|'')+)'|([^'!]+))!)?\$?([A-Z]{1,3})\$?(\d+)(?::\$?([A-Z]{1,3})\$?(\d+))?$/i;
+const reference =
+  /^(?:(?:'((?:[^']|'')+)'|([^'!]+))!)?\$?([A-Z]{1,3})\$?(\d+)(?::\$?([A-Z]{1,3})\$?(\d+))?$/i;
 
 /** `'Gas run'!B2:C14` → its area; `undefined` for what is not a plain A1 reference. */
 export function parseArea(text: string): Area | undefined {

@@ -20,7 +20,9 @@ export function callFunction(f: CellFunction, args: readonly (CellResult | undef
 function readArguments(f: CellFunction, args: readonly (CellResult | undefined)[]): Record<string, unknown> {
   const parameters = Object.entries(f.parameters);
   if (args.length > parameters.length) {
-    throw new InvalidInput(`${typedName(f)} takes ${parameters.length} arguments at most: got ${args.length}`);
+    throw new InvalidInput(
+      `${typedName(f)} takes ${parameters.length} arguments at most: got ${args.length}`,
+    );
   }
   const values: Record<string, unknown> = {};
   parameters.forEach(([name, parameter], place) => {
@@ -43,7 +45,8 @@ function presentable(result: CellResult): CellResult {
 
 function presentableCell(cell: CellValue): CellValue {
   if (typeof cell === 'number') {
-    if (!Number.isFinite(cell)) return new CellError('#N/A', 'the result is too large or too small for a cell to hold');
+    if (!Number.isFinite(cell))
+      return new CellError('#N/A', 'the result is too large or too small for a cell to hold');
     return cell === 0 ? 0 : cell; // −0 would show as -0
   }
   return cell === null ? '' : cell;

@@ -2,7 +2,7 @@
 
 /** The error values of a spreadsheet cell (ISO/IEC 29500-1, 18.18.11, and those added since). */
 export type ErrorCode =
-  | '#N/A' | '#VALUE!' | '#REF!' | '#DIV/0!' | '#NUM!' | '#NAME?' | '#NULL!' | '#CALC!' | '#SPILL!' | '#BUSY!';
+  '#N/A' | '#VALUE!' | '#REF!' | '#DIV/0!' | '#NUM!' | '#NAME?' | '#NULL!' | '#CALC!' | '#SPILL!' | '#BUSY!';
 
 /** An error in a cell, with the words a user reads beside it where the host shows them. */
 export class CellError {

@@ -5,7 +5,9 @@ import type { Parameter } from './parameters';
 export type Parameters = Readonly<Record<string, Parameter>>;
 
 /** The values a function runs on, as its parameters read them. */
-export type Values<P extends Parameters> = { readonly [K in keyof P]: P[K] extends Parameter<infer T> ? T : never };
+export type Values<P extends Parameters> = {
+  readonly [K in keyof P]: P[K] extends Parameter<infer T> ? T : never;
+};
 
 /** The parts of the job, in the order of the work. */
 export type Family = 'reading' | 'rate' | 'order';

@@ -3,7 +3,7 @@
  * default, bounds) and reads its argument from cells, or refuses in words.
  */
 import { InvalidInput, shown } from '../src/errors';
-import { convertQuantity, parseQuantity } from '../src/units';
+import { convertQuantity, isUnit, parseQuantity } from '../src/units';
 import { CellError, shownCell, type CellRange, type CellValue } from './cell';
 import { readColumn, requireLine, type Column } from './column';
 
@@ -16,7 +16,16 @@ export interface Bounds {
 }
 
 export interface Parameter<T = unknown> {
-  readonly kind: 'number' | 'quantity' | 'quantities' | 'column' | 'readings' | 'flag' | 'text' | 'endpoint' | 'uncertainties';
+  readonly kind:
+    | 'number'
+    | 'quantity'
+    | 'quantities'
+    | 'column'
+    | 'readings'
+    | 'flag'
+    | 'text'
+    | 'endpoint'
+    | 'uncertainties';
   readonly help: string;
   /** `1` for a pure number, `of the readings` and the like where the columns decide. */
   readonly unit: string;
@@ -37,7 +46,7 @@ interface About {
 }
 
 /** The single cell of an argument. @throws InvalidInput for a range, the cell's own error for an error cell */
-function single(cells: CellRange, name: string): CellValue {
+export function single(cells: CellRange, name: string): CellValue {
   if (cells.length !== 1 || cells[0].length !== 1) {
     throw new InvalidInput(`${name} must be one value: got ${cells.length} × ${cells[0]?.length ?? 0} cells`);
   }
@@ -46,17 +55,21 @@ function single(cells: CellRange, name: string): CellValue {
   return cell;
 }
 
-const withUnit = (value: number, unit: string): string => (unit === '1' || unit === '' ? shown(value) : `${shown(value)} ${unit}`);
+/** With its unit, where that is one and not the kind of quantity, such as `time`. */
+const withUnit = (value: number, unit: string): string =>
+  unit !== '1' && isUnit(unit) ? `${shown(value)} ${unit}` : shown(value);
 
 /** The rule a bound states: `above 0`, `a whole number from 1 to 5`. */
 export function boundsInWords({ above, atLeast, below, atMost, whole }: Bounds): string {
   const parts: string[] = [];
   if (above !== undefined) parts.push(`above ${above}`);
-  if (atLeast !== undefined) parts.push(`${atLeast} or more`);
+  if (atLeast !== undefined && atMost !== undefined) parts.push(`from ${atLeast} to ${atMost}`);
+  else if (atLeast !== undefined) parts.push(`${atLeast} or more`);
+  else if (atMost !== undefined) parts.push(`${atMost} or less`);
   if (below !== undefined) parts.push(`below ${below}`);
-  if (atMost !== undefined) parts.push(`${atMost} or less`);
   const range = parts.join(' and ');
-  return whole ? `a whole number${range ? `, ${range}` : ''}` : range;
+  if (!whole) return range;
+  return range === '' ? 'a whole number' : `a whole number${range.startsWith('from') ? '' : ','} ${range}`;
 }
 
 function isWithin(value: number, { above, atLeast, below, atMost, whole }: Bounds): boolean {
@@ -96,14 +109,17 @@ export function number(about: About & Bounds): Parameter<number> {
     bounds,
     read(cells, name) {
       const cell = single(required(cells, name), name);
-      if (typeof cell !== 'number') throw new InvalidInput(`${name} must be a number: got ${shownCell(cell)}`);
+      if (typeof cell !== 'number')
+        throw new InvalidInput(`${name} must be a number: got ${shownCell(cell)}`);
       return requireWithin(cell, bounds, name, unit);
     },
   };
 }
 
 /** One physical quantity: a bare number in `unit`, or text with a unit of its own. Read as a number of `to`. */
-export function quantity(about: About & Bounds & { readonly unit: string; readonly to: string }): Parameter<number> {
+export function quantity(
+  about: About & Bounds & { readonly unit: string; readonly to: string },
+): Parameter<number> {
   const { help, unit, to, ...bounds } = about;
   return {
     kind: 'quantity',
@@ -141,13 +157,40 @@ export function quantities(
   };
 }
 
+/**
+ * One quantity for all readings, or one each.
+ *
+ * @returns the quantity that belongs to the reading at a place
+ * @throws InvalidInput where there are neither one nor as many as readings
+ */
+export function requireOneEach(
+  given: readonly number[],
+  readings: Column,
+  name: string,
+): (place: number) => number {
+  if (given.length !== 1 && given.length !== readings.numbers.length) {
+    throw new InvalidInput(
+      `${name} must be one value or one a reading: got ${given.length} for ${readings.numbers.length} readings`,
+    );
+  }
+  return (place) => (given.length === 1 ? given[0] : given[place]);
+}
+
 function readQuantity(
   cell: CellValue,
-  { name, unit, to, bounds, where = '' }: { name: string; unit: string; to: string; bounds: Bounds; where?: string },
+  {
+    name,
+    unit,
+    to,
+    bounds,
+    where = '',
+  }: { name: string; unit: string; to: string; bounds: Bounds; where?: string },
 ): number {
   const inUnit = typeof cell === 'string' && cell.trim() !== '' ? parseQuantity(cell, unit, name) : cell;
   if (typeof inUnit !== 'number') {
-    throw new InvalidInput(`${name} must be a number or text with a unit: ${where ? `${where} is` : 'got'} ${shownCell(cell)}`);
+    throw new InvalidInput(
+      `${name} must be a number or text with a unit: ${where ? `${where} is` : 'got'} ${shownCell(cell)}`,
+    );
   }
   return convertQuantity(requireWithin(inUnit, bounds, name, unit, where), unit, to);
 }
@@ -220,55 +263,9 @@ export function text(about: About & { readonly orNumber?: true }): Parameter<str
       const cell = single(required(cells, name), name);
       if (typeof cell === 'string' && cell.trim() !== '') return cell.trim();
       if (about.orNumber && typeof cell === 'number') return cell;
-      throw new InvalidInput(`${name} must be text${about.orNumber ? ' or a number' : ''}: got ${shownCell(cell)}`);
-    },
-  };
-}
-
-/** The value at infinite time: a number, or `"free"` to have it fitted. */
-export type Endpoint = number | 'free' | undefined;
-
-export function endpoint(): Parameter<Endpoint> {
-  return {
-    kind: 'endpoint',
-    help: 'reading at infinite time: a number, or "free" to fit it',
-    unit: 'of the readings',
-    dimension: 'scalar',
-    optional: true,
-    whenOmitted: '0 for a falling column; a rising column needs one',
-    read(cells, name) {
-      if (cells === undefined) return undefined;
-      const cell = single(cells, name);
-      if (cell === null || cell === '') return undefined;
-      if (typeof cell === 'number') return cell;
-      if (typeof cell === 'string' && cell.trim().toLowerCase() === 'free') return 'free';
-      throw new InvalidInput(`${name} must be a number or "free": got ${shownCell(cell)}`);
-    },
-  };
-}
-
-/** Standard uncertainties of the readings: one a reading, or in proportion to each. */
-export type Uncertainties = Column | 'relative' | undefined;
-
-export function uncertainties(): Parameter<Uncertainties> {
-  return {
-    kind: 'uncertainties',
-    help: 'standard uncertainties, one a reading, or "relative" for the same share of each',
-    unit: 'of the readings',
-    dimension: 'matrix',
-    optional: true,
-    whenOmitted: 'equal for all readings',
-    read(cells, name) {
-      if (cells === undefined) return undefined;
-      if (cells.length === 1 && cells[0].length === 1) {
-        const cell = single(cells, name);
-        if (cell === null || cell === '') return undefined;
-        if (typeof cell === 'string' && cell.trim().toLowerCase() === 'relative') return 'relative';
-        throw new InvalidInput(`${name} must be a range, one a reading, or "relative": got ${shownCell(cell)}`);
-      }
-      const read = readColumn(cells);
-      requireLine(read, name);
-      return read;
+      throw new InvalidInput(
+        `${name} must be text${about.orNumber ? ' or a number' : ''}: got ${shownCell(cell)}`,
+      );
     },
   };
 }
@@ -276,7 +273,11 @@ export function uncertainties(): Parameter<Uncertainties> {
 /** Makes a parameter optional: left out (or an empty cell), it takes `fallback`. */
 export function optional<T>(parameter: Parameter<T>): Parameter<T | undefined>;
 export function optional<T, F>(parameter: Parameter<T>, fallback: F, whenOmitted?: string): Parameter<T | F>;
-export function optional<T, F>(parameter: Parameter<T>, fallback?: F, whenOmitted?: string): Parameter<T | F | undefined> {
+export function optional<T, F>(
+  parameter: Parameter<T>,
+  fallback?: F,
+  whenOmitted?: string,
+): Parameter<T | F | undefined> {
   return {
     ...parameter,
     optional: true,
@@ -285,31 +286,13 @@ export function optional<T, F>(parameter: Parameter<T>, fallback?: F, whenOmitte
   };
 }
 
-/** `[detail]`, the last parameter wherever an estimate is given. */
-export const detail = (): Parameter<boolean> =>
-  optional(
-    flag({ help: 'TRUE for a row: value, standard uncertainty, lower 95 %, upper 95 %, degrees of freedom' }),
-    false,
-  );
+export const isLeftOut = (cells: CellRange | undefined): boolean =>
+  cells === undefined ||
+  (cells.length === 1 && cells[0].length === 1 && (cells[0][0] === null || cells[0][0] === ''));
 
-/** `[coefficient]`, wherever a rate is given. */
-export const stoichiometricNumber = (): Parameter<number | undefined> =>
-  optional(
-    { ...number({ help: 'signed stoichiometric number: −1 a reactant, +1 a product, −2 …' }), read: readStoichiometric },
-    undefined,
-    '−1 if the column falls, +1 if it rises',
-  );
-
-function readStoichiometric(cells: CellRange | undefined, name: string): number {
-  const value = number({ help: '' }).read(cells, name);
-  if (value === 0) throw new InvalidInput(`${name} must not be 0: a species that takes no part has no rate`);
-  return value;
-}
-
-const isLeftOut = (cells: CellRange | undefined): boolean =>
-  cells === undefined || (cells.length === 1 && cells[0].length === 1 && (cells[0][0] === null || cells[0][0] === ''));
-
-function required(cells: CellRange | undefined, name: string): CellRange {
-  if (cells === undefined || cells.length === 0) throw new InvalidInput(`${name} is needed: nothing was given`);
+/** @throws InvalidInput where an argument that is needed was left out */
+export function required(cells: CellRange | undefined, name: string): CellRange {
+  if (cells === undefined || cells.length === 0)
+    throw new InvalidInput(`${name} is needed: nothing was given`);
   return cells;
 }

@@ -87,6 +87,16 @@ function unitOf(text: string, name: string): Quantity {
   }
 }
 
+/** Whether the text is a unit that is known. @example isUnit('mmHg') // true */
+export function isUnit(text: string): boolean {
+  try {
+    unitOf(text, '');
+    return true;
+  } catch {
+    return false;
+  }
+}
+
 /**
  * Reads `"752 mmHg"` as a number of `unit`. Text without a unit is a number of `unit` already.
  *

@@ -1,7 +1,8 @@
 import { eventRate } from '../../src/rate/event';
 import { convertColumn } from '../column';
 import { defineFunction } from '../define';
-import { number, optional, readings, stoichiometricNumber } from '../parameters';
+import { stoichiometricNumber } from '../commonParameters';
+import { number, optional, readings } from '../parameters';
 
 export default defineFunction({
   name: 'EVENT',
@@ -21,5 +22,6 @@ export default defineFunction({
   result: { unit: 'change per time', shape: 'as given' },
   example: { formula: '=PACE.EVENT({40;25})', equals: [[0.025], [0.04]] },
   reference: 'doi:10.1351/goldbook.R05156',
-  run: ({ times, change, coefficient }) => convertColumn(times, (time) => eventRate(time, change, coefficient)),
+  run: ({ times, change, coefficient }) =>
+    convertColumn(times, (time) => eventRate(time, change, coefficient)),
 });

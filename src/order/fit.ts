@@ -59,6 +59,7 @@ export interface RateLawFit {
  */
 export function fitRateLaw(series: Series, options: RateLawOptions): RateLawFit {
   const endpoint = settleEndpoint(series, options);
+  if (endpoint !== 'free') requireAhead(series, trend(series), endpoint);
   if (options.order !== 'free') requireFinite({ order: options.order });
   if (options.start !== undefined && endpoint !== 'free') {
     throw new InvalidInput('start can be fixed only when the endpoint is "free"');
@@ -69,7 +70,9 @@ export function fitRateLaw(series: Series, options: RateLawOptions): RateLawFit 
   const known = options.start?.value ?? (endpoint === 'free' ? 0 : endpoint);
   const fit = new ReducedFit(reducedProblem(series, options, endpoint, known));
   const { order, logRate } = searched(fit, options.order);
-  requireTowardsEnd(fit.at(logRate, order), series, endpoint);
+  if (fit.at(logRate, order).amplitude === 0) {
+    throw new NotDetermined('rate coefficient cannot be told: the readings do not change');
+  }
   return assembled(fit, { order, logRate, parameters, known, endpoint, options });
 }
 
@@ -114,16 +117,15 @@ function rootWeights(series: Series, uncertainties?: Float64Array): Float64Array
   });
 }
 
-/** The fitted change must lead to the end that was given. */
-function requireTowardsEnd(fit: ReducedFit, series: Series, endpoint: number | 'free'): void {
-  if (fit.amplitude === 0) throw new NotDetermined('rate coefficient cannot be told: the readings do not change');
-  if (endpoint === 'free') return;
-  const direction = trend(series);
-  if (direction !== 0 && Math.sign(fit.amplitude) === direction) {
-    throw new InvalidInput(
-      `endpoint must lie ahead of the readings: they ${direction > 0 ? 'rise' : 'fall'} away from ${shown(endpoint)}`,
-    );
-  }
+/** @throws InvalidInput where the end that was given lies behind the readings */
+function requireAhead({ values }: Series, direction: -1 | 0 | 1, endpoint: number): void {
+  const mean = values.reduce((sum, value) => sum + value, 0) / values.length;
+  if (direction === 0 || Math.sign(endpoint - mean) === direction) return;
+  throw new InvalidInput(
+    direction > 0
+      ? `endpoint must lie ahead of the readings: they rise, and ${shown(endpoint)} is not above their mean of ${shown(mean)}`
+      : `endpoint must lie ahead of the readings: they fall, and ${shown(endpoint)} is not below their mean of ${shown(mean)}`,
+  );
 }
 
 interface Found {

@@ -6,6 +6,7 @@
  *
  * @see D. M. Bates and D. G. Watts, Nonlinear Regression Analysis and Its Applications (1988), 6.1
  */
+import { NotDetermined } from '../errors';
 import type { Estimate } from '../estimate';
 import { findRoot } from '../numerics/findRoot';
 import { studentQuantile } from '../numerics/studentT';
@@ -33,7 +34,10 @@ export function halfLifeEstimate(fit: RateLawFit): Estimate {
   );
 }
 
-/** Order with its profile limits; the fit's order must have been free. */
+/**
+ * Order with its profile limits; the fit's order must have been free. Where, on one side, the search
+ * leaves the orders at which a rate coefficient can be told, the data set no limit there.
+ */
 export function orderEstimate(fit: RateLawFit): Estimate {
   const { search, order, standardUncertainties } = fit;
   let followed = search.logRate;
@@ -73,10 +77,20 @@ function limits(
   const step = back === Math.exp ? uncertainty / value : uncertainty;
   const side = (sign: number): number | null => {
     restart();
-    const found = limitOn(excess, at, sign * step, t);
+    const found = whereDetermined(() => limitOn(excess, at, sign * step, t));
     return found === null ? null : back(found);
   };
   return { ...estimate, lower: side(-1), upper: side(1) };
+}
+
+/** `null` where the search strays to places that the data do not determine. */
+function whereDetermined(search: () => number | null): number | null {
+  try {
+    return search();
+  } catch (error) {
+    if (error instanceof NotDetermined) return null;
+    throw error;
+  }
 }
 
 function limitOn(excess: (place: number) => number, at: number, step: number, t: number): number | null {

@@ -1,15 +1,24 @@
 /** The best κ for an order, and the best order: searches over {@link ReducedFit}. */
-import { NotDetermined } from '../errors';
+import { NotDetermined, shown } from '../errors';
 import { findRoot } from '../numerics/findRoot';
-import { reducedHalfLife } from './law';
+import { reducedHalfLife, reducedTimeTo } from './law';
 import type { ReducedFit } from './reducedFit';
 
-/** Range of half lives that is searched, as multiples of the shortest spacing and of the whole run. */
-const shortestHalfLife = 1 / 8;
+/** The slowest decay that is looked for: its half life as a multiple of the run. */
 const longestHalfLife = 1000;
-const scanPoints = 28;
 
-/** ln κ between which the half life is neither far below the spacing nor far beyond the run. */
+/** The fastest: the share it leaves after the shortest spacing, eight half lives at order 1. */
+const leastShareLeft = 2 ** -8;
+
+/** Distance in ln κ between the places that a scan looks at. */
+const scanStep = 0.6;
+
+/**
+ * ln κ between which the change is neither too slow for the run nor over before the second reading.
+ *
+ * The fast end is set by the share left, not by the half life: at a high order most readings of a good
+ * run come many half lives after the start.
+ */
 export function rateBounds(times: Float64Array, order: number): { low: number; high: number } {
   let spacing = Infinity;
   for (let i = 1; i < times.length; i++) {
@@ -17,8 +26,7 @@ export function rateBounds(times: Float64Array, order: number): { low: number; h
     if (step > 0 && step < spacing) spacing = step;
   }
   const span = times[times.length - 1] - times[0];
-  const reduced = reducedHalfLife(order);
-  return { low: Math.log(reduced / (longestHalfLife * span)), high: Math.log(reduced / (shortestHalfLife * spacing)) };
+  return { low: Math.log(reducedHalfLife(order) / (longestHalfLife * span)), high: Math.log(reducedTimeTo(leastShareLeft, order) / spacing) };
 }
 
 /**
@@ -31,14 +39,15 @@ export function rateBounds(times: Float64Array, order: number): { low: number; h
  */
 export function bestRate(fit: ReducedFit, order: number, start?: number): number {
   const { low, high } = rateBounds(fit.problem.times, order);
-  const step = (high - low) / (scanPoints - 1);
+  const steps = Math.ceil((high - low) / scanStep);
+  const step = (high - low) / steps;
   let best = low;
   let least = Infinity;
   const consider = (logRate: number): void => {
     const squares = fit.at(logRate, order).residualSumOfSquares;
     if (squares < least) [best, least] = [logRate, squares];
   };
-  for (let i = 0; i < scanPoints; i++) consider(low + i * step);
+  for (let i = 0; i <= steps; i++) consider(low + i * step);
   if (start !== undefined && start > low && start < high) consider(start);
   const logRate = zeroSlope(fit, order, Math.max(low, best - step), Math.min(high, best + step), best);
   requireDetermined(fit, order, logRate, low, high);
@@ -77,7 +86,7 @@ function requireDetermined(fit: ReducedFit, order: number, logRate: number, low:
   const { rateCurvature, rateLength } = fit.at(logRate, order);
   if (!(rateCurvature > 1e-14 * rateLength) || rateLength === 0) {
     throw new NotDetermined(
-      `rate coefficient cannot be told at order ${order} with a free endpoint: another endpoint and coefficient fit as well`,
+      `rate coefficient cannot be told at order ${shown(order)} with a free endpoint: another endpoint and coefficient fit as well`,
     );
   }
 }
@@ -92,26 +101,45 @@ export const highestOrder = 6;
  * @throws NotDetermined when the best order lies at an end of the range looked through
  */
 export function bestOrder(fit: ReducedFit): { order: number; logRate: number } {
-  const step = 0.5;
-  let best = { order: NaN, logRate: NaN, squares: Infinity };
-  for (let order = lowestOrder; order <= highestOrder + 1e-9; order += step) {
+  const valley = valleyAlongOrders(fit);
+  if (valley.length === 0) throw new NotDetermined('order cannot be told: no order between −1 and 6 gives a rate coefficient');
+  const lowest = valley.reduce((best, place, i) => (place.squares < valley[best].squares ? i : best), 0);
+  // from a start that depends on the order alone: a start handed on would make the slope depend on the path
+  const logRateAt = (order: number): number => followRate(fit, order, interpolated(valley, order));
+  const slope = (order: number): number => fit.at(logRateAt(order), order).orderGradient;
+  const here = valley[lowest].order;
+  const slopeHere = slope(here);
+  if (slopeHere === 0) return { order: here, logRate: logRateAt(here) };
+  const neighbour = valley[slopeHere > 0 ? lowest - 1 : lowest + 1]?.order;
+  if (neighbour === undefined || slope(neighbour) > 0 === slopeHere > 0) {
+    throw new NotDetermined(`order cannot be told: the best lies near ${here}, at the end of what was tried or in a valley without a bottom`);
+  }
+  const order = findRoot(slope, here, neighbour, 1e-14);
+  return { order, logRate: logRateAt(order) };
+}
+
+interface Place {
+  readonly order: number;
+  readonly logRate: number;
+  readonly squares: number;
+}
+
+/** The best ln κ at orders half a step apart, where there is one. */
+function valleyAlongOrders(fit: ReducedFit): Place[] {
+  const places: Place[] = [];
+  for (let order = lowestOrder; order <= highestOrder; order += 0.5) {
     const logRate = tryRate(fit, order);
-    if (logRate === undefined) continue;
-    const squares = fit.at(logRate, order).residualSumOfSquares;
-    if (squares < best.squares) best = { order, logRate, squares };
+    if (logRate !== undefined) places.push({ order, logRate, squares: fit.at(logRate, order).residualSumOfSquares });
   }
-  if (Number.isNaN(best.order)) throw new NotDetermined('order cannot be told: no order between −1 and 6 gives a rate coefficient');
-  let followed = best.logRate;
-  const slope = (order: number): number => {
-    followed = followRate(fit, order, followed);
-    return fit.at(followed, order).orderGradient;
-  };
-  const [from, to] = slope(best.order) > 0 ? [best.order - step, best.order] : [best.order, best.order + step];
-  if (from < lowestOrder || to > highestOrder || slope(from) >= 0 || slope(to) <= 0) {
-    throw new NotDetermined(`order cannot be told: the best lies near ${best.order}, at the end of what was tried or in a valley without a bottom`);
-  }
-  const order = findRoot(slope, from, to, 1e-14);
-  return { order, logRate: followRate(fit, order, followed) };
+  return places;
+}
+
+/** ln κ between the places of a valley, in a straight line from one to the next. */
+function interpolated(valley: readonly Place[], order: number): number {
+  const right = valley.find((place) => place.order >= order) ?? valley[valley.length - 1];
+  const left = valley[Math.max(0, valley.indexOf(right) - 1)];
+  if (left === right) return right.logRate;
+  return left.logRate + ((order - left.order) / (right.order - left.order)) * (right.logRate - left.logRate);
 }
 
 function tryRate(fit: ReducedFit, order: number): number | undefined {

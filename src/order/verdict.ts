@@ -30,39 +30,51 @@ const listed = (orders: readonly number[]): string =>
   orders.length < 2 ? orders.map(shown).join('') : `${orders.slice(0, -1).map(shown).join(', ')} or ${shown(orders[orders.length - 1])}`;
 
 export function verdicts({ orders, fits, weights, freeOrder }: Evidence): { simple: string[]; free: string } {
-  const best = indexOfBest(fits);
-  const followed = best === -1 ? 0 : halfLivesFollowed(fits[best]!);
-  const plausible = orders.filter((_, i) => (weights[i] ?? 0) >= leastWeight);
+  const hasWeight = orders.map((_, i) => (weights[i] ?? 0) >= leastWeight);
+  const followed = leastFollowed(fits, hasWeight);
+  const plausible = orders.filter((order, i) => hasWeight[i] || (freeOrder !== null && includes(freeOrder, order)));
   return {
     simple: orders.map((order, i) => (fits[i] ? simpleVerdict(order, weights[i], { plausible, followed, freeOrder }) : '')),
     free: freeVerdict(orders, freeOrder, followed),
   };
 }
 
-function indexOfBest(fits: readonly (RateLawFit | null)[]): number {
-  let best = -1;
-  fits.forEach((fit, i) => {
-    if (fit && (best === -1 || fit.residualSumOfSquares < fits[best]!.residualSumOfSquares)) best = i;
-  });
-  return best;
+/**
+ * Half lives followed, by the most cautious of the fits that have weight (of all, where none has): with a
+ * free endpoint one order can take for the end what another takes for the first half.
+ */
+function leastFollowed(fits: readonly (RateLawFit | null)[], hasWeight: readonly boolean[]): number {
+  const fitted = fits.filter((fit) => fit !== null);
+  const weighty = fits.filter((fit, i) => fit !== null && hasWeight[i]) as RateLawFit[];
+  const judged = weighty.length > 0 ? weighty : fitted;
+  return judged.length === 0 ? 0 : Math.min(...judged.map(halfLivesFollowed));
 }
 
 interface Standing {
+  /** Orders with weight, and those inside the free order's interval. */
   readonly plausible: readonly number[];
   readonly followed: number;
   readonly freeOrder: Estimate | null;
 }
 
+/**
+ * An order is called the best only where all three agree: it alone has weight, the free order's interval
+ * holds it and no other simple order, and the run was followed far enough. With few readings the weights
+ * alone are too sure of themselves, since they do not count the degrees of freedom of the scatter.
+ */
 function simpleVerdict(order: number, weight: number | null, { plausible, followed, freeOrder }: Standing): string {
   if (weight === null) return 'too few readings to weigh the orders';
-  if (weight < leastWeight) return 'fits less well';
+  if (weight < leastWeight) {
+    return plausible.includes(order) ? 'fits less well, but lies within what a free order allows' : 'fits less well';
+  }
   const rivals = plausible.filter((other) => other !== order);
   if (followed < halfLivesNeeded) {
     const others = rivals.length > 0 ? `cannot be told from order ${listed(rivals)}` : 'best so far, not established';
     return `${others}: ${followed.toFixed(1)} half lives followed, follow ${halfLivesAdvised} or more`;
   }
   if (rivals.length > 0) return `cannot be told from order ${listed(rivals)}`;
-  if (freeOrder && !includes(freeOrder, order)) {
+  if (!freeOrder) return 'best of these, but not established: a free order cannot be told';
+  if (!includes(freeOrder, order)) {
     return `best of these, but a free order of ${shown(Number(freeOrder.value.toPrecision(3)))} fits better`;
   }
   return 'fits best';
@@ -73,7 +85,8 @@ const includes = ({ lower, upper }: Estimate, order: number): boolean =>
 
 function freeVerdict(orders: readonly number[], freeOrder: Estimate | null, followed: number): string {
   if (!freeOrder) return '';
-  const { lower, upper } = freeOrder;
+  const { lower, upper, degreesOfFreedom } = freeOrder;
+  if (degreesOfFreedom === 0) return 'too few readings to set limits to the order';
   if (lower === null || upper === null) return 'the data do not bound the order on both sides';
   const inside = orders.filter((order) => includes(freeOrder, order));
   const range = `95 %: ${lower.toFixed(2)} to ${upper.toFixed(2)}`;

@@ -1,7 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { catalogue } from '../../functions/catalogue';
 import { functionsMetadata, parameterHelp } from '../../functions/metadata';
-import { detail, number, optional } from '../../functions/parameters';
+import { detail } from '../../functions/commonParameters';
+import { number, optional } from '../../functions/parameters';
 
 const metadata = functionsMetadata(catalogue);
 
@@ -70,7 +71,7 @@ test('help tells unit, bounds and what leaving out means', () => {
     'volume (unit: mL; 0 or more)',
   );
   expect(parameterHelp(optional(number({ help: 'degree', whole: true, atLeast: 1, atMost: 5 }), 2))).toBe(
-    'degree (a whole number, 1 or more and 5 or less; left out: 2)',
+    'degree (a whole number from 1 to 5; left out: 2)',
   );
   expect(parameterHelp(detail())).toMatch(/\(left out: FALSE\)$/);
 });

@@ -1,0 +1,55 @@
+import { compareOrders, type OrderRow } from '../../src/order/orders';
+import { orNotAvailable } from '../results';
+import type { CellValue } from '../cell';
+import { defineFunction } from '../define';
+import { seriesOf, uncertaintiesOf } from '../run';
+import { lawMethod, lawParameters, runParameters } from './lawParameters';
+
+const headings = [
+  'order',
+  'rate coefficient',
+  'standard uncertainty',
+  'half life',
+  'R² of straight-line plot',
+  'residual deviation',
+  'AICc weight',
+  'runs test p',
+  'verdict',
+] as const;
+
+export default defineFunction({
+  name: 'ORDERS',
+  family: 'order',
+  summary: 'Which order of reaction a run follows: the simple orders and a free one side by side.',
+  method: `${lawMethod} Orders 0, ½, 1, 1½, 2 and 3 and a free order; the weight is each simple order's share of the evidence by AICc (Hurvich and Tsai 1989), and the runs test asks whether residuals run in a pattern. The verdict rests on the weights, the free order's limits and how many half lives were followed. R² of the straight-line plot is shown, and never decides.`,
+  parameters: { ...runParameters, ...lawParameters },
+  result: { unit: 'as the headings say', shape: 'table' },
+  // halved every 10
+  example: {
+    formula: '=PACE.ORDERS({0;10;20;30;40;50},{32;16;8;4;2;1})',
+    equals: [['order'], [0], [0.5], [1, 0.06931471805599453], [1.5], [2], [3], [1, 0.06931471805599453]],
+  },
+  reference: 'doi:10.1351/goldbook.O04322; doi:10.1093/biomet/76.2.297',
+  run({ times, values, endpoint, uncertainties }) {
+    const series = seriesOf(times, values);
+    const weights = uncertaintiesOf(series, values, uncertainties);
+    const { rows, free } = compareOrders(series, { endpoint, uncertainties: weights });
+    return [[...headings], ...rows.map((row) => cells(row)), cells(free, 'only simple orders are weighed')];
+  },
+});
+
+function cells(row: OrderRow, noWeight = 'too few readings to weigh the orders'): CellValue[] {
+  const { fit, why } = row;
+  const noScatter = why || 'as many parameters as readings leave no scatter to judge by';
+  return [
+    orNotAvailable(row.order, why),
+    orNotAvailable(fit?.rateCoefficient, why),
+    orNotAvailable(fit?.standardUncertainties.rateCoefficient, noScatter),
+    orNotAvailable(fit?.halfLife, why),
+    orNotAvailable(row.straightLineR2, why || 'fewer than three readings are clear of the end'),
+    orNotAvailable(fit?.residualDeviation, noScatter),
+    orNotAvailable(row.weight, why || noWeight),
+    orNotAvailable(row.runsProbability, why || 'too few residuals for a runs test'),
+    row.verdict,
+  ];
+}

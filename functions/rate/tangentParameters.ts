@@ -1,0 +1,21 @@
+/** What TANGENT and ALONG have in common. */
+import { highestDegree } from '../../src/rate/localPolynomial';
+import { stoichiometricNumber } from '../commonParameters';
+import { number, optional } from '../parameters';
+
+export const tangentParameters = {
+  points: optional(
+    number({ help: 'readings the tangent rests on, more than the degree', atLeast: 2, whole: true }),
+    undefined,
+    'the number with the smallest expected error',
+  ),
+  degree: optional(
+    number({ help: 'degree of the polynomial', atLeast: 1, atMost: highestDegree, whole: true }),
+    2,
+  ),
+  coefficient: stoichiometricNumber(),
+};
+
+/** Of the method, which both state. */
+export const tangentMethod =
+  'r = (1/ν) dy/dt by unweighted least squares of a polynomial through the nearest readings, on one side at the ends; a tie goes to the earlier reading. Left out, the number of readings is the one for which the expected squared error of the slopes, bend and scatter together, is smallest over the run. The standard uncertainty comes from the scatter about the polynomial, with points − degree − 1 degrees of freedom; it knows nothing of a bend the polynomial cannot follow.';
