@@ -1,0 +1,72 @@
+import type { SheetModel } from '../engine/engine';
+import { columnWidths, invented, orderTableFormats, scientific, standardHeadings } from './look';
+import { SheetBuilder } from './sheet';
+
+const readings = [
+  [0, 0],
+  [10, 8.8],
+  [20, 16.0],
+  [30, 22.4],
+  [40, 28.0],
+  [50, 32.4],
+  [60, 36.4],
+  [75, 41.0],
+  [90, 44.8],
+  [105, 48.0],
+  [120, 50.0],
+  [140, 52.6],
+  [160, 54.2],
+  [180, 55.2],
+  [210, 56.6],
+  [240, 57.4],
+  [270, 58.0],
+  [300, 58.0],
+  [330, 58.4],
+  [360, 58.6],
+];
+
+/** A tablet's fizz caught over water. */
+export function gasRun(): SheetModel {
+  const last = 4 + readings.length;
+  const [t, n] = [`A5:A${last}`, `C5:C${last}`];
+  const sheet = new SheetBuilder('Gas run')
+    .block('A1', [['Fizz run by gas burette: a quarter tablet in 50 mL of water']], { bold: true })
+    .block('A2', [[invented]])
+    .block('A4', [['t / s', 'V / mL', 'n / mol', 'r / (mol/s)']], { bold: true })
+    .block('A5', readings)
+    .down('C5', [`=PACE.GASVOLUME(B5:B${last},G5,G6,G7)`], { numberFormat: scientific })
+    .down('D5', [`=PACE.ALONG(${t},${n})`], { numberFormat: scientific })
+    .format(`C6:D${last}`, scientific)
+    .block('F4', [['Conditions']], { bold: true })
+    .block('F5', [
+      ['temperature of the gas', '21.4 degC'],
+      ['pressure of the room', '100.6 kPa'],
+      ['over water, so saturated with it', true],
+    ])
+    .block('F9', [['Answers', ...standardHeadings]], { bold: true })
+    .down('F10', [
+      'average rate, 0 to 60 s / (mol/s)',
+      'rate at 60 s / (mol/s)',
+      'rate coefficient, order 1 / s⁻¹',
+      'half life / s',
+    ])
+    .down(
+      'G10',
+      [
+        `=PACE.BETWEEN(${t},${n},0,60,,TRUE)`,
+        `=PACE.TANGENT(${t},${n},60,,,,TRUE)`,
+        `=PACE.COEFFICIENT(${t},${n},1,"free",,TRUE)`,
+      ],
+      { numberFormat: scientific },
+    )
+    .down('G13', [`=PACE.HALFLIFE(${t},${n},1,"free",,TRUE)`], { numberFormat: '0.00' })
+    .format('H10:J12', scientific)
+    .format('H13:J13', '0.00')
+    .format('K10:K13', '0.0')
+    .block('F15', [['Which order?']], { bold: true })
+    .block('F16', [[`=PACE.ORDERS(${t},${n},"free")`]], { bold: true });
+  for (const [column, format] of Object.entries(orderTableFormats)) {
+    sheet.format(`${column}17:${column}23`, format);
+  }
+  return sheet.build(columnWidths);
+}
