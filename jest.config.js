@@ -20,7 +20,7 @@ const base = {
   transform: swc,
   // ml-regression is CommonJS over packages that are ES modules only; strip-bom and node-fetch likewise
   transformIgnorePatterns: [
-    '/node_modules/(?!(is-any-array|ml-[a-z0-9-]+|strip-bom|node-fetch|data-uri-to-buffer|fetch-blob|formdata-polyfill|uuid)/)',
+    '/node_modules/(?!(is-any-array|ml-[a-z0-9-]+|strip-bom|node-fetch|data-uri-to-buffer|fetch-blob|formdata-polyfill|uuid|lodash-es|nanoid|numfmt|ot-json1|unicount|ot-text-unicode|kdbush|rbush|quickselect|cjk-regex)/)',
   ],
 };
 

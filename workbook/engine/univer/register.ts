@@ -7,6 +7,7 @@ import { filedName } from '../names';
 import { AnchorArray, anchorArray } from './anchor';
 import { engineFunction, type EngineFunctionClass } from './engineFunction';
 import { exampleArguments } from './exampleArguments';
+import { containFaults } from './faults';
 import { mendLargeSpills } from './largeSpills';
 import { noteMessages } from './words';
 
@@ -23,6 +24,7 @@ export interface FormulaPluginConfig {
 /** What both plugins must be given; it also mends the engine where our functions need it. */
 export function formulaPluginConfig(): FormulaPluginConfig {
   mendLargeSpills();
+  containFaults();
   noteMessages();
   return {
     function: [...catalogue.flatMap(underBothNames), [AnchorArray, anchorArray]],

@@ -1,0 +1,139 @@
+/** The grid on the screen, over Univer. */
+import {
+  IUndoRedoService,
+  IUniverInstanceService,
+  UniverInstanceType,
+  type IWorkbookData,
+  type Workbook,
+} from '@univerjs/core';
+import { SheetsSelectionsService } from '@univerjs/sheets';
+import { FormulaCalculationSessionService } from '@univerjs/sheets-formula';
+import type { BookModel } from '../engine';
+import type { Grid, GridArea, Stop } from '../grid';
+import { acceptSpillReferences, copySpilledValues, showOwnErrorWords } from './grid/amendments';
+import { bookOf, calculatedOf } from './grid/book';
+import { bootGrid } from './grid/boot';
+import { screenData } from './grid/screenData';
+import { sheetsOf, type Sheets } from './grid/sheets';
+import { writeCells } from './grid/write';
+import { forgetMessages } from './register';
+
+/** A calculation that takes longer goes on; whoever waits for it is let go. */
+const longestWait = 60_000; // ms
+
+/** @param container an element of the page that has a size */
+export function createGrid(container: HTMLElement, { isDark = false } = {}): Grid {
+  const { univer, injector, api } = bootGrid(container, isDark);
+  const selections = injector.get(SheetsSelectionsService);
+  const session = injector.get(FormulaCalculationSessionService);
+  const undo = injector.get(IUndoRedoService);
+  const instances = injector.get(IUniverInstanceService);
+  let sheets: Sheets | null = null;
+  let opened = 0;
+
+  const current = (): Sheets => {
+    if (!sheets) throw new Error('no workbook is open');
+    return sheets;
+  };
+  showOwnErrorWords(injector, ({ location: { subUnitId, row, col } }) => {
+    const sheet = sheets?.workbook.getSheetBySheetId(subUnitId);
+    return String(sheet?.getCellRaw(row, col)?.v ?? '');
+  });
+  copySpilledValues(injector, () => sheets?.workbook ?? null);
+  acceptSpillReferences(injector);
+
+  const calculation = (): Promise<void> =>
+    session.waitForLatestApplied(longestWait).catch(() => undefined) as Promise<void>;
+
+  async function open(book: BookModel): Promise<void> {
+    const before = sheets?.workbook.getUnitId();
+    sheets = null;
+    if (before !== undefined) {
+      instances.disposeUnit(before);
+      forgetMessages(before);
+    }
+    const workbook = univer.createUnit<IWorkbookData, Workbook>(
+      UniverInstanceType.UNIVER_SHEET,
+      screenData(book, `book${++opened}`),
+    );
+    sheets = sheetsOf(workbook, injector);
+    await calculation();
+  }
+
+  function selected(): GridArea | null {
+    const range = selections.getCurrentLastSelection()?.range;
+    const sheet = sheets?.workbook.getActiveSheet();
+    if (!range || !sheet) return null;
+    // a whole row or column has no numbers for its ends
+    const from = (start: number): number => (Number.isFinite(start) ? start : 0);
+    const to = (end: number, count: number): number => (Number.isFinite(end) ? end : count - 1);
+    const [row, column] = [from(range.startRow), from(range.startColumn)];
+    return {
+      sheet: sheet.getName(),
+      row,
+      column,
+      rows: to(range.endRow, sheet.getRowCount()) - row + 1,
+      columns: to(range.endColumn, sheet.getColumnCount()) - column + 1,
+    };
+  }
+
+  return {
+    open,
+    async settled() {
+      await api.getActiveWorkbook()?.endEditingAsync(true);
+      await calculation();
+    },
+    book: () => bookOf(current(), injector),
+    calculated: () => calculatedOf(current()),
+    sheets: () =>
+      current()
+        .workbook.getSheets()
+        .map((sheet) => sheet.getName()),
+    used: (sheet) => current().used(sheet),
+    values({ sheet: name, row, column, rows, columns }) {
+      const sheet = current().named(name);
+      return Array.from({ length: rows }, (_, r) =>
+        Array.from({ length: columns }, (__, c) => current().shown(sheet, row + r, column + c)),
+      );
+    },
+    typed: (place) => current().typed(place),
+    async set(cells) {
+      await writeCells(current(), injector, cells);
+      await calculation();
+    },
+    active() {
+      const primary = selections.getCurrentLastSelection()?.primary;
+      const sheet = sheets?.workbook.getActiveSheet();
+      if (!primary || !sheet) return null;
+      return { sheet: sheet.getName(), row: primary.actualRow, column: primary.actualColumn };
+    },
+    selected,
+    select({ sheet: name, row, column, rows, columns }) {
+      const book = api.getActiveWorkbook();
+      const sheet = book?.getSheetByName(name);
+      if (!book || !sheet) throw new Error(`there is no sheet named "${name}"`);
+      book.setActiveSheet(sheet);
+      sheet.getRange(row, column, rows, columns).activate();
+      sheet.scrollToCell(Math.max(0, row - 3), Math.max(0, column - 2));
+    },
+    focus: () => container.querySelector<HTMLElement>('[data-u-comp="editor"], canvas')?.focus(),
+    setDark: (dark) => api.toggleDarkMode(dark),
+    onSelection: (listener) => stopOf(selections.selectionChanged$.subscribe(() => sheets && listener())),
+    onEdit(listener) {
+      let last = 0;
+      return stopOf(
+        undo.undoRedoStatus$.subscribe(({ undos }) => {
+          if (undos !== last) listener();
+          last = undos;
+        }),
+      );
+    },
+    onCalculated: (listener) => stopOf(session.resultApplied$.subscribe(() => sheets && listener())),
+    dispose: () => univer.dispose(),
+  };
+}
+
+const stopOf =
+  (subscription: { unsubscribe(): void }): Stop =>
+  () =>
+    subscription.unsubscribe();

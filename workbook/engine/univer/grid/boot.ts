@@ -1,0 +1,38 @@
+/** The grid's engine with its toolbar, formula bar and sheet tabs, put into an element of the page. */
+import '@univerjs/preset-sheets-core/lib/index.css';
+import { LocaleType, LogLevel, Univer, type Injector, type Plugin, type PluginCtor } from '@univerjs/core';
+import { FUniver } from '@univerjs/core/facade';
+import { CalculationMode, UniverSheetsCorePreset } from '@univerjs/preset-sheets-core';
+import enUS from '@univerjs/preset-sheets-core/locales/en-US';
+import { formulaPluginConfig } from '../register';
+import { gridTheme } from './theme';
+
+export interface BootedGrid {
+  readonly univer: Univer;
+  readonly injector: Injector;
+  readonly api: FUniver;
+}
+
+export function bootGrid(container: HTMLElement, isDark: boolean): BootedGrid {
+  const univer = new Univer({
+    theme: gridTheme,
+    darkMode: isDark,
+    locale: LocaleType.EN_US,
+    locales: { [LocaleType.EN_US]: enUS },
+    logLevel: LogLevel.ERROR,
+  });
+  const { plugins } = UniverSheetsCorePreset({
+    container,
+    header: true,
+    toolbar: true,
+    ribbonType: 'simple',
+    formulaBar: true,
+    disableAutoFocus: true,
+    formula: { ...formulaPluginConfig(), initialFormulaComputing: CalculationMode.FORCED },
+  });
+  for (const plugin of plugins) {
+    const [constructor, config] = Array.isArray(plugin) ? plugin : [plugin as PluginCtor<Plugin>, undefined];
+    univer.registerPlugin(constructor, config);
+  }
+  return { univer, injector: univer.__getInjector(), api: FUniver.newAPI(univer) };
+}

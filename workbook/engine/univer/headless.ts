@@ -1,0 +1,30 @@
+/** Calculates a workbook without a page: every formula once, in the order they feed each other. */
+import { LocaleType, LogLevel, Univer, UniverInstanceType, type IWorkbookData } from '@univerjs/core';
+import { IDefinedNamesService, UniverFormulaEnginePlugin } from '@univerjs/engine-formula';
+import type { BookModel, CalculatedBook } from '../engine';
+import { Calculation } from './calculation';
+import { readOutcome } from './outcome';
+import { formulaPluginConfig, forgetMessages } from './register';
+import { definedNameEntries, unitId, workbookData } from './snapshot';
+import { trimWholeColumns } from './wholeColumns';
+
+/** One engine a calculation: nothing of one workbook can reach the next, and nothing keeps the process alive. */
+export async function calculate(book: BookModel): Promise<CalculatedBook> {
+  const univer = new Univer({
+    locale: LocaleType.EN_US,
+    locales: { [LocaleType.EN_US]: {} },
+    logLevel: LogLevel.SILENT,
+  });
+  try {
+    trimWholeColumns();
+    univer.registerPlugin(UniverFormulaEnginePlugin, { function: formulaPluginConfig().function });
+    univer.createUnit<IWorkbookData, never>(UniverInstanceType.UNIVER_SHEET, workbookData(book));
+    const injector = univer.__getInjector();
+    const names = injector.get(IDefinedNamesService);
+    for (const entry of definedNameEntries(book)) names.registerDefinedName(unitId, entry);
+    return readOutcome(book, await new Calculation(injector).settle());
+  } finally {
+    univer.dispose();
+    forgetMessages(unitId);
+  }
+}

@@ -1,0 +1,88 @@
+/** What the engine worked out, as the product sees it. */
+import { CellValueType, type ICellData, type Nullable } from '@univerjs/core';
+import type { IAllRuntimeData } from '@univerjs/engine-formula';
+import { CellError, type CellValue } from '../../../functions/cell';
+import type { BookModel, Calculated, CalculatedBook, CellModel, SheetModel } from '../engine';
+import { sheetId, unitId } from './snapshot';
+import { errorCode, isErrorText } from './values';
+import { messageAt } from './words';
+
+interface SheetOutcome {
+  readonly formulas: ReadonlyMap<string, Calculated>;
+  /** Typed values, results and what results spilled. */
+  readonly shown: ReadonlyMap<string, CellValue>;
+}
+
+type CalculatedError = CalculatedBook['errors'][number];
+
+const key = (row: number, column: number): string => `${row},${column}`;
+
+export function readOutcome(book: BookModel, result: IAllRuntimeData): CalculatedBook {
+  const outcomes = new Map(
+    book.sheets.map((sheet, place) => [sheet.name, sheetOutcome(sheet, sheetId(place), result)]),
+  );
+  return {
+    formula: (sheet, row, column) => outcomes.get(sheet)?.formulas.get(key(row, column)),
+    shown: (sheet, row, column) => outcomes.get(sheet)?.shown.get(key(row, column)) ?? null,
+    errors: book.sheets.flatMap((sheet) => errorsIn(sheet, outcomes.get(sheet.name)!)),
+  };
+}
+
+function sheetOutcome(sheet: SheetModel, id: string, result: IAllRuntimeData): SheetOutcome {
+  const results = result.unitData[unitId]?.[id];
+  const spilled = result.arrayFormulaCellData[unitId]?.[id];
+  const ranges = result.arrayFormulaRange[unitId]?.[id];
+  const formulas = new Map<string, Calculated>();
+  const shown = new Map<string, CellValue>();
+
+  for (const { row, column, value, formula } of sheet.cells) {
+    if (formula === undefined) shown.set(key(row, column), value);
+  }
+  for (const { row, column } of sheet.cells.filter(hasFormula)) {
+    const range = ranges?.[row]?.[column];
+    const first = cellValue(results?.getValue(row, column), id, row, column);
+    const blocked = first instanceof CellError && first.code === '#SPILL!';
+    const spill =
+      range && !blocked
+        ? { rows: range.endRow - range.startRow + 1, columns: range.endColumn - range.startColumn + 1 }
+        : { rows: 1, columns: 1 };
+    formulas.set(key(row, column), { value: first, spill });
+    for (let r = row; r < row + spill.rows; r++) {
+      for (let c = column; c < column + spill.columns; c++) {
+        const own = r === row && c === column;
+        shown.set(key(r, c), own ? first : cellValue(spilled?.getValue(r, c), id, r, c));
+      }
+    }
+  }
+  return { formulas, shown };
+}
+
+const hasFormula = (cell: CellModel): boolean => cell.formula !== undefined;
+
+/** A formula that answers nothing shows 0, as a reference to a blank cell does. */
+function cellValue(cell: Nullable<ICellData>, id: string, row: number, column: number): CellValue {
+  const value = cell?.v;
+  if (value === null || value === undefined) return 0;
+  if (cell?.t === CellValueType.BOOLEAN) return value === 1 || value === true;
+  if (typeof value === 'string' && isErrorText(value)) return errorShown(value, id, row, column);
+  return value;
+}
+
+function errorShown(text: string, id: string, row: number, column: number): CellError {
+  const words =
+    text === '#CYCLE!' ? 'the formula depends on its own result' : messageAt(unitId, id, row, column, text);
+  return new CellError(errorCode(text), words ?? '');
+}
+
+function errorsIn(sheet: SheetModel, { formulas }: SheetOutcome): CalculatedError[] {
+  return sheet.cells
+    .filter(hasFormula)
+    .map(({ row, column }) => ({
+      sheet: sheet.name,
+      row,
+      column,
+      error: formulas.get(key(row, column))?.value,
+    }))
+    .filter((entry): entry is CalculatedError => entry.error instanceof CellError)
+    .sort((a, b) => a.row - b.row || a.column - b.column);
+}
