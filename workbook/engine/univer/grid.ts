@@ -21,49 +21,46 @@ import { forgetMessages } from './register';
 /** A calculation that takes longer goes on; whoever waits for it is let go. */
 const longestWait = 60_000; // ms
 
-/** @param container an element of the page that has a size */
-export function createGrid(container: HTMLElement, { isDark = false } = {}): Grid {
+/** @param container an element of the page that has a size; the book is shown in it, and calculated in a while */
+export function createGrid(container: HTMLElement, first: BookModel, { isDark = false } = {}): Grid {
   const { univer, injector, api } = bootGrid(container, isDark);
+  let opened = 0;
+  const show = (book: BookModel): Sheets =>
+    sheetsOf(
+      univer.createUnit<IWorkbookData, Workbook>(
+        UniverInstanceType.UNIVER_SHEET,
+        screenData(book, `book${++opened}`),
+      ),
+      injector,
+    );
+  let sheets = show(first); // the engine's services exist only once it has a workbook
   const selections = injector.get(SheetsSelectionsService);
   const session = injector.get(FormulaCalculationSessionService);
   const undo = injector.get(IUndoRedoService);
   const instances = injector.get(IUniverInstanceService);
-  let sheets: Sheets | null = null;
-  let opened = 0;
 
-  const current = (): Sheets => {
-    if (!sheets) throw new Error('no workbook is open');
-    return sheets;
-  };
   showOwnErrorWords(injector, ({ location: { subUnitId, row, col } }) => {
-    const sheet = sheets?.workbook.getSheetBySheetId(subUnitId);
+    const sheet = sheets.workbook.getSheetBySheetId(subUnitId);
     return String(sheet?.getCellRaw(row, col)?.v ?? '');
   });
-  copySpilledValues(injector, () => sheets?.workbook ?? null);
+  copySpilledValues(injector, () => sheets.workbook);
   acceptSpillReferences(injector);
 
   const calculation = (): Promise<void> =>
     session.waitForLatestApplied(longestWait).catch(() => undefined) as Promise<void>;
 
   async function open(book: BookModel): Promise<void> {
-    const before = sheets?.workbook.getUnitId();
-    sheets = null;
-    if (before !== undefined) {
-      instances.disposeUnit(before);
-      forgetMessages(before);
-    }
-    const workbook = univer.createUnit<IWorkbookData, Workbook>(
-      UniverInstanceType.UNIVER_SHEET,
-      screenData(book, `book${++opened}`),
-    );
-    sheets = sheetsOf(workbook, injector);
+    const before = sheets.workbook.getUnitId();
+    instances.disposeUnit(before);
+    forgetMessages(before);
+    sheets = show(book);
     await calculation();
   }
 
   function selected(): GridArea | null {
     const range = selections.getCurrentLastSelection()?.range;
-    const sheet = sheets?.workbook.getActiveSheet();
-    if (!range || !sheet) return null;
+    const sheet = sheets.workbook.getActiveSheet();
+    if (!range) return null;
     // a whole row or column has no numbers for its ends
     const from = (start: number): number => (Number.isFinite(start) ? start : 0);
     const to = (end: number, count: number): number => (Number.isFinite(end) ? end : count - 1);
@@ -83,28 +80,25 @@ export function createGrid(container: HTMLElement, { isDark = false } = {}): Gri
       await api.getActiveWorkbook()?.endEditingAsync(true);
       await calculation();
     },
-    book: () => bookOf(current(), injector),
-    calculated: () => calculatedOf(current()),
-    sheets: () =>
-      current()
-        .workbook.getSheets()
-        .map((sheet) => sheet.getName()),
-    used: (sheet) => current().used(sheet),
+    book: () => bookOf(sheets, injector),
+    calculated: () => calculatedOf(sheets),
+    sheets: () => sheets.workbook.getSheets().map((sheet) => sheet.getName()),
+    used: (sheet) => sheets.used(sheet),
     values({ sheet: name, row, column, rows, columns }) {
-      const sheet = current().named(name);
+      const sheet = sheets.named(name);
       return Array.from({ length: rows }, (_, r) =>
-        Array.from({ length: columns }, (__, c) => current().shown(sheet, row + r, column + c)),
+        Array.from({ length: columns }, (__, c) => sheets.shown(sheet, row + r, column + c)),
       );
     },
-    typed: (place) => current().typed(place),
+    typed: (place) => sheets.typed(place),
     async set(cells) {
-      await writeCells(current(), injector, cells);
+      await writeCells(sheets, injector, cells);
       await calculation();
     },
     active() {
       const primary = selections.getCurrentLastSelection()?.primary;
-      const sheet = sheets?.workbook.getActiveSheet();
-      if (!primary || !sheet) return null;
+      const sheet = sheets.workbook.getActiveSheet();
+      if (!primary) return null;
       return { sheet: sheet.getName(), row: primary.actualRow, column: primary.actualColumn };
     },
     selected,
@@ -118,7 +112,7 @@ export function createGrid(container: HTMLElement, { isDark = false } = {}): Gri
     },
     focus: () => container.querySelector<HTMLElement>('[data-u-comp="editor"], canvas')?.focus(),
     setDark: (dark) => api.toggleDarkMode(dark),
-    onSelection: (listener) => stopOf(selections.selectionChanged$.subscribe(() => sheets && listener())),
+    onSelection: (listener) => stopOf(selections.selectionChanged$.subscribe(() => listener())),
     onEdit(listener) {
       let last = 0;
       return stopOf(
@@ -128,7 +122,7 @@ export function createGrid(container: HTMLElement, { isDark = false } = {}): Gri
         }),
       );
     },
-    onCalculated: (listener) => stopOf(session.resultApplied$.subscribe(() => sheets && listener())),
+    onCalculated: (listener) => stopOf(session.resultApplied$.subscribe(() => listener())),
     dispose: () => univer.dispose(),
   };
 }

@@ -24,14 +24,14 @@ export function showOwnErrorWords(injector: Injector, shownAt: (alert: ICellAler
 const heightFor = (words: string): number => 54 + 20 * Math.ceil(words.length / 40);
 
 /** A copied spill is copied as what it shows; the grid alone would copy blanks. */
-export function copySpilledValues(injector: Injector, workbook: () => Workbook | null): IDisposable {
+export function copySpilledValues(injector: Injector, workbook: () => Workbook): IDisposable {
   const model = injector.get(FormulaDataModel);
   return injector.get(ISheetClipboardService).addClipboardHook({
     id: 'flaskpace-spilled-values',
     getCellValueBySpecialMatrix: (row: number, column: number) => {
       const book = workbook();
-      const sheetId = book?.getActiveSheet()?.getSheetId();
-      if (!book || !sheetId) return undefined;
+      const sheetId = book.getActiveSheet()?.getSheetId();
+      if (!sheetId) return undefined;
       const cell = model.getArrayFormulaCellData()?.[book.getUnitId()]?.[sheetId]?.[row]?.[column];
       return cell?.v === undefined || cell.v === null ? undefined : { v: cell.v, t: cell.t };
     },

@@ -1,0 +1,118 @@
+/** The workbook on the page as a document: opened, changed, saved. */
+import type { BookModel, CalculatedBook } from '../engine/engine';
+import type { Grid } from '../engine/grid';
+import { chooseFile, saveFile } from './files';
+import { ask } from './question';
+
+/** How a workbook becomes a file and back. */
+export interface FileFormat {
+  /** @throws an Error whose words say what is wrong with the file */
+  read(bytes: Uint8Array): BookModel;
+  create(book: BookModel, calculated: CalculatedBook): Uint8Array;
+  /** The original with what has changed since, and everything else in it as it was. */
+  update(original: Uint8Array, before: BookModel, now: BookModel, calculated: CalculatedBook): Uint8Array;
+}
+
+export interface DocumentView {
+  showFile(name: string, isUnsaved: boolean): void;
+  say(words: string, tone?: 'good' | 'bad'): void;
+}
+
+export interface Documents {
+  open(): Promise<void>;
+  saveAs(): Promise<void>;
+  demo(): Promise<void>;
+  readonly isUnsaved: boolean;
+}
+
+interface Shown {
+  readonly name: string;
+  /** The file it was opened from, and what stood in it; a demo comes from none. */
+  readonly original?: { readonly bytes: Uint8Array; readonly book: BookModel };
+}
+
+const demoName = 'demo.xlsx';
+
+/** @param grid shows the demo now */
+export function documentsOf(
+  grid: Grid,
+  format: FileFormat,
+  demoWorkbook: () => BookModel,
+  view: DocumentView,
+): Documents {
+  let shown: Shown = { name: demoName };
+  let isUnsaved = false;
+  const mark = (unsaved: boolean): void => {
+    isUnsaved = unsaved;
+    view.showFile(shown.name, isUnsaved);
+  };
+  mark(false);
+  grid.onEdit(() => mark(true));
+
+  /** What goes wrong with a file is said in one sentence, and the sheet stays as it is. */
+  const guarded = (action: () => Promise<void>, failed: string) => async (): Promise<void> => {
+    view.say('');
+    try {
+      await action();
+    } catch (error) {
+      view.say(`${failed}: ${error instanceof Error ? error.message : String(error)}`, 'bad');
+    }
+  };
+
+  async function show(next: Shown, book: BookModel): Promise<void> {
+    await grid.open(book);
+    shown = next;
+    mark(false);
+    grid.focus();
+  }
+
+  async function mayReplace(): Promise<boolean> {
+    if (!isUnsaved) return true;
+    const answer = await ask(`${shown.name} holds changes that are not saved.`, [
+      'Save as…',
+      'Go on without saving',
+      'Stay here',
+    ]);
+    if (answer === 'Save as…') return save();
+    return answer === 'Go on without saving';
+  }
+
+  async function open(): Promise<void> {
+    const file = await chooseFile();
+    if (!file) return;
+    const book = format.read(file.bytes);
+    if (await mayReplace()) await show({ name: file.name, original: { bytes: file.bytes, book } }, book);
+  }
+
+  async function bytesNow(): Promise<Uint8Array> {
+    await grid.settled();
+    const [now, calculated] = [grid.book(), grid.calculated()];
+    const { original } = shown;
+    return original
+      ? format.update(original.bytes, original.book, now, calculated)
+      : format.create(now, calculated);
+  }
+
+  /** @returns whether it was saved */
+  async function save(): Promise<boolean> {
+    const name = await saveFile(shown.name, bytesNow);
+    if (name === null) return false;
+    shown = { ...shown, name };
+    mark(false);
+    view.say(`saved as ${name}`);
+    return true;
+  }
+
+  async function demo(): Promise<void> {
+    if (await mayReplace()) await show({ name: demoName }, demoWorkbook());
+  }
+
+  return {
+    open: guarded(open, 'the file was not opened'),
+    saveAs: guarded(async () => void (await save()), 'the file was not saved'),
+    demo: guarded(demo, 'the demo was not opened'),
+    get isUnsaved() {
+      return isUnsaved;
+    },
+  };
+}

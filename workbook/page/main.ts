@@ -1,0 +1,46 @@
+/** The local workbook: a grid with every PACE function live, and the pane beside it. */
+import { mountPane } from '../../taskpane/pane';
+import '../../taskpane/pane.css';
+import { demoWorkbook } from '../demo/demo';
+import { createGrid } from '../engine/univer/grid';
+import { localPort } from '../localPort';
+import { followActiveCell } from './cellLine';
+import { documentsOf } from './documents';
+import { fileFormat } from './fileFormat';
+import './page.css';
+import { moveBetween } from './regions';
+import { offerToScripts } from './scripting';
+import { fillStrip } from './strip';
+
+const part = (id: string): HTMLElement => document.getElementById(id)!;
+
+async function start(): Promise<void> {
+  const dark = window.matchMedia('(prefers-color-scheme: dark)');
+  const gridElement = part('grid');
+  gridElement.replaceChildren();
+  const grid = createGrid(gridElement, demoWorkbook(), { isDark: dark.matches });
+  dark.addEventListener('change', () => grid.setDark(dark.matches));
+
+  const strip = fillStrip(part('strip'), {
+    open: () => void documents.open(),
+    saveAs: () => void documents.saveAs(),
+    demo: () => void documents.demo(),
+  });
+  const documents = documentsOf(grid, fileFormat, demoWorkbook, strip);
+  await grid.settled();
+
+  followActiveCell(part('cell-line'), grid);
+  const port = localPort(grid);
+  mountPane(part('pane'), port);
+  moveBetween([
+    { element: strip.element },
+    { element: part('sheet'), focus: () => grid.focus() },
+    { element: part('pane') },
+  ]);
+  window.addEventListener('beforeunload', (event) => {
+    if (documents.isUnsaved) event.preventDefault();
+  });
+  offerToScripts(grid, port);
+}
+
+void start();
