@@ -33,8 +33,14 @@ const addin = {
   entry: { addin: './taskpane/addin.ts' },
   plugins: [
     new MiniCssExtractPlugin(),
-    new HtmlWebpackPlugin({ filename: 'taskpane.html', template: './taskpane/taskpane.html', scriptLoading: 'defer' }),
-    new CopyWebpackPlugin({ patterns: ['manifest.xml', 'functions/functions.json', { from: 'assets', to: 'assets' }] }),
+    new HtmlWebpackPlugin({
+      filename: 'taskpane.html',
+      template: './taskpane/taskpane.html',
+      scriptLoading: 'defer',
+    }),
+    new CopyWebpackPlugin({
+      patterns: ['manifest.xml', 'functions/functions.json', { from: 'assets', to: 'assets' }],
+    }),
   ],
 };
 
@@ -43,7 +49,11 @@ const workbook = {
   entry: { workbook: './workbook/page/main.ts' },
   plugins: [
     new MiniCssExtractPlugin(),
-    new HtmlWebpackPlugin({ filename: 'index.html', template: './workbook/page/index.html', scriptLoading: 'defer' }),
+    new HtmlWebpackPlugin({
+      filename: 'index.html',
+      template: './workbook/page/index.html',
+      scriptLoading: 'defer',
+    }),
     new CopyWebpackPlugin({ patterns: [{ from: 'assets', to: 'assets' }] }),
   ],
 };
@@ -51,10 +61,14 @@ const workbook = {
 const commands = {
   ...base('commands'),
   target: 'node20',
+  // finds files of its own beside itself
+  externals: { 'office-addin-manifest': 'commonjs office-addin-manifest' },
   entry: {
     recalc: './workbook/commands/recalc.ts',
     start: './workbook/commands/start.ts',
     derive: './scripts/derive.ts',
+    bench: './tests/bench/bench.ts',
+    package: './scripts/package.ts',
   },
   output: { ...base('commands').output, filename: '[name].cjs' },
   optimization: { minimize: false },

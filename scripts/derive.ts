@@ -4,10 +4,12 @@
  */
 import { catalogue } from '../functions/catalogue';
 import { functionsMetadata } from '../functions/metadata';
-import { asJson, bringUpToDate, staleFiles, type DerivedFile } from './derived';
+import { readmeTable } from '../functions/readmeTable';
+import { asJson, betweenMarkers, bringUpToDate, staleFiles, type DerivedFile } from './derived';
 
 const files: readonly DerivedFile[] = [
   { path: 'functions/functions.json', content: () => asJson(functionsMetadata(catalogue)) },
+  betweenMarkers('README.md', 'functions', () => readmeTable(catalogue)),
 ];
 
 if (process.argv.includes('--check')) {

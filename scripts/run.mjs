@@ -14,6 +14,8 @@ const needs = {
   start: ['workbook', 'commands'],
   recalc: ['commands'],
   derive: ['commands'],
+  bench: ['commands'],
+  package: ['addin', 'commands'],
 };
 const wholes = { page: ['workbook', 'commands'], all: ['addin', 'workbook', 'commands'] };
 

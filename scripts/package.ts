@@ -1,0 +1,48 @@
+/**
+ * Makes the folder that a web server must offer so that Excel can load the add-in, and the manifest that
+ * points there: `npm run package -- https://example.org/flaskpace OUT_FOLDER`.
+ */
+import { cpSync, existsSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
+import path from 'node:path';
+import { OfficeAddinManifest } from 'office-addin-manifest';
+
+const usage = 'usage: npm run package -- https://where.it.will.stand/folder OUT_FOLDER';
+
+/** The address in the checked-in manifest, for trying out on one's own machine. */
+const ownMachine = 'https://localhost:3000';
+
+/** Excel loads an add-in over HTTPS alone. @throws with the rule in words */
+export function requireAddress(text: string): string {
+  const url = URL.canParse(text) ? new URL(text) : undefined;
+  if (url?.protocol !== 'https:' || url.search !== '' || url.hash !== '') {
+    throw new Error(`the address must be https:// and no more than a folder: got "${text}"`);
+  }
+  return url.href.replace(/\/+$/, '');
+}
+
+/** The manifest with every address of ours moved. */
+export const manifestFor = (manifest: string, address: string): string =>
+  manifest.replaceAll(ownMachine, requireAddress(address));
+
+async function main(args: readonly string[]): Promise<void> {
+  const [address, out] = args;
+  if (args.length !== 2) throw new Error(usage);
+  const manifest = manifestFor(readFileSync('manifest.xml', 'utf8'), address);
+  if (existsSync(out) && readdirSync(out).length > 0)
+    throw new Error(`the folder must be empty: ${out} is not`);
+  cpSync(path.join('dist', 'addin'), out, { recursive: true });
+  const file = path.join(out, 'manifest.xml');
+  writeFileSync(file, manifest);
+  // read back as Office's own tools read it
+  const { displayName, version, id } = await OfficeAddinManifest.readManifestFile(file);
+  console.log(
+    `${displayName} ${version} (${id}) is in ${out}: put the folder at ${address}, then load ${file} in Excel`,
+  );
+}
+
+if (require.main === module) {
+  main(process.argv.slice(2)).catch((error: unknown) => {
+    console.error(error instanceof Error ? error.message : String(error));
+    process.exitCode = 2;
+  });
+}
