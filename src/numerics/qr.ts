@@ -22,7 +22,7 @@ export interface QrFactor {
 export function factorQr(design: Float64Array, rows: number, columns: number): QrFactor {
   const scales = new Float64Array(columns);
   for (let j = 0; j < columns; j++) {
-    const length = Math.hypot(...design.subarray(j * rows, (j + 1) * rows)) || 1;
+    const length = lengthOf(design.subarray(j * rows, (j + 1) * rows)) || 1;
     scales[j] = length;
     for (let i = 0; i < rows; i++) design[j * rows + i] /= length;
   }
@@ -37,11 +37,20 @@ export function factorQr(design: Float64Array, rows: number, columns: number): Q
   return { r, scales, columns, isDeficient };
 }
 
+/** Euclidean length, without overflow. A loop: a long column does not fit into one call's arguments. */
+function lengthOf(column: Float64Array): number {
+  let largest = 0;
+  for (const x of column) largest = Math.max(largest, Math.abs(x));
+  if (largest === 0) return 0;
+  let sum = 0;
+  for (const x of column) sum += (x / largest) ** 2;
+  return largest * Math.sqrt(sum);
+}
+
 /** One Householder reflection: column j below its diagonal becomes 0. Returns the diagonal. */
 function reflect(design: Float64Array, rows: number, columns: number, j: number): number {
   const own = j * rows;
-  let length = 0;
-  for (let i = j; i < rows; i++) length = Math.hypot(length, design[own + i]);
+  const length = lengthOf(design.subarray(own + j, own + rows));
   if (length === 0) return 0;
   const diagonal = design[own + j] > 0 ? -length : length;
   const head = design[own + j] - diagonal;

@@ -36,8 +36,11 @@ export function runsTest(residuals: ArrayLike<number>): number | null {
     last = sign;
   }
   if (above < 2 || below < 2) return null;
+  // each tail summed from its far end: the other as a remainder would lose its digits
+  const most = Math.min(above + below, 2 * Math.min(above, below) + 1);
   let few = 0;
   for (let r = 2; r <= runs; r++) few += probabilityOfRuns(r, above, below);
-  const many = 1 - few + probabilityOfRuns(runs, above, below);
+  let many = 0;
+  for (let r = most; r >= runs; r--) many += probabilityOfRuns(r, above, below);
   return Math.min(1, 2 * Math.min(few, many));
 }

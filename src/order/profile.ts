@@ -10,13 +10,18 @@ import { NotDetermined } from '../errors';
 import type { Estimate } from '../estimate';
 import { findRoot } from '../numerics/findRoot';
 import { studentQuantile } from '../numerics/studentT';
+import { valleyNear } from '../numerics/valley';
 import type { RateLawFit } from './fit';
 import { reducedHalfLife, shareLeft, shareSlope } from './law';
 import type { ReducedFit } from './reducedFit';
-import { followRate } from './search';
+import { followRate, highestOrder, lowestOrder } from './search';
 
 /** Beyond this many standard uncertainties no limit is looked for. */
 const reachOfSearch = 40;
+
+/** Nor for the order beyond these, where laws differ less than readings can show. */
+const lowestLimit = lowestOrder - 4;
+const highestLimit = highestOrder + 4;
 
 /** k with its profile limits, at a fixed order. */
 export function rateCoefficientEstimate(fit: RateLawFit): Estimate {
@@ -40,12 +45,13 @@ export function halfLifeEstimate(fit: RateLawFit): Estimate {
  */
 export function orderEstimate(fit: RateLawFit): Estimate {
   const { search, order, standardUncertainties } = fit;
-  let followed = search.logRate;
+  // a start that keeps the half life: one handed on would make the answer depend on the way there
+  const logHalfLife = Math.log(reducedHalfLife(order)) - search.logRate;
   const squaresAt = (n: number): number => {
-    followed = followRate(search.fit, n, followed);
-    return search.fit.at(followed, n).residualSumOfSquares;
+    const logRate = followRate(search.fit, n, Math.log(reducedHalfLife(n)) - logHalfLife);
+    return search.fit.at(logRate, n).residualSumOfSquares;
   };
-  return limits(fit, order, standardUncertainties.order, order, squaresAt, (n) => n, () => (followed = search.logRate));
+  return limits(fit, order, standardUncertainties.order, order, squaresAt, (n) => n, { low: lowestLimit, high: highestLimit });
 }
 
 function logEstimate(fit: RateLawFit, value: number, uncertainty: number | null, squaresAt: (log: number) => number): Estimate {
@@ -55,7 +61,7 @@ function logEstimate(fit: RateLawFit, value: number, uncertainty: number | null,
 /**
  * @param at the estimate on the scale that is searched
  * @param back from that scale to the quantity
- * @param restart called before each side
+ * @param walk no limit is looked for beyond `low` and `high`
  */
 function limits(
   { residualSumOfSquares, degreesOfFreedom, search }: RateLawFit,
@@ -64,7 +70,7 @@ function limits(
   at: number,
   squaresAt: (place: number) => number,
   back: (place: number) => number,
-  restart: () => void = () => undefined,
+  { low, high }: Walk = { low: -Infinity, high: Infinity },
 ): Estimate {
   if (uncertainty === null) return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
   const estimate = { value, standardUncertainty: uncertainty, degreesOfFreedom };
@@ -72,15 +78,20 @@ function limits(
   if (residualSumOfSquares <= roundingFloor(search.fit)) return { ...estimate, lower: value, upper: value };
   const t = studentQuantile(0.975, degreesOfFreedom);
   const rise = residualSumOfSquares * ((t * t) / degreesOfFreedom);
-  // the root of the rise is nearly straight in the quantity
-  const excess = (place: number): number => Math.sqrt(Math.max(0, squaresAt(place) - residualSumOfSquares)) - Math.sqrt(rise);
+  // the root of the rise is nearly straight in the quantity; at the estimate itself there is none
+  const riseTo = (place: number): number => (place === at ? 0 : Math.max(0, squaresAt(place) - residualSumOfSquares));
+  const excess = (place: number): number => Math.sqrt(riseTo(place)) - Math.sqrt(rise);
   const step = back === Math.exp ? uncertainty / value : uncertainty;
   const side = (sign: number): number | null => {
-    restart();
-    const found = whereDetermined(() => limitOn(excess, at, sign * step, t));
+    const found = whereDetermined(() => limitOn(excess, at, sign * step, t, sign < 0 ? low : high));
     return found === null ? null : back(found);
   };
   return { ...estimate, lower: side(-1), upper: side(1) };
+}
+
+interface Walk {
+  readonly low: number;
+  readonly high: number;
 }
 
 /** `null` where the search strays to places that the data do not determine. */
@@ -93,11 +104,13 @@ function whereDetermined(search: () => number | null): number | null {
   }
 }
 
-function limitOn(excess: (place: number) => number, at: number, step: number, t: number): number | null {
+/** @param end where the walk must turn back */
+function limitOn(excess: (place: number) => number, at: number, step: number, t: number, end: number): number | null {
   let near = at;
   for (let reach = t; reach <= reachOfSearch; reach *= 1.5) {
-    const far = at + reach * step;
+    const far = step < 0 ? Math.max(end, at + reach * step) : Math.min(end, at + reach * step);
     if (excess(far) > 0) return findRoot(excess, near, far, 1e-12 * Math.max(1, Math.abs(at)));
+    if (far === end) return null;
     near = far;
   }
   return null;
@@ -112,41 +125,35 @@ export function roundingFloor({ problem }: ReducedFit): number {
 
 /**
  * RSS as a function of ln k where k belongs to the fitted distance: k = κ|A|¹⁻ⁿ. For a given k the
- * distance is searched by Gauss–Newton, and κ follows from it.
+ * distance is searched, and κ follows from it. Every search starts from the fit's own distance, so that
+ * the answer depends on k alone and not on the way there.
  */
-function profileOfCoefficient(fit: RateLawFit): (logK: number) => number {
-  const { problem } = fit.search.fit;
-  let logAmplitude = Math.log(Math.abs(fit.search.amplitude));
-  const sign = Math.sign(fit.search.amplitude);
+function profileOfCoefficient({ order, search }: RateLawFit): (logK: number) => number {
+  const { problem } = search.fit;
+  const start = Math.log(Math.abs(search.amplitude));
+  const sign = Math.sign(search.amplitude);
   return (logK) => {
-    let squares = Infinity;
-    let step = 0;
-    for (let iteration = 0; iteration < 60; iteration++) {
-      const trial = distanceStep(problem, fit.order, logK, logAmplitude, sign);
-      if (trial.squares > squares) {
-        // a step too far: halve it from where it came
-        logAmplitude -= step / 2;
-        step /= 2;
-        if (Math.abs(step) < 1e-13) break;
-        continue;
-      }
-      squares = trial.squares;
-      step = trial.step;
-      if (Math.abs(step) < 1e-13) break;
-      logAmplitude += step;
-    }
-    return squares;
+    const at = (logAmplitude: number): Rise => alongDistance(problem, order, logK, logAmplitude, sign);
+    const best = valleyNear((logAmplitude) => at(logAmplitude).slope, start, 1e-13);
+    if (best === undefined) throw new NotDetermined('rate coefficient cannot be told: any distance from the end fits as well');
+    return at(best).squares;
   };
 }
 
-/** RSS at one distance and k, and the Gauss–Newton step in the logarithm of the distance. */
-function distanceStep(
+interface Rise {
+  readonly squares: number;
+  /** Half of d(RSS)/d ln|A|. */
+  readonly slope: number;
+}
+
+/** RSS at one distance and k, and its slope along the logarithm of the distance. */
+function alongDistance(
   { times, values, rootWeights, offset, shape }: ReducedFit['problem'],
   order: number,
   logK: number,
   logAmplitude: number,
   sign: number,
-): { squares: number; step: number } {
+): Rise {
   const amplitude = sign * Math.exp(logAmplitude);
   const rate = Math.exp(logK + (order - 1) * logAmplitude);
   const count = times.length;
@@ -156,7 +163,6 @@ function distanceStep(
   let slopeSum = 0;
   let squares = 0;
   let product = 0;
-  let slopeSquares = 0;
   for (let i = 0; i < count; i++) {
     const w2 = rootWeights[i] ** 2;
     const s = rate * times[i];
@@ -169,12 +175,10 @@ function distanceStep(
     slopeSum += w2 * slope;
     squares += w2 * r * r;
     product += w2 * r * slope;
-    slopeSquares += w2 * slope * slope;
   }
   if (offset) {
     squares -= (residualSum * residualSum) / norm;
     product -= (residualSum * slopeSum) / norm;
-    slopeSquares -= (slopeSum * slopeSum) / norm;
   }
-  return { squares, step: slopeSquares > 0 ? product / slopeSquares : 0 };
+  return { squares, slope: -product };
 }

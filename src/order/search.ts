@@ -1,6 +1,7 @@
 /** The best κ for an order, and the best order: searches over {@link ReducedFit}. */
 import { NotDetermined, shown } from '../errors';
 import { findRoot } from '../numerics/findRoot';
+import { valleyNear } from '../numerics/valley';
 import { reducedHalfLife, reducedTimeTo } from './law';
 import type { ReducedFit } from './reducedFit';
 
@@ -56,13 +57,7 @@ export function bestRate(fit: ReducedFit, order: number, start?: number): number
 
 /** The same from a good start, for a search over the order: the valley is followed, not looked for. */
 export function followRate(fit: ReducedFit, order: number, start: number): number {
-  let reach = 0.05;
-  for (let tries = 0; tries < 12; tries++, reach *= 2) {
-    const below = fit.at(start - reach, order).rateGradient;
-    const above = fit.at(start + reach, order).rateGradient;
-    if (below < 0 && above > 0) return zeroSlope(fit, order, start - reach, start + reach, start);
-  }
-  return bestRate(fit, order, start);
+  return valleyNear((logRate) => fit.at(logRate, order).rateGradient, start, 1e-15) ?? bestRate(fit, order, start);
 }
 
 /** Zero of d(RSS)/d ln κ in a bracket around a point lower than its ends. */
