@@ -40,3 +40,11 @@ export const requirePositive = (numbers: NamedNumbers): void =>
 /** Every number is finite and 0 or more. @throws InvalidInput */
 export const requireNotNegative = (numbers: NamedNumbers): void =>
   requireThat((value) => Number.isFinite(value) && value >= 0, '0 or more', numbers);
+
+/** A species that takes part: a signed number, −2 for two used up. @throws InvalidInput for 0 */
+export function requireStoichiometricNumber(stoichiometricNumber: number): void {
+  requireFinite({ stoichiometricNumber });
+  if (stoichiometricNumber === 0) {
+    throw new InvalidInput('stoichiometric number must not be 0: a species that takes no part has no rate');
+  }
+}

@@ -6,9 +6,13 @@
  * - torr = 101325/760 Pa exactly (ISO 80000-4:2019, remark); mathjs rounds it, 3 parts in 10⁶ off
  * - mmHg, conventional = 133.322387415 Pa (BS 350-1:1974, 13.5951 g/cm³ × 9.80665 m/s²)
  * - mmH2O, conventional = 9.80665 Pa
+ * - inHg, conventional = 25.4 mmHg (inch exactly 25.4 mm)
+ * - psi = 0.45359237 kg × 9.80665 m/s² ⁄ (0.0254 m)² (NIST SP 811, B.8); mathjs rounds it, 6 parts in 10¹¹ off
  * - cal, thermochemical = 4.184 J exactly
+ * - M = mol/L; d = 86400 s
  */
 import * as mathjs from 'mathjs';
+import { standardGravity } from './constants';
 import { InvalidInput, shown } from './errors';
 
 interface Quantity {
@@ -28,6 +32,11 @@ class Ratio {
     readonly n: number,
     readonly d: number,
   ) {}
+
+  /** mathjs multiplies by it without asking what it is. */
+  valueOf(): number {
+    return this.n / this.d;
+  }
 }
 
 /**
@@ -59,24 +68,32 @@ Quantities.createUnit(
   {
     torr: { definition: `${101325 / 760} Pa` },
     mmHg: { definition: '133.322387415 Pa' },
+    inHg: { definition: `${25.4 * 133.322387415} Pa` },
     mmH2O: { definition: '9.80665 Pa' },
+    psi: { definition: `${(0.45359237 * standardGravity) / 0.0254 ** 2} Pa` },
+    M: { definition: '1 mol/L', prefixes: 'short' },
+    d: { definition: '86400 s' },
     cal: { definition: '4.184 J', prefixes: 'short' },
   },
   { override: true },
 );
 
 /** Spellings of the trade that mathjs does not know, and what it calls them. */
+// prettier-ignore
 const spellings: Readonly<Record<string, string>> = {
   '°C': 'degC', '℃': 'degC', 'C': 'degC', 'celsius': 'degC', 'degc': 'degC', '°F': 'degF',
   'k': 'K', 'kelvin': 'K',
   'ml': 'mL', 'ML': 'mL', 'cc': 'cm^3', 'cm3': 'cm^3', 'cm³': 'cm^3', 'dm3': 'dm^3', 'dm³': 'dm^3',
   'm3': 'm^3', 'm³': 'm^3', 'mm3': 'mm^3', 'mm³': 'mm^3', 'µL': 'uL', 'μL': 'uL', 'ul': 'uL', 'l': 'L',
   'µm': 'um', 'μm': 'um', 'µg': 'ug', 'μg': 'ug',
-  'mmhg': 'mmHg', 'MMHG': 'mmHg', 'Torr': 'torr', 'TORR': 'torr', 'mmH2O': 'mmH2O', 'mmh2o': 'mmH2O', 'mmWS': 'mmH2O',
-  'kpa': 'kPa', 'KPa': 'kPa', 'hpa': 'hPa', 'pa': 'Pa', 'mpa': 'MPa',
+  'µM': 'uM', 'μM': 'uM',
+  'mmhg': 'mmHg', 'MMHG': 'mmHg', 'mm Hg': 'mmHg', 'inhg': 'inHg', 'in Hg': 'inHg', 'Torr': 'torr', 'TORR': 'torr', 'mmH2O': 'mmH2O', 'mmh2o': 'mmH2O', 'mmWS': 'mmH2O', 'mm H2O': 'mmH2O',
+  'Bar': 'bar', 'Atm': 'atm', 'ATM': 'atm', 'PSI': 'psi', 'kpa': 'kPa', 'KPa': 'kPa', 'hpa': 'hPa', 'pa': 'Pa', 'mpa': 'MPa',
 };
 
-const quantityText = /^([+-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:e[+-]?\d+)?)\s*(.*)$/i;
+const kelvin = new Quantities(1, 'K');
+
+const quantityText = /^([+−-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:e[+-]?\d+)?)\s*(.*)$/i;
 
 function unitOf(text: string, name: string): Quantity {
   const spelled = spellings[text] ?? text;
@@ -106,12 +123,12 @@ export function isUnit(text: string): boolean {
 export function parseQuantity(text: string, unit: string, name: string): number {
   const match = quantityText.exec(text.trim());
   if (!match) throw new InvalidInput(`${name} must be a number with a unit, such as "1 ${unit}": got "${text}"`);
-  const value = Number(match[1].replace(',', '.'));
+  const value = Number(match[1].replace(',', '.').replace('−', '-'));
   return match[2] === '' ? value : convertUnit(value, match[2].trim(), unit, name);
 }
 
 /**
- * @throws InvalidInput when the two units measure different things
+ * @throws InvalidInput when the two units measure different things, or for a temperature below absolute zero
  * @example convertUnit(22, 'degC', 'K', 'temperature') // 295.15
  */
 export function convertUnit(value: number, from: string, to: string, name: string): number {
@@ -120,7 +137,11 @@ export function convertUnit(value: number, from: string, to: string, name: strin
   if (!source.equalBase(target)) {
     throw new InvalidInput(`${name} must be in a unit like ${to}: ${shown(value)} ${from} measures something else`);
   }
-  return convertQuantity(value, spellings[from] ?? from, spellings[to] ?? to);
+  const spelled = spellings[from] ?? from;
+  if (source.equalBase(kelvin) && convertQuantity(value, spelled, 'K') < 0) {
+    throw new InvalidInput(`${name} must not be below absolute zero: got ${shown(value)} ${from}`);
+  }
+  return convertQuantity(value, spelled, spellings[to] ?? to);
 }
 
 /** Between two units known to fit. @example convertQuantity(1, 'L', 'mL') // 1000 */

@@ -1,4 +1,4 @@
-import { InvalidInput, requireFinite, requirePositive } from '../errors';
+import { InvalidInput, requireFinite, requirePositive, requireStoichiometricNumber } from '../errors';
 
 /**
  * Rate from a timed event: the mean rate of reaction until a fixed change was reached.
@@ -17,7 +17,8 @@ import { InvalidInput, requireFinite, requirePositive } from '../errors';
  */
 export function eventRate(time: number, change = 1, stoichiometricNumber = Math.sign(change)): number {
   requirePositive({ time });
-  requireFinite({ change, stoichiometricNumber });
+  requireFinite({ change });
   if (change === 0) throw new InvalidInput('change must not be 0: nothing happened');
+  requireStoichiometricNumber(stoichiometricNumber);
   return change / (stoichiometricNumber * time);
 }

@@ -1,5 +1,5 @@
 /** Rate at one time or along a whole run: the slope of a local polynomial. */
-import { InvalidInput, NotDetermined, shown } from '../errors';
+import { InvalidInput, NotDetermined, requireFinite, shown } from '../errors';
 import type { Estimate } from '../estimate';
 import { studentQuantile } from '../numerics/studentT';
 import { requireDistinctTimes, stoichiometricNumberFor, type Series } from '../series/series';
@@ -65,6 +65,7 @@ function asRate(fit: LocalFit, stoichiometricNumber: number): Estimate {
  *   W. S. Cleveland, J. Am. Stat. Assoc. 74 (1979) 829 (nearest neighbours)
  */
 export function tangentRate(series: Series, time: number, options: TangentOptions = {}): Estimate {
+  requireFinite({ time });
   const { points, degree, stoichiometricNumber } = settle(series, options);
   const { times, values } = series;
   requireWithinRun(times, time);

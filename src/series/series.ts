@@ -2,7 +2,7 @@
  * A run: times and readings, paired, without gaps, in order of time. Everything that is estimated
  * starts here.
  */
-import { InvalidInput, NotDetermined } from '../errors';
+import { InvalidInput, NotDetermined, requireStoichiometricNumber } from '../errors';
 
 export interface Series {
   /** In ascending order; equal times are replicates. */
@@ -93,5 +93,14 @@ export function trend({ times, values }: Series): -1 | 0 | 1 {
   return slope > 0 ? 1 : slope < 0 ? -1 : 0;
 }
 
-/** The signed stoichiometric number to use: the one given, else the sign of the trend (+1 for a level column). */
-export const stoichiometricNumberFor = (series: Series, given?: number): number => given ?? (trend(series) || 1);
+/**
+ * The signed stoichiometric number to use: the one given, else the sign of the trend (+1 for a level column).
+ *
+ * @throws InvalidInput for one that is 0 or not finite
+ * @example stoichiometricNumberFor(pairReadings([0, 1], [5, 3])) // -1
+ */
+export function stoichiometricNumberFor(series: Series, given?: number): number {
+  if (given === undefined) return trend(series) || 1;
+  requireStoichiometricNumber(given);
+  return given;
+}
