@@ -1,0 +1,127 @@
+/** A file's bytes → the workbook: what was typed into its cells. Values of formulas are what the file last showed. */
+import { read, type CellObject, type WorkBook, type WorkSheet } from '@e965/xlsx';
+import { cellName } from '../../functions/address';
+import { CellError, type CellValue, type ErrorCode } from '../../functions/cell';
+import type { BookModel, CellModel, DefinedName, SheetModel } from '../engine/engine';
+import { typedFormula } from './formulaText';
+import { NotAWorkbook } from './notAWorkbook';
+import { findParts, readXml } from './parts';
+import { scanSheet, type ScannedCell } from './sheetScan';
+import { readLooks, type CellLook } from './styles';
+import { Package } from './zip';
+
+/** @throws NotAWorkbook with the reason, for what is not a whole .xlsx workbook */
+export function readWorkbook(bytes: Uint8Array): BookModel {
+  refuseOtherKinds(bytes);
+  const pack = Package.open(bytes);
+  const parts = findParts(pack);
+  const library = readByLibrary(bytes);
+  const looks = readLooks(pack, parts.styles);
+  return {
+    sheets: parts.sheets.map(({ name, path }) => {
+      const cells = scanSheet(readXml(pack, path), path).rows.flatMap((row) => row.cells);
+      return sheetModel(name, library.Sheets[name], cells, looks);
+    }),
+    names: definedNames(library),
+  };
+}
+
+/** The first bytes tell the kind; the name of a file can lie. */
+function refuseOtherKinds(bytes: Uint8Array): void {
+  const starts = (...head: number[]): boolean => head.every((byte, place) => bytes[place] === byte);
+  if (bytes.length === 0) throw new NotAWorkbook('the file is empty');
+  if (starts(0xd0, 0xcf, 0x11, 0xe0)) {
+    throw new NotAWorkbook(
+      'the file is protected with a password, or in the old .xls form: save it as .xlsx without a password first',
+    );
+  }
+  if (!starts(0x50, 0x4b))
+    throw new NotAWorkbook('the file is not an .xlsx workbook: that is a zip package, and this is not');
+}
+
+function readByLibrary(bytes: Uint8Array): WorkBook {
+  try {
+    return read(bytes, {
+      type: 'array',
+      cellFormula: true,
+      cellNF: true,
+      cellStyles: true,
+      cellText: false,
+      cellHTML: false,
+    });
+  } catch (error) {
+    throw new NotAWorkbook(
+      `the workbook cannot be read: ${error instanceof Error ? error.message : String(error)}`,
+    );
+  }
+}
+
+function sheetModel(
+  name: string,
+  sheet: WorkSheet | undefined,
+  scanned: readonly ScannedCell[],
+  looks: readonly CellLook[],
+): SheetModel {
+  const widths = (sheet?.['!cols'] ?? []).flatMap((column, place) =>
+    column?.width === undefined ? [] : [[place, column.width] as const],
+  );
+  return {
+    name,
+    cells: scanned.flatMap((cell) =>
+      cellModel(cell, sheet?.[cellName(cell.row, cell.column)] as CellObject | undefined, looks),
+    ),
+    ...(widths.length > 0 ? { columnWidths: Object.fromEntries(widths) } : {}),
+  };
+}
+
+/** A cell that another's formula spilled into is left out: nobody typed it. */
+function cellModel(
+  { row, column, attributes }: ScannedCell,
+  cell: CellObject | undefined,
+  looks: readonly CellLook[],
+): CellModel[] {
+  if (!cell || (cell.F !== undefined && cell.f === undefined)) return [];
+  const look = looks[Number(attributes.s ?? 0)];
+  const value = valueOf(cell);
+  if (value === null && !cell.f && !look?.bold && !look?.wrap) return [];
+  return [
+    {
+      row,
+      column,
+      value,
+      ...(cell.f ? { formula: typedFormula(cell.f) } : {}),
+      ...(typeof cell.z === 'string' && cell.z !== 'General' ? { numberFormat: cell.z } : {}),
+      ...(look?.bold ? { bold: true } : {}),
+      ...(look?.wrap ? { wrap: true } : {}),
+    },
+  ];
+}
+
+/** The library's numbers for errors ([MS-XLS] 2.5.10, BErr). */
+const errorCodes: Readonly<Record<number, ErrorCode>> = {
+  0: '#NULL!',
+  7: '#DIV/0!',
+  15: '#VALUE!',
+  23: '#REF!',
+  29: '#NAME?',
+  36: '#NUM!',
+  42: '#N/A',
+  43: '#BUSY!',
+};
+
+function valueOf({ t: type, v: value }: CellObject): CellValue {
+  if (type === 'e') return new CellError(errorCodes[value as number] ?? '#VALUE!');
+  if (type === 'z' || value === undefined || value instanceof Date) return null;
+  return value;
+}
+
+/** Names that Excel keeps for itself (print areas, filters) are no formulas of anybody's. */
+function definedNames({ Workbook, SheetNames }: WorkBook): DefinedName[] {
+  return (Workbook?.Names ?? [])
+    .filter(({ Name, Ref }) => Ref && !Name.startsWith('_xlnm.'))
+    .map(({ Name, Ref, Sheet }) => ({
+      name: Name,
+      refersTo: typedFormula(Ref),
+      ...(Sheet === undefined ? {} : { sheet: SheetNames[Sheet] }),
+    }));
+}

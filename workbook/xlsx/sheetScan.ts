@@ -1,0 +1,121 @@
+/** A sheet's XML with the place of every cell in it, so that one can be changed and the rest left alone. */
+import { columnIndex } from '../../functions/address';
+import { localName, scanXml } from './xml';
+
+/** Places in the text: `end` is the first character after. */
+export interface Span {
+  readonly start: number;
+  readonly end: number;
+}
+
+/** An element with room for content: `<row …>` `</row>`, or `<row …/>` where `closed`. */
+export interface Holder extends Span {
+  readonly openEnd: number;
+  /** Where the closing tag starts; that of the element itself where it is closed at once. */
+  contentEnd: number;
+  end: number;
+  readonly closed: boolean;
+}
+
+export interface ScannedChild extends Span {
+  readonly name: string;
+  readonly attributes: Readonly<Record<string, string>>;
+  text: string;
+  end: number;
+}
+
+export interface ScannedCell extends Holder {
+  readonly row: number;
+  readonly column: number;
+  readonly attributes: Readonly<Record<string, string>>;
+  readonly children: ScannedChild[];
+}
+
+export interface ScannedRow extends Holder {
+  readonly row: number;
+  readonly cells: ScannedCell[];
+  /** Some cell tells its column only by following another. */
+  countsCells: boolean;
+}
+
+export interface ScannedSheet {
+  /** `x:` where the part writes `<x:row>`. */
+  readonly prefix: string;
+  readonly rows: readonly ScannedRow[];
+  readonly data?: Holder;
+  readonly dimension?: Span & { readonly ref: string };
+}
+
+export const childOf = (cell: ScannedCell, name: string): ScannedChild | undefined =>
+  cell.children.find((child) => child.name === name);
+
+/** @throws NotAWorkbook where the XML is not well formed */
+export function scanSheet(xml: string, part: string): ScannedSheet {
+  const rows: ScannedRow[] = [];
+  let prefix = '';
+  let data: Holder | undefined;
+  let dimension: ScannedSheet['dimension'];
+  let row: ScannedRow | undefined;
+  let cell: ScannedCell | undefined;
+  let child: ScannedChild | undefined;
+  let depth = 0;
+
+  const holder = (end: number, closed: boolean): Holder => {
+    const start = xml.lastIndexOf('<', end - 1); // no attribute can hold a <
+    return { start, openEnd: end, contentEnd: closed ? start : -1, end: closed ? end : -1, closed };
+  };
+
+  scanXml(xml, part, {
+    open({ name: full, attributes, isSelfClosing }, end) {
+      depth += 1;
+      const name = localName(full);
+      if (name === 'dimension' && depth === 2) {
+        dimension = { start: xml.lastIndexOf('<', end - 1), end, ref: attributes.ref };
+      } else if (name === 'sheetData' && depth === 2) {
+        prefix = full.slice(0, full.length - name.length);
+        data = holder(end, isSelfClosing);
+      } else if (!data || data.end >= 0) {
+        return;
+      } else if (name === 'row' && depth === 3) {
+        const number = attributes.r === undefined ? (rows.at(-1)?.row ?? -1) + 1 : Number(attributes.r) - 1;
+        row = { ...holder(end, isSelfClosing), row: number, cells: [], countsCells: false };
+        rows.push(row);
+      } else if (name === 'c' && depth === 4 && row) {
+        const named = attributes.r === undefined ? undefined : columnIndex(attributes.r.replace(/\d+$/, ''));
+        row.countsCells ||= named === undefined;
+        const column = named ?? (row.cells.at(-1)?.column ?? -1) + 1;
+        cell = { ...holder(end, isSelfClosing), row: row.row, column, attributes, children: [] };
+        row.cells.push(cell);
+      } else if (depth === 5 && cell) {
+        child = { start: xml.lastIndexOf('<', end - 1), end: -1, name, attributes, text: '' };
+        cell.children.push(child);
+      }
+    },
+    close(_tag, end) {
+      if (depth === 5 && child) {
+        child.end = end;
+        child = undefined;
+      }
+      if (depth === 4 && cell) {
+        shut(cell, xml, end);
+        cell = undefined;
+      }
+      if (depth === 3 && row) {
+        shut(row, xml, end);
+        row = undefined;
+      }
+      if (depth === 2 && data && data.end < 0) shut(data, xml, end);
+      depth -= 1;
+    },
+    text(text) {
+      if (child) child.text += text;
+    },
+  });
+  return { prefix, rows, data, dimension };
+}
+
+function shut(element: Holder, xml: string, end: number): void {
+  if (element.closed) return;
+  element.contentEnd = xml.lastIndexOf('<', end - 1);
+  element.end = end;
+}
