@@ -61,6 +61,7 @@ export function documentsOf(
 
   async function show(next: Shown, book: BookModel): Promise<void> {
     await grid.open(book);
+    selectFirstNumber(grid, book);
     shown = next;
     mark(false);
     grid.focus();
@@ -115,4 +116,15 @@ export function documentsOf(
       return isUnsaved;
     },
   };
+}
+
+/** Where the work begins: the pane finds the run around it. */
+export function selectFirstNumber(grid: Grid, { sheets: [sheet] }: BookModel): void {
+  const numbers = sheet.cells.filter((cell) => typeof cell.value === 'number' && cell.formula === undefined);
+  const first = numbers.reduce<BookModel['sheets'][number]['cells'][number] | undefined>(
+    (best, cell) =>
+      !best || cell.row < best.row || (cell.row === best.row && cell.column < best.column) ? cell : best,
+    undefined,
+  );
+  if (first) grid.select({ sheet: sheet.name, row: first.row, column: first.column, rows: 1, columns: 1 });
 }

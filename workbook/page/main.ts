@@ -5,7 +5,7 @@ import { demoWorkbook } from '../demo/demo';
 import { createGrid } from '../engine/univer/grid';
 import { localPort } from '../localPort';
 import { followActiveCell } from './cellLine';
-import { documentsOf } from './documents';
+import { documentsOf, selectFirstNumber } from './documents';
 import { fileFormat } from './fileFormat';
 import './page.css';
 import { moveBetween } from './regions';
@@ -18,7 +18,8 @@ async function start(): Promise<void> {
   const dark = window.matchMedia('(prefers-color-scheme: dark)');
   const gridElement = part('grid');
   gridElement.replaceChildren();
-  const grid = createGrid(gridElement, demoWorkbook(), { isDark: dark.matches });
+  const demo = demoWorkbook();
+  const grid = createGrid(gridElement, demo, { isDark: dark.matches });
   dark.addEventListener('change', () => grid.setDark(dark.matches));
 
   const strip = fillStrip(part('strip'), {
@@ -27,7 +28,7 @@ async function start(): Promise<void> {
     demo: () => void documents.demo(),
   });
   const documents = documentsOf(grid, fileFormat, demoWorkbook, strip);
-  await grid.settled();
+  selectFirstNumber(grid, demo);
 
   followActiveCell(part('cell-line'), grid);
   const port = localPort(grid);
@@ -40,6 +41,7 @@ async function start(): Promise<void> {
   window.addEventListener('beforeunload', (event) => {
     if (documents.isUnsaved) event.preventDefault();
   });
+  await grid.settled();
   offerToScripts(grid, port);
 }
 

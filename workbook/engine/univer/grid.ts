@@ -1,6 +1,6 @@
 /** The grid on the screen, over Univer. */
 import {
-  IUndoRedoService,
+  ICommandService,
   IUniverInstanceService,
   UniverInstanceType,
   type IWorkbookData,
@@ -8,8 +8,10 @@ import {
 } from '@univerjs/core';
 import { SheetsSelectionsService } from '@univerjs/sheets';
 import { FormulaCalculationSessionService } from '@univerjs/sheets-formula';
+import { ILayoutService } from '@univerjs/ui';
 import type { BookModel } from '../engine';
 import type { Grid, GridArea, Stop } from '../grid';
+import { nameControls } from './grid/accessibleNames';
 import { acceptSpillReferences, copySpilledValues, showOwnErrorWords } from './grid/amendments';
 import { bookOf, calculatedOf } from './grid/book';
 import { bootGrid } from './grid/boot';
@@ -17,6 +19,9 @@ import { screenData } from './grid/screenData';
 import { sheetsOf, type Sheets } from './grid/sheets';
 import { writeCells } from './grid/write';
 import { forgetMessages } from './register';
+
+/** What every change of a sheet's content or looks is called by; a selection or a scroll is no such thing. */
+const edits = 'sheet.mutation.';
 
 /** A calculation that takes longer goes on; whoever waits for it is let go. */
 const longestWait = 60_000; // ms
@@ -36,7 +41,7 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
   let sheets = show(first); // the engine's services exist only once it has a workbook
   const selections = injector.get(SheetsSelectionsService);
   const session = injector.get(FormulaCalculationSessionService);
-  const undo = injector.get(IUndoRedoService);
+  const commands = injector.get(ICommandService);
   const instances = injector.get(IUniverInstanceService);
 
   showOwnErrorWords(injector, ({ location: { subUnitId, row, col } }) => {
@@ -45,6 +50,7 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
   });
   copySpilledValues(injector, () => sheets.workbook);
   acceptSpillReferences(injector);
+  const stopNaming = nameControls(container);
 
   const calculation = (): Promise<void> =>
     session.waitForLatestApplied(longestWait).catch(() => undefined) as Promise<void>;
@@ -108,26 +114,36 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
       if (!book || !sheet) throw new Error(`there is no sheet named "${name}"`);
       book.setActiveSheet(sheet);
       sheet.getRange(row, column, rows, columns).activate();
-      sheet.scrollToCell(Math.max(0, row - 3), Math.max(0, column - 2));
+      const seen = sheet.getVisibleRange();
+      const isSeen =
+        seen &&
+        row >= seen.startRow &&
+        row < seen.endRow &&
+        column >= seen.startColumn &&
+        column < seen.endColumn;
+      // a cell at the very edge is half hidden
+      if (!isSeen) sheet.scrollToCell(Math.max(0, row - 3), Math.max(0, column - 2));
     },
-    focus: () => container.querySelector<HTMLElement>('[data-u-comp="editor"], canvas')?.focus(),
+    focus: () => injector.get(ILayoutService).focus(),
     setDark: (dark) => api.toggleDarkMode(dark),
     onSelection: (listener) => stopOf(selections.selectionChanged$.subscribe(() => listener())),
-    onEdit(listener) {
-      let last = 0;
-      return stopOf(
-        undo.undoRedoStatus$.subscribe(({ undos }) => {
-          if (undos !== last) listener();
-          last = undos;
+    onEdit: (listener) =>
+      stopOf(
+        commands.onCommandExecuted(({ id, params }, options) => {
+          const isResult = options?.fromFormula || options?.onlyLocal;
+          const unit = (params as { unitId?: string } | undefined)?.unitId;
+          if (id.startsWith(edits) && !isResult && unit === sheets.workbook.getUnitId()) listener();
         }),
-      );
-    },
+      ),
     onCalculated: (listener) => stopOf(session.resultApplied$.subscribe(() => listener())),
-    dispose: () => univer.dispose(),
+    dispose() {
+      stopNaming();
+      univer.dispose();
+    },
   };
 }
 
 const stopOf =
-  (subscription: { unsubscribe(): void }): Stop =>
+  (listening: { unsubscribe(): void } | { dispose(): void }): Stop =>
   () =>
-    subscription.unsubscribe();
+    'dispose' in listening ? listening.dispose() : listening.unsubscribe();

@@ -1,5 +1,6 @@
 /** The grid's engine with its toolbar, formula bar and sheet tabs, put into an element of the page. */
 import '@univerjs/preset-sheets-core/lib/index.css';
+import './grid.css';
 import { LocaleType, LogLevel, Univer, type Injector, type Plugin, type PluginCtor } from '@univerjs/core';
 import { FUniver } from '@univerjs/core/facade';
 import { CalculationMode, UniverSheetsCorePreset } from '@univerjs/preset-sheets-core';

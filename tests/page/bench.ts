@@ -1,0 +1,154 @@
+/** The page as people get it: built, served by the real command, shown in a real browser. */
+import { execFileSync, spawn, type ChildProcess } from 'node:child_process';
+import { join } from 'node:path';
+import type { Browser, BrowserContextOptions, Page } from 'playwright-core';
+import { parseArea } from '../../functions/address';
+import type { CellRange } from '../../functions/cell';
+import type { BookModel, CellModel } from '../../workbook/engine/engine';
+import type { Scripting } from '../../workbook/page/scripting';
+import { launchBrowser } from './browser';
+
+const root = join(__dirname, '..', '..');
+
+declare global {
+  interface Window {
+    readonly flaskpace: Scripting;
+  }
+}
+
+export interface PageBench {
+  readonly address: string;
+  readonly browser: Browser;
+  /** A page of its own, ready to be worked with. */
+  open(options?: BrowserContextOptions): Promise<BenchPage>;
+  close(): Promise<void>;
+}
+
+export interface BenchPage {
+  readonly page: Page;
+  /** What went wrong in it so far, and what it asked of other addresses. */
+  readonly complaints: readonly string[];
+  cells(reference: string): Promise<CellRange>;
+  /** Clicks into the cell, types, and confirms with Enter. */
+  type(reference: string, typed: string): Promise<void>;
+  select(reference: string): Promise<void>;
+  /** Shows these rows of a sheet "Gas run" in place of the demo, from A1 on; what begins with = is a formula. */
+  show(rows: readonly (readonly (number | string)[])[]): Promise<void>;
+  /** Waits until the cells show this. */
+  shows(reference: string, expected: CellRange): Promise<void>;
+  close(): Promise<void>;
+}
+
+/** The first build of a fresh checkout takes its time. */
+export const longestStart = 240_000; // ms
+
+export async function startBench(): Promise<PageBench> {
+  if (!process.env.NB)
+    execFileSync(process.execPath, [join(root, 'scripts', 'run.mjs'), 'build', 'page'], { stdio: 'inherit' });
+  const { server, address } = await startServer();
+  const browser = await launchBrowser();
+  return {
+    address,
+    browser,
+    open: (options) => openPage(browser, address, options),
+    async close() {
+      await browser.close();
+      server.kill();
+    },
+  };
+}
+
+export async function startServer(
+  ...words: readonly string[]
+): Promise<{ server: ChildProcess; address: string }> {
+  const server = spawn(
+    process.execPath,
+    [
+      join(root, 'dist', 'commands', 'start.cjs'),
+      '--no-open',
+      ...(words.length > 0 ? words : ['--port', '0']),
+    ],
+    { stdio: ['ignore', 'pipe', 'inherit'] },
+  );
+  const address = await new Promise<string>((resolve, reject) => {
+    let said = '';
+    server.stdout!.on('data', (words: Buffer) => {
+      said += String(words);
+      const found = /http:\/\/\S+/.exec(said);
+      if (found) resolve(found[0]);
+    });
+    server.on('exit', () => reject(new Error(`the server ended: ${said}`)));
+  });
+  return { server, address };
+}
+
+async function openPage(
+  browser: Browser,
+  address: string,
+  options: BrowserContextOptions = {},
+): Promise<BenchPage> {
+  const context = await browser.newContext({ viewport: { width: 1280, height: 800 }, ...options });
+  const page = await context.newPage();
+  const complaints = listenTo(page, address);
+  // as in a browser that cannot ask where to save: what is saved can then be caught
+  await page.addInitScript(() => Reflect.deleteProperty(window, 'showSaveFilePicker'));
+  await page.goto(address);
+  await page.waitForFunction(() => 'flaskpace' in window);
+
+  const cells = (reference: string): Promise<CellRange> =>
+    page.evaluate(async (area) => (await window.flaskpace.port.read(area)).cells, {
+      sheet: 'Gas run',
+      ...parseArea(reference)!,
+    });
+  const select = async (reference: string): Promise<void> => {
+    await page.evaluate((one) => window.flaskpace.select(one), reference);
+    await page.waitForTimeout(50); // the grid draws what it was told
+  };
+  return {
+    page,
+    complaints,
+    cells,
+    select,
+    show: (rows) => page.evaluate((book) => window.flaskpace.open(book), bookOf(rows)),
+    async type(reference, typed) {
+      await select(reference);
+      await page.keyboard.type(typed);
+      await page.keyboard.press('Enter');
+    },
+    async shows(reference, expected) {
+      await waitUntil(async () => JSON.stringify(await cells(reference)) === JSON.stringify(expected));
+      expect(await cells(reference)).toEqual(expected);
+    },
+    close: () => context.close(),
+  };
+}
+
+/** Gives up without a word after a while: the expectation that follows says what is there instead. */
+async function waitUntil(isTrue: () => Promise<boolean>, patience = 3000): Promise<void> {
+  const end = Date.now() + patience;
+  while (!(await isTrue()) && Date.now() < end) await new Promise((resolve) => setTimeout(resolve, 50));
+}
+
+function listenTo(page: Page, address: string): string[] {
+  const complaints: string[] = [];
+  page.on('pageerror', (error) => complaints.push(`error: ${error.message}`));
+  page.on('console', (message) => {
+    if (message.type() === 'error' || message.type() === 'warning') complaints.push(message.text());
+  });
+  page.on('request', (request) => {
+    const url = request.url();
+    if (!url.startsWith(address) && !/^(data|blob):/.test(url)) complaints.push(`asked for ${url}`);
+  });
+  return complaints;
+}
+
+function bookOf(rows: readonly (readonly (number | string)[])[]): BookModel {
+  const cells = rows.flatMap((row, r) =>
+    row.map((typed, c): CellModel => {
+      const place = { row: r, column: c };
+      const isFormula = typeof typed === 'string' && typed.startsWith('=');
+      return isFormula ? { ...place, value: null, formula: typed.slice(1) } : { ...place, value: typed };
+    }),
+  );
+  return { sheets: [{ name: 'Gas run', cells }], names: [] };
+}
