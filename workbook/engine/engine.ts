@@ -1,5 +1,5 @@
 /** All that the product asks of a spreadsheet engine. One implementation, over Univer; nothing else imports it. */
-import type { CellError, CellValue } from '../../functions/cell';
+import { CellError, type CellValue } from '../../functions/cell';
 
 /** A sheet as it comes from a file or a demo: what was typed, before anything is calculated. */
 export interface BookModel {
@@ -41,6 +41,13 @@ export interface Calculated {
   /** The rows and columns a result covers, first cell included; 1 × 1 for a single value. */
   readonly spill: { readonly rows: number; readonly columns: number };
 }
+
+/** Whether a result takes more than its own cell, or would if there were room. */
+export const isSpill = (outcome: Calculated | undefined): boolean =>
+  outcome !== undefined &&
+  (outcome.spill.rows > 1 ||
+    outcome.spill.columns > 1 ||
+    (outcome.value instanceof CellError && outcome.value.code === '#SPILL!'));
 
 export interface CalculatedBook {
   /** The outcome of the formula in this cell; `undefined` where no formula stands. */

@@ -1,7 +1,7 @@
 /** A sheet of a new file. */
 import { areaName } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
-import type { CalculatedBook, CellModel, SheetModel } from '../engine/engine';
+import { isSpill, type CalculatedBook, CellModel, SheetModel } from '../engine/engine';
 import { cellXml, formulaXml } from './cellXml';
 import type { LookTable } from './createStyles';
 import { callsOurs, filedFormula } from './formulaText';
@@ -30,7 +30,7 @@ export function createSheet(sheet: SheetModel, calculated: CalculatedBook, looks
   for (const cell of sheet.cells.filter(({ formula }) => formula !== undefined)) {
     const outcome = calculated.formula(sheet.name, cell.row, cell.column);
     const spill = outcome?.spill ?? { rows: 1, columns: 1 };
-    const spills = spill.rows > 1 || spill.columns > 1;
+    const spills = isSpill(outcome);
     // Excel cuts a plain formula down to one value: what spills, or could, says so
     const dynamic = spills || callsOurs(cell.formula!);
     marked ||= dynamic;

@@ -1,4 +1,5 @@
 /** A formula as a person types it ↔ as a file stores it. Neither has a leading `=`. */
+import { anchorArray, withHash } from '../engine/anchorText';
 import { filedNameOf, filedPrefix, typedNameOf } from '../engine/names';
 import { filedModernName } from './modernFunctions';
 
@@ -11,11 +12,12 @@ const call = /^(.*?)(\s*\()$/s;
 /** `_xlfn.STDEV.S(A1:A9)+[2]!_xldudf_PACE_EVENT(B2)` → `STDEV.S(A1:A9)+PACE.EVENT(B2)`. */
 export function typedFormula(filed: string): string {
   const withoutLink = filed.replace(new RegExp(String.raw`\[\d+\]!(?=${filedPrefix})`, 'gi'), '');
-  return withoutLink.replace(parts, (part) => {
+  const typed = withoutLink.replace(parts, (part) => {
     const [, name, bracket] = call.exec(part) ?? [];
     if (name === undefined) return part.replace(/^_xlpm\./i, '');
     return `${typedNameOf(name) ?? name.replace(/^_xl(?:fn|ws|pm|udf)\.(?:_xlws\.)?/i, '')}${bracket}`;
   });
+  return withHash(typed);
 }
 
 /** Our own calls alone: what a file needs so that Excel knows them. `PACE.EVENT(B2)` → `_xldudf_PACE_EVENT(B2)`. */
@@ -29,7 +31,7 @@ export const withFiledNames = (formula: string): string =>
 /** The whole way: our calls, the prefixes of functions younger than the file format, and `F2#`. */
 export const filedFormula = (typed: string): string =>
   typed.replace(parts, (part) => {
-    if (part.endsWith('#') && part.length > 1) return `_xlfn.ANCHORARRAY(${part.slice(0, -1)})`;
+    if (part.endsWith('#') && part.length > 1) return `_xlfn.${anchorArray}(${part.slice(0, -1)})`;
     const [, name, bracket] = call.exec(part) ?? [];
     if (name === undefined) return part;
     return `${filedNameOf(name) ?? filedModernName(name) ?? name}${bracket}`;

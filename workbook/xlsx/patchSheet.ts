@@ -1,7 +1,7 @@
 /** One sheet's XML with its formulas' new values; whatever did not change stays as it was, to the letter. */
 import { areaName, parseArea, type Area } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
-import type { Calculated } from '../engine/engine';
+import { isSpill, type Calculated } from '../engine/engine';
 import { applyEdits, type Edit } from './edits';
 import { cellXml, filedValue, formulaXml, showsAlready } from './cellXml';
 import { filedFormula, withFiledNames } from './formulaText';
@@ -78,8 +78,7 @@ class SheetPatch {
   }
 
   private spills(row: number, column: number): boolean {
-    const { spill } = this.sheet.formula(row, column)!;
-    return spill.rows > 1 || spill.columns > 1;
+    return isSpill(this.sheet.formula(row, column));
   }
 
   /** An array formula of fixed size keeps its cells, whatever it answers. */

@@ -4,7 +4,8 @@ import { catalogue } from '../../../functions/catalogue';
 import { typedName, type CellFunction } from '../../../functions/define';
 import { parameterHelp } from '../../../functions/metadata';
 import { filedName } from '../names';
-import { AnchorArray, anchorArray } from './anchor';
+import { anchorArray } from '../anchorText';
+import { AnchorArray } from './anchor';
 import { engineFunction, type EngineFunctionClass } from './engineFunction';
 import { exampleArguments } from './exampleArguments';
 import { containFaults } from './faults';
@@ -12,7 +13,7 @@ import { mendLargeSpills } from './largeSpills';
 import { noteMessages } from './words';
 
 export { forgetMessages, messageAt } from './words';
-export { withHash, withoutHash } from './anchor';
+export { withHash, withoutHash } from '../anchorText';
 
 export interface FormulaPluginConfig {
   /** For the formula engine's plugin. */

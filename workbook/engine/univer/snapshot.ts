@@ -9,7 +9,7 @@ import {
 import type { IDefinedNamesServiceParam } from '@univerjs/engine-formula';
 import { CellError } from '../../../functions/cell';
 import type { BookModel, CellModel, SheetModel } from '../engine';
-import { withoutHash } from './anchor';
+import { withoutHash } from '../anchorText';
 
 export const unitId = 'book';
 
