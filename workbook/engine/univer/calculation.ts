@@ -11,6 +11,7 @@ import {
   Lexer,
   type IAllRuntimeData,
 } from '@univerjs/engine-formula';
+import { circles } from './cycles';
 import { unitId } from './snapshot';
 
 /**
@@ -21,6 +22,12 @@ const mostRounds = 10;
 
 type Dataset = Parameters<CalculateFormulaService['execute']>[0];
 type Spills = Pick<Dataset, 'arrayFormulaRange' | 'arrayFormulaCellData'>;
+
+export interface Settled {
+  readonly result: IAllRuntimeData;
+  /** What is wrong with formulas in a circle, by `circleKey`. */
+  readonly circular: ReadonlyMap<string, string>;
+}
 
 /** The engine's own service answers through an event and loses what is thrown; this one answers its caller. */
 export class Calculation extends CalculateFormulaService {
@@ -39,7 +46,7 @@ export class Calculation extends CalculateFormulaService {
     this.model = injector.get(FormulaDataModel);
   }
 
-  async settle(): Promise<IAllRuntimeData> {
+  async settle(): Promise<Settled> {
     let result = await this.round({ arrayFormulaRange: {}, arrayFormulaCellData: {} });
     for (let rounds = 1, before = ''; rounds < mostRounds; rounds++) {
       const spills = spillsOf(result);
@@ -48,7 +55,13 @@ export class Calculation extends CalculateFormulaService {
       before = now;
       result = await this.round(spills);
     }
-    return result;
+    return { result, circular: await this.circular() };
+  }
+
+  private async circular(): Promise<ReadonlyMap<string, string>> {
+    return this._runtimeService.isCycleDependency()
+      ? circles(await this.getAllDependencyJson())
+      : new Map<string, string>();
   }
 
   private async round(spills: Spills): Promise<IAllRuntimeData> {

@@ -1,8 +1,9 @@
 /** What the engine worked out, as the product sees it. */
 import { CellValueType, type ICellData, type Nullable } from '@univerjs/core';
-import type { IAllRuntimeData } from '@univerjs/engine-formula';
 import { CellError, type CellValue } from '../../../functions/cell';
 import type { BookModel, Calculated, CalculatedBook, CellModel, SheetModel } from '../engine';
+import type { Settled } from './calculation';
+import { circleKey } from './cycles';
 import { sheetId, unitId } from './snapshot';
 import { errorCode, isErrorText } from './values';
 import { messageAt } from './words';
@@ -17,9 +18,9 @@ type CalculatedError = CalculatedBook['errors'][number];
 
 const key = (row: number, column: number): string => `${row},${column}`;
 
-export function readOutcome(book: BookModel, result: IAllRuntimeData): CalculatedBook {
+export function readOutcome(book: BookModel, settled: Settled): CalculatedBook {
   const outcomes = new Map(
-    book.sheets.map((sheet, place) => [sheet.name, sheetOutcome(sheet, sheetId(place), result)]),
+    book.sheets.map((sheet, place) => [sheet.name, sheetOutcome(sheet, sheetId(place), settled)]),
   );
   return {
     formula: (sheet, row, column) => outcomes.get(sheet)?.formulas.get(key(row, column)),
@@ -28,7 +29,7 @@ export function readOutcome(book: BookModel, result: IAllRuntimeData): Calculate
   };
 }
 
-function sheetOutcome(sheet: SheetModel, id: string, result: IAllRuntimeData): SheetOutcome {
+function sheetOutcome(sheet: SheetModel, id: string, { result, circular }: Settled): SheetOutcome {
   const results = result.unitData[unitId]?.[id];
   const spilled = result.arrayFormulaCellData[unitId]?.[id];
   const ranges = result.arrayFormulaRange[unitId]?.[id];
@@ -40,8 +41,12 @@ function sheetOutcome(sheet: SheetModel, id: string, result: IAllRuntimeData): S
   }
   for (const { row, column } of sheet.cells.filter(hasFormula)) {
     const range = ranges?.[row]?.[column];
-    const first = cellValue(results?.getValue(row, column), id, row, column);
-    const blocked = first instanceof CellError && first.code === '#SPILL!';
+    const circle = circular.get(circleKey(id, row, column));
+    const first =
+      circle === undefined
+        ? cellValue(results?.getValue(row, column), id, row, column)
+        : new CellError('#REF!', circle);
+    const blocked = first instanceof CellError && (first.code === '#SPILL!' || circle !== undefined);
     const spill =
       range && !blocked
         ? { rows: range.endRow - range.startRow + 1, columns: range.endColumn - range.startColumn + 1 }
@@ -68,11 +73,8 @@ function cellValue(cell: Nullable<ICellData>, id: string, row: number, column: n
   return value;
 }
 
-function errorShown(text: string, id: string, row: number, column: number): CellError {
-  const words =
-    text === '#CYCLE!' ? 'the formula depends on its own result' : messageAt(unitId, id, row, column, text);
-  return new CellError(errorCode(text), words ?? '');
-}
+const errorShown = (text: string, id: string, row: number, column: number): CellError =>
+  new CellError(errorCode(text), messageAt(unitId, id, row, column, text) ?? '');
 
 function errorsIn(sheet: SheetModel, { formulas }: SheetOutcome): CalculatedError[] {
   return sheet.cells
