@@ -44,13 +44,31 @@ export function findRoot(f: (x: number) => number, low: number, high: number, to
 }
 
 interface State {
-  a: number; b: number; c: number;
-  fa: number; fb: number; fc: number;
-  half: number; least: number; step: number; before: number;
+  a: number;
+  b: number;
+  c: number;
+  fa: number;
+  fb: number;
+  fc: number;
+  half: number;
+  least: number;
+  step: number;
+  before: number;
 }
 
 /** Secant or inverse quadratic step with the step before it, or nothing where bisection is the safer step. */
-function interpolationStep({ a, b, c, fa, fb, fc, half, least, step, before }: State): [number, number] | undefined {
+function interpolationStep({
+  a,
+  b,
+  c,
+  fa,
+  fb,
+  fc,
+  half,
+  least,
+  step,
+  before,
+}: State): [number, number] | undefined {
   if (Math.abs(before) < least || Math.abs(fa) <= Math.abs(fb)) return undefined;
   const s = fb / fa;
   let p: number;
@@ -66,5 +84,7 @@ function interpolationStep({ a, b, c, fa, fb, fc, half, least, step, before }: S
   }
   if (p > 0) q = -q;
   p = Math.abs(p);
-  return 2 * p < Math.min(3 * half * q - Math.abs(least * q), Math.abs(before * q)) ? [p / q, step] : undefined;
+  return 2 * p < Math.min(3 * half * q - Math.abs(least * q), Math.abs(before * q))
+    ? [p / q, step]
+    : undefined;
 }

@@ -40,10 +40,10 @@ export function factorQr(design: Float64Array, rows: number, columns: number): Q
 /** Euclidean length, without overflow. A loop: a long column does not fit into one call's arguments. */
 function lengthOf(column: Float64Array): number {
   let largest = 0;
-  for (const x of column) largest = Math.max(largest, Math.abs(x));
+  for (let i = 0; i < column.length; i++) largest = Math.max(largest, Math.abs(column[i]));
   if (largest === 0) return 0;
   let sum = 0;
-  for (const x of column) sum += (x / largest) ** 2;
+  for (let i = 0; i < column.length; i++) sum += (column[i] / largest) ** 2;
   return largest * Math.sqrt(sum);
 }
 

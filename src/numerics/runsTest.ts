@@ -6,7 +6,9 @@ const logChoose = (n: number, k: number): number => logGamma(n + 1) - logGamma(k
 function probabilityOfRuns(r: number, a: number, b: number): number {
   const total = logChoose(a + b, a);
   const ways = (i: number, j: number): number =>
-    i < 1 || j < 1 || i > a || j > b ? 0 : Math.exp(logChoose(a - 1, i - 1) + logChoose(b - 1, j - 1) - total);
+    i < 1 || j < 1 || i > a || j > b
+      ? 0
+      : Math.exp(logChoose(a - 1, i - 1) + logChoose(b - 1, j - 1) - total);
   const half = Math.floor(r / 2);
   return r % 2 === 0 ? 2 * ways(half, half) : ways(half, half + 1) + ways(half + 1, half);
 }

@@ -64,7 +64,10 @@ export function studentTail(t: number, degreesOfFreedom: number): number {
   const y = (t * t) / (degreesOfFreedom + t * t);
   // ln[xᵃ yᵇ / B(a, b)] with a = ν/2, b = ½
   const front = Math.exp(
-    logGammaHalfStep(half) - 0.5 * Math.log(Math.PI) - half * Math.log1p((t * t) / degreesOfFreedom) + 0.5 * Math.log(y),
+    logGammaHalfStep(half) -
+      0.5 * Math.log(Math.PI) -
+      half * Math.log1p((t * t) / degreesOfFreedom) +
+      0.5 * Math.log(y),
   );
   // the second form loses digits where the tail is small, the first converges slowly near t = 0
   return x < (half + 1) / (half + 2.5) && (t * t > 8 || degreesOfFreedom < 100)
@@ -89,7 +92,8 @@ export function studentQuantile(p: number, degreesOfFreedom: number): number {
   const key = `${p}|${degreesOfFreedom}`;
   const known = quantiles.get(key);
   if (known !== undefined) return known;
-  const quantile = p === 0.5 ? 0 : p < 0.5 ? -upperQuantile(p, degreesOfFreedom) : upperQuantile(1 - p, degreesOfFreedom);
+  const quantile =
+    p === 0.5 ? 0 : p < 0.5 ? -upperQuantile(p, degreesOfFreedom) : upperQuantile(1 - p, degreesOfFreedom);
   if (quantiles.size > 1000) quantiles.clear();
   quantiles.set(key, quantile);
   return quantile;

@@ -8,7 +8,11 @@ import { findRoot } from './findRoot';
  * @returns `undefined` where no valley lies within about a hundred of the start
  * @example valleyNear((x) => x - 3, 2, 1e-15) // 3
  */
-export function valleyNear(slope: (x: number) => number, start: number, tolerance: number): number | undefined {
+export function valleyNear(
+  slope: (x: number) => number,
+  start: number,
+  tolerance: number,
+): number | undefined {
   let reach = 0.05;
   for (let tries = 0; tries < 12; tries++, reach *= 2) {
     const low = start - reach;

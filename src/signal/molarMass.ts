@@ -21,6 +21,7 @@ export function molarMass(formula: string): number {
   let total = 0;
   for (const part of parts) {
     const [, count, body] = /^(\d*)(.*)$/.exec(part)!;
+    if (Number(count) === 0 && count !== '') fail('a count of 0', start, text);
     total += (count === '' ? 1 : Number(count)) * massOf(body, text, start + count.length);
     start += part.length + 1;
   }
@@ -28,41 +29,48 @@ export function molarMass(formula: string): number {
 }
 
 /** Subscript digits, as copied from a document, are digits. */
-const plainDigits = (text: string): string => text.replace(/[₀-₉]/g, (digit) => String(digit.charCodeAt(0) - 0x2080));
+const plainDigits = (text: string): string =>
+  text.replace(/[₀-₉]/g, (digit) => String(digit.charCodeAt(0) - 0x2080));
+
+function fail(why: string, at: number, whole: string): never {
+  throw new InvalidInput(
+    `formula must be made of element symbols and counts: ${why} at character ${at + 1} of "${whole}"`,
+  );
+}
 
 const token = /([A-Z][a-z]?)(\d*)|([([])|([)\]])(\d*)/y;
 
 function massOf(body: string, whole: string, offset: number): number {
-  const open: number[] = [];
+  const open: { readonly bracket: string; readonly massBefore: number }[] = [];
   let mass = 0;
-  const fail = (at: number, why: string): never => {
-    throw new InvalidInput(`formula must be made of element symbols and counts: ${why} at character ${offset + at + 1} of "${whole}"`);
-  };
-  if (body === '') fail(0, 'nothing');
+  const failAt = (at: number, why: string): never => fail(why, offset + at, whole);
+  if (body === '') failAt(0, 'nothing');
   token.lastIndex = 0;
   while (token.lastIndex < body.length) {
     const at = token.lastIndex;
     const match = token.exec(body);
-    if (!match) return fail(at, `"${body[at]}"`);
+    if (!match) return failAt(at, `"${body[at]}"`);
     const [, symbol, count, opening, closing, groupCount] = match;
     if (symbol) {
       const weight = atomicWeights[symbol];
-      if (weight === undefined) return fail(at, `"${symbol}" has no standard atomic weight`);
+      if (weight === undefined) return failAt(at, `"${symbol}" has no standard atomic weight`);
       mass += weight * countOf(count, at + symbol.length);
     } else if (opening) {
-      open.push(mass);
+      open.push({ bracket: opening, massBefore: mass });
       mass = 0;
     } else if (closing) {
       const before = open.pop();
-      if (before === undefined) return fail(at, `"${closing}" without its opening bracket`);
-      mass = before + mass * countOf(groupCount, at + 1);
+      if (before === undefined) return failAt(at, `"${closing}" without its opening bracket`);
+      if ((before.bracket === '(') !== (closing === ')'))
+        return failAt(at, `"${closing}" closes "${before.bracket}"`);
+      mass = before.massBefore + mass * countOf(groupCount, at + 1);
     }
   }
-  if (open.length > 0) fail(body.length, 'a bracket is not closed');
+  if (open.length > 0) failAt(body.length, 'a bracket is not closed');
   return mass;
 
   function countOf(digits: string, at: number): number {
     if (digits === '') return 1;
-    return Number(digits) > 0 ? Number(digits) : fail(at, 'a count of 0');
+    return Number(digits) > 0 ? Number(digits) : failAt(at, 'a count of 0');
   }
 }

@@ -1,9 +1,12 @@
 import quantiles from '../../reference/quantiles.json';
 import { studentQuantile, studentTail } from '../../../src/numerics/studentT';
 
-test.each(quantiles.cases)('studentQuantile($p, $df) meets fifty-digit arithmetic to 1e-12', ({ p, df, quantile }) => {
-  expect(Math.abs(studentQuantile(p, df) / quantile - 1)).toBeLessThan(1e-12);
-});
+test.each(quantiles.cases)(
+  'studentQuantile($p, $df) meets fifty-digit arithmetic to 1e-12',
+  ({ p, df, quantile }) => {
+    expect(Math.abs(studentQuantile(p, df) / quantile - 1)).toBeLessThan(1e-12);
+  },
+);
 
 test('studentQuantile(0.975, ∞) is the normal quantile (ISO 2854: 1.959964)', () => {
   expect(studentQuantile(0.975, Infinity)).toBeCloseTo(1.959963984540054, 12); // Abramowitz and Stegun, table 26.1
