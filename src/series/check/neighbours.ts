@@ -1,0 +1,88 @@
+/** Where a reading ought to lie, by its neighbours alone. */
+import { emptyLocalFit, fitLocalPolynomial } from '../../rate/localPolynomial';
+import type { Series } from '../series';
+
+export type Side = 'both' | 'before' | 'after';
+
+export interface Expectation {
+  readonly value: number;
+  /** Variance of `value`, in units of the variance of one reading. */
+  readonly variance: number;
+  /** What a curve of higher degree would say instead, less `value`: how little the neighbours agree on the bend. */
+  readonly doubt: number;
+  /** Scatter of the neighbours about their curve; `null` where they leave none. */
+  readonly scatter: number | null;
+}
+
+/** Eight neighbours carry a quadratic, and a rival of higher degree, with readings to spare. */
+const neighbourCount = 8;
+
+/** Two degrees for a window: on both sides an even rival, since an odd one changes nothing in the middle. */
+function degreesFor(distinct: number, side: Side): readonly [number, number] | null {
+  if (side === 'both' && distinct >= 6) return [2, 4];
+  if (distinct >= 5) return [2, 3];
+  return distinct >= 3 ? [1, 2] : null;
+}
+
+const fit = emptyLocalFit();
+
+/**
+ * Fits a quadratic through the nearest readings on the sides asked for, and sets beside it a curve of
+ * higher degree through the same readings.
+ *
+ * @param at time for which the reading is expected
+ * @param first,end the readings that may serve, `end` not among them
+ * @param left,right readings next to `at` on either side, the reading in question itself in neither
+ * @returns `null` where too few readings stand on that side
+ */
+function expectationFrom(
+  { times, values }: Series,
+  { at, first, end, left, right, side }: Place,
+): Expectation | null {
+  let [low, high] = [left, right];
+  const lowest = side === 'after' ? left : first - 1;
+  const highest = side === 'before' ? right : end;
+  while (high - low - 1 - (right - left - 1) < neighbourCount && (low > lowest || high < highest)) {
+    const takeLeft = high >= highest || (low > lowest && at - times[low] <= times[high] - at);
+    if (takeLeft) low--;
+    else high++;
+  }
+  const chosen = [...range(low + 1, left + 1), ...range(right, high)];
+  const [t, y] = [Float64Array.from(chosen, (i) => times[i]), Float64Array.from(chosen, (i) => values[i])];
+  const degrees = degreesFor(new Set(t).size, side);
+  if (!degrees) return null;
+  const rival = fitLocalPolynomial(t, y, 0, t.length, degrees[1], at, fit).value;
+  const { value, valueVariance, residualSumOfSquares, degreesOfFreedom } = fitLocalPolynomial(
+    t,
+    y,
+    0,
+    t.length,
+    degrees[0],
+    at,
+    fit,
+  );
+  const scatter = degreesOfFreedom > 0 ? Math.sqrt(residualSumOfSquares / degreesOfFreedom) : null;
+  return { value, variance: valueVariance, doubt: rival - value, scatter };
+}
+
+interface Place {
+  readonly at: number;
+  readonly first: number;
+  readonly end: number;
+  readonly left: number;
+  readonly right: number;
+  readonly side: Side;
+}
+
+const range = (from: number, to: number): number[] => Array.from({ length: Math.max(0, to - from) }, (_, i) => from + i);
+
+/** What reading i should be, had it not been taken. */
+export const expectedReading = (series: Series, i: number, side: Side): Expectation | null =>
+  expectationFrom(series, { at: series.times[i], first: 0, end: series.times.length, left: i - 1, right: i + 1, side });
+
+/** What the readings `first … end − 1` make of a time before or after them all. */
+export function expectedBeyond(series: Series, at: number, first: number, end: number): Expectation | null {
+  const side = at >= series.times[end - 1] ? 'before' : 'after';
+  const [left, right] = side === 'before' ? [end - 1, end] : [first - 1, first];
+  return expectationFrom(series, { at, first, end, left, right, side });
+}

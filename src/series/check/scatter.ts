@@ -1,0 +1,68 @@
+/** How much readings scatter, told by readings that a few bad ones cannot sway. */
+import { studentQuantile } from '../../numerics/studentT';
+import type { Series } from '../series';
+import { expectedReading } from './neighbours';
+
+/** Readings needed before scatter can be told from bend. */
+export const readingsForScatter = 7;
+
+export function median(numbers: readonly number[]): number {
+  const sorted = [...numbers].sort((a, b) => a - b);
+  const middle = sorted.length >> 1;
+  return sorted.length % 2 === 1 ? sorted[middle] : (sorted[middle - 1] + sorted[middle]) / 2;
+}
+
+/** The smallest step between readings that differ: the instrument's resolution, or finer. 0 when all are equal. */
+export function smallestStep(values: ArrayLike<number>): number {
+  const sorted = Float64Array.from(values).sort();
+  const noise = 1e-12 * Math.max(Math.abs(sorted[0]), Math.abs(sorted[sorted.length - 1]));
+  let step = Infinity;
+  for (let i = 1; i < sorted.length; i++) {
+    const gap = sorted[i] - sorted[i - 1];
+    if (gap > noise && gap < step) step = gap;
+  }
+  return step === Infinity ? 0 : step;
+}
+
+/** Largest less smallest reading. A loop: a long column does not fit into one call's arguments. */
+export function spread(values: ArrayLike<number>): number {
+  let [low, high] = [Infinity, -Infinity];
+  for (let i = 0; i < values.length; i++) {
+    low = Math.min(low, values[i]);
+    high = Math.max(high, values[i]);
+  }
+  return Math.max(0, high - low);
+}
+
+/**
+ * Standard deviation of one reading: the median distance of readings from the curve through their
+ * neighbours, each divided by what that curve's own scatter adds, times 1.4826 (normal scatter).
+ *
+ * Never below what rounding to the resolution must add, nor below the last digits of a computed column.
+ *
+ * @see F. R. Hampel, J. Am. Stat. Assoc. 69 (1974) 383, doi:10.1080/01621459.1974.10482962
+ */
+export function scatterOf(series: Series): number {
+  const { values } = series;
+  const floor = Math.max(smallestStep(values) / Math.sqrt(12), 1e-9 * spread(values), Number.MIN_VALUE);
+  if (values.length < readingsForScatter) return floor;
+  const distances: number[] = [];
+  for (let i = 0; i < values.length; i++) {
+    const expected = expectedReading(series, i, 'both');
+    if (expected) distances.push(Math.abs(values[i] - expected.value) / Math.sqrt(1 + expected.variance));
+  }
+  return distances.length === 0 ? floor : Math.max(floor, 1.4826 * median(distances));
+}
+
+/** A median settles the scatter only as well as 37 % of the readings would by their standard deviation. */
+const medianEfficiency = 0.37;
+
+/**
+ * How many standard deviations off counts as beyond scatter: Student's t for a chance of 1 % that any one
+ * of the readings of a clean run goes beyond it, and never less than 4.5.
+ *
+ * @see efficiency of the median: P. J. Rousseeuw and C. Croux, J. Am. Stat. Assoc. 88 (1993) 1273,
+ *   doi:10.1080/01621459.1993.10476408
+ */
+export const limitFor = (readings: number): number =>
+  Math.max(4.5, studentQuantile(1 - 0.005 / readings, medianEfficiency * readings));
