@@ -4,9 +4,13 @@ import { join } from 'node:path';
 import type { Browser, BrowserContextOptions, Page } from 'playwright-core';
 import { parseArea } from '../../functions/address';
 import type { CellRange } from '../../functions/cell';
+import { demoWorkbook } from '../../workbook/demo/demo';
 import type { BookModel, CellModel } from '../../workbook/engine/engine';
 import type { Scripting } from '../../workbook/page/scripting';
 import { launchBrowser } from './browser';
+
+/** A machine with much else to do takes its time. */
+jest.setTimeout(30_000);
 
 const root = join(__dirname, '..', '..');
 
@@ -32,6 +36,8 @@ export interface BenchPage {
   /** Clicks into the cell, types, and confirms with Enter. */
   type(reference: string, typed: string): Promise<void>;
   select(reference: string): Promise<void>;
+  /** Shows the demo as it is at first, whatever was done to it. */
+  showDemo(): Promise<void>;
   /** Shows these rows of a sheet "Gas run" in place of the demo, from A1 on; what begins with = is a formula. */
   show(rows: readonly (readonly (number | string)[])[]): Promise<void>;
   /** Waits until the cells show this. */
@@ -100,6 +106,7 @@ async function openPage(
       sheet: 'Gas run',
       ...parseArea(reference)!,
     });
+  const show = (book: BookModel): Promise<void> => page.evaluate((one) => window.flaskpace.open(one), book);
   const select = async (reference: string): Promise<void> => {
     await page.evaluate((one) => window.flaskpace.select(one), reference);
     await page.waitForTimeout(50); // the grid draws what it was told
@@ -109,7 +116,8 @@ async function openPage(
     complaints,
     cells,
     select,
-    show: (rows) => page.evaluate((book) => window.flaskpace.open(book), bookOf(rows)),
+    showDemo: () => show(demoWorkbook()),
+    show: (rows) => show(bookOf(rows)),
     async type(reference, typed) {
       await select(reference);
       await page.keyboard.type(typed);

@@ -6,13 +6,11 @@ let sheet: BenchPage;
 
 beforeAll(async () => {
   bench = await startBench();
+  sheet = await bench.open();
 }, longestStart);
 afterAll(() => bench?.close());
 
-beforeEach(async () => {
-  sheet = await bench.open();
-}, 30_000);
-afterEach(() => sheet.close());
+afterEach(() => sheet.showDemo());
 
 const line = (): Promise<string> => sheet.page.locator('#cell-line').innerText();
 

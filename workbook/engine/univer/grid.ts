@@ -9,6 +9,7 @@ import {
 import { SheetsSelectionsService } from '@univerjs/sheets';
 import { FormulaCalculationSessionService } from '@univerjs/sheets-formula';
 import { ILayoutService } from '@univerjs/ui';
+import { merge, Subject } from 'rxjs';
 import type { BookModel } from '../engine';
 import type { Grid, GridArea, Stop } from '../grid';
 import { nameControls } from './grid/accessibleNames';
@@ -38,6 +39,9 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
       ),
       injector,
     );
+  /** While one book goes and the next comes, events tell of neither. */
+  let isOpening = false;
+  const reopened = new Subject<void>();
   let sheets = show(first); // the engine's services exist only once it has a workbook
   const selections = injector.get(SheetsSelectionsService);
   const session = injector.get(FormulaCalculationSessionService);
@@ -56,11 +60,15 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
     session.waitForLatestApplied(longestWait).catch(() => undefined) as Promise<void>;
 
   async function open(book: BookModel): Promise<void> {
+    await api.getActiveWorkbook()?.abortEditingAsync(); // an editor left open would outlive its cell
     const before = sheets.workbook.getUnitId();
+    isOpening = true;
     instances.disposeUnit(before);
     forgetMessages(before);
     sheets = show(book);
+    isOpening = false;
     await calculation();
+    reopened.next();
   }
 
   function selected(): GridArea | null {
@@ -126,16 +134,18 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
     },
     focus: () => injector.get(ILayoutService).focus(),
     setDark: (dark) => api.toggleDarkMode(dark),
-    onSelection: (listener) => stopOf(selections.selectionChanged$.subscribe(() => listener())),
+    onSelection: (listener) =>
+      stopOf(merge(selections.selectionChanged$, reopened).subscribe(() => isOpening || listener())),
     onEdit: (listener) =>
       stopOf(
         commands.onCommandExecuted(({ id, params }, options) => {
           const isResult = options?.fromFormula || options?.onlyLocal;
           const unit = (params as { unitId?: string } | undefined)?.unitId;
-          if (id.startsWith(edits) && !isResult && unit === sheets.workbook.getUnitId()) listener();
+          if (!isOpening && id.startsWith(edits) && !isResult && unit === sheets.workbook.getUnitId())
+            listener();
         }),
       ),
-    onCalculated: (listener) => stopOf(session.resultApplied$.subscribe(() => listener())),
+    onCalculated: (listener) => stopOf(session.resultApplied$.subscribe(() => isOpening || listener())),
     dispose() {
       stopNaming();
       univer.dispose();
