@@ -7,13 +7,34 @@ import along from './rate/along';
 import between from './rate/between';
 import event from './rate/event';
 import tangent from './rate/tangent';
+import absorbance from './signal/absorbance';
+import acidity from './signal/acidity';
+import clock from './signal/clock';
+import conductivity from './signal/conductivity';
+import conversion from './signal/conversion';
+import dissolved from './signal/dissolved';
+import gasPressure from './signal/gasPressure';
+import standards from './signal/standards';
+import titre from './signal/titre';
+import totalPressure from './signal/totalPressure';
+import unit from './order/unit';
 import gasVolume from './signal/gasVolume';
 import massLoss from './signal/massLoss';
 import remaining from './signal/remaining';
 
 export const catalogue: readonly CellFunction[] = [
+  clock,
   gasVolume,
+  gasPressure,
+  totalPressure,
+  dissolved,
   massLoss,
+  acidity,
+  absorbance,
+  conductivity,
+  titre,
+  standards,
+  conversion,
   remaining,
   between,
   tangent,
@@ -22,6 +43,7 @@ export const catalogue: readonly CellFunction[] = [
   orders,
   coefficient,
   halfLife,
+  unit,
 ];
 
 export const functionNamed = (name: string): CellFunction | undefined =>

@@ -23,7 +23,12 @@ export interface Definition<P extends Parameters> {
   readonly parameters: P;
   readonly result: { readonly unit: string; readonly shape: 'one value' | 'as given' | 'column' | 'table' };
   /** Typed into an empty cell it gives `equals`: the value, or the first cells of each row that spills. */
-  readonly example: { readonly formula: string; readonly equals: CellResult };
+  readonly example: {
+    readonly formula: string;
+    readonly equals: CellResult;
+    /** Relative, where the outside value has fewer digits than ours; rounding alone when left out. */
+    readonly within?: number;
+  };
   /** DOI or standard. */
   readonly reference: string;
   /** Where the work this serves can hurt someone. */

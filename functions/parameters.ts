@@ -3,9 +3,9 @@
  * default, bounds) and reads its argument from cells, or refuses in words.
  */
 import { InvalidInput, shown } from '../src/errors';
-import { convertQuantity, isUnit, parseQuantity } from '../src/units';
+import { isUnit } from '../src/units';
 import { CellError, shownCell, type CellRange, type CellValue } from './cell';
-import { readColumn, requireLine, type Column } from './column';
+import { placeInWords, readColumn, requireLine, type Column } from './column';
 
 export interface Bounds {
   readonly above?: number;
@@ -40,7 +40,7 @@ export interface Parameter<T = unknown> {
   read(cells: CellRange | undefined, name: string): T;
 }
 
-interface About {
+export interface About {
   readonly help: string;
   readonly unit?: string;
 }
@@ -83,18 +83,11 @@ function isWithin(value: number, { above, atLeast, below, atMost, whole }: Bound
 }
 
 /** @param where `: row 7` inside a range, empty for a single value */
-function requireWithin(value: number, bounds: Bounds, name: string, unit: string, where = ''): number {
+export function requireWithin(value: number, bounds: Bounds, name: string, unit: string, where = ''): number {
   if (isWithin(value, bounds)) return value;
   throw new InvalidInput(
     `${name} must be ${boundsInWords(bounds)}: ${where ? `${where} (${withUnit(value, unit)})` : `got ${withUnit(value, unit)}`}`,
   );
-}
-
-/** Where in its range a reading stands, as a person would count it. */
-export function placeInWords(place: number, column: Pick<Column, 'rows' | 'columns'>): string {
-  if (column.columns === 1) return `row ${place + 1}`;
-  if (column.rows === 1) return `column ${place + 1}`;
-  return `row ${Math.floor(place / column.columns) + 1}, column ${(place % column.columns) + 1}`;
 }
 
 /** One pure number or one number in the unit of the columns. */
@@ -114,85 +107,6 @@ export function number(about: About & Bounds): Parameter<number> {
       return requireWithin(cell, bounds, name, unit);
     },
   };
-}
-
-/** One physical quantity: a bare number in `unit`, or text with a unit of its own. Read as a number of `to`. */
-export function quantity(
-  about: About & Bounds & { readonly unit: string; readonly to: string },
-): Parameter<number> {
-  const { help, unit, to, ...bounds } = about;
-  return {
-    kind: 'quantity',
-    help,
-    unit,
-    dimension: 'scalar',
-    optional: false,
-    bounds,
-    read: (cells, name) => readQuantity(single(required(cells, name), name), { name, unit, to, bounds }),
-  };
-}
-
-/** The same for every reading, or one a reading: a quantity, or a range of them as long as the readings. */
-export function quantities(
-  about: About & Bounds & { readonly unit: string; readonly to: string },
-): Parameter<readonly number[]> {
-  const { help, unit, to, ...bounds } = about;
-  return {
-    kind: 'quantities',
-    help: `${help}; one value, or one a reading`,
-    unit,
-    dimension: 'matrix',
-    optional: false,
-    bounds,
-    read(cells, name) {
-      const rows = required(cells, name);
-      const shape = { rows: rows.length, columns: rows[0]?.length ?? 0 };
-      const flat = rows.flat();
-      return flat.map((cell, place) => {
-        if (cell instanceof CellError) throw cell;
-        const where = flat.length === 1 ? '' : placeInWords(place, shape);
-        return readQuantity(cell, { name, unit, to, bounds, where });
-      });
-    },
-  };
-}
-
-/**
- * One quantity for all readings, or one each.
- *
- * @returns the quantity that belongs to the reading at a place
- * @throws InvalidInput where there are neither one nor as many as readings
- */
-export function requireOneEach(
-  given: readonly number[],
-  readings: Column,
-  name: string,
-): (place: number) => number {
-  if (given.length !== 1 && given.length !== readings.numbers.length) {
-    throw new InvalidInput(
-      `${name} must be one value or one a reading: got ${given.length} for ${readings.numbers.length} readings`,
-    );
-  }
-  return (place) => (given.length === 1 ? given[0] : given[place]);
-}
-
-function readQuantity(
-  cell: CellValue,
-  {
-    name,
-    unit,
-    to,
-    bounds,
-    where = '',
-  }: { name: string; unit: string; to: string; bounds: Bounds; where?: string },
-): number {
-  const inUnit = typeof cell === 'string' && cell.trim() !== '' ? parseQuantity(cell, unit, name) : cell;
-  if (typeof inUnit !== 'number') {
-    throw new InvalidInput(
-      `${name} must be a number or text with a unit: ${where ? `${where} is` : 'got'} ${shownCell(cell)}`,
-    );
-  }
-  return convertQuantity(requireWithin(inUnit, bounds, name, unit, where), unit, to);
 }
 
 /** Times or readings from which something is estimated: one column or one row; blank and text cells are gaps. */

@@ -2,9 +2,8 @@
 import { InvalidInput } from '../src/errors';
 import { pairReadings, type Series } from '../src/series/series';
 import type { CellValue } from './cell';
-import { linesBeside, type Column } from './column';
+import { linesBeside, placeInWords, type Column } from './column';
 import type { Uncertainties } from './commonParameters';
-import { placeInWords } from './parameters';
 
 export const seriesOf = (times: Column, values: Column): Series =>
   pairReadings(times.numbers, values.numbers);

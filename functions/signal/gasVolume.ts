@@ -3,7 +3,8 @@ import { convertUnit } from '../../src/units';
 import { convertColumn } from '../column';
 import { saturation } from '../commonParameters';
 import { defineFunction } from '../define';
-import { optional, quantities, quantity, readings, requireOneEach, text } from '../parameters';
+import { optional, readings, text } from '../parameters';
+import { quantities, quantity, requireOneEach } from '../quantityParameters';
 
 export default defineFunction({
   name: 'GASVOLUME',

@@ -1,10 +1,10 @@
-import { InvalidInput } from '../../src/errors';
 import { amountLost, amountLostEstimate, massPerMole, requireVisibleLoss } from '../../src/signal/massLoss';
 import { molarMass } from '../../src/signal/molarMass';
-import { convertColumn, convertToRows, requireLine, type Column } from '../column';
+import { convertColumn, convertToRows, firstNumber, requireLine, type Column } from '../column';
 import { detail } from '../commonParameters';
 import { defineFunction } from '../define';
-import { number, optional, quantity, readings, text } from '../parameters';
+import { number, optional, readings, text } from '../parameters';
+import { quantity } from '../quantityParameters';
 import { standardRow, unknownUncertaintyRow } from '../results';
 
 export default defineFunction({
@@ -48,7 +48,7 @@ export default defineFunction({
       typeof gas === 'number' ? gas : molarMass(gas),
       temperature === undefined ? undefined : { temperature, pressure },
     );
-    const from = start ?? firstReading(masses);
+    const from = start ?? firstNumber(masses, 'masses').value;
     if (readability !== undefined) requireVisibleLoss(largestLoss(masses, from), readability);
     if (!detail) return convertColumn(masses, (mass) => amountLost(mass, from, perMole));
     requireLine(masses, 'masses');
@@ -59,13 +59,6 @@ export default defineFunction({
     );
   },
 });
-
-function firstReading({ numbers }: Column): number {
-  const first = numbers.find((mass) => mass !== null);
-  if (first === undefined || first === null)
-    throw new InvalidInput('masses must hold numbers: none was found');
-  return first;
-}
 
 const largestLoss = ({ numbers }: Column, start: number): number =>
   numbers.reduce<number>((most, mass) => (mass === null ? most : Math.max(most, start - mass)), 0);

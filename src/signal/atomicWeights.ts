@@ -7,6 +7,7 @@
  * Source: T. Prohaska et al., Pure Appl. Chem. 94 (2022) 573, doi:10.1515/pac-2019-0603; the table of
  * ciaaw.org as carried by the public-domain file mass.py of the periodictable project.
  */
+// prettier-ignore
 export const atomicWeights: Readonly<Record<string, number>> = {
   H: 1.008, He: 4.002602, Li: 6.94, Be: 9.0121831, B: 10.81, C: 12.011, N: 14.007, O: 15.999,
   F: 18.998403162, Ne: 20.1797, Na: 22.98976928, Mg: 24.305, Al: 26.9815384, Si: 28.085,

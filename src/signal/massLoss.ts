@@ -14,7 +14,10 @@ import { saturationPressure } from './water';
  * @throws InvalidInput where the water would boil
  * @example massPerMole(44.009) // 44.009
  */
-export function massPerMole(gasMolarMass: number, vapour?: { temperature: number; pressure: number }): number {
+export function massPerMole(
+  gasMolarMass: number,
+  vapour?: { temperature: number; pressure: number },
+): number {
   requirePositive({ molarMass: gasMolarMass });
   if (!vapour) return gasMolarMass;
   const water = saturationPressure(vapour.temperature);
@@ -70,9 +73,20 @@ export function requireVisibleLoss(largestLoss: number, readability: number): vo
 }
 
 /** The amount lost with its uncertainty from the balance's readability (type B, normal limits). */
-export function amountLostEstimate(mass: number, start: number, perMole: number, readability: number): Estimate {
+export function amountLostEstimate(
+  mass: number,
+  start: number,
+  perMole: number,
+  readability: number,
+): Estimate {
   const value = amountLost(mass, start, perMole);
   const standardUncertainty = differenceUncertainty(readability) / perMole;
   const reach = studentQuantile(0.975, Infinity) * standardUncertainty;
-  return { value, standardUncertainty, lower: value - reach, upper: value + reach, degreesOfFreedom: Infinity };
+  return {
+    value,
+    standardUncertainty,
+    lower: value - reach,
+    upper: value + reach,
+    degreesOfFreedom: Infinity,
+  };
 }

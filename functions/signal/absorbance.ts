@@ -1,0 +1,43 @@
+import { InvalidInput } from '../../src/errors';
+import { concentrationFromAbsorbance } from '../../src/signal/absorbance';
+import { convertColumn } from '../column';
+import { defineFunction } from '../define';
+import { number, optional, readings } from '../parameters';
+import { quantity } from '../quantityParameters';
+
+export default defineFunction({
+  name: 'ABSORBANCE',
+  family: 'reading',
+  summary: 'Concentration, mol/L, from absorbance by the law of Beer and Lambert.',
+  method:
+    'c = (A − A₀)/(εl). Where the reactant turns one to one into a product that absorbs as well, c = [(A − A₀)/l − ε(product)·total]/(ε − ε(product)). Straight only up to an absorbance of about 2 on most instruments (common practice).',
+  parameters: {
+    readings: readings({ help: 'absorbance, decadic, one or many', unit: '1' }),
+    absorptivity: number({ help: 'molar, of the species wanted', unit: 'L/(mol cm)', atLeast: 0 }),
+    path: optional(quantity({ help: 'through the sample', unit: 'cm', to: 'cm', above: 0 }), 1, '1 cm'),
+    blank: optional(number({ help: 'absorbance of the cell without it' }), 0),
+    product: optional(
+      number({ help: 'molar absorptivity of the product', unit: 'L/(mol cm)', atLeast: 0 }),
+      undefined,
+      'the product does not absorb',
+    ),
+    total: optional(
+      quantity({ help: 'reactant and product together', unit: 'mol/L', to: 'mol/L', above: 0 }),
+      undefined,
+      'needed only with product',
+    ),
+  },
+  result: { unit: 'mol/L', shape: 'as given' },
+  example: { formula: '=PACE.ABSORBANCE({0.012;0.512},2500,1,0.012)', equals: [[0], [0.0002]] },
+  reference: 'doi:10.1351/goldbook.B00626',
+  run({ readings, absorptivity, path, blank, product, total }) {
+    if ((product === undefined) !== (total === undefined)) {
+      const [given, missing] = product === undefined ? ['total', 'product'] : ['product', 'total'];
+      throw new InvalidInput(`${missing} is needed with ${given}: nothing was given`);
+    }
+    const second = product === undefined ? undefined : { absorptivity: product, total: total! };
+    return convertColumn(readings, (reading) =>
+      concentrationFromAbsorbance(reading, { absorptivity, path, blank, ...(second && { product: second }) }),
+    );
+  },
+});

@@ -1,0 +1,49 @@
+import { InvalidInput } from '../../src/errors';
+import { ionFromPH, type AcidityIon } from '../../src/signal/acidity';
+import { highestIonicStrength } from '../../src/signal/activity';
+import { convertColumn } from '../column';
+import { defineFunction } from '../define';
+import { optional, readings, text } from '../parameters';
+import { quantity } from '../quantityParameters';
+
+export default defineFunction({
+  name: 'ACIDITY',
+  family: 'reading',
+  summary: 'Concentration of H⁺ or OH⁻, mol/L, from pH.',
+  method:
+    'c(H⁺) = 10^−pH/γ and c(OH⁻) = 10^(pH − pKw)/γ, with pKw by the IAPWS release R11-24. γ follows Davies, lg γ = −A[√I/(1 + √I) − 0.3I], with A from the dielectric constant of water (IAPWS R8-97) at the temperature; without an ionic strength γ is 1.',
+  parameters: {
+    pH: readings({ help: 'one or many', unit: '1', atLeast: -2, atMost: 16 }),
+    ionicstrength: optional(
+      quantity({
+        help: 'of the solution',
+        unit: 'mol/L',
+        to: 'mol/L',
+        atLeast: 0,
+        atMost: highestIonicStrength,
+      }),
+      undefined,
+      'activity stands for concentration',
+    ),
+    temperature: optional(
+      quantity({ help: 'of the solution', unit: 'degC', to: 'K', atLeast: 0, atMost: 100 }),
+      298.15,
+      '25 degC',
+    ),
+    species: optional(text({ help: '"H" or "OH"' }), 'H'),
+  },
+  result: { unit: 'mol/L', shape: 'as given' },
+  example: { formula: '=PACE.ACIDITY({3;2.5})', equals: [[0.001], [0.0031622776601683794]] },
+  reference: 'doi:10.1351/goldbook.P04524; IAPWS R11-24; IAPWS R8-97',
+  caution: 'Strong acids and alkalis burn: goggles and gloves, acid into water. Local rules come first.',
+  run({ pH, ionicstrength, temperature, species }) {
+    const ion = ionNamed(species);
+    return convertColumn(pH, (value) => ionFromPH(value, ion, { ionicStrength: ionicstrength, temperature }));
+  },
+});
+
+function ionNamed(species: string): AcidityIon {
+  const name = species.toUpperCase().replace(/[+⁺\-−⁻]$/, '');
+  if (name === 'H' || name === 'OH') return name;
+  throw new InvalidInput(`species must be "H" or "OH": got "${species}"`);
+}

@@ -1,0 +1,38 @@
+import { concentrationFromConductivity, conductivityAt25 } from '../../src/signal/linear';
+import { convertColumn } from '../column';
+import { defineFunction } from '../define';
+import { number, optional, readings } from '../parameters';
+import { quantities, requireOneEach } from '../quantityParameters';
+
+export default defineFunction({
+  name: 'CONDUCTIVITY',
+  family: 'reading',
+  summary: 'Concentration left, from a conductivity that moves from a start to an end value.',
+  method:
+    'c = c₀(κ − κ∞)/(κ₀ − κ∞), which holds for dilute solutions, in which each ion adds its share. With temperatures each reading is first brought to 25 °C, κ/[1 + α(t − 25)]; start and end are then meant at 25 °C. 2 % per °C suits most salts (common practice); acids and alkalis need less.',
+  parameters: {
+    readings: readings({ help: 'conductivity or conductance, one or many', unit: 'of start', atLeast: 0 }),
+    start: number({ help: 'reading before the reaction', unit: 'of the readings', atLeast: 0 }),
+    end: number({ help: 'reading when all has reacted', unit: 'of the readings', atLeast: 0 }),
+    initial: number({ help: 'concentration at the start', unit: 'any concentration', above: 0 }),
+    temperatures: optional(
+      quantities({ help: 'of the solution', unit: 'degC', to: 'degC' }),
+      undefined,
+      'readings are taken as they are',
+    ),
+    percent: optional(number({ help: 'change per degC at 25 degC', unit: '%', above: 0, atMost: 10 }), 2),
+  },
+  result: { unit: 'of initial', shape: 'as given' },
+  example: {
+    formula: '=PACE.CONDUCTIVITY({2.5;1.7;0.9},2.5,0.9,0.01)',
+    equals: [[0.01], [0.005], [0]],
+  },
+  reference: 'ISO 7888:1985',
+  run({ readings, start, end, initial, temperatures, percent }) {
+    const temperatureOf = temperatures && requireOneEach(temperatures, readings, 'temperatures');
+    return convertColumn(readings, (reading, place) => {
+      const at25 = temperatureOf ? conductivityAt25(reading, temperatureOf(place), percent) : reading;
+      return concentrationFromConductivity(at25, start, end, initial);
+    });
+  },
+});

@@ -1,0 +1,23 @@
+import { pressureLeft } from '../../src/signal/gasPressure';
+import { convertColumn } from '../column';
+import { defineFunction } from '../define';
+import { number, readings } from '../parameters';
+
+export default defineFunction({
+  name: 'TOTALPRESSURE',
+  family: 'reading',
+  summary: 'Pressure of a gas that is left, from the total pressure while it turns into other gases.',
+  method: 'p(A) = p₀ − (p − p₀)/Δν at constant volume and temperature, with A alone at the start.',
+  parameters: {
+    totals: readings({ help: 'total pressure, one or many', unit: 'of start', atLeast: 0 }),
+    start: number({ help: 'pressure of A alone, before the reaction', unit: 'of totals', above: 0 }),
+    gain: number({ help: 'moles of gas gained per mole of A: 1.5 for 2 A → 5 other gases; not 0' }),
+  },
+  result: { unit: 'of totals', shape: 'as given' },
+  // 2 N2O5 → 4 NO2 + O2: at 55.1, 8.7 have been gained and 5.8 used
+  example: { formula: '=PACE.TOTALPRESSURE({46.4;55.1},46.4,1.5)', equals: [[46.4], [40.6]] },
+  reference: 'doi:10.1351/goldbook.S06025',
+  caution:
+    'Pressure in closed glass can burst it: stay below what the vessel is made for, with a shield and a relief valve. Local rules come first.',
+  run: ({ totals, start, gain }) => convertColumn(totals, (total) => pressureLeft(total, start, gain)),
+});
