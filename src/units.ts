@@ -22,7 +22,10 @@ interface Quantity {
 
 interface QuantityClass {
   new (value: number, unit: string): Quantity;
-  createUnit(units: Record<string, { definition: string; prefixes?: string }>, options: { override: boolean }): void;
+  createUnit(
+    units: Record<string, { definition: string; prefixes?: string }>,
+    options: { override: boolean },
+  ): void;
 }
 
 /** Stands in for mathjs's big fractions, of which its unit table uses 5/9 alone. */
@@ -95,13 +98,17 @@ const kelvin = new Quantities(1, 'K');
 
 const quantityText = /^([+−-]?(?:\d+(?:[.,]\d*)?|[.,]\d+)(?:e[+-]?\d+)?)\s*(.*)$/i;
 
+/** A second number before the unit, which mathjs would multiply in: `"1 000 mL"` is not 0 mL. */
+const secondNumber = /^(?!1\s*\/)\d/;
+
 function unitOf(text: string, name: string): Quantity {
   const spelled = spellings[text] ?? text;
   try {
-    return new Quantities(1, spelled);
+    if (!secondNumber.test(text)) return new Quantities(1, spelled);
   } catch {
-    throw new InvalidInput(`${name} must carry a unit that is known: got "${text}"`);
+    // said below
   }
+  throw new InvalidInput(`${name} must carry a unit that is known: got "${text}"`);
 }
 
 /** Whether the text is a unit that is known. @example isUnit('mmHg') // true */
@@ -122,7 +129,8 @@ export function isUnit(text: string): boolean {
  */
 export function parseQuantity(text: string, unit: string, name: string): number {
   const match = quantityText.exec(text.trim());
-  if (!match) throw new InvalidInput(`${name} must be a number with a unit, such as "1 ${unit}": got "${text}"`);
+  if (!match)
+    throw new InvalidInput(`${name} must be a number with a unit, such as "1 ${unit}": got "${text}"`);
   const value = Number(match[1].replace(',', '.').replace('−', '-'));
   return match[2] === '' ? value : convertUnit(value, match[2].trim(), unit, name);
 }
@@ -135,7 +143,9 @@ export function convertUnit(value: number, from: string, to: string, name: strin
   const source = unitOf(from, name);
   const target = unitOf(to, name);
   if (!source.equalBase(target)) {
-    throw new InvalidInput(`${name} must be in a unit like ${to}: ${shown(value)} ${from} measures something else`);
+    throw new InvalidInput(
+      `${name} must be in a unit like ${to}: ${shown(value)} ${from} measures something else`,
+    );
   }
   const spelled = spellings[from] ?? from;
   if (source.equalBase(kelvin) && convertQuantity(value, spelled, 'K') < 0) {
