@@ -5,11 +5,23 @@ import type { BookModel, CalculatedBook } from '../engine';
 import { Calculation } from './calculation';
 import { readOutcome } from './outcome';
 import { formulaPluginConfig, forgetMessages } from './register';
+import { withUniqueNames } from './scopedNames';
 import { definedNameEntries, unitId, workbookData } from './snapshot';
 import { trimWholeColumns } from './wholeColumns';
 
-/** One engine a calculation: nothing of one workbook can reach the next, and nothing keeps the process alive. */
-export async function calculate(book: BookModel): Promise<CalculatedBook> {
+let last: Promise<unknown> = Promise.resolve();
+
+/**
+ * One engine a calculation: nothing of one workbook can reach the next, and nothing keeps the process
+ * alive. The engine's caches belong to all of them, so calculations wait for each other.
+ */
+export function calculate(book: BookModel): Promise<CalculatedBook> {
+  const calculation = last.then(() => calculateAlone(book));
+  last = calculation.catch(() => undefined);
+  return calculation;
+}
+
+async function calculateAlone(book: BookModel): Promise<CalculatedBook> {
   const univer = new Univer({
     locale: LocaleType.EN_US,
     locales: { [LocaleType.EN_US]: {} },
@@ -18,10 +30,11 @@ export async function calculate(book: BookModel): Promise<CalculatedBook> {
   try {
     trimWholeColumns();
     univer.registerPlugin(UniverFormulaEnginePlugin, { function: formulaPluginConfig().function });
-    univer.createUnit<IWorkbookData, never>(UniverInstanceType.UNIVER_SHEET, workbookData(book));
+    const named = withUniqueNames(book);
+    univer.createUnit<IWorkbookData, never>(UniverInstanceType.UNIVER_SHEET, workbookData(named));
     const injector = univer.__getInjector();
     const names = injector.get(IDefinedNamesService);
-    for (const entry of definedNameEntries(book)) names.registerDefinedName(unitId, entry);
+    for (const entry of definedNameEntries(named)) names.registerDefinedName(unitId, entry);
     return readOutcome(book, await new Calculation(injector).settle());
   } finally {
     univer.dispose();
