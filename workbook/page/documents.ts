@@ -10,7 +10,13 @@ export interface FileFormat {
   read(bytes: Uint8Array): BookModel;
   create(book: BookModel, calculated: CalculatedBook): Uint8Array;
   /** The original with what has changed since, and everything else in it as it was. */
-  update(original: Uint8Array, before: BookModel, now: BookModel, calculated: CalculatedBook): Uint8Array;
+  update(original: Uint8Array, before: BookModel, now: BookModel, calculated: CalculatedBook): Updated;
+}
+
+export interface Updated {
+  readonly bytes: Uint8Array;
+  /** What could not be put into the file, in words. */
+  readonly missing?: string;
 }
 
 export interface DocumentView {
@@ -59,10 +65,11 @@ export function documentsOf(
     }
   };
 
-  async function show(next: Shown, book: BookModel): Promise<void> {
+  async function show(name: string, book: BookModel, bytes?: Uint8Array): Promise<void> {
     await grid.open(book);
     selectFirstNumber(grid, book);
-    shown = next;
+    // as the grid tells it, so that nothing counts as changed which only reads differently there
+    shown = { name, ...(bytes && { original: { bytes, book: grid.book() } }) };
     mark(false);
     grid.focus();
   }
@@ -82,30 +89,35 @@ export function documentsOf(
     const file = await chooseFile();
     if (!file) return;
     const book = format.read(file.bytes);
-    if (await mayReplace()) await show({ name: file.name, original: { bytes: file.bytes, book } }, book);
+    if (await mayReplace()) await show(file.name, book, file.bytes);
   }
 
-  async function bytesNow(): Promise<Uint8Array> {
+  async function fileNow(): Promise<Updated> {
     await grid.settled();
     const [now, calculated] = [grid.book(), grid.calculated()];
     const { original } = shown;
     return original
       ? format.update(original.bytes, original.book, now, calculated)
-      : format.create(now, calculated);
+      : { bytes: format.create(now, calculated) };
   }
 
   /** @returns whether it was saved */
   async function save(): Promise<boolean> {
-    const name = await saveFile(shown.name, bytesNow);
+    let missing: string | undefined;
+    const name = await saveFile(shown.name, async () => {
+      const file = await fileNow();
+      missing = file.missing;
+      return file.bytes;
+    });
     if (name === null) return false;
     shown = { ...shown, name };
     mark(false);
-    view.say(`saved as ${name}`);
+    view.say([`saved as ${name}`, missing].filter(Boolean).join('; '), missing ? 'bad' : 'good');
     return true;
   }
 
   async function demo(): Promise<void> {
-    if (await mayReplace()) await show({ name: demoName }, demoWorkbook());
+    if (await mayReplace()) await show(demoName, demoWorkbook());
   }
 
   return {

@@ -1,11 +1,11 @@
 /** A workbook's own package with new values in it; every part that holds none of them stays byte for byte. */
 import type { BookModel, CalculatedBook } from '../engine/engine';
+import { dropCalcChain } from './calcChain';
 import { dynamicArrayMark } from './dynamicArrays';
-import { applyEdits, type Edit } from './edits';
-import { findParts, readXml, relationshipsPath, type WorkbookParts } from './parts';
+import { findParts, readXml } from './parts';
 import { patchSheet } from './patchSheet';
 import { readSharedStrings } from './sharedStrings';
-import { encodeXml, localName, scanXml } from './xml';
+import { encodeXml } from './xml';
 import { Package } from './zip';
 
 /**
@@ -45,36 +45,4 @@ function formulasOf(book: BookModel, sheet: string): Map<string, string> {
       formula === undefined ? [] : [[`${row},${column}`, formula]],
     ),
   );
-}
-
-/**
- * The calculation chain says of each formula whether it is an array. Where a plain one became an array
- * it would be false, and Excel asks to repair such a file; without a chain it makes a new one.
- */
-function dropCalcChain(pack: Package, { workbook, calcChain }: WorkbookParts): void {
-  if (calcChain === undefined || !pack.has(calcChain)) return;
-  pack.remove(calcChain);
-  dropElements(pack, '[Content_Types].xml', ({ PartName }) => PartName === `/${calcChain}`);
-  dropElements(pack, relationshipsPath(workbook), ({ Type }) => Type?.endsWith('/calcChain'));
-}
-
-function dropElements(
-  pack: Package,
-  path: string,
-  unwanted: (attributes: Readonly<Record<string, string>>) => boolean | undefined,
-): void {
-  const xml = readXml(pack, path);
-  const edits: Edit[] = [];
-  let start = -1;
-  scanXml(xml, path, {
-    open: ({ attributes }, end) => {
-      start = unwanted(attributes) ? xml.lastIndexOf('<', end - 1) : -1;
-    },
-    close: ({ name }, end) => {
-      if (start >= 0 && /^(?:Override|Relationship)$/.test(localName(name)))
-        edits.push({ start, end, text: '' });
-      start = -1;
-    },
-  });
-  pack.write(path, encodeXml(applyEdits(xml, edits)));
 }

@@ -62,11 +62,14 @@ export function calculatedOf(sheets: Sheets): CalculatedBook {
     const sheet = sheets.named(name);
     if (sheets.formula(sheet, row, column) === undefined) return undefined;
     const spill = sheets.spill(sheet, row, column);
+    const value = sheets.shown(sheet, row, column);
+    const isBlocked = value instanceof CellError && value.code === '#SPILL!';
     return {
-      value: sheets.shown(sheet, row, column),
-      spill: spill
-        ? { rows: spill.endRow - spill.startRow + 1, columns: spill.endColumn - spill.startColumn + 1 }
-        : { rows: 1, columns: 1 },
+      value,
+      spill:
+        spill && !isBlocked
+          ? { rows: spill.endRow - spill.startRow + 1, columns: spill.endColumn - spill.startColumn + 1 }
+          : { rows: 1, columns: 1 },
     };
   };
   return {
