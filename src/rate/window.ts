@@ -7,41 +7,92 @@ import type { Series } from '../series/series';
  *
  * For each count w the slopes s of degree d are set beside the slopes s⁺ of degree d + 1 over the same
  * windows. The difference shows the bend that degree d misses; its own scatter is known, since in nested
- * least squares var(s⁺ − s) = var(s⁺) − var(s). So each window's mean squared error is estimated without
- * bias as (s⁺ − s)² − σ²[v⁺ − v] + σ²v, and averaged over the readings (the reasoning of C. L. Mallows,
- * Technometrics 15 (1973) 661, applied to the slope). σ² is the scatter about the polynomials of degree
- * d + 1 in small windows. The counts tried grow by about a quarter each; the smallest wins a tie.
+ * least squares var(s⁺ − s) = var(s⁺) − var(s). So (s⁺ − s)² − σ²(v⁺ − v), averaged over the readings,
+ * estimates the squared bias and σ²v the scatter (the reasoning of C. L. Mallows, Technometrics 15 (1973)
+ * 661, applied to the slope). σ² is the scatter about the polynomials of degree d + 1 in small windows.
+ *
+ * Small windows tell their bias so badly that one of them would often win by luck. But bias only grows
+ * with the window: what a large window tells of it bounds that of all smaller ones, and none is below 0.
+ * That holds as long as degree d + 1 can follow the run; the trial ends at windows whose polynomials miss
+ * the readings by twice their scatter or more, in squares.
  *
  * @param degree of the tangent
  * @returns a count from degree + 3 (or all readings, if fewer) up to all readings
+ * @example defaultWindow(pairReadings([0, 1, 2, 3], [4, 3, 1, 1]), 2) // 4
  */
 export function defaultWindow({ times, values }: Series, degree: number): number {
   const all = times.length;
   const smallest = smallestWindow(times, degree);
   if (smallest >= all) return all;
-  const variance = pooledVariance(times, values, Math.min(all, Math.max(smallest, 2 * degree + 3)), degree + 1);
-  let best = { count: smallest, error: Infinity };
+  const variance = pooledVariance(
+    times,
+    values,
+    Math.min(all, Math.max(smallest, 2 * degree + 3)),
+    degree + 1,
+  );
+  const trials: Trial[] = [];
   for (let count = smallest; ; count = nextCount(count, all)) {
-    const error = slopeError(times, values, count, degree, variance);
-    if (error < best.error) best = { count, error };
-    if (count === all) return best.count;
+    const trial = tried(times, values, count, degree, variance);
+    if (trials.length > 0 && trial.misfit > 2 * variance) break;
+    trials.push(trial);
+    if (count === all) break;
   }
+  return bestOf(trials);
 }
 
-const nextCount = (count: number, all: number): number => Math.min(all, Math.max(count + 2, Math.round(count * 1.25)));
+interface Trial {
+  readonly count: number;
+  /** Of the slopes, mean over the run; may come out below 0. */
+  readonly squaredBias: number;
+  /** Of the slopes, mean over the run. */
+  readonly scatter: number;
+  /** Mean square by which polynomials of one degree more miss the readings. */
+  readonly misfit: number;
+}
 
-/** Mean over the run of the estimated squared error of the slopes from windows of `count`. */
-function slopeError(times: Float64Array, values: Float64Array, count: number, degree: number, variance: number): number {
+/** The count of least error, from the largest down; the smaller wins a tie. */
+function bestOf(trials: readonly Trial[]): number {
+  let best = { count: 0, error: Infinity };
+  let bound = Infinity;
+  for (const { count, squaredBias, scatter } of [...trials].reverse()) {
+    bound = Math.min(bound, squaredBias);
+    const error = Math.max(0, bound) + scatter;
+    if (error <= best.error) best = { count, error };
+  }
+  return best.count;
+}
+
+/** Counts grow by about a quarter each. */
+const nextCount = (count: number, all: number): number =>
+  Math.min(all, Math.max(count + 2, Math.round(count * 1.25)));
+
+function tried(
+  times: Float64Array,
+  values: Float64Array,
+  count: number,
+  degree: number,
+  variance: number,
+): Trial {
   const low = emptyLocalFit();
   const high = emptyLocalFit();
-  let sum = 0;
+  let squaredBias = 0;
+  let scatter = 0;
+  let squares = 0;
   for (let i = 0, first = 0; i < times.length; i++) {
     first = nearestWindow(times, count, times[i], first);
     fitLocalPolynomial(times, values, first, count, degree, times[i], low);
     fitLocalPolynomial(times, values, first, count, degree + 1, times[i], high);
-    sum += (high.slope - low.slope) ** 2 + variance * (2 * low.slopeVariance - high.slopeVariance);
+    squaredBias += (high.slope - low.slope) ** 2 - variance * (high.slopeVariance - low.slopeVariance);
+    scatter += variance * low.slopeVariance;
+    squares += high.residualSumOfSquares;
   }
-  return sum / times.length;
+  const all = times.length;
+  return {
+    count,
+    squaredBias: squaredBias / all,
+    scatter: scatter / all,
+    misfit: squares / (all * high.degreesOfFreedom),
+  };
 }
 
 /** Scatter of the readings: residual squares of all windows over their degrees of freedom. */

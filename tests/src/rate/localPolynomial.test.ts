@@ -14,14 +14,17 @@ describe.each(reference.cases)('local polynomial $id', ({ id, dataset, degree, k
   const y = Float64Array.from(runs[dataset].y);
   const isInitial = id.includes('initial');
 
-  test.each(slope.map((_, i) => i))('fitLocalPolynomial: slope and standard error at point %i to 1e-10', (i) => {
-    const first = isInitial ? 0 : indexWindow(i, k, t.length);
-    const fit = fitLocalPolynomial(t, y, first, k, degree, isInitial ? 0 : t[i], emptyLocalFit());
-    const error = Math.sqrt((fit.residualSumOfSquares / fit.degreesOfFreedom) * fit.slopeVariance);
-    expect(Math.abs(fit.slope - slope[i])).toBeLessThan(1e-10 * largest(slope));
-    expect(Math.abs(error / se[i] - 1)).toBeLessThan(1e-10);
-    expect(fit.degreesOfFreedom).toBe(df[i]);
-  });
+  test.each(slope.map((_, i) => i))(
+    'fitLocalPolynomial: slope and standard error at point %i to 1e-10',
+    (i) => {
+      const first = isInitial ? 0 : indexWindow(i, k, t.length);
+      const fit = fitLocalPolynomial(t, y, first, k, degree, isInitial ? 0 : t[i], emptyLocalFit());
+      const error = Math.sqrt((fit.residualSumOfSquares / fit.degreesOfFreedom) * fit.slopeVariance);
+      expect(Math.abs(fit.slope - slope[i])).toBeLessThan(1e-10 * largest(slope));
+      expect(Math.abs(error / se[i] - 1)).toBeLessThan(1e-10);
+      expect(fit.degreesOfFreedom).toBe(df[i]);
+    },
+  );
 });
 
 test('tangentRate and ratesAlong agree with the reference on an even grid, end windows one-sided', () => {
