@@ -68,6 +68,7 @@ export function dyeRun(): SheetModel {
     .block('F27', timings)
     .down('H27', ['=PACE.EVENT(G27:G29)'], { numberFormat: scientific })
     .format('H28:H29', scientific);
+  sheet.look('G16:N16', { bold: true });
   for (const [column, format] of Object.entries(orderTableFormats))
     sheet.format(`${column}17:${column}23`, format);
   return sheet.build(columnWidths);

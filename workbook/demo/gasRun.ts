@@ -65,6 +65,7 @@ export function gasRun(): SheetModel {
     .format('K10:K13', '0.0')
     .block('F15', [['Which order?']], { bold: true })
     .block('F16', [[`=PACE.ORDERS(${t},${n},"free")`]], { bold: true });
+  sheet.look('G16:N16', { bold: true });
   for (const [column, format] of Object.entries(orderTableFormats)) {
     sheet.format(`${column}17:${column}23`, format);
   }

@@ -20,4 +20,4 @@ export const orderTableFormats: Readonly<Record<string, string>> = {
 };
 
 /** Times and readings at the left, a gap, then answers that carry five numbers, and the verdict. */
-export const columnWidths = [9, 11, 12, 16, 3, 34, 13, 13, 13, 13, 13, 13, 13, 56];
+export const columnWidths = [9, 11, 12, 16, 3, 34, 17, 20, 13, 23, 18, 13, 13, 60];

@@ -48,6 +48,7 @@ export function massLossRun(): SheetModel {
     .format('K10:K13', '0.0')
     .block('F15', [['Which order?']], { bold: true })
     .block('F16', [[`=PACE.ORDERS(${t},${left})`]], { bold: true });
+  sheet.look('G16:N16', { bold: true });
   for (const [column, format] of Object.entries(orderTableFormats))
     sheet.format(`${column}17:${column}23`, format);
   return sheet.build(columnWidths);

@@ -37,14 +37,18 @@ export class SheetBuilder {
     );
   }
 
-  /** Empty cells that only carry a number format, for what will spill into them. */
+  /** Empty cells that only carry a look, for what will spill into them. */
   format(area: string, numberFormat: string): this {
+    return this.look(area, { numberFormat });
+  }
+
+  look(area: string, look: Look): this {
     const { row, column, rows, columns } = parseArea(area)!;
     const isTaken = new Set(this.cells.map((cell) => `${cell.row},${cell.column}`));
     for (let r = row; r < row + rows; r++) {
       for (let c = column; c < column + columns; c++) {
         if (isTaken.has(`${r},${c}`)) continue;
-        this.cells.push({ row: r, column: c, value: null, numberFormat });
+        this.cells.push({ row: r, column: c, value: null, ...look });
       }
     }
     return this;
