@@ -19,8 +19,11 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
   const looks = readLooks(pack, parts.styles);
   return {
     sheets: parts.sheets.map(({ name, path }) => {
+      const sheet = library.Sheets[name];
+      // the library passes over a sheet that it stumbles at
+      if (!sheet) throw new NotAWorkbook(`a sheet cannot be read: ${name}`);
       const cells = scanSheet(readXml(pack, path), path).rows.flatMap((row) => row.cells);
-      return sheetModel(name, library.Sheets[name], cells, looks);
+      return sheetModel(name, sheet, cells, looks);
     }),
     names: definedNames(library),
   };
@@ -44,6 +47,7 @@ function readByLibrary(bytes: Uint8Array): WorkBook {
     return read(bytes, {
       type: 'array',
       cellFormula: true,
+      xlfn: true,
       cellNF: true,
       cellStyles: true,
       cellText: false,
@@ -58,17 +62,17 @@ function readByLibrary(bytes: Uint8Array): WorkBook {
 
 function sheetModel(
   name: string,
-  sheet: WorkSheet | undefined,
+  sheet: WorkSheet,
   scanned: readonly ScannedCell[],
   looks: readonly CellLook[],
 ): SheetModel {
-  const widths = (sheet?.['!cols'] ?? []).flatMap((column, place) =>
+  const widths = (sheet['!cols'] ?? []).flatMap((column, place) =>
     column?.width === undefined ? [] : [[place, column.width] as const],
   );
   return {
     name,
     cells: scanned.flatMap((cell) =>
-      cellModel(cell, sheet?.[cellName(cell.row, cell.column)] as CellObject | undefined, looks),
+      cellModel(cell, sheet[cellName(cell.row, cell.column)] as CellObject | undefined, looks),
     ),
     ...(widths.length > 0 ? { columnWidths: Object.fromEntries(widths) } : {}),
   };
