@@ -1,4 +1,5 @@
 /** `npm run recalc -- IN.xlsx OUT.xlsx` */
+import type { CellError, ErrorCode } from '../../functions/cell';
 import { NotAWorkbook } from '../xlsx/notAWorkbook';
 import { FileTrouble, readInput, requireOutput, writeWhole } from './files';
 import { recalculate } from './recalculate';
@@ -34,15 +35,24 @@ async function main(args: readonly string[]): Promise<number> {
     await requireOutput(output, input);
     const result = await recalculate(bytes);
     await writeWhole(output, result.bytes);
-    for (const { cell, error } of result.errors) {
-      process.stderr.write(`${cell}  ${error.code}${error.message ? `  ${error.message}` : ''}\n`);
-    }
+    for (const { cell, error } of result.errors) process.stderr.write(`${errorLine(cell, error)}\n`);
     process.stdout.write(`${output}: ${counted(result.formulas, 'formula', 'formulas')} calculated\n`);
     return result.errors.length > 0 ? exitCode.someErrors : exitCode.done;
   } catch (error) {
     process.stderr.write(`${whyNot(error, input)}\n`);
     return exitCode.notDone;
   }
+}
+
+/** What a built-in function has no words for, and a person may not know. */
+const meanings: Partial<Record<ErrorCode, string>> = {
+  '#SPILL!': 'the result has no room: other cells stand where it would go',
+  '#NAME?': 'no function or name here is called that',
+};
+
+function errorLine(cell: string, { code, message }: CellError): string {
+  const words = message || meanings[code];
+  return words ? `${cell}  ${code}  ${words}` : `${cell}  ${code}`;
 }
 
 const counted = (count: number, one: string, many: string): string => `${count} ${count === 1 ? one : many}`;
