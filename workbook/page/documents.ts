@@ -75,6 +75,7 @@ export function documentsOf(
   }
 
   async function mayReplace(): Promise<boolean> {
+    await grid.settled(); // what is being typed is work as well
     if (!isUnsaved) return true;
     const answer = await ask(`${shown.name} holds changes that are not saved.`, [
       'Save as…',
@@ -112,6 +113,7 @@ export function documentsOf(
     if (name === null) return false;
     shown = { ...shown, name };
     mark(false);
+    grid.focus();
     view.say([`saved as ${name}`, missing].filter(Boolean).join('; '), missing ? 'bad' : 'good');
     return true;
   }

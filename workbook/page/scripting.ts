@@ -21,6 +21,7 @@ export function offerToScripts(grid: Grid, port: WorkbookPort): void {
       const area = parseArea(reference);
       if (!area) throw new Error(`a reference is written like 'Gas run'!B2:B9: got "${reference}"`);
       grid.select({ sheet: grid.active()?.sheet ?? grid.sheets()[0], ...area });
+      grid.focus();
     },
   };
   Object.assign(window, { flaskpace: scripting });

@@ -27,6 +27,9 @@ const edits = 'sheet.mutation.';
 /** A calculation that takes longer goes on; whoever waits for it is let go. */
 const longestWait = 60_000; // ms
 
+/** Keys just struck go through the grid's editor in steps of its own. */
+const keysUnderWay = 100; // ms
+
 /** @param container an element of the page that has a size; the book is shown in it, and calculated in a while */
 export function createGrid(container: HTMLElement, first: BookModel, { isDark = false } = {}): Grid {
   const { univer, injector, api } = bootGrid(container, isDark);
@@ -91,6 +94,7 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
   return {
     open,
     async settled() {
+      await new Promise((resolve) => setTimeout(resolve, keysUnderWay));
       await api.getActiveWorkbook()?.endEditingAsync(true);
       await calculation();
     },
