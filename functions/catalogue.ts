@@ -7,6 +7,7 @@ import along from './rate/along';
 import between from './rate/between';
 import event from './rate/event';
 import tangent from './rate/tangent';
+import check from './series/check';
 import absorbance from './signal/absorbance';
 import acidity from './signal/acidity';
 import clock from './signal/clock';
@@ -44,6 +45,7 @@ export const catalogue: readonly CellFunction[] = [
   coefficient,
   halfLife,
   unit,
+  check,
 ];
 
 export const functionNamed = (name: string): CellFunction | undefined =>

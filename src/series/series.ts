@@ -24,9 +24,7 @@ export type Readings = readonly (number | null)[];
  * @example pairReadings([20, 0, null], [3, 5, 7]).times // Float64Array [0, 20]
  */
 export function pairReadings(times: Readings, values: Readings): Series {
-  if (times.length !== values.length) {
-    throw new InvalidInput(`times and values must be of one length: got ${times.length} times and ${values.length} values`);
-  }
+  requireOneLength(times, values);
   const kept: number[] = [];
   for (let place = 0; place < times.length; place++) {
     if (times[place] !== null && values[place] !== null) kept.push(place);
@@ -41,6 +39,12 @@ export function pairReadings(times: Readings, values: Readings): Series {
   return { ...series, distinctTimes: countDistinct(series.times) };
 }
 
+/** A time beside each reading. @throws InvalidInput */
+export function requireOneLength({ length: times }: ArrayLike<unknown>, { length: values }: ArrayLike<unknown>): void {
+  if (times === values) return;
+  throw new InvalidInput(`times and values must be of one length: got ${times} times and ${values} values`);
+}
+
 function isAscending(places: readonly number[], times: Readings): boolean {
   for (let i = 1; i < places.length; i++) if (times[places[i]]! < times[places[i - 1]]!) return false;
   return true;
@@ -52,7 +56,11 @@ function countDistinct(sorted: Float64Array): number {
   return count;
 }
 
-/** @throws InvalidInput when all times are equal, NotDetermined when fewer differ than the method needs */
+/**
+ * @throws InvalidInput when all times are equal, NotDetermined when fewer differ than the method needs
+ *
+ * @example requireDistinctTimes(pairReadings([60, 60], [1, 2]), 2, 'a fit') // throws times must differ: all 2 are 60
+ */
 export function requireDistinctTimes(series: Series, needed: number, purpose: string): void {
   if (series.distinctTimes < 2) {
     throw new InvalidInput(`times must differ: ${series.times.length === 1 ? 'only one pair was given' : `all ${series.times.length} are ${series.times[0]}`}`);
@@ -62,7 +70,11 @@ export function requireDistinctTimes(series: Series, needed: number, purpose: st
   }
 }
 
-/** Replicates averaged: each time once, with the mean of its readings and how many there were. */
+/**
+ * Replicates averaged: each time once, with the mean of its readings and how many there were.
+ *
+ * @example averageReplicates(pairReadings([0, 5, 5], [7, 1, 3])).values // Float64Array [7, 2]
+ */
 export function averageReplicates({ times, values, distinctTimes }: Series): {
   times: Float64Array;
   values: Float64Array;
@@ -80,6 +92,8 @@ export function averageReplicates({ times, values, distinctTimes }: Series): {
 /**
  * Whether the column as a whole rises (+1) or falls (−1), by the slope of the straight line through all
  * points; 0 when it is level.
+ *
+ * @example trend(pairReadings([0, 1, 2], [9, 4, 1])) // -1
  */
 export function trend({ times, values }: Series): -1 | 0 | 1 {
   let meanTime = 0;

@@ -19,6 +19,7 @@ export const kindsBySeverity = [
   'conversion',
   'resolution',
   'hole',
+  'number read from text',
   'gap',
   'unsorted',
   'replicates',

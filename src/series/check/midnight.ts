@@ -48,6 +48,7 @@ export function midnight(run: RawRun): Finding | null {
     places: [place],
     finding: `the clock passes midnight: ${asClock(before)} is followed by ${asClock(after)} (${shown(before)}, then ${shown(after)} of a day)`,
     meaning: 'the readings after midnight count as the earliest of the run, and every rate comes out wrong',
-    advice: 'add 1 to the times after midnight, or have PACE.CLOCK turn the clock times into time since the start',
+    advice:
+      'add 1 to the times after midnight, or have PACE.CLOCK turn the clock times into time since the start',
   };
 }

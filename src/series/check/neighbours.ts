@@ -10,6 +10,8 @@ export interface Expectation {
   readonly variance: number;
   /** What a curve of higher degree would say instead, less `value`: how little the neighbours agree on the bend. */
   readonly doubt: number;
+  /** Variance of `doubt`, in the same units: nested least squares, var(a − b) = var(a) − var(b). */
+  readonly doubtVariance: number;
   /** Scatter of the neighbours about their curve; `null` where they leave none. */
   readonly scatter: number | null;
 }
@@ -51,18 +53,21 @@ function expectationFrom(
   const [t, y] = [Float64Array.from(chosen, (i) => times[i]), Float64Array.from(chosen, (i) => values[i])];
   const degrees = degreesFor(new Set(t).size, side);
   if (!degrees) return null;
-  const rival = fitLocalPolynomial(t, y, 0, t.length, degrees[1], at, fit).value;
-  const { value, valueVariance, residualSumOfSquares, degreesOfFreedom } = fitLocalPolynomial(
-    t,
-    y,
-    0,
-    t.length,
-    degrees[0],
-    at,
-    fit,
-  );
-  const scatter = degreesOfFreedom > 0 ? Math.sqrt(residualSumOfSquares / degreesOfFreedom) : null;
-  return { value, variance: valueVariance, doubt: rival - value, scatter };
+  const curve = { ...fitLocalPolynomial(t, y, 0, t.length, degrees[0], at, fit) };
+  const rival = fitLocalPolynomial(t, y, 0, t.length, degrees[1], at, fit);
+  return {
+    value: curve.value,
+    variance: curve.valueVariance,
+    doubt: rival.value - curve.value,
+    doubtVariance: Math.max(0, rival.valueVariance - curve.valueVariance),
+    scatter:
+      curve.degreesOfFreedom > 0 ? Math.sqrt(curve.residualSumOfSquares / curve.degreesOfFreedom) : null,
+  };
+}
+
+/** The part of the doubt that scatter does not explain: what the bend leaves open, with its sign. */
+export function bendBeyondScatter({ doubt, doubtVariance }: Expectation, scatter: number): number {
+  return Math.sign(doubt) * Math.max(0, Math.abs(doubt) - 1.5 * scatter * Math.sqrt(doubtVariance));
 }
 
 interface Place {
@@ -74,11 +79,19 @@ interface Place {
   readonly side: Side;
 }
 
-const range = (from: number, to: number): number[] => Array.from({ length: Math.max(0, to - from) }, (_, i) => from + i);
+const range = (from: number, to: number): number[] =>
+  Array.from({ length: Math.max(0, to - from) }, (_, i) => from + i);
 
 /** What reading i should be, had it not been taken. */
 export const expectedReading = (series: Series, i: number, side: Side): Expectation | null =>
-  expectationFrom(series, { at: series.times[i], first: 0, end: series.times.length, left: i - 1, right: i + 1, side });
+  expectationFrom(series, {
+    at: series.times[i],
+    first: 0,
+    end: series.times.length,
+    left: i - 1,
+    right: i + 1,
+    side,
+  });
 
 /** What the readings `first … end − 1` make of a time before or after them all. */
 export function expectedBeyond(series: Series, at: number, first: number, end: number): Expectation | null {

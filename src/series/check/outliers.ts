@@ -1,8 +1,8 @@
 import { shown } from '../../errors';
 import type { Series } from '../series';
 import type { Finding } from './finding';
-import { expectedReading, type Expectation } from './neighbours';
-import { limitFor, readingsForScatter, scatterOf } from './scatter';
+import { bendBeyondScatter, expectedReading, type Side } from './neighbours';
+import { limitFor, readingsForScatter, scatterOf, spread } from './scatter';
 import { without } from './subset';
 import { counted, listed, roughly } from './words';
 
@@ -19,17 +19,17 @@ export interface Outlier {
 /** More than one reading in six cannot be the odd ones out: then the scatter itself is that large. */
 const largestShare = 1 / 6;
 
-/** The last look takes the worst away and looks again, since a bad reading hides others beside it. */
+/** Each look takes the worst away and looks again, since a bad reading hides others beside it. */
 const looks = 5;
 
 /**
  * Readings off the curve that their neighbours make.
  *
- * Rule: leave the reading out; draw a quadratic through its nearest neighbours on both sides, another
- * through those before it, another through those after it. The reading is an outlier when it is beyond
- * the scatter ({@link limitFor}) of all three, so that a kink or a step in the course is none. How far
- * the three can be trusted where the course bends is told by a curve of higher degree. Scatter is judged
- * over the whole run and beside the reading, and the larger counts.
+ * Rule: leave the reading out and draw a quadratic through its eight nearest neighbours. The reading is an
+ * outlier when it lies off it by more than scatter ({@link limitFor}) and bend explain. How far the curve
+ * can be trusted where the course bends is told by one of higher degree. Scatter is judged over the whole
+ * run and among the neighbours, and the larger counts: where the course breaks off, or where readings
+ * scatter more, the neighbours themselves lie off their curve.
  *
  * @see leaving out: R. D. Cook and S. Weisberg, Residuals and Influence in Regression (1982), 2.2
  */
@@ -47,61 +47,84 @@ export function outliersIn(series: Series): Outlier[] {
     : [];
 }
 
+/** So many of the furthest are judged by the scatter of all others, which they may have swollen. */
+const closerLooks = 3;
+
 /** Those beyond the limit that stand out more than every reading close by, which they may have spoilt. */
 function worstIn(series: Series): Map<number, Outlier> {
-  const scatter = scatterOf(series);
+  const common = scatterOf(series);
   const limit = limitFor(series.times.length);
+  const seen = [...series.times.keys()]
+    .flatMap((i) => {
+      const outlier = judged(series, i, common);
+      return outlier ? [{ i, outlier }] : [];
+    })
+    .sort((a, b) => b.outlier.deviations - a.outlier.deviations);
   const beyond = new Map<number, Outlier>();
-  for (let i = 0; i < series.times.length; i++) {
-    const outlier = judged(series, i, scatter);
-    if (outlier && outlier.deviations > limit) beyond.set(i, outlier);
-  }
+  seen.forEach(({ i, outlier }, rank) => {
+    const closer = rank < closerLooks ? judged(series, i, scatterOf(without(series, new Set([i])))) : outlier;
+    if (closer && closer.deviations > limit) beyond.set(i, closer);
+  });
   const reach = 4;
-  const worst = new Map<number, Outlier>();
-  for (const [i, outlier] of beyond) {
-    const rivals = Array.from({ length: 2 * reach + 1 }, (_, k) => beyond.get(i - reach + k));
-    if (rivals.every((rival) => !rival || rival.deviations <= outlier.deviations)) worst.set(i, outlier);
-  }
-  return worst;
+  return new Map(
+    [...beyond].filter(([i, { deviations }]) =>
+      Array.from({ length: 2 * reach + 1 }, (_, k) => beyond.get(i - reach + k)).every(
+        (rival) => !rival || rival.deviations <= deviations,
+      ),
+    ),
+  );
 }
 
-/** The view of reading i that speaks most for it. */
+/** How far reading i is off, given the scatter of the run. */
 function judged(series: Series, i: number, scatter: number): Outlier | null {
   const last = series.times.length - 1;
-  const isAtEnd = i === 0 || i === last;
-  const sides = isAtEnd ? ([i === 0 ? 'after' : 'before'] as const) : (['both', 'before', 'after'] as const);
-  let kindest: Outlier | null = null;
-  for (const side of sides) {
-    const expected = expectedReading(series, i, side);
-    if (!expected) continue;
-    const distance = series.values[i] - expected.value;
-    const local = Math.max(scatter, expected.scatter ?? 0);
-    const clear = Math.max(0, Math.abs(distance) - allowance(expected, distance, isAtEnd));
-    const deviations = clear / (local * Math.sqrt(1 + expected.variance));
-    if (!kindest || deviations < kindest.deviations) {
-      kindest = { place: series.places[i], value: series.values[i], distance, deviations };
-    }
-  }
-  return kindest;
+  if ((i === 0 && isSteepEnd(series, 0, 1)) || (i === last && isSteepEnd(series, last, last - 1)))
+    return null;
+  const side = i === 0 ? 'after' : i === last ? 'before' : 'both';
+  const expected = expectedReading(series, i, side);
+  if (!expected) return null;
+  const distance = series.values[i] - expected.value;
+  const local = Math.max(scatter, expected.scatter ?? 0);
+  const clear = Math.max(
+    0,
+    Math.abs(distance) - allowance(bendBeyondScatter(expected, scatter), distance, side),
+  );
+  const deviations = clear / (local * Math.sqrt(1 + expected.variance));
+  return { place: series.places[i], value: series.values[i], distance, deviations };
+}
+
+/** More than this, beside the spread of all other readings, is a lost digit and no steep phase. */
+const steepest = 10;
+
+/** A fast first or last phase: the reading at the end lies on the way, only further along than the others lead to. */
+function isSteepEnd({ values }: Series, end: number, next: number): boolean {
+  const others = end === 0 ? values.subarray(1) : values.subarray(0, end);
+  const change = values[end] - values[next];
+  const course = values[next] - values[values.length - 1 - end];
+  return change * course > 0 && Math.abs(change) < steepest * spread(others);
 }
 
 /**
  * How far off the bend alone can put a reading. At an end the curve is drawn beyond its readings: where a
- * higher degree comes closer to the reading, the run may simply begin or end that steeply.
+ * higher degree comes closer to the reading, the run may simply end that steeply.
  */
-function allowance({ doubt }: Expectation, distance: number, isAtEnd: boolean): number {
-  if (!isAtEnd) return 2 * Math.abs(doubt);
-  return (doubt * distance > 0 ? 10 : 3) * Math.abs(doubt);
+function allowance(bend: number, distance: number, side: Side): number {
+  if (side === 'both') return 2 * Math.abs(bend);
+  return (bend * distance > 0 ? 10 : 3) * Math.abs(bend);
 }
 
 export function outlierFinding(outliers: readonly Outlier[]): Finding | null {
   if (outliers.length === 0) return null;
-  const said = outliers.map(({ value, distance }) => `${shown(value)} (${roughly(Math.abs(distance))} too ${distance > 0 ? 'high' : 'low'})`);
+  const said = outliers.map(
+    ({ value, distance }) =>
+      `${shown(value)} (${roughly(Math.abs(distance))} too ${distance > 0 ? 'high' : 'low'})`,
+  );
   return {
     kind: 'outlier',
     places: outliers.map(({ place }) => place),
     finding: `${counted(outliers.length, 'reading lies', 'readings lie')} far off the curve through the others: ${listed(said)}`,
     meaning: `beyond what the scatter of the run explains (at least ${roughly(Math.min(...outliers.map(({ deviations }) => deviations)))} standard deviations): a tangent or fit near it is pulled aside, and its uncertainty grows`,
-    advice: 'look for a cause in the notebook (a slip of the pen, a bubble, a missed moment); with a cause blank the cell and say so, without one keep it and report both results',
+    advice:
+      'look for a cause in the notebook (a slip of the pen, a bubble, a missed moment); with a cause blank the cell and say so, without one keep it and report both results',
   };
 }

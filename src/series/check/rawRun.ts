@@ -5,6 +5,8 @@ export type RawCell = number | null | RawText | RawError;
 
 export interface RawText {
   readonly text: string;
+  /** The number that estimates take it for; none where they skip or refuse it. */
+  readonly readAs?: number;
 }
 
 export interface RawError {
@@ -24,9 +26,13 @@ export const isText = (cell: RawCell): cell is RawText =>
 export const isError = (cell: RawCell): cell is RawError =>
   typeof cell === 'object' && cell !== null && 'error' in cell;
 
-/** The column as the estimating functions see it: everything but a number is a gap. */
-export const numbersIn = (cells: readonly RawCell[]): (number | null)[] =>
-  cells.map((cell) => (typeof cell === 'number' ? cell : null));
+/** What estimates take a cell for: everything but a number is a gap. */
+export const numberIn = (cell: RawCell): number | null =>
+  typeof cell === 'number' ? cell : isText(cell) ? (cell.readAs ?? null) : null;
+
+export const hasNumber = (cell: RawCell): boolean => numberIn(cell) !== null;
+
+export const numbersIn = (cells: readonly RawCell[]): (number | null)[] => cells.map(numberIn);
 
 /** The rows for which something holds, counted from 0. */
 export function rowsWhere(run: RawRun, holds: (time: RawCell, value: RawCell) => boolean): number[] {

@@ -34,17 +34,21 @@ export function spread(values: ArrayLike<number>): number {
   return Math.max(0, high - low);
 }
 
+/** What rounding alone adds to the scatter: to the resolution, or to the last digits of a computed column. */
+export const roundingScatter = (values: ArrayLike<number>): number =>
+  Math.max(smallestStep(values) / Math.sqrt(12), 1e-9 * spread(values), Number.MIN_VALUE);
+
 /**
  * Standard deviation of one reading: the median distance of readings from the curve through their
  * neighbours, each divided by what that curve's own scatter adds, times 1.4826 (normal scatter).
  *
- * Never below what rounding to the resolution must add, nor below the last digits of a computed column.
+ * Never below {@link roundingScatter}.
  *
  * @see F. R. Hampel, J. Am. Stat. Assoc. 69 (1974) 383, doi:10.1080/01621459.1974.10482962
  */
 export function scatterOf(series: Series): number {
   const { values } = series;
-  const floor = Math.max(smallestStep(values) / Math.sqrt(12), 1e-9 * spread(values), Number.MIN_VALUE);
+  const floor = roundingScatter(values);
   if (values.length < readingsForScatter) return floor;
   const distances: number[] = [];
   for (let i = 0; i < values.length; i++) {

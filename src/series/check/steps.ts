@@ -1,7 +1,7 @@
 import { shown } from '../../errors';
 import type { Series } from '../series';
 import type { Finding } from './finding';
-import { expectedBeyond } from './neighbours';
+import { bendBeyondScatter, expectedBeyond, type Expectation } from './neighbours';
 import { limitFor, scatterOf } from './scatter';
 import { counted, listed, roughly } from './words';
 
@@ -20,7 +20,7 @@ const readingsBeside = 4;
  * Places where the course breaks off and goes on at another height.
  *
  * Rule: the readings before a gap and those after it, each drawn on through the gap, disagree at both of
- * its ends, in the same sense, beyond the scatter ({@link limitFor}) and three times what the bend leaves
+ * its ends, in the same sense, beyond the scatter ({@link limitFor}) and one and a half times what the bend leaves
  * open. A mere kink is none: there the two courses meet. The largest counts; then each part is looked
  * through on its own.
  */
@@ -59,11 +59,15 @@ interface Gap {
   readonly scatter: number;
 }
 
-function breakBefore(series: Series, { first, next, end, scatter }: Gap): { deviations: number; height: number } {
+function breakBefore(
+  series: Series,
+  { first, next, end, scatter }: Gap,
+): { deviations: number; height: number } {
   const { times } = series;
   let least = { deviations: Infinity, height: 0 };
   let sense = 0;
   if (times[next] === times[next - 1]) return { deviations: 0, height: 0 };
+  const bend = (side: Expectation): number => Math.abs(bendBeyondScatter(side, scatter));
   for (const at of [times[next - 1], times[next]]) {
     const before = expectedBeyond(series, at, first, next);
     const after = expectedBeyond(series, at, next, end);
@@ -71,7 +75,7 @@ function breakBefore(series: Series, { first, next, end, scatter }: Gap): { devi
     const height = after.value - before.value;
     if (sense !== 0 && Math.sign(height) !== sense) return { deviations: 0, height: 0 };
     sense = Math.sign(height);
-    const clear = Math.abs(height) - 3 * (Math.abs(before.doubt) + Math.abs(after.doubt));
+    const clear = Math.abs(height) - 1.5 * (bend(before) + bend(after));
     const local = Math.max(scatter, before.scatter ?? 0, after.scatter ?? 0);
     const deviations = Math.max(0, clear) / (local * Math.sqrt(before.variance + after.variance));
     if (deviations < least.deviations) least = { deviations, height };
@@ -81,12 +85,16 @@ function breakBefore(series: Series, { first, next, end, scatter }: Gap): { devi
 
 export function stepFinding(steps: readonly Step[]): Finding | null {
   if (steps.length === 0) return null;
-  const said = steps.map(({ values: [before, after], height }) => `${shown(before)} to ${shown(after)} (a step of ${roughly(height)})`);
+  const said = steps.map(
+    ({ values: [before, after], height }) =>
+      `${shown(before)} to ${shown(after)} (a step of ${roughly(height)})`,
+  );
   return {
     kind: 'step',
     places: [...new Set(steps.flatMap(({ places }) => places))],
     finding: `the readings jump ${counted(steps.length, 'time', 'times').replace('one time', 'once')} from one smooth course to another: ${listed(said)}`,
-    meaning: 'the apparatus was disturbed (a shift, a leak, a bubble, a new zero), or the reaction changed faster than it was read: a tangent across the jump is wrong, and so is a fit over both parts',
+    meaning:
+      'the apparatus was disturbed (a shift, a leak, a bubble, a new zero), or the reaction changed faster than it was read: a tangent across the jump is wrong, and so is a fit over both parts',
     advice: 'work out each part by itself, or correct one part by the step if its cause is known',
   };
 }

@@ -5,7 +5,8 @@ const plainNumber = new RegExp(`^'?${number}$`);
 const numberWithUnit = new RegExp(String.raw`^'?${number}[   ]*[a-zA-Zµμ°%Å/][^0-9]{0,15}$`);
 const clock = /^\d{1,3}:\d{2}(:\d{2}([.,]\d+)?)?$/;
 const limit = new RegExp(String.raw`^([<>≤≥]|<=|>=)\s*${number}`);
-const belowLimit = /^(n\.?\s?d\.?|b\.?d\.?l\.?|<?\s?(lod|loq)|not detected|below detection|over(range|flow)?)$/i;
+const belowLimit =
+  /^(n\.?\s?d\.?|b\.?d\.?l\.?|<?\s?(lod|loq)|not detected|below detection|over(range|flow)?)$/i;
 
 /** `"12,5"`, `"3.1 mL"`, `"0:04:30"`: a number for a person, text for a sheet. */
 export function isNumberAsText(text: string): boolean {

@@ -34,13 +34,20 @@ export function unsorted(run: RawRun, misplaced: ReadonlySet<number>): Finding |
   const places = rowsOutOfOrder(times);
   if (places.length === 0) return null;
   const slips = places.filter((row) => misplaced.has(row));
-  const seen = listed(places.map((row) => `${shown(times[row]!)}`), 4);
+  const seen = listed(
+    places.map((row) => `${shown(times[row]!)}`),
+    4,
+  );
   if (slips.length > 0) {
     return {
       kind: 'unsorted',
       places: slips,
-      finding: `${counted(slips.length, 'time is', 'times are')} out of order, and the reading does not fit there: time ${listed(slips.map((row) => shown(times[row]!)), 4)}`,
-      meaning: 'most likely a slip in typing the time: the reading stands in the wrong part of the run and bends every tangent and fit near it',
+      finding: `${counted(slips.length, 'time is', 'times are')} out of order, and the reading does not fit there: time ${listed(
+        slips.map((row) => shown(times[row]!)),
+        4,
+      )}`,
+      meaning:
+        'most likely a slip in typing the time: the reading stands in the wrong part of the run and bends every tangent and fit near it',
       advice: 'compare the time with the notebook; blank the row if it cannot be settled',
     };
   }
@@ -52,6 +59,8 @@ export function unsorted(run: RawRun, misplaced: ReadonlySet<number>): Finding |
       ? 'the times run backwards, latest first'
       : `${counted(places.length, 'time is', 'times are')} out of order: ${seen}`,
     meaning: 'harmless in itself: readings are put in order of time before anything is calculated',
-    advice: backwards ? 'nothing, if that is how the run was written down' : 'make sure that it is no slip in typing the time',
+    advice: backwards
+      ? 'nothing, if that is how the run was written down'
+      : 'make sure that it is no slip in typing the time',
   };
 }

@@ -34,7 +34,8 @@ export function oddZeros(series: Series): number[] {
         ? oddStart(others, times[end - 1])
         : end === times.length
           ? oddEnd(others, times[first])
-          : values[first - 1] * values[end] > 0 && Math.min(Math.abs(values[first - 1]), Math.abs(values[end])) > clear;
+          : values[first - 1] * values[end] > 0 &&
+            Math.min(Math.abs(values[first - 1]), Math.abs(values[end])) > clear;
     if (isOdd) for (let i = first; i < end; i++) odd.push(series.places[i]);
     first = end;
   }
@@ -71,7 +72,8 @@ export function zeroFinding({ times, places }: Series, odd: readonly number[]): 
     kind: 'zero',
     places: odd,
     finding: `${counted(odd.length, 'reading is', 'readings are')} exactly 0 among readings that are not: at time ${listed(at)}`,
-    meaning: 'the readings beside do not lead to 0, so it is likely a cell that was left empty or a digit that was lost; counted as a reading it bends every tangent and fit',
+    meaning:
+      'the readings beside do not lead to 0, so it is likely a cell that was left empty or a digit that was lost; counted as a reading it bends every tangent and fit',
     advice: 'blank the cell if nothing was read, or type the reading that belongs there',
   };
 }
