@@ -18,11 +18,21 @@ export class NotDetermined extends Error {
 /** A name and the number it stands for, as in `{ rateCoefficient }`. */
 export type NamedNumbers = Readonly<Record<string, number>>;
 
-/** `rateCoefficient` → `rate coefficient`, so that a message reads like a sentence. */
-export const inWords = (name: string): string => name.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
+/**
+ * `rateCoefficient` → `rate coefficient`, so that a message reads like a sentence.
+ *
+ * @example inWords('rateCoefficient') // 'rate coefficient'
+ */
+export const inWords = (name: string): string =>
+  name.replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
 
-/** A number as a message shows it: up to six significant digits, no trailing zeros. */
-export const shown = (value: number): string => (Number.isFinite(value) ? String(Number(value.toPrecision(6))) : String(value));
+/**
+ * A number as a message shows it: up to six significant digits, no trailing zeros.
+ *
+ * @example shown(0.1 + 0.2) // '0.3'
+ */
+export const shown = (value: number): string =>
+  Number.isFinite(value) ? String(Number(value.toPrecision(6))) : String(value);
 
 function requireThat(holds: (value: number) => boolean, rule: string, numbers: NamedNumbers): void {
   for (const [name, value] of Object.entries(numbers)) {
@@ -30,18 +40,39 @@ function requireThat(holds: (value: number) => boolean, rule: string, numbers: N
   }
 }
 
-/** Every number is finite. @throws InvalidInput */
-export const requireFinite = (numbers: NamedNumbers): void => requireThat(Number.isFinite, 'a finite number', numbers);
+/**
+ * Every number is finite.
+ *
+ * @throws InvalidInput
+ * @example requireFinite({ order: NaN }) // throws order must be a finite number: got NaN
+ */
+export const requireFinite = (numbers: NamedNumbers): void =>
+  requireThat(Number.isFinite, 'a finite number', numbers);
 
-/** Every number is finite and above 0. @throws InvalidInput */
+/**
+ * Every number is finite and above 0.
+ *
+ * @throws InvalidInput
+ * @example requirePositive({ rateCoefficient: 0 }) // throws rate coefficient must be above 0: got 0
+ */
 export const requirePositive = (numbers: NamedNumbers): void =>
   requireThat((value) => Number.isFinite(value) && value > 0, 'above 0', numbers);
 
-/** Every number is finite and 0 or more. @throws InvalidInput */
+/**
+ * Every number is finite and 0 or more.
+ *
+ * @throws InvalidInput
+ * @example requireNotNegative({ volume: -0.3 }) // throws volume must be 0 or more: got -0.3
+ */
 export const requireNotNegative = (numbers: NamedNumbers): void =>
   requireThat((value) => Number.isFinite(value) && value >= 0, '0 or more', numbers);
 
-/** A species that takes part: a signed number, −2 for two used up. @throws InvalidInput for 0 */
+/**
+ * A species that takes part: a signed number, −2 for two used up.
+ *
+ * @throws InvalidInput for 0
+ * @example requireStoichiometricNumber(-2) // undefined
+ */
 export function requireStoichiometricNumber(stoichiometricNumber: number): void {
   requireFinite({ stoichiometricNumber });
   if (stoichiometricNumber === 0) {

@@ -18,6 +18,7 @@ export interface QrFactor {
  * Factors a design given column by column.
  *
  * @param design n columns of m rows, each contiguous; overwritten
+ * @example factorQr(Float64Array.of(1, 2, 3, 2, 4, 6), 3, 2).isDeficient // true
  */
 export function factorQr(design: Float64Array, rows: number, columns: number): QrFactor {
   const scales = new Float64Array(columns);
@@ -69,6 +70,8 @@ function reflect(design: Float64Array, rows: number, columns: number, j: number)
 /**
  * Variance of a linear combination Σ gⱼβⱼ of the coefficients, in units of the readings' variance:
  * gᵀ(XᵀX)⁻¹g = ‖R⁻ᵀg‖².
+ *
+ * @example combinationVariance(factorQr(Float64Array.of(1, 1, 1, 1), 4, 1), [1]) // 0.25
  */
 export function combinationVariance({ r, scales, columns }: QrFactor, g: readonly number[]): number {
   const z = new Float64Array(columns);

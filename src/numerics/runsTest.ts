@@ -22,7 +22,7 @@ function probabilityOfRuns(r: number, a: number, b: number): number {
  * @param residuals in order of time
  * @returns p, or `null` when fewer than two signs of either kind leave nothing to judge
  * @see A. Wald and J. Wolfowitz, Ann. Math. Stat. 11 (1940) 147, doi:10.1214/aoms/1177731909
- * @example runsTest([1, 1, 1, 1, -1, -1, -1, -1]) // 0.0571428
+ * @example runsTest([1, 1, 1, 1, -1, -1, -1, -1]) // 0.0571429
  */
 export function runsTest(residuals: ArrayLike<number>): number | null {
   let above = 0;

@@ -15,7 +15,11 @@ const lanczos = [
   0.84418223983852743293e-4, -0.2619083840158140867e-4, 0.36899182659531622704e-5,
 ];
 
-/** ln Γ(x), x > 0. */
+/**
+ * ln Γ(x), x > 0.
+ *
+ * @example logGamma(5) // 3.17805383034795
+ */
 export function logGamma(x: number): number {
   let sum = lanczos[0];
   for (let i = 1; i < lanczos.length; i++) sum += lanczos[i] / (x + i);
@@ -57,6 +61,7 @@ function betaFraction(a: number, b: number, x: number): number {
  * Upper tail P(T > t) for t ≥ 0, full relative precision far out in the tail.
  *
  * @see DLMF 8.17; Abramowitz and Stegun 26.7.1
+ * @example studentTail(1, 1) // 0.25
  */
 export function studentTail(t: number, degreesOfFreedom: number): number {
   const half = degreesOfFreedom / 2;

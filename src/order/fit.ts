@@ -56,6 +56,7 @@ export interface RateLawFit {
  *
  * @throws InvalidInput for a call that cannot be meant; NotDetermined when the data cannot tell
  * @see integrated rate laws: IUPAC Gold Book, order of reaction, doi:10.1351/goldbook.O04322
+ * @example fitRateLaw(pairReadings([0, 6, 12], [1, 0.5, 0.25]), { order: 1 }).halfLife // 6
  */
 export function fitRateLaw(series: Series, options: RateLawOptions): RateLawFit {
   const endpoint = settleEndpoint(series, options);
@@ -65,7 +66,10 @@ export function fitRateLaw(series: Series, options: RateLawOptions): RateLawFit 
     throw new InvalidInput('start can be fixed only when the endpoint is "free"');
   }
   const parameters =
-    (options.start === undefined ? 1 : 0) + (endpoint === 'free' ? 1 : 0) + 1 + (options.order === 'free' ? 1 : 0);
+    (options.start === undefined ? 1 : 0) +
+    (endpoint === 'free' ? 1 : 0) +
+    1 +
+    (options.order === 'free' ? 1 : 0);
   requireDistinctTimes(series, parameters, `a fit of ${parameters} parameters`);
   const known = options.start?.value ?? (endpoint === 'free' ? 0 : endpoint);
   const fit = new ReducedFit(reducedProblem(series, options, endpoint, known));
@@ -81,8 +85,14 @@ function searched(fit: ReducedFit, order: number | 'free'): { order: number; log
   return { order, logRate: bestRate(fit, order, startRate(fit.problem, order)) };
 }
 
-/** @throws InvalidInput where a rising or level column comes without an end */
-export function settleEndpoint(series: Series, { endpoint }: Pick<RateLawOptions, 'endpoint'>): number | 'free' {
+/**
+ * @throws InvalidInput where a rising or level column comes without an end
+ * @example settleEndpoint(pairReadings([0, 1], [5, 3]), {}) // 0
+ */
+export function settleEndpoint(
+  series: Series,
+  { endpoint }: Pick<RateLawOptions, 'endpoint'>,
+): number | 'free' {
   if (endpoint === 'free') return endpoint;
   if (endpoint !== undefined) {
     requireFinite({ endpoint });
@@ -95,9 +105,17 @@ export function settleEndpoint(series: Series, { endpoint }: Pick<RateLawOptions
   return 0;
 }
 
-function reducedProblem(series: Series, options: RateLawOptions, endpoint: number | 'free', known: number): ReducedProblem {
+function reducedProblem(
+  series: Series,
+  options: RateLawOptions,
+  endpoint: number | 'free',
+  known: number,
+): ReducedProblem {
   const first = options.start?.time ?? series.times[0];
-  if (first > series.times[0]) throw new InvalidInput(`start must not be later than the first reading: ${shown(first)} is after ${shown(series.times[0])}`);
+  if (first > series.times[0])
+    throw new InvalidInput(
+      `start must not be later than the first reading: ${shown(first)} is after ${shown(series.times[0])}`,
+    );
   return {
     times: series.times.map((time) => time - first),
     values: series.values.map((value) => value - known),
@@ -157,10 +175,14 @@ function assembled(fit: ReducedFit, found: Found): RateLawFit {
     halfLife,
     start,
     endpoint: end,
-    standardUncertainties: uncertaintiesOf(fit, { order, logRate, amplitude, rateCoefficient, halfLife, deviation }, {
-      endpointIsFree: endpoint === 'free',
-      orderIsFree: options.order === 'free',
-    }),
+    standardUncertainties: uncertaintiesOf(
+      fit,
+      { order, logRate, amplitude, rateCoefficient, halfLife, deviation },
+      {
+        endpointIsFree: endpoint === 'free',
+        orderIsFree: options.order === 'free',
+      },
+    ),
     residualSumOfSquares,
     residualDeviation: deviation,
     parameters,
@@ -172,8 +194,12 @@ function assembled(fit: ReducedFit, found: Found): RateLawFit {
 }
 
 interface Optimum {
-  order: number; logRate: number; amplitude: number;
-  rateCoefficient: number; halfLife: number; deviation: number | null;
+  order: number;
+  logRate: number;
+  amplitude: number;
+  rateCoefficient: number;
+  halfLife: number;
+  deviation: number | null;
 }
 
 /** From the full Jacobian in (A, ln κ, [b], [n]), carried to k, t½, y₀ and y∞ to first order. */
@@ -182,7 +208,8 @@ function uncertaintiesOf(
   { order, logRate, amplitude, rateCoefficient, halfLife, deviation }: Optimum,
   { endpointIsFree, orderIsFree }: { endpointIsFree: boolean; orderIsFree: boolean },
 ): RateLawFit['standardUncertainties'] {
-  if (deviation === null) return { rateCoefficient: null, halfLife: null, order: null, start: null, endpoint: null };
+  if (deviation === null)
+    return { rateCoefficient: null, halfLife: null, order: null, start: null, endpoint: null };
   const { offset, shape } = fit.problem;
   const factor = jacobian(fit, order, logRate, amplitude, orderIsFree);
   if (factor.isDeficient) {
@@ -197,11 +224,14 @@ function uncertaintiesOf(
   const uncertainty = (g: number[]): number => deviation * Math.sqrt(combinationVariance(factor, g));
   const perOrder = halfLifeOrderSlope(order);
   return {
-    rateCoefficient: rateCoefficient * uncertainty(gradient((1 - order) / amplitude, 1, 0, -Math.log(Math.abs(amplitude)))),
+    rateCoefficient:
+      rateCoefficient * uncertainty(gradient((1 - order) / amplitude, 1, 0, -Math.log(Math.abs(amplitude)))),
     halfLife: halfLife * uncertainty(gradient(0, -1, 0, perOrder)),
     order: orderIsFree ? uncertainty(gradient(0, 0, 0, 1)) : null,
     start: shape === 'left' ? uncertainty(gradient(1, 0, 1, 0)) : null,
-    endpoint: endpointIsFree ? uncertainty(shape === 'left' ? gradient(0, 0, 1, 0) : gradient(1, 0, 0, 0)) : null,
+    endpoint: endpointIsFree
+      ? uncertainty(shape === 'left' ? gradient(0, 0, 1, 0) : gradient(1, 0, 0, 0))
+      : null,
   };
 }
 
@@ -211,7 +241,13 @@ function halfLifeOrderSlope(order: number): number {
   return (Math.log(reducedHalfLife(order + h)) - Math.log(reducedHalfLife(order - h))) / (2 * h);
 }
 
-function jacobian(fit: ReducedFit, order: number, logRate: number, amplitude: number, orderIsFree: boolean): QrFactor {
+function jacobian(
+  fit: ReducedFit,
+  order: number,
+  logRate: number,
+  amplitude: number,
+  orderIsFree: boolean,
+): QrFactor {
   const { times, rootWeights, offset, shape } = fit.problem;
   const g = fit.at(logRate, order).copyShape();
   const rows = times.length;
@@ -226,7 +262,8 @@ function jacobian(fit: ReducedFit, order: number, logRate: number, amplitude: nu
     design[i] = w * g[i];
     design[rows + i] = w * sign * amplitude * shareSlope(s, order, share);
     if (offset) design[2 * rows + i] = w;
-    if (orderIsFree) design[(columns - 1) * rows + i] = w * sign * amplitude * shareOrderSlope(s, order, share);
+    if (orderIsFree)
+      design[(columns - 1) * rows + i] = w * sign * amplitude * shareOrderSlope(s, order, share);
   }
   return factorQr(design, rows, columns);
 }

@@ -35,19 +35,31 @@ export function shareLeft(s: number, order: number): number {
   return u <= -1 ? 0 : Math.exp(-s * logRatio(u));
 }
 
-/** Share of the reactant converted, 1 − φ, with its digits at small s. */
+/**
+ * Share of the reactant converted, 1 − φ, with its digits at small s.
+ *
+ * @example shareConverted(1, 2) // 0.5
+ */
 export function shareConverted(s: number, order: number): number {
   const u = (order - 1) * s;
   return u <= -1 ? 1 : -Math.expm1(-s * logRatio(u));
 }
 
-/** dφ/d ln κ = −s φ/(1 + u). */
+/**
+ * dφ/d ln κ = −s φ/(1 + u).
+ *
+ * @example shareSlope(1, 1, Math.exp(-1)) // -0.367879441171442
+ */
 export function shareSlope(s: number, order: number, share: number): number {
   const u = (order - 1) * s;
   return u <= -1 || share === 0 ? 0 : (-s * share) / (1 + u);
 }
 
-/** dφ/dn at constant s. */
+/**
+ * dφ/dn at constant s.
+ *
+ * @example shareOrderSlope(2, 1, Math.exp(-2)) // 0.270670566473225
+ */
 export function shareOrderSlope(s: number, order: number, share: number): number {
   const u = (order - 1) * s;
   return u <= -1 || share === 0 ? 0 : -share * s * s * bend(u);
@@ -63,7 +75,11 @@ export function reducedHalfLife(order: number): number {
   return Math.LN2 * (x === 0 ? 1 : Math.expm1(x) / x);
 }
 
-/** Reduced time at which a share is left: the inverse of {@link shareLeft}. */
+/**
+ * Reduced time at which a share is left: the inverse of {@link shareLeft}.
+ *
+ * @example reducedTimeTo(0.25, 2) // 3
+ */
 export function reducedTimeTo(share: number, order: number): number {
   const x = -(order - 1) * Math.log(share);
   return -Math.log(share) * (x === 0 ? 1 : Math.expm1(x) / x);

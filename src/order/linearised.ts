@@ -62,7 +62,7 @@ export function straightLineFit(
  * A first guess of ln κ from the straight-line plot.
  *
  * @returns `undefined` where the end is not known beforehand, or the plot leads away from it
- * @example startRate(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 }).search.fit.problem, 1) // -0.3665
+ * @example startRate(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 }).search.fit.problem, 1) // -0.366513
  */
 export function startRate(
   { times, values, offset, shape }: ReducedProblem,

@@ -37,14 +37,25 @@ export interface OrderTable {
  *
  * @returns `null` when m − K − 1 leaves nothing
  * @see C. M. Hurvich and C.-L. Tsai, Biometrika 76 (1989) 297, doi:10.1093/biomet/76.2.297
+ * @example correctedAic(6, 6, 2) // 18
  */
-export function correctedAic(residualSumOfSquares: number, readings: number, parameters: number): number | null {
+export function correctedAic(
+  residualSumOfSquares: number,
+  readings: number,
+  parameters: number,
+): number | null {
   const k = parameters + 1;
   const spare = readings - k - 1;
-  return spare > 0 ? readings * Math.log(residualSumOfSquares / readings) + 2 * k + (2 * k * (k + 1)) / spare : null;
+  return spare > 0
+    ? readings * Math.log(residualSumOfSquares / readings) + 2 * k + (2 * k * (k + 1)) / spare
+    : null;
 }
 
-/** Shares of the evidence: exp(−Δ/2), summing to 1 over those that have one. */
+/**
+ * Shares of the evidence: exp(−Δ/2), summing to 1 over those that have one.
+ *
+ * @example akaikeWeights([0, null, 2 * Math.log(3)]) // [0.75, null, 0.25]
+ */
 export function akaikeWeights(criteria: readonly (number | null)[]): (number | null)[] {
   const known = criteria.filter((value): value is number => value !== null);
   const least = Math.min(...known);
@@ -67,6 +78,7 @@ function attempt(series: Series, options: RateLawOptions): Attempt {
  * Fits each simple order and the free order, and says in words what the data can tell.
  *
  * @throws InvalidInput for a call that cannot be meant; NotDetermined when no order can be fitted
+ * @example compareOrders(pairReadings([0, 1, 2, 3, 4, 5], [32, 16, 8, 4, 2, 1]), {}).rows[0].verdict // 'fits less well'
  */
 export function compareOrders(series: Series, options: Omit<RateLawOptions, 'order'>): OrderTable {
   const attempts = simpleOrders.map((order) => attempt(series, { ...options, order }));
@@ -83,9 +95,19 @@ export function compareOrders(series: Series, options: Omit<RateLawOptions, 'ord
 }
 
 const criterion = (fit: RateLawFit): number | null =>
-  correctedAic(Math.max(fit.residualSumOfSquares, roundingFloor(fit.search.fit)), fit.residuals.length, fit.parameters);
+  correctedAic(
+    Math.max(fit.residualSumOfSquares, roundingFloor(fit.search.fit)),
+    fit.residuals.length,
+    fit.parameters,
+  );
 
-function row(series: Series, order: number | null, { fit, why }: Attempt, weight: number | null, verdict: string): OrderRow {
+function row(
+  series: Series,
+  order: number | null,
+  { fit, why }: Attempt,
+  weight: number | null,
+  verdict: string,
+): OrderRow {
   const runsProbability = fit ? runsTest(fit.residuals) : null;
   return {
     order,

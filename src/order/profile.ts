@@ -23,25 +23,39 @@ const reachOfSearch = 40;
 const lowestLimit = lowestOrder - 4;
 const highestLimit = highestOrder + 4;
 
-/** k with its profile limits, at a fixed order. */
+/**
+ * k with its profile limits, at a fixed order.
+ *
+ * @example rateCoefficientEstimate(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 })).value // 0.693147
+ */
 export function rateCoefficientEstimate(fit: RateLawFit): Estimate {
   const { search, order, rateCoefficient, standardUncertainties } = fit;
-  const squaresAt = order === 1 ? (logK: number) => search.fit.at(logK, 1).residualSumOfSquares : profileOfCoefficient(fit);
+  const squaresAt =
+    order === 1 ? (logK: number) => search.fit.at(logK, 1).residualSumOfSquares : profileOfCoefficient(fit);
   return logEstimate(fit, rateCoefficient, standardUncertainties.rateCoefficient, squaresAt);
 }
 
-/** Half life with its profile limits, at a fixed order: one to one with κ. */
+/**
+ * Half life with its profile limits, at a fixed order: one to one with κ.
+ *
+ * @example halfLifeEstimate(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 })).value // 1
+ */
 export function halfLifeEstimate(fit: RateLawFit): Estimate {
   const { search, order, halfLife, standardUncertainties } = fit;
   const reduced = Math.log(reducedHalfLife(order));
-  return logEstimate(fit, halfLife, standardUncertainties.halfLife, (logHalfLife) =>
-    search.fit.at(reduced - logHalfLife, order).residualSumOfSquares,
+  return logEstimate(
+    fit,
+    halfLife,
+    standardUncertainties.halfLife,
+    (logHalfLife) => search.fit.at(reduced - logHalfLife, order).residualSumOfSquares,
   );
 }
 
 /**
  * Order with its profile limits; the fit's order must have been free. Where, on one side, the search
  * leaves the orders at which a rate coefficient can be told, the data set no limit there.
+ *
+ * @example orderEstimate(fitRateLaw(pairReadings([0, 1, 2, 3, 4], [12, 6, 4, 3, 2.4]), { order: 'free' })).value // 2
  */
 export function orderEstimate(fit: RateLawFit): Estimate {
   const { search, order, standardUncertainties } = fit;
@@ -51,10 +65,18 @@ export function orderEstimate(fit: RateLawFit): Estimate {
     const logRate = followRate(search.fit, n, Math.log(reducedHalfLife(n)) - logHalfLife);
     return search.fit.at(logRate, n).residualSumOfSquares;
   };
-  return limits(fit, order, standardUncertainties.order, order, squaresAt, (n) => n, { low: lowestLimit, high: highestLimit });
+  return limits(fit, order, standardUncertainties.order, order, squaresAt, (n) => n, {
+    low: lowestLimit,
+    high: highestLimit,
+  });
 }
 
-function logEstimate(fit: RateLawFit, value: number, uncertainty: number | null, squaresAt: (log: number) => number): Estimate {
+function logEstimate(
+  fit: RateLawFit,
+  value: number,
+  uncertainty: number | null,
+  squaresAt: (log: number) => number,
+): Estimate {
   return limits(fit, value, uncertainty, Math.log(value), squaresAt, Math.exp);
 }
 
@@ -72,14 +94,16 @@ function limits(
   back: (place: number) => number,
   { low, high }: Walk = { low: -Infinity, high: Infinity },
 ): Estimate {
-  if (uncertainty === null) return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
+  if (uncertainty === null)
+    return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
   const estimate = { value, standardUncertainty: uncertainty, degreesOfFreedom };
   // readings that lie on the curve to the last digit leave no room
   if (residualSumOfSquares <= roundingFloor(search.fit)) return { ...estimate, lower: value, upper: value };
   const t = studentQuantile(0.975, degreesOfFreedom);
   const rise = residualSumOfSquares * ((t * t) / degreesOfFreedom);
   // the root of the rise is nearly straight in the quantity; at the estimate itself there is none
-  const riseTo = (place: number): number => (place === at ? 0 : Math.max(0, squaresAt(place) - residualSumOfSquares));
+  const riseTo = (place: number): number =>
+    place === at ? 0 : Math.max(0, squaresAt(place) - residualSumOfSquares);
   const excess = (place: number): number => Math.sqrt(riseTo(place)) - Math.sqrt(rise);
   const step = back === Math.exp ? uncertainty / value : uncertainty;
   const side = (sign: number): number | null => {
@@ -105,7 +129,13 @@ function whereDetermined(search: () => number | null): number | null {
 }
 
 /** @param end where the walk must turn back */
-function limitOn(excess: (place: number) => number, at: number, step: number, t: number, end: number): number | null {
+function limitOn(
+  excess: (place: number) => number,
+  at: number,
+  step: number,
+  t: number,
+  end: number,
+): number | null {
   let near = at;
   for (let reach = t; reach <= reachOfSearch; reach *= 1.5) {
     const far = step < 0 ? Math.max(end, at + reach * step) : Math.min(end, at + reach * step);
@@ -116,7 +146,11 @@ function limitOn(excess: (place: number) => number, at: number, step: number, t:
   return null;
 }
 
-/** RSS that rounding alone leaves. */
+/**
+ * RSS that rounding alone leaves.
+ *
+ * @example roundingFloor(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 }).search.fit) // 6.62643e-29
+ */
 export function roundingFloor({ problem }: ReducedFit): number {
   let sum = 0;
   for (let i = 0; i < problem.values.length; i++) sum += (problem.rootWeights[i] * problem.values[i]) ** 2;
@@ -135,7 +169,8 @@ function profileOfCoefficient({ order, search }: RateLawFit): (logK: number) => 
   return (logK) => {
     const at = (logAmplitude: number): Rise => alongDistance(problem, order, logK, logAmplitude, sign);
     const best = valleyNear((logAmplitude) => at(logAmplitude).slope, start, 1e-13);
-    if (best === undefined) throw new NotDetermined('rate coefficient cannot be told: any distance from the end fits as well');
+    if (best === undefined)
+      throw new NotDetermined('rate coefficient cannot be told: any distance from the end fits as well');
     return at(best).squares;
   };
 }

@@ -19,6 +19,8 @@ const scanStep = 0.6;
  *
  * The fast end is set by the share left, not by the half life: at a high order most readings of a good
  * run come many half lives after the start.
+ *
+ * @example rateBounds(Float64Array.of(0, 10), 1).low // -9.57685329
  */
 export function rateBounds(times: Float64Array, order: number): { low: number; high: number } {
   let spacing = Infinity;
@@ -27,7 +29,10 @@ export function rateBounds(times: Float64Array, order: number): { low: number; h
     if (step > 0 && step < spacing) spacing = step;
   }
   const span = times[times.length - 1] - times[0];
-  return { low: Math.log(reducedHalfLife(order) / (longestHalfLife * span)), high: Math.log(reducedTimeTo(leastShareLeft, order) / spacing) };
+  return {
+    low: Math.log(reducedHalfLife(order) / (longestHalfLife * span)),
+    high: Math.log(reducedTimeTo(leastShareLeft, order) / spacing),
+  };
 }
 
 /**
@@ -37,6 +42,7 @@ export function rateBounds(times: Float64Array, order: number): { low: number; h
  *
  * @param start a first guess of ln κ, tried beside the scan
  * @throws NotDetermined where the best half life lies outside the range, or κ makes no difference
+ * @example bestRate(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 }).search.fit, 1) // -0.36651292
  */
 export function bestRate(fit: ReducedFit, order: number, start?: number): number {
   const { low, high } = rateBounds(fit.problem.times, order);
@@ -55,9 +61,15 @@ export function bestRate(fit: ReducedFit, order: number, start?: number): number
   return logRate;
 }
 
-/** The same from a good start, for a search over the order: the valley is followed, not looked for. */
+/**
+ * The same from a good start, for a search over the order: the valley is followed, not looked for.
+ *
+ * @example followRate(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 }).search.fit, 1, 0.5) // -0.36651292
+ */
 export function followRate(fit: ReducedFit, order: number, start: number): number {
-  return valleyNear((logRate) => fit.at(logRate, order).rateGradient, start, 1e-15) ?? bestRate(fit, order, start);
+  return (
+    valleyNear((logRate) => fit.at(logRate, order).rateGradient, start, 1e-15) ?? bestRate(fit, order, start)
+  );
 }
 
 /** Zero of d(RSS)/d ln κ in a bracket around a point lower than its ends. */
@@ -73,10 +85,14 @@ function zeroSlope(fit: ReducedFit, order: number, low: number, high: number, in
 
 function requireDetermined(fit: ReducedFit, order: number, logRate: number, low: number, high: number): void {
   if (logRate <= low + 1e-9) {
-    throw new NotDetermined('rate coefficient cannot be told: the column hardly changes, or bends too little for its half life to be seen');
+    throw new NotDetermined(
+      'rate coefficient cannot be told: the column hardly changes, or bends too little for its half life to be seen',
+    );
   }
   if (logRate >= high - 1e-9) {
-    throw new NotDetermined('rate coefficient cannot be told: all of the change lies between the first readings');
+    throw new NotDetermined(
+      'rate coefficient cannot be told: all of the change lies between the first readings',
+    );
   }
   const { rateCurvature, rateLength } = fit.at(logRate, order);
   if (!(rateCurvature > 1e-14 * rateLength) || rateLength === 0) {
@@ -94,10 +110,12 @@ export const highestOrder = 6;
  * The order and ln κ of least squares with the order free: the valley of best κ is followed along n.
  *
  * @throws NotDetermined when the best order lies at an end of the range looked through
+ * @example bestOrder(fitRateLaw(pairReadings([0, 1, 2, 3, 4], [12, 6, 4, 3, 2.4]), { order: 1 }).search.fit).order // 2
  */
 export function bestOrder(fit: ReducedFit): { order: number; logRate: number } {
   const valley = valleyAlongOrders(fit);
-  if (valley.length === 0) throw new NotDetermined('order cannot be told: no order between −1 and 6 gives a rate coefficient');
+  if (valley.length === 0)
+    throw new NotDetermined('order cannot be told: no order between −1 and 6 gives a rate coefficient');
   const lowest = valley.reduce((best, place, i) => (place.squares < valley[best].squares ? i : best), 0);
   // from a start that depends on the order alone: a start handed on would make the slope depend on the path
   const logRateAt = (order: number): number => followRate(fit, order, interpolated(valley, order));
@@ -107,7 +125,9 @@ export function bestOrder(fit: ReducedFit): { order: number; logRate: number } {
   if (slopeHere === 0) return { order: here, logRate: logRateAt(here) };
   const neighbour = valley[slopeHere > 0 ? lowest - 1 : lowest + 1]?.order;
   if (neighbour === undefined || slope(neighbour) > 0 === slopeHere > 0) {
-    throw new NotDetermined(`order cannot be told: the best lies near ${here}, at the end of what was tried or in a valley without a bottom`);
+    throw new NotDetermined(
+      `order cannot be told: the best lies near ${here}, at the end of what was tried or in a valley without a bottom`,
+    );
   }
   const order = findRoot(slope, here, neighbour, 1e-14);
   return { order, logRate: logRateAt(order) };
@@ -124,7 +144,8 @@ function valleyAlongOrders(fit: ReducedFit): Place[] {
   const places: Place[] = [];
   for (let order = lowestOrder; order <= highestOrder; order += 0.5) {
     const logRate = tryRate(fit, order);
-    if (logRate !== undefined) places.push({ order, logRate, squares: fit.at(logRate, order).residualSumOfSquares });
+    if (logRate !== undefined)
+      places.push({ order, logRate, squares: fit.at(logRate, order).residualSumOfSquares });
   }
   return places;
 }

@@ -23,18 +23,29 @@ export interface Evidence {
   readonly freeOrder: Estimate | null;
 }
 
-/** Half lives followed, log₂ of the share consumed: 3 when an eighth is left. Infinite when nothing is left. */
+/**
+ * Half lives followed, log₂ of the share consumed: 3 when an eighth is left. Infinite when nothing is left.
+ *
+ * @example halfLivesFollowed(fitRateLaw(pairReadings([0, 1, 2], [4, 2, 1]), { order: 1 })) // 2
+ */
 export const halfLivesFollowed = (fit: RateLawFit): number => -Math.log2(fit.shareLeft);
 
 const listed = (orders: readonly number[]): string =>
-  orders.length < 2 ? orders.map(shown).join('') : `${orders.slice(0, -1).map(shown).join(', ')} or ${shown(orders[orders.length - 1])}`;
+  orders.length < 2
+    ? orders.map(shown).join('')
+    : `${orders.slice(0, -1).map(shown).join(', ')} or ${shown(orders[orders.length - 1])}`;
 
+/** @example verdicts({ orders: [1], fits: [null], weights: [null], freeOrder: null }) // { simple: [''], free: '' } */
 export function verdicts({ orders, fits, weights, freeOrder }: Evidence): { simple: string[]; free: string } {
   const hasWeight = orders.map((_, i) => (weights[i] ?? 0) >= leastWeight);
   const followed = leastFollowed(fits, hasWeight);
-  const plausible = orders.filter((order, i) => hasWeight[i] || (freeOrder !== null && includes(freeOrder, order)));
+  const plausible = orders.filter(
+    (order, i) => hasWeight[i] || (freeOrder !== null && includes(freeOrder, order)),
+  );
   return {
-    simple: orders.map((order, i) => (fits[i] ? simpleVerdict(order, weights[i], { plausible, followed, freeOrder }) : '')),
+    simple: orders.map((order, i) =>
+      fits[i] ? simpleVerdict(order, weights[i], { plausible, followed, freeOrder }) : '',
+    ),
     free: freeVerdict(orders, freeOrder, followed),
   };
 }
@@ -62,14 +73,21 @@ interface Standing {
  * holds it and no other simple order, and the run was followed far enough. With few readings the weights
  * alone are too sure of themselves, since they do not count the degrees of freedom of the scatter.
  */
-function simpleVerdict(order: number, weight: number | null, { plausible, followed, freeOrder }: Standing): string {
+function simpleVerdict(
+  order: number,
+  weight: number | null,
+  { plausible, followed, freeOrder }: Standing,
+): string {
   if (weight === null) return 'too few readings to weigh the orders';
   if (weight < leastWeight) {
-    return plausible.includes(order) ? 'fits less well, but lies within what a free order allows' : 'fits less well';
+    return plausible.includes(order)
+      ? 'fits less well, but lies within what a free order allows'
+      : 'fits less well';
   }
   const rivals = plausible.filter((other) => other !== order);
   if (followed < halfLivesNeeded) {
-    const others = rivals.length > 0 ? `cannot be told from order ${listed(rivals)}` : 'best so far, not established';
+    const others =
+      rivals.length > 0 ? `cannot be told from order ${listed(rivals)}` : 'best so far, not established';
     return `${others}: ${followed.toFixed(1)} half lives followed, follow ${halfLivesAdvised} or more`;
   }
   if (rivals.length > 0) return `cannot be told from order ${listed(rivals)}`;
@@ -94,6 +112,10 @@ function freeVerdict(orders: readonly number[], freeOrder: Estimate | null, foll
   return `${range}, ${inside.length > 0 ? `holds order ${listed(inside)}` : 'holds none of the simple orders'}${short}`;
 }
 
-/** Words to add when the residuals run in a pattern; empty otherwise. */
+/**
+ * Words to add when the residuals run in a pattern; empty otherwise.
+ *
+ * @example patternInWords(0.01) // '; residuals run in a pattern'
+ */
 export const patternInWords = (runsProbability: number | null): string =>
   runsProbability !== null && runsProbability < patternProbability ? '; residuals run in a pattern' : '';

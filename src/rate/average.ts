@@ -2,7 +2,12 @@
 import { InvalidInput, NotDetermined, requireFinite, shown } from '../errors';
 import type { Estimate } from '../estimate';
 import { studentQuantile } from '../numerics/studentT';
-import { averageReplicates, requireDistinctTimes, stoichiometricNumberFor, type Series } from '../series/series';
+import {
+  averageReplicates,
+  requireDistinctTimes,
+  stoichiometricNumberFor,
+  type Series,
+} from '../series/series';
 
 interface AveragedRun {
   readonly times: Float64Array;
@@ -21,8 +26,14 @@ interface AveragedRun {
  * @returns rate in reading units per time unit
  * @throws InvalidInput when from equals to; NotDetermined outside the run
  * @see IUPAC Gold Book, rate of reaction, doi:10.1351/goldbook.R05156
+ * @example averageRate(pairReadings([0, 10, 20], [9, 7, 5]), 0, 15).value // 0.2
  */
-export function averageRate(series: Series, from: number, to: number, stoichiometricNumber?: number): Estimate {
+export function averageRate(
+  series: Series,
+  from: number,
+  to: number,
+  stoichiometricNumber?: number,
+): Estimate {
   requireFinite({ from, to });
   if (from === to) throw new InvalidInput(`from and to must differ: both are ${shown(from)}`);
   requireDistinctTimes(series, 2, 'an average rate');
@@ -42,17 +53,26 @@ export function averageRate(series: Series, from: number, to: number, stoichiome
 }
 
 function withScatter(value: number, sensitivity: number, { deviation, degreesOfFreedom }: Scatter): Estimate {
-  if (degreesOfFreedom === 0) return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
+  if (degreesOfFreedom === 0)
+    return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
   const standardUncertainty = deviation * sensitivity;
   const reach = studentQuantile(0.975, degreesOfFreedom) * standardUncertainty;
   return { value, standardUncertainty, lower: value - reach, upper: value + reach, degreesOfFreedom };
 }
 
 /** Adds ± the weights by which the readings make up y(time). */
-function addInterpolation({ times }: AveragedRun, time: number, name: string, sign: number, weights: Float64Array): void {
+function addInterpolation(
+  { times }: AveragedRun,
+  time: number,
+  name: string,
+  sign: number,
+  weights: Float64Array,
+): void {
   const last = times.length - 1;
   if (time < times[0] || time > times[last]) {
-    throw new NotDetermined(`${name} must lie within the run, ${shown(times[0])} to ${shown(times[last])}: got ${shown(time)}`);
+    throw new NotDetermined(
+      `${name} must lie within the run, ${shown(times[0])} to ${shown(times[last])}: got ${shown(time)}`,
+    );
   }
   let right = 1;
   while (right < last && times[right] < time) right++;
@@ -75,6 +95,7 @@ interface Scatter {
  * 0.51 of it, from the correlations 2/3 and 1/6 between neighbours.
  *
  * @see T. Gasser, L. Sroka and C. Jennen-Steinmetz, Biometrika 73 (1986) 625, doi:10.1093/biomet/73.3.625
+ * @example readingScatter(averageReplicates(pairReadings([0, 1, 2], [0, 1, 4]))).deviation // 0.816497
  */
 export function readingScatter({ times, values, counts }: AveragedRun): Scatter {
   const inner = times.length - 2;

@@ -20,6 +20,7 @@ export interface LocalFit {
   degreesOfFreedom: number;
 }
 
+/** @example emptyLocalFit().slope // 0 */
 export const emptyLocalFit = (): LocalFit => ({
   value: 0,
   slope: 0,
@@ -48,6 +49,7 @@ function makeRoom(count: number): void {
  *
  * @param at time at which height and slope are wanted
  * @throws InvalidInput when the window holds fewer different times than degree + 1
+ * @example fitLocalPolynomial(Float64Array.of(0, 1, 2), Float64Array.of(0, 1, 4), 0, 3, 2, 1, emptyLocalFit()).slope // 2
  */
 export function fitLocalPolynomial(
   times: Float64Array,
@@ -60,7 +62,8 @@ export function fitLocalPolynomial(
 ): LocalFit {
   makeRoom(count);
   // times are taken from `at` in units of the window's half-width, so that powers keep their digits
-  const scale = Math.max(at - times[first], times[first + count - 1] - at, times[first + count - 1] - times[first]) || 1;
+  const scale =
+    Math.max(at - times[first], times[first + count - 1] - at, times[first + count - 1] - times[first]) || 1;
   fit.value = fit.slope = fit.slopeVariance = fit.valueVariance = 0;
   for (let i = 0; i < count; i++) {
     current[i] = 1;
@@ -85,7 +88,9 @@ export function fitLocalPolynomial(
       centre += ((times[first + i] - at) / scale) * square;
     }
     if (!(norm > 1e-24 * normBefore)) {
-      throw new InvalidInput(`a polynomial of degree ${degree} needs ${degree + 1} different times in its window: got ${k}`);
+      throw new InvalidInput(
+        `a polynomial of degree ${degree} needs ${degree + 1} different times in its window: got ${k}`,
+      );
     }
     const share = product / norm;
     fit.value += share * height;
@@ -124,6 +129,7 @@ export function fitLocalPolynomial(
  *
  * @param from where to begin looking, a first index that is not too far right (a column walks forward)
  * @returns first index
+ * @example nearestWindow(Float64Array.of(0, 1, 2, 3), 2, 2) // 1
  */
 export function nearestWindow(times: Float64Array, count: number, at: number, from = 0): number {
   let first = from;

@@ -3,7 +3,13 @@ import { InvalidInput, NotDetermined, requireFinite, shown } from '../errors';
 import type { Estimate } from '../estimate';
 import { studentQuantile } from '../numerics/studentT';
 import { requireDistinctTimes, stoichiometricNumberFor, type Series } from '../series/series';
-import { emptyLocalFit, fitLocalPolynomial, highestDegree, nearestWindow, type LocalFit } from './localPolynomial';
+import {
+  emptyLocalFit,
+  fitLocalPolynomial,
+  highestDegree,
+  nearestWindow,
+  type LocalFit,
+} from './localPolynomial';
 import { defaultWindow } from './window';
 
 export interface TangentOptions {
@@ -29,9 +35,12 @@ function settle(series: Series, { points, degree = 2, stoichiometricNumber }: Ta
   const count = series.times.length;
   if (points !== undefined) {
     if (!Number.isInteger(points) || points < degree + 1) {
-      throw new InvalidInput(`points must be a whole number, ${degree + 1} or more for degree ${degree}: got ${shown(points)}`);
+      throw new InvalidInput(
+        `points must be a whole number, ${degree + 1} or more for degree ${degree}: got ${shown(points)}`,
+      );
     }
-    if (points > count) throw new InvalidInput(`points must not exceed the ${count} readings there are: got ${points}`);
+    if (points > count)
+      throw new InvalidInput(`points must not exceed the ${count} readings there are: got ${points}`);
   }
   return {
     points: points ?? defaultWindow(series, degree),
@@ -44,7 +53,8 @@ function settle(series: Series, { points, degree = 2, stoichiometricNumber }: Ta
 function asRate(fit: LocalFit, stoichiometricNumber: number): Estimate {
   const value = fit.slope / stoichiometricNumber;
   const { degreesOfFreedom } = fit;
-  if (degreesOfFreedom === 0) return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
+  if (degreesOfFreedom === 0)
+    return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
   const variance = (fit.residualSumOfSquares / degreesOfFreedom) * fit.slopeVariance;
   const standardUncertainty = Math.sqrt(variance) / Math.abs(stoichiometricNumber);
   const reach = studentQuantile(0.975, degreesOfFreedom) * standardUncertainty;
@@ -63,6 +73,7 @@ function asRate(fit: LocalFit, stoichiometricNumber: number): Estimate {
  * @throws InvalidInput for a window that cannot be; NotDetermined outside the run or with too few times
  * @see A. Savitzky and M. J. E. Golay, Anal. Chem. 36 (1964) 1627, doi:10.1021/ac60214a047 (even spacing);
  *   W. S. Cleveland, J. Am. Stat. Assoc. 74 (1979) 829 (nearest neighbours)
+ * @example tangentRate(pairReadings([0, 1, 2, 3], [9, 4, 1, 0]), 1, { points: 3 }).value // 4
  */
 export function tangentRate(series: Series, time: number, options: TangentOptions = {}): Estimate {
   requireFinite({ time });
@@ -70,7 +81,10 @@ export function tangentRate(series: Series, time: number, options: TangentOption
   const { times, values } = series;
   requireWithinRun(times, time);
   const first = nearestWindow(times, points, time);
-  return asRate(fitLocalPolynomial(times, values, first, points, degree, time, emptyLocalFit()), stoichiometricNumber);
+  return asRate(
+    fitLocalPolynomial(times, values, first, points, degree, time, emptyLocalFit()),
+    stoichiometricNumber,
+  );
 }
 
 /**
@@ -78,6 +92,7 @@ export function tangentRate(series: Series, time: number, options: TangentOption
  *
  * @returns one estimate a reading, in order of time
  * @throws as {@link tangentRate}
+ * @example ratesAlong(pairReadings([0, 1, 2, 3], [9, 4, 1, 0]), { points: 3 })[3].value // 0
  */
 export function ratesAlong(series: Series, options: TangentOptions = {}): Estimate[] {
   const { points, degree, stoichiometricNumber } = settle(series, options);
@@ -86,7 +101,10 @@ export function ratesAlong(series: Series, options: TangentOptions = {}): Estima
   const rates: Estimate[] = new Array(times.length);
   for (let i = 0, first = 0; i < times.length; i++) {
     first = nearestWindow(times, points, times[i], first);
-    rates[i] = asRate(fitLocalPolynomial(times, values, first, points, degree, times[i], fit), stoichiometricNumber);
+    rates[i] = asRate(
+      fitLocalPolynomial(times, values, first, points, degree, times[i], fit),
+      stoichiometricNumber,
+    );
   }
   return rates;
 }
@@ -94,6 +112,8 @@ export function ratesAlong(series: Series, options: TangentOptions = {}): Estima
 function requireWithinRun(times: Float64Array, time: number): void {
   const last = times[times.length - 1];
   if (time < times[0] || time > last) {
-    throw new NotDetermined(`time must lie within the run, ${shown(times[0])} to ${shown(last)}: got ${shown(time)}`);
+    throw new NotDetermined(
+      `time must lie within the run, ${shown(times[0])} to ${shown(last)}: got ${shown(time)}`,
+    );
   }
 }

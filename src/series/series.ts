@@ -39,7 +39,12 @@ export function pairReadings(times: Readings, values: Readings): Series {
   return { ...series, distinctTimes: countDistinct(series.times) };
 }
 
-/** A time beside each reading. @throws InvalidInput */
+/**
+ * A time beside each reading.
+ *
+ * @throws InvalidInput
+ * @example requireOneLength([1, 2], [3, 4]) // undefined
+ */
 export function requireOneLength({ length: times }: ArrayLike<unknown>, { length: values }: ArrayLike<unknown>): void {
   if (times === values) return;
   throw new InvalidInput(`times and values must be of one length: got ${times} times and ${values} values`);

@@ -10,13 +10,17 @@ import { waterDensity } from './water';
  * @returns pK_w
  * @throws InvalidInput outside that range
  * @see IAPWS R11-24; H. Arcis et al., J. Phys. Chem. Ref. Data 53 (2024) 023103, doi:10.1063/5.0198792
- * @example waterIonProduct(298.15) // 13.99435
+ * @example waterIonProduct(298.15) // 13.9944
  */
 export function waterIonProduct(temperature: number): number {
   return ionProductAt(temperature, waterDensity(temperature));
 }
 
-/** The release's equation; density in kg/m³. */
+/**
+ * The release's equation; density in kg/m³.
+ *
+ * @example ionProductAt(300, 1000) // 13.906672
+ */
 export function ionProductAt(temperature: number, density: number): number {
   const d = density / 1000;
   const z = d * Math.exp(-0.702132 + 8681.05 / temperature - (24145.1 * d ** (2 / 3)) / temperature ** 2);

@@ -34,6 +34,7 @@ const reachBeyond = 0.1;
  * @throws InvalidInput for lengths that differ or an uncertainty that is not above 0; NotDetermined with too
  *   few different concentrations, or when the slope cannot be told from 0
  * @see EURACHEM/CITAC Guide CG 4, Quantifying Uncertainty in Analytical Measurement, 3rd ed. (2012), E.4
+ * @example calibrationLine({ concentrations: Float64Array.of(0, 1, 3), readings: Float64Array.of(1, 3, 7) }).slope // 2
  */
 export function calibrationLine(standards: Standards, throughOrigin = false): CalibrationLine {
   const { concentrations: x, readings: y } = standards;
@@ -113,6 +114,7 @@ function requireSlope({ slope, deviation, degreesOfFreedom, spread }: Calibratio
  * @returns concentration with Student's limits, in the unit of the standards
  * @throws NotDetermined for a reading more than a tenth of their range beyond those of the standards
  * @see EURACHEM/CITAC Guide CG 4, 3rd ed. (2012), E.4 and example A5
+ * @example concentrationFromLine(calibrationLine({ concentrations: Float64Array.of(0, 4), readings: Float64Array.of(1, 9) }), 4).value // 1.5
  */
 export function concentrationFromLine(line: CalibrationLine, reading: number, replicates = 1): Estimate {
   requireFinite({ reading });

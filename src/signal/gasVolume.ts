@@ -19,6 +19,7 @@ export interface GasConditions {
  *
  * @returns Pa
  * @throws InvalidInput where nothing is left for the gas
+ * @example dryGasPressure({ temperature: 298.15, pressure: 101325, saturation: 1, head: 0 }) // 98155.1755
  */
 export function dryGasPressure({ temperature, pressure, saturation, head }: GasConditions): number {
   requirePositive({ temperature, pressure });

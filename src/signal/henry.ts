@@ -64,7 +64,7 @@ export function henryConstant(gas: string, temperature: number): number {
  * @returns n, mol
  * @throws InvalidInput outside those ranges
  * @see IUPAC Gold Book, Henry's law, doi:10.1351/goldbook.H02783
- * @example dissolvedAmount(97000, 'CO2', 1e-4, 298.15) // 0.00324093
+ * @example dissolvedAmount(97000, 'CO2', 1e-4, 298.15) // 0.003241
  */
 export function dissolvedAmount(pressure: number, gas: string, volume: number, temperature: number): number {
   requireNotNegative({ pressure });

@@ -51,6 +51,7 @@ export function amountLost(mass: number, start: number, perMole: number): number
  *
  * @param readability d, the smallest step of the display
  * @see JCGM 100:2008 (GUM) 4.3.7 and F.2.2.1
+ * @example differenceUncertainty(0.01) // 0.00408248
  */
 export function differenceUncertainty(readability: number): number {
   requirePositive({ readability });
@@ -62,6 +63,7 @@ export function differenceUncertainty(readability: number): number {
  *
  * @throws NotDetermined where it does not
  * @see detection limit, L. A. Currie, Pure Appl. Chem. 67 (1995) 1699, doi:10.1351/pac199567101699
+ * @example requireVisibleLoss(0.4, 0.01) // undefined
  */
 export function requireVisibleLoss(largestLoss: number, readability: number): void {
   const least = 3.29 * differenceUncertainty(readability);
@@ -72,7 +74,11 @@ export function requireVisibleLoss(largestLoss: number, readability: number): vo
   }
 }
 
-/** The amount lost with its uncertainty from the balance's readability (type B, normal limits). */
+/**
+ * The amount lost with its uncertainty from the balance's readability (type B, normal limits).
+ *
+ * @example amountLostEstimate(99.56, 100, 44, 0.01).value // 0.01
+ */
 export function amountLostEstimate(
   mass: number,
   start: number,
