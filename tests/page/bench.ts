@@ -10,7 +10,7 @@ import type { Scripting } from '../../workbook/page/scripting';
 import { launchBrowser } from './browser';
 
 /** A machine with much else to do takes its time. */
-jest.setTimeout(30_000);
+jest.setTimeout(60_000);
 
 const root = join(__dirname, '..', '..');
 
@@ -36,6 +36,8 @@ export interface BenchPage {
   /** Clicks into the cell, types, and confirms with Enter. */
   type(reference: string, typed: string): Promise<void>;
   select(reference: string): Promise<void>;
+  /** Shows a book in place of the one that is open. */
+  open(book: BookModel): Promise<void>;
   /** Shows the demo as it is at first, whatever was done to it. */
   showDemo(): Promise<void>;
   /** Shows these rows of a sheet "Gas run" in place of the demo, from A1 on; what begins with = is a formula. */
@@ -98,8 +100,8 @@ async function openPage(
   const complaints = listenTo(page, address);
   // as in a browser that cannot ask where to save: what is saved can then be caught
   await page.addInitScript(() => Reflect.deleteProperty(window, 'showSaveFilePicker'));
-  await page.goto(address);
-  await page.waitForFunction(() => 'flaskpace' in window);
+  await page.goto(address, { timeout: longestStart });
+  await page.waitForFunction(() => 'flaskpace' in window, null, { timeout: longestStart });
 
   const cells = (reference: string): Promise<CellRange> =>
     page.evaluate(async (area) => (await window.flaskpace.port.read(area)).cells, {
@@ -116,6 +118,7 @@ async function openPage(
     complaints,
     cells,
     select,
+    open: show,
     showDemo: () => show(demoWorkbook()),
     show: (rows) => show(bookOf(rows)),
     async type(reference, typed) {
@@ -132,7 +135,7 @@ async function openPage(
 }
 
 /** Gives up without a word after a while: the expectation that follows says what is there instead. */
-async function waitUntil(isTrue: () => Promise<boolean>, patience = 3000): Promise<void> {
+export async function waitUntil(isTrue: () => Promise<boolean>, patience = 3000): Promise<void> {
   const end = Date.now() + patience;
   while (!(await isTrue()) && Date.now() < end) await new Promise((resolve) => setTimeout(resolve, 50));
 }

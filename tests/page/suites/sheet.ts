@@ -1,0 +1,90 @@
+/** The sheet on the page: every function live, typed with help, recalculated, and honest about errors. */
+import type { BenchPage } from '../bench';
+
+export function sheetSuite(sheet: () => BenchPage): void {
+  afterEach(() => sheet().showDemo());
+
+  const line = (): Promise<string> => sheet().page.locator('#cell-line').innerText();
+
+  test('the demo is calculated, nothing complains, and nothing is asked of another address', async () => {
+    // 8.8 mL of a gas over water is some tenths of a millimole at room conditions: 24 L/mol
+    const [[moles]] = await sheet().cells("'Gas run'!C6");
+    expect(Number(moles)).toBeGreaterThan((0.95 * 8.8e-3) / 24.5);
+    expect(Number(moles)).toBeLessThan(8.8e-3 / 24);
+    const shown = (await sheet().cells("'Gas run'!A1:N40")).flat();
+    expect(shown.filter((cell) => /^#(NAME|REF|VALUE|NULL|DIV)/.test(String(cell)))).toEqual([]);
+    expect(sheet().complaints).toEqual([]);
+    expect(await sheet().page.title()).toBe('demo.xlsx – Flaskpace');
+  });
+
+  test('a formula typed over a column spills, and follows an edit', async () => {
+    await sheet().type("'Gas run'!P1", '20');
+    await sheet().type("'Gas run'!P2", '25');
+    await sheet().type("'Gas run'!P3", '40');
+    await sheet().type("'Gas run'!Q1", '=PACE.EVENT(P1:P3)');
+    await sheet().shows("'Gas run'!Q1:Q3", [[0.05], [0.04], [0.025]]);
+    await sheet().type("'Gas run'!P2", '50');
+    await sheet().shows("'Gas run'!Q1:Q3", [[0.05], [0.02], [0.025]]);
+    expect(await sheet().page.title()).toBe('• demo.xlsx – Flaskpace');
+  });
+
+  test('a spill can be referred to by its first cell', async () => {
+    await sheet().type("'Gas run'!Q1", '=PACE.EVENT({20;25;40})');
+    await sheet().type("'Gas run'!R1", '=SUM(Q1#)');
+    await sheet().shows("'Gas run'!R1", [[0.115]]);
+    await sheet().select("'Gas run'!R1");
+    expect(await line()).toContain('=SUM(Q1#)');
+  });
+
+  test('a function is offered while its name is typed, and its arguments explained', async () => {
+    await sheet().select("'Gas run'!Q1");
+    await sheet().page.keyboard.type('=PACE.EV');
+    await sheet().page.getByText('Rate from a timed event, such as a colour change').first().waitFor();
+    await sheet().page.keyboard.type('ENT(');
+    await sheet().page.getByText('time until the event, one or many').waitFor();
+    expect(await sheet().page.getByText('signed change of the species').isVisible()).toBe(false);
+    await sheet().page.keyboard.type('A5,');
+    await sheet().page.getByText('signed change of the species').waitFor();
+    await sheet().page.keyboard.press('Escape');
+  });
+
+  test('an error speaks in our words, under the sheet and where the mouse rests', async () => {
+    const words = 'times must be above 0';
+    await sheet().show([['=PACE.EVENT(-3)']]);
+    await sheet().select("'Gas run'!A1");
+    await sheet().page.locator('#cell-line .why', { hasText: words }).waitFor();
+    await sheet().page.mouse.move(
+      ...middleOfA1(await sheet().page.locator('#grid canvas').last().boundingBox()),
+    );
+    await sheet().page.locator('#cell-line .why', { hasText: words }).waitFor();
+    await sheet().page.getByText(words).nth(1).waitFor();
+  });
+
+  /** Below the letters of the columns, right of the numbers of the rows. */
+  const middleOfA1 = (grid: { x: number; y: number } | null): [number, number] => [
+    grid!.x + 46 + 30,
+    grid!.y + 20 + 10,
+  ];
+
+  test('the line under the sheet reads the active cell: where, what, and the formula', async () => {
+    await sheet().select("'Gas run'!A5");
+    expect(await line()).toMatch(/^A5\s+0$/);
+    await sheet().select("'Gas run'!Q9");
+    expect(await line()).toMatch(/^Q9\s+blank$/);
+    await sheet().type("'Gas run'!Q9", '=1/4');
+    await sheet().shows("'Gas run'!Q9", [[0.25]]);
+    await sheet().select("'Gas run'!Q9");
+    expect(await line()).toMatch(/^Q9\s+0\.25\s+=1\/4$/);
+  });
+
+  test('a copied spill is copied as what it shows', async () => {
+    await sheet().page.context().grantPermissions(['clipboard-read', 'clipboard-write']);
+    await sheet().type("'Gas run'!Q1", '=PACE.EVENT({20;25;40})');
+    await sheet().shows("'Gas run'!Q3", [[0.025]]);
+    await sheet().select("'Gas run'!Q1:Q3");
+    await sheet().page.keyboard.press('ControlOrMeta+c');
+    await sheet().page.waitForTimeout(200);
+    const text = await sheet().page.evaluate(() => navigator.clipboard.readText());
+    expect(text.trim().split(/\r?\n/)).toEqual(['0.05', '0.04', '0.025']);
+  });
+}
