@@ -29,7 +29,8 @@ export function pairReadings(times: Readings, values: Readings): Series {
   for (let place = 0; place < times.length; place++) {
     if (times[place] !== null && values[place] !== null) kept.push(place);
   }
-  if (kept.length === 0) throw new InvalidInput('times and values must hold numbers: no row has both a time and a reading');
+  if (kept.length === 0)
+    throw new InvalidInput('times and values must hold numbers: no row has both a time and a reading');
   if (!isAscending(kept, times)) kept.sort((a, b) => times[a]! - times[b]! || a - b);
   const series = {
     times: Float64Array.from(kept, (place) => times[place]!),
@@ -45,7 +46,10 @@ export function pairReadings(times: Readings, values: Readings): Series {
  * @throws InvalidInput
  * @example requireOneLength([1, 2], [3, 4]) // undefined
  */
-export function requireOneLength({ length: times }: ArrayLike<unknown>, { length: values }: ArrayLike<unknown>): void {
+export function requireOneLength(
+  { length: times }: ArrayLike<unknown>,
+  { length: values }: ArrayLike<unknown>,
+): void {
   if (times === values) return;
   throw new InvalidInput(`times and values must be of one length: got ${times} times and ${values} values`);
 }
@@ -68,7 +72,9 @@ function countDistinct(sorted: Float64Array): number {
  */
 export function requireDistinctTimes(series: Series, needed: number, purpose: string): void {
   if (series.distinctTimes < 2) {
-    throw new InvalidInput(`times must differ: ${series.times.length === 1 ? 'only one pair was given' : `all ${series.times.length} are ${series.times[0]}`}`);
+    throw new InvalidInput(
+      `times must differ: ${series.times.length === 1 ? 'only one pair was given' : `all ${series.times.length} are ${series.times[0]}`}`,
+    );
   }
   if (series.distinctTimes < needed) {
     throw new NotDetermined(`${purpose} needs ${needed} different times: got ${series.distinctTimes}`);
@@ -85,7 +91,11 @@ export function averageReplicates({ times, values, distinctTimes }: Series): {
   values: Float64Array;
   counts: Int32Array;
 } {
-  const mean = { times: new Float64Array(distinctTimes), values: new Float64Array(distinctTimes), counts: new Int32Array(distinctTimes) };
+  const mean = {
+    times: new Float64Array(distinctTimes),
+    values: new Float64Array(distinctTimes),
+    counts: new Int32Array(distinctTimes),
+  };
   for (let i = 0, j = -1; i < times.length; i++) {
     if (i === 0 || times[i] !== times[i - 1]) mean.times[++j] = times[i];
     mean.counts[j] += 1;

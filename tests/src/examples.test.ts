@@ -8,9 +8,16 @@ const root = join(__dirname, '..', '..');
 const spokenElsewhere = join('src', 'series', 'check');
 
 const files = sourcesBelow(join(root, 'src'));
-const modules = new Map(files.map((file) => [file, require(file) as Readonly<Record<string, unknown>>]));
 const functions = files.flatMap(exportedFunctions).map((f) => ({ ...f, place: relative(root, f.file) }));
-const everything = Object.assign({}, ...modules.values()) as Readonly<Record<string, unknown>>;
+
+type Exports = Readonly<Record<string, unknown>>;
+const modules = new Map<string, Exports>();
+let everything: Exports = {};
+
+beforeAll(async () => {
+  for (const file of files) modules.set(file, (await import(file)) as Exports);
+  everything = Object.assign({}, ...modules.values()) as Exports;
+});
 
 test('every exported function has an example', () => {
   const silent = functions.filter(
