@@ -1,10 +1,13 @@
 /** All that the product asks of a spreadsheet engine. One implementation, over Univer; nothing else imports it. */
 import { CellError, type CellValue } from '../../functions/cell';
+import type { TableModel } from './tables';
 
 /** A sheet as it comes from a file or a demo: what was typed, before anything is calculated. */
 export interface BookModel {
   readonly sheets: readonly SheetModel[];
   readonly names: readonly DefinedName[];
+  /** Of a file that has some; formulas may refer to them. */
+  readonly tables?: readonly TableModel[];
 }
 
 export interface DefinedName {

@@ -1,7 +1,7 @@
 /** A sheet of a new file. */
 import { areaName } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
-import { isSpill, type CalculatedBook, CellModel, SheetModel } from '../engine/engine';
+import { isSpill, type CalculatedBook, type CellModel, type SheetModel } from '../engine/engine';
 import { cellXml, formulaXml } from './cellXml';
 import type { LookTable } from './createStyles';
 import { callsOurs, filedFormula } from './formulaText';

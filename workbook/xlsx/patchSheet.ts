@@ -7,6 +7,7 @@ import { cellXml, filedValue, formulaXml, showsAlready } from './cellXml';
 import { filedFormula, withFiledNames } from './formulaText';
 import { placeCells, type NewCell } from './placeCells';
 import { childOf, scanSheet, type ScannedCell, type ScannedChild, type ScannedSheet } from './sheetScan';
+import { plainText } from './xml';
 
 export interface SheetToPatch {
   /** The outcome of the formula in this cell, if one stands there. */
@@ -117,15 +118,16 @@ class SheetPatch {
     const { formula, row, column } = cell;
     const { t: kind, ...attributes } = formula.attributes;
     const { prefix } = this.scanned;
-    const text = withFiledNames(formula.text);
+    const filed = plainText(formula.text);
+    const text = withFiledNames(filed);
     const ref = areaName({ row, column, rows: area.rows, columns: area.columns });
     if (kind === 'array') {
-      if (text === formula.text && sameArea(areaBefore(cell), area)) return undefined;
+      if (text === filed && sameArea(areaBefore(cell), area)) return undefined;
       return { xml: formulaXml(prefix, { ...formula.attributes, ref }, text), marks: false };
     }
     const shared = kind === 'shared' && !this.unshared.has(attributes.si);
     // typed by hand into the file, or answering more than one cell: what Excel calls a dynamic array
-    if (!shared && (this.spills(row, column) || text !== formula.text)) {
+    if (!shared && (this.spills(row, column) || text !== filed)) {
       const own = kind === 'shared' ? filedFormula(this.sheet.typed(row, column)!) : text;
       const { si: _shared, ref: _ref, ...others } = attributes;
       this.newArrays = true;
@@ -135,9 +137,7 @@ class SheetPatch {
       const own = filedFormula(this.sheet.typed(row, column)!);
       return { xml: formulaXml(prefix, {}, own), marks: false };
     }
-    return text === formula.text
-      ? undefined
-      : { xml: formulaXml(prefix, formula.attributes, text), marks: false };
+    return text === filed ? undefined : { xml: formulaXml(prefix, formula.attributes, text), marks: false };
   }
 
   private spilled(place: string, value: CellValue): void {

@@ -8,6 +8,7 @@ import { NotAWorkbook } from './notAWorkbook';
 import { findParts, readXml } from './parts';
 import { scanSheet, type ScannedCell } from './sheetScan';
 import { readLooks, type CellLook } from './styles';
+import { readTables } from './tables';
 import { Package } from './zip';
 
 /** @throws NotAWorkbook with the reason, for what is not a whole .xlsx workbook */
@@ -17,6 +18,7 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
   const parts = findParts(pack);
   const library = readByLibrary(bytes);
   const looks = readLooks(pack, parts.styles);
+  const tables = readTables(pack, parts.sheets);
   return {
     sheets: parts.sheets.map(({ name, path }) => {
       const sheet = library.Sheets[name];
@@ -26,6 +28,7 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
       return sheetModel(name, sheet, cells, looks);
     }),
     names: definedNames(library),
+    ...(tables.length > 0 ? { tables } : {}),
   };
 }
 

@@ -7,7 +7,7 @@ export const xmlText = (text: string): string =>
   text
     .replace(/_(?=x[0-9A-Fa-f]{4}_)/g, '_x005F_')
     .replace(
-      /[\u0000-\u0008\u000b-\u001f\ufffe\uffff]/g,
+      /[^\t\n\u0020-\ufffd]/g,
       (c) => `_x${c.charCodeAt(0).toString(16).toUpperCase().padStart(4, '0')}_`,
     )
     .replace(/&/g, '&amp;')

@@ -87,6 +87,23 @@ describe('our functions in cells', () => {
   });
 });
 
+test('constants in braces: words with commas, small numbers, truth values', async () => {
+  const run = await sheet({
+    A1: '={"16,0",1E-5;"a;b",TRUE}',
+    A4: '=SUM({1,2;3,4}*{10;100})',
+    D1: '=PACE.EVENT({2E-3,"x"})',
+  });
+  expect(['A1', 'B1', 'A2', 'B2', 'A4', 'D1', 'E1'].map(run.shown)).toEqual([
+    '16,0',
+    1e-5,
+    'a;b',
+    true,
+    730,
+    500,
+    '',
+  ]);
+});
+
 describe('words for errors', () => {
   test('a missing and a superfluous argument are told', async () => {
     const run = await sheet({ B1: '=PACE.EVENT()', B2: '=PACE.EVENT(1,2,3,4)' });

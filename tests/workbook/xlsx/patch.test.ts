@@ -32,7 +32,7 @@ describe('what did not change', () => {
     'docProps/app.xml': '<Properties/>',
   };
   const sheet = worksheet(
-    `\n  <row r="1" spans="1:2" ht="20" x14ac:dyDescent="0.3" xmlns:x14ac="urn:x"><!-- note --><c  r='A1' s="0"><v>40.0</v></c><c r="B1"><f>A1/4</f><v>STALE</v></c></row>\n`.replace(
+    `\n  <row r="1" spans="1:2" ht="20" x14ac:dyDescent="0.3" xmlns:x14ac="urn:x"><!-- note --><c  r='A1' s="0"><v>40.0</v></c><c r="B1"><f>A1/4</f><v>9</v></c></row>\n`.replace(
       'STALE',
       '9',
     ),
@@ -208,10 +208,7 @@ describe('spills', () => {
 
   test('make room for one another: one leaves a cell, another takes it', async () => {
     const after = await rows(
-      `<row r="1"><c r="A1" cm="1">${dynamic('A1:A3', 'SEQUENCE(2)')}<v>1</v></c></row><row r="2"><c r="A2"><v>2</v></c></row><row r="3"><c r="A3"><v>9</v></c></row>`.replace(
-        '<row r="3">',
-        '<row r="3">',
-      ),
+      `<row r="1"><c r="A1" cm="1">${dynamic('A1:A3', 'SEQUENCE(2)')}<v>1</v></c></row><row r="2"><c r="A2"><v>2</v></c></row><row r="3"><c r="A3"><v>9</v></c></row>`,
     );
     expect(after).toContain('<row r="3"></row>');
   });
@@ -304,4 +301,30 @@ describe('formulas typed into the file as in a cell', () => {
     );
     expect(many).toContain('<row r="4"><c r="C4" t="str"><v></v></c></row>');
   });
+});
+
+test('a column of a table feeds a function, and the table stays as it was', async () => {
+  const part =
+    '<table xmlns="http://schemas.openxmlformats.org/spreadsheetml/2006/main" id="1" name="Run1" displayName="Run1" ref="A1:A3"><autoFilter ref="A1:A3"/><tableColumns count="1"><tableColumn id="1" name="t / s"/></tableColumns></table>';
+  const relations =
+    '<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships"><Relationship Id="rId1" Type="http://schemas.openxmlformats.org/officeDocument/2006/relationships/table" Target="../tables/table1.xml"/></Relationships>';
+  const bytes = packageOf({
+    sheets: {
+      Run: worksheet(
+        '<row r="1"><c r="A1" t="str"><v>t / s</v></c></row><row r="2"><c r="A2"><v>40</v></c><c r="C2"><f>_xldudf_PACE_EVENT(Run1[[#This Row],[t / s]])</f></c><c r="D2"><f>SUM(Run1[t / s])</f></c></row><row r="3"><c r="A3"><v>25</v></c></row>',
+        { after: '<tableParts count="1"><tablePart r:id="rId1"/></tableParts>' },
+      ),
+    },
+    parts: { 'xl/worksheets/_rels/sheet1.xml.rels': relations, 'xl/tables/table1.xml': part },
+    described: [
+      {
+        path: 'xl/tables/table1.xml',
+        type: 'application/vnd.openxmlformats-officedocument.spreadsheetml.table+xml',
+      },
+    ],
+  });
+  const after = await recalculated(bytes);
+  expect(rowsOf(after)).toContain('<f>_xldudf_PACE_EVENT(Run1[[#This Row],[t / s]])</f><v>0.025</v>');
+  expect(rowsOf(after)).toContain('<f>SUM(Run1[t / s])</f><v>65</v>');
+  expect(textOf(after, 'xl/tables/table1.xml')).toBe(part);
 });

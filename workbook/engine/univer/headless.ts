@@ -2,6 +2,7 @@
 import { LocaleType, LogLevel, Univer, UniverInstanceType, type IWorkbookData } from '@univerjs/core';
 import { IDefinedNamesService, UniverFormulaEnginePlugin } from '@univerjs/engine-formula';
 import type { BookModel, CalculatedBook } from '../engine';
+import { withPlainReferences } from '../tables';
 import { Calculation } from './calculation';
 import { readOutcome } from './outcome';
 import { formulaPluginConfig, forgetMessages } from './register';
@@ -30,7 +31,7 @@ async function calculateAlone(book: BookModel): Promise<CalculatedBook> {
   try {
     trimWholeColumns();
     univer.registerPlugin(UniverFormulaEnginePlugin, { function: formulaPluginConfig().function });
-    const named = withUniqueNames(book);
+    const named = withUniqueNames(withPlainReferences(book));
     univer.createUnit<IWorkbookData, never>(UniverInstanceType.UNIVER_SHEET, workbookData(named));
     const injector = univer.__getInjector();
     const names = injector.get(IDefinedNamesService);

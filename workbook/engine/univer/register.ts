@@ -6,6 +6,7 @@ import { parameterHelp } from '../../../functions/metadata';
 import { filedName } from '../names';
 import { anchorArray } from '../anchorText';
 import { AnchorArray } from './anchor';
+import { mendArrayConstants } from './arrayConstants';
 import { engineFunction, type EngineFunctionClass } from './engineFunction';
 import { exampleArguments } from './exampleArguments';
 import { containFaults } from './faults';
@@ -24,6 +25,7 @@ export interface FormulaPluginConfig {
 
 /** What both plugins must be given; it also mends the engine where our functions need it. */
 export function formulaPluginConfig(): FormulaPluginConfig {
+  mendArrayConstants();
   mendLargeSpills();
   containFaults();
   noteMessages();
