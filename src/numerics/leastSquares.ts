@@ -1,6 +1,6 @@
 /** Nonlinear least squares, for models that are not linear in any of their parameters. */
 import { NotDetermined } from '../errors';
-import { fitLinear } from './linearFit';
+import { fitLinearOnce } from './linearFit';
 import type { QrFactor } from './qr';
 
 export interface LeastSquaresModel {
@@ -31,9 +31,26 @@ const mostIterations = 2000;
  * @throws NotDetermined when the model is not finite at the start, or no end is reached
  * @see J. J. Moré, Lecture Notes in Mathematics 630 (1978) 105; K. Madsen, H. B. Nielsen and O. Tingleff, Methods
  *   for Non-Linear Least Squares Problems, 2nd ed. (2004), 3.2
+ * @example fitLeastSquares({ parameters: 1, residuals: 2, residualsAt: (p, r) => r.set([1 - p[0], 3 - p[0]]), derivativesAt: (p, c) => c[0].fill(1) }, [0]).parameters // Float64Array [2]
  */
 export function fitLeastSquares(model: LeastSquaresModel, start: ArrayLike<number>): LeastSquaresFit {
-  const search = new Search(model, Float64Array.from(start));
+  // an end where some parameter no longer matters is a plain that too bold a step ran into: start over, more
+  // carefully
+  let last: Found | undefined;
+  for (const damping of [1e-3, 1, 1e3]) {
+    last = searched(model, start, damping);
+    if (!last.isPlain) break;
+  }
+  return last!;
+}
+
+interface Found extends LeastSquaresFit {
+  /** Some parameter has next to no say here, though it had on the way. */
+  readonly isPlain: boolean;
+}
+
+function searched(model: LeastSquaresModel, start: ArrayLike<number>, damping: number): Found {
+  const search = new Search(model, Float64Array.from(start), damping);
   let iterations = 0;
   while (!search.isDone) {
     if (++iterations > mostIterations) {
@@ -53,15 +70,13 @@ class Search {
   private readonly columns: Float64Array[];
   private readonly lengths: Float64Array;
   private squares: number;
-  private damping = 1e-3;
   private growth = 2;
   private isFresh = false;
-  /** Full, undamped steps in a row that brought nothing. */
-  private idle = 0;
 
   constructor(
     private readonly model: LeastSquaresModel,
     private parameters: Float64Array,
+    private damping: number,
   ) {
     this.residuals = new Float64Array(model.residuals);
     this.trialResiduals = new Float64Array(model.residuals);
@@ -86,7 +101,8 @@ class Search {
       this.accept(trial, squares);
       this.damping *= Math.max(1 / 10, 1 - (2 * gain - 1) ** 3);
       this.growth = 2;
-      if (moved < 1e-15 || squares === 0) this.isDone = true;
+      if (squares === 0) this.isDone = true;
+      else if (moved < 1e-15) this.settle();
       else if (lowered < 1e-14 && moved < 1e-9) this.settle();
       return;
     }
@@ -96,20 +112,25 @@ class Search {
     if (this.damping > 1e60) this.settle();
   }
 
-  /** Near the end the sum is flat and says nothing: undamped steps, judged by their own length, go on. */
+  /**
+   * Near the end the sum is flat and says nothing. Undamped steps go on, judged by their own length, as long
+   * as they still shrink.
+   */
   private settle(): void {
-    let before = Infinity;
-    for (let i = 0; i < 20; i++) {
+    let shortest = Infinity;
+    let idle = 0;
+    while (idle < 3) {
       this.differentiate();
       const { step } = this.damped(0);
       const length = this.movedBy(step);
-      if (!(length < before / 2) || length > 1e-4) break;
+      if (length > 1e-3 || length === 0) break;
       const trial = this.parameters.map((p, j) => p + step[j]);
       this.model.residualsAt(trial, this.trialResiduals);
       const squares = sumOfSquares(this.trialResiduals);
       if (!(squares <= this.squares * (1 + 1e-9))) break;
       this.accept(trial, squares);
-      before = length;
+      idle = length < shortest * 0.9 ? 0 : idle + 1;
+      shortest = Math.min(shortest, length);
     }
     this.isDone = true;
   }
@@ -135,7 +156,7 @@ class Search {
     });
     const readings = new Float64Array(columns[0].length);
     readings.set(this.residuals);
-    const { coefficients, factor } = fitLinear(columns, readings);
+    const { coefficients, factor } = fitLinearOnce(columns, readings);
     if (factor.isDeficient) return { step: coefficients.fill(0), promised: 0 };
     let promised = 0;
     for (let i = 0; i < m; i++) {
@@ -158,10 +179,13 @@ class Search {
     return step.reduce((most, s, j) => Math.max(most, Math.abs(s) / (Math.abs(this.parameters[j]) || 1)), 0);
   }
 
-  result(iterations: number): LeastSquaresFit {
+  result(iterations: number): Found {
     this.differentiate();
-    const { factor } = fitLinear(this.columns, this.residuals);
-    return { parameters: this.parameters, residualSumOfSquares: this.squares, factor, iterations };
+    const isPlain = this.columns.some(
+      (column, j) => Math.sqrt(sumOfSquares(column)) <= 1e-10 * this.lengths[j],
+    );
+    const { factor } = fitLinearOnce(this.columns, this.residuals);
+    return { parameters: this.parameters, residualSumOfSquares: this.squares, factor, iterations, isPlain };
   }
 }
 
