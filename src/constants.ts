@@ -18,6 +18,9 @@ export const avogadroConstant = 6.02214076e23;
 /** Boltzmann constant, J/K, exact. CODATA 2022. */
 export const boltzmannConstant = 1.380649e-23;
 
+/** Planck constant, J s, exact. CODATA 2022. */
+export const planckConstant = 6.62607015e-34;
+
 /** Elementary charge, C, exact. CODATA 2022. */
 export const elementaryCharge = 1.602176634e-19;
 
