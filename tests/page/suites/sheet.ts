@@ -53,10 +53,9 @@ export function sheetSuite(sheet: () => BenchPage): void {
     await sheet().show([['=PACE.EVENT(-3)']]);
     await sheet().select("'Gas run'!A1");
     await sheet().page.locator('#cell-line .why', { hasText: words }).waitFor();
-    await sheet().page.mouse.move(
-      ...middleOfA1(await sheet().page.locator('#grid canvas').last().boundingBox()),
-    );
-    await sheet().page.locator('#cell-line .why', { hasText: words }).waitFor();
+    const [x, y] = middleOfA1(await sheet().page.locator('#grid canvas').last().boundingBox());
+    await sheet().page.mouse.move(x, y + 200);
+    await sheet().page.mouse.move(x, y, { steps: 4 });
     await sheet().page.getByText(words).nth(1).waitFor();
   });
 

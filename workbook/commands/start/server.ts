@@ -1,5 +1,5 @@
 /** Serves the files of one folder, and nothing else, to this machine. */
-import { createReadStream, readdirSync } from 'node:fs';
+import { createReadStream, readdirSync, statSync } from 'node:fs';
 import { createServer, type IncomingMessage, type Server, type ServerResponse } from 'node:http';
 import { extname, join } from 'node:path';
 
@@ -36,7 +36,7 @@ const headers = {
   'Referrer-Policy': 'no-referrer',
   'Cross-Origin-Opener-Policy': 'same-origin',
   'Cross-Origin-Resource-Policy': 'same-origin',
-  'Cache-Control': 'no-store', // the page may have been built anew
+  'Cache-Control': 'no-cache', // asked for each time, since the page may have been built anew
 };
 
 export function pageServer(folder: string): Server {
@@ -58,8 +58,15 @@ function answer(
   }
   const name = fileAsked(request.url ?? '/');
   if (name === null || !files.has(name)) return refuse(response, 404, 'there is no such file');
-  const type = types[extname(name)];
-  response.writeHead(200, { ...headers, 'Content-Type': type ?? 'application/octet-stream' });
+  const tag = tagOf(join(folder, name));
+  if (tag === null) return refuse(response, 404, 'there is no such file');
+  if (request.headers['if-none-match'] === tag) {
+    response.writeHead(304, { ...headers, ETag: tag });
+    response.end();
+    return;
+  }
+  const type = types[extname(name)] ?? 'application/octet-stream';
+  response.writeHead(200, { ...headers, ETag: tag, 'Content-Type': type });
   if (request.method === 'HEAD') {
     response.end();
     return;
@@ -67,6 +74,16 @@ function answer(
   const stream = createReadStream(join(folder, name));
   stream.on('error', () => response.destroy()); // built anew under our feet
   stream.pipe(response);
+}
+
+/** Changes with the file; the browser keeps what it has compiled as long as it stays. */
+function tagOf(path: string): string | null {
+  try {
+    const { mtimeMs, size } = statSync(path);
+    return `"${mtimeMs.toString(36)}-${size.toString(36)}"`;
+  } catch {
+    return null; // being built anew
+  }
 }
 
 function refuse(response: ServerResponse, status: number, words: string): void {

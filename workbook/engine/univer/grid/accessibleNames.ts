@@ -33,6 +33,7 @@ interface Unnamed {
 }
 
 const unnamed: readonly Unnamed[] = [
+  { selector: 'button[role="handle"]:not([aria-label])', name: () => 'Zoom' },
   {
     selector: 'button:not([aria-label])',
     name: (button) => (button.textContent?.trim() ? undefined : nameOfButton(button)),
