@@ -7,6 +7,7 @@ import along from './rate/along';
 import between from './rate/between';
 import event from './rate/event';
 import tangent from './rate/tangent';
+import course from './scheme/course';
 import check from './series/check';
 import absorbance from './signal/absorbance';
 import acidity from './signal/acidity';
@@ -45,6 +46,7 @@ export const catalogue: readonly CellFunction[] = [
   coefficient,
   halfLife,
   unit,
+  course,
   check,
 ];
 

@@ -54,6 +54,7 @@ const caution = 0.9;
  * @param start the state at time 0, none below 0
  * @param times ascending, 0 or later
  * @throws IntegrationStopped rather than to go on for ever
+ * @example integrate(new MassAction(parseScheme('A ->'), Float64Array.of(1), 1e-14), [1], Float64Array.of(1)).states[0][0] // 0.367879441
  */
 export function integrate(
   system: SensitiveSystem,

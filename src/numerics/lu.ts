@@ -11,6 +11,7 @@
  * @param matrix n × n, row by row; overwritten
  * @param pivots n places; filled with the rows that were exchanged
  * @returns false where the matrix is singular, or holds a number that is not finite
+ * @example factorLu(Float64Array.of(1, 2, 2, 4), 2, new Int32Array(2)) // false
  */
 export function factorLu(matrix: Float64Array, size: number, pivots: Int32Array): boolean {
   for (let k = 0; k < size; k++) {
@@ -47,6 +48,8 @@ function swapRows(matrix: Float64Array, size: number, one: number, other: number
  * Solves with the factors of {@link factorLu}.
  *
  * @param right at `offset` the right side, n numbers; overwritten with the solution
+ * @returns that
+ * @example solveLu(Float64Array.of(4), 1, Int32Array.of(0), Float64Array.of(8)) // Float64Array [2]
  */
 export function solveLu(
   factors: Float64Array,
@@ -54,7 +57,7 @@ export function solveLu(
   pivots: Int32Array,
   right: Float64Array,
   offset = 0,
-): void {
+): Float64Array {
   for (let k = 0; k < size; k++) {
     const row = pivots[k];
     const held = right[offset + row];
@@ -71,4 +74,5 @@ export function solveLu(
     for (let j = i + 1; j < size; j++) sum -= factors[i * size + j] * right[offset + j];
     right[offset + i] = sum / factors[i * size + i];
   }
+  return right;
 }

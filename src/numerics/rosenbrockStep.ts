@@ -11,6 +11,7 @@ import type { SensitiveSystem } from './stiffSystem';
 /** A point on the way: the state, and one sensitivity a parameter. */
 export type Blocks = readonly Float64Array[];
 
+/** @example newBlocks(2, 1)[0] // Float64Array [0, 0] */
 export const newBlocks = (size: number, count: number): Blocks =>
   Array.from({ length: count }, () => new Float64Array(size));
 

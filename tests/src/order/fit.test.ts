@@ -13,7 +13,10 @@ describe.each(reference.cases)('fitRateLaw $id: $description', (c) => {
     endpoint: c.endpoint as number | 'free',
     ...(c.sd ? { uncertainties: Float64Array.from(c.sd as number[]) } : {}),
   });
-  const { parameters, standardErrors } = c as { parameters: Record<string, number>; standardErrors: Record<string, number> };
+  const { parameters, standardErrors } = c as {
+    parameters: Record<string, number>;
+    standardErrors: Record<string, number>;
+  };
 
   test('k, y₀, y∞ and n meet fifty-digit arithmetic to 1e-8', () => {
     expect(relative(fit.rateCoefficient, parameters.k)).toBeLessThan(1e-8);

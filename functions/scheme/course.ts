@@ -1,0 +1,45 @@
+import { courseOf } from '../../src/scheme/course';
+import { reactionInWords } from '../../src/scheme/scheme';
+import type { CellValue } from '../cell';
+import { linesBeside } from '../column';
+import { defineFunction } from '../define';
+import { filled, schemeMethod, schemeParameters } from './schemeParameters';
+
+export default defineFunction({
+  name: 'COURSE',
+  family: 'mechanism',
+  summary: 'Concentration of every species of a written mechanism over time, a column each.',
+  method: `${schemeMethod} Columns stand in the order in which the scheme first names the species; a row of times is answered in rows. Times may stand in any order.`,
+  parameters: schemeParameters,
+  result: { unit: 'as initial', shape: 'table' },
+  // two steps at k = 0.12 and 0.035: A = e^(−0.12 t), B = 0.12/(0.035 − 0.12) (e^(−0.12 t) − e^(−0.035 t))
+  example: {
+    formula: '=PACE.COURSE("A -> B -> C",{0.12;0.035},{1;0;0},{0;10;40})',
+    equals: [
+      [1, 0, 0],
+      [0.30119421191220214, 0.5696384157268395, 0.12916737236095832],
+      [0.00822974704902003, 0.33651842384835734, 0.6552518291026226],
+    ],
+    within: 1e-8,
+  },
+  reference: 'doi:10.1007/s10543-023-00967-x; doi:10.1351/goldbook.O04322',
+  run({ scheme, coefficients, initial, times }) {
+    const rates = filled(coefficients, 'coefficients', (place) =>
+      place < scheme.reactions.length
+        ? reactionInWords(scheme, place)
+        : 'a step that the scheme does not have',
+    );
+    const start = filled(
+      initial,
+      'initial',
+      (place) => scheme.species[place] ?? 'a species that the scheme does not have',
+    );
+    const asked = times.numbers.filter((time) => time !== null);
+    const rows = courseOf(scheme, rates, start, asked)[Symbol.iterator]();
+    const gap = scheme.species.map((): CellValue => '');
+    const lines = times.numbers.map((time): readonly CellValue[] =>
+      time === null ? gap : [...(rows.next().value as Float64Array)],
+    );
+    return linesBeside(times, lines);
+  },
+});

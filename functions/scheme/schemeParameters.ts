@@ -1,0 +1,53 @@
+/** What the functions that work on a written mechanism have in common. */
+import { InvalidInput } from '../../src/errors';
+import { parseScheme } from '../../src/scheme/parse';
+import type { Scheme } from '../../src/scheme/scheme';
+import { CellError, shownCell, type CellRange } from '../cell';
+import { placeInWords, type Column } from '../column';
+import { column, required, type Parameter } from '../parameters';
+
+/** One cell with the whole mechanism, or a step a cell. */
+export function scheme(): Parameter<Scheme> {
+  return {
+    kind: 'text',
+    help: 'steps such as A + B -> C; C <-> D, in one cell or a step a cell; a space on each side of a plus',
+    unit: 'text',
+    dimension: 'matrix',
+    optional: false,
+    read: (cells, name) => parseScheme(writtenSteps(required(cells, name), name)),
+  };
+}
+
+function writtenSteps(cells: CellRange, name: string): string {
+  const steps = cells.flat().filter((cell) => cell !== null && cell !== '');
+  return steps
+    .map((cell) => {
+      if (cell instanceof CellError) throw cell;
+      if (typeof cell === 'string') return cell;
+      throw new InvalidInput(`${name} must be text: got ${shownCell(cell)}`);
+    })
+    .join('\n');
+}
+
+export const schemeParameters = {
+  scheme: scheme(),
+  coefficients: column({
+    help: 'one rate coefficient a step, two for a step with <->, forward first',
+    unit: 'concentration^(1−n) per time',
+  }),
+  initial: column({ help: 'concentration of each species at time 0, in order of first appearance' }),
+  times: column({ help: 'times since the start, 0 or later' }),
+};
+
+/** A list in which every place must be filled. @param owner whose number stands at a place */
+export function filled(list: Column, name: string, owner: (place: number) => string): number[] {
+  return list.numbers.map((value, place) => {
+    if (value !== null) return value;
+    throw new InvalidInput(
+      `${name} must have no gaps: ${placeInWords(place, list)}, for ${owner(place)}, holds no number`,
+    );
+  });
+}
+
+export const schemeMethod =
+  "A step's rate is v = k ∏ c^(coefficient) over its left side as written, and each species changes by its net number times v. The equations are integrated by a Rosenbrock method of order 5 with analytic derivatives, which stiff mechanisms do not slow down; initial belongs to time 0.";
