@@ -1,7 +1,6 @@
 /** Average rate between two times, with what the scatter of the readings makes of it. */
 import { InvalidInput, NotDetermined, requireFinite, shown } from '../errors';
-import type { Estimate } from '../estimate';
-import { studentQuantile } from '../numerics/studentT';
+import { withStudentLimits, type Estimate } from '../estimate';
 import {
   averageReplicates,
   requireDistinctTimes,
@@ -49,15 +48,10 @@ export function averageRate(
     spread += weights[i] ** 2 / run.counts[i];
   }
   const perTime = 1 / (nu * (to - from));
-  return withScatter(difference * perTime, Math.sqrt(spread) * Math.abs(perTime), readingScatter(run));
-}
-
-function withScatter(value: number, sensitivity: number, { deviation, degreesOfFreedom }: Scatter): Estimate {
-  if (degreesOfFreedom === 0)
-    return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
-  const standardUncertainty = deviation * sensitivity;
-  const reach = studentQuantile(0.975, degreesOfFreedom) * standardUncertainty;
-  return { value, standardUncertainty, lower: value - reach, upper: value + reach, degreesOfFreedom };
+  const { deviation, degreesOfFreedom } = readingScatter(run);
+  const standardUncertainty =
+    degreesOfFreedom === 0 ? null : deviation * Math.sqrt(spread) * Math.abs(perTime);
+  return withStudentLimits(difference * perTime, standardUncertainty, degreesOfFreedom);
 }
 
 /** Adds ± the weights by which the readings make up y(time). */

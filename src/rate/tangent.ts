@@ -1,7 +1,6 @@
 /** Rate at one time or along a whole run: the slope of a local polynomial. */
 import { InvalidInput, NotDetermined, requireFinite, shown } from '../errors';
-import type { Estimate } from '../estimate';
-import { studentQuantile } from '../numerics/studentT';
+import { withStudentLimits, type Estimate } from '../estimate';
 import { requireDistinctTimes, stoichiometricNumberFor, type Series } from '../series/series';
 import {
   emptyLocalFit,
@@ -50,15 +49,14 @@ function settle(series: Series, { points, degree = 2, stoichiometricNumber }: Ta
 }
 
 /** A polynomial in its window, as a rate of reaction: r = (1/ν) dy/dt with Student's limits. */
-function asRate(fit: LocalFit, stoichiometricNumber: number): Estimate {
-  const value = fit.slope / stoichiometricNumber;
+export function slopeAsRate(fit: LocalFit, stoichiometricNumber: number): Estimate {
   const { degreesOfFreedom } = fit;
-  if (degreesOfFreedom === 0)
-    return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
   const variance = (fit.residualSumOfSquares / degreesOfFreedom) * fit.slopeVariance;
-  const standardUncertainty = Math.sqrt(variance) / Math.abs(stoichiometricNumber);
-  const reach = studentQuantile(0.975, degreesOfFreedom) * standardUncertainty;
-  return { value, standardUncertainty, lower: value - reach, upper: value + reach, degreesOfFreedom };
+  return withStudentLimits(
+    fit.slope / stoichiometricNumber,
+    degreesOfFreedom === 0 ? null : Math.sqrt(variance) / Math.abs(stoichiometricNumber),
+    degreesOfFreedom,
+  );
 }
 
 /**
@@ -81,7 +79,7 @@ export function tangentRate(series: Series, time: number, options: TangentOption
   const { times, values } = series;
   requireWithinRun(times, time);
   const first = nearestWindow(times, points, time);
-  return asRate(
+  return slopeAsRate(
     fitLocalPolynomial(times, values, first, points, degree, time, emptyLocalFit()),
     stoichiometricNumber,
   );
@@ -101,7 +99,7 @@ export function ratesAlong(series: Series, options: TangentOptions = {}): Estima
   const rates: Estimate[] = new Array(times.length);
   for (let i = 0, first = 0; i < times.length; i++) {
     first = nearestWindow(times, points, times[i], first);
-    rates[i] = asRate(
+    rates[i] = slopeAsRate(
       fitLocalPolynomial(times, values, first, points, degree, times[i], fit),
       stoichiometricNumber,
     );

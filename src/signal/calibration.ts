@@ -1,6 +1,6 @@
 /** A straight calibration line, and what it says of an unknown. */
 import { InvalidInput, NotDetermined, requireFinite, shown } from '../errors';
-import type { Estimate } from '../estimate';
+import { withStudentLimits, type Estimate } from '../estimate';
 import { studentQuantile } from '../numerics/studentT';
 
 export interface Standards {
@@ -124,14 +124,11 @@ export function concentrationFromLine(line: CalibrationLine, reading: number, re
   requireWithinStandards(line, reading);
   const { slope, intercept, deviation, degreesOfFreedom, centre, spread, weight, throughOrigin } = line;
   const value = (reading - intercept) / slope;
-  if (deviation === null) {
-    return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
-  }
+  if (deviation === null) return withStudentLimits(value, null, degreesOfFreedom);
   const ownVariance = uncertaintyAt(line.standards, reading) ** 2 / replicates;
   const lineVariance = (throughOrigin ? 0 : 1 / weight) + (value - centre) ** 2 / spread;
   const standardUncertainty = (deviation / Math.abs(slope)) * Math.sqrt(ownVariance + lineVariance);
-  const reach = studentQuantile(0.975, degreesOfFreedom) * standardUncertainty;
-  return { value, standardUncertainty, lower: value - reach, upper: value + reach, degreesOfFreedom };
+  return withStudentLimits(value, standardUncertainty, degreesOfFreedom);
 }
 
 function requireWithinStandards({ standards, throughOrigin }: CalibrationLine, reading: number): void {

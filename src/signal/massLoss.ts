@@ -1,6 +1,5 @@
 import { InvalidInput, NotDetermined, requireFinite, requirePositive, shown } from '../errors';
-import type { Estimate } from '../estimate';
-import { studentQuantile } from '../numerics/studentT';
+import { withStudentLimits, type Estimate } from '../estimate';
 import { molarMass } from './molarMass';
 import { saturationPressure } from './water';
 
@@ -85,14 +84,6 @@ export function amountLostEstimate(
   perMole: number,
   readability: number,
 ): Estimate {
-  const value = amountLost(mass, start, perMole);
   const standardUncertainty = differenceUncertainty(readability) / perMole;
-  const reach = studentQuantile(0.975, Infinity) * standardUncertainty;
-  return {
-    value,
-    standardUncertainty,
-    lower: value - reach,
-    upper: value + reach,
-    degreesOfFreedom: Infinity,
-  };
+  return withStudentLimits(amountLost(mass, start, perMole), standardUncertainty, Infinity);
 }
