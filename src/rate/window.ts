@@ -11,10 +11,10 @@ import type { Series } from '../series/series';
  * estimates the squared bias and σ²v the scatter (the reasoning of C. L. Mallows, Technometrics 15 (1973)
  * 661, applied to the slope). σ² is the scatter about the polynomials of degree d + 1 in small windows.
  *
- * Small windows tell their bias so badly that one of them would often win by luck. But bias only grows
- * with the window: what a large window tells of it bounds that of all smaller ones, and none is below 0.
- * That holds as long as degree d + 1 can follow the run; the trial ends at windows whose polynomials miss
- * the readings by twice their scatter or more, in squares.
+ * Small windows tell their bias so badly that their estimate is often far below 0, and one of them would
+ * win by luck; a square is 0 or more, so there the scatter alone counts. A large window can look unbiased
+ * because degree d + 1 misses the same bend: the trial ends at windows whose polynomials of that degree
+ * miss the readings by twice their scatter or more, in squares.
  *
  * @param degree of the tangent
  * @returns a count from degree + 3 (or all readings, if fewer) up to all readings
@@ -30,36 +30,23 @@ export function defaultWindow({ times, values }: Series, degree: number): number
     Math.min(all, Math.max(smallest, 2 * degree + 3)),
     degree + 1,
   );
-  const trials: Trial[] = [];
+  let best = { count: smallest, error: Infinity };
   for (let count = smallest; ; count = nextCount(count, all)) {
-    const trial = tried(times, values, count, degree, variance);
-    if (trials.length > 0 && trial.misfit > 2 * variance) break;
-    trials.push(trial);
-    if (count === all) break;
+    const { squaredBias, scatter, misfit } = tried(times, values, count, degree, variance);
+    if (count > smallest && misfit > 2 * variance) return best.count;
+    const error = Math.max(0, squaredBias) + scatter;
+    if (error < best.error) best = { count, error };
+    if (count === all) return best.count;
   }
-  return bestOf(trials);
 }
 
 interface Trial {
-  readonly count: number;
   /** Of the slopes, mean over the run; may come out below 0. */
   readonly squaredBias: number;
   /** Of the slopes, mean over the run. */
   readonly scatter: number;
   /** Mean square by which polynomials of one degree more miss the readings. */
   readonly misfit: number;
-}
-
-/** The count of least error, from the largest down; the smaller wins a tie. */
-function bestOf(trials: readonly Trial[]): number {
-  let best = { count: 0, error: Infinity };
-  let bound = Infinity;
-  for (const { count, squaredBias, scatter } of [...trials].reverse()) {
-    bound = Math.min(bound, squaredBias);
-    const error = Math.max(0, bound) + scatter;
-    if (error <= best.error) best = { count, error };
-  }
-  return best.count;
 }
 
 /** Counts grow by about a quarter each. */
@@ -88,7 +75,6 @@ function tried(
   }
   const all = times.length;
   return {
-    count,
     squaredBias: squaredBias / all,
     scatter: scatter / all,
     misfit: squares / (all * high.degreesOfFreedom),

@@ -26,6 +26,11 @@ test('findRoot keeps to its tolerance and takes few steps on a smooth function',
   const root = findRoot((x) => (calls++, Math.cos(x) - x), 0, 1, 1e-6);
   expect(Math.abs(root - 0.7390851332151607)).toBeLessThan(1e-6); // OEIS A003957
   expect(calls).toBeLessThan(10);
+  // a jump leaves nothing but halving, which comes to rest as soon as it may
+  for (const tolerance of [1e-3, 1e-6, 1e-9]) {
+    const jump = findRoot((x) => (x < 0.3 ? -1 : 1), 0, 1, tolerance);
+    expect(Math.abs(jump - 0.3)).toBeLessThan(tolerance);
+  }
 });
 
 test('findRoot gives back an end that is a root, and refuses ends of one sign', () => {

@@ -3,7 +3,8 @@
  * that a claim that was right stays right.
  */
 import { compareOrders, simpleOrders } from '../../../src/order/orders';
-import { halfLivesFollowed, patternInWords } from '../../../src/order/verdict';
+import { fitRateLaw } from '../../../src/order/fit';
+import { halfLivesFollowed, patternInWords, verdicts } from '../../../src/order/verdict';
 import { pairReadings } from '../../../src/series/series';
 import { simulatedRun, type Simulation } from '../../support/simulatedRun';
 
@@ -87,6 +88,68 @@ test('halfLivesFollowed counts halvings of what was there, to the last reading',
   const { times, values } = simulatedRun({ order: 2, halfLives: 3, readings: 10, noise: 0, seed: 1 });
   const { rows } = compareOrders(pairReadings(times, values), {});
   expect(halfLivesFollowed(rows[4].fit!)).toBeCloseTo(3, 9);
+});
+
+describe('verdicts: an order is named only where weight, interval and conversion agree', () => {
+  const { times, values } = simulatedRun({ order: 1, halfLives: 4, readings: 12, noise: 0.001, seed: 1 });
+  const fits = [1, 2].map((order) => fitRateLaw(pairReadings(times, values), { order }));
+  const interval = (lower: number | null, upper: number | null) => ({
+    value: 1.1,
+    standardUncertainty: 0.1,
+    lower,
+    upper,
+    degreesOfFreedom: 9,
+  });
+  const say = (weights: (number | null)[], freeOrder: ReturnType<typeof interval> | null): string[] =>
+    verdicts({ orders: [1, 2], fits, weights, freeOrder }).simple;
+
+  test.each<[string, (number | null)[], ReturnType<typeof interval> | null, string, string]>([
+    ['all agree', [0.99, 0.01], interval(0.8, 1.3), 'fits best', 'fits less well'],
+    [
+      'two have weight',
+      [0.8, 0.2],
+      interval(0.8, 1.3),
+      'cannot be told from order 2',
+      'cannot be told from order 1',
+    ],
+    [
+      'the interval holds both',
+      [0.99, 0.01],
+      interval(0.4, 2.3),
+      'cannot be told from order 2',
+      'fits less well, but lies within what a free order allows',
+    ],
+    [
+      'the interval is open above',
+      [0.99, 0.01],
+      interval(0.4, null),
+      'cannot be told from order 2',
+      'fits less well, but lies within what a free order allows',
+    ],
+    [
+      'the interval holds neither',
+      [0.99, 0.01],
+      interval(1.05, 1.15),
+      'best of these, but a free order of 1.1 fits better',
+      'fits less well',
+    ],
+    [
+      'no free order',
+      [0.99, 0.01],
+      null,
+      'best of these, but not established: a free order cannot be told',
+      'fits less well',
+    ],
+    [
+      'no weights',
+      [null, null],
+      null,
+      'too few readings to weigh the orders',
+      'too few readings to weigh the orders',
+    ],
+  ])('%s', (_, weights, freeOrder, first, second) =>
+    expect(say(weights, freeOrder)).toEqual([first, second]),
+  );
 });
 
 test('patternInWords warns of residuals in a pattern at p below 0.05, and else is silent', () => {
