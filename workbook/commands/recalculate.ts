@@ -8,7 +8,7 @@ import { readWorkbook } from '../xlsx/read';
 export interface Recalculated {
   readonly bytes: Uint8Array;
   readonly formulas: number;
-  /** Formulas that ended in an error, in reading order. */
+  /** Cells that show an error as a result, in reading order. */
   readonly errors: readonly { readonly cell: string; readonly error: CellError }[];
 }
 

@@ -57,7 +57,7 @@ export interface CalculatedBook {
   formula(sheet: string, row: number, column: number): Calculated | undefined;
   /** What any cell shows: its own value, or what spilled into it. */
   shown(sheet: string, row: number, column: number): CellValue;
-  /** Cells whose formula ended in an error, in reading order, with our words where we have them. */
+  /** Cells that show an error as a result, spilled ones too, in reading order, with our words where we have them. */
   readonly errors: readonly {
     readonly sheet: string;
     readonly row: number;

@@ -1,6 +1,7 @@
 /** A formula as a person types it ↔ as a file stores it. Neither has a leading `=`. */
 import { anchorArray, withHash } from '../engine/anchorText';
 import { filedNameOf, filedPrefix, typedNameOf } from '../engine/names';
+import { localPrefix, withLocalPrefixes } from './localNames';
 import { filedModernName } from './modernFunctions';
 
 /** Text in double quotes, names in single quotes and `[…]` columns stay as they are; calls and `F2#` are of interest. */
@@ -14,10 +15,10 @@ export function typedFormula(filed: string): string {
   const withoutLink = filed.replace(new RegExp(String.raw`\[\d+\]!(?=${filedPrefix})`, 'gi'), '');
   const typed = withoutLink.replace(parts, (part) => {
     const [, name, bracket] = call.exec(part) ?? [];
-    if (name === undefined) return part.replace(/^_xlpm\./i, '');
+    if (name === undefined) return part.startsWith(localPrefix) ? part.slice(localPrefix.length) : part;
     return `${typedNameOf(name) ?? name.replace(/^_xl(?:fn|ws|pm|udf)\.(?:_xlws\.)?/i, '')}${bracket}`;
   });
-  return withHash(typed);
+  return withAt(withHash(typed));
 }
 
 /** Our own calls alone: what a file needs so that Excel knows them. `PACE.EVENT(B2)` → `_xldudf_PACE_EVENT(B2)`. */
@@ -30,7 +31,7 @@ export const withFiledNames = (formula: string): string =>
 
 /** The whole way: our calls, the prefixes of functions younger than the file format, and `F2#`. */
 export const filedFormula = (typed: string): string =>
-  typed.replace(parts, (part) => {
+  withLocalPrefixes(typed).replace(parts, (part) => {
     if (part.endsWith('#') && part.length > 1) return `_xlfn.${anchorArray}(${part.slice(0, -1)})`;
     const [, name, bracket] = call.exec(part) ?? [];
     if (name === undefined) return part;
@@ -43,3 +44,10 @@ export const callsOurs = (formula: string): boolean =>
     const name = call.exec(part)?.[1];
     return name !== undefined && (filedNameOf(name) ?? typedNameOf(name)) !== undefined;
   });
+
+/** Words in quotes, or the cells whose one in this row or column is meant. */
+const single = /"(?:[^"]|"")*"|\bSINGLE\(((?:'(?:[^']|'')+'|[^'()",])+)\)/gi;
+
+/** `SINGLE(A2:A9)` → `@A2:A9`. */
+const withAt = (formula: string): string =>
+  formula.replace(single, (all, cells?: string) => (cells === undefined ? all : `@${cells}`));

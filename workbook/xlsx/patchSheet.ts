@@ -39,6 +39,8 @@ class SheetPatch {
   private readonly formulas: FormulaCell[];
   /** Shared formulas one of whose cells now spills: each of their cells gets a formula of its own. */
   private readonly unshared: ReadonlySet<string>;
+  /** Rows where a cell tells its column only by following another. */
+  private readonly counting: ReadonlySet<number>;
   private readonly edits: Edit[] = [];
   private readonly added: NewCell[] = [];
   private newArrays = false;
@@ -50,6 +52,7 @@ class SheetPatch {
   ) {
     for (const row of scanned.rows)
       for (const cell of row.cells) this.cells.set(key(cell.row, cell.column), cell);
+    this.counting = new Set(scanned.rows.filter((row) => row.countsCells).map(({ row }) => row));
     this.formulas = [...this.cells.values()].flatMap((cell) => {
       const formula = childOf(cell, 'f');
       return formula && sheet.formula(cell.row, cell.column) ? [{ ...cell, formula }] : [];
@@ -157,8 +160,8 @@ class SheetPatch {
     const cell = this.cells.get(place);
     if (!cell) return;
     const { vm: _valueMark, cm: _cellMark, ...attributes } = cell.attributes;
-    const counted = this.scanned.rows.find(({ row }) => row === cell.row)?.countsCells;
-    const bare = Object.keys(attributes).every((name) => name === 'r' || name === 't') && !counted;
+    const bare =
+      Object.keys(attributes).every((name) => name === 'r' || name === 't') && !this.counting.has(cell.row);
     this.replace(
       cell,
       bare ? '' : cellXml({ prefix: this.scanned.prefix, ...cell, attributes, value: null }),

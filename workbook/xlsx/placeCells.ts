@@ -40,12 +40,24 @@ function intoRow(xml: string, row: ScannedRow, added: readonly NewCell[], prefix
 }
 
 function newRow({ prefix, rows, data }: ScannedSheet, number: number, added: readonly NewCell[]): Edit {
-  const next = rows.find(({ row }) => row > number);
+  const next = rows[firstAfter(rows, number)];
   const cells = added.map((cell) => cell.xml).join('');
   return insertion(
     next?.start ?? data!.contentEnd,
     `<${prefix}row r="${number + 1}">${cells}</${prefix}row>`,
   );
+}
+
+/** Rows stand in order; a long spill asks for as many places as it has rows. */
+function firstAfter(rows: readonly ScannedRow[], number: number): number {
+  let low = 0;
+  let high = rows.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (rows[middle].row > number) high = middle;
+    else low = middle + 1;
+  }
+  return low;
 }
 
 /** `<sheetData/>` had room for nothing. */
@@ -59,11 +71,15 @@ function openedUp(xml: string, { start, end }: Holder, rows: readonly Edit[]): E
 function dimension(sheet: ScannedSheet, cells: readonly NewCell[]): Edit[] {
   const area = sheet.dimension && parseArea(sheet.dimension.ref);
   if (!sheet.dimension || !area) return [];
-  const row = Math.min(area.row, ...cells.map((cell) => cell.row));
-  const column = Math.min(area.column, ...cells.map((cell) => cell.column));
-  const lastRow = Math.max(area.row + area.rows - 1, ...cells.map((cell) => cell.row));
-  const lastColumn = Math.max(area.column + area.columns - 1, ...cells.map((cell) => cell.column));
-  const ref = areaName({ row, column, rows: lastRow - row + 1, columns: lastColumn - column + 1 });
+  const rows = cells.map((cell) => cell.row).concat(area.row, area.row + area.rows - 1);
+  const columns = cells.map((cell) => cell.column).concat(area.column, area.column + area.columns - 1);
+  const row = least(rows);
+  const column = least(columns);
+  const ref = areaName({ row, column, rows: most(rows) - row + 1, columns: most(columns) - column + 1 });
   if (ref === sheet.dimension.ref) return [];
   return [{ ...sheet.dimension, text: `<${sheet.prefix}dimension ref="${ref}"/>` }];
 }
+
+/** Spread into Math.min, a long spill would overflow the stack. */
+const least = (numbers: readonly number[]): number => numbers.reduce((a, b) => Math.min(a, b));
+const most = (numbers: readonly number[]): number => numbers.reduce((a, b) => Math.max(a, b));

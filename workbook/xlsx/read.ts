@@ -1,6 +1,6 @@
 /** A file's bytes → the workbook: what was typed into its cells. Values of formulas are what the file last showed. */
 import { read, type CellObject, type WorkBook, type WorkSheet } from '@e965/xlsx';
-import { cellName } from '../../functions/address';
+import { cellName, columnIndex } from '../../functions/address';
 import { CellError, type CellValue, type ErrorCode } from '../../functions/cell';
 import type { BookModel, CellModel, DefinedName, SheetModel } from '../engine/engine';
 import { typedFormula } from './formulaText';
@@ -69,8 +69,10 @@ function sheetModel(
   scanned: readonly ScannedCell[],
   looks: readonly CellLook[],
 ): SheetModel {
+  // one entry can stand for all columns to the end of the sheet: those in use, or in sight, are enough
+  const lastColumn = scanned.reduce((last, { column }) => Math.max(last, column), columnIndex('Z'));
   const widths = (sheet['!cols'] ?? []).flatMap((column, place) =>
-    column?.width === undefined ? [] : [[place, column.width] as const],
+    column?.width === undefined || place > lastColumn ? [] : [[place, column.width] as const],
   );
   return {
     name,

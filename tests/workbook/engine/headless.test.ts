@@ -135,6 +135,14 @@ describe('words for errors', () => {
     ]);
   });
 
+  test('a cell that an error spilled into is listed too, a typed one is not', async () => {
+    const run = await sheet({ A1: 40, A2: '=1/0', A3: new CellError('#N/A'), B1: '=PACE.EVENT(A1:A2)' });
+    expect(run.calculated.errors.map(({ row, column: c, error }) => [row, c, error.code])).toEqual([
+      [1, 0, '#DIV/0!'],
+      [1, 1, '#DIV/0!'],
+    ]);
+  });
+
   test('a formula that feeds on itself says so, and so does one behind it; others go on', async () => {
     const run = await sheet({ A1: '=B1+1', B1: '=A1+1', C1: '=B1*2', D1: '=D1', E1: '=1+1' });
     expect(run.words('A1')).toBe('#REF! the formula depends on its own result');

@@ -9,6 +9,8 @@ import { errorCode, isErrorText } from './values';
 import { messageAt } from './words';
 
 interface SheetOutcome {
+  /** Where a formula stands, or has spilled to. */
+  readonly results: ReadonlyMap<string, { readonly row: number; readonly column: number }>;
   readonly formulas: ReadonlyMap<string, Calculated>;
   /** Typed values, results and what results spilled. */
   readonly shown: ReadonlyMap<string, CellValue>;
@@ -35,6 +37,7 @@ function sheetOutcome(sheet: SheetModel, id: string, { result, circular }: Settl
   const ranges = result.arrayFormulaRange[unitId]?.[id];
   const formulas = new Map<string, Calculated>();
   const shown = new Map<string, CellValue>();
+  const places = new Map<string, { row: number; column: number }>();
 
   for (const { row, column, value, formula } of sheet.cells) {
     if (formula === undefined) shown.set(key(row, column), value);
@@ -55,11 +58,12 @@ function sheetOutcome(sheet: SheetModel, id: string, { result, circular }: Settl
     for (let r = row; r < row + spill.rows; r++) {
       for (let c = column; c < column + spill.columns; c++) {
         const own = r === row && c === column;
+        places.set(key(r, c), { row: r, column: c });
         shown.set(key(r, c), own ? first : cellValue(spilled?.getValue(r, c), id, r, c));
       }
     }
   }
-  return { formulas, shown };
+  return { results: places, formulas, shown };
 }
 
 const hasFormula = (cell: CellModel): boolean => cell.formula !== undefined;
@@ -76,15 +80,10 @@ function cellValue(cell: Nullable<ICellData>, id: string, row: number, column: n
 const errorShown = (text: string, id: string, row: number, column: number): CellError =>
   new CellError(errorCode(text), messageAt(unitId, id, row, column, text) ?? '');
 
-function errorsIn(sheet: SheetModel, { formulas }: SheetOutcome): CalculatedError[] {
-  return sheet.cells
-    .filter(hasFormula)
-    .map(({ row, column }) => ({
-      sheet: sheet.name,
-      row,
-      column,
-      error: formulas.get(key(row, column))?.value,
-    }))
+/** Errors that were typed are no results, and stand in nobody's list. */
+function errorsIn(sheet: SheetModel, { results, shown }: SheetOutcome): CalculatedError[] {
+  return [...results]
+    .map(([place, { row, column }]) => ({ sheet: sheet.name, row, column, error: shown.get(place) }))
     .filter((entry): entry is CalculatedError => entry.error instanceof CellError)
     .sort((a, b) => a.row - b.row || a.column - b.column);
 }

@@ -26,9 +26,9 @@ function rowsInUse(reference: BaseReferenceObject): number {
   const spills = [reference.getArrayFormulaRange(), reference.getRuntimeArrayFormulaRange()].flatMap(
     (ranges) => Object.values(ranges?.[unit]?.[sheet] ?? {}).flatMap((row) => Object.values(row ?? {})),
   );
-  return Math.max(
+  return spills.reduce<number>(
+    (rows, range) => Math.max(rows, ((range as IRange | null)?.endRow ?? 0) + 1),
     cells ? lengthOf(cells) : 0,
-    ...spills.map((range) => ((range as IRange | null)?.endRow ?? 0) + 1),
   );
 }
 
