@@ -47,7 +47,7 @@ function rising(series: Series): Finding | null {
   const { values } = series;
   const seen = `the readings rose from ${shown(values[0])} to ${shown(values[values.length - 1])}`;
   const advice = 'give the endpoint if it is known';
-  if (!free) return tooShort(0, `${seen} and show no sign of an end`, advice);
+  if (!free) return endless(`${seen} and show no sign of an end`, advice);
   const followed = halfLivesFollowed(free);
   if (followed >= halfLivesNeeded) return null;
   const share = 1 - free.shareLeft;
@@ -85,3 +85,12 @@ function tooShort(share: number, finding: string, end: string): Finding {
     advice: `${isInitial ? 'use it for an initial rate' : 'follow the run for three half lives or more before an order is quoted'}; ${end}`,
   };
 }
+
+const endless = (finding: string, advice: string): Finding => ({
+  kind: 'conversion',
+  places: [],
+  finding,
+  meaning:
+    'rates are sound, but how far the reaction has come cannot be told, and so neither an order nor a half life',
+  advice: `follow the run until it slows down; ${advice}`,
+});

@@ -1,7 +1,7 @@
 /** How a run ends: on a level, on a slow drift, or still on its way. */
 import { studentQuantile } from '../../numerics/studentT';
 import type { Course } from './course';
-import { roundingScatter } from './scatter';
+import { lastFigure, roundingScatter } from './scatter';
 import { lineThrough, possibleStarts, type Line } from './straight';
 
 export interface Ending {
@@ -21,12 +21,14 @@ const straightness = 1.7;
 
 /**
  * Rule for a plateau: four or more last readings through which a straight line runs level, within its 95 %
- * limits or by less than 0.5 % of the whole change, and whose slope, even at that limit, is below 5 % of the mean rate until there.
+ * limits or but for 0.5 % of the whole change, and whose slope, even at that limit, is below 5 % of the
+ * mean rate until there. A more lenient share would take the long tail of order 2 for an end.
  *
  * Rule for a drift: six or more last readings on a straight line that is clearly not level (99.9 %) yet
- * below 10 % of the mean rate until there. One that goes on in the direction of the run must keep its
- * slope: a reaction that still runs out slows down, at any order (order 3 by a factor of 2.7 where drift is
- * sought), so the slope of the later half, at its lower limit, must exceed half that of the earlier one at its upper.
+ * below 10 % of the mean rate until there. One that goes on in the direction of the run must last twice as
+ * long as the run did before and keep its slope, the later half, at its lower limit, half that of the
+ * earlier one, at its upper. A reaction that still runs slows down more: between once and three times a
+ * moment, one of order 3 to 0.44, and one of lower order further (from its integrated law).
  *
  * The earliest beginning that keeps the rule counts. Common practice, in numbers of our own choosing.
  */
@@ -59,10 +61,10 @@ function firstLine(
 /** So many readings tell their own scatter; fewer lie on a line by chance. */
 const readingsForOwnScatter = 6;
 
-/** How far the slope may be off, at a probability. Readings that are all equal leave nothing open. */
+/** How far the slope may be off, at a probability. Readings that are all equal leave their last figure open. */
 function reach({ scatter, series }: Course, line: Line, probability: number): number {
   const own = line.scatter ?? 0;
-  if (line.slope === 0 && own === 0) return 0;
+  if (line.slope === 0 && own === 0) return lastFigure(series.values) * line.slopeDeviation;
   const floor = line.count < readingsForOwnScatter ? scatter : roundingScatter(series.values);
   const deviation = Math.max(floor, own);
   return studentQuantile(probability, Math.max(1, line.count - 2)) * deviation * line.slopeDeviation;
@@ -90,9 +92,6 @@ function isDrift(course: Course, line: Line): boolean {
   return isLongAfter(course, line) && Math.sign(later.slope) === course.direction && low > 0.5 * high;
 }
 
-/** Over twice the time that the first half of the change took, a reaction that still runs slows down visibly. */
-function isLongAfter({ series: { times, values } }: Course, line: Line): boolean {
-  const half = (values[0] + line.level) / 2;
-  const crossing = values.findIndex((value) => (value - half) * (values[0] - half) <= 0);
-  return times[times.length - 1] - times[line.first] >= 2 * (times[Math.max(1, crossing)] - times[0]);
-}
+/** By three times the time of its beginning a reaction of any order has slowed down visibly. */
+const isLongAfter = ({ series: { times } }: Course, { first }: Line): boolean =>
+  times[times.length - 1] - times[first] >= 2 * (times[first] - times[0]);

@@ -2,6 +2,7 @@ import { shown } from '../../errors';
 import type { Course } from './course';
 import type { Ending } from './ending';
 import type { Finding } from './finding';
+import { lineThrough } from './straight';
 import { percent, roughly } from './words';
 
 const placesOf = ({ series }: Course, { line }: Ending): number[] =>
@@ -33,13 +34,15 @@ export function drift(course: Course, ending: Ending): Finding {
   const { line } = ending;
   const { times, values } = series;
   const last = times.length - 1;
-  const crept = line.slope * (times[last] - times[line.first]);
+  // of the later half: the earlier one can hold the last of the reaction
+  const { slope } = lineThrough(series, line.first + (line.count >> 1), times.length);
+  const crept = slope * (times[last] - times[line.first]);
   const share = Math.abs(crept / (line.level - values[0]));
-  const isBack = Math.sign(line.slope) !== direction;
+  const isBack = Math.sign(slope) !== direction;
   return {
     kind: 'drift',
     places: placesOf(course, ending),
-    finding: `from time ${shown(times[line.first])} on the readings ${isBack ? 'creep back' : 'creep on'} in a straight line, by ${roughly(line.slope)} per unit of time (${percent(share)} of the whole change by the end)`,
+    finding: `from time ${shown(times[line.first])} on the readings ${isBack ? 'creep back' : 'creep on'} in a straight line, by ${roughly(slope)} per unit of time (in all ${percent(share)} of the whole change)`,
     meaning: `the reaction is over there, and something else changes the reading (evaporation, temperature, a leak, a lamp, a slow side reaction): the end is blurred, and a rate taken late is that of the drift`,
     advice:
       'find the cause; end the run where the drift begins, or take the drift off all readings if it ran from the start',

@@ -9,6 +9,7 @@ export const kindsBySeverity = [
   'zero',
   'step',
   'outlier',
+  'time slip',
   'censored',
   'too few',
   'level',

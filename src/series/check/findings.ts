@@ -40,13 +40,7 @@ export function findings(run: RawRun): readonly Finding[] {
   const nothing = noPairs(run);
   if (nothing) return cells.length > 0 ? cells : [nothing];
   const series = pairReadings(unrolled(numbersIn(run.times)), numbersIn(run.values));
-  return present([
-    ...cells,
-    numbersReadFromText(run),
-    midnight(run),
-    replicates(series),
-    ...ofReadings(run, series, cells),
-  ]);
+  return present([...cells, numbersReadFromText(run), midnight(run), ...ofReadings(run, series, cells)]);
 }
 
 const present = (found: readonly Found[]): Finding[] =>
@@ -65,6 +59,7 @@ function ofReadings(run: RawRun, series: Series, cells: readonly Finding[]): Fou
     // a reading whose time is out of order is no outlier: the slip is in the time
     outlierFinding(outliers.filter(({ place }) => !misplaced.has(place))),
     unsorted(run, odd),
+    replicates(leaving(series, new Set([...odd].filter((place) => misplaced.has(place))))),
     tooFew(series),
     ...ofCourse(courseOf(leaving(nonZero, odd)), known),
   ];
@@ -85,10 +80,13 @@ function ofCourse(course: Course, known: ReadonlySet<number>): Found[] {
   const ending = endingOf(course);
   const turned = ending ? null : turn(course);
   if (turned) return [turned, gap, resolution(course, undefined)];
+  const late = induction(course);
+  // a rising run with an induction period follows no law that could tell its end
+  const followed = late && course.direction > 0 ? null : conversion(course);
   return [
     gap,
-    induction(course),
-    ending ? (ending.kind === 'drift' ? drift : plateau)(course, ending) : conversion(course),
+    late,
+    ending ? (ending.kind === 'drift' ? drift : plateau)(course, ending) : followed,
     resolution(course, ending?.line.first),
   ];
 }

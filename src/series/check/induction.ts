@@ -33,7 +33,7 @@ export function induction(course: Course): Finding | null {
   return {
     kind: 'induction',
     places: [...series.places.subarray(0, fastest.index)].sort((a, b) => a - b),
-    finding: `the rate rises at first: at the start it is ${percent(Math.max(0, start.rate / fastest.rate))} of what it is at time ${at}${rises ? ', and it rises to the end' : ''}`,
+    finding: `the rate rises at first: at the start it is ${shareInWords(start.rate / fastest.rate)} of that at time ${at}${rises ? ', and it rises to the end' : ''}`,
     meaning:
       'an induction period (warming up, mixing, a catalyst or radical that has to form, a gas that has to saturate the liquid) or a product that speeds the reaction up: an initial rate read at the first time is too low, and no simple order holds from there',
     advice: rises
@@ -59,3 +59,5 @@ function slopesAlong({ series, scatter, direction }: Course): Slope[] {
   }
   return slopes;
 }
+
+const shareInWords = (share: number): string => (share < 0.05 ? 'next to nothing' : percent(share));

@@ -1,14 +1,14 @@
 import { shown } from '../../errors';
 import type { Course } from './course';
 import type { Finding } from './finding';
-import { spread } from './scatter';
+import { limitFor, median, spread } from './scatter';
 import { lineThrough } from './straight';
 import { roughly } from './words';
 
 /**
  * A run in which nothing happens.
  *
- * Rule: all readings are equal; or, with enough of them, they have no trend ({@link hasTrend}) and scatter about a
+ * Rule: all readings are equal; or, with enough of them, they have no trend ({@link hasTrend}), none is far from all others, and they scatter about a
  * straight line no more than one and a half times as much as about the curve through their neighbours.
  */
 export function level({ series, scatter }: Course, isLong: boolean): Finding | null {
@@ -19,7 +19,7 @@ export function level({ series, scatter }: Course, isLong: boolean): Finding | n
   const isEqual = spread(values) === 0;
   if (!isEqual) {
     if (!isLong || line.scatter === null || line.scatter > 1.5 * scatter) return null;
-    if (hasTrend(values)) return null;
+    if (hasTrend(values) || hasFarReading(values)) return null;
   }
   return {
     kind: 'level',
@@ -46,4 +46,12 @@ function hasTrend(values: Float64Array): boolean {
   });
   const n = chosen.length;
   return Math.abs(rising) > 1.96 * Math.sqrt((n * (n - 1) * (2 * n + 5)) / 18);
+}
+
+/** One reading far from all others, such as the first of a reaction that was over at the second. */
+function hasFarReading(values: Float64Array): boolean {
+  const middle = median([...values]);
+  const distances = Array.from(values, (value) => Math.abs(value - middle));
+  const far = limitFor(values.length) * 1.4826 * median(distances);
+  return distances.some((distance) => distance > far);
 }

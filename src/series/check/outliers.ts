@@ -47,8 +47,11 @@ export function outliersIn(series: Series): Outlier[] {
     : [];
 }
 
-/** So many of the furthest are judged by the scatter of all others, which they may have swollen. */
+/** So many of the furthest are judged by the scatter of the rest, which they may have swollen. */
 const closerLooks = 3;
+
+/** The rest leaves out, too, what lies this far off. */
+const suspect = 3;
 
 /** Those beyond the limit that stand out more than every reading close by, which they may have spoilt. */
 function worstIn(series: Series): Map<number, Outlier> {
@@ -60,9 +63,11 @@ function worstIn(series: Series): Map<number, Outlier> {
       return outlier ? [{ i, outlier }] : [];
     })
     .sort((a, b) => b.outlier.deviations - a.outlier.deviations);
+  const suspects = seen.filter(({ outlier }) => outlier.deviations > suspect).map(({ i }) => i);
   const beyond = new Map<number, Outlier>();
   seen.forEach(({ i, outlier }, rank) => {
-    const closer = rank < closerLooks ? judged(series, i, scatterOf(without(series, new Set([i])))) : outlier;
+    const rest = rank < closerLooks ? scatterOf(without(series, new Set([...suspects, i]))) : common;
+    const closer = rest < common ? judged(series, i, rest) : outlier;
     if (closer && closer.deviations > limit) beyond.set(i, closer);
   });
   const reach = 4;
@@ -75,11 +80,16 @@ function worstIn(series: Series): Map<number, Outlier> {
   );
 }
 
-/** How far reading i is off, given the scatter of the run. */
+/** How far reading i is off, given the scatter of the run; `null` where that cannot be told. */
 function judged(series: Series, i: number, scatter: number): Outlier | null {
   const last = series.times.length - 1;
-  if ((i === 0 && isSteepEnd(series, 0, 1)) || (i === last && isSteepEnd(series, last, last - 1)))
-    return null;
+  const isSteep = (i === 0 && isSteepEnd(series, 0, 1)) || (i === last && isSteepEnd(series, last, last - 1));
+  return isSteep ? null : offCurve(series, i, scatter);
+}
+
+/** The same, whatever a steep first or last phase might explain. */
+export function offCurve(series: Series, i: number, scatter: number): Outlier | null {
+  const last = series.times.length - 1;
   const side = i === 0 ? 'after' : i === last ? 'before' : 'both';
   const expected = expectedReading(series, i, side);
   if (!expected) return null;

@@ -12,7 +12,7 @@ export function replicates({ times, values, places }: Series): Finding | null {
   return {
     kind: 'replicates',
     places: shared.map((i) => places[i]).sort((a, b) => a - b),
-    finding: `${counted(moments.length, 'time has', 'times have')} more than one reading: time ${listed(moments.map(shown))}${copies > 0 ? `; ${counted(copies, 'reading repeats', 'readings repeat')} the one before exactly` : ''}`,
+    finding: `${counted(moments.length, 'time has', 'times have')} more than one reading: ${moments.length === 1 ? 'time' : 'times'} ${listed(moments.map(shown))}${copies > 0 ? `; ${counted(copies, 'reading repeats', 'readings repeat')} the one before exactly` : ''}`,
     meaning:
       'every one of them counts in a fit, and between readings their average is used: true replicates make the result better',
     advice:

@@ -24,6 +24,16 @@ export function smallestStep(values: ArrayLike<number>): number {
   return step === Infinity ? 0 : step;
 }
 
+/** One unit of the last decimal that any reading is written with: 0.01 for 0.3, 0.25 and 1. */
+export function lastFigure(values: Iterable<number>): number {
+  let decimals = 0;
+  for (const value of values) {
+    const [figures, exponent = '0'] = String(value).split('e');
+    decimals = Math.max(decimals, (figures.split('.')[1]?.length ?? 0) - Number(exponent));
+  }
+  return 10 ** -decimals;
+}
+
 /** Largest less smallest reading. A loop: a long column does not fit into one call's arguments. */
 export function spread(values: ArrayLike<number>): number {
   let [low, high] = [Infinity, -Infinity];

@@ -40,7 +40,7 @@ export function unsorted(run: RawRun, misplaced: ReadonlySet<number>): Finding |
   );
   if (slips.length > 0) {
     return {
-      kind: 'unsorted',
+      kind: 'time slip',
       places: slips,
       finding: `${counted(slips.length, 'time is', 'times are')} out of order, and the reading does not fit there: time ${listed(
         slips.map((row) => shown(times[row]!)),

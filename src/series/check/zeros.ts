@@ -1,7 +1,8 @@
 import { shown } from '../../errors';
 import type { Series } from '../series';
 import type { Finding } from './finding';
-import { scatterOf, spread } from './scatter';
+import { offCurve } from './outliers';
+import { limitFor, readingsForScatter, scatterOf, spread } from './scatter';
 import { keeping } from './subset';
 import { counted, listed } from './words';
 
@@ -16,7 +17,8 @@ const dropFactor = 5;
  *
  * Rule: between two non-zero readings of the same sign, both clear of 0 by 5 standard deviations of scatter
  * and 5 % of the spread, no course of one direction passes 0; at the end of a run (or at the start of a
- * falling one) a zero is odd when reaching it takes 5 times the fastest change between other readings.
+ * falling one) a zero is odd when reaching it takes 5 times the fastest change between other readings,
+ * or when it is an outlier short of which the course would have stayed.
  * Common practice; a sheet hands a blank cell over as 0 in many ways.
  */
 export function oddZeros(series: Series): number[] {
@@ -49,11 +51,24 @@ function oddStart({ times, values }: Series, zeroAt: number): boolean {
   return Math.abs(values[0]) / (times[0] - zeroAt) > dropFactor * fastestChange(times, values);
 }
 
-function oddEnd({ times, values }: Series, zeroAt: number): boolean {
+/** A course that would have gone past 0 by then comes to rest there by right. */
+function oddEnd(others: Series, zeroAt: number): boolean {
+  const { times, values } = others;
   if (values.length < 3) return false;
   const last = values.length - 1;
-  return Math.abs(values[last]) / (zeroAt - times[last]) > dropFactor * fastestChange(times, values);
+  if (Math.abs(values[last]) / (zeroAt - times[last]) > dropFactor * fastestChange(times, values))
+    return true;
+  if (values.length < readingsForScatter) return false;
+  const off = offCurve(withZero(others, zeroAt), last + 1, scatterOf(others));
+  return off !== null && -off.distance * values[last] > 0 && off.deviations > limitFor(values.length);
 }
+
+const withZero = ({ times, values, places, distinctTimes }: Series, zeroAt: number): Series => ({
+  times: Float64Array.from([...times, zeroAt]),
+  values: Float64Array.from([...values, 0]),
+  places: Int32Array.from([...places, -1]),
+  distinctTimes: distinctTimes + 1,
+});
 
 function fastestChange(times: Float64Array, values: Float64Array): number {
   let fastest = 0;
