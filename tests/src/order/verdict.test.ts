@@ -152,6 +152,16 @@ describe('verdicts: an order is named only where weight, interval and conversion
   );
 });
 
+test('verdicts count the half lives by the most cautious of the fits that have weight', () => {
+  const followedFor = (halfLives: number) => {
+    const { times, values } = simulatedRun({ order: 1, halfLives, readings: 12, noise: 0, seed: 1 });
+    return fitRateLaw(pairReadings(times, values), { order: 1 });
+  };
+  const fits = [followedFor(4), followedFor(1.5), followedFor(0.5)];
+  const { simple } = verdicts({ orders: [0, 1, 2], fits, weights: [0.6, 0.39, 0.01], freeOrder: null });
+  expect(simple[0]).toBe('cannot be told from order 1: 1.5 half lives followed, follow 3 or more');
+});
+
 test('patternInWords warns of residuals in a pattern at p below 0.05, and else is silent', () => {
   expect(patternInWords(0.049)).toBe('; residuals run in a pattern');
   expect(patternInWords(0.05)).toBe('');
