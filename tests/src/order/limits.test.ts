@@ -24,9 +24,7 @@ function estimatesOf(series: Series, endpoint: number | 'free'): Estimate[] {
 }
 
 const settings = simpleOrders.flatMap((order) =>
-  ([0, 'free'] as const).flatMap((endpoint) =>
-    [0.5, 5].map((halfLives) => ({ order, endpoint, halfLives })),
-  ),
+  ([0, 'free'] as const).flatMap((endpoint) => [0.5, 5].map((halfLives) => ({ order, endpoint, halfLives }))),
 );
 
 test.each(settings)(
