@@ -1,11 +1,20 @@
 /** All cell functions, in the order of the work. */
 import type { CellFunction } from './define';
 import coefficient from './order/coefficient';
+import curve from './order/curve';
+import exponents from './order/exponents';
 import halfLife from './order/halfLife';
+import halvings from './order/halvings';
+import normalTime from './order/normalTime';
+import order from './order/order';
 import orders from './order/orders';
+import overlayOrder from './order/overlayOrder';
+import survey from './order/survey';
+import unit from './order/unit';
 import along from './rate/along';
 import between from './rate/between';
 import event from './rate/event';
+import start from './rate/start';
 import tangent from './rate/tangent';
 import course from './scheme/course';
 import check from './series/check';
@@ -16,13 +25,17 @@ import conductivity from './signal/conductivity';
 import conversion from './signal/conversion';
 import dissolved from './signal/dissolved';
 import gasPressure from './signal/gasPressure';
-import standards from './signal/standards';
-import titre from './signal/titre';
-import totalPressure from './signal/totalPressure';
-import unit from './order/unit';
 import gasVolume from './signal/gasVolume';
 import massLoss from './signal/massLoss';
 import remaining from './signal/remaining';
+import standards from './signal/standards';
+import titre from './signal/titre';
+import totalPressure from './signal/totalPressure';
+import arrhenius from './temperature/arrhenius';
+import coefficientAt from './temperature/coefficientAt';
+import eyring from './temperature/eyring';
+import meanTemp from './temperature/meanTemp';
+import timeTo from './temperature/timeTo';
 
 export const catalogue: readonly CellFunction[] = [
   clock,
@@ -41,11 +54,24 @@ export const catalogue: readonly CellFunction[] = [
   between,
   tangent,
   along,
+  start,
   event,
   orders,
+  order,
   coefficient,
-  halfLife,
   unit,
+  halfLife,
+  halvings,
+  curve,
+  exponents,
+  normalTime,
+  overlayOrder,
+  survey,
+  arrhenius,
+  eyring,
+  coefficientAt,
+  meanTemp,
+  timeTo,
   course,
   check,
 ];

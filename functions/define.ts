@@ -10,7 +10,7 @@ export type Values<P extends Parameters> = {
 };
 
 /** The parts of the job, in the order of the work. */
-export type Family = 'reading' | 'rate' | 'order' | 'mechanism' | 'care';
+export type Family = 'reading' | 'rate' | 'order' | 'temperature' | 'mechanism' | 'care';
 
 export interface Definition<P extends Parameters> {
   /** Without the namespace: `TANGENT`. Three letters or more, no dot, no underscore, and never changed. */

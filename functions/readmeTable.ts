@@ -5,6 +5,7 @@ const families: Readonly<Record<Family, string>> = {
   reading: 'From reading to amount',
   rate: 'Rate',
   order: 'Order, rate coefficient, half life',
+  temperature: 'Temperature and prediction',
   mechanism: 'Mechanism and planning',
   care: 'Care',
 };

@@ -4,10 +4,9 @@
  *
  * @see N. R. Draper and H. Smith, Applied Regression Analysis, 3rd ed. (1998), 1.4, 3.1 and 9.2
  */
-import type { Estimate } from '../estimate';
+import { withStudentLimits, type Estimate } from '../estimate';
 import { fitLinear } from '../numerics/linearFit';
 import { combinationVariance, type QrFactor } from '../numerics/qr';
-import { studentQuantile } from '../numerics/studentT';
 
 export interface CentredLine {
   readonly centre: number;
@@ -67,7 +66,7 @@ export function scatterAbout(
  */
 export function heightEstimate(line: CentredLine, x: number): Estimate {
   const distance = x - line.centre;
-  return studentEstimate(line, line.height + line.slope * distance, [1, distance]);
+  return lineEstimate(line, line.height + line.slope * distance, [1, distance]);
 }
 
 /**
@@ -75,18 +74,12 @@ export function heightEstimate(line: CentredLine, x: number): Estimate {
  *
  * @example slopeEstimate(fitCentredLine(Float64Array.of(0, 1, 2), Float64Array.of(1, 3, 5), Float64Array.of(1, 1, 1))).value // 2
  */
-export const slopeEstimate = (line: CentredLine): Estimate => studentEstimate(line, line.slope, [0, 1]);
+export const slopeEstimate = (line: CentredLine): Estimate => lineEstimate(line, line.slope, [0, 1]);
 
 /** @param combination of height and slope that makes the value */
-function studentEstimate(
-  { factor, deviation, degreesOfFreedom }: CentredLine,
-  value: number,
-  combination: readonly number[],
-): Estimate {
-  if (deviation === null) {
-    return { value, standardUncertainty: null, lower: null, upper: null, degreesOfFreedom };
-  }
-  const standardUncertainty = deviation * Math.sqrt(combinationVariance(factor, combination));
-  const reach = studentQuantile(0.975, degreesOfFreedom) * standardUncertainty;
-  return { value, standardUncertainty, lower: value - reach, upper: value + reach, degreesOfFreedom };
+function lineEstimate(line: CentredLine, value: number, combination: readonly number[]): Estimate {
+  const { factor, deviation, degreesOfFreedom } = line;
+  const uncertainty =
+    deviation === null ? null : deviation * Math.sqrt(combinationVariance(factor, combination));
+  return withStudentLimits(value, uncertainty, degreesOfFreedom);
 }

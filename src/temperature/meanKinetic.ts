@@ -21,7 +21,7 @@ import { InvalidInput, requirePositive, shown } from '../errors';
 export function meanKineticTemperature(
   temperatures: Float64Array,
   energy: number,
-  durations = new Float64Array(temperatures.length).fill(1),
+  durations: Float64Array = new Float64Array(temperatures.length).fill(1),
 ): number {
   requirePositive({ energy });
   const total = requireHistory(temperatures, durations);

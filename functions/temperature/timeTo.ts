@@ -1,0 +1,32 @@
+import { timeToConversion } from '../../src/temperature/timeTo';
+import { defineFunction } from '../define';
+import { number, optional } from '../parameters';
+import { shelfLifeCaution } from './cautions';
+
+export default defineFunction({
+  name: 'TIMETO',
+  family: 'temperature',
+  summary: 'Time until a given fraction of the reactant is converted.',
+  method:
+    't = [(1 − x)^(1−n) − 1]/[(n − 1)k[A]₀ⁿ⁻¹], which is −ln(1 − x)/k at order 1. Below order 1 the reactant is used up in a finite time. The reactant is taken to vanish in the end, by the one law all the way.',
+  parameters: {
+    fraction: number({ help: 'fraction converted', above: 0, below: 1 }),
+    coefficient: number({
+      help: 'rate coefficient k in −d[A]/dt = k[A]ⁿ',
+      unit: '(mol/L)^(1−n)/s',
+      above: 0,
+    }),
+    order: number({ help: 'n, need not be whole' }),
+    initial: optional(
+      number({ help: '[A]₀, in the concentration unit of the coefficient', unit: 'mol/L', above: 0 }),
+      undefined,
+      'not needed at order 1',
+    ),
+  },
+  result: { unit: 's, or the time unit of coefficient', shape: 'one value' },
+  // ln 2/k
+  example: { formula: '=PACE.TIMETO(0.5,3.21E-5,1)', equals: 21593.37011090172 },
+  reference: 'doi:10.1351/goldbook.H02716; doi:10.1351/goldbook.O04322',
+  caution: shelfLifeCaution,
+  run: (conversion) => timeToConversion(conversion),
+});
