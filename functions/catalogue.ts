@@ -1,20 +1,12 @@
 /** All cell functions, in the order of the work. */
 import type { CellFunction } from './define';
 import coefficient from './order/coefficient';
-import curve from './order/curve';
-import exponents from './order/exponents';
 import halfLife from './order/halfLife';
-import halvings from './order/halvings';
-import normalTime from './order/normalTime';
-import order from './order/order';
 import orders from './order/orders';
-import overlayOrder from './order/overlayOrder';
-import survey from './order/survey';
 import unit from './order/unit';
 import along from './rate/along';
 import between from './rate/between';
 import event from './rate/event';
-import start from './rate/start';
 import tangent from './rate/tangent';
 import course from './scheme/course';
 import check from './series/check';
@@ -54,19 +46,11 @@ export const catalogue: readonly CellFunction[] = [
   between,
   tangent,
   along,
-  start,
   event,
   orders,
-  order,
   coefficient,
-  unit,
   halfLife,
-  halvings,
-  curve,
-  exponents,
-  normalTime,
-  overlayOrder,
-  survey,
+  unit,
   arrhenius,
   eyring,
   coefficientAt,
