@@ -53,7 +53,7 @@ export const longestStart = 240_000; // ms
 export async function startBench(): Promise<PageBench> {
   if (!process.env.NB)
     execFileSync(process.execPath, [join(root, 'scripts', 'run.mjs'), 'build', 'page'], { stdio: 'inherit' });
-  const { server, address } = await startServer();
+  const { server, address } = await startServer('--no-open', '--port', '0');
   const browser = await launchBrowser();
   return {
     address,
@@ -66,18 +66,13 @@ export async function startBench(): Promise<PageBench> {
   };
 }
 
+/** The command as it is built. */
+export const startCommand = join(root, 'dist', 'commands', 'start.cjs');
+
 export async function startServer(
   ...words: readonly string[]
 ): Promise<{ server: ChildProcess; address: string }> {
-  const server = spawn(
-    process.execPath,
-    [
-      join(root, 'dist', 'commands', 'start.cjs'),
-      '--no-open',
-      ...(words.length > 0 ? words : ['--port', '0']),
-    ],
-    { stdio: ['ignore', 'pipe', 'inherit'] },
-  );
+  const server = spawn(process.execPath, [startCommand, ...words], { stdio: ['ignore', 'pipe', 'inherit'] });
   const address = await new Promise<string>((resolve, reject) => {
     let said = '';
     server.stdout!.on('data', (words: Buffer) => {

@@ -8,6 +8,7 @@ import { filesSuite } from './suites/files';
 import { paneSuite } from './suites/pane';
 import { portSuite } from './suites/port';
 import { sheetSuite } from './suites/sheet';
+import { startSuite } from './suites/start';
 
 let bench: PageBench;
 let sheet: BenchPage;
@@ -22,11 +23,8 @@ describe('the sheet', () => sheetSuite(() => sheet));
 describe('files', () => filesSuite(() => sheet));
 describe('the pane', () => paneSuite(() => sheet));
 describe('the port', () => portSuite(() => sheet));
-describe('everyone', () =>
-  accessSuite(
-    () => sheet,
-    () => bench,
-  ));
+describe('everyone', () => accessSuite(() => sheet));
+describe('the start', () => startSuite(() => bench));
 
 test('through all of it nothing complained, and nothing was asked of another address', () =>
   expect(sheet.complaints).toEqual([]));

@@ -1,11 +1,11 @@
 /** The page without a mouse, by ear, in the dark and in little room. */
 import axe from 'axe-core';
-import type { BenchPage, PageBench } from '../bench';
+import type { BenchPage } from '../bench';
 
 /** Our own parts. The grid (0.25.1) is a picture with controls of its own that we can name but not mend. */
 const ours = ['#strip', '#cell-line', '#pane'];
 
-export function accessSuite(sheet: () => BenchPage, bench: () => PageBench): void {
+export function accessSuite(sheet: () => BenchPage): void {
   const focusIsIn = (part: string): Promise<boolean> =>
     sheet().page.evaluate(
       (selector) => document.querySelector(selector)!.contains(document.activeElement),
@@ -65,18 +65,6 @@ export function accessSuite(sheet: () => BenchPage, bench: () => PageBench): voi
       expect(box.y + box.height).toBeLessThanOrEqual(size.height);
     }
     await sheet().page.setViewportSize({ width: 1280, height: 800 });
-  });
-
-  test('the page is served to this machine by its own name only, and nothing beside it', async () => {
-    const status = async (path: string, headers: Record<string, string> = {}): Promise<number> =>
-      (await fetch(new URL(path, bench().address), { headers })).status;
-    expect(await status('/')).toBe(200);
-    expect(await status('/..%2fcommands%2fstart.cjs')).toBe(404);
-    expect(await status('/%2e%2e/commands/start.cjs')).toBe(404);
-    expect(await status('/workbook.js%00')).toBe(404);
-    expect(await status('/%zz')).toBe(404);
-    const policy = (await fetch(bench().address)).headers.get('content-security-policy');
-    expect(policy).toContain("default-src 'self'");
   });
 }
 
