@@ -6,7 +6,7 @@ import type { BookModel, CellModel, DefinedName, SheetModel } from '../engine/en
 import { typedFormula } from './formulaText';
 import { NotAWorkbook } from './notAWorkbook';
 import { findParts, readXml } from './parts';
-import { scanSheet, type ScannedCell } from './sheetScan';
+import { scanSheet, type ScannedCell, type ScannedSheet } from './sheetScan';
 import { readLooks, type CellLook } from './styles';
 import { readTables } from './tables';
 import { Package } from './zip';
@@ -24,8 +24,7 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
       const sheet = library.Sheets[name];
       // the library passes over a sheet that it stumbles at
       if (!sheet) throw new NotAWorkbook(`a sheet cannot be read: ${name}`);
-      const cells = scanSheet(readXml(pack, path), path).rows.flatMap((row) => row.cells);
-      return sheetModel(name, sheet, cells, looks);
+      return sheetModel(name, sheet, scanSheet(readXml(pack, path), path), looks);
     }),
     names: definedNames(library),
     ...(tables.length > 0 ? { tables } : {}),
@@ -52,7 +51,7 @@ function readByLibrary(bytes: Uint8Array): WorkBook {
       cellFormula: true,
       xlfn: true,
       cellNF: true,
-      cellStyles: true,
+      sheetStubs: true,
       cellText: false,
       cellHTML: false,
     });
@@ -66,21 +65,31 @@ function readByLibrary(bytes: Uint8Array): WorkBook {
 function sheetModel(
   name: string,
   sheet: WorkSheet,
-  scanned: readonly ScannedCell[],
+  scanned: ScannedSheet,
   looks: readonly CellLook[],
 ): SheetModel {
-  // one entry can stand for all columns to the end of the sheet: those in use, or in sight, are enough
-  const lastColumn = scanned.reduce((last, { column }) => Math.max(last, column), columnIndex('Z'));
-  const widths = (sheet['!cols'] ?? []).flatMap((column, place) =>
-    column?.width === undefined || place > lastColumn ? [] : [[place, column.width] as const],
-  );
+  const cells = scanned.rows.flatMap((row) => row.cells);
+  const widths = columnWidths(scanned);
   return {
     name,
-    cells: scanned.flatMap((cell) =>
+    cells: cells.flatMap((cell) =>
       cellModel(cell, sheet[cellName(cell.row, cell.column)] as CellObject | undefined, looks),
     ),
-    ...(widths.length > 0 ? { columnWidths: Object.fromEntries(widths) } : {}),
+    ...(Object.keys(widths).length > 0 ? { columnWidths: widths } : {}),
   };
+}
+
+/** One entry can stand for all columns to the end of the sheet: those in use, or in sight, are enough. */
+function columnWidths({ rows, widths }: ScannedSheet): Record<number, number> {
+  const lastUsed = rows.reduce(
+    (last, row) => Math.max(last, row.cells.at(-1)?.column ?? 0),
+    columnIndex('Z'),
+  );
+  const list: Record<number, number> = {};
+  for (const { first, last, width } of widths) {
+    for (let column = first; column <= Math.min(last, lastUsed); column++) list[column] = width;
+  }
+  return list;
 }
 
 /** A cell that another's formula spilled into is left out: nobody typed it. */

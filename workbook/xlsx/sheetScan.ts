@@ -38,12 +38,20 @@ export interface ScannedRow extends Holder {
   countsCells: boolean;
 }
 
+/** One width for a stretch of columns, counted from 0; in characters. */
+export interface ScannedWidth {
+  readonly first: number;
+  readonly last: number;
+  readonly width: number;
+}
+
 export interface ScannedSheet {
   /** `x:` where the part writes `<x:row>`. */
   readonly prefix: string;
   readonly rows: readonly ScannedRow[];
   readonly data?: Holder;
   readonly dimension?: Span & { readonly ref: string };
+  readonly widths: readonly ScannedWidth[];
 }
 
 export const childOf = (cell: ScannedCell, name: string): ScannedChild | undefined =>
@@ -52,6 +60,7 @@ export const childOf = (cell: ScannedCell, name: string): ScannedChild | undefin
 /** @throws NotAWorkbook where the XML is not well formed */
 export function scanSheet(xml: string, part: string): ScannedSheet {
   const rows: ScannedRow[] = [];
+  const widths: ScannedWidth[] = [];
   let prefix = '';
   let data: Holder | undefined;
   let dimension: ScannedSheet['dimension'];
@@ -71,6 +80,9 @@ export function scanSheet(xml: string, part: string): ScannedSheet {
       const name = localName(full);
       if (name === 'dimension' && depth === 2) {
         dimension = { start: xml.lastIndexOf('<', end - 1), end, ref: attributes.ref };
+      } else if (name === 'col' && depth === 3 && attributes.width !== undefined) {
+        const { min, max, width } = attributes;
+        widths.push({ first: Number(min) - 1, last: Number(max) - 1, width: Number(width) });
       } else if (name === 'sheetData' && depth === 2) {
         prefix = full.slice(0, full.length - name.length);
         data = holder(end, isSelfClosing);
@@ -111,7 +123,7 @@ export function scanSheet(xml: string, part: string): ScannedSheet {
       if (child) child.text += text;
     },
   });
-  return { prefix, rows, data, dimension };
+  return { prefix, rows, data, dimension, widths };
 }
 
 function shut(element: Holder, xml: string, end: number): void {
