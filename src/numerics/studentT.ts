@@ -57,6 +57,23 @@ function betaFraction(a: number, b: number, x: number): number {
   return fraction;
 }
 
+/** Upper tail of the normal distribution, t ≥ 0: power series near 0, Laplace's continued fraction far out (DLMF 7.6.2, 7.9.1). */
+function normalTail(t: number): number {
+  const density = Math.exp(-0.5 * t * t) / Math.sqrt(2 * Math.PI);
+  if (t > 3) {
+    let fraction = t;
+    for (let k = 120; k >= 1; k--) fraction = t + k / fraction;
+    return density / fraction;
+  }
+  let term = t;
+  let sum = t;
+  for (let k = 3; term > Number.EPSILON * sum; k += 2) {
+    term *= (t * t) / k;
+    sum += term;
+  }
+  return 0.5 - density * sum;
+}
+
 /**
  * Upper tail P(T > t) for t ≥ 0, full relative precision far out in the tail.
  *
@@ -64,6 +81,7 @@ function betaFraction(a: number, b: number, x: number): number {
  * @example studentTail(1, 1) // 0.25
  */
 export function studentTail(t: number, degreesOfFreedom: number): number {
+  if (degreesOfFreedom === Infinity) return normalTail(t);
   const half = degreesOfFreedom / 2;
   const x = degreesOfFreedom / (degreesOfFreedom + t * t);
   const y = (t * t) / (degreesOfFreedom + t * t);
@@ -92,8 +110,7 @@ const quantiles = new Map<string, number>();
  */
 export function studentQuantile(p: number, degreesOfFreedom: number): number {
   if (!(p > 0 && p < 1)) throw new InvalidInput(`probability must be above 0 and below 1: got ${shown(p)}`);
-  if (degreesOfFreedom === Infinity) return studentQuantile(p, 1e13); // equal to thirteen digits
-  requirePositive({ degreesOfFreedom });
+  if (degreesOfFreedom !== Infinity) requirePositive({ degreesOfFreedom });
   const key = `${p}|${degreesOfFreedom}`;
   const known = quantiles.get(key);
   if (known !== undefined) return known;

@@ -12,6 +12,17 @@ test('studentQuantile(0.975, ∞) is the normal quantile (ISO 2854: 1.959964)', 
   expect(studentQuantile(0.975, Infinity)).toBeCloseTo(1.959963984540054, 12); // Abramowitz and Stegun, table 26.1
 });
 
+// mpmath 1.3.0 at 30 digits: √2 erfinv(2p − 1) of the given double p
+test.each([
+  [0.6, 0.25334710313579974132],
+  [0.975, 1.9599639845400538556],
+  [0.995, 2.5758293035489004539],
+  [0.9999, 3.7190164854557083867],
+])('studentQuantile(%d, ∞) is the normal quantile to 13 digits', (p, quantile) => {
+  expect(Math.abs(studentQuantile(p, Infinity) / quantile - 1)).toBeLessThan(1e-13);
+  expect(Math.abs(studentQuantile(1 - p, Infinity) / -quantile - 1)).toBeLessThan(1e-11);
+});
+
 test('studentTail: one degree of freedom is the Cauchy distribution', () => {
   for (const t of [0.1, 1, 12, 1e6]) {
     expect(studentTail(t, 1) / (Math.atan2(1, t) / Math.PI)).toBeCloseTo(1, 13);
