@@ -5,7 +5,7 @@ import type { Column } from '../column';
 export function placesInWords(places: readonly number[], shape: Pick<Column, 'rows' | 'columns'>): string {
   if (places.length === 0) return 'the whole run';
   const noun = shape.rows === 1 && shape.columns > 1 ? 'column' : 'row';
-  const stretches = stretchesOf(places).map(inWords);
+  const stretches = stretchesOf(places).flatMap(inWords);
   const said = stretches.length > longest ? [...stretches.slice(0, longest), 'more'] : stretches;
   const list = said.length < 2 ? said[0] : `${said.slice(0, -1).join(', ')} and ${said[said.length - 1]}`;
   return `${noun}${places.length === 1 ? '' : 's'} ${list}`;
@@ -26,7 +26,8 @@ function stretchesOf(places: readonly number[]): Stretch[] {
   return stretches;
 }
 
-function inWords([first, last]: Stretch): string {
-  if (first === last) return String(first + 1);
-  return last === first + 1 ? `${first + 1}, ${last + 1}` : `${first + 1} to ${last + 1}`;
+/** Two rows are named both; three or more by the first and the last. */
+function inWords([first, last]: Stretch): string[] {
+  if (last - first >= 2) return [`${first + 1} to ${last + 1}`];
+  return first === last ? [`${first + 1}`] : [`${first + 1}`, `${last + 1}`];
 }
