@@ -72,7 +72,11 @@ function residualsOf(
   });
 }
 
-/** As {@link fitLinear} without its corrections: enough for a step of a search, at a third of the cost. */
+/**
+ * As {@link fitLinear} without its corrections: enough for a step of a search, at a third of the cost.
+ *
+ * @example fitLinearOnce([Float64Array.of(1, 1, 1), Float64Array.of(0, 1, 2)], Float64Array.of(1, 3, 5)).coefficients // Float64Array [1, 2]
+ */
 export function fitLinearOnce(
   columns: readonly Float64Array[],
   readings: Float64Array,

@@ -49,6 +49,8 @@ export function startRateOf(
 /**
  * How many readings count as early. The whole change is that from the first reading to the mean of the last, a
  * fifth of all but no more than three, so that the scatter of one does not decide.
+ *
+ * @example earlyReadings(pairReadings([0, 1, 2, 3, 4, 5, 6], [10, 9, 8, 7, 6, 5, 4]), 0.2) // 5
  */
 export function earlyReadings({ times, values }: Series, share: number): number {
   const all = times.length;

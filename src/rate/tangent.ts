@@ -48,7 +48,11 @@ function settle(series: Series, { points, degree = 2, stoichiometricNumber }: Ta
   };
 }
 
-/** A polynomial in its window, as a rate of reaction: r = (1/ν) dy/dt with Student's limits. */
+/**
+ * A polynomial in its window, as a rate of reaction: r = (1/ν) dy/dt with Student's limits.
+ *
+ * @example slopeAsRate({ ...emptyLocalFit(), slope: -6 }, -2).value // 3
+ */
 export function slopeAsRate(fit: LocalFit, stoichiometricNumber: number): Estimate {
   const { degreesOfFreedom } = fit;
   const variance = (fit.residualSumOfSquares / degreesOfFreedom) * fit.slopeVariance;
