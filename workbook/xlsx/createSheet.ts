@@ -84,7 +84,11 @@ function formulaCell(
       column,
       value: value instanceof CellError || value !== null ? value : 0,
       attributes: { ...looks.attributes(cell), ...(dynamic ? { cm: '1' } : {}) },
-      formula: formulaXml('', dynamic ? { t: 'array', ref } : {}, filedFormula(cell.formula!)),
+      formula: formulaXml(
+        '',
+        dynamic ? { t: 'array', ref } : {},
+        filedFormula(cell.formula!, dynamic ? 'array' : 'plain'),
+      ),
     }),
   };
 }

@@ -1,6 +1,7 @@
 /** A formula as a person types it ↔ as a file stores it. Neither has a leading `=`. */
 import { anchorArray, withHash } from '../engine/anchorText';
 import { filedNameOf, filedPrefix, typedNameOf } from '../engine/names';
+import { namedIntersections, withoutIntersections } from './intersection';
 import { localPrefix, withLocalPrefixes } from './localNames';
 import { filedModernName } from './modernFunctions';
 
@@ -29,14 +30,20 @@ export const withFiledNames = (formula: string): string =>
     return filed === undefined ? part : `${filed}${bracket}`;
   });
 
-/** The whole way: our calls, the prefixes of functions younger than the file format, and `F2#`. */
-export const filedFormula = (typed: string): string =>
-  withLocalPrefixes(typed).replace(parts, (part) => {
+/**
+ * The whole way: our calls, the prefixes of functions younger than the file format, `F2#`, and `@`.
+ *
+ * @param kind whether it will stand in the file as a plain formula or as an array
+ */
+export function filedFormula(typed: string, kind: 'plain' | 'array' = 'plain'): string {
+  const filed = withLocalPrefixes(typed).replace(parts, (part) => {
     if (part.endsWith('#') && part.length > 1) return `_xlfn.${anchorArray}(${part.slice(0, -1)})`;
     const [, name, bracket] = call.exec(part) ?? [];
     if (name === undefined) return part;
     return `${filedNameOf(name) ?? filedModernName(name) ?? name}${bracket}`;
   });
+  return kind === 'plain' ? withoutIntersections(filed) : namedIntersections(filed);
+}
 
 /** Whether a formula calls one of our functions, under either name. */
 export const callsOurs = (formula: string): boolean =>

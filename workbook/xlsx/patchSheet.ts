@@ -131,7 +131,7 @@ class SheetPatch {
     const shared = kind === 'shared' && !this.unshared.has(attributes.si);
     // typed by hand into the file, or answering more than one cell: what Excel calls a dynamic array
     if (!shared && (this.spills(row, column) || text !== filed)) {
-      const own = kind === 'shared' ? filedFormula(this.sheet.typed(row, column)!) : text;
+      const own = kind === 'shared' ? filedFormula(this.sheet.typed(row, column)!, 'array') : text;
       const { si: _shared, ref: _ref, ...others } = attributes;
       this.newArrays = true;
       return { xml: formulaXml(prefix, { ...others, t: 'array', ref }, own), marks: true };

@@ -3,10 +3,11 @@ import { read, type CellObject, type WorkBook, type WorkSheet } from '@e965/xlsx
 import { cellName, columnIndex } from '../../functions/address';
 import { CellError, type CellValue, type ErrorCode } from '../../functions/cell';
 import type { BookModel, CellModel, DefinedName, SheetModel } from '../engine/engine';
-import { typedFormula } from './formulaText';
+import { callsOurs, typedFormula } from './formulaText';
+import { withIntersections } from './intersection';
 import { NotAWorkbook } from './notAWorkbook';
 import { findParts, readXml } from './parts';
-import { scanSheet, type ScannedCell, type ScannedSheet } from './sheetScan';
+import { childOf, scanSheet, type ScannedCell, type ScannedSheet } from './sheetScan';
 import { readLooks, type CellLook } from './styles';
 import { readTables } from './tables';
 import { Package } from './zip';
@@ -94,10 +95,11 @@ function columnWidths({ rows, widths }: ScannedSheet): Record<number, number> {
 
 /** A cell that another's formula spilled into is left out: nobody typed it. */
 function cellModel(
-  { row, column, attributes }: ScannedCell,
+  scanned: ScannedCell,
   cell: CellObject | undefined,
   looks: readonly CellLook[],
 ): CellModel[] {
+  const { row, column, attributes } = scanned;
   if (!cell || (cell.F !== undefined && cell.f === undefined)) return [];
   const look = looks[Number(attributes.s ?? 0)];
   const value = valueOf(cell);
@@ -107,12 +109,19 @@ function cellModel(
       row,
       column,
       value,
-      ...(cell.f ? { formula: typedFormula(cell.f) } : {}),
+      ...(cell.f ? { formula: formulaOf(cell.f, scanned) } : {}),
       ...(typeof cell.z === 'string' && cell.z !== 'General' ? { numberFormat: cell.z } : {}),
       ...(look?.bold ? { bold: true } : {}),
       ...(look?.wrap ? { wrap: true } : {}),
     },
   ];
+}
+
+/** A plain formula takes one cell of a range where it wants one value; ours are meant as they would be typed. */
+function formulaOf(filed: string, cell: ScannedCell): string {
+  const typed = typedFormula(filed);
+  const isArray = childOf(cell, 'f')?.attributes.t === 'array';
+  return isArray || callsOurs(typed) ? typed : withIntersections(typed);
 }
 
 /** The library's numbers for errors ([MS-XLS] 2.5.10, BErr). */

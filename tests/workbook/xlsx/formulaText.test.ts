@@ -25,6 +25,11 @@ describe('as typed ↔ as filed', () => {
   ])('%s is typed %s', (filed, typed) => expect(typedFormula(filed)).toBe(typed));
 });
 
+test('@ goes without saying in a plain formula, and is a function in an array', () => {
+  expect(filedFormula('@A2:A9*2+SUM(@Run!B:B)')).toBe('A2:A9*2+SUM(Run!B:B)');
+  expect(filedFormula('@A2:A9*2&"@A1:A2"', 'array')).toBe('_xlfn.SINGLE(A2:A9)*2&"@A1:A2"');
+});
+
 test('only our own calls are renamed where a file is patched', () => {
   expect(withFiledNames('pace.event(A1)+STDEV.S(A1:A2)+F2#')).toBe(
     '_xldudf_PACE_EVENT(A1)+STDEV.S(A1:A2)+F2#',

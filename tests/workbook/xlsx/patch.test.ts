@@ -121,6 +121,14 @@ describe('values of formulas', () => {
     expect(after).toContain('<c r="B2"><f t="shared" si="0"/><v>15</v></c>');
   });
 
+  test('a plain formula takes the cell of a range in its own row, and stays plain', async () => {
+    const after = await rows(
+      '<row r="1"><c r="A1"><v>2</v></c><c r="B1"><f>A1:A2*10</f><v>0</v></c></row><row r="2"><c r="A2"><v>3</v></c><c r="B2"><f>A1:A2*10</f><v>0</v></c></row>',
+    );
+    expect(after).toContain('<c r="B1"><f>A1:A2*10</f><v>20</v></c>');
+    expect(after).toContain('<c r="B2"><f>A1:A2*10</f><v>30</v></c>');
+  });
+
   test('the link before a name that another program left there stays in the file', async () => {
     const after = await rows(`<row r="1">${times}<c r="B1"><f>[2]!_xldudf_PACE_EVENT(A1)</f></c></row>`);
     expect(after).toContain('<f>[2]!_xldudf_PACE_EVENT(A1)</f><v>0.025</v>');

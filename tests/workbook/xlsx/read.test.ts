@@ -81,6 +81,20 @@ describe('formulas', () => {
     expect(cell(read(`<row r="1"><c r="A1"><f>${filed}</f></c></row>`), 'A1')?.formula).toBe(typed);
   });
 
+  test.each([
+    ['A1:A9*2', '@A1:A9*2'],
+    ['-(A:A+Run!$B$1:$B$9)', '-(@A:A+@Run!$B$1:$B$9)'],
+    ['SUM(A1:A9)+MAX((A1:A9)*2)', 'SUM(A1:A9)+MAX((A1:A9)*2)'],
+    ['"A1:A9"&amp;A1&amp;Run!A1', '"A1:A9"&A1&Run!A1'],
+    ['PACE.EVENT(A1)*A1:A9', 'PACE.EVENT(A1)*A1:A9'],
+  ])('a plain %s takes one cell of a range, as %s', (filed, typed) => {
+    const rows = (attributes: string): string =>
+      `<row r="1"><c r="A1"><f${attributes}>${filed}</f></c></row>`;
+    expect(cell(read(rows('')), 'A1')?.formula).toBe(typed);
+    const asArray = cell(read(rows(' t="array" ref="A1"')), 'A1')?.formula;
+    expect(asArray).toBe(filed.replace(/&amp;/g, '&'));
+  });
+
   test('a shared one is spelled out for its cell', () => {
     const book = read(
       '<row r="1"><c r="B1"><f t="shared" ref="B1:B3" si="0">_xldudf_PACE_EVENT(A1,$A$1)</f></c></row><row r="3"><c r="B3"><f t="shared" si="0"/></c></row>',
