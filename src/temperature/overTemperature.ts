@@ -7,7 +7,7 @@ import { fitUntransformed } from './untransformed';
  * What the least squares are of. `logarithms`: ln k, a straight line. `coefficients`: k itself, a nonlinear
  * fit. With uncertainties in proportion to k the two all but agree; without any, the second heeds the hottest
  * runs and little else. On five published coefficients over 226 K (OpenStax Chemistry 2e, 12.5) they give an
- * activation energy of 185.3 ± 2.2 and 197.9 ± 1.1 kJ/mol; the second, with 5 % of each k as uncertainty,
+ * activation energy of 185.3 ± 2.2 and 197.9 ± 0.6 kJ/mol; the second, with 5 % of each k as uncertainty,
  * 185.1 ± 2.3.
  */
 export type Scatter = 'logarithms' | 'coefficients';
