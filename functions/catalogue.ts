@@ -1,14 +1,23 @@
 /** All cell functions, in the order of the work. */
 import type { CellFunction } from './define';
 import coefficient from './order/coefficient';
+import curve from './order/curve';
+import exponents from './order/exponents';
 import halfLife from './order/halfLife';
+import halvings from './order/halvings';
+import normalTime from './order/normalTime';
+import order from './order/order';
 import orders from './order/orders';
+import overlayOrder from './order/overlayOrder';
+import survey from './order/survey';
 import unit from './order/unit';
 import along from './rate/along';
 import between from './rate/between';
 import event from './rate/event';
+import start from './rate/start';
 import tangent from './rate/tangent';
 import course from './scheme/course';
+import fitCourse from './scheme/fitCourse';
 import check from './series/check';
 import absorbance from './signal/absorbance';
 import acidity from './signal/acidity';
@@ -46,17 +55,26 @@ export const catalogue: readonly CellFunction[] = [
   between,
   tangent,
   along,
+  start,
   event,
   orders,
+  order,
   coefficient,
-  halfLife,
   unit,
+  halfLife,
+  halvings,
+  curve,
+  exponents,
+  normalTime,
+  overlayOrder,
+  survey,
   arrhenius,
   eyring,
   coefficientAt,
   meanTemp,
   timeTo,
   course,
+  fitCourse,
   check,
 ];
 

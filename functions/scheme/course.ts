@@ -1,9 +1,8 @@
 import { courseOf } from '../../src/scheme/course';
-import { reactionInWords } from '../../src/scheme/scheme';
 import type { CellValue } from '../cell';
 import { linesBeside } from '../column';
 import { defineFunction } from '../define';
-import { filled, schemeMethod, schemeParameters } from './schemeParameters';
+import { filled, schemeMethod, schemeParameters, speciesAt, stepAt, timesOf } from './schemeParameters';
 
 export default defineFunction({
   name: 'COURSE',
@@ -24,18 +23,9 @@ export default defineFunction({
   },
   reference: 'doi:10.1007/s10543-023-00967-x; doi:10.1351/goldbook.O04322',
   run({ scheme, coefficients, initial, times }) {
-    const rates = filled(coefficients, 'coefficients', (place) =>
-      place < scheme.reactions.length
-        ? reactionInWords(scheme, place)
-        : 'a step that the scheme does not have',
-    );
-    const start = filled(
-      initial,
-      'initial',
-      (place) => scheme.species[place] ?? 'a species that the scheme does not have',
-    );
-    const asked = times.numbers.filter((time) => time !== null);
-    const rows = courseOf(scheme, rates, start, asked)[Symbol.iterator]();
+    const rates = filled(coefficients, 'coefficients', stepAt(scheme));
+    const start = filled(initial, 'initial', speciesAt(scheme));
+    const rows = courseOf(scheme, rates, start, timesOf(times))[Symbol.iterator]();
     const gap = scheme.species.map((): CellValue => '');
     const lines = times.numbers.map((time): readonly CellValue[] =>
       time === null ? gap : [...(rows.next().value as Float64Array)],

@@ -1,7 +1,7 @@
 /** What the functions that work on a written mechanism have in common. */
-import { InvalidInput } from '../../src/errors';
+import { InvalidInput, shown } from '../../src/errors';
 import { parseScheme } from '../../src/scheme/parse';
-import type { Scheme } from '../../src/scheme/scheme';
+import { reactionInWords, type Scheme } from '../../src/scheme/scheme';
 import { CellError, shownCell, type CellRange } from '../cell';
 import { placeInWords, type Column } from '../column';
 import { column, required, type Parameter } from '../parameters';
@@ -48,6 +48,27 @@ export function filled(list: Column, name: string, owner: (place: number) => str
     );
   });
 }
+
+/** The times without their gaps. @throws InvalidInput for one before the start */
+export function timesOf(times: Column): number[] {
+  return times.numbers.flatMap((time, place) => {
+    if (time === null) return [];
+    if (time >= 0) return [time];
+    throw new InvalidInput(
+      `times must be 0 or later, since initial belongs to time 0: ${placeInWords(place, times)} (${shown(time)})`,
+    );
+  });
+}
+
+export const stepAt =
+  (scheme: Scheme) =>
+  (place: number): string =>
+    place < scheme.reactions.length ? reactionInWords(scheme, place) : 'a step that the scheme does not have';
+
+export const speciesAt =
+  ({ species }: Scheme) =>
+  (place: number): string =>
+    species[place] ?? 'a species that the scheme does not have';
 
 export const schemeMethod =
   "A step's rate is v = k ∏ c^(coefficient) over its left side as written, and each species changes by its net number times v. The equations are integrated by a Rosenbrock method of order 5 with analytic derivatives, which stiff mechanisms do not slow down; initial belongs to time 0.";

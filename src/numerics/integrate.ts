@@ -39,6 +39,8 @@ export interface Trajectory {
   /** For each time, one s = ∂y/∂θ a parameter; empty where they were not asked for. */
   readonly sensitivities: readonly Blocks[];
   readonly steps: number;
+  /** In the unit of the work limit. */
+  readonly work: number;
 }
 
 const stepsBetweenLooks = 200;
@@ -83,7 +85,7 @@ export function integrate(
   const stop = (reason: StopReason): IntegrationStopped =>
     new IntegrationStopped(reason, time, steps, here[0].slice());
   const end = times.length > 0 ? times[times.length - 1] : 0;
-  const stepLimit = Math.ceil(workLimit / workOfStep(system.size, parameters));
+  const stepWork = workOfStep(system.size, parameters);
   let time = 0;
   let steps = 0;
   let wanted = 0;
@@ -91,12 +93,12 @@ export function integrate(
     keep(0);
     wanted++;
   }
-  if (wanted === times.length) return { states, sensitivities, steps };
+  if (wanted === times.length) return { states, sensitivities, steps, work: 0 };
   method.leave(here);
   let step = Math.min(end, firstStep(system, here[0]));
   let mayGrow = fastestGrowth;
   while (wanted < times.length) {
-    if (++steps > stepLimit) throw stop('too much work');
+    if (++steps * stepWork > workLimit) throw stop('too much work');
     if (watch && steps % stepsBetweenLooks === 0) watch(time, steps);
     const isLast = time + step * (1 + 1e-12) >= end;
     const length = isLast ? end - time : step;
@@ -119,7 +121,7 @@ export function integrate(
     step = length * Math.min(mayGrow, Math.max(fastestShrinking, caution * Math.max(error, 1e-12) ** -0.2));
     mayGrow = fastestGrowth;
   }
-  return { states, sensitivities, steps };
+  return { states, sensitivities, steps, work: steps * stepWork };
 }
 
 /** Multiplications of one step, about. */

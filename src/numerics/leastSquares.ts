@@ -6,6 +6,8 @@ import type { QrFactor } from './qr';
 export interface LeastSquaresModel {
   readonly parameters: number;
   readonly residuals: number;
+  /** Share of the sum of squares that the model's own arithmetic leaves open; none when left out. */
+  readonly noise?: number;
   /** Writes reading less model, weighted, into `residuals`. */
   residualsAt(parameters: Float64Array, residuals: Float64Array): void;
   /** Writes the derivatives of the *model*, weighted, column by column into `columns`. */
@@ -91,6 +93,8 @@ class Search {
   step(): void {
     if (!this.isFresh) this.differentiate();
     const { step, promised } = this.damped(this.damping);
+    // damping alone makes promises small
+    if (promised * (1 + this.damping) < (this.model.noise ?? 0) * this.squares) return this.settle();
     const trial = this.parameters.map((p, j) => p + step[j]);
     this.model.residualsAt(trial, this.trialResiduals);
     const squares = sumOfSquares(this.trialResiduals);
