@@ -10,7 +10,7 @@ import type { RateLawFit } from './fit';
 const leastWeight = 0.05;
 
 /** Below two half lives neighbouring orders differ less than most readings scatter; three tell them apart (common practice). */
-const halfLivesNeeded = 2;
+export const halfLivesNeeded = 2;
 const halfLivesAdvised = 3;
 
 /** Below this p the residuals run in a pattern. */

@@ -1,0 +1,44 @@
+import { nearestSimpleOrder, partialOrders } from '../../src/order/exponents';
+import type { Estimate } from '../../src/estimate';
+import { block, columnsBeside } from '../block';
+import type { CellValue } from '../cell';
+import { detail } from '../commonParameters';
+import { defineFunction } from '../define';
+import { column } from '../parameters';
+import { standardRow } from '../results';
+
+export default defineFunction({
+  name: 'EXPONENTS',
+  family: 'order',
+  summary: 'Partial orders and rate coefficient, from initial rates at several concentrations.',
+  method:
+    'ln r = ln k + Σ nᵢ ln cᵢ by linear least squares, so that each rate counts with the same share of itself. A row: the order in each reactant, k last. With detail one standard row each, and beside an order the nearest simple one where its 95 % limits hold it.',
+  parameters: {
+    rates: column({ help: 'initial rates, one a run' }),
+    concentrations: block({ help: 'initial concentrations, one column a reactant' }),
+    detail: detail(),
+  },
+  result: { unit: '1; k in rate per concentrations', shape: 'table' },
+  // r = 3 a² b
+  example: {
+    formula: '=PACE.EXPONENTS({0.003;0.0045;0.00675},{0.1,0.1;0.1,0.15;0.15,0.1})',
+    equals: [[2, 1, 3]],
+  },
+  reference: 'doi:10.1351/goldbook.O04322',
+  run({ rates, concentrations, detail }) {
+    const columns = columnsBeside(concentrations, rates, { block: 'concentrations', beside: 'rates' });
+    const kept = [...rates.numbers.keys()].filter(
+      (run) => rates.numbers[run] !== null && columns.every(({ numbers }) => numbers[run] !== null),
+    );
+    const picked = (numbers: readonly (number | null)[]): Float64Array =>
+      Float64Array.from(kept, (run) => numbers[run]!);
+    const found = partialOrders(
+      picked(rates.numbers),
+      columns.map(({ numbers }) => picked(numbers)),
+    );
+    if (!detail) return [[...found.orders.map(({ value }) => value), found.rateCoefficient.value]];
+    return [...found.orders.map(orderRow), [...standardRow(found.rateCoefficient), '']];
+  },
+});
+
+const orderRow = (order: Estimate): CellValue[] => [...standardRow(order), nearestSimpleOrder(order) ?? ''];

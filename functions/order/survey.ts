@@ -1,0 +1,75 @@
+import { InvalidInput } from '../../src/errors';
+import { surveyRun, type SurveyedRun } from '../../src/order/survey';
+import { pairReadings } from '../../src/series/series';
+import { block, columnsBeside } from '../block';
+import type { CellValue } from '../cell';
+import type { Column } from '../column';
+import { endpoint } from '../commonParameters';
+import { defineFunction } from '../define';
+import { column, number, optional } from '../parameters';
+import { orNotAvailable } from '../results';
+import { lawMethod } from './lawParameters';
+
+const headings = [
+  'run',
+  'order',
+  'rate coefficient',
+  'standard uncertainty',
+  'half life',
+  'initial rate',
+  'conversion reached',
+  'flags',
+] as const;
+
+export default defineFunction({
+  name: 'SURVEY',
+  family: 'order',
+  summary:
+    'Many runs at a glance: order, rate coefficient, half life, initial rate and what needs a second look.',
+  method: `${lawMethod} One row a run below the headings. Conversion is that of the fitted law at the last reading. A run that cannot be fitted says why among its flags, and the others are not lost.`,
+  parameters: {
+    times: column({ help: 'times that all runs share', unit: 'time' }),
+    block: block({ help: 'readings, one column a run' }),
+    order: optional(number({ help: 'n of all runs' }), undefined, 'fitted for each run'),
+    endpoint: endpoint(),
+  },
+  result: { unit: 'as the headings say', shape: 'table' },
+  example: {
+    formula: '=PACE.SURVEY({0;10;20;30;40},{8,16;4,4;2,1;1,0.25;0.5,0.0625},1)',
+    equals: [['run'], [1, 1, 0.06931471805599453], [2, 1, 0.13862943611198906]],
+  },
+  reference: 'doi:10.1351/goldbook.O04322',
+  run({ times, block, order, endpoint }) {
+    const runs = columnsBeside(block, times, { block: 'block', beside: 'times' });
+    const surveyed = runs.map((run, i) => rowOf(times, run, i + 1, { order: order ?? 'free', endpoint }));
+    return [[...headings], ...surveyed];
+  },
+});
+
+type Law = { readonly order: number | 'free'; readonly endpoint: number | 'free' | undefined };
+
+function rowOf(times: Column, run: Column, name: number, law: Law): CellValue[] {
+  try {
+    return cells(name, surveyRun(pairReadings(times.numbers, run.numbers), law));
+  } catch (error) {
+    if (!(error instanceof InvalidInput)) throw error;
+    return cells(name, { fit: null, initialRate: null, flags: [error.message] });
+  }
+}
+
+function cells(name: number, { fit, initialRate, flags }: SurveyedRun): CellValue[] {
+  const why = flags[0] ?? '';
+  return [
+    name,
+    orNotAvailable(fit?.order, why),
+    orNotAvailable(fit?.rateCoefficient, why),
+    orNotAvailable(
+      fit?.standardUncertainties.rateCoefficient,
+      why || 'as many parameters as readings leave no scatter to judge by',
+    ),
+    orNotAvailable(fit?.halfLife, why),
+    orNotAvailable(initialRate, why),
+    orNotAvailable(fit && 1 - fit.shareLeft, why),
+    flags.join('; '),
+  ];
+}
