@@ -27,11 +27,14 @@ const broken = 'the file is not a whole zip package: it may be cut off or damage
 export class Package {
   private readonly changes = new Map<string, Uint8Array | null>();
 
-  private constructor(private readonly entries: readonly Entry[]) {}
+  private constructor(
+    private readonly original: Uint8Array,
+    private readonly entries: readonly Entry[],
+  ) {}
 
   /** @throws NotAWorkbook for what is not a zip package, or a broken one */
   static open(bytes: Uint8Array): Package {
-    return new Package(readEntries(bytes));
+    return new Package(bytes, readEntries(bytes));
   }
 
   has(name: string): boolean {
@@ -57,6 +60,7 @@ export class Package {
   }
 
   bytes(): Uint8Array {
+    if (this.changes.size === 0) return this.original;
     const kept = this.entries.filter(({ name }) => this.changes.get(name) !== null);
     const changed = kept.map((entry) => {
       const content = this.changes.get(entry.name);
