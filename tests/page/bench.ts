@@ -130,7 +130,7 @@ async function openPage(
 }
 
 /** Gives up without a word after a while: the expectation that follows says what is there instead. */
-export async function waitUntil(isTrue: () => Promise<boolean>, patience = 3000): Promise<void> {
+export async function waitUntil(isTrue: () => Promise<boolean>, patience = 20_000): Promise<void> {
   const end = Date.now() + patience;
   while (!(await isTrue()) && Date.now() < end) await new Promise((resolve) => setTimeout(resolve, 50));
 }
