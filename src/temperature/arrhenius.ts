@@ -3,7 +3,7 @@ import { gasConstant } from '../constants';
 import type { Estimate } from '../estimate';
 import { affine } from './affine';
 import { heightEstimate, slopeEstimate, type CentredLine } from './centredLine';
-import { requireMeasured, type MeasuredCoefficients } from './measured';
+import { rangeOf, requireMeasured, type MeasuredCoefficients } from './measured';
 import { lineOverTemperature, type Scatter } from './overTemperature';
 
 export interface ArrheniusFit {
@@ -28,12 +28,11 @@ export interface ArrheniusFit {
  */
 export function fitArrhenius(measured: MeasuredCoefficients, scatter: Scatter = 'logarithms'): ArrheniusFit {
   requireMeasured(measured, 'an activation energy');
-  const { temperatures } = measured;
   const line = lineOverTemperature(measured, scatter, () => 1);
   return {
     activationEnergy: affine(slopeEstimate(line), -gasConstant / 1000),
     logFactor: heightEstimate(line, 0),
     line,
-    range: [Math.min(...temperatures), Math.max(...temperatures)],
+    range: rangeOf(measured.temperatures),
   };
 }

@@ -1,4 +1,5 @@
 /** Rate coefficients measured at several temperatures: what every fit over temperature starts from. */
+import { celsiusZero } from '../constants';
 import { InvalidInput, NotDetermined, shown } from '../errors';
 
 export interface MeasuredCoefficients {
@@ -10,26 +11,34 @@ export interface MeasuredCoefficients {
   readonly uncertainties?: Float64Array;
 }
 
+/** K: 25 degC and 298.15 K are one temperature, though they can differ in their last digit. */
+export const temperatureRounding = 1e-9;
+
 /**
  * @param purpose as a message names it: `an activation energy`
  * @throws InvalidInput for lengths that differ, a number not above 0, or temperatures all alike; NotDetermined
  *   with fewer than two coefficients
- * @example requireMeasured({ temperatures: Float64Array.of(300, 300), coefficients: Float64Array.of(1, 2) }, 'a fit') // throws temperatures must differ: all 2 are 300 K
+ * @example requireMeasured({ temperatures: Float64Array.of(300, 300), coefficients: Float64Array.of(1, 2) }, 'a fit') // throws temperatures must differ: all 2 are 300 K, 26.85 degC
  */
 export function requireMeasured(measured: MeasuredCoefficients, purpose: string): void {
   const { temperatures, coefficients, uncertainties } = measured;
   requireOneEach({ coefficients, uncertainties }, temperatures.length);
   requireAbove0({ temperatures, coefficients, uncertainties });
-  const different = new Set(temperatures).size;
   if (temperatures.length < 2) {
     throw new NotDetermined(`${purpose} needs coefficients at two temperatures: got ${temperatures.length}`);
   }
-  if (different < 2) {
-    throw new InvalidInput(
-      `temperatures must differ: all ${temperatures.length} are ${shown(temperatures[0])} K`,
-    );
+  const [lowest, highest] = rangeOf(temperatures);
+  if (highest - lowest < temperatureRounding) {
+    const all = `all ${temperatures.length} are ${shown(lowest)} K`;
+    throw new InvalidInput(`temperatures must differ: ${all}, ${shown(lowest - celsiusZero)} degC`);
   }
 }
+
+/** Lowest and highest. @example rangeOf(Float64Array.of(300, 280, 290)) // [280, 300] */
+export const rangeOf = (numbers: Float64Array): readonly [number, number] => [
+  numbers.reduce((least, value) => Math.min(least, value)),
+  numbers.reduce((most, value) => Math.max(most, value)),
+];
 
 type Columns = Readonly<Record<string, Float64Array | undefined>>;
 

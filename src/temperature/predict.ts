@@ -3,14 +3,12 @@ import { NotDetermined, requirePositive, shown } from '../errors';
 import type { Estimate } from '../estimate';
 import type { ArrheniusFit } from './arrhenius';
 import { heightEstimate } from './centredLine';
+import { temperatureRounding } from './measured';
 
 export interface PredictedCoefficient extends Estimate {
   /** Whether the temperature lies outside those measured, where the law is an assumption. */
   readonly isExtrapolated: boolean;
 }
-
-/** K; temperatures written in different units agree to fewer digits than a number has. */
-const rounding = 1e-9;
 
 /**
  * k of the fitted law at a temperature. Limits are Student's on ln k, carried to k: they lie unevenly about it.
@@ -36,6 +34,6 @@ export function predictCoefficient(fit: ArrheniusFit, temperature: number): Pred
     lower: log.lower === null ? null : Math.exp(log.lower),
     upper: log.upper === null ? null : Math.exp(log.upper),
     degreesOfFreedom: log.degreesOfFreedom,
-    isExtrapolated: temperature < lowest - rounding || temperature > highest + rounding,
+    isExtrapolated: temperature < lowest - temperatureRounding || temperature > highest + temperatureRounding,
   };
 }

@@ -62,7 +62,8 @@ describe('PACE.ARRHENIUS', () => {
     ['{25;35},{1;2;3}', '#VALUE! coefficients must be as many as temperatures: got 3 for 2'],
     ['{25;35},{1;2},{1;2;3}', '#VALUE! uncertainties must be as many as temperatures: got 3 for 2'],
     ['{25;35},{1;2},{0.1;0}', '#VALUE! uncertainties must be above 0 for every reading: row 2 (0)'],
-    ['{25;25},{1;2}', '#VALUE! temperatures must differ: all 2 are 298.15 K'],
+    ['{25;25},{1;2}', '#VALUE! temperatures must differ: all 2 are 298.15 K, 25 degC'],
+    ['{25;"298.15 K";"77 degF"},{1;2;3}', '#VALUE! temperatures must differ: all 3 are 298.15 K, 25 degC'],
     ['25,1', '#N/A an activation energy needs coefficients at two temperatures: got 1'],
     [
       '{25;"x"},{"y";2}',

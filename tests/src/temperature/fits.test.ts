@@ -61,6 +61,15 @@ describe.each(reference.cases)('$id', (published) => {
     }
   });
 
+  const { profile_energy: profile } = published;
+  if (profile) {
+    test('its limits of the energy are near those of the profile likelihood', () => {
+      const reach = 1000 * (energy.upper! - energy.value);
+      expect(Math.abs(1000 * energy.lower! - profile[0])).toBeLessThan(0.1 * reach);
+      expect(Math.abs(1000 * energy.upper! - profile[1])).toBeLessThan(0.1 * reach);
+    });
+  }
+
   if ('enthalpy' in fit && published.gibbs298 !== undefined) {
     test('Gibbs energy of activation at 298.15 K to 1e-9', () => {
       const gibbs = gibbsEnergyAt(fit, 298.15);
@@ -144,7 +153,9 @@ test('what a fit over temperature refuses, in words', () => {
   expect(energy([300], [1])).toThrow(
     new NotDetermined('an activation energy needs coefficients at two temperatures: got 1'),
   );
-  expect(energy([300, 300], [1, 2])).toThrow(new InvalidInput('temperatures must differ: all 2 are 300 K'));
+  expect(energy([300, 300], [1, 2])).toThrow(
+    new InvalidInput('temperatures must differ: all 2 are 300 K, 26.85 degC'),
+  );
   expect(energy([300, 310], [1, -2])).toThrow(
     new InvalidInput('coefficients must be above 0: number 2 is -2'),
   );
