@@ -1,5 +1,6 @@
 import { shown } from '../../errors';
 import { emptyLocalFit, fitLocalPolynomial, nearestWindow } from '../../rate/localPolynomial';
+import { timesApart } from './apart';
 import type { Course } from './course';
 import type { Finding } from './finding';
 import { limitFor } from './scatter';
@@ -52,7 +53,7 @@ function slopesAlong({ series, scatter, direction }: Course): Slope[] {
   const slopes: Slope[] = [];
   for (let index = 0, first = 0; index < count; index += stride) {
     first = nearestWindow(times, window, times[index], first);
-    if (new Set(times.subarray(first, first + window)).size < 4) continue;
+    if (timesApart(times.subarray(first, first + window), times[index]) < 4) continue;
     fitLocalPolynomial(times, values, first, window, 2, times[index], fit);
     const own = fit.residualSumOfSquares / fit.degreesOfFreedom / scatter ** 2;
     slopes.push({ index, rate: direction * fit.slope, variance: fit.slopeVariance * Math.max(1, own) });

@@ -1,6 +1,7 @@
 /** Where a reading ought to lie, by its neighbours alone. */
 import { emptyLocalFit, fitLocalPolynomial } from '../../rate/localPolynomial';
 import type { Series } from '../series';
+import { timesApart } from './apart';
 
 export type Side = 'both' | 'before' | 'after';
 
@@ -28,19 +29,27 @@ function degreesFor(distinct: number, side: Side): readonly [number, number] | n
 
 const fit = emptyLocalFit();
 
+interface Place {
+  /** Time for which the reading is expected. */
+  readonly at: number;
+  /** The readings that may serve, `end` not among them. */
+  readonly first: number;
+  readonly end: number;
+  /** Those next to `at` on either side; the reading in question is neither. */
+  readonly left: number;
+  readonly right: number;
+  readonly side: Side;
+}
+
 /**
  * Fits a quadratic through the nearest readings on the sides asked for, and sets beside it a curve of
  * higher degree through the same readings.
  *
- * @param at time for which the reading is expected
- * @param first,end the readings that may serve, `end` not among them
- * @param left,right readings next to `at` on either side, the reading in question itself in neither
  * @returns `null` where too few readings stand on that side
  */
-function expectationFrom(
-  { times, values }: Series,
-  { at, first, end, left, right, side }: Place,
-): Expectation | null {
+function expectationFrom(series: Series, place: Place): Expectation | null {
+  const { times } = series;
+  const { at, first, end, left, right, side } = place;
   let [low, high] = [left, right];
   const lowest = side === 'after' ? left : first - 1;
   const highest = side === 'before' ? right : end;
@@ -49,9 +58,17 @@ function expectationFrom(
     if (takeLeft) low--;
     else high++;
   }
-  const chosen = [...range(low + 1, left + 1), ...range(right, high)];
+  return throughChosen(series, [...range(low + 1, left + 1), ...range(right, high)], at, side);
+}
+
+function throughChosen(
+  { times, values }: Series,
+  chosen: readonly number[],
+  at: number,
+  side: Side,
+): Expectation | null {
   const [t, y] = [Float64Array.from(chosen, (i) => times[i]), Float64Array.from(chosen, (i) => values[i])];
-  const degrees = degreesFor(new Set(t).size, side);
+  const degrees = degreesFor(timesApart(t, at), side);
   if (!degrees) return null;
   const curve = { ...fitLocalPolynomial(t, y, 0, t.length, degrees[0], at, fit) };
   const rival = fitLocalPolynomial(t, y, 0, t.length, degrees[1], at, fit);
@@ -68,15 +85,6 @@ function expectationFrom(
 /** The part of the doubt that scatter does not explain: what the bend leaves open, with its sign. */
 export function bendBeyondScatter({ doubt, doubtVariance }: Expectation, scatter: number): number {
   return Math.sign(doubt) * Math.max(0, Math.abs(doubt) - 1.5 * scatter * Math.sqrt(doubtVariance));
-}
-
-interface Place {
-  readonly at: number;
-  readonly first: number;
-  readonly end: number;
-  readonly left: number;
-  readonly right: number;
-  readonly side: Side;
 }
 
 const range = (from: number, to: number): number[] =>

@@ -50,6 +50,9 @@ export function outliersIn(series: Series): Outlier[] {
 /** So many of the furthest are judged by the scatter of the rest, which they may have swollen. */
 const closerLooks = 3;
 
+/** Of a longer run a few bad readings cannot swell the median. */
+const longRun = 500;
+
 /** The rest leaves out, too, what lies this far off. */
 const suspect = 3;
 
@@ -64,9 +67,11 @@ function worstIn(series: Series): Map<number, Outlier> {
     })
     .sort((a, b) => b.outlier.deviations - a.outlier.deviations);
   const suspects = seen.filter(({ outlier }) => outlier.deviations > suspect).map(({ i }) => i);
+  const isShort = series.times.length <= longRun;
   const beyond = new Map<number, Outlier>();
   seen.forEach(({ i, outlier }, rank) => {
-    const rest = rank < closerLooks ? scatterOf(without(series, new Set([...suspects, i]))) : common;
+    const rest =
+      isShort && rank < closerLooks ? scatterOf(without(series, new Set([...suspects, i]))) : common;
     const closer = rest < common ? judged(series, i, rest) : outlier;
     if (closer && closer.deviations > limit) beyond.set(i, closer);
   });
@@ -133,8 +138,13 @@ export function outlierFinding(outliers: readonly Outlier[]): Finding | null {
     kind: 'outlier',
     places: outliers.map(({ place }) => place),
     finding: `${counted(outliers.length, 'reading lies', 'readings lie')} far off the curve through the others: ${listed(said)}`,
-    meaning: `beyond what the scatter of the run explains (at least ${roughly(Math.min(...outliers.map(({ deviations }) => deviations)))} standard deviations): a tangent or fit near it is pulled aside, and its uncertainty grows`,
+    meaning: `beyond what the scatter of the run explains (${deviationsInWords(outliers)}): a tangent or fit near it is pulled aside, and its uncertainty grows`,
     advice:
       'look for a cause in the notebook (a slip of the pen, a bubble, a missed moment); with a cause blank the cell and say so, without one keep it and report both results',
   };
+}
+
+function deviationsInWords(outliers: readonly Outlier[]): string {
+  const least = outliers.reduce((smallest, { deviations }) => Math.min(smallest, deviations), Infinity);
+  return least > 100 ? 'more than 100 standard deviations' : `at least ${roughly(least)} standard deviations`;
 }

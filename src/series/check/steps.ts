@@ -13,6 +13,9 @@ export interface Step {
   readonly height: number;
 }
 
+/** Two readings on either side of a step differ by more, in standard deviations, whatever their scatter. */
+const leastJump = 1.5;
+
 /** On each side, for the course there to be drawn. */
 const readingsBeside = 4;
 
@@ -35,6 +38,8 @@ export function stepsIn(series: Series): Step[] {
     const [first, end] = part;
     let largest = { next: 0, deviations: limit, height: 0 };
     for (let next = first + readingsBeside; next <= end - readingsBeside; next++) {
+      // most gaps of a long run are passed over at once
+      if (Math.abs(series.values[next] - series.values[next - 1]) < leastJump * scatter) continue;
       const break_ = breakBefore(series, { first, next, end, scatter });
       if (break_.deviations > largest.deviations) largest = { next, ...break_ };
     }
