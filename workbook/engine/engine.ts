@@ -57,7 +57,10 @@ export interface CalculatedBook {
   formula(sheet: string, row: number, column: number): Calculated | undefined;
   /** What any cell shows: its own value, or what spilled into it. */
   shown(sheet: string, row: number, column: number): CellValue;
-  /** Cells that show an error as a result, spilled ones too, in reading order, with our words where we have them. */
+  /**
+   * Cells that show an error as a result, in reading order, with our words where we have them. A cell that
+   * a formula spilled into counts too, but for #N/A, which within a table is an answer.
+   */
   readonly errors: readonly {
     readonly sheet: string;
     readonly row: number;

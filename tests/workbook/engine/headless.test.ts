@@ -143,6 +143,15 @@ describe('words for errors', () => {
     ]);
   });
 
+  test('#N/A within a table is an answer; as the whole of one it is an error', async () => {
+    const run = await sheet({ A1: '={1,#N/A}', A2: '=NA()', A3: '=SORT({3;1})/{1;0}' });
+    expect([run.words('B1'), run.words('A2')]).toEqual(['#N/A', '#N/A']);
+    expect(run.calculated.errors.map(({ row, error }) => [row, error.code])).toEqual([
+      [1, '#N/A'],
+      [3, '#DIV/0!'],
+    ]);
+  });
+
   test('a formula that feeds on itself says so, and so does one behind it; others go on', async () => {
     const run = await sheet({ A1: '=B1+1', B1: '=A1+1', C1: '=B1*2', D1: '=D1', E1: '=1+1' });
     expect(run.words('A1')).toBe('#REF! the formula depends on its own result');

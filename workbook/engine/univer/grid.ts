@@ -16,6 +16,7 @@ import { nameControls } from './grid/accessibleNames';
 import { acceptSpillReferences, copySpilledValues, showOwnErrorWords } from './grid/amendments';
 import { bookOf, calculatedOf } from './grid/book';
 import { bootGrid } from './grid/boot';
+import { showFittingNumbers } from './grid/fittingNumbers';
 import { screenData } from './grid/screenData';
 import { sheetsOf, type Sheets } from './grid/sheets';
 import { writeCells } from './grid/write';
@@ -57,6 +58,7 @@ export function createGrid(container: HTMLElement, first: BookModel, { isDark = 
   });
   copySpilledValues(injector, () => sheets.workbook);
   acceptSpillReferences(injector);
+  showFittingNumbers(injector);
   const stopNaming = nameControls(container);
 
   const calculation = (): Promise<void> =>

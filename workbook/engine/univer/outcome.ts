@@ -80,10 +80,21 @@ function cellValue(cell: Nullable<ICellData>, id: string, row: number, column: n
 const errorShown = (text: string, id: string, row: number, column: number): CellError =>
   new CellError(errorCode(text), messageAt(unitId, id, row, column, text) ?? '');
 
-/** Errors that were typed are no results, and stand in nobody's list. */
-function errorsIn(sheet: SheetModel, { results, shown }: SheetOutcome): CalculatedError[] {
+/**
+ * Errors that were typed are no results. Within a table that a formula answers, #N/A is an answer: a row
+ * of orders has no weight for the free one.
+ */
+function errorsIn(sheet: SheetModel, { results, formulas, shown }: SheetOutcome): CalculatedError[] {
   return [...results]
-    .map(([place, { row, column }]) => ({ sheet: sheet.name, row, column, error: shown.get(place) }))
-    .filter((entry): entry is CalculatedError => entry.error instanceof CellError)
+    .map(([place, { row, column }]) => ({
+      sheet: sheet.name,
+      row,
+      column,
+      error: shown.get(place),
+      spilled: !formulas.has(place),
+    }))
+    .filter((entry): entry is CalculatedError & { spilled: boolean } => entry.error instanceof CellError)
+    .filter(({ error, spilled }) => !(spilled && error.code === '#N/A'))
+    .map(({ spilled: _, ...entry }) => entry)
     .sort((a, b) => a.row - b.row || a.column - b.column);
 }
