@@ -14,7 +14,8 @@ Formulas are taken as typed (PACE.TANGENT) and as Excel stores them. IN is never
 or is replaced, only when it is complete. All else in the file stays as it was, byte for byte.
 
 Exit code  0  done
-           1  done, and some cells are errors: one a line on the error output, sheet!cell, error, why
+           1  done, and some cells are errors: one a line on the error output, sheet!cell, error, why;
+              #N/A within a table that a formula answers is no error
            2  not done: the error output says why, and nothing was written
 `;
 
