@@ -15,8 +15,9 @@ const halfLivesNeeded = 2;
 /**
  * How far a run was followed that is still on its way.
  *
- * A falling run is taken to end at 0, as the fits take it when no end is given. A rising one has no end of
- * its own: a first-order curve with a free end says how much of it was seen.
+ * A falling run is taken to end at 0, as the fits take it when no end is given, unless a first-order curve
+ * with a free end shows it to flatten out elsewhere, as a balance does. A rising one has no end of its own:
+ * such a curve says how much of it was seen.
  */
 export function conversion({ series, direction }: Course): Finding | null {
   return direction < 0 ? falling(series) : direction > 0 ? rising(series) : null;
@@ -29,16 +30,27 @@ function falling(series: Series): Finding | null {
   const share = 1 - last / first;
   const followed = -Math.log2(1 - share);
   if (followed >= halfLivesNeeded) return null;
-  const seen = `the readings went from ${shown(first)} to ${shown(last)}, ${percent(share)} of the way to 0`;
+  const seen = `the readings went from ${shown(first)} to ${shown(last)}`;
+  const way = `${percent(share)} of the way to 0 (${roughly(followed)} half lives)`;
+  const end = endInSight(series);
+  return end === null
+    ? tooShort(share, `${seen}, ${way}`, 'if they end elsewhere than at 0, give that endpoint')
+    : endsElsewhere(`${seen} and seem to level off near ${end}, not at 0`, end, way);
+}
+
+/** The end has to be clear of 0 by so many of its standard uncertainties, and known to this share of the change. */
+const clearOfZero = 3;
+const knownShare = 0.2;
+
+/** Where a falling run flattens out, if not at 0 and if that can be seen; as many figures as its change is worth. */
+function endInSight(series: Series): string | null {
   const free = freeEndFit(series);
-  const flattens = free ? halfLivesFollowed(free) >= halfLivesNeeded : false;
-  return tooShort(
-    share,
-    `${seen} (${roughly(followed)} half lives)`,
-    flattens
-      ? `they seem to level off near ${roughly(free!.endpoint)}: if that is their end, give it, or "free", as the endpoint`
-      : 'if they end elsewhere than at 0, give that endpoint',
-  );
+  const uncertainty = free?.standardUncertainties.endpoint ?? Infinity;
+  if (!free || halfLivesFollowed(free) < halfLivesNeeded) return null;
+  const { endpoint, start } = free;
+  const isClear = endpoint > clearOfZero * uncertainty && uncertainty < knownShare * (start - endpoint);
+  const decimals = Math.max(0, 2 - Math.floor(Math.log10(start - endpoint)));
+  return isClear ? String(Number(endpoint.toFixed(Math.min(12, decimals)))) : null;
 }
 
 function rising(series: Series): Finding | null {
@@ -93,4 +105,12 @@ const endless = (finding: string, advice: string): Finding => ({
   meaning:
     'rates are sound, but how far the reaction has come cannot be told, and so neither an order nor a half life',
   advice: `follow the run until it slows down; ${advice}`,
+});
+
+const endsElsewhere = (finding: string, end: string, way: string): Finding => ({
+  kind: 'end',
+  places: [],
+  finding,
+  meaning: 'an end of 0, taken when none is given, would spoil order, rate coefficient and half life',
+  advice: `give ${end}, or "free", as the endpoint if the reading ends there; if it does end at 0, follow the run further, since it has only gone ${way}`,
 });

@@ -16,6 +16,7 @@ export const kindsBySeverity = [
   'turn',
   'drift',
   'plateau',
+  'end',
   'induction',
   'conversion',
   'resolution',

@@ -73,6 +73,13 @@ export const course: readonly Fault[] = [
     values: wobbling((time) => 5 * (Math.exp(-time / 90) - Math.exp(-time / 20)), tens, 2),
   },
   {
+    name: 'a flask on a balance that loses gas',
+    kind: 'end',
+    places: [],
+    says: /^the readings went from 201\.6\d* to 200\.0\d* and seem to level off near 200(\.0\d?)?, not at 0$/,
+    values: wobbling((time) => 200 + 1.6 * 2 ** (-time / 40), tens, 1),
+  },
+  {
     name: 'less than a half life',
     kind: 'conversion',
     places: [],
