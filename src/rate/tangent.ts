@@ -24,6 +24,8 @@ interface Window {
   readonly points: number;
   readonly degree: number;
   readonly stoichiometricNumber: number;
+  /** The number of points was left to be chosen from the data. */
+  readonly isChosen: boolean;
 }
 
 function settle(series: Series, { points, degree = 2, stoichiometricNumber }: TangentOptions): Window {
@@ -43,6 +45,7 @@ function settle(series: Series, { points, degree = 2, stoichiometricNumber }: Ta
   }
   return {
     points: points ?? defaultWindow(series, degree),
+    isChosen: points === undefined,
     degree,
     stoichiometricNumber: stoichiometricNumberFor(series, stoichiometricNumber),
   };
@@ -63,30 +66,58 @@ export function slopeAsRate(fit: LocalFit, stoichiometricNumber: number): Estima
   );
 }
 
+const own = emptyLocalFit();
+const finer = emptyLocalFit();
+
+function rateIn(series: Series, window: Window, first: number, time: number): Estimate {
+  const { times, values } = series;
+  const { points, degree, stoichiometricNumber, isChosen } = window;
+  const rate = slopeAsRate(
+    fitLocalPolynomial(times, values, first, points, degree, time, own),
+    stoichiometricNumber,
+  );
+  if (!isChosen || own.degreesOfFreedom < 2 || differentTimes(times, first, points) < degree + 2) return rate;
+  fitLocalPolynomial(times, values, first, points, degree + 1, time, finer);
+  return withoutBias(rate, slopeAsRate(finer, stoichiometricNumber));
+}
+
+/**
+ * A window of least error owes part of that error to the bend its polynomial cannot follow, of which the
+ * scatter inside the window knows nothing. One degree more follows that bend: so its uncertainty and its
+ * limits are given, widened to hold the rate itself where they do not.
+ */
+function withoutBias({ value }: Estimate, { lower, upper, ...finerRate }: Estimate): Estimate {
+  return { ...finerRate, value, lower: Math.min(value, lower!), upper: Math.max(value, upper!) };
+}
+
+function differentTimes(times: Float64Array, first: number, count: number): number {
+  let different = 1;
+  for (let i = first + 1; i < first + count; i++) if (times[i] !== times[i - 1]) different++;
+  return different;
+}
+
 /**
  * Rate of reaction at one time: slope of the least-squares polynomial through the nearest readings.
  *
- * The standard uncertainty comes from the scatter about the polynomial inside the window; it does not
- * know of the bend that the polynomial cannot follow, which grows with the window.
+ * With `points` given, the standard uncertainty comes from the scatter about the polynomial inside the window,
+ * and knows nothing of the bend that it cannot follow, which grows with the window. With `points` left out it
+ * is that of the polynomial of one degree more in the same window, which is nearly free of bias.
  *
  * @param series a run, times in any unit
  * @param time where the rate is wanted, within the run
- * @returns rate in reading units per time unit, with n − degree − 1 degrees of freedom
+ * @returns rate in reading units per time unit, with n − degree − 1 degrees of freedom, one less with `points`
+ *   left out
  * @throws InvalidInput for a window that cannot be; NotDetermined outside the run or with too few times
  * @see A. Savitzky and M. J. E. Golay, Anal. Chem. 36 (1964) 1627, doi:10.1021/ac60214a047 (even spacing);
- *   W. S. Cleveland, J. Am. Stat. Assoc. 74 (1979) 829 (nearest neighbours)
+ *   W. S. Cleveland, J. Am. Stat. Assoc. 74 (1979) 829 (nearest neighbours); limits free of bias: S. Calonico,
+ *   M. D. Cattaneo and R. Titiunik, Econometrica 82 (2014) 2295, doi:10.3982/ECTA11757
  * @example tangentRate(pairReadings([0, 1, 2, 3], [9, 4, 1, 0]), 1, { points: 3 }).value // 4
  */
 export function tangentRate(series: Series, time: number, options: TangentOptions = {}): Estimate {
   requireFinite({ time });
-  const { points, degree, stoichiometricNumber } = settle(series, options);
-  const { times, values } = series;
-  requireWithinRun(times, time);
-  const first = nearestWindow(times, points, time);
-  return slopeAsRate(
-    fitLocalPolynomial(times, values, first, points, degree, time, emptyLocalFit()),
-    stoichiometricNumber,
-  );
+  const window = settle(series, options);
+  requireWithinRun(series.times, time);
+  return rateIn(series, window, nearestWindow(series.times, window.points, time), time);
 }
 
 /**
@@ -97,16 +128,12 @@ export function tangentRate(series: Series, time: number, options: TangentOption
  * @example ratesAlong(pairReadings([0, 1, 2, 3], [9, 4, 1, 0]), { points: 3 })[3].value // 0
  */
 export function ratesAlong(series: Series, options: TangentOptions = {}): Estimate[] {
-  const { points, degree, stoichiometricNumber } = settle(series, options);
-  const { times, values } = series;
-  const fit = emptyLocalFit();
+  const window = settle(series, options);
+  const { times } = series;
   const rates: Estimate[] = new Array(times.length);
   for (let i = 0, first = 0; i < times.length; i++) {
-    first = nearestWindow(times, points, times[i], first);
-    rates[i] = slopeAsRate(
-      fitLocalPolynomial(times, values, first, points, degree, times[i], fit),
-      stoichiometricNumber,
-    );
+    first = nearestWindow(times, window.points, times[i], first);
+    rates[i] = rateIn(series, window, first, times[i]);
   }
   return rates;
 }
