@@ -3,7 +3,7 @@ import { pairReadings, requireOneLength, type Series } from '../series';
 import { censored } from './censored';
 import { conversion } from './conversion';
 import { courseOf, isLong, type Course } from './course';
-import { endingOf } from './ending';
+import { endingOf, type Ending } from './ending';
 import { drift, plateau } from './endingFindings';
 import { errorCells } from './errorCells';
 import { bySeverity, type Finding } from './finding';
@@ -81,12 +81,11 @@ function ofCourse(course: Course, known: ReadonlySet<number>): Found[] {
   const turned = ending ? null : turn(course);
   if (turned) return [turned, gap, resolution(course, undefined)];
   const late = induction(course);
+  return [gap, late, ofEnding(course, ending, late !== null), resolution(course, ending?.line.first)];
+}
+
+function ofEnding(course: Course, ending: Ending | null, isLate: boolean): Found {
+  if (ending) return (ending.kind === 'drift' ? drift : plateau)(course, ending);
   // a rising run with an induction period follows no law that could tell its end
-  const followed = late && course.direction > 0 ? null : conversion(course);
-  return [
-    gap,
-    late,
-    ending ? (ending.kind === 'drift' ? drift : plateau)(course, ending) : followed,
-    resolution(course, ending?.line.first),
-  ];
+  return isLate && course.direction > 0 ? null : conversion(course);
 }
