@@ -58,6 +58,20 @@ test('the maths, the functions and the pane use only the packages they need', ()
   expect(others.map(({ path: file, name }) => `${file} imports ${name}`)).toEqual([]);
 });
 
+test('every package that is imported is one that the project names', () => {
+  const { dependencies, devDependencies } = JSON.parse(textOf('package.json')) as Record<string, object>;
+  const named = new Set([...Object.keys(dependencies), ...Object.keys(devDependencies)]);
+  const packageOf = (name: string): string =>
+    name
+      .split('/')
+      .slice(0, name.startsWith('@') ? 2 : 1)
+      .join('/');
+  const unnamed = importsIn.filter(
+    ({ name, from }) => from === undefined && !name.startsWith('node:') && !named.has(packageOf(name)),
+  );
+  expect(unnamed.map(({ path: file, name }) => `${file} imports ${name}`)).toEqual([]);
+});
+
 test('one folder knows the spreadsheet engine, one file each knows Office.js and its helpers', () => {
   const strays = importsIn
     .filter(({ name }) => name.startsWith('@univerjs/'))

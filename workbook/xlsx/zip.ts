@@ -203,7 +203,8 @@ function localHeader(entry: Entry): Uint8Array {
 }
 
 function centralHeader(entry: Entry, offset: number): Uint8Array {
-  const header = entry.central.slice();
+  // a copy, also where the bytes came in Node's Buffer, whose own slice would share them
+  const header = Uint8Array.from(entry.central);
   const view = new DataView(header.buffer);
   describe(view, 8, entry);
   view.setUint32(42, offset, true);

@@ -1,0 +1,23 @@
+/** What the tests of patching have in common: one sheet in, its rows after recalculation out. */
+import { recalculate } from '../../../workbook/commands/recalculate';
+import { packageOf, rowsOf, worksheet } from './package';
+
+export const recalculated = async (bytes: Uint8Array): Promise<Uint8Array> =>
+  (await recalculate(bytes)).bytes;
+
+/** The rows of one sheet, before and after. */
+export async function rows(before: string, options: Parameters<typeof worksheet>[1] = {}): Promise<string> {
+  return rowsOf(await recalculated(packageOf({ sheets: { Run: worksheet(before, options) } })));
+}
+
+export const dynamic = (ref: string, formula: string): string => `<f t="array" ref="${ref}">${formula}</f>`;
+export const times = '<c r="A1"><v>40</v></c>';
+export const row2 = '<row r="2"><c r="A2"><v>25</v></c></row>';
+
+export const metadata = (inside: string): string =>
+  `<metadata xmlns="http://schemas.openxmlformats.org/spreadsheetml/2006/main">${inside}</metadata>`;
+export const metadataPart = {
+  path: 'xl/metadata.xml',
+  type: 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheetMetadata+xml',
+  kind: 'sheetMetadata',
+};
