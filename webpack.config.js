@@ -68,6 +68,7 @@ const commands = {
     start: './workbook/commands/start.ts',
     derive: './scripts/derive.ts',
     bench: './tests/bench/bench.ts',
+    simulate: './tests/simulations/simulate.ts',
     package: './scripts/package.ts',
   },
   output: { ...base('commands').output, filename: '[name].cjs' },

@@ -15,6 +15,7 @@ const needs = {
   recalc: ['commands'],
   derive: ['commands'],
   bench: ['commands'],
+  simulate: ['commands'],
   package: ['addin', 'commands'],
 };
 const wholes = { page: ['workbook', 'commands'], all: ['addin', 'workbook', 'commands'] };
