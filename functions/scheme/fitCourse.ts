@@ -1,6 +1,6 @@
 import { InvalidInput } from '../../src/errors';
 import { coefficientEstimate } from '../../src/scheme/coefficientLimits';
-import type { Signal } from '../../src/scheme/experiment';
+import { followed, type Signal } from '../../src/scheme/experiment';
 import { fitMechanism, type MechanismFit } from '../../src/scheme/fitMechanism';
 import { reactionInWords, type Scheme } from '../../src/scheme/scheme';
 import { CellError, type CellValue } from '../cell';
@@ -51,7 +51,8 @@ export default defineFunction({
 });
 
 /** One a species that was observed at all. @throws InvalidInput where the block does not fit times and scheme */
-function signalsOf({ species }: Scheme, times: Column, block: Column): Signal[] {
+function signalsOf(scheme: Scheme, times: Column, block: Column): Signal[] {
+  const { species } = scheme;
   const isRow = times.rows === 1 && times.columns > 1;
   const [lines, width] = isRow ? [block.columns, block.rows] : [block.rows, block.columns];
   const [line, side] = isRow ? ['column', 'row'] : ['row', 'column'];
@@ -65,10 +66,10 @@ function signalsOf({ species }: Scheme, times: Column, block: Column): Signal[] 
       `observed must have a ${line} for each of ${times.numbers.length} times: got ${lines}`,
     );
   }
-  const signals = species.map((_, own): Signal => {
+  const signals = species.map((name, own) => {
     const place = (i: number): number => (isRow ? own * lines + i : i * width + own);
     const readings = times.numbers.flatMap((time, i) => (time === null ? [] : [block.numbers[place(i)]]));
-    return { weights: species.map((_name, one) => (one === own ? 1 : 0)), readings };
+    return followed(scheme, name, readings);
   });
   return signals.filter(({ readings }) => readings.some((reading) => reading !== null));
 }

@@ -15,6 +15,12 @@ import { MechanismModel } from './mechanismModel';
 /** Beyond this many standard uncertainties no limit is looked for. */
 const farthest = 40;
 
+/** Nor beyond this factor: a limit so far away is none. */
+const farthestFactor = 1e6;
+
+/** In ln k, of the others on their way to their best. */
+const longestStep = 1;
+
 /** Digits to which an integration and its readings can agree. */
 const noise = 1e-8;
 
@@ -45,6 +51,7 @@ export function coefficientEstimate(fit: MechanismFit, reaction: number): Estima
     let near = at;
     for (let reach = t; reach <= farthest; reach *= 1.5) {
       const far = at + sign * reach * step;
+      if (reach * step > Math.log(farthestFactor)) return null;
       if (excess(far) > 0) return Math.exp(findRoot(excess, near, far, 1e-7 * step));
       near = far;
     }
@@ -115,7 +122,8 @@ function shorter(
   step: Float64Array,
   squares: number,
 ): { readonly place: Float64Array; readonly squares: number } | undefined {
-  for (let share = 1; share > 0.05; share /= 2) {
+  const longest = step.reduce((most, value) => Math.max(most, Math.abs(value)), longestStep);
+  for (let share = longestStep / longest; share > 0.01; share /= 2) {
     const place = here.map((value, j) => value + share * step[j]);
     const reached = model.squaresAt(place);
     if (reached < squares) return { place, squares: reached };

@@ -8,8 +8,11 @@ const leastTrace = 1e-6;
 /** Below this share of its own length a trace is made up of the others'. */
 const leastOwnShare = 1e-5;
 
-/** Beyond this u(ln k), a factor of twenty either way, readings do not tell a coefficient. */
-const widest = 3;
+/** Beyond this u(ln k), a standard uncertainty as large as the value, readings do not tell a coefficient. */
+const widest = 1;
+
+/** Beyond this correlation it is the other coefficient that is to blame. */
+const entangled = 0.99;
 
 export interface Determination {
   /** u(ln k); `null` where it cannot be told, or there is no scatter to judge by. */
@@ -33,7 +36,8 @@ export interface Determinations {
  * @param columns derivative of every reading with ln k, one a coefficient that was searched
  * @param searched their places in the scheme
  * @param size length of all readings, √Σy²
- * @param deviation residual deviation at the rank found; `null` where none is left
+ * @param deviation residual deviation where so many are fitted; `null` where none is left
+ * @example determine(parseScheme('A -> B'), [Float64Array.of(3, 4)], [0], 10, () => 0.1).of[0].logUncertainty // 0.02
  */
 export function determine(
   scheme: Scheme,
@@ -66,21 +70,24 @@ export function determine(
     factor = factored(columns, kept);
   }
   const scatter = deviation(kept.length);
+  const correlations = correlationsOf(factor, kept, why);
   const of = columns.map((_, j): Determination => {
-    const i = kept.indexOf(j);
     if (why[j] !== '') return { logUncertainty: null, why: why[j] };
     if (scatter === null) return { logUncertainty: null, why: '' };
-    const logUncertainty = scatter / ownLength(factor, i);
+    const logUncertainty = scatter / ownLength(factor, kept.indexOf(j));
     if (logUncertainty <= widest) return { logUncertainty, why: '' };
+    const others = columns.flatMap((_column, other) =>
+      other !== j && Math.abs(correlations[j][other]) > entangled ? [name(other)] : [],
+    );
     return {
       logUncertainty: null,
-      why: `${name(j)} cannot be told: the scatter leaves it open by more than a factor of ${Math.round(Math.exp(widest))} either way`,
+      why: `${name(j)} cannot be told in this scatter: its standard uncertainty is above 100 %${others.length > 0 ? `, since ${others.join(' and ')} can make up for it` : ''}`,
     };
   });
   const gradient = (slopes: ArrayLike<number>): number[] => kept.map((j) => slopes[j]);
   return {
     of,
-    correlations: correlationsOf(factor, kept, why),
+    correlations,
     kept,
     lengthOf: (slopes) => Math.sqrt(combinationVariance(factor, gradient(slopes))),
   };

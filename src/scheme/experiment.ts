@@ -24,7 +24,11 @@ export interface Experiment {
   readonly signals: readonly Signal[];
 }
 
-/** One species followed by its own concentration. */
+/**
+ * One species followed by its own concentration.
+ *
+ * @example followed(parseScheme('A -> B'), 'B', [0, 2]).weights // [0, 1]
+ */
 export const followed = (
   { species }: Scheme,
   name: string,

@@ -1,0 +1,294 @@
+/** Fitted mechanisms against a general-purpose solver, the project's own rate laws, closed forms and chance. */
+import reference from '../../reference/mechanism-fits.json';
+import { fitRateLaw } from '../../../src/order/fit';
+import { halfLifeEstimate } from '../../../src/order/profile';
+import { coefficientEstimate } from '../../../src/scheme/coefficientLimits';
+import { courseOf } from '../../../src/scheme/course';
+import { followed, type Experiment } from '../../../src/scheme/experiment';
+import { fitMechanism } from '../../../src/scheme/fitMechanism';
+import { parseScheme } from '../../../src/scheme/parse';
+import { pairReadings } from '../../../src/series/series';
+import { relative, standardDeviation, mean } from '../../support/compare';
+import { normal } from '../../support/random';
+
+const named = (id: string) => reference.cases.find((c) => c.id === id)!;
+
+/** A run as a block of readings, a column a species. */
+function blockRun(
+  text: string,
+  initial: number[],
+  times: number[],
+  observed: (number | null)[][],
+): Experiment {
+  const scheme = parseScheme(text);
+  const signals = scheme.species.map((name, j) =>
+    followed(
+      scheme,
+      name,
+      observed.map((row) => row[j]),
+    ),
+  );
+  return { initial, times, signals };
+}
+
+test.each(['consecutive', 'reversible'])(
+  'fitMechanism %s agrees with SciPy to 8 digits, its limits to 6',
+  (id) => {
+    const { scheme: text, initial, times, observed, start, ...wanted } = named(id);
+    const scheme = parseScheme(text);
+    const fit = fitMechanism({
+      scheme,
+      start,
+      experiments: [blockRun(text, initial!, times!, observed!)],
+    });
+    expect(fit.degreesOfFreedom).toBe(wanted.degreesOfFreedom);
+    expect(relative(fit.residualSumOfSquares, wanted.residualSumOfSquares)).toBeLessThan(1e-9);
+    wanted.values.forEach((value, j) => {
+      expect(relative(fit.coefficients[j].value, value)).toBeLessThan(1e-8);
+      expect(
+        relative(fit.coefficients[j].standardUncertainty!, wanted.standardUncertainties[j]),
+      ).toBeLessThan(1e-6);
+      wanted.values.forEach((_, i) =>
+        expect(Math.abs(fit.correlations[i][j] - wanted.correlations[i][j])).toBeLessThan(1e-6),
+      );
+      const { lower, upper } = coefficientEstimate(fit, j);
+      expect(relative(lower!, wanted.limits[j][0])).toBeLessThan(1e-6);
+      expect(relative(upper!, wanted.limits[j][1])).toBeLessThan(1e-6);
+    });
+  },
+);
+
+test('fitMechanism over two runs with a factor in common agrees with SciPy to 8 digits', () => {
+  const { scheme, weights, runs, start, ...wanted } = named('shared');
+  const experiments = runs!.map(({ initial, times, readings }) => ({
+    initial,
+    times,
+    signals: [{ weights: weights!, readings, factor: 'absorbance' }],
+  }));
+  const fit = fitMechanism({ scheme: parseScheme(scheme), start, experiments });
+  const [k, factor] = wanted.values;
+  const found = fit.factors.get('absorbance')!;
+  expect(relative(fit.coefficients[0].value, k)).toBeLessThan(1e-8);
+  expect(relative(found.value, factor)).toBeLessThan(1e-8);
+  expect(relative(fit.coefficients[0].standardUncertainty!, wanted.standardUncertainties[0])).toBeLessThan(
+    1e-6,
+  );
+  expect(relative(found.standardUncertainty!, wanted.standardUncertainties[1])).toBeLessThan(1e-6);
+  const { lower, upper } = coefficientEstimate(fit, 0);
+  expect(relative(lower!, wanted.limits[0][0])).toBeLessThan(1e-6);
+  expect(relative(upper!, wanted.limits[0][1])).toBeLessThan(1e-6);
+});
+
+test.each([
+  [1, 'A ->', (t: number) => Math.exp(-0.07 * t)],
+  [2, '2 A -> A', (t: number) => 1 / (1 + 0.07 * t)],
+])(
+  'a single step of order %d with a free factor is the rate law of that order to 8 digits',
+  (order, text, left) => {
+    const times = [0, 1, 2, 4, 6, 8, 10, 15, 20, 30, 40, 60, 80];
+    const scatter = normal(order);
+    const readings = times.map((t) => 0.8 * left(t) + 0.01 * scatter());
+    const law = fitRateLaw(pairReadings(times, readings), { order });
+    const reduced = Math.exp(law.search.logRate);
+    const fit = fitMechanism({
+      scheme: parseScheme(text),
+      start: [0.5],
+      experiments: [{ initial: [1], times, signals: [{ weights: [1], readings, factor: 'start' }] }],
+    });
+    const [{ value, standardUncertainty }] = fit.coefficients;
+    expect(relative(value, reduced)).toBeLessThan(1e-8);
+    expect(relative(fit.factors.get('start')!.value, law.start)).toBeLessThan(1e-8);
+    expect(relative(fit.residualSumOfSquares, law.residualSumOfSquares)).toBeLessThan(1e-7);
+    expect(
+      relative(standardUncertainty! / value, law.standardUncertainties.halfLife! / law.halfLife),
+    ).toBeLessThan(1e-7);
+    // k is as far from its limits as the half life, on the logarithmic scale, the other way round
+    const [own, its] = [coefficientEstimate(fit, 0), halfLifeEstimate(law)];
+    expect(relative((own.lower! * its.upper!) / (value * law.halfLife), 1)).toBeLessThan(1e-7);
+    expect(relative((own.upper! * its.lower!) / (value * law.halfLife), 1)).toBeLessThan(1e-7);
+  },
+);
+
+const times = [0, 2, 4, 7, 11, 16, 24, 36, 55, 80];
+
+/** Closed form of A → B → C from 1, its columns with noise. */
+function consecutive(k1: number, k2: number, noise: number, seed = 1): (number | null)[][] {
+  const scatter = normal(seed);
+  return times.map((t) => {
+    const a = Math.exp(-k1 * t);
+    const b = (k1 / (k2 - k1)) * (a - Math.exp(-k2 * t));
+    return [a, b, 1 - a - b].map((value) => value + noise * scatter());
+  });
+}
+
+const fitConsecutive = (observed: (number | null)[][], start: number[]) =>
+  fitMechanism({
+    scheme: parseScheme('A -> B -> C'),
+    start,
+    experiments: [blockRun('A -> B -> C', [1, 0, 0], times, observed)],
+  });
+
+/** Only some of the columns. */
+const seen = (rows: (number | null)[][], columns: number[]): (number | null)[][] =>
+  rows.map((row) => row.map((value, j) => (columns.includes(j) ? value : null)));
+
+test.each([[[0.05, 0.1]], [[0.035, 0.12]], [[10, 10]], [[50, 1e-5]], [[1e-6, 1e-6]]])(
+  'fitMechanism of exact readings finds k from start values %j',
+  (start) => {
+    const { coefficients, residualSumOfSquares } = fitConsecutive(consecutive(0.12, 0.035, 0), start);
+    expect(relative(coefficients[0].value, 0.12)).toBeLessThan(1e-8);
+    expect(relative(coefficients[1].value, 0.035)).toBeLessThan(1e-8);
+    expect(residualSumOfSquares).toBeLessThan(1e-16);
+  },
+);
+
+test('one column is enough where it shows both steps', () => {
+  const { coefficients } = fitConsecutive(seen(consecutive(0.12, 0.035, 0), [1]), [0.2, 0.02]);
+  expect(relative(coefficients[0].value, 0.12)).toBeLessThan(1e-7);
+  expect(relative(coefficients[1].value, 0.035)).toBeLessThan(1e-7);
+});
+
+test('standard uncertainties are the scatter of many fits', () => {
+  const fits = Array.from({ length: 60 }, (_, seed) =>
+    fitConsecutive(consecutive(0.12, 0.035, 0.01, seed + 1), [0.1, 0.05]),
+  );
+  [0.12, 0.035].forEach((k, j) => {
+    const values = fits.map(({ coefficients }) => coefficients[j].value);
+    const claimed = mean(fits.map(({ coefficients }) => coefficients[j].standardUncertainty!));
+    // 60 fits: a standard deviation is known to 9 %, a mean to u/√60
+    expect(relative(standardDeviation(values), claimed)).toBeLessThan(0.3);
+    expect(Math.abs(mean(values) - k)).toBeLessThan((4 * claimed) / Math.sqrt(60));
+  });
+}, 60_000);
+
+describe('what the readings cannot tell is said', () => {
+  test('a later step that was not looked at', () => {
+    const { coefficients } = fitConsecutive(seen(consecutive(0.12, 0.035, 0.01), [0]), [0.1, 0.1]);
+    expect(coefficients[0].why).toBe('');
+    expect(relative(coefficients[0].value, 0.12)).toBeLessThan(0.1);
+    expect(coefficients[1].why).toBe(
+      'coefficient 2 (B -> C) cannot be told: the readings hardly depend on it',
+    );
+    expect(coefficients[1].standardUncertainty).toBeNull();
+  });
+
+  test('two ways for one reactant to go, of which only it was followed: nothing but their sum', () => {
+    const scheme = parseScheme('A -> B; A -> C');
+    const observed = times.map((t) => [Math.exp(-0.1 * t), null, null]);
+    const experiments = [blockRun('A -> B; A -> C', [1, 0, 0], times, observed)];
+    const { coefficients } = fitMechanism({ scheme, start: [0.2, 0.02], experiments });
+    expect(coefficients.map(({ why }) => why)).toEqual([
+      'coefficient 1 (A -> B) cannot be told apart from coefficient 2 (A -> C): only a combination of them shows',
+      'coefficient 2 (A -> C) cannot be told apart from coefficient 1 (A -> B): only a combination of them shows',
+    ]);
+    expect(relative(coefficients[0].value + coefficients[1].value, 0.1)).toBeLessThan(1e-8);
+  });
+
+  test('an equilibrium too fast to be seen, while the step behind it is told', () => {
+    const scheme = parseScheme('A <-> B; B -> C');
+    const scatter = normal(4);
+    const observed = courseOf(scheme, [300, 200, 0.05], [1, 0, 0], times).map((row) =>
+      [...row].map((value) => value + 0.01 * scatter()),
+    );
+    const experiments = [blockRun('A <-> B; B -> C', [1, 0, 0], times, observed)];
+    const fit = fitMechanism({ scheme, start: [100, 100, 0.1], experiments });
+    expect(fit.coefficients[0].why).toMatch(/^coefficient 1 \(A -> B\) cannot be told/);
+    expect(fit.coefficients[1].why).toMatch(/^coefficient 2 \(B -> A\) cannot be told/);
+    const { value, lower, upper } = coefficientEstimate(fit, 2);
+    expect(Math.abs(value - 0.05)).toBeLessThan(3 * fit.coefficients[2].standardUncertainty!);
+    expect(lower).toBeLessThan(0.05);
+    expect(upper).toBeGreaterThan(0.05);
+    expect(() => coefficientEstimate(fit, 0)).toThrow('cannot be told');
+    expect(relative(fit.coefficients[0].value / fit.coefficients[1].value, 1.5)).toBeLessThan(0.1);
+  });
+
+  test('an equilibrium almost too fast: a value, a lower limit, and no upper one', () => {
+    const scheme = parseScheme('A <-> B; B -> C');
+    const scatter = normal(6);
+    const observed = courseOf(scheme, [300, 200, 0.05], [1, 0, 0], times).map((row) =>
+      [...row].map((value) => value + 0.01 * scatter()),
+    );
+    const experiments = [blockRun('A <-> B; B -> C', [1, 0, 0], times, observed)];
+    const { lower, upper } = coefficientEstimate(fitMechanism({ scheme, start: [1, 1, 1], experiments }), 0);
+    expect(lower).toBeLessThan(300);
+    expect(upper).toBeNull();
+  });
+
+  test('as many readings as coefficients leave no uncertainty', () => {
+    const experiments = [blockRun('A ->', [8], [0, 10], [[null], [4]])];
+    const fit = fitMechanism({ scheme: parseScheme('A ->'), start: [1], experiments });
+    expect(relative(fit.coefficients[0].value, Math.LN2 / 10)).toBeLessThan(1e-8);
+    expect(coefficientEstimate(fit, 0)).toMatchObject({ standardUncertainty: null, degreesOfFreedom: 0 });
+  });
+});
+
+test('a coefficient that is held stays, and has no uncertainty', () => {
+  const observed = consecutive(0.12, 0.035, 0.01);
+  const scheme = parseScheme('A -> B -> C');
+  const experiments = [blockRun('A -> B -> C', [1, 0, 0], times, observed)];
+  const fit = fitMechanism({ scheme, start: [0.12, 1], held: [0], experiments });
+  expect(fit.coefficients[0]).toEqual({ value: 0.12, standardUncertainty: null, why: '' });
+  expect(fit.degreesOfFreedom).toBe(29);
+  const free = fitConsecutive(observed, [0.1, 0.1]);
+  expect(fit.residualSumOfSquares).toBeGreaterThan(free.residualSumOfSquares);
+});
+
+describe('it is refused in words', () => {
+  const scheme = parseScheme('A -> B');
+  const run = (observed: (number | null)[][]) => blockRun('A -> B', [1, 0], [0, 1], observed);
+  const taken = run([
+    [1, null],
+    [0.5, null],
+  ]);
+  test.each([
+    [[0], [taken], 'coefficients must be start values above 0: coefficient 1 (A -> B) (0)'],
+    [
+      [],
+      [taken],
+      'coefficients must be one for each direction of each step: none for coefficient 1 (A -> B)',
+    ],
+    [[1, 1], [taken], 'coefficients must be one for each direction of each step: got 2 for 1'],
+    [
+      [1],
+      [
+        run([
+          [null, null],
+          [null, null],
+        ]),
+      ],
+      'observed must hold readings: none was found',
+    ],
+    [
+      [1],
+      [
+        run([
+          [1, null],
+          [NaN, null],
+        ]),
+      ],
+      'observed must be finite numbers: row 2 (NaN)',
+    ],
+    [[1], [run([[1, null]])], 'observed must be as many as times: got 1 for 2'],
+    [
+      [1],
+      [{ ...taken, initial: [1] }],
+      'initial must hold one concentration a species, in the order A, B: none for B',
+    ],
+  ])('start %j: %#', (start, experiments, words) =>
+    expect(() => fitMechanism({ scheme, start, experiments })).toThrow(words),
+  );
+
+  test('fewer readings than coefficients', () =>
+    expect(() =>
+      fitMechanism({
+        scheme: parseScheme('A <-> B'),
+        start: [1, 1],
+        experiments: [
+          run([
+            [null, null],
+            [0.5, null],
+          ]),
+        ],
+      }),
+    ).toThrow('a fit of 2 numbers needs as many readings: got 1'));
+});
