@@ -90,7 +90,11 @@ async function openPage(
   address: string,
   options: BrowserContextOptions = {},
 ): Promise<BenchPage> {
-  const context = await browser.newContext({ viewport: { width: 1280, height: 800 }, ...options });
+  const context = await browser.newContext({
+    viewport: { width: 1280, height: 800 },
+    permissions: ['clipboard-read', 'clipboard-write'],
+    ...options,
+  });
   const page = await context.newPage();
   const complaints = listenTo(page, address);
   // as in a browser that cannot ask where to save: what is saved can then be caught
