@@ -1,4 +1,5 @@
 /** The local workbook: a grid with every PACE function live, and the pane beside it. */
+import { h } from '../../taskpane/h';
 import { mountPane } from '../../taskpane/pane';
 import '../../taskpane/pane.css';
 import { demoWorkbook } from '../demo/demo';
@@ -45,4 +46,9 @@ async function start(): Promise<void> {
   offerToScripts(grid, port);
 }
 
-void start();
+start().catch((error: unknown) => {
+  const words = error instanceof Error ? error.message : String(error);
+  part('grid').replaceChildren(
+    h('p', { className: 'waiting', role: 'alert' }, `the sheet could not be shown: ${words}`),
+  );
+});

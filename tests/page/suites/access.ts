@@ -73,7 +73,7 @@ async function violations(
   if (!isThere) await page.evaluate(axe.source);
   const found = await page.evaluate(
     async ([parts, only]) => {
-      const { axe: checker } = window as unknown as { axe: typeof import('axe-core') };
+      const { axe: checker } = window as unknown as { axe: typeof axe };
       const options = only ? { runOnly: { type: 'rule' as const, values: [...only] } } : {};
       const { violations: all } = await checker.run({ include: [...parts] }, options);
       return all.flatMap(({ id, nodes }) =>
