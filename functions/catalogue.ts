@@ -11,6 +11,7 @@ import orders from './order/orders';
 import overlayOrder from './order/overlayOrder';
 import survey from './order/survey';
 import unit from './order/unit';
+import plan from './plan/plan';
 import along from './rate/along';
 import between from './rate/between';
 import event from './rate/event';
@@ -75,6 +76,7 @@ export const catalogue: readonly CellFunction[] = [
   timeTo,
   course,
   fitCourse,
+  plan,
   check,
 ];
 

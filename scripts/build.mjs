@@ -14,7 +14,15 @@ const everywhere = ['package-lock.json', 'webpack.config.js', 'src', 'functions'
 const sources = {
   addin: [...everywhere, 'taskpane', 'assets', 'manifest.xml'],
   workbook: [...everywhere, 'taskpane', 'workbook', 'assets'],
-  commands: [...everywhere, 'taskpane', 'workbook', 'scripts', 'tests/bench', 'tests/simulations', 'tests/support'],
+  commands: [
+    ...everywhere,
+    'taskpane',
+    'workbook',
+    'scripts',
+    'tests/bench',
+    'tests/simulations',
+    'tests/support',
+  ],
 };
 
 /** @param names of bundles; says one line when there is something to build. @throws with the first errors of a build */

@@ -17,7 +17,8 @@ describe.each(each(catalogue))('%s', (_, f) => {
     expect(given.length).toBe(expected.length);
     expected.forEach((row, r) =>
       row.forEach((cell, c) => {
-        if (typeof cell === 'number') expect(relativeTo(cell, given[r][c])).toBeLessThan(f.example.within ?? 1e-9);
+        if (typeof cell === 'number')
+          expect(relativeTo(cell, given[r][c])).toBeLessThan(f.example.within ?? 1e-9);
         else expect(given[r][c]).toEqual(cell);
       }),
     );
