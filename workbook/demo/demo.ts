@@ -1,7 +1,24 @@
-/** The workbook that opens first: three runs of an invented lab that makes effervescent cleaning tablets. */
+/** The workbook that opens first: runs of an invented lab that makes effervescent cleaning tablets. */
 import type { BookModel } from '../engine/engine';
+import { doses } from './doses';
 import { dyeRun } from './dyeRun';
+import { everyFunction } from './everyFunction';
 import { gasRun } from './gasRun';
 import { massLossRun } from './massLossRun';
+import { stability } from './stability';
+import { timingCard } from './timingCard';
+import { twoSteps } from './twoSteps';
 
-export const demoWorkbook = (): BookModel => ({ sheets: [gasRun(), massLossRun(), dyeRun()], names: [] });
+export const demoWorkbook = (): BookModel => ({
+  sheets: [
+    gasRun(),
+    massLossRun(),
+    dyeRun(),
+    doses(),
+    timingCard(),
+    stability(),
+    twoSteps(),
+    everyFunction(),
+  ],
+  names: [],
+});
