@@ -47,6 +47,8 @@ const addin = {
 const workbook = {
   ...base('workbook'),
   entry: { workbook: './workbook/page/main.ts' },
+  // several files are compiled side by side while they arrive
+  optimization: { ...base('workbook').optimization, splitChunks: { chunks: 'all', maxSize: 1_000_000 } },
   plugins: [
     new MiniCssExtractPlugin(),
     new HtmlWebpackPlugin({
