@@ -3,31 +3,27 @@ import { coefficientEstimate } from '../../src/scheme/coefficientLimits';
 import { followed, type Signal } from '../../src/scheme/experiment';
 import { fitMechanism, type MechanismFit } from '../../src/scheme/fitMechanism';
 import { reactionInWords, type Scheme } from '../../src/scheme/scheme';
+import { block, columnsBeside } from '../block';
 import { CellError, type CellValue } from '../cell';
-import { readColumn, type Column } from '../column';
+import type { Column } from '../column';
 import { detail } from '../commonParameters';
 import { defineFunction } from '../define';
-import { required, type Parameter } from '../parameters';
 import { standardRow, standardRowHeadings } from '../results';
 import { filled, schemeMethod, schemeParameters, speciesAt, stepAt, timesOf } from './schemeParameters';
 
 /** Beyond this correlation two coefficients are hard to tell apart, which the answer says. */
 const closeCorrelation = 0.95;
 
-const observed: Parameter<Column> = {
-  kind: 'column',
+const observed = block({
   help: 'readings, a column a species in order of first appearance; blank where one was not observed',
   unit: 'as initial',
-  dimension: 'matrix',
-  optional: false,
-  read: (cells, name) => readColumn(required(cells, name)),
-};
+});
 
 export default defineFunction({
   name: 'FITCOURSE',
   family: 'mechanism',
   summary: 'Rate coefficients of a written mechanism, fitted to the readings of several species at once.',
-  method: `${schemeMethod} The coefficients given are where the search starts. Least squares over all readings as they are, each counting alike, so all columns must be in one unit; coefficients are searched as logarithms, with sensitivities integrated beside the concentrations. Limits are those of the profile likelihood. A coefficient that the readings cannot tell is #N/A and says why. With detail: a row a coefficient, and after the standard row the one it is hard to tell from.`,
+  method: `${schemeMethod} The coefficients given are where the search starts. Least squares over all readings as they are, each counting alike, so all columns must be in one unit; coefficients are searched as logarithms, with sensitivities integrated beside the concentrations; where start values lead to a poorer fit than coefficients that suit the length of the run, the better is taken. Limits are those of the profile likelihood. A coefficient that the readings cannot tell, or whose standard uncertainty exceeds itself, is #N/A and says why. With detail: a row a coefficient, and after the standard row the one it is hard to tell from.`,
   parameters: { ...schemeParameters, observed, detail: detail() },
   result: { unit: 'concentration^(1−n) per time', shape: 'table' },
   // A halves every 10, B is not observed
@@ -37,12 +33,12 @@ export default defineFunction({
     within: 1e-8,
   },
   reference: 'doi:10.1007/s10543-023-00967-x; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
-  run({ scheme, coefficients, initial, times, observed: block, detail: isDetailed }) {
+  run({ scheme, coefficients, initial, times, observed: readings, detail: isDetailed }) {
     const start = filled(coefficients, 'coefficients', stepAt(scheme));
     const experiment = {
       initial: filled(initial, 'initial', speciesAt(scheme)),
       times: timesOf(times),
-      signals: signalsOf(scheme, times, block),
+      signals: signalsOf(scheme, times, readings),
     };
     const fit = fitMechanism({ scheme, start, experiments: [experiment] });
     if (isDetailed) return start.map((_, place) => detailedRow(scheme, fit, place));
@@ -51,27 +47,23 @@ export default defineFunction({
 });
 
 /** One a species that was observed at all. @throws InvalidInput where the block does not fit times and scheme */
-function signalsOf(scheme: Scheme, times: Column, block: Column): Signal[] {
+function signalsOf(scheme: Scheme, times: Column, readings: Column): Signal[] {
   const { species } = scheme;
-  const isRow = times.rows === 1 && times.columns > 1;
-  const [lines, width] = isRow ? [block.columns, block.rows] : [block.rows, block.columns];
-  const [line, side] = isRow ? ['column', 'row'] : ['row', 'column'];
-  if (width !== species.length) {
+  const columns = columnsBeside(readings, times, { block: 'observed', beside: 'times' });
+  if (columns.length !== species.length) {
     throw new InvalidInput(
-      `observed must have a ${side} for each of ${species.length} species (${species.join(', ')}): got ${width}`,
+      `observed must have a column for each of ${species.length} species (${species.join(', ')}): got ${columns.length}`,
     );
   }
-  if (lines !== times.numbers.length) {
-    throw new InvalidInput(
-      `observed must have a ${line} for each of ${times.numbers.length} times: got ${lines}`,
-    );
-  }
-  const signals = species.map((name, own) => {
-    const place = (i: number): number => (isRow ? own * lines + i : i * width + own);
-    const readings = times.numbers.flatMap((time, i) => (time === null ? [] : [block.numbers[place(i)]]));
-    return followed(scheme, name, readings);
-  });
-  return signals.filter(({ readings }) => readings.some((reading) => reading !== null));
+  return columns
+    .map(({ numbers }, j) =>
+      followed(
+        scheme,
+        species[j],
+        numbers.filter((_, i) => times.numbers[i] !== null),
+      ),
+    )
+    .filter((signal) => signal.readings.some((reading) => reading !== null));
 }
 
 function detailedRow(scheme: Scheme, fit: MechanismFit, place: number): CellValue[] {

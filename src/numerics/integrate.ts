@@ -29,7 +29,7 @@ export interface IntegrationOptions {
   readonly sensitivities?: boolean;
   /** Called every so many steps: to show how far it is, or to throw and so end it. */
   readonly watch?: (time: number, steps: number) => void;
-  /** In multiplications, about; 2.5e8, one or two seconds, when left out. */
+  /** In multiplications, about; one or two seconds when left out. */
   readonly workLimit?: number;
 }
 
@@ -42,6 +42,9 @@ export interface Trajectory {
   /** In the unit of the work limit. */
   readonly work: number;
 }
+
+/** In multiplications, about: one or two seconds. */
+const mostWork = 2.5e8;
 
 const stepsBetweenLooks = 200;
 
@@ -64,64 +67,100 @@ export function integrate(
   times: Float64Array,
   options: IntegrationOptions = {},
 ): Trajectory {
-  const { tolerance = 1e-9, watch, workLimit = 2.5e8 } = options;
-  const parameters = options.sensitivities ? system.parameters : 0;
-  const method = new RosenbrockStep(system, parameters);
-  const here = newBlocks(system.size, 1 + parameters);
-  here[0].set(start);
-  const scale = new ToleranceScale(here[0], tolerance);
-  const states: Float64Array[] = [];
-  const sensitivities: Blocks[] = [];
-  const keep = (share: number): void => {
-    const kept = here.map((block, i) => {
-      const out = new Float64Array(block.length);
-      if (share > 0) method.between(here, share, i, out);
-      else out.set(block);
-      return out;
-    });
-    states.push(kept[0]);
-    if (parameters > 0) sensitivities.push(kept.slice(1));
-  };
-  const stop = (reason: StopReason): IntegrationStopped =>
-    new IntegrationStopped(reason, time, steps, here[0].slice());
-  const end = times.length > 0 ? times[times.length - 1] : 0;
-  const stepWork = workOfStep(system.size, parameters);
-  let time = 0;
-  let steps = 0;
-  let wanted = 0;
-  while (wanted < times.length && times[wanted] <= 0) {
-    keep(0);
-    wanted++;
+  return new Integration(system, start, times, options).run();
+}
+
+class Integration {
+  private readonly method: RosenbrockStep;
+  private readonly scale: ToleranceScale;
+  private readonly here: Blocks;
+  private readonly states: Float64Array[] = [];
+  private readonly sensitivities: Blocks[] = [];
+  private readonly stepWork: number;
+  private time = 0;
+  private steps = 0;
+
+  constructor(
+    private readonly system: SensitiveSystem,
+    start: ArrayLike<number>,
+    private readonly times: Float64Array,
+    private readonly options: IntegrationOptions,
+  ) {
+    const parameters = options.sensitivities ? system.parameters : 0;
+    this.method = new RosenbrockStep(system, parameters);
+    this.here = newBlocks(system.size, 1 + parameters);
+    this.here[0].set(start);
+    this.scale = new ToleranceScale(this.here[0], options.tolerance ?? 1e-9);
+    this.stepWork = workOfStep(system.size, parameters);
   }
-  if (wanted === times.length) return { states, sensitivities, steps, work: 0 };
-  method.leave(here);
-  let step = Math.min(end, firstStep(system, here[0]));
-  let mayGrow = fastestGrowth;
-  while (wanted < times.length) {
-    if (++steps * stepWork > workLimit) throw stop('too much work');
-    if (watch && steps % stepsBetweenLooks === 0) watch(time, steps);
-    const isLast = time + step * (1 + 1e-12) >= end;
-    const length = isLast ? end - time : step;
-    if (!(time + length > time)) throw stop('no step is small enough');
-    const error = method.attempt(here, length) ? scale.errorOf(here, method.next, method.error) : Infinity;
-    if (!(error <= 1)) {
-      step = length * Math.max(fastestShrinking, caution * error ** -0.2 || 0);
-      mayGrow = 1;
-      continue;
+
+  run(): Trajectory {
+    const end = this.times.at(-1) ?? 0;
+    this.keepUpTo(0, 0);
+    let step = Math.min(end, firstStep(this.system, this.here[0]));
+    let mostGrowth = fastestGrowth;
+    if (end > 0) this.method.leave(this.here);
+    while (this.time < end) {
+      this.countStep();
+      const isLast = this.time + step * (1 + 1e-12) >= end;
+      const length = isLast ? end - this.time : step;
+      const error = this.errorOf(length);
+      const change = caution * Math.max(error, 1e-12) ** -0.2;
+      if (error <= 1) {
+        this.arrive(isLast ? end : this.time + length, length);
+        step = length * Math.min(mostGrowth, Math.max(fastestShrinking, change));
+        mostGrowth = fastestGrowth;
+      } else {
+        step = length * Math.max(fastestShrinking, change);
+        mostGrowth = 1;
+      }
     }
-    const reached = isLast ? end : time + length;
-    for (; wanted < times.length && times[wanted] <= reached; wanted++) {
-      keep((times[wanted] - time) / length);
-    }
-    here.forEach((block, i) => block.set(method.next[i]));
-    scale.follow(here[0]);
-    time = reached;
-    if (wanted === times.length) break;
-    method.leave(here);
-    step = length * Math.min(mayGrow, Math.max(fastestShrinking, caution * Math.max(error, 1e-12) ** -0.2));
-    mayGrow = fastestGrowth;
+    const { states, sensitivities, steps } = this;
+    return { states, sensitivities, steps, work: steps * this.stepWork };
   }
-  return { states, sensitivities, steps, work: steps * stepWork };
+
+  private countStep(): void {
+    const { workLimit = mostWork, watch } = this.options;
+    if (++this.steps * this.stepWork > workLimit) throw this.stopped('too much work');
+    if (watch && this.steps % stepsBetweenLooks === 0) watch(this.time, this.steps);
+  }
+
+  /** Of a step of this length, as a multiple of what is allowed. */
+  private errorOf(length: number): number {
+    if (!(this.time + length > this.time)) throw this.stopped('no step is small enough');
+    const { method, here } = this;
+    return method.attempt(here, length) ? this.scale.errorOf(here, method.next, method.error) : Infinity;
+  }
+
+  private arrive(reached: number, length: number): void {
+    this.keepUpTo(reached, length);
+    for (let block = 0; block < this.here.length; block++) this.here[block].set(this.method.next[block]);
+    this.scale.follow(this.here[0]);
+    this.method.leave(this.here);
+    this.time = reached;
+  }
+
+  /** What was asked for on the way of a step, read off between its ends. */
+  private keepUpTo(reached: number, length: number): void {
+    const { times, states, here, time } = this;
+    for (let next = states.length; next < times.length && times[next] <= reached; next++) {
+      const share = length > 0 ? (times[next] - time) / length : 0;
+      const [state, ...sensitivities] = here.map((block, i) => this.at(share, block, i));
+      states.push(state);
+      if (sensitivities.length > 0) this.sensitivities.push(sensitivities);
+    }
+  }
+
+  private at(share: number, start: Float64Array, block: number): Float64Array {
+    if (share === 0) return start.slice();
+    const out = new Float64Array(start.length);
+    this.method.between(this.here, share, block, out);
+    return out;
+  }
+
+  private stopped(reason: StopReason): IntegrationStopped {
+    return new IntegrationStopped(reason, this.time, this.steps, this.here[0].slice());
+  }
 }
 
 /** Multiplications of one step, about. */

@@ -12,7 +12,7 @@ import { readingsOf, type Experiment, type Reading } from './experiment';
 import type { Scheme } from './scheme';
 
 /** Work on all courses of one fit and its limits, in the integration's unit: some seconds. */
-const mostWork = 6e8;
+const mostWork = 4e8;
 
 /** How far the search may go from its start, in ln k: a factor of 10²⁶ either way. */
 const reach = 60;

@@ -124,7 +124,7 @@ describe('PACE.FITCOURSE', () => {
     ],
     [
       '=PACE.FITCOURSE("A -> B",1,{1;0},{0;1;2},{1,;0.5,})',
-      '#VALUE! observed must have a row for each of 3 times: got 2',
+      '#VALUE! observed must have 3 rows, as many as times: got 2 rows of 2 cells',
     ],
     ['=PACE.FITCOURSE("A -> B",1,{1;0},{0;1},{,;,})', '#VALUE! observed must hold readings: none was found'],
     ['=PACE.FITCOURSE("A -> B",1,{1;0},{0;1},{1,;#DIV/0!,})', '#DIV/0! '],

@@ -233,6 +233,28 @@ test('a coefficient that is held stays, and has no uncertainty', () => {
   expect(fit.residualSumOfSquares).toBeGreaterThan(free.residualSumOfSquares);
 });
 
+test('what watches can end a fit', () => {
+  const watch = (): void => {
+    throw new RangeError('enough');
+  };
+  const scheme = parseScheme('A -> B; 2 B -> B + C; B + C -> A + C');
+  const observed = [0.4, 40, 4000].map((t) => [Math.exp(-t), null, null]);
+  const experiments = [
+    {
+      initial: [1, 0, 0],
+      times: [0.4, 40, 4000],
+      signals: [
+        followed(
+          scheme,
+          'A',
+          observed.map(([a]) => a),
+        ),
+      ],
+    },
+  ];
+  expect(() => fitMechanism({ scheme, start: [0.04, 3e7, 1e4], experiments, watch })).toThrow('enough');
+});
+
 describe('it is refused in words', () => {
   const scheme = parseScheme('A -> B');
   const run = (observed: (number | null)[][]) => blockRun('A -> B', [1, 0], [0, 1], observed);
