@@ -25,8 +25,8 @@ export class IntegrationStopped extends Error {
 export interface IntegrationOptions {
   /** Error allowed in one step, relative to the size of each number; 1e-9 when left out. */
   readonly tolerance?: number;
-  /** Whether sensitivities are carried along. */
-  readonly sensitivities?: boolean;
+  /** Places of the parameters whose sensitivities are carried along; none when left out. */
+  readonly sensitivities?: readonly number[];
   /** Called every so many steps: to show how far it is, or to throw and so end it. */
   readonly watch?: (time: number, steps: number) => void;
   /** In multiplications, about; one or two seconds when left out. */
@@ -36,7 +36,7 @@ export interface IntegrationOptions {
 export interface Trajectory {
   /** One state a time asked for, in order. */
   readonly states: readonly Float64Array[];
-  /** For each time, one s = ∂y/∂θ a parameter; empty where they were not asked for. */
+  /** For each time, one s = ∂y/∂θ a parameter asked for; empty where none was. */
   readonly sensitivities: readonly Blocks[];
   readonly steps: number;
   /** In the unit of the work limit. */
@@ -86,12 +86,12 @@ class Integration {
     private readonly times: Float64Array,
     private readonly options: IntegrationOptions,
   ) {
-    const parameters = options.sensitivities ? system.parameters : 0;
+    const parameters = options.sensitivities ?? [];
     this.method = new RosenbrockStep(system, parameters);
-    this.here = newBlocks(system.size, 1 + parameters);
+    this.here = newBlocks(system.size, 1 + parameters.length);
     this.here[0].set(start);
     this.scale = new ToleranceScale(this.here[0], options.tolerance ?? 1e-9);
-    this.stepWork = workOfStep(system.size, parameters);
+    this.stepWork = workOfStep(system.size, parameters.length);
   }
 
   run(): Trajectory {

@@ -21,6 +21,7 @@ export class RosenbrockStep {
   /** After {@link attempt}: by how much it may be off. */
   readonly error: Blocks;
 
+  private readonly blocks: number;
   private readonly increments: readonly Blocks[];
   private readonly trial: Blocks;
   private readonly right: Float64Array;
@@ -30,13 +31,14 @@ export class RosenbrockStep {
   private readonly dense: readonly Blocks[];
   private isDenseReady = false;
 
-  /** @param parameters how many sensitivities are carried: all of the system's, or 0 */
+  /** @param parameters places of those whose sensitivities are carried along */
   constructor(
     private readonly system: SensitiveSystem,
-    private readonly parameters: number,
+    private readonly parameters: readonly number[],
   ) {
     const { size } = system;
-    const blocks = 1 + parameters;
+    const blocks = 1 + parameters.length;
+    this.blocks = blocks;
     this.next = newBlocks(size, blocks);
     this.trial = newBlocks(size, blocks);
     this.increments = Array.from({ length: stages }, () => newBlocks(size, blocks));
@@ -61,11 +63,11 @@ export class RosenbrockStep {
     for (let i = 0; i < size; i++) this.factors[i * size + i] += 1 / (step * gamma);
     if (!factorLu(this.factors, size, this.pivots)) return false;
     for (let stage = 0; stage < stages; stage++) {
-      for (let block = 0; block <= this.parameters; block++) this.place(from, stage, block);
-      for (let block = 0; block <= this.parameters; block++) this.solve(from, stage, block, step);
+      for (let block = 0; block < this.blocks; block++) this.place(from, stage, block);
+      for (let block = 0; block < this.blocks; block++) this.solve(from, stage, block, step);
     }
     const last = this.increments[stages - 1];
-    for (let block = 0; block <= this.parameters; block++) {
+    for (let block = 0; block < this.blocks; block++) {
       for (let i = 0; i < size; i++) this.next[block][i] = this.trial[block][i] + last[block][i];
     }
     return true;
@@ -87,8 +89,9 @@ export class RosenbrockStep {
     const { system, right, trial, increments } = this;
     if (block === 0) system.derivative(trial[0], right);
     else {
-      system.sensitivitySlope(trial[0], trial[block], block - 1, right);
-      system.addSensitivityCurvature(from[0], from[block], block - 1, increments[stage][0], right);
+      const parameter = this.parameters[block - 1];
+      system.sensitivitySlope(trial[0], trial[block], parameter, right);
+      system.addSensitivityCurvature(from[0], from[block], parameter, increments[stage][0], right);
     }
     const weights = couplings[stage];
     const increment = increments[stage][block];
@@ -117,7 +120,7 @@ export class RosenbrockStep {
 
   private prepareDense(): void {
     densities.forEach((weights, row) => {
-      for (let block = 0; block <= this.parameters; block++) {
+      for (let block = 0; block < this.blocks; block++) {
         const out = this.dense[row][block].fill(0);
         for (let stage = 0; stage < stages; stage++) {
           const increment = this.increments[stage][block];

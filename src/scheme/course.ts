@@ -15,10 +15,8 @@ const runaway = 1e12;
 /** Of the highest concentration at the start: where a species of broken order counts as spent. */
 const spent = 1e-14;
 
-export interface CourseOptions extends Pick<IntegrationOptions, 'tolerance' | 'watch' | 'workLimit'> {
-  /** Whether ∂c/∂ln k is wanted too. */
-  readonly sensitivities?: boolean;
-}
+/** Sensitivities are ∂c/∂ln k; a coefficient's place is its parameter. */
+export type CourseOptions = IntegrationOptions;
 
 /**
  * Integrates a scheme from time 0.
@@ -47,7 +45,7 @@ export function courseOf(
 /**
  * The same with all that the integration knows, in the order of the times.
  *
- * @example trajectoryOf(parseScheme('A ->'), [1], [1], [1], { sensitivities: true }).sensitivities[0][0][0] // -0.3678794
+ * @example trajectoryOf(parseScheme('A ->'), [1], [1], [1], { sensitivities: [0] }).sensitivities[0][0][0] // -0.3678794
  */
 export function trajectoryOf(
   scheme: Scheme,
@@ -67,7 +65,7 @@ export function trajectoryOf(
   return {
     ...found,
     states: Array.from(place, (i) => found.states[i]),
-    sensitivities: options.sensitivities ? Array.from(place, (i) => found.sensitivities[i]) : [],
+    sensitivities: found.sensitivities.length > 0 ? Array.from(place, (i) => found.sensitivities[i]) : [],
   };
 }
 

@@ -138,7 +138,7 @@ export class MechanismModel implements LeastSquaresModel {
 
   private integrate(coefficients: Float64Array): void {
     const { scheme, experiments, tolerance, watch } = this.problem;
-    const options = { tolerance, watch, sensitivities: true, workLimit: mostWork / 20 };
+    const options = { tolerance, watch, sensitivities: this.searched, workLimit: mostWork / 20 };
     const courses = experiments.map(({ initial, times }) => {
       this.work.done += options.workLimit; // should the course break off
       const course = trajectoryOf(scheme, coefficients, initial, times, options);
@@ -148,9 +148,9 @@ export class MechanismModel implements LeastSquaresModel {
     this.readings.forEach(({ experiment, place, signal: { weights } }, i) => {
       const { states, sensitivities } = courses[experiment];
       this.expected[i] = combined(weights, states[place]);
-      this.searched.forEach((coefficient, j) => {
-        this.columns[j][i] = combined(weights, sensitivities[place][coefficient]);
-      });
+      for (let j = 0; j < this.parameters; j++) {
+        this.columns[j][i] = combined(weights, sensitivities[place][j]);
+      }
     });
   }
 
