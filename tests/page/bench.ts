@@ -51,8 +51,7 @@ export interface BenchPage {
 export const longestStart = 240_000; // ms
 
 export async function startBench(): Promise<PageBench> {
-  if (!process.env.NB)
-    execFileSync(process.execPath, [join(root, 'scripts', 'run.mjs'), 'build', 'page'], { stdio: 'inherit' });
+  execFileSync(process.execPath, [join(root, 'scripts', 'run.mjs'), 'build', 'page'], { stdio: 'inherit' });
   const { server, address } = await startServer('--no-open', '--port', '0');
   const browser = await launchBrowser();
   return {

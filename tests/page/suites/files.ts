@@ -52,6 +52,8 @@ export function filesSuite(sheet: () => BenchPage): void {
     'xl/charts/chart7.xml': strToU8(chart),
   });
 
+  beforeAll(() => sheet().showDemo());
+
   test('the demo is saved as a workbook with its formulas, their values and what was typed', async () => {
     await sheet().type("'Gas run'!Q1", '=PACE.EVENT({20;25;40})');
     const { name, bytes } = await saved();
