@@ -6,7 +6,7 @@ import type { WorkbookPort } from './port';
 import { putInStep } from './steps/putIn';
 import { rateStep } from './steps/rate';
 import { runStep } from './steps/run';
-import { answerOf, remembering, type Scene } from './scene';
+import { createScenes, type Scene } from './scene';
 import { createStore, type State } from './store';
 
 export interface PaneOptions {
@@ -18,8 +18,8 @@ export interface PaneOptions {
 export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: PaneOptions = {}): () => void {
   const store = createStore();
   const actions = createActions(store, port);
-  const draw = (state: State): HTMLElement => view({ state, answer: answer(state) }, actions, port.host);
-  const answer = remembering(answerOf);
+  const sceneOf = createScenes();
+  const draw = (state: State): HTMLElement => view(sceneOf(state), actions, port.host);
   const pane = draw(store.state);
   root.replaceChildren(pane);
 
@@ -62,7 +62,7 @@ export function view(scene: Scene, actions: Actions, host: string): HTMLElement 
     'div',
     { className: 'flaskpace' },
     h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host)),
-    runStep(scene.state, actions),
+    runStep(scene, actions),
     rateStep(scene, actions),
     putInStep(scene, actions),
     h('p', { className: `notice ${notice?.tone ?? ''}`, role: 'status' }, notice?.words ?? ''),

@@ -9,7 +9,7 @@ import { button, checkField, step, textField } from './fields';
 
 const title = '3 Put it in';
 
-export function putInStep({ state, answer }: Scene, actions: Actions): HTMLElement {
+export function putInStep({ state, rate: answer }: Scene, actions: Actions): HTMLElement {
   const { table, run, rate, put } = state;
   if (!table || !run)
     return step(

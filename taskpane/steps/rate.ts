@@ -19,7 +19,10 @@ const kinds: readonly (readonly [RateKind, string])[] = [
   ['column', 'Whole column'],
 ];
 
-export function rateStep({ state: { table, run, rate, put }, answer }: Scene, actions: Actions): HTMLElement {
+export function rateStep(
+  { state: { table, run, rate, put }, rate: answer }: Scene,
+  actions: Actions,
+): HTMLElement {
   if (!table || !run || !answer)
     return step('rate', '2 Rate', h('p', { className: 'hint' }, 'Choose a run first.'));
   const unit = rateUnit(headingOf(table, run.readingColumn), headingOf(table, run.timeColumn));

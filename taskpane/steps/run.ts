@@ -5,10 +5,14 @@ import type { Actions } from '../actions';
 import { h } from '../h';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
 import { runPlot } from '../plots/runPlot';
-import type { State } from '../store';
+import type { Scene } from '../scene';
+import { findingsList } from './findings';
 import { button, selectField, step, type Choice } from './fields';
 
-export function runStep({ table, run, proposal, hint }: State, actions: Actions): HTMLElement {
+export function runStep(
+  { state: { table, run, proposal, hint }, check }: Scene,
+  actions: Actions,
+): HTMLElement {
   if (!table || !run) {
     return step(
       'run',
@@ -43,6 +47,7 @@ export function runStep({ table, run, proposal, hint }: State, actions: Actions)
     proposal
       ? button(`Use ${areaName(proposal.area)} instead`, () => void actions.chooseProposal())
       : button('Use the selected cells', () => void actions.chooseSelection()),
+    check && findingsList(check),
     caution(table, run),
   );
 }

@@ -247,3 +247,22 @@ test('an unmounted pane leaves nothing and listens no more', async () => {
   await settled();
   expect(root.children).toHaveLength(0);
 });
+
+const faults: Readonly<Record<number, unknown>> = { 2: '16,0', 4: 'spilt', 6: 0, 7: '<0.1', 8: 900 };
+const faultyRun = times.map((t, i) => [t, faults[i] ?? 100 * 0.9 ** i] as [number, number]);
+
+test('what could spoil a result stands at the run: three at once, the rest on demand', async () => {
+  await open({ Faulty: [['t / s', 'c / (mmol/L)'], ...faultyRun] });
+  const count = Number(/^(\d+) things to look at$/.exec(text('.findings .count'))![1]);
+  expect(count).toBeGreaterThan(3);
+  expect(root.querySelectorAll('.findings > ul > li')).toHaveLength(3);
+  expect(text('.findings summary')).toBe(`and ${count - 3} more`);
+  expect(root.querySelectorAll('.findings li')).toHaveLength(count);
+  expect(text('.findings')).toContain('(row 10)'); // where 900 stands
+});
+
+test('a clean run is called so, quietly', async () => {
+  await open({ Clean: [['t / s', 'c / (mmol/L)'], ...times.map((t, i) => [t, 100 * 0.6 ** i])] });
+  expect(text('.findings .count')).toBe('nothing found in 11 pairs');
+  expect(root.querySelector('.findings li')).toBeNull();
+});
