@@ -26,9 +26,9 @@ export default defineFunction({
     unit: optional(text({ help: 'unit of the pressures' }), 'kPa'),
   },
   result: { unit: 'mol', shape: 'as given' },
-  // 22.710 954 64 L at 0 °C hold 1 mol at 100 kPa (CODATA 2022)
+  // 22.710 954 641 485 57 L at 0 °C hold 1 mol at 100 kPa (CODATA 2022)
   example: {
-    formula: '=PACE.GASPRESSURE({0;100},"22.71095464 L",0)',
+    formula: '=PACE.GASPRESSURE({0;100},"22.71095464148557 L",0)',
     equals: [[0], [1]],
   },
   reference: 'doi:10.1351/goldbook.I02935',

@@ -28,9 +28,9 @@ export default defineFunction({
     ),
   },
   result: { unit: 'mol', shape: 'as given' },
-  // reference conditions of IUPAC: 0 °C and 100 kPa, where an ideal gas takes 22.710 954 64 L/mol
+  // reference conditions of IUPAC: 0 °C and 100 kPa, where an ideal gas takes 22.710 954 641 485 57 L/mol (CODATA 2022)
   example: {
-    formula: '=PACE.GASVOLUME({0;22.71095464},0,100)',
+    formula: '=PACE.GASVOLUME({0;22.71095464148557},0,100)',
     equals: [[0], [0.001]],
   },
   reference: 'IAPWS SR1-86(1992); doi:10.1351/goldbook.I02935',

@@ -9,6 +9,7 @@ import {
   nearestWindow,
   type LocalFit,
 } from './localPolynomial';
+import { scatterAlong, type Scatter } from './scatter';
 import { defaultWindow } from './window';
 
 export interface TangentOptions {
@@ -24,8 +25,8 @@ interface Window {
   readonly points: number;
   readonly degree: number;
   readonly stoichiometricNumber: number;
-  /** The number of points was left to be chosen from the data. */
-  readonly isChosen: boolean;
+  /** Of one degree more, where the number of points was chosen from the data. */
+  readonly scatter?: Scatter;
 }
 
 function settle(series: Series, { points, degree = 2, stoichiometricNumber }: TangentOptions): Window {
@@ -43,12 +44,23 @@ function settle(series: Series, { points, degree = 2, stoichiometricNumber }: Ta
     if (points > count)
       throw new InvalidInput(`points must not exceed the ${count} readings there are: got ${points}`);
   }
-  return {
-    points: points ?? defaultWindow(series, degree),
-    isChosen: points === undefined,
-    degree,
-    stoichiometricNumber: stoichiometricNumberFor(series, stoichiometricNumber),
-  };
+  const nu = stoichiometricNumberFor(series, stoichiometricNumber);
+  if (points !== undefined) return { points, degree, stoichiometricNumber: nu };
+  const chosen = defaultWindow(series, degree);
+  const window = { points: chosen, degree, stoichiometricNumber: nu };
+  return canBendMore(series, chosen, degree)
+    ? { ...window, scatter: scatterAlong(series, chosen, degree + 1) }
+    : window;
+}
+
+/** Every window can carry one degree more and leave scatter to judge by. */
+function canBendMore({ times, distinctTimes }: Series, points: number, degree: number): boolean {
+  if (times.length <= degree + 2 || points < degree + 2) return false;
+  if (points === times.length) return distinctTimes >= degree + 2;
+  for (let first = 0; first + points <= times.length; first++) {
+    if (differentTimes(times, first, points) < degree + 2) return false;
+  }
+  return true;
 }
 
 /**
@@ -71,23 +83,31 @@ const finer = emptyLocalFit();
 
 function rateIn(series: Series, window: Window, first: number, time: number): Estimate {
   const { times, values } = series;
-  const { points, degree, stoichiometricNumber, isChosen } = window;
+  const { points, degree, stoichiometricNumber, scatter } = window;
   const rate = slopeAsRate(
     fitLocalPolynomial(times, values, first, points, degree, time, own),
     stoichiometricNumber,
   );
-  if (!isChosen || own.degreesOfFreedom < 2 || differentTimes(times, first, points) < degree + 2) return rate;
+  if (!scatter) return rate;
   fitLocalPolynomial(times, values, first, points, degree + 1, time, finer);
-  return withoutBias(rate, slopeAsRate(finer, stoichiometricNumber));
+  return withoutBias(rate, finer, stoichiometricNumber, scatter);
 }
 
 /**
  * A window of least error owes part of that error to the bend its polynomial cannot follow, of which the
  * scatter inside the window knows nothing. One degree more follows that bend: so its uncertainty and its
- * limits are given, widened to hold the rate itself where they do not.
+ * limits are given, widened to hold the rate itself where they do not. The choice has already taken the
+ * readings to scatter alike along the run, so their scatter is pooled.
  */
-function withoutBias({ value }: Estimate, { lower, upper, ...finerRate }: Estimate): Estimate {
-  return { ...finerRate, value, lower: Math.min(value, lower!), upper: Math.max(value, upper!) };
+function withoutBias(
+  { value }: Estimate,
+  fit: LocalFit,
+  stoichiometricNumber: number,
+  { variance, degreesOfFreedom }: Scatter,
+): Estimate {
+  const uncertainty = Math.sqrt(variance * fit.slopeVariance) / Math.abs(stoichiometricNumber);
+  const limits = withStudentLimits(fit.slope / stoichiometricNumber, uncertainty, degreesOfFreedom);
+  return { ...limits, value, lower: Math.min(value, limits.lower!), upper: Math.max(value, limits.upper!) };
 }
 
 function differentTimes(times: Float64Array, first: number, count: number): number {
@@ -101,12 +121,13 @@ function differentTimes(times: Float64Array, first: number, count: number): numb
  *
  * With `points` given, the standard uncertainty comes from the scatter about the polynomial inside the window,
  * and knows nothing of the bend that it cannot follow, which grows with the window. With `points` left out it
- * is that of the polynomial of one degree more in the same window, which is nearly free of bias.
+ * is that of the polynomial of one degree more in the same window, which is nearly free of bias, from the
+ * scatter pooled over the run.
  *
  * @param series a run, times in any unit
  * @param time where the rate is wanted, within the run
- * @returns rate in reading units per time unit, with n − degree − 1 degrees of freedom, one less with `points`
- *   left out
+ * @returns rate in reading units per time unit, with n − degree − 1 degrees of freedom; with `points` left out
+ *   those of the pooled scatter, not whole
  * @throws InvalidInput for a window that cannot be; NotDetermined outside the run or with too few times
  * @see A. Savitzky and M. J. E. Golay, Anal. Chem. 36 (1964) 1627, doi:10.1021/ac60214a047 (even spacing);
  *   W. S. Cleveland, J. Am. Stat. Assoc. 74 (1979) 829 (nearest neighbours); limits free of bias: S. Calonico,

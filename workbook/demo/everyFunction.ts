@@ -1,7 +1,6 @@
 import { catalogue } from '../../functions/catalogue';
 import { isRange } from '../../functions/cell';
-import type { CellFunction } from '../../functions/define';
-import { signature } from '../../functions/readmeTable';
+import { typedName, type CellFunction } from '../../functions/define';
 import type { CellModel, SheetModel } from '../engine/engine';
 
 const headings = ['function', 'answers', 'example, as typed', 'what it shows'];
@@ -12,14 +11,14 @@ export function everyFunction(): SheetModel {
   let row = 1;
   for (const f of catalogue) {
     cells.push(
-      { row, column: 0, value: signature(f), wrap: true },
-      { row, column: 1, value: f.summary, wrap: true },
-      { row, column: 2, value: f.example.formula, wrap: true },
+      { row, column: 0, value: typedName(f) },
+      { row, column: 1, value: f.summary },
+      { row, column: 2, value: f.example.formula },
       { row, column: 3, value: null, formula: f.example.formula.slice(1) },
     );
     row += heightOf(f) + 1;
   }
-  return { name: 'Every function', cells, columnWidths: { 0: 46, 1: 46, 2: 46, 3: 16 } };
+  return { name: 'Every function', cells, columnWidths: { 0: 22, 1: 92, 2: 96, 3: 22, 4: 22 } };
 }
 
 const heightOf = ({ example }: CellFunction): number => (isRange(example.equals) ? example.equals.length : 1);
