@@ -80,6 +80,12 @@ const trials: readonly Trial[] = [
     estimate: (s) => tangentRate(s, 0.4620981203732969),
   },
   {
+    what: 'tangent at a third of order 2, window chosen, 31 readings, 1 %',
+    settings: run(2, 2, 31, 0.01),
+    truth: 0.25,
+    estimate: (s) => tangentRate(s, 1),
+  },
+  {
     what: 'initial rate, order 1, 41 readings, 3 half lives, 0.5 %',
     settings: run(1, 3, 41, 0.005),
     truth: 1,
