@@ -51,7 +51,7 @@ export function bestRate(fit: ReducedFit, order: number, start?: number): number
   let best = low;
   let least = Infinity;
   const consider = (logRate: number): void => {
-    const squares = fit.at(logRate, order).residualSumOfSquares;
+    const squares = fit.squaresAt(logRate, order);
     if (squares < least) [best, least] = [logRate, squares];
   };
   for (let i = 0; i <= steps; i++) consider(low + i * step);
