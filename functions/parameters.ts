@@ -33,6 +33,8 @@ export interface Parameter<T = unknown> {
   readonly optional: boolean;
   /** What leaving it out means, in words. */
   readonly whenOmitted?: string;
+  /** What is read then; in the unit that the function gets. */
+  readonly fallback?: unknown;
   readonly bounds?: Bounds;
   /** Conversions keep an error cell in its place; elsewhere the error becomes the answer. */
   readonly keepsErrors?: boolean;
@@ -184,6 +186,13 @@ export function text(about: About & { readonly orNumber?: true }): Parameter<str
   };
 }
 
+const fallbackInWords = (fallback: unknown): string | undefined =>
+  typeof fallback === 'boolean'
+    ? String(fallback).toUpperCase()
+    : fallback === undefined
+      ? undefined
+      : String(fallback);
+
 /** Makes a parameter optional: left out (or an empty cell), it takes `fallback`. */
 export function optional<T>(parameter: Parameter<T>): Parameter<T | undefined>;
 export function optional<T, F>(parameter: Parameter<T>, fallback: F, whenOmitted?: string): Parameter<T | F>;
@@ -195,7 +204,8 @@ export function optional<T, F>(
   return {
     ...parameter,
     optional: true,
-    whenOmitted: whenOmitted ?? (fallback === undefined ? undefined : String(fallback).toUpperCase()),
+    fallback,
+    whenOmitted: whenOmitted ?? fallbackInWords(fallback),
     read: (cells, name) => (isLeftOut(cells) ? fallback : parameter.read(cells, name)),
   };
 }

@@ -18,14 +18,22 @@ export function signature(f: CellFunction): string {
   return `${typedName(f)}(${parameters.join(', ')})`;
 }
 
+/** The families that have functions, in the order of the work, with their headings. */
+export const byFamily = (
+  catalogue: readonly CellFunction[],
+): [heading: string, functions: CellFunction[]][] =>
+  (Object.keys(families) as Family[])
+    .map((family): [string, CellFunction[]] => [
+      families[family],
+      catalogue.filter((f) => f.family === family),
+    ])
+    .filter(([, functions]) => functions.length > 0);
+
 /** One part a family, one row a function. */
-export function readmeTable(catalogue: readonly CellFunction[]): string {
-  return (Object.keys(families) as Family[])
-    .map((family) => [family, catalogue.filter((f) => f.family === family)] as const)
-    .filter(([, functions]) => functions.length > 0)
-    .map(([family, functions]) => [`### ${families[family]}`, '', ...table(functions)].join('\n'))
+export const readmeTable = (catalogue: readonly CellFunction[]): string =>
+  byFamily(catalogue)
+    .map(([heading, functions]) => [`### ${heading}`, '', ...table(functions)].join('\n'))
     .join('\n\n');
-}
 
 const table = (functions: readonly CellFunction[]): string[] => [
   '| function | answers | unit |',

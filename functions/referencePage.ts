@@ -1,0 +1,66 @@
+/** The reference of all functions in docs/functions.md, worked out from the definitions. */
+import { CellError, isRange, type CellResult, type CellValue } from './cell';
+import { typedName, type CellFunction } from './define';
+import { boundsInWords, type Parameter } from './parameters';
+import { byFamily, signature } from './readmeTable';
+
+/** Everything a definition says, one part a function. */
+export function referencePage(catalogue: readonly CellFunction[]): string {
+  const parts = byFamily(catalogue).flatMap(([heading, functions]) => [
+    `## ${heading}`,
+    ...functions.map(part),
+  ]);
+  return `${[title, ...parts].join('\n\n')}\n`;
+}
+
+const title = `# The functions, one by one
+
+Worked out from their definitions; what they have in common stands in the [README](../README.md#the-functions).`;
+
+function part(f: CellFunction): string {
+  return [
+    `### ${typedName(f)}`,
+    f.summary,
+    `\`${signature(f)}\` in ${f.result.unit === '1' ? 'pure numbers' : f.result.unit}`,
+    parameterTable(f),
+    `**How.** ${f.method}`,
+    `**Example.** \`${f.example.formula}\` shows ${shown(f.example.equals)}`,
+    ...(f.caution === undefined ? [] : [`**Take care.** ${f.caution}`]),
+    `**Source.** ${f.reference}`,
+  ].join('\n\n');
+}
+
+const parameterTable = ({ parameters }: CellFunction): string =>
+  [
+    '| argument | meaning | unit | must be | left out |',
+    '|---|---|---|---|---|',
+    ...Object.entries(parameters).map(([name, parameter]) => parameterRow(name, parameter)),
+  ].join('\n');
+
+function parameterRow(name: string, { help, unit, bounds, optional, whenOmitted }: Parameter): string {
+  const cells = [
+    `\`${name}\``,
+    help,
+    unit === '1' ? '' : unit,
+    bounds ? boundsInWords(bounds) : '',
+    optional ? (whenOmitted ?? 'not used') : 'needed',
+  ];
+  return `| ${cells.map((cell) => cell.replaceAll('|', '\\|')).join(' | ')} |`;
+}
+
+/** Rows with ; between them and cells with , as in a formula; tables by their first row alone. */
+function shown(result: CellResult): string {
+  if (!isRange(result)) return `\`${cell(result)}\``;
+  const rows = result.map((row) => row.map(cell).join(', '));
+  const isTable = typeof result[0][0] === 'string';
+  return isTable
+    ? `a table with the headings of its first row, ${rows.length} rows`
+    : `\`${rows.join('; ')}\``;
+}
+
+const cell = (value: CellValue): string =>
+  value instanceof CellError
+    ? value.code
+    : typeof value === 'number'
+      ? String(Number(value.toPrecision(8)))
+      : String(value ?? '');
