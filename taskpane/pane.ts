@@ -3,9 +3,12 @@ import { createActions, type Actions } from './actions';
 import { h } from './h';
 import { patch } from './patch';
 import type { WorkbookPort } from './port';
+import type { Task } from './choices';
+import { orderStep } from './steps/order';
 import { putInStep } from './steps/putIn';
 import { rateStep } from './steps/rate';
 import { runStep } from './steps/run';
+import { taskBar } from './steps/tasks';
 import { createScenes, type Scene } from './scene';
 import { createStore, type State } from './store';
 
@@ -56,14 +59,20 @@ function oneAtATime(look: () => Promise<void>): () => void {
   };
 }
 
+const steps: Readonly<Record<Task, (scene: Scene, actions: Actions) => HTMLElement>> = {
+  rate: rateStep,
+  order: orderStep,
+};
+
 export function view(scene: Scene, actions: Actions, host: string): HTMLElement {
-  const { notice } = scene.state;
+  const { notice, task } = scene.state;
   return h(
     'div',
     { className: 'flaskpace' },
     h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host)),
     runStep(scene, actions),
-    rateStep(scene, actions),
+    taskBar(task, actions),
+    steps[task](scene, actions),
     putInStep(scene, actions),
     h('p', { className: `notice ${notice?.tone ?? ''}`, role: 'status' }, notice?.words ?? ''),
   );

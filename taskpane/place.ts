@@ -2,7 +2,6 @@
 import { areaName, parseArea } from '../functions/address';
 import type { CellValue } from '../functions/cell';
 import type { RangeReading, SheetArea, WorkbookPort } from './port';
-import type { Run, Table } from './runs';
 
 /** Names and units stand on one row or two. */
 const headingRows = 2;
@@ -30,15 +29,15 @@ const lastColumn = 16383;
 /** The first cell right of the block where the answer and a heading above it fit into empty cells. */
 export async function firstFree(
   port: WorkbookPort,
-  table: Table,
-  run: Run,
+  block: SheetArea,
+  row: number,
   size: { readonly rows: number; readonly columns: number },
 ): Promise<string> {
-  const left = table.area.column + table.area.columns;
-  const top = Math.max(run.firstRow - 1, 0);
+  const left = block.column + block.columns;
+  const top = Math.max(row - 1, 0);
   const reach = Math.min(farthest, lastColumn - left + 1);
   const strip: SheetArea = {
-    sheet: table.sheet,
+    sheet: block.sheet,
     row: top,
     column: left,
     rows: size.rows + 1,
@@ -51,7 +50,7 @@ export async function firstFree(
   }
   let column = left;
   while (column < left + reach && hasAny(taken, column, size.columns)) column++;
-  return areaName({ sheet: table.sheet, row: run.firstRow, column, rows: 1, columns: 1 });
+  return areaName({ sheet: block.sheet, row, column, rows: 1, columns: 1 });
 }
 
 const hasAny = (taken: ReadonlySet<number>, first: number, count: number): boolean =>

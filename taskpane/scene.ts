@@ -1,5 +1,11 @@
+import type { Answered } from './calls/estimate';
+import { compareOrders, givenBy, orderAnswer, type OrderAnswer, type OrderLine } from './calls/order';
+import { rateAnswer, type RateAnswer } from './calls/rate';
+import { firstChoices, type EndpointKind, type OrderChoice } from './choices';
 import { checkRun, type Check } from './findings';
-import { answerFor, type Answer } from './rateCall';
+import { currentInsertion } from './insertions/current';
+import type { Insertion } from './insertions/insertion';
+import type { Run, Table } from './runs';
 import type { State } from './store';
 
 /** What the steps draw: the state, and what follows from it, worked out when a step asks for it. */
@@ -7,16 +13,32 @@ export interface Scene {
   readonly state: State;
   /** Each is `null` while there is no run. */
   readonly check: Check | null;
-  readonly rate: Answer | null;
+  readonly rate: RateAnswer | null;
+  readonly order: OrderAnswer | null;
+  readonly orders: Answered<readonly OrderLine[]> | null;
+  /** What the open step would write, and whether it has an answer to write. */
+  readonly insertion: Insertion | null;
+  readonly isAnswered: boolean;
 }
 
 /** One for each pane: what rests on unchanged parts of the state is not calculated again. */
 export function createScenes(): (state: State) => Scene {
   const check = remembered(checkRun);
-  const rate = remembered(answerFor);
+  const rate = remembered(rateAnswer);
+  const order = remembered((table: Table, run: Run, choice: OrderChoice, pointedAt: State['pointedAt']) =>
+    orderAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
+  );
+  // the chosen order has no part in it, and it takes the longest
+  const orders = remembered(
+    (table: Table, run: Run, kind: EndpointKind, endpoint: string, pointedAt: State['pointedAt']) => {
+      const choice = { ...firstChoices.order, endpointKind: kind, endpoint };
+      return compareOrders(givenBy(table, run, choice, { sheet: table.sheet, pointedAt }));
+    },
+  );
   return (state) => {
-    const { table, run } = state;
-    return {
+    const { table, run, pointedAt } = state;
+    const { endpointKind, endpoint } = state.order;
+    const scene: Scene = {
       state,
       get check() {
         return table && run && check(table, run);
@@ -24,8 +46,30 @@ export function createScenes(): (state: State) => Scene {
       get rate() {
         return table && run && rate(table, run, state.rate);
       },
+      get order() {
+        return table && run && order(table, run, state.order, pointedAt);
+      },
+      get orders() {
+        return table && run && orders(table, run, endpointKind, endpoint, pointedAt);
+      },
+      get insertion() {
+        return currentInsertion(state);
+      },
+      get isAnswered() {
+        return isAnswered(scene);
+      },
     };
+    return scene;
   };
+}
+
+function isAnswered(scene: Scene): boolean {
+  const { task, order: choice } = scene.state;
+  if (task === 'rate') return scene.rate !== null && scene.rate.kind !== 'refused';
+  const { order, orders } = scene;
+  if (!order || !orders) return false;
+  if (choice.answer === 'orders') return 'ok' in orders;
+  return 'ok' in (choice.answer === 'curve' ? order.coefficient : order[choice.answer]);
 }
 
 /** Asks again only when something that the answer rests on is another. */

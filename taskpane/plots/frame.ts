@@ -6,29 +6,41 @@ import { linearScale, roundRange, ticks, type Scale } from './scale';
 export const size = { width: 300, height: 188 };
 const margin = { left: 46, right: 10, top: 20, bottom: 36 };
 const tickCount = { x: 5, y: 4 };
+/** A lower plot has room for fewer ticks. */
+const heightPerTick = 45;
 
 export interface Frame {
   readonly x: Scale;
   readonly y: Scale;
+  readonly height: number;
 }
 
-export function frameFor(xs: readonly number[], ys: readonly number[]): Frame {
+/** A point of a drawing, in the units of its axes. */
+export interface Place {
+  readonly x: number;
+  readonly y: number;
+}
+
+export function frameFor(xs: readonly number[], ys: readonly number[], height = size.height): Frame {
   return {
     x: linearScale(roundRange(xs, tickCount.x), [margin.left, size.width - margin.right]),
-    y: linearScale(roundRange(ys, tickCount.y), [size.height - margin.bottom, margin.top]),
+    y: linearScale(roundRange(ys, tickCountFor(height)), [height - margin.bottom, margin.top]),
+    height,
   };
 }
 
+const tickCountFor = (height: number): number => Math.min(tickCount.y, Math.floor(height / heightPerTick));
+
 /** A drawing with axes; `summary` is what someone hears who cannot see it. */
 export function plot(
-  { x, y }: Frame,
+  { x, y, height }: Frame,
   names: { readonly x: string; readonly y: string },
   summary: string,
   ...marks: readonly SVGElement[]
 ): SVGElement {
   const bottom = y.place(y.from);
   const shape = {
-    viewBox: `0 0 ${size.width} ${size.height}`,
+    viewBox: `0 0 ${size.width} ${height}`,
     class: 'plot',
     role: 'img',
     'aria-label': summary,
@@ -36,7 +48,7 @@ export function plot(
   return svg(
     'svg',
     shape,
-    ...ticks(y.from, y.to, tickCount.y).flatMap((value) => [
+    ...ticks(y.from, y.to, tickCountFor(height)).flatMap((value) => [
       svg('line', {
         class: 'grid',
         x1: margin.left,
@@ -52,7 +64,7 @@ export function plot(
     ]),
     svg('path', { class: 'axis', d: `M${margin.left} ${margin.top}V${bottom}H${size.width - margin.right}` }),
     label(names.y, 4, 11, 'start', 'name'),
-    label(names.x, size.width - margin.right, size.height - 5, 'end', 'name'),
+    label(names.x, size.width - margin.right, height - 5, 'end', 'name'),
     ...marks,
   );
 }
@@ -62,20 +74,12 @@ function label(text: string, x: number, y: number, anchor: string, className = '
 }
 
 /** Dots as one path of strokes without length: ten thousand cost no more than one element. */
-export function dots(
-  { x, y }: Frame,
-  points: readonly { x: number; y: number }[],
-  className: string,
-): SVGElement {
+export function dots({ x, y }: Frame, points: readonly Place[], className: string): SVGElement {
   const places = points.map((point) => `M${short(x.place(point.x))} ${short(y.place(point.y))}h0`);
   return svg('path', { class: className, d: places.join('') });
 }
 
-export function line(
-  { x, y }: Frame,
-  points: readonly { x: number; y: number }[],
-  className: string,
-): SVGElement {
+export function line({ x, y }: Frame, points: readonly Place[], className: string): SVGElement {
   const places = points.map((point) => `${short(x.place(point.x))} ${short(y.place(point.y))}`);
   return svg('path', { class: className, d: places.length > 0 ? `M${places.join('L')}` : '' });
 }

@@ -5,8 +5,8 @@
 import { emptyLocalFit, fitLocalPolynomial, nearestWindow } from '../../src/rate/localPolynomial';
 import { defaultWindow } from '../../src/rate/window';
 import { pairReadings, type Series } from '../../src/series/series';
-import { typedArgument } from '../rateCall';
-import type { RateChoice } from '../store';
+import { typedArgument } from '../calls/argument';
+import type { RateChoice } from '../choices';
 
 export interface Point {
   readonly x: number;

@@ -1,6 +1,7 @@
 /** A run as it was read, with the line of the rate laid over it. */
 import { plainNumber } from '../format';
 import type { Heading } from '../headers';
+import { headingOf, pointsOf, type Run, type Table } from '../runs';
 import { dots, frameFor, line, plot, type Frame } from './frame';
 import type { Overlay, Point } from './overlay';
 
@@ -30,6 +31,15 @@ export function runPlot({ points, time, reading, overlay, says }: RunPlot): SVGE
   }
   const summary = `${summaryOf(readings, time, reading)}${says ? `; ${says}` : ''}`;
   return plot(frame, { x: time.text, y: reading.text }, summary, ...marks);
+}
+
+/** The run on its own, before a rate is chosen or where none can be given. */
+export function plainPlot(table: Table, run: Run): SVGElement {
+  return runPlot({
+    points: pointsOf(table, run),
+    time: headingOf(table, run.timeColumn),
+    reading: headingOf(table, run.readingColumn),
+  });
 }
 
 /** The whole column of rates, beside its readings' times. */

@@ -69,6 +69,36 @@ export function selectField(
   );
 }
 
+/** A few choices side by side, one of them taken. */
+export function choiceOfOne<Value extends string>(
+  group: string,
+  legend: string,
+  choices: readonly (readonly [value: Value, label: string])[],
+  chosen: Value,
+  onChange: (value: Value) => void,
+): HTMLElement {
+  return h(
+    'fieldset',
+    { className: 'kinds' },
+    h('legend', {}, legend),
+    ...choices.map(([value, label]) => {
+      const id = `${group}-${value.replace('.', '-')}`;
+      return h(
+        'label',
+        { for: id },
+        h('input', {
+          id,
+          type: 'radio',
+          name: `flaskpace-${group}`,
+          checked: value === chosen,
+          onchange: () => onChange(value),
+        }),
+        h('span', {}, label),
+      );
+    }),
+  );
+}
+
 export function checkField(
   id: string,
   label: string,

@@ -1,4 +1,4 @@
-/** Third step: where the formula goes, and what it will fill. */
+/** Where the formula goes, and what it will fill. */
 import { areaName } from '../../functions/address';
 import type { Actions } from '../actions';
 import { h, type Child } from '../h';
@@ -7,19 +7,19 @@ import type { Scene } from '../scene';
 import type { State } from '../store';
 import { button, checkField, step, textField } from './fields';
 
-const title = '3 Put it in';
+const title = 'Put it in';
 
-export function putInStep({ state, rate: answer }: Scene, actions: Actions): HTMLElement {
-  const { table, run, rate, put } = state;
-  if (!table || !run)
+export function putInStep({ state, insertion, isAnswered }: Scene, actions: Actions): HTMLElement {
+  const { table, put } = state;
+  if (!table || !insertion)
     return step(
       'put-in',
       title,
-      h('p', { className: 'hint' }, 'A rate can be written beside its run.'),
+      h('p', { className: 'hint' }, 'An answer can be written beside its run.'),
       undoButton(state, actions),
     );
-  const plan = planFor(table, run, rate, put);
-  const isReady = typeof plan !== 'string' && (answer?.kind === 'one' || answer?.kind === 'column');
+  const plan = planFor(insertion, table.sheet, put);
+  const isReady = typeof plan !== 'string' && isAnswered;
   return step(
     'put-in',
     title,
@@ -35,18 +35,20 @@ export function putInStep({ state, rate: answer }: Scene, actions: Actions): HTM
     h(
       'div',
       { className: 'checks' },
-      checkField(
-        'with-heading',
-        'Heading with unit above',
-        put.withHeading,
-        (withHeading) => void actions.changeOptions({ withHeading }),
-      ),
-      checkField(
-        'with-detail',
-        'Uncertainty and limits beside it',
-        put.withDetail,
-        (withDetail) => void actions.changeOptions({ withDetail }),
-      ),
+      insertion.headings.length > 0 &&
+        checkField(
+          'with-heading',
+          'Heading with unit above',
+          put.withHeading,
+          (withHeading) => void actions.changeOptions({ withHeading }),
+        ),
+      insertion.hasDetail &&
+        checkField(
+          'with-detail',
+          'Uncertainty and limits beside it',
+          put.withDetail,
+          (withDetail) => void actions.changeOptions({ withDetail }),
+        ),
     ),
     ...(typeof plan === 'string' ? [] : preview(plan, put.inUse)),
     put.question && typeof plan !== 'string'

@@ -1,17 +1,18 @@
-/** Second step: which rate, what it is, and the formula that gives it. */
+/** Which rate, what it is, and the formula that gives it. */
 import type { Actions } from '../actions';
+import type { Estimate } from '../calls/estimate';
+import { rateFormula, type RateAnswer } from '../calls/rate';
+import type { RateChoice, RateKind } from '../choices';
 import { plainNumber, valueWithUncertainty } from '../format';
 import { h, type Child } from '../h';
 import { rateUnit } from '../headers';
-import { rateName } from '../plan';
+import { rateName } from '../insertions/rate';
 import { overlayFor } from '../plots/overlay';
-import { ratesPlot, runPlot } from '../plots/runPlot';
-import { rateFormula, type Answer, type Rate } from '../rateCall';
+import { plainPlot, ratesPlot, runPlot } from '../plots/runPlot';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
-import type { RateChoice, RateKind } from '../store';
-import { button, step, textField } from './fields';
-import { plainPlot } from './run';
+import { estimateLines, formulaLine, result, valueLines } from './estimate';
+import { choiceOfOne, step, textField } from './fields';
 
 const kinds: readonly (readonly [RateKind, string])[] = [
   ['average', 'Average'],
@@ -24,46 +25,26 @@ export function rateStep(
   actions: Actions,
 ): HTMLElement {
   if (!table || !run || !answer)
-    return step('rate', '2 Rate', h('p', { className: 'hint' }, 'Choose a run first.'));
+    return step('rate', 'Rate', h('p', { className: 'hint' }, 'Choose a run first.'));
   const unit = rateUnit(headingOf(table, run.readingColumn), headingOf(table, run.timeColumn));
   return step(
     'rate',
-    '2 Rate',
-    kindChoice(rate.kind, actions),
+    'Rate',
+    choiceOfOne('kind', 'Which rate', kinds, rate.kind, (kind) => void actions.changeRate({ kind })),
     fieldsFor(table, run, rate, answer, actions),
     ...drawing(table, run, rate, answer, unit),
-    h(
-      'div',
-      { className: 'result', role: 'status', 'aria-atomic': 'true' },
-      ...inWords(table, run, rate, answer, unit),
-    ),
+    result(...inWords(table, run, rate, answer, unit)),
     formulaLine(rateFormula(table, run, rate, put.withDetail), actions),
   );
 }
 
-function kindChoice(chosen: RateKind, actions: Actions): HTMLElement {
-  return h(
-    'fieldset',
-    { className: 'kinds' },
-    h('legend', {}, 'Which rate'),
-    ...kinds.map(([kind, label]) =>
-      h(
-        'label',
-        { for: `kind-${kind}` },
-        h('input', {
-          id: `kind-${kind}`,
-          type: 'radio',
-          name: 'flaskpace-rate-kind',
-          checked: kind === chosen,
-          onchange: () => void actions.changeRate({ kind }),
-        }),
-        h('span', {}, label),
-      ),
-    ),
-  );
-}
-
-function fieldsFor(table: Table, run: Run, rate: RateChoice, answer: Answer, actions: Actions): HTMLElement {
+function fieldsFor(
+  table: Table,
+  run: Run,
+  rate: RateChoice,
+  answer: RateAnswer,
+  actions: Actions,
+): HTMLElement {
   const { unit } = headingOf(table, run.timeColumn);
   const wrong = answer.kind === 'refused' ? answer : null;
   const field = (
@@ -114,8 +95,8 @@ const howItIsDone: Readonly<Record<RateKind, string>> = {
     'The tangent at every reading. Left empty, the number of readings used is chosen from the data. The stoichiometric number is −1 for a reactant, +1 for a product; left empty, its sign follows the run.',
 };
 
-function drawing(table: Table, run: Run, rate: RateChoice, answer: Answer, unit: string): Child[] {
-  if (answer.kind === 'absent' || answer.kind === 'refused') return [plainPlot(table, run)];
+function drawing(table: Table, run: Run, rate: RateChoice, answer: RateAnswer, unit: string): Child[] {
+  if (answer.kind === 'refused') return [plainPlot(table, run)];
   const points = pointsOf(table, run);
   const time = headingOf(table, run.timeColumn);
   const reading = headingOf(table, run.readingColumn);
@@ -132,8 +113,8 @@ function drawing(table: Table, run: Run, rate: RateChoice, answer: Answer, unit:
 function ratesByTime(
   table: Table,
   run: Run,
-  rates: readonly (Rate | null)[],
-): { time: number; rate: Rate }[] {
+  rates: readonly (Estimate | null)[],
+): { time: number; rate: Estimate }[] {
   const times = columnOf(table, run.timeColumn, run).cells;
   return rates.flatMap((rate, row) => {
     const time = times[row]?.[0];
@@ -141,10 +122,8 @@ function ratesByTime(
   });
 }
 
-function inWords(table: Table, run: Run, rate: RateChoice, answer: Answer, unit: string): Child[] {
+function inWords(table: Table, run: Run, rate: RateChoice, answer: RateAnswer, unit: string): Child[] {
   switch (answer.kind) {
-    case 'absent':
-      return [h('p', { className: 'hint' }, `PACE.${answer.functionName} is not part of this version.`)];
     case 'refused':
       return [
         answer.field === null
@@ -152,32 +131,16 @@ function inWords(table: Table, run: Run, rate: RateChoice, answer: Answer, unit:
           : h('p', { className: 'hint' }, 'No rate yet: see the field marked above.'),
       ];
     case 'one':
-      return [
-        h('p', { className: 'what' }, rateName(table, run, rate)),
-        h(
-          'p',
-          { className: 'value' },
-          valueWithUncertainty(answer.rate.value, answer.rate.uncertainty),
-          ' ',
-          h('span', { className: 'unit' }, unit),
-        ),
-        h('p', { className: 'hint' }, limitsInWords(answer.rate)),
-      ];
+      return estimateLines(rateName(table, run, rate), answer.rate, unit);
     case 'column':
       return columnInWords(table, run, answer.rates, unit);
   }
 }
 
-function limitsInWords({ lower, upper, degreesOfFreedom }: Rate): string {
-  if (lower === null || upper === null) return 'no uncertainty: too few readings to judge their scatter by';
-  const freedom = degreesOfFreedom === null ? '' : `; ${plainNumber(degreesOfFreedom, 3)} degrees of freedom`;
-  return `± is one standard uncertainty. 95 % limits ${plainNumber(lower)} to ${plainNumber(upper)}${freedom}`;
-}
-
 /** A table for those who cannot see the plot; long runs are cut. */
 const longestTable = 100;
 
-function columnInWords(table: Table, run: Run, rates: readonly (Rate | null)[], unit: string): Child[] {
+function columnInWords(table: Table, run: Run, rates: readonly (Estimate | null)[], unit: string): Child[] {
   const rows = ratesByTime(table, run, rates);
   if (rows.length === 0) return [h('p', { className: 'problem' }, 'no reading has a rate')];
   const fastest = rows.reduce((best, row) =>
@@ -186,17 +149,10 @@ function columnInWords(table: Table, run: Run, rates: readonly (Rate | null)[], 
   const time = headingOf(table, run.timeColumn);
   const cut = rows.length > longestTable ? ` (the first ${longestTable} of ${rows.length})` : '';
   return [
-    h(
-      'p',
-      { className: 'what' },
+    ...valueLines(
       `largest rate, at ${[plainNumber(fastest.time), time.unit].filter(Boolean).join(' ')}`,
-    ),
-    h(
-      'p',
-      { className: 'value' },
-      valueWithUncertainty(fastest.rate.value, fastest.rate.uncertainty),
-      ' ',
-      h('span', { className: 'unit' }, unit),
+      fastest.rate,
+      unit,
     ),
     h(
       'details',
@@ -227,13 +183,4 @@ function columnInWords(table: Table, run: Run, rates: readonly (Rate | null)[], 
       ),
     ),
   ];
-}
-
-function formulaLine(formula: string, actions: Actions): HTMLElement {
-  return h(
-    'div',
-    { className: 'formula' },
-    h('code', { id: 'formula', tabindex: '0', 'aria-label': 'formula' }, formula),
-    button('Copy', () => void actions.copy(formula), 'small'),
-  );
 }

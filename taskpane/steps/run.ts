@@ -1,10 +1,9 @@
-/** First step: which cells are the run. */
+/** Which cells are the run. */
 import { areaName, columnName } from '../../functions/address';
 import { shown } from '../../src/errors';
 import type { Actions } from '../actions';
 import { h } from '../h';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
-import { runPlot } from '../plots/runPlot';
 import type { Scene } from '../scene';
 import { findingsList } from './findings';
 import { button, selectField, step, type Choice } from './fields';
@@ -16,7 +15,7 @@ export function runStep(
   if (!table || !run) {
     return step(
       'run',
-      '1 Run',
+      'Run',
       h(
         'p',
         { className: 'hint' },
@@ -28,7 +27,7 @@ export function runStep(
   }
   return step(
     'run',
-    '1 Run',
+    'Run',
     h('p', { className: 'where' }, areaName(table.area)),
     h(
       'div',
@@ -50,15 +49,6 @@ export function runStep(
     check && findingsList(check),
     caution(table, run),
   );
-}
-
-/** The run on its own, before a rate is chosen or where none can be given. */
-export function plainPlot(table: Table, run: Run): SVGElement {
-  return runPlot({
-    points: pointsOf(table, run),
-    time: headingOf(table, run.timeColumn),
-    reading: headingOf(table, run.readingColumn),
-  });
 }
 
 function columnField(

@@ -1,0 +1,55 @@
+/** What a person has chosen at each step, as typed: an empty field is an argument left out. */
+
+/** The steps of the work; one is open at a time. */
+export type Task = 'rate' | 'order';
+
+export type RateKind = 'average' | 'tangent' | 'column';
+
+export interface RateChoice {
+  readonly kind: RateKind;
+  readonly from: string;
+  readonly to: string;
+  readonly time: string;
+  readonly points: string;
+  readonly degree: string;
+  readonly coefficient: string;
+}
+
+/** The reading at infinite time: left out, which means 0, or a number or cell, or fitted. */
+export type EndpointKind = 'zero' | 'given' | 'free';
+
+/** What of the order step goes into the sheet. */
+export type OrderAnswerKind = 'coefficient' | 'halfLife' | 'order' | 'curve' | 'orders';
+
+export interface OrderChoice {
+  /** A number, or `free` to have it fitted. */
+  readonly order: string;
+  readonly endpointKind: EndpointKind;
+  readonly endpoint: string;
+  readonly answer: OrderAnswerKind;
+}
+
+export interface PutChoice {
+  /** As typed: `'Gas run'!E3`. */
+  readonly target: string;
+  /** Once the person has typed a target, the pane stops proposing others. */
+  readonly isOwn: boolean;
+  readonly withHeading: boolean;
+  readonly withDetail: boolean;
+  /** Cells to be filled that hold something now. */
+  readonly inUse: readonly string[];
+  /** The person has asked to write: say yes or no to these cells. */
+  readonly question: readonly string[] | null;
+}
+
+export const firstChoices = {
+  rate: { kind: 'tangent', from: '', to: '', time: '', points: '', degree: '', coefficient: '' },
+  order: { order: '1', endpointKind: 'zero', endpoint: '', answer: 'coefficient' },
+  put: { target: '', isOwn: false, withHeading: true, withDetail: false, inUse: [], question: null },
+} as const satisfies Choices;
+
+export interface Choices {
+  readonly rate: RateChoice;
+  readonly order: OrderChoice;
+  readonly put: PutChoice;
+}

@@ -1,0 +1,12 @@
+import type { State } from '../store';
+import type { Insertion } from './insertion';
+import { orderInsertion } from './order';
+import { rateInsertion } from './rate';
+
+/** What the open step would write; `null` while it has nothing to write. */
+export function currentInsertion(state: State): Insertion | null {
+  const { table, run, task, put } = state;
+  if (!table || !run) return null;
+  if (task === 'order') return orderInsertion(table, run, state, put.withDetail);
+  return rateInsertion(table, run, state.rate, put.withDetail);
+}

@@ -1,0 +1,49 @@
+/** What a step would write: its formulas and their headings, in places counted from the cell they are put at. */
+import { standardRowHeadings } from '../../functions/results';
+import type { CellToWrite, SheetArea } from '../port';
+
+export interface Size {
+  readonly rows: number;
+  readonly columns: number;
+}
+
+export interface Part extends Omit<CellToWrite, 'area'> {
+  readonly down: number;
+  readonly right: number;
+}
+
+export interface Insertion {
+  /** For headings and the undo button: `rate at 30 s`. */
+  readonly name: string;
+  readonly parts: readonly Part[];
+  /** Of all that stands below the headings. */
+  readonly size: Size;
+  /** Written above when asked for, one a column; none where the answer brings its own. */
+  readonly headings: readonly string[];
+  /** The cells that it reads, which it must not cover. */
+  readonly reads: readonly SheetArea[];
+  /** Whether uncertainty and limits can stand beside the value. */
+  readonly hasDetail: boolean;
+}
+
+/** One formula, as large as its answer. */
+export function oneFormula(formula: string, size: Size): Pick<Insertion, 'parts' | 'size'> {
+  const spills = size.rows * size.columns > 1 ? { spills: size } : {};
+  return { parts: [{ down: 0, right: 0, content: { formula }, ...spills }], size };
+}
+
+/** `/ mL`, `/ (mL/s)`; words stand in brackets of their own. */
+function inUnit(unit: string): string {
+  if (unit === '' || unit === '1') return '';
+  if (/\bunit\b/.test(unit)) return ` (${unit})`;
+  return ` / ${/[/ ]/.test(unit) ? `(${unit})` : unit}`;
+}
+
+/** `rate at 30 s / (mL/s)`, and with detail the rest of the standard row. */
+export function headingsFor(name: string, unit: string, withDetail: boolean): string[] {
+  const [, ...others] = standardRowHeadings;
+  const rest = others.map((other) => (other === 'degrees of freedom' ? other : `${other}${inUnit(unit)}`));
+  return [`${name}${inUnit(unit)}`, ...(withDetail ? rest : [])];
+}
+
+export const detailColumns = (withDetail: boolean): number => (withDetail ? standardRowHeadings.length : 1);

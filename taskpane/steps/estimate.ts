@@ -1,0 +1,44 @@
+/** A value with its uncertainty, and the formula that gives it: drawn the same way in every step. */
+import type { Actions } from '../actions';
+import type { Estimate } from '../calls/estimate';
+import { plainNumber, valueWithUncertainty } from '../format';
+import { h, type Child } from '../h';
+import { button } from './fields';
+
+/** `rate at 30 s`, the value with its unit, and the limits in words. */
+export const estimateLines = (what: string, estimate: Estimate, unit: string): Child[] => [
+  ...valueLines(what, estimate, unit),
+  h('p', { className: 'hint' }, limitsInWords(estimate)),
+];
+
+export const valueLines = (what: string, { value, uncertainty }: Estimate, unit: string): Child[] => [
+  h('p', { className: 'what' }, what),
+  h(
+    'p',
+    { className: 'value' },
+    valueWithUncertainty(value, uncertainty),
+    ' ',
+    h('span', { className: 'unit' }, unit),
+  ),
+];
+
+export function limitsInWords({ uncertainty, lower, upper, degreesOfFreedom }: Estimate): string {
+  if (uncertainty === null && lower === null && upper === null)
+    return 'no uncertainty: too few readings to judge their scatter by';
+  const freedom = degreesOfFreedom === null ? '' : `; ${plainNumber(degreesOfFreedom, 3)} degrees of freedom`;
+  const limit = (value: number | null): string => (value === null ? 'no limit' : plainNumber(value));
+  return `± is one standard uncertainty. 95 % limits ${limit(lower)} to ${limit(upper)}${freedom}`;
+}
+
+/** What is said at once, to a screen reader as well, whenever it changes. */
+export const result = (...children: readonly Child[]): HTMLElement =>
+  h('div', { className: 'result', role: 'status', 'aria-atomic': 'true' }, ...children);
+
+export function formulaLine(formula: string, actions: Actions): HTMLElement {
+  return h(
+    'div',
+    { className: 'formula' },
+    h('code', { id: 'formula', tabindex: '0', 'aria-label': 'formula' }, formula),
+    button('Copy', () => void actions.copy(formula), 'small'),
+  );
+}

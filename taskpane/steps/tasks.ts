@@ -1,0 +1,28 @@
+/** The steps of the work, one of them open. */
+import type { Actions } from '../actions';
+import type { Task } from '../choices';
+import { h } from '../h';
+
+export const tasks: readonly (readonly [Task, string])[] = [
+  ['rate', 'Rate'],
+  ['order', 'Order'],
+];
+
+export function taskBar(open: Task, actions: Actions): HTMLElement {
+  return h(
+    'nav',
+    { 'aria-label': 'steps' },
+    ...tasks.map(([task, label]) =>
+      h(
+        'button',
+        {
+          id: `task-${task}`,
+          type: 'button',
+          'aria-current': task === open ? 'step' : null,
+          onclick: () => void actions.openTask(task),
+        },
+        label,
+      ),
+    ),
+  );
+}
