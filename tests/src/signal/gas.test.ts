@@ -112,3 +112,11 @@ test.each<[string, () => number, string]>([
   expect(call).toThrow(InvalidInput);
   expect(call).toThrow(new InvalidInput(message));
 });
+
+test('dryGasPressure of argon over water, as printed: 750 torr at 26 °C leave 725 torr', () => {
+  // OpenStax, Chemistry 2e, 9.3
+  const torr = 101325 / 760;
+  const dry = dryGasPressure({ temperature: kelvin(26), pressure: 750 * torr, saturation: 1, head: 0 });
+  expect(dry / torr).toBeCloseTo(725, 0);
+  expect(Math.abs(dry / torr - 724.8)).toBeLessThan(0.05);
+});
