@@ -67,6 +67,7 @@ const commands = {
   externals: { 'office-addin-manifest': 'commonjs office-addin-manifest' },
   entry: {
     recalc: './workbook/commands/recalc.ts',
+    handover: './workbook/commands/handover.ts',
     start: './workbook/commands/start.ts',
     derive: './scripts/derive.ts',
     bench: './tests/bench/bench.ts',

@@ -1,4 +1,5 @@
 /** What a cell function is. Everything the product says or does about one derives from this object. */
+import type { BuiltIn } from './builtIn/said';
 import type { CellResult } from './cell';
 import type { Parameter } from './parameters';
 
@@ -33,7 +34,11 @@ export interface Definition<P extends Parameters> {
   readonly reference: string;
   /** Where the work this serves can hurt someone. */
   readonly caution?: string;
+  /** May take long enough for a sheet to stand still: done on another thread where there is one. */
+  readonly isLong?: true;
   readonly run: (values: Values<P>) => CellResult;
+  /** The same in built-in spreadsheet functions, for a copy that needs no add-in; left out where there is none. */
+  readonly builtIn?: BuiltIn;
 }
 
 /** A definition whose parameter types have been checked and can be forgotten. */

@@ -13,6 +13,7 @@ import { buildStale, root } from './build.mjs';
 const needs = {
   start: ['workbook', 'commands'],
   recalc: ['commands'],
+  handover: ['commands'],
   derive: ['commands'],
   bench: ['commands'],
   simulate: ['commands'],

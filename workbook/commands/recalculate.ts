@@ -1,6 +1,5 @@
 /** A workbook's bytes with every formula calculated anew. */
-import { cellName, quotedSheet } from '../../functions/address';
-import type { CellError } from '../../functions/cell';
+import type { CalculatedBook } from '../engine/engine';
 import { calculate } from '../engine/univer/headless';
 import { patchWorkbook } from '../xlsx/patch';
 import { readWorkbook } from '../xlsx/read';
@@ -9,7 +8,7 @@ export interface Recalculated {
   readonly bytes: Uint8Array;
   readonly formulas: number;
   /** Cells that show an error as a result, in reading order. */
-  readonly errors: readonly { readonly cell: string; readonly error: CellError }[];
+  readonly errors: CalculatedBook['errors'];
 }
 
 /** @throws NotAWorkbook for bytes that are no whole .xlsx workbook */
@@ -19,9 +18,6 @@ export async function recalculate(bytes: Uint8Array): Promise<Recalculated> {
   return {
     bytes: patchWorkbook(bytes, book, calculated),
     formulas: book.sheets.flatMap(({ cells }) => cells).filter(({ formula }) => formula !== undefined).length,
-    errors: calculated.errors.map(({ sheet, row, column, error }) => ({
-      cell: `${quotedSheet(sheet)}!${cellName(row, column)}`,
-      error,
-    })),
+    errors: calculated.errors,
   };
 }

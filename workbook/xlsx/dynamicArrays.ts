@@ -4,7 +4,8 @@
  */
 import { applyEdits, insertion, type Edit } from './edits';
 import { elementsOf, encodeXml, scanXml, localName } from './xml';
-import { readXml, relationshipsPath, type WorkbookParts } from './parts';
+import { addPart, relate } from './addPart';
+import { readXml, type WorkbookParts } from './parts';
 import type { Package } from './zip';
 
 const main = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
@@ -32,39 +33,14 @@ export function dynamicArrayMark(pack: Package, parts: WorkbookParts): string {
     if (xml !== undefined) pack.write(path, encodeXml(xml));
     return mark;
   }
-  addPart(pack, parts);
+  addMetadata(pack, parts);
   return '1';
 }
 
-function addPart(pack: Package, parts: WorkbookParts): void {
-  const folder = parts.workbook.slice(0, parts.workbook.lastIndexOf('/') + 1);
-  const path = `${folder}metadata.xml`;
-  const types = '[Content_Types].xml';
-  const relations = relationshipsPath(parts.workbook);
-  pack.write(path, encodeXml(metadataPart));
-  appendTo(pack, types, 'Types', `<Override PartName="/${path}" ContentType="${metadataContentType}"/>`);
-  const id = freeId(readXml(pack, relations), relations);
-  appendTo(
-    pack,
-    relations,
-    'Relationships',
-    `<Relationship Id="${id}" Type="${metadataRelationship}" Target="metadata.xml"/>`,
-  );
-}
-
-function freeId(xml: string, part: string): string {
-  const taken = new Set(elementsOf(xml, part).map(({ attributes }) => attributes.Id));
-  for (let n = 1; ; n++) if (!taken.has(`rId${n}`)) return `rId${n}`;
-}
-
-/** Puts an element at the end of a part's root, under the prefix that the root has. */
-function appendTo(pack: Package, path: string, root: string, element: string): void {
-  const xml = readXml(pack, path);
-  const close = new RegExp(`</([\\w.-]+:)?${root}\\s*>\\s*$`).exec(xml);
-  const prefix = close?.[1] ?? '';
-  if (!close) throw new Error(`${path} does not end with its root element`);
-  const edit = insertion(close.index, element.replace('<', `<${prefix}`));
-  pack.write(path, encodeXml(applyEdits(xml, [edit])));
+function addMetadata(pack: Package, parts: WorkbookParts): void {
+  const path = `${parts.workbook.slice(0, parts.workbook.lastIndexOf('/') + 1)}metadata.xml`;
+  addPart(pack, path, metadataPart, metadataContentType);
+  relate(pack, parts.workbook, path, metadataRelationship);
 }
 
 /** `xml` is left out where the part knows dynamic arrays already. */

@@ -1,0 +1,180 @@
+/** What a call was given, in words of a formula: numbers, quantities, flags and readings, with what must hold of each. */
+import { convertQuantity, convertUnit, parseQuantity } from '../../src/units';
+import type { CellValue } from '../cell';
+import type { Parameters } from '../define';
+import { isLeftOut, requireWithin, type Bounds } from '../parameters';
+import { Readings } from './readings';
+import { NotSaid, type Argument, type Arguments } from './said';
+import { numberText, quoted } from './text';
+
+/** A piece of a formula, and the conditions under which it may be used. */
+export interface Phrase {
+  readonly text: string;
+  readonly holds: readonly string[];
+}
+
+const sure = (text: string): Phrase => ({ text, holds: [] });
+
+export class Given {
+  constructor(
+    private readonly parameters: Parameters,
+    private readonly given: Arguments,
+  ) {}
+
+  /** Nothing where the argument was left out. A cell that is blank today may be filled tomorrow. */
+  argument(name: string): Argument | undefined {
+    const argument = this.given[name];
+    if (!argument) return undefined;
+    if (!argument.cells || !isLeftOut(argument.cells)) return argument;
+    if (argument.area && this.parameters[name].optional)
+      throw new NotSaid(`${name} is a blank cell, which a formula would read as 0`);
+    return argument.area ? argument : undefined;
+  }
+
+  has(name: string): boolean {
+    return this.argument(name) !== undefined;
+  }
+
+  /** @throws NotSaid where it is no number today */
+  number(name: string): Phrase {
+    const argument = this.argument(name);
+    if (!argument) return sure(numberText(this.fallback(name) as number));
+    const cell = this.single(argument, name);
+    if (cell !== undefined && typeof cell !== 'number') throw new NotSaid(`${name} is not a number`);
+    const { bounds = {} } = this.parameters[name];
+    if (cell !== undefined && !argument.area) return sure(numberText(requireWithin(cell, bounds, name, '1')));
+    return { text: argument.text, holds: [`ISNUMBER(${argument.text})`, ...within(argument.text, bounds)] };
+  }
+
+  /** In the unit `to`: a bare number is one of the parameter's own unit, text carries its own. */
+  quantity(name: string, to: string): Phrase {
+    const argument = this.argument(name);
+    if (!argument) return sure(numberText(this.fallback(name) as number));
+    return this.quantityAt(argument, this.single(argument, name), argument.text, name, to);
+  }
+
+  /** One for all readings, or one for each of them. */
+  quantities(name: string, to: string): (row: number, column: number) => Phrase {
+    const argument = this.argument(name);
+    if (!argument) throw new NotSaid(`${name} was left out`);
+    const { cells, area } = argument;
+    if (!cells || cells.flat().length === 1) {
+      const one = this.quantity(name, to);
+      return () => one;
+    }
+    const readings = new Readings(argument, name);
+    const flat = cells.flat();
+    return (row, column) => {
+      // readings and their quantities can lie different ways: it is their count that must agree
+      const place = row * readings.columns + column;
+      const [r, c] = [Math.floor(place / cells[0].length), place % cells[0].length];
+      const text = readings.element(r, c);
+      return this.quantityAt(area ? { text, area } : { text }, flat[place], text, name, to);
+    };
+  }
+
+  private quantityAt(
+    { area }: Argument,
+    cell: CellValue | undefined,
+    text: string,
+    name: string,
+    to: string,
+  ): Phrase {
+    const { unit, bounds = {} } = this.parameters[name];
+    if (typeof cell === 'string') {
+      const [value, holds, own] = area ? numberBefore(text, cell, name) : [undefined, [], unit];
+      if (value === undefined) {
+        const inUnit = requireWithin(parseQuantity(cell, unit, name), bounds, name, unit);
+        return sure(numberText(convertQuantity(inUnit, unit, to)));
+      }
+      convertUnit(1, own, unit, name);
+      const inUnit = converted(value, own, unit);
+      return { text: converted(value, own, to), holds: [...holds, ...within(inUnit, bounds)] };
+    }
+    if (cell !== undefined && typeof cell !== 'number') throw new NotSaid(`${name} is not a number`);
+    if (cell !== undefined && !area) {
+      return sure(numberText(convertQuantity(requireWithin(cell, bounds, name, unit), unit, to)));
+    }
+    return { text: converted(text, unit, to), holds: [`ISNUMBER(${text})`, ...within(text, bounds)] };
+  }
+
+  /** A word or unit that the formula is built on; where a cell holds it, it must stay as it is. */
+  word(name: string): { readonly value: string; readonly holds: readonly string[] } {
+    const argument = this.argument(name);
+    if (!argument) return { value: String(this.fallback(name)), holds: [] };
+    const cell = this.single(argument, name);
+    if (typeof cell !== 'string') throw new NotSaid(`${name} is not text`);
+    return { value: cell.trim(), holds: argument.area ? [`EXACT(${argument.text},${quoted(cell)})`] : [] };
+  }
+
+  /** TRUE or FALSE, on which the shape of a result depends: taken as it is on the day of the copy. */
+  flag(name: string): { readonly value: boolean; readonly holds: readonly string[] } {
+    const argument = this.argument(name);
+    if (!argument) return { value: Boolean(this.fallback(name)), holds: [] };
+    const cell = this.single(argument, name);
+    if (cell !== true && cell !== false && cell !== 0 && cell !== 1)
+      throw new NotSaid(`${name} is neither TRUE nor FALSE`);
+    const value = Boolean(cell);
+    return { value, holds: argument.area ? [value ? argument.text : `NOT(${argument.text})`] : [] };
+  }
+
+  readings(name: string): Readings {
+    const argument = this.argument(name);
+    if (!argument) throw new NotSaid(`${name} was left out`);
+    return new Readings(argument, name, this.parameters[name].bounds);
+  }
+
+  private fallback(name: string): unknown {
+    const { fallback } = this.parameters[name];
+    if (fallback === undefined) throw new NotSaid(`${name} was left out`);
+    return fallback;
+  }
+
+  /** The cell's value today; nothing where that is not known. */
+  private single({ cells }: Argument, name: string): CellValue | undefined {
+    if (!cells) return undefined;
+    if (cells.length !== 1 || cells[0].length !== 1) throw new NotSaid(`${name} is more than one cell`);
+    return cells[0][0];
+  }
+}
+
+/** The conditions of a bound, for a text that is not known to keep it. */
+function within(text: string, { above, atLeast, below, atMost, whole }: Bounds): string[] {
+  const holds: string[] = [];
+  if (above !== undefined) holds.push(`${text}>${numberText(above)}`);
+  if (atLeast !== undefined) holds.push(`${text}>=${numberText(atLeast)}`);
+  if (below !== undefined) holds.push(`${text}<${numberText(below)}`);
+  if (atMost !== undefined) holds.push(`${text}<=${numberText(atMost)}`);
+  if (whole) holds.push(`${text}=INT(${text})`);
+  return holds;
+}
+
+/** Units differ by a factor, temperatures by a step as well. */
+function converted(text: string, from: string, to: string): string {
+  if (from === to) return text;
+  const step = convertUnit(0, from, to, '');
+  const factor = tidy(convertUnit(1, from, to, '') - step);
+  const scaled =
+    factor === 1
+      ? text
+      : factor < 1 && isWhole(1 / factor)
+        ? `${text}/${tidy(1 / factor)}`
+        : `${text}*${numberText(factor)}`;
+  return step === 0 ? `(${scaled})` : `(${scaled}+${numberText(step)})`;
+}
+
+/** 1 + 273.15 − 273.15 leaves a last digit that is not meant. */
+const tidy = (factor: number): number => Number(factor.toPrecision(13));
+const isWhole = (value: number): boolean => Number.isInteger(tidy(value));
+
+/** `21.4 degC` in a cell: the number before the unit, which must stay the unit it is. */
+function numberBefore(text: string, cell: string, name: string): [string, string[], string] {
+  const [, number, unit] = /^\s*([+-]?\d*\.?\d+(?:e[+-]?\d+)?)(\s*\S.*)$/i.exec(cell) ?? [];
+  if (number === undefined) throw new NotSaid(`${name} is text that no formula can read`);
+  const length = [...unit].length;
+  return [
+    `NUMBERVALUE(LEFT(${text},LEN(${text})-${length}),"."," ")`,
+    [`EXACT(RIGHT(${text},${length}),${quoted(unit)})`],
+    unit.trim(),
+  ];
+}

@@ -1,0 +1,36 @@
+/** How a call of one of our functions is said in built-in ones: what is known of it, and what comes of it. */
+import type { Area } from '../address';
+import type { CellRange } from '../cell';
+import type { Given } from './given';
+
+/** One argument of a call, as it stands in a formula. */
+export interface Argument {
+  /** `$F$1`, `B2:B11`, `F1+273`; in brackets where an operator beside it would tear it apart. */
+  readonly text: string;
+  /** Of a plain reference; its sheet only where the reference names one. */
+  readonly area?: Area;
+  /** What stands there on the day of the copy; unknown of an expression. */
+  readonly cells?: CellRange;
+}
+
+/** By the names of the parameters; nothing where an argument was left out. */
+export type Arguments = Readonly<Record<string, Argument | undefined>>;
+
+/** @throws NotSaid where this call has no counterpart */
+export type BuiltIn = (given: Given) => Said;
+
+/** The result in built-in functions, cell by cell or as one array; at least one of the two. */
+export interface Said {
+  /** The formula of one cell of the result, counted from its first. */
+  readonly cell?: (row: number, column: number) => string;
+  /** An expression for the whole result, for use inside another formula. */
+  readonly whole?: () => string;
+}
+
+/** The call cannot be said in built-in functions; the message says why, with no full stop. */
+export class NotSaid extends Error {
+  override readonly name = 'NotSaid';
+}
+
+/** A result of one value. */
+export const oneValue = (text: string): Said => ({ cell: () => text, whole: () => text });

@@ -1,0 +1,77 @@
+/** A workbook's bytes → a copy of it that needs no add-in. */
+import { areaName, quotedSheet } from '../../functions/address';
+import { CellError } from '../../functions/cell';
+import type { CalculatedBook } from '../engine/engine';
+import { calculate } from '../engine/univer/headless';
+import { dropCalcChain } from '../xlsx/calcChain';
+import { findParts, readXml } from '../xlsx/parts';
+import { patchWorkbook } from '../xlsx/patch';
+import { readWorkbook } from '../xlsx/read';
+import { encodeXml } from '../xlsx/xml';
+import { Package } from '../xlsx/zip';
+import { checked } from './check';
+import { handFormulas, type HandedFormula } from './handed';
+import { mergedCells } from './mergedCells';
+import { methodSheet, noteText, type Origin } from './methodSheet';
+import { addNotes } from './notes';
+import { rewriteSheet, type RewrittenCell } from './rewriteSheet';
+import { respelled } from './respelled';
+import { addSheet } from './sheetPart';
+import { World } from './world';
+
+export interface HandedOver {
+  readonly bytes: Uint8Array;
+  /** Formulas that called us. */
+  readonly formulas: readonly HandedFormula[];
+  /** Cells of the whole workbook that show an error, in reading order. */
+  readonly errors: CalculatedBook['errors'];
+}
+
+/** @throws NotAWorkbook for bytes that are no whole .xlsx workbook */
+export async function handOver(bytes: Uint8Array, origin: Origin): Promise<HandedOver> {
+  const book = readWorkbook(bytes);
+  const calculated = await calculate(book);
+  const recalculated = patchWorkbook(bytes, book, calculated);
+  const pack = Package.open(recalculated);
+  const parts = findParts(pack);
+  const world = new World(book, calculated);
+  const formulas = await checked(handFormulas(world, calculated, mergedCells(pack, parts.sheets)), world);
+  if (formulas.length === 0) return { bytes: recalculated, formulas, errors: calculated.errors };
+  for (const sheet of parts.sheets) {
+    const cells = [
+      ...formulas.filter((formula) => formula.sheet === sheet.name).flatMap(cellsOf),
+      ...respelled(sheet.name, world, calculated),
+    ];
+    if (cells.length > 0)
+      pack.write(sheet.path, encodeXml(rewriteSheet(readXml(pack, sheet.path), sheet.path, cells)));
+    const notes = formulas
+      .filter((formula) => formula.sheet === sheet.name && !formula.said)
+      .map((formula) => ({ row: formula.row, column: formula.column, text: noteText(formula, origin) }));
+    if (notes.length > 0) addNotes(pack, sheet, notes);
+  }
+  const taken = new Set(parts.sheets.map(({ name }) => name.toLowerCase()));
+  addSheet(pack, parts, methodSheet(freeName(taken), formulas, world, origin));
+  dropCalcChain(pack, parts);
+  return { bytes: pack.bytes(), formulas, errors: calculated.errors };
+}
+
+function cellsOf({ row, column, said, values }: HandedFormula): RewrittenCell[] {
+  return values.flatMap((line, r) =>
+    line.map((value, c): RewrittenCell => {
+      const formula = said?.[r][c];
+      return { row: row + r, column: column + c, value, ...(formula === undefined ? {} : { formula }) };
+    }),
+  );
+}
+
+function freeName(taken: ReadonlySet<string>): string {
+  for (let n = 1; ; n++) {
+    const name = n === 1 ? 'Method' : `Method ${n}`;
+    if (!taken.has(name.toLowerCase())) return name;
+  }
+}
+
+/** `'Gas run'!C5:C24`. */
+export const placeOf = ({ sheet, area }: HandedFormula): string => `${quotedSheet(sheet)}!${areaName(area)}`;
+
+export const showsError = ({ values }: HandedFormula): boolean => values[0][0] instanceof CellError;

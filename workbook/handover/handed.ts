@@ -1,0 +1,81 @@
+/** What becomes of each formula that calls our functions: live in built-in functions, or frozen to its value. */
+import type { Area } from '../../functions/address';
+import { CellError, type CellValue } from '../../functions/cell';
+import { NotSaid } from '../../functions/builtIn/said';
+import type { CellFunction } from '../../functions/define';
+import { isSpill, type CalculatedBook } from '../engine/engine';
+import { callsOurs } from '../xlsx/formulaText';
+import { isArrayFormula } from './arrayFormula';
+import { callsIn, type Call } from './calls';
+import { sayFormula } from './say';
+import type { Position, World } from './world';
+
+export interface HandedFormula extends Position {
+  /** As it was typed, without `=`. */
+  readonly original: string;
+  /** Ours that it calls, in their order. */
+  readonly functions: readonly CellFunction[];
+  readonly area: Area;
+  /** What its cells show, row by row. */
+  readonly values: readonly (readonly CellValue[])[];
+  /** The formula of each cell in built-in functions, row by row; nothing where it is frozen. */
+  readonly said?: readonly (readonly string[])[];
+  /** Why it is frozen. */
+  readonly why?: string;
+}
+
+/** @param merged whether a cell is one of several that were merged, where no array formula may stand */
+export function handFormulas(
+  world: World,
+  calculated: CalculatedBook,
+  merged: (position: Position) => boolean,
+): HandedFormula[] {
+  return world.book.sheets.flatMap(({ name: sheet, cells }) =>
+    cells.flatMap(({ row, column, formula }) =>
+      formula !== undefined && callsOurs(formula)
+        ? [handFormula(formula, { sheet, row, column }, world, calculated, merged)]
+        : [],
+    ),
+  );
+}
+
+function handFormula(
+  original: string,
+  position: Position,
+  world: World,
+  calculated: CalculatedBook,
+  merged: (position: Position) => boolean,
+): HandedFormula {
+  const { sheet, row, column } = position;
+  const area = world.spillAt(position);
+  const each = <T>(of: (r: number, c: number) => T): T[][] =>
+    Array.from({ length: area.rows }, (_, r) => Array.from({ length: area.columns }, (__, c) => of(r, c)));
+  const common = {
+    ...position,
+    original,
+    functions: [...new Set(allCalls(callsIn(original)).map(({ f }) => f))],
+    area,
+    values: each((r, c) => calculated.shown(sheet, row + r, column + c)),
+  };
+  try {
+    const outcome = calculated.formula(sheet, row, column);
+    if (outcome?.value instanceof CellError && isSpill(outcome) && outcome.value.code === '#SPILL!')
+      throw new NotSaid('its result had no room');
+    const formulaAt = sayFormula(original, position, world);
+    const said = each(formulaAt);
+    if (merged(position) && isArrayFormula(said[0][0])) throw new NotSaid('it stands in merged cells');
+    return { ...common, said };
+  } catch (error) {
+    if (error instanceof NotSaid) return { ...common, why: error.message };
+    throw error;
+  }
+}
+
+const allCalls = (calls: readonly Call[]): Call[] =>
+  calls.flatMap((call) => [call, ...allCalls(call.given.flatMap((argument) => argument.calls))]);
+
+/** The same formula, frozen after all. */
+export const frozen = ({ said: _said, ...formula }: HandedFormula, why: string): HandedFormula => ({
+  ...formula,
+  why,
+});

@@ -1,0 +1,111 @@
+/** The sheet "Method": what each formula was and is now, how it is worked out, with which constants. */
+import { areaName, cellName } from '../../functions/address';
+import { CellError } from '../../functions/cell';
+import { typedName, type CellFunction } from '../../functions/define';
+import { signature } from '../../functions/readmeTable';
+import {
+  avogadroConstant,
+  boltzmannConstant,
+  celsiusZero,
+  elementaryCharge,
+  gasConstant,
+  planckConstant,
+  standardGravity,
+  vacuumPermittivity,
+} from '../../src/constants';
+import type { HandedFormula } from './handed';
+import type { NewSheet, SheetCell } from './sheetPart';
+import { fingerprintOf, fingerprintTolerance } from './stale';
+import type { World } from './world';
+
+/** Said of the copy itself. */
+export interface Origin {
+  readonly version: string;
+  /** Day of the copy, such as `2026-12-01`. */
+  readonly date: string;
+}
+
+const codata = 'CODATA 2022';
+const constants: readonly (readonly [string, number, string, string])[] = [
+  ['molar gas constant', gasConstant, 'J/(mol K)', `exact; ${codata}`],
+  ['Boltzmann constant', boltzmannConstant, 'J/K', `exact; ${codata}`],
+  ['Planck constant', planckConstant, 'J s', `exact; ${codata}`],
+  ['Avogadro constant', avogadroConstant, '1/mol', `exact; ${codata}`],
+  ['elementary charge', elementaryCharge, 'C', `exact; ${codata}`],
+  ['vacuum electric permittivity', vacuumPermittivity, 'F/m', codata],
+  ['0 °C', celsiusZero, 'K', 'exact; SI Brochure, 9th ed. (2019), 2.3.1'],
+  ['standard acceleration of free fall', standardGravity, 'm/s²', 'exact; 3rd CGPM (1901)'],
+];
+
+const headings = (...words: string[]): SheetCell[] => words.map((heading) => ({ heading }));
+
+export function methodSheet(
+  name: string,
+  formulas: readonly HandedFormula[],
+  world: World,
+  { version, date }: Origin,
+): NewSheet {
+  const rows: SheetCell[][] = [
+    headings('Method'),
+    [`A copy that needs no add-in, made by Flaskpace ${version} on ${date}.`],
+    [
+      'What calls of PACE functions could be said in built-in functions is live and follows its inputs. The rest is frozen to the value it had: the last column tells whether its inputs are still those of that day.',
+    ],
+    [],
+    headings('Sheet', 'Cells', 'Formula as it was', 'Now', 'Inputs then', 'Inputs now', 'State'),
+  ];
+  for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
+  rows.push([], headings('Function', 'Unit', 'What it answers', 'How it is worked out', 'Reference'));
+  rows.push(...functionsOf(formulas).map(functionRow));
+  rows.push([], headings('Constant', 'Unit', 'Value', 'Source'));
+  rows.push(...constants.map(([what, value, unit, source]): SheetCell[] => [what, unit, value, source]));
+  return { name, rows, widths: [18, 14, 48, 48, 20, 20, 24] };
+}
+
+const functionsOf = (formulas: readonly HandedFormula[]): CellFunction[] => [
+  ...new Set(formulas.flatMap(({ functions }) => functions)),
+];
+
+function functionRow(f: CellFunction): SheetCell[] {
+  return [{ heading: typedName(f) }, f.result.unit, `${signature(f)}: ${f.summary}`, f.method, f.reference];
+}
+
+export const unwatched = 'not watched';
+export const unchanged = 'inputs as they were';
+export const changed = 'inputs have changed';
+
+function formulaRow(formula: HandedFormula, row: number, world: World): SheetCell[] {
+  const { sheet, original, said, why, area } = formula;
+  const known: SheetCell[] = [sheet, areaName(area), `=${original}`];
+  if (said) return [...known, 'live, in built-in functions'];
+  const frozenCells: SheetCell[] = [...known, `frozen: ${why}`];
+  const inputs = world.areasIn(world.spelledOut(original, formula), sheet);
+  if (inputs.length === 0) return [...frozenCells, null, null, 'no inputs but those in the formula'];
+  const print = fingerprintOf(inputs, sheet, world);
+  if (!print || print.formula.length > 8000) return [...frozenCells, null, null, unwatched];
+  const [then, now] = [cellName(row - 1, 4), cellName(row - 1, 5)];
+  const same = `IF(ISERROR(${now}),FALSE,ABS(${now}-${then})<${fingerprintTolerance}*MAX(1,ABS(${then})))`;
+  return [
+    ...frozenCells,
+    print.value,
+    { formula: print.formula, value: print.value },
+    { formula: `IF(${same},"${unchanged}","${changed}")`, value: unchanged },
+  ];
+}
+
+/** The words beside a frozen cell. */
+export function noteText(
+  { original, why, functions, values }: HandedFormula,
+  { version, date }: Origin,
+): string {
+  const first = values[0][0];
+  const error =
+    first instanceof CellError && first.message ? [`It showed ${first.code}: ${first.message}`] : [];
+  const method = functions.map((f) => `${typedName(f)}: ${f.method}`);
+  return [
+    `Frozen on ${date} by Flaskpace ${version}: ${why}.`,
+    `It was =${original}`,
+    ...error,
+    ...method,
+  ].join('\n');
+}

@@ -1,0 +1,106 @@
+/** What a formula can see of its workbook on the day of the copy: values, names, tables and how far results spilled. */
+import { areaName, parseArea, type Area } from '../../functions/address';
+import type { CellRange } from '../../functions/cell';
+import { isOperator, isRange, isReference } from '@borgar/fx/xlsx';
+import type { BookModel, CalculatedBook } from '../engine/engine';
+import { plainReferences } from '../engine/tables';
+import { applyEdits, type Edit } from '../xlsx/edits';
+import { callsOurs } from '../xlsx/formulaText';
+import { tokensOf } from './calls';
+
+/** Where a formula stands. */
+export interface Position {
+  readonly sheet: string;
+  readonly row: number;
+  readonly column: number;
+}
+
+export class World {
+  constructor(
+    readonly book: BookModel,
+    private readonly calculated: CalculatedBook,
+  ) {}
+
+  /** The formula with tables and `F2#` spelled out as the cells they mean: results have a fixed size in the copy. */
+  spelledOut(formula: string, position: Position): string {
+    return this.withoutSpills(
+      plainReferences(formula, this.book.tables ?? [], position),
+      position,
+      () => true,
+    );
+  }
+
+  /** The formula with only those `F2#` spelled out whose F2 calls one of our functions. */
+  withoutOurSpills(formula: string, position: Position): string {
+    return this.withoutSpills(formula, position, (sheet, { row, column }) => {
+      const cells = this.book.sheets.find(({ name }) => name === sheet)?.cells ?? [];
+      const anchor = cells.find((cell) => cell.row === row && cell.column === column);
+      return anchor?.formula !== undefined && callsOurs(anchor.formula);
+    });
+  }
+
+  private withoutSpills(
+    formula: string,
+    { sheet }: Position,
+    wanted: (sheet: string, area: Area) => boolean,
+  ): string {
+    if (!formula.includes('#')) return formula;
+    const tokens = tokensOf(formula);
+    const edits = tokens.flatMap((token, at): Edit[] => {
+      const hash = tokens[at + 1];
+      if (!isRange(token) || !hash || !isOperator(hash) || hash.value !== '#') return [];
+      const anchor = parseArea(token.value);
+      if (!anchor || anchor.rows * anchor.columns > 1 || !wanted(anchor.sheet ?? sheet, anchor)) return [];
+      const { row, column } = anchor;
+      const spill = { ...anchor, ...this.spillAt({ sheet: anchor.sheet ?? sheet, row, column }) };
+      return [{ start: token.loc[0], end: hash.loc[1], text: areaName(spill) }];
+    });
+    return applyEdits(formula, edits);
+  }
+
+  /** The cells that a formula's result covers. */
+  spillAt({ sheet, row, column }: Position): Area {
+    const spill = this.calculated.formula(sheet, row, column)?.spill ?? { rows: 1, columns: 1 };
+    return { row, column, ...spill };
+  }
+
+  /** The area a reference or a name means; its sheet only where that is named. */
+  areaOf(text: string, sheet: string): Area | undefined {
+    const area = parseArea(text);
+    if (area) return area;
+    const name = this.nameOf(text, sheet);
+    return name === undefined ? undefined : parseArea(name);
+  }
+
+  /** Every area that a formula reads. */
+  areasIn(formula: string, sheet: string): Area[] {
+    const areas = tokensOf(formula)
+      .filter((token) => isReference(token))
+      .flatMap(({ value }) => this.areaOf(value, sheet) ?? this.lineOf(value, sheet) ?? []);
+    return [...new Map(areas.map((area) => [areaName(area), area])).values()];
+  }
+
+  cellsIn(area: Area, sheet: string): CellRange {
+    return Array.from({ length: area.rows }, (_, r) =>
+      Array.from({ length: area.columns }, (__, c) =>
+        this.calculated.shown(area.sheet ?? sheet, area.row + r, area.column + c),
+      ),
+    );
+  }
+
+  private nameOf(text: string, sheet: string): string | undefined {
+    const fits = this.book.names.filter(({ name }) => name.toUpperCase() === text.toUpperCase());
+    const found = fits.find((name) => name.sheet === sheet) ?? fits.find((name) => name.sheet === undefined);
+    return found?.refersTo;
+  }
+
+  /** `A:B`, down to the last row in use. */
+  private lineOf(text: string, sheet: string): Area | undefined {
+    const [, place = '', first, last] = /^(.*!)?\$?([A-Z]{1,3}):\$?([A-Z]{1,3})$/i.exec(text) ?? [];
+    if (first === undefined) return undefined;
+    const named = parseArea(`${place}A1`)?.sheet;
+    const cells = this.book.sheets.find(({ name }) => name === (named ?? sheet))?.cells ?? [];
+    const rows = cells.reduce((most, { row }) => Math.max(most, row + 1), 1);
+    return parseArea(`${place}${first}1:${last}${rows}`);
+  }
+}
