@@ -1,10 +1,10 @@
 /** What a person can do in the pane. Actions alone both change the store and ask the workbook. */
 import { areaName } from '../functions/address';
 import { benchOf, guardedBy } from './actions/bench';
-import { changeRun, lookForProposal, reread, selectedBlock, take } from './actions/look';
+import { changeRun, chooseSignal, lookForProposal, reread, selectedBlock, take } from './actions/look';
 import { readPointedAt } from './actions/pointing';
 import { putting } from './actions/put';
-import type { Choices, OrderChoice, RateChoice, Task } from './choices';
+import type { Choices, OrderChoice, RateChoice, ReadingChoice, Task } from './choices';
 import type { WorkbookPort } from './port';
 import type { Run } from './runs';
 import type { Store } from './store';
@@ -15,10 +15,12 @@ export interface Actions {
   chooseProposal(): Promise<void>;
   changeRun(part: Partial<Run>): Promise<void>;
   openTask(task: Task): Promise<void>;
+  changeSignal(what: string): Promise<void>;
+  changeReading(part: Partial<ReadingChoice>): Promise<void>;
   changeRate(part: Partial<RateChoice>): Promise<void>;
   changeOrder(part: Partial<OrderChoice>): Promise<void>;
-  /** Hands over the full name of the active cell, as a field takes it. */
-  pointAtActiveCell(take: (name: string) => Promise<void>): Promise<void>;
+  /** Hands over the full name of the active cell, or of all that is selected, as a field takes it. */
+  pointAt(what: 'cell' | 'selection', take: (name: string) => Promise<void>): Promise<void>;
   changeTarget(typed: string): Promise<void>;
   targetActiveCell(): Promise<void>;
   changeOptions(part: { withHeading?: boolean; withDetail?: boolean }): Promise<void>;
@@ -45,9 +47,10 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
       await settle();
     });
 
-  async function pointAtActiveCell(use: (name: string) => Promise<void>): Promise<void> {
-    const cell = await port.activeCell();
-    if (cell) await use(areaName(cell));
+  async function pointAt(what: 'cell' | 'selection', use: (name: string) => Promise<void>): Promise<void> {
+    const selection = what === 'selection' ? await port.selection() : null;
+    const area = selection?.area ?? (await port.activeCell());
+    if (area) await use(areaName(area));
     else bench.notify('bad', 'no cell is active: click one in the sheet');
   }
 
@@ -79,11 +82,17 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
       store.choose('put', { isOwn: false, question: null });
       await settle();
     }),
+    changeSignal: guarded(async (what) => {
+      chooseSignal(bench, what);
+      store.choose('put', { question: null });
+      await settle();
+    }),
+    changeReading: changing('reading'),
     changeRate: changing('rate'),
     changeOrder: changing('order'),
-    pointAtActiveCell: guarded(pointAtActiveCell),
+    pointAt: guarded(pointAt),
     changeTarget: guarded(changeTarget),
-    targetActiveCell: guarded(() => pointAtActiveCell(changeTarget)),
+    targetActiveCell: guarded(() => pointAt('cell', changeTarget)),
     changeOptions: guarded(async (part) => {
       store.choose('put', { ...part, question: null });
       await settle();

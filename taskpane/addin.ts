@@ -1,16 +1,21 @@
 /** What Excel loads: the cell functions at once, the pane when Office is ready; one runtime for both. */
+import { workerWork } from '../functions/longWork';
 import { associateAll, keepLoadedWithWorkbook } from '../functions/runtime';
 import { blanksIn, excelPort } from './excel';
 import { h } from './h';
 import { hostName, notice } from './host';
 import { mountPane } from './pane';
+import { startWorker } from './startWorker';
 import './pane.css';
 import './taskpane.css';
 
 // not inside onReady: a workbook may calculate before the pane is shown
-associateAll(globalThis, async (address) => {
-  await Office.onReady();
-  return blanksIn(address);
+associateAll(globalThis, {
+  blanksIn: async (address) => {
+    await Office.onReady();
+    return blanksIn(address);
+  },
+  longWork: workerWork(startWorker),
 });
 
 async function start(root: HTMLElement): Promise<void> {

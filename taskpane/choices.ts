@@ -1,7 +1,7 @@
 /** What a person has chosen at each step, as typed: an empty field is an argument left out. */
 
 /** The steps of the work; one is open at a time. */
-export type Task = 'rate' | 'order';
+export type Task = 'reading' | 'rate' | 'order';
 
 export type RateKind = 'average' | 'tangent' | 'column';
 
@@ -13,6 +13,14 @@ export interface RateChoice {
   readonly points: string;
   readonly degree: string;
   readonly coefficient: string;
+}
+
+/** What was measured, and under which conditions. */
+export interface ReadingChoice {
+  /** The function that converts it; empty where the readings stand as they are. */
+  readonly what: string;
+  /** By the function's own parameters. */
+  readonly inputs: Readonly<Record<string, string>>;
 }
 
 /** The reading at infinite time: left out, which means 0, or a number or cell, or fitted. */
@@ -42,13 +50,15 @@ export interface PutChoice {
   readonly question: readonly string[] | null;
 }
 
-export const firstChoices = {
+export const firstChoices: Choices = {
+  reading: { what: '', inputs: {} },
   rate: { kind: 'tangent', from: '', to: '', time: '', points: '', degree: '', coefficient: '' },
   order: { order: '1', endpointKind: 'zero', endpoint: '', answer: 'coefficient' },
   put: { target: '', isOwn: false, withHeading: true, withDetail: false, inUse: [], question: null },
-} as const satisfies Choices;
+};
 
 export interface Choices {
+  readonly reading: ReadingChoice;
   readonly rate: RateChoice;
   readonly order: OrderChoice;
   readonly put: PutChoice;

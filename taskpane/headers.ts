@@ -10,6 +10,7 @@ export type Quantity =
   | 'absorbance'
   | 'pH'
   | 'temperature'
+  | 'fraction'
   | 'unknown';
 
 export interface Heading {
@@ -33,6 +34,7 @@ const units: readonly (readonly [Quantity, RegExp])[] = [
 
 /** Words and symbols that name a quantity on their own. A single letter counts only when it stands alone. */
 const names: readonly (readonly [Quantity, RegExp])[] = [
+  ['fraction', /^x$|\bfraction\b|\bconversion\b/i],
   ['time', /^t$|\b(?:time|elapsed|clock)\b/i],
   ['absorbance', /^A(?:bs)?\.?$|\babsorb|\bA\d{3}\b|\boptical density\b/i],
   ['pH', /^pH\b/],
@@ -44,7 +46,7 @@ const names: readonly (readonly [Quantity, RegExp])[] = [
   ['temperature', /^[Tθ]$|\btemp(?:erature)?\b/],
 ];
 
-const unitless = new Set<Quantity>(['absorbance', 'pH']);
+const unitless = new Set<Quantity>(['absorbance', 'pH', 'fraction']);
 
 /** `name (unit)`, `name [unit]`, `name / unit`, `name, unit`, `name in unit`: the usual ways, in this order. */
 const forms: readonly RegExp[] = [

@@ -7,6 +7,7 @@ import type { Task } from './choices';
 import { orderStep } from './steps/order';
 import { putInStep } from './steps/putIn';
 import { rateStep } from './steps/rate';
+import { readingStep } from './steps/reading';
 import { runStep } from './steps/run';
 import { taskBar } from './steps/tasks';
 import { createScenes, type Scene } from './scene';
@@ -60,6 +61,7 @@ function oneAtATime(look: () => Promise<void>): () => void {
 }
 
 const steps: Readonly<Record<Task, (scene: Scene, actions: Actions) => HTMLElement>> = {
+  reading: readingStep,
   rate: rateStep,
   order: orderStep,
 };

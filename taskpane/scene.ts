@@ -1,7 +1,8 @@
 import type { Answered } from './calls/estimate';
 import { compareOrders, givenBy, orderAnswer, type OrderAnswer, type OrderLine } from './calls/order';
 import { rateAnswer, type RateAnswer } from './calls/rate';
-import { firstChoices, type EndpointKind, type OrderChoice } from './choices';
+import { readingAnswer, type ReadingAnswer } from './calls/reading';
+import { firstChoices, type EndpointKind, type OrderChoice, type ReadingChoice } from './choices';
 import { checkRun, type Check } from './findings';
 import { currentInsertion } from './insertions/current';
 import type { Insertion } from './insertions/insertion';
@@ -13,6 +14,7 @@ export interface Scene {
   readonly state: State;
   /** Each is `null` while there is no run. */
   readonly check: Check | null;
+  readonly reading: ReadingAnswer | null;
   readonly rate: RateAnswer | null;
   readonly order: OrderAnswer | null;
   readonly orders: Answered<readonly OrderLine[]> | null;
@@ -25,6 +27,9 @@ export interface Scene {
 export function createScenes(): (state: State) => Scene {
   const check = remembered(checkRun);
   const rate = remembered(rateAnswer);
+  const reading = remembered((table: Table, run: Run, choice: ReadingChoice, pointedAt: State['pointedAt']) =>
+    readingAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
+  );
   const order = remembered((table: Table, run: Run, choice: OrderChoice, pointedAt: State['pointedAt']) =>
     orderAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
   );
@@ -42,6 +47,9 @@ export function createScenes(): (state: State) => Scene {
       state,
       get check() {
         return table && run && check(table, run);
+      },
+      get reading() {
+        return table && run && reading(table, run, state.reading, pointedAt);
       },
       get rate() {
         return table && run && rate(table, run, state.rate);
@@ -65,6 +73,7 @@ export function createScenes(): (state: State) => Scene {
 
 function isAnswered(scene: Scene): boolean {
   const { task, order: choice } = scene.state;
+  if (task === 'reading') return scene.reading?.kind === 'column';
   if (task === 'rate') return scene.rate !== null && scene.rate.kind !== 'refused';
   const { order, orders } = scene;
   if (!order || !orders) return false;

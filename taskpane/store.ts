@@ -9,6 +9,13 @@ export interface Notice {
   readonly words: string;
 }
 
+/** What was written at one go, and what the pane was about before: both can be brought back. */
+export interface Deed {
+  readonly description: string;
+  readonly receipts: readonly WriteReceipt[];
+  readonly before: Pick<State, 'table' | 'run' | 'reading'>;
+}
+
 export interface State extends Choices {
   readonly table: Table | null;
   readonly run: Run | null;
@@ -19,7 +26,7 @@ export interface State extends Choices {
   readonly task: Task;
   /** What stands in the cells that fields point at, by their full names: `'Gas run'!E3`. */
   readonly pointedAt: ReadonlyMap<string, CellRange>;
-  readonly receipts: readonly WriteReceipt[];
+  readonly deeds: readonly Deed[];
   readonly notice: Notice | null;
 }
 
@@ -31,7 +38,7 @@ export const firstState: State = {
   hint: '',
   task: 'rate',
   pointedAt: new Map(),
-  receipts: [],
+  deeds: [],
   notice: null,
 };
 

@@ -3,7 +3,8 @@ import { rises } from '../calls/order';
 import type { RateChoice } from '../choices';
 import { withHeadingsAbove } from '../place';
 import type { RangeReading, SheetArea } from '../port';
-import { findTable, pointsOf, proposeRun, timeColumnFor, type Run, type Table } from '../runs';
+import { findTable, headingOf, pointsOf, proposeRun, timeColumnFor, type Run, type Table } from '../runs';
+import { functionOf, knownInputs, signalFor } from '../signals';
 import type { Bench } from './bench';
 
 export async function selectedBlock({ port }: Bench): Promise<RangeReading | null> {
@@ -27,6 +28,15 @@ export function take({ store }: Bench, block: RangeReading): string {
 function beginWith({ store }: Pick<Bench, 'store'>, table: Table, run: Run): void {
   store.choose('rate', startingTimes(table, run));
   store.choose('order', { endpointKind: rises(table, run) ? 'free' : 'zero', endpoint: '' });
+  chooseSignal({ store }, signalFor(headingOf(table, run.readingColumn)));
+}
+
+/** What was measured, with what the heading says of it. */
+export function chooseSignal({ store }: Pick<Bench, 'store'>, what: string): void {
+  const { table, run } = store.state;
+  const f = functionOf(what);
+  const inputs = table && run && f ? knownInputs(f, headingOf(table, run.readingColumn)) : {};
+  store.choose('reading', { what, inputs });
 }
 
 /** The readings may have been edited since. */
@@ -76,6 +86,8 @@ export function changeRun({ store }: Bench, part: Partial<Run>): void {
   if (!table || !run) return;
   const next = settledRun(table, run, part);
   store.change({ run: next, notice: null });
+  if (next.readingColumn !== run.readingColumn)
+    chooseSignal({ store }, signalFor(headingOf(table, next.readingColumn)));
   const turned = rises(table, next) !== rises(table, run);
   if (turned) store.choose('order', { endpointKind: rises(table, next) ? 'free' : 'zero', endpoint: '' });
 }

@@ -2,19 +2,25 @@
 import { parseArea } from '../../functions/address';
 import { CellError, type CellRange } from '../../functions/cell';
 import { pointedName } from '../calls/argument';
+import { functionOf } from '../signals';
 import type { State } from '../store';
 import type { Bench } from './bench';
 
-/** What is typed into the fields of all steps that take cells as well as numbers. */
-const typedIn = ({ order }: State): readonly string[] => [order.endpoint];
+/** What the fields of all steps that take cells as well as numbers point at. */
+function namesIn({ order, reading }: State, sheet: string): readonly string[] {
+  const parameters = functionOf(reading.what)?.parameters ?? {};
+  const inputs = Object.entries(reading.inputs).map(([name, typed]) =>
+    pointedName(typed, sheet, parameters[name]?.kind === 'text'),
+  );
+  return [pointedName(order.endpoint, sheet), ...inputs].flatMap((name) => name ?? []);
+}
 
 /** Nothing is stored where nothing has changed, so that nothing is calculated again. */
 export async function readPointedAt({ store, port }: Bench): Promise<void> {
   const { table, pointedAt } = store.state;
   if (!table) return;
-  const names = typedIn(store.state).flatMap((typed) => pointedName(typed, table.sheet) ?? []);
   const found = new Map<string, CellRange>();
-  for (const name of new Set(names)) {
+  for (const name of new Set(namesIn(store.state, table.sheet))) {
     const area = { sheet: table.sheet, ...parseArea(name)! };
     const cells = await port.read(area).then(
       (reading) => reading.cells,

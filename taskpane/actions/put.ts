@@ -1,10 +1,14 @@
 /** Putting a formula into the sheet, and taking it back. */
+import { readingAnswer } from '../calls/reading';
 import { currentInsertion } from '../insertions/current';
+import type { Insertion } from '../insertions/insertion';
 import { firstFree } from '../place';
-import { planFor } from '../plan';
+import { planFor, type Plan } from '../plan';
 import { CellsInUse, type SheetArea } from '../port';
+import type { Deed, State } from '../store';
 import type { Bench } from './bench';
-import { reread } from './look';
+import { adoptColumn } from './adopt';
+import { changeRun, reread } from './look';
 
 export interface Putting {
   /** Proposes a place, unless the person has named one, and sees what stands there. */
@@ -38,15 +42,19 @@ export function putting(bench: Bench): Putting {
   async function putIn(overwrite: boolean): Promise<void> {
     await reread(bench);
     const insertion = currentInsertion(store.state);
-    const { table, put } = store.state;
-    if (!table || !insertion) return;
-    const plan = planFor(insertion, table.sheet, put);
+    const { put } = store.state;
+    const sheet = store.state.table?.sheet;
+    if (sheet === undefined || !insertion) return;
+    const plan = planFor(insertion, sheet, put);
     if (typeof plan === 'string') return notify('bad', plan);
     try {
       const receipt = await port.write(plan.cells, { overwrite, description: plan.description });
-      store.change({ receipts: [...store.state.receipts, receipt] });
-      notify('good', `written: ${plan.description}`);
+      const { table, run, reading, deeds } = store.state;
+      const deed = { description: plan.description, receipts: [receipt], before: { table, run, reading } };
+      store.change({ deeds: [...deeds, deed] });
       store.choose('put', { question: null, isOwn: false });
+      const goesOn = insertion.becomesReadings && (await goOnWith(plan, insertion));
+      notify('good', `written: ${plan.description}${goesOn ? ', now the readings of this run' : ''}`);
       await port.reveal(plan.target);
       await settle();
     } catch (error) {
@@ -55,14 +63,36 @@ export function putting(bench: Bench): Putting {
     }
   }
 
+  /** @returns whether the run now has the column just written as its readings */
+  async function goOnWith(plan: Plan, { headings }: Insertion): Promise<boolean> {
+    const { table, run, reading, pointedAt } = store.state;
+    const answer = table && run && readingAnswer(table, run, reading, { sheet: table.sheet, pointedAt });
+    if (answer?.kind !== 'column') return false;
+    if (!(await adoptColumn(bench, plan, headings[0], answer.cells))) return false;
+    changeRun(bench, { readingColumn: plan.target.column, timeColumn: run!.timeColumn });
+    return true;
+  }
+
   async function undoLast(): Promise<void> {
-    const receipt = store.state.receipts[store.state.receipts.length - 1];
-    if (!receipt) return;
-    await port.undo(receipt);
-    store.change({ receipts: store.state.receipts.slice(0, -1) });
-    notify('good', `taken back: ${receipt.description}`);
+    const { deeds, run } = store.state;
+    const deed = deeds[deeds.length - 1];
+    if (!deed) return;
+    for (const receipt of [...deed.receipts].reverse()) await port.undo(receipt);
+    const wentOn = run !== deed.before.run && meansWritten(deed, store.state);
+    store.change({ deeds: deeds.slice(0, -1), ...(wentOn ? deed.before : {}) });
+    notify('good', `taken back: ${deed.description}`);
     await settle();
   }
 
   return { settle, putIn, undoLast };
 }
+
+/** The run has gone on with the column that is taken away. */
+function meansWritten({ receipts }: Deed, { table, run }: State): boolean {
+  return receipts.some(
+    ({ area }) => area.sheet === table?.sheet && run !== null && holds(area, run.readingColumn),
+  );
+}
+
+const holds = ({ column, columns }: SheetArea, other: number): boolean =>
+  other >= column && other < column + columns;

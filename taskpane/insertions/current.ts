@@ -1,6 +1,7 @@
 import type { State } from '../store';
 import type { Insertion } from './insertion';
 import { orderInsertion } from './order';
+import { readingInsertion } from './reading';
 import { rateInsertion } from './rate';
 
 /** What the open step would write; `null` while it has nothing to write. */
@@ -8,5 +9,6 @@ export function currentInsertion(state: State): Insertion | null {
   const { table, run, task, put } = state;
   if (!table || !run) return null;
   if (task === 'order') return orderInsertion(table, run, state, put.withDetail);
+  if (task === 'reading') return readingInsertion(table, run, state);
   return rateInsertion(table, run, state.rate, put.withDetail);
 }

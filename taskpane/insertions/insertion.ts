@@ -24,6 +24,8 @@ export interface Insertion {
   readonly reads: readonly SheetArea[];
   /** Whether uncertainty and limits can stand beside the value. */
   readonly hasDetail: boolean;
+  /** Whether the run goes on with the column it puts in. */
+  readonly becomesReadings?: boolean;
 }
 
 /** One formula, as large as its answer. */

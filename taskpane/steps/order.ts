@@ -94,7 +94,7 @@ function endpointFields(order: OrderChoice, { coefficient }: OrderAnswer, action
             problem,
             onInput: (typed) => void set(typed),
           }),
-          button('Take the active cell', () => void actions.pointAtActiveCell(set), 'small'),
+          button('Take the active cell', () => void actions.pointAt('cell', set), 'small'),
         ]
       : []),
   ];

@@ -15,7 +15,11 @@ export function putInStep({ state, insertion, isAnswered }: Scene, actions: Acti
     return step(
       'put-in',
       title,
-      h('p', { className: 'hint' }, 'An answer can be written beside its run.'),
+      h(
+        'p',
+        { className: 'hint' },
+        table ? 'Nothing to put in here.' : 'An answer can be written beside its run.',
+      ),
       undoButton(state, actions),
     );
   const plan = planFor(insertion, table.sheet, put);
@@ -56,7 +60,7 @@ export function putInStep({ state, insertion, isAnswered }: Scene, actions: Acti
       : h(
           'button',
           { type: 'button', className: 'main', disabled: !isReady, onclick: () => void actions.putIn(false) },
-          'Put it in',
+          insertion.becomesReadings ? 'Put it in and go on with it' : 'Put it in',
         ),
     undoButton(state, actions),
   );
@@ -97,7 +101,7 @@ const list = (names: readonly string[]): string =>
     ? names.join(', ')
     : `${names.slice(0, longestList).join(', ')} and ${names.length - longestList} more`;
 
-function undoButton({ receipts }: State, actions: Actions): HTMLElement | null {
-  const last = receipts[receipts.length - 1];
+function undoButton({ deeds }: State, actions: Actions): HTMLElement | null {
+  const last = deeds[deeds.length - 1];
   return last ? button(`Undo: ${last.description}`, () => void actions.undoLast()) : null;
 }

@@ -4,6 +4,7 @@ import type { Task } from '../choices';
 import { h } from '../h';
 
 export const tasks: readonly (readonly [Task, string])[] = [
+  ['reading', 'Reading'],
   ['rate', 'Rate'],
   ['order', 'Order'],
 ];

@@ -1,6 +1,7 @@
-/** A workbook in memory behind the port: cells only, nothing is calculated. */
+/** A workbook in memory behind the port. A formula of ours is calculated once, when it is written. */
 import { cellName, parseArea } from '../../functions/address';
 import type { CellValue } from '../../functions/cell';
+import { answerOf } from './memoryFormulas';
 import {
   CellsInUse,
   type CellToWrite,
@@ -135,8 +136,15 @@ export function memoryWorkbook(sheets: Sheets): MemoryWorkbook {
       for (const one of toWrite) {
         const name = key(one.area.sheet, one.area.row, one.area.column);
         if ('value' in one.content) cells.set(name, { value: one.content.value });
-        else places(reachOf(one)).forEach(([r, c]) => cells.set(key(one.area.sheet, r, c), { value: 0 }));
-        if ('formula' in one.content) cells.set(name, { value: 0, formula: one.content.formula });
+        else {
+          const formula = one.content.formula;
+          const answer = answerOf(formula, one.area.sheet, (of) => reading(of).cells);
+          places(reachOf(one)).forEach(([r, c]) => {
+            const value = answer ? answer[r - one.area.row]?.[c - one.area.column] : 0;
+            if (value !== undefined) cells.set(key(one.area.sheet, r, c), { value });
+          });
+          cells.set(name, { value: cells.get(name)?.value ?? 0, formula });
+        }
       }
       return { description, area: reachOf(toWrite[0]), snapshot };
     },
