@@ -15,8 +15,12 @@ export interface FunctionMetadata {
   readonly helpUrl?: string;
   readonly parameters: readonly ParameterMetadata[];
   readonly result: { readonly type: 'any'; readonly dimensionality: Dimensionality };
-  /** Where its ranges stand in the sheet, so that a blank can be told from a zero. */
-  readonly options?: { readonly requiresParameterAddresses: true };
+  readonly options?: {
+    /** Where its ranges stand in the sheet, so that a blank can be told from a zero. */
+    readonly requiresParameterAddresses?: true;
+    /** It is told when its answer is no longer wanted. */
+    readonly cancelable?: true;
+  };
 }
 
 interface ParameterMetadata {
@@ -49,8 +53,16 @@ function describeFunction(f: CellFunction, helpBase: string | undefined): Functi
     ...(helpBase === undefined ? {} : { helpUrl: `${helpBase}/${f.name.toLowerCase()}` }),
     parameters: Object.entries(f.parameters).map(([name, parameter]) => describeParameter(name, parameter)),
     result: { type: 'any', dimensionality: canSpill(f) ? 'matrix' : 'scalar' },
-    ...(takesRanges(f) ? { options: { requiresParameterAddresses: true } } : {}),
+    ...optionsOf(f),
   };
+}
+
+function optionsOf(f: CellFunction): Pick<FunctionMetadata, 'options'> {
+  const options = {
+    ...(takesRanges(f) ? { requiresParameterAddresses: true as const } : {}),
+    ...(f.isLong ? { cancelable: true as const } : {}),
+  };
+  return Object.keys(options).length > 0 ? { options } : {};
 }
 
 function describeParameter(name: string, parameter: Parameter): ParameterMetadata {

@@ -3,6 +3,7 @@ import { callFunction } from './call';
 import { catalogue } from './catalogue';
 import { CellError, isRange, type CellRange, type CellResult, type CellValue, type ErrorCode } from './cell';
 import type { CellFunction } from './define';
+import type { LongWork } from './longWork';
 
 /** The part of Excel's global that is used, so that it can be absent and can be stood in for. */
 export interface CustomFunctionsHost {
@@ -35,12 +36,18 @@ const allowed: ReadonlySet<ErrorCode> = new Set([
 /** Looks into the sheet: which cells of `'Gas run'!B2:B9` are blank, row by row. */
 export type BlanksIn = (address: string) => Promise<readonly (readonly boolean[])[]>;
 
+/** What stands behind the functions in Excel. */
+export interface Backing {
+  readonly blanksIn?: BlanksIn;
+  readonly longWork?: LongWork;
+}
+
 /** Does nothing where Excel is not: Office.js did not load, or this is another page. */
-export function associateAll(globals: object, blanksIn?: BlanksIn): void {
+export function associateAll(globals: object, { blanksIn, longWork }: Backing = {}): void {
   const host = (globals as Globals).CustomFunctions;
   if (!host || typeof host.associate !== 'function') return;
-  const look = blanksIn && sharingLooks(blanksIn);
-  for (const f of catalogue) host.associate(f.name, excelHandler(f, host, look));
+  const backing = { blanksIn: blanksIn && sharingLooks(blanksIn), longWork };
+  for (const f of catalogue) host.associate(f.name, excelHandler(f, host, backing));
 }
 
 /** Twenty formulas over one run look at it once: those that ask while the answer is on its way share it. */
@@ -67,6 +74,8 @@ export async function keepLoadedWithWorkbook(globals: object): Promise<void> {
 interface Invocation {
   /** Where each argument stands in the sheet; nothing for one that is not a reference. */
   readonly parameterAddresses?: readonly (string | null | undefined)[];
+  /** Called when the answer is no longer wanted. */
+  onCanceled?: () => void;
 }
 
 /**
@@ -76,16 +85,21 @@ interface Invocation {
 export function excelHandler(
   f: CellFunction,
   host: CustomFunctionsHost,
-  blanksIn?: BlanksIn,
+  { blanksIn, longWork }: Backing = {},
 ): (...args: unknown[]) => unknown {
   const count = Object.keys(f.parameters).length;
-  const answer = (args: readonly unknown[]): unknown => {
+  const answerTo = (args: readonly unknown[], invocation?: Invocation): unknown => {
     const cells = args.map((argument) => fromExcel(argument, host));
-    return forExcel(callFunction(f, cells), host);
+    if (!f.isLong || !longWork) return forExcel(callFunction(f, cells), host);
+    const stop = new AbortController();
+    if (invocation) invocation.onCanceled = () => stop.abort();
+    return longWork.run(f, cells, stop.signal).then((result) => forExcel(result, host));
   };
   return (...all) => {
     const args = all.slice(0, count);
-    const addresses = (all[count] as Invocation | undefined)?.parameterAddresses ?? [];
+    const invocation = all[count] as Invocation | undefined;
+    const answer = (given: readonly unknown[]): unknown => answerTo(given, invocation);
+    const addresses = invocation?.parameterAddresses ?? [];
     const doubtful = args.some((argument, place) => addresses[place] && hasDoubtfulZero(argument));
     if (!blanksIn || !doubtful) return answer(args);
     return Promise.all(args.map((argument, place) => withBlanks(argument, addresses[place], blanksIn))).then(

@@ -39,6 +39,7 @@ export default defineFunction({
     equals: [['run'], [1, 1, 0.06931471805599453], [2, 1, 0.13862943611198906]],
   },
   reference: 'doi:10.1351/goldbook.O04322',
+  isLong: true,
   run({ times, block, order, endpoint }) {
     const runs = columnsBeside(block, times, { block: 'block', beside: 'times' });
     const surveyed = runs.map((run, i) => rowOf(times, run, i + 1, { order: order ?? 'free', endpoint }));

@@ -32,6 +32,7 @@ export default defineFunction({
   },
   reference:
     'doi:10.1093/biomet/62.1.57; Atkinson, Donev and Tobias, Optimum Experimental Designs (2007), 17',
+  isLong: true,
   run({ order, coefficient, initial, noise, samples, goal }) {
     const run = { order, rateCoefficient: coefficient, initial, noise, samples };
     if (typeof goal === 'number') return againstRival(run, goal);

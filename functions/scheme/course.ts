@@ -22,6 +22,7 @@ export default defineFunction({
     within: 1e-8,
   },
   reference: 'doi:10.1007/s10543-023-00967-x; doi:10.1351/goldbook.O04322',
+  isLong: true,
   run({ scheme, coefficients, initial, times }) {
     const rates = filled(coefficients, 'coefficients', stepAt(scheme));
     const start = filled(initial, 'initial', speciesAt(scheme));

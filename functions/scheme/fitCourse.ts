@@ -33,6 +33,7 @@ export default defineFunction({
     within: 1e-8,
   },
   reference: 'doi:10.1007/s10543-023-00967-x; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
+  isLong: true,
   run({ scheme, coefficients, initial, times, observed: readings, detail: isDetailed }) {
     const start = filled(coefficients, 'coefficients', stepAt(scheme));
     const experiment = {

@@ -33,13 +33,39 @@ export function planAgainst(run: PlannedRun, rival: number): DiscriminationPlan 
   if (samples < 3)
     throw new NotDetermined(`to tell two orders apart takes 3 readings or more: got ${samples}`);
   const longest = reducedTimeTo(2 ** -longestPlan, order);
-  const reduced = mostMissed(order, rival, samples, longest);
+  const reduced = forAll(
+    mostMissed(order, rival, Math.min(samples, mostSearched), longest),
+    samples,
+    longest,
+  );
   const separation = (Math.sqrt(missedBy(reduced, order, rival).squares) * initial) / noise;
   return {
     times: reduced.map((s) => s / reducedRate(run)),
     separation,
     power: normalAbove(limit - separation) + normalAbove(limit + separation),
   };
+}
+
+/** So many readings are searched for one by one; a larger plan repeats their times. */
+const mostSearched = 12;
+
+/** The plan's times with as many readings each as their share of it (largest remainders). */
+function forAll(times: readonly number[], samples: number, longest: number): number[] {
+  if (samples === times.length) return [...times];
+  const groups: number[][] = [];
+  for (const time of times) {
+    const last = groups.at(-1);
+    if (last && time - last[0] < 0.02 * longest) last.push(time);
+    else groups.push([time]);
+  }
+  const shares = groups.map((group) => (samples * group.length) / times.length);
+  const counts = shares.map(Math.floor);
+  const byRemainder = [...shares.keys()].sort((a, b) => shares[b] - counts[b] - (shares[a] - counts[a]));
+  for (let i = 0, left = samples - counts.reduce((sum, n) => sum + n, 0); i < left; i++)
+    counts[byRemainder[i]]++;
+  return groups.flatMap((group, i) =>
+    new Array<number>(counts[i]).fill(group.reduce((sum, time) => sum + time, 0) / group.length),
+  );
 }
 
 /** Two-sided 5 % of the normal distribution. */

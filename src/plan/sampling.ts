@@ -62,17 +62,26 @@ export const reducedRate = ({ order, rateCoefficient, initial }: PlannedRun): nu
 export function planForCoefficient(run: PlannedRun): SamplingPlan {
   requirePlannedRun(run);
   const { order, rateCoefficient, initial, noise, samples } = run;
-  let best = { times: [] as number[], variance: Infinity };
-  for (let atStart = samples === 1 ? 0 : 1; atStart < Math.max(samples, 1); atStart++) {
-    const planned = (late: number): number[] =>
-      Array.from({ length: samples }, (_, i) => (i < atStart ? 0 : late));
-    const variance = (late: number): number => varianceOfLogCoefficient(planned(late), order);
-    const late = leastPlace(variance, reducedTimeTo(2 ** -longestPlan, order));
-    const found = variance(late);
-    if (found < best.variance) best = { times: planned(late), variance: found };
+  const longest = reducedTimeTo(2 ** -longestPlan, order);
+  const planWith = (atStart: number): { late: number; variance: number } => {
+    const variance = (late: number): number =>
+      varianceFrom([0, late], [atStart, samples - atStart], order, samples === 1);
+    const late = leastPlace(variance, longest);
+    return { late, variance: variance(late) };
+  };
+  // the variance has one lowest place in the number of readings at the start: walk there
+  let atStart = samples === 1 ? 0 : Math.max(1, Math.round(samples / 5));
+  let best = planWith(atStart);
+  for (const step of [-1, 1]) {
+    while (samples > 1 && atStart + step >= 1 && atStart + step < samples) {
+      const next = planWith(atStart + step);
+      if (!(next.variance < best.variance)) break;
+      [atStart, best] = [atStart + step, next];
+    }
   }
+  const reduced = Array.from({ length: samples }, (_, i) => (i < atStart ? 0 : best.late));
   return {
-    times: best.times.map((s) => s / reducedRate(run)),
+    times: reduced.map((s) => s / reducedRate(run)),
     standardUncertainty: rateCoefficient * (noise / initial) * Math.sqrt(best.variance),
   };
 }
@@ -83,20 +92,33 @@ export function planForCoefficient(run: PlannedRun): SamplingPlan {
  * @returns Infinity where the readings tell nothing of k
  * @example varianceOfLogCoefficient([1], 1) // 7.389056098930649
  */
-export function varianceOfLogCoefficient(reducedTimes: readonly number[], order: number): number {
+export const varianceOfLogCoefficient = (reducedTimes: readonly number[], order: number): number =>
+  varianceFrom(
+    reducedTimes,
+    reducedTimes.map(() => 1),
+    order,
+    reducedTimes.length === 1,
+  );
+
+function varianceFrom(
+  reducedTimes: readonly number[],
+  counts: readonly number[],
+  order: number,
+  isStartKnown: boolean,
+): number {
   // sums of squares and products of y = c₀ φ(k c₀ⁿ⁻¹ t) by ln c₀ and by ln k
   let starts = 0;
   let both = 0;
   let slopes = 0;
-  for (const s of reducedTimes) {
+  reducedTimes.forEach((s, i) => {
     const share = shareLeft(s, order);
     const slope = shareSlope(s, order, share);
     const start = share + (order - 1) * slope;
-    starts += start * start;
-    both += start * slope;
-    slopes += slope * slope;
-  }
-  const told = reducedTimes.length === 1 ? slopes : slopes - (both * both) / starts;
+    starts += counts[i] * start * start;
+    both += counts[i] * start * slope;
+    slopes += counts[i] * slope * slope;
+  });
+  const told = isStartKnown ? slopes : slopes - (both * both) / starts;
   return told > 1e-12 * slopes ? 1 / told : Infinity;
 }
 

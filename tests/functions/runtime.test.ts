@@ -119,26 +119,28 @@ describe('a zero that may be a blank', () => {
 
   test('is looked at in the sheet, and only there', async () => {
     const blanksIn = jest.fn(async () => [[false], [false], [true]]);
-    const answer = await excelHandler(gaps, host, blanksIn)(x, y, at);
+    const answer = await excelHandler(gaps, host, { blanksIn })(x, y, at);
     expect(answer).toEqual([[0], [10], ['gap'], [5], [6], [7]]);
     expect(blanksIn.mock.calls).toEqual([['Run!A1:A3']]);
   });
 
   test('costs nothing in columns without zeros, or of zeros alone', () => {
     const blanksIn = jest.fn();
-    expect(excelHandler(gaps, host, blanksIn)(y, [[0], [0]], at)).toEqual([[5], [6], [7], [0], [0]]);
+    expect(excelHandler(gaps, host, { blanksIn })(y, [[0], [0]], at)).toEqual([[5], [6], [7], [0], [0]]);
     expect(blanksIn).not.toHaveBeenCalled();
   });
 
   test('is believed in what is no reference, and where the sheet cannot be read', async () => {
     const blanksIn = jest.fn(() => Promise.reject(new Error('busy')));
-    expect(excelHandler(gaps, host, blanksIn)(x, y, { parameterAddresses: [null, null] })).toHaveLength(6);
-    expect(excelHandler(gaps, host, blanksIn)(x, y)).toHaveLength(6);
-    expect(await excelHandler(gaps, host, blanksIn)(x, y, at)).toEqual([[0], [10], [0], [5], [6], [7]]);
+    expect(excelHandler(gaps, host, { blanksIn })(x, y, { parameterAddresses: [null, null] })).toHaveLength(
+      6,
+    );
+    expect(excelHandler(gaps, host, { blanksIn })(x, y)).toHaveLength(6);
+    expect(await excelHandler(gaps, host, { blanksIn })(x, y, at)).toEqual([[0], [10], [0], [5], [6], [7]]);
   });
 
   test('an error still reaches the cell as one', async () => {
-    const call = excelHandler(gaps, host, async () => [[false], [true], [true]]);
+    const call = excelHandler(gaps, host, { blanksIn: async () => [[false], [true], [true]] });
     const block = [
       [0, 1],
       [2, 3],
@@ -149,7 +151,7 @@ describe('a zero that may be a blank', () => {
   test('formulas that ask at once share one look', async () => {
     const fresh = new FakeHost();
     const blanksIn = jest.fn(async () => [[false], [false]]);
-    associateAll({ CustomFunctions: fresh }, blanksIn);
+    associateAll({ CustomFunctions: fresh }, { blanksIn });
     const event = fresh.handlers.get('EVENT')!;
     const times = [[0], [25]];
     const ask = async (): Promise<unknown> => event(times, null, null, at);

@@ -1,6 +1,8 @@
 /** The local workbook: a grid with every PACE function live, and the pane beside it. */
+import { workerWork } from '../../functions/longWork';
 import { h } from '../../taskpane/h';
 import { mountPane } from '../../taskpane/pane';
+import { startWorker } from '../../taskpane/startWorker';
 import '../../taskpane/pane.css';
 import { demoWorkbook } from '../demo/demo';
 import { createGrid } from '../engine/univer/grid';
@@ -12,6 +14,7 @@ import './page.css';
 import { moveBetween } from './regions';
 import { offerToScripts } from './scripting';
 import { fillStrip } from './strip';
+import { waitingFor } from './waitingFor';
 
 const part = (id: string): HTMLElement => document.getElementById(id)!;
 
@@ -20,7 +23,10 @@ async function start(): Promise<void> {
   const gridElement = part('grid');
   gridElement.replaceChildren();
   const demo = demoWorkbook();
-  const grid = createGrid(gridElement, demo, { isDark: dark.matches });
+  const grid = createGrid(gridElement, demo, {
+    isDark: dark.matches,
+    longWork: workerWork(startWorker, waitingFor(part('long-work'))),
+  });
   dark.addEventListener('change', () => grid.setDark(dark.matches));
 
   const strip = fillStrip(part('strip'), {

@@ -33,6 +33,16 @@ export function sheetSuite(sheet: () => BenchPage): void {
     expect(await sheet().page.title()).toBe('• demo.xlsx – Flaskpace');
   });
 
+  test('a long calculation is done on another thread, and its answer spills like any other', async () => {
+    await sheet().type("'Gas run'!Q3", '=ROUND(PACE.COURSE("A -> B",0.0693147180559945,{8;0},{0;10;20}),6)');
+    await sheet().shows("'Gas run'!Q3:R5", [
+      [8, 0],
+      [4, 4],
+      [2, 6],
+    ]);
+    expect(sheet().page.workers()).toHaveLength(1);
+  });
+
   test('a spill can be referred to by its first cell', async () => {
     await sheet().type("'Gas run'!Q1", '=PACE.EVENT({20;25;40})');
     await sheet().type("'Gas run'!R1", '=SUM(Q1#)');

@@ -10,6 +10,7 @@ import { SheetsSelectionsService } from '@univerjs/sheets';
 import { FormulaCalculationSessionService } from '@univerjs/sheets-formula';
 import { ILayoutService } from '@univerjs/ui';
 import { merge, Subject } from 'rxjs';
+import type { LongWork } from '../../../functions/longWork';
 import type { BookModel } from '../engine';
 import type { Grid, GridArea, Stop } from '../grid';
 import { nameControls } from './grid/accessibleNames';
@@ -31,9 +32,19 @@ const longestWait = 60_000; // ms
 /** Keys just struck go through the grid's editor in steps of its own. */
 const keysUnderWay = 100; // ms
 
+export interface GridOptions {
+  readonly isDark?: boolean;
+  /** Where long calculations are done; left out, on the page's own thread. */
+  readonly longWork?: LongWork;
+}
+
 /** @param container an element of the page that has a size; the book is shown in it, and calculated in a while */
-export function createGrid(container: HTMLElement, first: BookModel, { isDark = false } = {}): Grid {
-  const { univer, injector, api } = bootGrid(container, isDark);
+export function createGrid(
+  container: HTMLElement,
+  first: BookModel,
+  { isDark = false, longWork }: GridOptions = {},
+): Grid {
+  const { univer, injector, api } = bootGrid(container, isDark, longWork);
   let opened = 0;
   const show = (book: BookModel): Sheets =>
     sheetsOf(

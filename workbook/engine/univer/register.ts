@@ -2,6 +2,7 @@
 import { FunctionType, type IFunctionInfo } from '@univerjs/engine-formula';
 import { catalogue } from '../../../functions/catalogue';
 import { typedName, type CellFunction } from '../../../functions/define';
+import type { LongWork } from '../../../functions/longWork';
 import { parameterHelp } from '../../../functions/metadata';
 import { filedName } from '../names';
 import { anchorArray } from '../anchorText';
@@ -23,21 +24,25 @@ export interface FormulaPluginConfig {
   readonly description: IFunctionInfo[];
 }
 
-/** What both plugins must be given; it also mends the engine where our functions need it. */
-export function formulaPluginConfig(): FormulaPluginConfig {
+/**
+ * What both plugins must be given; it also mends the engine where our functions need it.
+ *
+ * @param longWork where long calculations are done; left out, with all others
+ */
+export function formulaPluginConfig(longWork?: LongWork): FormulaPluginConfig {
   mendArrayConstants();
   mendLargeSpills();
   containFaults();
   noteMessages();
   return {
-    function: [...catalogue.flatMap(underBothNames), [AnchorArray, anchorArray]],
+    function: [...catalogue.flatMap((f) => underBothNames(f, longWork)), [AnchorArray, anchorArray]],
     description: catalogue.map(argumentHelp),
   };
 }
 
 /** The engine looks names up in capitals. */
-function underBothNames(f: CellFunction): [EngineFunctionClass, string][] {
-  const Class = engineFunction(f);
+function underBothNames(f: CellFunction, longWork?: LongWork): [EngineFunctionClass, string][] {
+  const Class = engineFunction(f, longWork);
   return [
     [Class, typedName(f)],
     [Class, filedName(f).toUpperCase()],

@@ -5,6 +5,7 @@ import { LocaleType, LogLevel, Univer, type Injector, type Plugin, type PluginCt
 import { FUniver } from '@univerjs/core/facade';
 import { CalculationMode, UniverSheetsCorePreset } from '@univerjs/preset-sheets-core';
 import enUS from '@univerjs/preset-sheets-core/locales/en-US';
+import type { LongWork } from '../../../../functions/longWork';
 import { formulaPluginConfig } from '../register';
 import { gridTheme } from './theme';
 
@@ -14,7 +15,7 @@ export interface BootedGrid {
   readonly api: FUniver;
 }
 
-export function bootGrid(container: HTMLElement, isDark: boolean): BootedGrid {
+export function bootGrid(container: HTMLElement, isDark: boolean, longWork?: LongWork): BootedGrid {
   const univer = new Univer({
     theme: gridTheme,
     darkMode: isDark,
@@ -29,7 +30,7 @@ export function bootGrid(container: HTMLElement, isDark: boolean): BootedGrid {
     ribbonType: 'simple',
     formulaBar: true,
     disableAutoFocus: true,
-    formula: { ...formulaPluginConfig(), initialFormulaComputing: CalculationMode.FORCED },
+    formula: { ...formulaPluginConfig(longWork), initialFormulaComputing: CalculationMode.FORCED },
   });
   for (const plugin of plugins) {
     const [constructor, config] = Array.isArray(plugin) ? plugin : [plugin as PluginCtor<Plugin>, undefined];

@@ -1,0 +1,160 @@
+/**
+ * Long calculations on a thread of their own, so that a sheet can be scrolled and typed into meanwhile. What
+ * crosses between the threads is plain data; the functions are the same on both sides.
+ */
+import { callFunction } from './call';
+import { functionNamed } from './catalogue';
+import { CellError, isRange, type CellResult, type CellValue, type ErrorCode } from './cell';
+import { typedName, type CellFunction } from './define';
+
+/** Whatever does a function's work somewhere else. */
+export interface LongWork {
+  /** @param stop ends it: the answer is then an error that says so */
+  run(f: CellFunction, args: readonly (CellResult | undefined)[], stop?: AbortSignal): Promise<CellResult>;
+}
+
+/** A long calculation while it runs. */
+export interface Underway {
+  /** As it is typed. */
+  readonly name: string;
+  /** How many others wait for it. */
+  readonly waiting: number;
+  stop(): void;
+}
+
+type PlainCell = Exclude<CellValue, CellError> | { readonly code: ErrorCode; readonly message: string };
+type Plain = PlainCell | readonly (readonly PlainCell[])[];
+
+export interface Job {
+  readonly id: number;
+  readonly name: string;
+  readonly args: readonly (Plain | undefined)[];
+}
+
+export interface Answer {
+  readonly id: number;
+  readonly result: Plain;
+}
+
+const plainCell = (cell: CellValue): PlainCell =>
+  cell instanceof CellError ? { code: cell.code, message: cell.message } : cell;
+
+const toPlain = (result: CellResult): Plain =>
+  isRange(result) ? result.map((row) => row.map(plainCell)) : plainCell(result);
+
+const cellOf = (cell: PlainCell): CellValue =>
+  typeof cell === 'object' && cell !== null ? new CellError(cell.code, cell.message) : cell;
+
+const fromPlain = (plain: Plain): CellResult =>
+  Array.isArray(plain)
+    ? plain.map((row: readonly PlainCell[]) => row.map(cellOf))
+    : cellOf(plain as PlainCell);
+
+/** On the other thread: does a job. */
+export function answerJob({ id, name, args }: Job): Answer {
+  const f = functionNamed(name);
+  const result = f
+    ? callFunction(
+        f,
+        args.map((argument) => (argument === undefined ? undefined : fromPlain(argument))),
+      )
+    : new CellError('#NAME?', `there is no function ${name}`);
+  return { id, result: toPlain(result) };
+}
+
+/** The part of a browser's Worker that is used. */
+export interface WorkerLike {
+  postMessage(job: Job): void;
+  terminate(): void;
+  onmessage: ((event: { readonly data: Answer }) => void) | null;
+  onerror: ((event: unknown) => void) | null;
+}
+
+interface Waiting {
+  readonly job: Job;
+  readonly f: CellFunction;
+  readonly args: readonly (CellResult | undefined)[];
+  settle(result: CellResult): void;
+}
+
+const stopped = (): CellError =>
+  new CellError('#N/A', 'stopped before it was done: edit the cell to start again');
+
+/**
+ * One job after another on one worker, which is started when first needed. A job that is stopped while it runs
+ * takes its worker with it; where none can be started the work is done here after all.
+ *
+ * @param tell what is under way, at every start, and `null` when nothing is any more
+ */
+export function workerWork(
+  startWorker: () => WorkerLike,
+  tell: (underway: Underway | null) => void = () => undefined,
+): LongWork {
+  const queue: Waiting[] = [];
+  let worker: WorkerLike | undefined;
+  let current: Waiting | undefined;
+  let isBroken = false;
+  let lastId = 0;
+
+  function next(): void {
+    if (current) return;
+    current = queue.shift();
+    if (!current) return tell(null);
+    const waiting = current;
+    tell({ name: typedName(waiting.f), waiting: queue.length, stop: () => stop(waiting) });
+    try {
+      if (isBroken) throw new Error('no worker');
+      worker ??= started();
+      worker.postMessage(waiting.job);
+    } catch {
+      isBroken = true;
+      finish(waiting, callFunction(waiting.f, waiting.args));
+    }
+  }
+
+  function started(): WorkerLike {
+    const fresh = startWorker();
+    fresh.onmessage = ({ data }) => current?.job.id === data.id && finish(current, fromPlain(data.result));
+    fresh.onerror = () => {
+      dismiss();
+      isBroken = true;
+      if (current) finish(current, callFunction(current.f, current.args));
+    };
+    return fresh;
+  }
+
+  function dismiss(): void {
+    worker?.terminate();
+    worker = undefined;
+  }
+
+  function finish(waiting: Waiting, result: CellResult): void {
+    if (current === waiting) current = undefined;
+    waiting.settle(result);
+    next();
+  }
+
+  function stop(waiting: Waiting): void {
+    const place = queue.indexOf(waiting);
+    if (place >= 0) {
+      queue.splice(place, 1);
+      waiting.settle(stopped());
+    } else if (current === waiting) {
+      dismiss();
+      finish(waiting, stopped());
+    }
+  }
+
+  return {
+    run(f, args, signal) {
+      return new Promise((settle) => {
+        const plain = args.map((argument) => (argument === undefined ? undefined : toPlain(argument)));
+        const waiting = { job: { id: ++lastId, name: f.name, args: plain }, f, args, settle };
+        if (signal?.aborted) return settle(stopped());
+        signal?.addEventListener('abort', () => stop(waiting), { once: true });
+        queue.push(waiting);
+        next();
+      });
+    },
+  };
+}

@@ -1,0 +1,133 @@
+import { functionNamed } from '../../functions/catalogue';
+import { CellError } from '../../functions/cell';
+import { answerJob, workerWork, type Answer, type Job, type WorkerLike } from '../../functions/longWork';
+import { excelHandler } from '../../functions/runtime';
+
+/** A worker that answers when it is told to; what crosses is cloned, as between threads. */
+function fakeWorkers() {
+  const workers: { worker: WorkerLike; jobs: Job[]; isEnded: boolean }[] = [];
+  return {
+    workers,
+    start(): WorkerLike {
+      const entry = {
+        jobs: [] as Job[],
+        isEnded: false,
+        worker: {
+          postMessage: (job: Job) => void entry.jobs.push(structuredClone(job)),
+          terminate: () => void (entry.isEnded = true),
+          onmessage: null,
+          onerror: null,
+        } as WorkerLike,
+      };
+      workers.push(entry);
+      return entry.worker;
+    },
+    answer(which = 0): void {
+      const { worker, jobs } = workers[which];
+      worker.onmessage!({ data: structuredClone<Answer>(answerJob(jobs.shift()!)) });
+    },
+  };
+}
+
+const event = functionNamed('EVENT')!;
+const planned = functionNamed('PLAN')!;
+
+test('a job crosses to the worker and its answer comes back, errors in cells with their words', async () => {
+  const fake = fakeWorkers();
+  const work = workerWork(fake.start);
+  const answer = work.run(event, [[[40], [new CellError('#DIV/0!', 'their own words')], [25]]]);
+  fake.answer();
+  expect(await answer).toEqual([[0.025], [new CellError('#DIV/0!', 'their own words')], [0.04]]);
+});
+
+test('an error as the whole answer keeps its words', async () => {
+  const fake = fakeWorkers();
+  const answer = workerWork(fake.start).run(event, [0]);
+  fake.answer();
+  expect(await answer).toEqual(new CellError('#VALUE!', 'times must be above 0: row 1 (0)'));
+});
+
+test('jobs wait for each other on one worker', async () => {
+  const fake = fakeWorkers();
+  const work = workerWork(fake.start);
+  const answers = [work.run(event, [40]), work.run(event, [50])];
+  expect(fake.workers).toHaveLength(1);
+  expect(fake.workers[0].jobs).toHaveLength(1);
+  fake.answer();
+  expect(await answers[0]).toEqual([[0.025]]);
+  fake.answer();
+  expect(await answers[1]).toEqual([[0.02]]);
+});
+
+test('a job that is stopped while it runs takes its worker with it, and the next gets a new one', async () => {
+  const fake = fakeWorkers();
+  const work = workerWork(fake.start);
+  const stop = new AbortController();
+  const first = work.run(event, [40], stop.signal);
+  const second = work.run(event, [50]);
+  stop.abort();
+  expect(await first).toMatchObject({ code: '#N/A', message: expect.stringContaining('stopped') });
+  expect(fake.workers[0].isEnded).toBe(true);
+  fake.answer(1);
+  expect(await second).toEqual([[0.02]]);
+});
+
+test('a job that is stopped while it waits never starts', async () => {
+  const fake = fakeWorkers();
+  const work = workerWork(fake.start);
+  const stop = new AbortController();
+  const first = work.run(event, [40]);
+  const second = work.run(event, [50], stop.signal);
+  stop.abort();
+  expect(await second).toBeInstanceOf(CellError);
+  fake.answer();
+  expect(await first).toEqual([[0.025]]);
+  expect(fake.workers[0].jobs).toHaveLength(0);
+  expect(await work.run(event, [50], AbortSignal.abort())).toBeInstanceOf(CellError);
+});
+
+test('where no worker can be started, or it breaks, the work is done here', async () => {
+  const refused = workerWork(() => {
+    throw new Error('no workers on this page');
+  });
+  expect(await refused.run(event, [40])).toEqual([[0.025]]);
+  const fake = fakeWorkers();
+  const work = workerWork(fake.start);
+  const answer = work.run(event, [40]);
+  fake.workers[0].worker.onerror!(new Error('script not found'));
+  expect(await answer).toEqual([[0.025]]);
+});
+
+test('Excel gets a promise for a long function, and its cancelling stops the work', async () => {
+  class ExcelError {
+    constructor(
+      readonly code: string,
+      readonly message?: string,
+    ) {}
+  }
+  const fake = fakeWorkers();
+  const host = { associate: () => undefined, Error: ExcelError };
+  const call = excelHandler(planned, host, { longWork: workerWork(fake.start) });
+  const invocation: { onCanceled?: () => void } = {};
+  const first = call(1, 0.1, 1, 0.01, 1, null, invocation) as Promise<unknown>;
+  fake.answer();
+  expect((await first) as unknown[][]).toHaveLength(2);
+  const second = call(1, 0.1, 1, 0.01, 1, null, invocation) as Promise<unknown>;
+  invocation.onCanceled!();
+  await expect(second).rejects.toMatchObject({ code: '#N/A' });
+});
+
+test('what is under way is told, with a way to stop it', async () => {
+  const fake = fakeWorkers();
+  const told: (string | null)[] = [];
+  let stop = (): void => undefined;
+  const work = workerWork(fake.start, (underway) => {
+    told.push(underway && `${underway.name} and ${underway.waiting} more`);
+    if (underway) stop = underway.stop;
+  });
+  const answers = [work.run(event, [40]), work.run(planned, [1, 0.1, 1, 0.01, 1])];
+  fake.answer();
+  stop();
+  expect(await answers[1]).toMatchObject({ code: '#N/A' });
+  expect(told).toEqual(['PACE.EVENT and 0 more', 'PACE.PLAN and 0 more', null]);
+});
