@@ -1,5 +1,5 @@
 /** The tangent's default window beside fixed ones. */
-import { tangentRate, type TangentOptions } from '../../src/rate/tangent';
+import { ratesAlong, type TangentOptions } from '../../src/rate/tangent';
 import { pairReadings } from '../../src/series/series';
 import { simulatedRun } from '../support/simulatedRun';
 import { table } from './table';
@@ -29,8 +29,9 @@ function error(
   for (let run = 0; run < runs; run++) {
     const { times, values } = simulatedRun({ order, halfLives: 3, readings, noise, seed: seed + run * 7919 });
     const series = pairReadings(times, values);
-    for (const time of times)
-      squares += (tangentRate(series, time, options).value - rateAt[order](time)) ** 2;
+    ratesAlong(series, options).forEach(
+      ({ value }, i) => (squares += (value - rateAt[order](times[i])) ** 2),
+    );
   }
   return Math.sqrt(squares / (runs * readings));
 }
