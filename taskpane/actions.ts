@@ -2,9 +2,11 @@
 import { areaName } from '../functions/address';
 import { benchOf, guardedBy } from './actions/bench';
 import { changeRun, chooseSignal, lookForProposal, reread, selectedBlock, take } from './actions/look';
+import { longWork } from './actions/longWork';
 import { readPointedAt } from './actions/pointing';
 import { putting } from './actions/put';
-import type { Choices, OrderChoice, RateChoice, ReadingChoice, Task } from './choices';
+import { surveyRuns } from './actions/survey';
+import type { Choices, ManyChoice, OrderChoice, RateChoice, ReadingChoice, Task } from './choices';
 import type { WorkbookPort } from './port';
 import type { Run } from './runs';
 import type { Store } from './store';
@@ -19,6 +21,11 @@ export interface Actions {
   changeReading(part: Partial<ReadingChoice>): Promise<void>;
   changeRate(part: Partial<RateChoice>): Promise<void>;
   changeOrder(part: Partial<OrderChoice>): Promise<void>;
+  changeMany(part: Partial<ManyChoice>): Promise<void>;
+  /** Asks PACE.SURVEY of the picked runs one after another, for the pane alone. */
+  surveyRuns(): Promise<void>;
+  /** Ends long work; what is done by then stays. */
+  stop(): void;
   /** Hands over the full name of the active cell, or of all that is selected, as a field takes it. */
   pointAt(what: 'cell' | 'selection', take: (name: string) => Promise<void>): Promise<void>;
   changeTarget(typed: string): Promise<void>;
@@ -35,14 +42,15 @@ export interface Actions {
 export function createActions(store: Store, port: WorkbookPort): Actions {
   const bench = benchOf(store, port);
   const guarded = guardedBy(bench);
-  const { settle, putIn, undoLast } = putting(bench);
+  const work = longWork(bench);
+  const { settle, putIn, undoLast } = putting(bench, work);
 
   /** A choice is changed, with all that hangs on it. */
   const changing = <Step extends keyof Choices>(step: Step) =>
     guarded(async (part: Partial<Choices[Step]>) => {
       store.choose(step, part);
       store.choose('put', { question: null });
-      store.change({ notice: null });
+      store.change({ notice: null, survey: null });
       await readPointedAt(bench);
       await settle();
     });
@@ -90,6 +98,9 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
     changeReading: changing('reading'),
     changeRate: changing('rate'),
     changeOrder: changing('order'),
+    changeMany: changing('many'),
+    surveyRuns: guarded(() => surveyRuns(bench, work)),
+    stop: () => work.stop(),
     pointAt: guarded(pointAt),
     changeTarget: guarded(changeTarget),
     targetActiveCell: guarded(() => pointAt('cell', changeTarget)),

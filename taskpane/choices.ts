@@ -1,7 +1,7 @@
 /** What a person has chosen at each step, as typed: an empty field is an argument left out. */
 
 /** The steps of the work; one is open at a time. */
-export type Task = 'reading' | 'rate' | 'order';
+export type Task = 'reading' | 'rate' | 'order' | 'many';
 
 export type RateKind = 'average' | 'tangent' | 'column';
 
@@ -37,6 +37,15 @@ export interface OrderChoice {
   readonly answer: OrderAnswerKind;
 }
 
+/** What is put in for every picked run. */
+export type ManyAnswer = 'survey' | 'order' | 'rate';
+
+export interface ManyChoice {
+  /** Columns of readings; `null` for all that are like the chosen run. */
+  readonly picked: readonly number[] | null;
+  readonly answer: ManyAnswer;
+}
+
 export interface PutChoice {
   /** As typed: `'Gas run'!E3`. */
   readonly target: string;
@@ -54,6 +63,7 @@ export const firstChoices: Choices = {
   reading: { what: '', inputs: {} },
   rate: { kind: 'tangent', from: '', to: '', time: '', points: '', degree: '', coefficient: '' },
   order: { order: '1', endpointKind: 'zero', endpoint: '', answer: 'coefficient' },
+  many: { picked: null, answer: 'survey' },
   put: { target: '', isOwn: false, withHeading: true, withDetail: false, inUse: [], question: null },
 };
 
@@ -61,5 +71,6 @@ export interface Choices {
   readonly reading: ReadingChoice;
   readonly rate: RateChoice;
   readonly order: OrderChoice;
+  readonly many: ManyChoice;
   readonly put: PutChoice;
 }

@@ -4,6 +4,7 @@ import { h } from './h';
 import { patch } from './patch';
 import type { WorkbookPort } from './port';
 import type { Task } from './choices';
+import { manyStep } from './steps/many';
 import { orderStep } from './steps/order';
 import { putInStep } from './steps/putIn';
 import { rateStep } from './steps/rate';
@@ -64,6 +65,7 @@ const steps: Readonly<Record<Task, (scene: Scene, actions: Actions) => HTMLEleme
   reading: readingStep,
   rate: rateStep,
   order: orderStep,
+  many: manyStep,
 };
 
 export function view(scene: Scene, actions: Actions, host: string): HTMLElement {

@@ -1,4 +1,5 @@
 import type { Answered } from './calls/estimate';
+import { allRuns, pickedRuns, type OneOfMany } from './calls/many';
 import { compareOrders, givenBy, orderAnswer, type OrderAnswer, type OrderLine } from './calls/order';
 import { rateAnswer, type RateAnswer } from './calls/rate';
 import { readingAnswer, type ReadingAnswer } from './calls/reading';
@@ -6,6 +7,7 @@ import { firstChoices, type EndpointKind, type OrderChoice, type ReadingChoice }
 import { checkRun, type Check } from './findings';
 import { currentInsertion } from './insertions/current';
 import type { Insertion } from './insertions/insertion';
+import { miniaturePath } from './plots/miniature';
 import type { Run, Table } from './runs';
 import type { State } from './store';
 
@@ -18,10 +20,27 @@ export interface Scene {
   readonly rate: RateAnswer | null;
   readonly order: OrderAnswer | null;
   readonly orders: Answered<readonly OrderLine[]> | null;
+  /** Every run of the table, small; and those that were picked. */
+  readonly stamps: readonly Stamp[];
+  readonly picked: readonly OneOfMany[];
   /** What the open step would write, and whether it has an answer to write. */
   readonly insertion: Insertion | null;
   readonly isAnswered: boolean;
 }
+
+/** A run as the strip shows it. */
+export interface Stamp {
+  readonly column: number;
+  readonly name: string;
+  readonly path: string;
+}
+
+const stampsOf = (table: Table, run: Run): Stamp[] =>
+  allRuns(table, run).map(({ heading, run: one }) => ({
+    column: one.readingColumn,
+    name: heading.text,
+    path: miniaturePath(table, one),
+  }));
 
 /** One for each pane: what rests on unchanged parts of the state is not calculated again. */
 export function createScenes(): (state: State) => Scene {
@@ -40,6 +59,7 @@ export function createScenes(): (state: State) => Scene {
       return compareOrders(givenBy(table, run, choice, { sheet: table.sheet, pointedAt }));
     },
   );
+  const stamps = remembered(stampsOf);
   return (state) => {
     const { table, run, pointedAt } = state;
     const { endpointKind, endpoint } = state.order;
@@ -60,6 +80,12 @@ export function createScenes(): (state: State) => Scene {
       get orders() {
         return table && run && orders(table, run, endpointKind, endpoint, pointedAt);
       },
+      get stamps() {
+        return table && run ? stamps(table, run) : [];
+      },
+      get picked() {
+        return table && run ? pickedRuns(table, run, state.many) : [];
+      },
       get insertion() {
         return currentInsertion(state);
       },
@@ -73,6 +99,7 @@ export function createScenes(): (state: State) => Scene {
 
 function isAnswered(scene: Scene): boolean {
   const { task, order: choice } = scene.state;
+  if (task === 'many') return scene.insertion !== null;
   if (task === 'reading') return scene.reading?.kind === 'column';
   if (task === 'rate') return scene.rate !== null && scene.rate.kind !== 'refused';
   const { order, orders } = scene;

@@ -1,5 +1,6 @@
 /** All that the pane knows, in one place. Views draw it, actions change it. */
 import type { CellRange } from '../functions/cell';
+import type { Surveyed } from './calls/many';
 import { firstChoices, type Choices, type Task } from './choices';
 import type { RangeReading, WriteReceipt } from './port';
 import type { Run, Table } from './runs';
@@ -7,6 +8,19 @@ import type { Run, Table } from './runs';
 export interface Notice {
   readonly tone: 'good' | 'bad';
   readonly words: string;
+}
+
+/** Long work under way. */
+export interface Progress {
+  readonly what: string;
+  readonly done: number;
+  readonly of: number;
+}
+
+/** What a survey in the pane has found so far. */
+export interface Survey {
+  readonly rows: readonly Surveyed[];
+  readonly isWhole: boolean;
 }
 
 /** What was written at one go, and what the pane was about before: both can be brought back. */
@@ -26,6 +40,8 @@ export interface State extends Choices {
   readonly task: Task;
   /** What stands in the cells that fields point at, by their full names: `'Gas run'!E3`. */
   readonly pointedAt: ReadonlyMap<string, CellRange>;
+  readonly survey: Survey | null;
+  readonly progress: Progress | null;
   readonly deeds: readonly Deed[];
   readonly notice: Notice | null;
 }
@@ -38,6 +54,8 @@ export const firstState: State = {
   hint: '',
   task: 'rate',
   pointedAt: new Map(),
+  survey: null,
+  progress: null,
   deeds: [],
   notice: null,
 };

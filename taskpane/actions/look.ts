@@ -18,7 +18,7 @@ export function take({ store }: Bench, block: RangeReading): string {
   const table = findTable(block);
   if (typeof table === 'string') return table;
   const run = proposeRun(table);
-  store.change({ table, run, proposal: null, hint: '', notice: null });
+  store.change({ table, run, survey: null, proposal: null, hint: '', notice: null });
   beginWith({ store }, table, run);
   store.choose('put', { isOwn: false, question: null });
   return '';
@@ -27,6 +27,7 @@ export function take({ store }: Bench, block: RangeReading): string {
 /** What each step begins with on another run. */
 function beginWith({ store }: Pick<Bench, 'store'>, table: Table, run: Run): void {
   store.choose('rate', startingTimes(table, run));
+  store.choose('many', { picked: null });
   store.choose('order', { endpointKind: rises(table, run) ? 'free' : 'zero', endpoint: '' });
   chooseSignal({ store }, signalFor(headingOf(table, run.readingColumn)));
 }
@@ -45,7 +46,7 @@ export async function reread({ store, port }: Bench): Promise<void> {
   if (!table || !run) return;
   const fresh = await port.read(table.area);
   if (store.state.table?.area !== table.area || isSameCells(fresh, table)) return;
-  store.change({ table: { ...table, cells: fresh.cells } });
+  store.change({ table: { ...table, cells: fresh.cells }, survey: null });
 }
 
 const isSameCells = ({ cells }: RangeReading, table: Table): boolean =>
@@ -85,7 +86,7 @@ export function changeRun({ store }: Bench, part: Partial<Run>): void {
   const { table, run } = store.state;
   if (!table || !run) return;
   const next = settledRun(table, run, part);
-  store.change({ run: next, notice: null });
+  store.change({ run: next, survey: null, notice: null });
   if (next.readingColumn !== run.readingColumn)
     chooseSignal({ store }, signalFor(headingOf(table, next.readingColumn)));
   const turned = rises(table, next) !== rises(table, run);

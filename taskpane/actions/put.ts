@@ -4,10 +4,11 @@ import { currentInsertion } from '../insertions/current';
 import type { Insertion } from '../insertions/insertion';
 import { firstFree } from '../place';
 import { planFor, type Plan } from '../plan';
-import { CellsInUse, type SheetArea } from '../port';
+import { CellsInUse, type CellToWrite, type SheetArea, type WriteReceipt } from '../port';
 import type { Deed, State } from '../store';
 import type { Bench } from './bench';
 import { adoptColumn } from './adopt';
+import type { LongWork } from './longWork';
 import { changeRun, reread } from './look';
 
 export interface Putting {
@@ -17,7 +18,7 @@ export interface Putting {
   undoLast(): Promise<void>;
 }
 
-export function putting(bench: Bench): Putting {
+export function putting(bench: Bench, work: LongWork): Putting {
   const { store, port, notify } = bench;
   let question = 0; // only the newest look at the sheet counts
 
@@ -48,10 +49,11 @@ export function putting(bench: Bench): Putting {
     const plan = planFor(insertion, sheet, put);
     if (typeof plan === 'string') return notify('bad', plan);
     try {
-      const receipt = await port.write(plan.cells, { overwrite, description: plan.description });
-      const { table, run, reading, deeds } = store.state;
-      const deed = { description: plan.description, receipts: [receipt], before: { table, run, reading } };
-      store.change({ deeds: [...deeds, deed] });
+      const isWhole = await write(plan, overwrite);
+      if (!isWhole) {
+        notify('bad', `stopped: ${plan.description} is not complete`);
+        return settle();
+      }
       store.choose('put', { question: null, isOwn: false });
       const goesOn = insertion.becomesReadings && (await goOnWith(plan, insertion));
       notify('good', `written: ${plan.description}${goesOn ? ', now the readings of this run' : ''}`);
@@ -60,6 +62,26 @@ export function putting(bench: Bench): Putting {
     } catch (error) {
       if (!(error instanceof CellsInUse)) throw error;
       store.choose('put', { question: error.areas, inUse: error.areas });
+    }
+  }
+
+  /** All or nothing where it is little; bit by bit, so that it can be stopped, where it is much. */
+  async function write({ cells, area, description }: Plan, overwrite: boolean): Promise<boolean> {
+    const { table, run, reading, deeds } = store.state;
+    const bits = inBits(cells);
+    const inUse = overwrite || bits.length === 1 ? [] : await port.occupied(area);
+    if (inUse.length > 0) throw new CellsInUse(inUse);
+    const receipts: WriteReceipt[] = [];
+    const one = async (bit: readonly CellToWrite[]): Promise<void> => {
+      receipts.push(await port.write(bit, { overwrite, description }));
+    };
+    try {
+      if (bits.length > 1) return await work.through('writing', bits, one);
+      await one(bits[0]);
+      return true;
+    } finally {
+      const deed = { description, receipts, before: { table, run, reading } };
+      if (receipts.length > 0) store.change({ deeds: [...deeds, deed] });
     }
   }
 
@@ -86,6 +108,14 @@ export function putting(bench: Bench): Putting {
 
   return { settle, putIn, undoLast };
 }
+
+/** So many cells are written at one go. */
+const bitSize = 24;
+
+const inBits = (cells: readonly CellToWrite[]): (readonly CellToWrite[])[] =>
+  Array.from({ length: Math.ceil(cells.length / bitSize) }, (_, i) =>
+    cells.slice(i * bitSize, (i + 1) * bitSize),
+  );
 
 /** The run has gone on with the column that is taken away. */
 function meansWritten({ receipts }: Deed, { table, run }: State): boolean {

@@ -1,5 +1,6 @@
 import type { State } from '../store';
 import type { Insertion } from './insertion';
+import { manyInsertion } from './many';
 import { orderInsertion } from './order';
 import { readingInsertion } from './reading';
 import { rateInsertion } from './rate';
@@ -9,6 +10,7 @@ export function currentInsertion(state: State): Insertion | null {
   const { table, run, task, put } = state;
   if (!table || !run) return null;
   if (task === 'order') return orderInsertion(table, run, state, put.withDetail);
+  if (task === 'many') return manyInsertion(table, run, state);
   if (task === 'reading') return readingInsertion(table, run, state);
   return rateInsertion(table, run, state.rate, put.withDetail);
 }

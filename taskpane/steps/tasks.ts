@@ -7,6 +7,7 @@ export const tasks: readonly (readonly [Task, string])[] = [
   ['reading', 'Reading'],
   ['rate', 'Rate'],
   ['order', 'Order'],
+  ['many', 'All runs'],
 ];
 
 export function taskBar(open: Task, actions: Actions): HTMLElement {

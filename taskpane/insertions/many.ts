@@ -1,0 +1,93 @@
+import { areaName } from '../../functions/address';
+import { isOneBlock, pickedRuns, surveyLaw, type OneOfMany } from '../calls/many';
+import { columnArgument } from '../calls/argument';
+import { formulaText } from '../calls/call';
+import { columnOf, type Run, type Table } from '../runs';
+import type { State } from '../store';
+import { oneFormula, type Insertion, type Part } from './insertion';
+import { orderInsertion } from './order';
+import { rateInsertion, readsOf } from './rate';
+
+/** Of the table that PACE.SURVEY answers. */
+const surveyColumns = 8;
+
+/** The same question put to every picked run; nothing while none is picked. */
+export function manyInsertion(table: Table, run: Run, state: State): Insertion | null {
+  const runs = pickedRuns(table, run, state.many);
+  if (runs.length === 0) return null;
+  if (state.many.answer === 'survey') return surveyInsertion(table, runs, state);
+  const each = runs.map((one) => insertionOf(table, one.run, state));
+  return each[0].size.rows === 1 ? inRows(table, runs, each) : inColumns(table, runs, each);
+}
+
+function insertionOf(table: Table, run: Run, state: State): Insertion {
+  const { withDetail } = state.put;
+  if (state.many.answer === 'rate') return rateInsertion(table, run, state.rate, withDetail);
+  // a table of orders a run would be a sheet of its own
+  const answer = state.order.answer === 'orders' ? 'coefficient' : state.order.answer;
+  return orderInsertion(table, run, { ...state, order: { ...state.order, answer } }, withDetail);
+}
+
+const readsOfAll = (table: Table, runs: readonly OneOfMany[]): Insertion['reads'] =>
+  runs.flatMap(({ run }) => readsOf(table, run));
+
+/** `a survey of 12 runs`. */
+const counted = (name: string, count: number): string =>
+  `${name} of ${count} ${count === 1 ? 'run' : 'runs'}`;
+
+/** Where runs stand apart or have times of their own there is no block to survey. */
+function surveyInsertion(
+  table: Table,
+  runs: readonly OneOfMany[],
+  { order, pointedAt }: State,
+): Insertion | null {
+  if (!isOneBlock(runs)) return null;
+  const [{ run }] = runs;
+  const first = columnOf(table, run.readingColumn, run).area;
+  const block = { value: undefined, text: areaName({ ...first, columns: runs.length }) };
+  const args = [
+    columnArgument(table, run, run.timeColumn),
+    block,
+    ...surveyLaw(order, { sheet: table.sheet, pointedAt }),
+  ];
+  return {
+    name: counted('survey', runs.length),
+    ...oneFormula(formulaText('SURVEY', args), { rows: runs.length + 1, columns: surveyColumns }),
+    headings: [],
+    reads: readsOfAll(table, runs),
+    hasDetail: false,
+  };
+}
+
+/** One row a run: its name, then its answer. */
+function inRows(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
+  const [{ name, headings, hasDetail, size }] = each;
+  return {
+    name: counted(name, runs.length),
+    parts: each.flatMap(({ parts }, row): Part[] => [
+      { down: row, right: 0, content: { value: runs[row].heading.text } },
+      ...parts.map((part) => ({ ...part, down: part.down + row, right: part.right + 1 })),
+    ]),
+    size: { rows: each.length, columns: size.columns + 1 },
+    headings: ['run', ...headings],
+    reads: readsOfAll(table, runs),
+    hasDetail,
+  };
+}
+
+/** Columns beside each other, under the name of each run. */
+function inColumns(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
+  const [{ name, hasDetail, size }] = each;
+  return {
+    name: counted(name, runs.length),
+    parts: each.flatMap(({ parts }, place) =>
+      parts.map((part) => ({ ...part, right: part.right + place * size.columns })),
+    ),
+    size: { rows: size.rows, columns: size.columns * each.length },
+    headings: each.flatMap(({ headings }, place) =>
+      headings.map((heading) => `${runs[place].heading.text}: ${heading}`),
+    ),
+    reads: readsOfAll(table, runs),
+    hasDetail,
+  };
+}

@@ -1,0 +1,125 @@
+/** All runs of the table at once: which, what of each, and a survey of them. */
+import type { Actions } from '../actions';
+import { isOneBlock, type Surveyed } from '../calls/many';
+import type { ManyAnswer } from '../choices';
+import { plainNumber, valueWithUncertainty } from '../format';
+import { h, type Child } from '../h';
+import { miniature } from '../plots/miniature';
+import type { Scene, Stamp } from '../scene';
+import type { Survey } from '../store';
+import { formulaLine } from './estimate';
+import { button, selectField, step } from './fields';
+import { progressBar } from './progress';
+
+const answers: readonly { readonly value: ManyAnswer; readonly label: string }[] = [
+  { value: 'survey', label: 'survey: one table, one formula' },
+  { value: 'order', label: 'answer of the Order step, a formula each' },
+  { value: 'rate', label: 'answer of the Rate step, a formula each' },
+];
+
+export function manyStep({ state, stamps, picked, insertion }: Scene, actions: Actions): HTMLElement {
+  const { table, run, many, survey, progress } = state;
+  if (!table || !run) return step('many', 'All runs', h('p', { className: 'hint' }, 'Choose a run first.'));
+  const isApart = many.answer === 'survey' && picked.length > 0 && !isOneBlock(picked);
+  const [first] =
+    insertion?.parts.flatMap(({ content }) => ('formula' in content ? [content.formula] : [])) ?? [];
+  return step(
+    'many',
+    'All runs',
+    h(
+      'p',
+      { className: 'hint', role: 'status' },
+      `${picked.length} of ${stamps.length} ${stamps.length === 1 ? 'run' : 'runs'} picked`,
+    ),
+    h(
+      'div',
+      { className: 'row' },
+      button('All', () => void actions.changeMany({ picked: stamps.map(({ column }) => column) }), 'small'),
+      button('None', () => void actions.changeMany({ picked: [] }), 'small'),
+    ),
+    strip(stamps, new Set(picked.map((one) => one.run.readingColumn)), actions),
+    selectField(
+      'many-answer',
+      'What to put in',
+      answers,
+      many.answer,
+      (chosen) => void actions.changeMany({ answer: chosen as ManyAnswer }),
+    ),
+    isApart &&
+      h(
+        'p',
+        { className: 'problem' },
+        'a survey takes runs that share their times and stand side by side: pick such, or a formula each',
+      ),
+    first !== undefined && formulaLine(first, actions),
+    progress
+      ? progressBar(progress, actions)
+      : button(
+          `Survey ${picked.length === 1 ? 'this run' : `these ${picked.length} runs`} here`,
+          () => void actions.surveyRuns(),
+        ),
+    survey && surveyTable(survey),
+  );
+}
+
+function strip(stamps: readonly Stamp[], picked: ReadonlySet<number>, actions: Actions): HTMLElement {
+  const toggled = (column: number): number[] =>
+    picked.has(column) ? [...picked].filter((other) => other !== column) : [...picked, column];
+  return h(
+    'ul',
+    { className: 'stamps', 'aria-label': 'runs' },
+    ...stamps.map(({ column, name, path }) =>
+      h(
+        'li',
+        {},
+        h(
+          'label',
+          { for: `run-${column}` },
+          miniature(path),
+          h(
+            'span',
+            {},
+            h('input', {
+              id: `run-${column}`,
+              type: 'checkbox',
+              checked: picked.has(column),
+              onchange: () => void actions.changeMany({ picked: toggled(column) }),
+            }),
+            name,
+          ),
+        ),
+      ),
+    ),
+  );
+}
+
+function surveyTable({ rows, isWhole }: Survey): HTMLElement {
+  const heading = (words: string): HTMLElement => h('th', { scope: 'col' }, words);
+  return h(
+    'table',
+    { className: 'survey' },
+    h('caption', {}, isWhole ? 'Survey' : `Survey, stopped after ${rows.length}`),
+    h(
+      'thead',
+      {},
+      h('tr', {}, heading('run'), heading('order'), heading('rate coefficient'), heading('half life')),
+    ),
+    h('tbody', {}, ...rows.flatMap(surveyRows)),
+  );
+}
+
+/** What needs a second look stands below its run, across the table. */
+function surveyRows({ name, order, coefficient, uncertainty, halfLife, flags }: Surveyed): Child[] {
+  const shown = (value: number | null): string => (value === null ? '–' : plainNumber(value, 3));
+  return [
+    h(
+      'tr',
+      {},
+      h('th', { scope: 'row' }, name),
+      h('td', {}, shown(order)),
+      h('td', {}, coefficient === null ? '–' : valueWithUncertainty(coefficient, uncertainty)),
+      h('td', {}, shown(halfLife)),
+    ),
+    flags !== '' && h('tr', { className: 'flags' }, h('td', { colspan: '4' }, flags)),
+  ];
+}
