@@ -2,18 +2,18 @@
 import { convertQuantity, convertUnit, parseQuantity } from '../../src/units';
 import type { CellValue } from '../cell';
 import type { Parameters } from '../define';
-import { isLeftOut, requireWithin, type Bounds } from '../parameters';
+import { isLeftOut, requireWithin, type Bounds, type Parameter } from '../parameters';
+import { sure, type Phrase } from './phrase';
 import { Readings } from './readings';
 import { NotSaid, type Argument, type Arguments } from './said';
 import { numberText, quoted } from './text';
 
-/** A piece of a formula, and the conditions under which it may be used. */
-export interface Phrase {
-  readonly text: string;
+/** A quantity for each reading; the same for all where `isOne`. */
+export interface Quantities {
+  at(row: number, column: number): string;
   readonly holds: readonly string[];
+  readonly isOne: boolean;
 }
-
-const sure = (text: string): Phrase => ({ text, holds: [] });
 
 export class Given {
   constructor(
@@ -54,23 +54,64 @@ export class Given {
   }
 
   /** One for all readings, or one for each of them. */
-  quantities(name: string, to: string): (row: number, column: number) => Phrase {
+  quantities(name: string, to: string): Quantities {
     const argument = this.argument(name);
     if (!argument) throw new NotSaid(`${name} was left out`);
-    const { cells, area } = argument;
+    const { cells } = argument;
     if (!cells || cells.flat().length === 1) {
-      const one = this.quantity(name, to);
-      return () => one;
+      const { text, holds } = this.quantity(name, to);
+      return { at: () => text, holds, isOne: true };
     }
-    const readings = new Readings(argument, name);
-    const flat = cells.flat();
-    return (row, column) => {
-      // readings and their quantities can lie different ways: it is their count that must agree
-      const place = row * readings.columns + column;
-      const [r, c] = [Math.floor(place / cells[0].length), place % cells[0].length];
-      const text = readings.element(r, c);
-      return this.quantityAt(area ? { text, area } : { text }, flat[place], text, name, to);
+    const { unit, bounds } = this.parameters[name];
+    const given = new Readings(argument, name, bounds);
+    if (cells.flat().some((cell) => typeof cell !== 'number'))
+      throw new NotSaid(`${name} holds cells that are not numbers`);
+    const all = argument.area ? [`COUNT(${given.whole})=${cells.flat().length}`] : [];
+    return {
+      at: (row, column) => converted(given.element(row, column), unit, to),
+      holds: [...all, ...given.holds],
+      isOne: false,
     };
+  }
+
+  /** A fraction, for which TRUE stands for 1. */
+  fraction(name: string): Phrase {
+    const argument = this.argument(name);
+    const cell = argument && this.single(argument, name);
+    if (!argument || typeof cell !== 'boolean') return this.number(name);
+    if (!argument.area) return sure(cell ? '1' : '0');
+    const text = `N(${argument.text})`;
+    return { text, holds: within(text, this.parameters[name].bounds ?? {}) };
+  }
+
+  /** One quantity in a unit that another argument names: a bare number is one of that unit. */
+  quantityIn(name: string, unit: string): Phrase {
+    const argument = this.argument(name);
+    if (!argument) throw new NotSaid(`${name} was left out`);
+    const own = { unit, bounds: this.parameters[name].bounds };
+    return this.quantityAt(argument, this.single(argument, name), argument.text, name, unit, own);
+  }
+
+  /** Whether one number was given; of an expression that is taken for granted. */
+  isNumber(name: string): boolean {
+    const argument = this.argument(name);
+    if (!argument) return false;
+    const cell = this.single(argument, name);
+    return cell === undefined || typeof cell === 'number';
+  }
+
+  /** Readings with a unit of their own where they are text. @throws NotSaid where some are */
+  quantityReadings(name: string): Readings {
+    const texts = this.argument(name)
+      ?.cells?.flat()
+      .some((cell) => typeof cell === 'string' && /\d/.test(cell));
+    if (texts) throw new NotSaid(`${name} holds numbers with their unit as text`);
+    return this.readings(name);
+  }
+
+  /** A text in the parameter's own unit, in another. */
+  inUnit(name: string, text: string, to: string): string {
+    return converted(text, this.parameters[name].unit, to);
   }
 
   private quantityAt(
@@ -79,13 +120,13 @@ export class Given {
     text: string,
     name: string,
     to: string,
+    { unit, bounds = {} }: Pick<Parameter, 'unit' | 'bounds'> = this.parameters[name],
   ): Phrase {
-    const { unit, bounds = {} } = this.parameters[name];
     if (typeof cell === 'string') {
       const [value, holds, own] = area ? numberBefore(text, cell, name) : [undefined, [], unit];
       if (value === undefined) {
         const inUnit = requireWithin(parseQuantity(cell, unit, name), bounds, name, unit);
-        return sure(numberText(convertQuantity(inUnit, unit, to)));
+        return sure(numberText(tidy(convertQuantity(inUnit, unit, to))));
       }
       convertUnit(1, own, unit, name);
       const inUnit = converted(value, own, unit);
@@ -93,7 +134,7 @@ export class Given {
     }
     if (cell !== undefined && typeof cell !== 'number') throw new NotSaid(`${name} is not a number`);
     if (cell !== undefined && !area) {
-      return sure(numberText(convertQuantity(requireWithin(cell, bounds, name, unit), unit, to)));
+      return sure(numberText(tidy(convertQuantity(requireWithin(cell, bounds, name, unit), unit, to))));
     }
     return { text: converted(text, unit, to), holds: [`ISNUMBER(${text})`, ...within(text, bounds)] };
   }
@@ -153,7 +194,7 @@ function within(text: string, { above, atLeast, below, atMost, whole }: Bounds):
 function converted(text: string, from: string, to: string): string {
   if (from === to) return text;
   const step = convertUnit(0, from, to, '');
-  const factor = tidy(convertUnit(1, from, to, '') - step);
+  const factor = tidy(convertUnit(1, from, to, '') - step, step === 0 ? 15 : 13);
   const scaled =
     factor === 1
       ? text
@@ -163,17 +204,22 @@ function converted(text: string, from: string, to: string): string {
   return step === 0 ? `(${scaled})` : `(${scaled}+${numberText(step)})`;
 }
 
-/** 1 + 273.15 − 273.15 leaves a last digit that is not meant. */
-const tidy = (factor: number): number => Number(factor.toPrecision(13));
+/** Conversions leave a last digit that is not meant: 9.999999999999999E-5. */
+const tidy = (value: number, digits = 15): number => Number(value.toPrecision(digits));
 const isWhole = (value: number): boolean => Number.isInteger(tidy(value));
 
-/** `21.4 degC` in a cell: the number before the unit, which must stay the unit it is. */
+/**
+ * `21.4 degC` in a cell: the number before the unit, which must stay the unit it is. Figures without their
+ * point are read, then divided: what a point means differs from country to country, and the function that
+ * asks for it is not the same in all programs.
+ */
 function numberBefore(text: string, cell: string, name: string): [string, string[], string] {
-  const [, number, unit] = /^\s*([+-]?\d*\.?\d+(?:e[+-]?\d+)?)(\s*\S.*)$/i.exec(cell) ?? [];
-  if (number === undefined) throw new NotSaid(`${name} is text that no formula can read`);
+  const [, number, unit] = /^([+-]?\d*\.?\d+)(\s*[^\d\s.].*)$/.exec(cell) ?? [];
+  if (number === undefined || unit.includes('.'))
+    throw new NotSaid(`${name} is text that no formula can read`);
   const length = [...unit].length;
   return [
-    `NUMBERVALUE(LEFT(${text},LEN(${text})-${length}),"."," ")`,
+    `VALUE(SUBSTITUTE(LEFT(${text},LEN(${text})-${length}),".",""))/10^MAX(0,LEN(${text})-${length}-FIND(".",${text}&"."))`,
     [`EXACT(RIGHT(${text},${length}),${quoted(unit)})`],
     unit.trim(),
   ];

@@ -1,8 +1,14 @@
 /** A range of readings in a formula: one by one, or as a whole. */
 import { numberInText } from '../column';
 import type { Bounds } from '../parameters';
-import { NotSaid, type Argument, type Said } from './said';
-import { cellOf, fixedArea, numberText, valueText, where } from './text';
+import { NotSaid, type Argument } from './said';
+import { cellOf, fixedArea, numberText, valueText } from './text';
+import { isNumberText, type Phrase } from './phrase';
+
+interface First extends Phrase {
+  readonly row: number;
+  readonly column: number;
+}
 
 export class Readings {
   readonly rows: number;
@@ -17,10 +23,11 @@ export class Readings {
     const { cells } = argument;
     this.rows = cells?.length ?? 1;
     this.columns = cells?.[0]?.length ?? 1;
-    const asText = cells
-      ?.flat()
-      .some((cell) => typeof cell === 'string' && numberInText(cell, () => name) !== null);
-    if (asText) throw new NotSaid(`${name} holds numbers written as text`);
+    const flat = cells?.flat() ?? [];
+    if (flat.some((cell) => typeof cell === 'string' && numberInText(cell, () => name) !== null))
+      throw new NotSaid(`${name} holds numbers written as text`);
+    if (flat.some((cell) => typeof cell === 'boolean'))
+      throw new NotSaid(`${name} holds TRUE or FALSE, which some programs take for numbers`);
   }
 
   /** The reading itself, which moves with a copied formula. */
@@ -29,6 +36,21 @@ export class Readings {
     if (area) return cellOf(area, row, column);
     if (cells) return valueText(cells[row][column]);
     throw new NotSaid(`${text} is worked out within the formula`);
+  }
+
+  /** The first number, and where it stands: it must stay the first. */
+  get first(): First {
+    const { area, cells } = this.argument;
+    const place = cells?.flat().findIndex((cell) => typeof cell === 'number') ?? -1;
+    if (place < 0) throw new NotSaid('no first reading can be named');
+    const [row, column] = [Math.floor(place / this.columns), place % this.columns];
+    if (!area) return { row, column, text: this.element(row, column), holds: [] };
+    if (place > 0 && this.columns > 1 && this.rows > 1)
+      throw new NotSaid('the first cell of the block is a gap');
+    const one = { ...area, row: area.row + row, column: area.column + column, rows: 1, columns: 1 };
+    const before = this.rows > 1 ? { ...area, rows: row } : { ...area, columns: column };
+    const none = place > 0 ? [`COUNT(${fixedArea(before)})=0`] : [];
+    return { row, column, text: fixedArea(one), holds: [`ISNUMBER(${fixedArea(one)})`, ...none] };
   }
 
   /** All of them, where they stand. */
@@ -55,37 +77,18 @@ export class Readings {
 
   /** That no number among the readings lies on the wrong side of a limit; text, gaps and errors do not count. */
   none(side: '<' | '<=' | '>' | '>=', limit: string): string[] {
-    const { area, text } = this.argument;
-    const isPlain = /^\(?-?[\d.]+\)?$/.test(limit);
+    const { area, cells, text } = this.argument;
+    // written out, they were judged on the day of the copy
+    if (!area && cells && isConstant(limit)) return [];
     if (area) {
-      const criterion = isPlain ? `"${side}${limit.replace(/[()]/g, '')}"` : `"${side}"&(${limit})`;
+      const criterion = isNumberText(limit)
+        ? `"${side}${limit.replace(/[()]/g, '')}"`
+        : `"${side}"&(${limit})`;
       return [`COUNTIF(${fixedArea(area)},${criterion})=0`];
     }
     return [`SUM(IF(ISNUMBER(${text}),IF(${text}${side}${limit},1,0),0))=0`];
   }
 }
 
-/**
- * A conversion, reading by reading, in the shape given: a gap stays empty and an error cell keeps its error.
- *
- * @param holds what must hold for all
- * @param convert the formula of one reading; without a place for all at once
- */
-export function eachReading(
-  readings: Readings,
-  holds: readonly string[],
-  convert: (reading: string, row?: number, column?: number) => string,
-): Said {
-  const one = (x: string, row?: number, column?: number): string =>
-    where(
-      [...readings.holds, ...holds],
-      isNumber(x)
-        ? convert(x, row, column)
-        : `IF(ISNUMBER(${x}),${convert(x, row, column)},IF(ISERROR(${x}),${x},""))`,
-    );
-  const whole = (): string => one(readings.whole);
-  if (!readings.isPlaced) return { whole };
-  return { whole, cell: (row, column) => one(readings.element(row, column), row, column) };
-}
-
-const isNumber = (text: string): boolean => /^\(?-?[\d.]+(?:E[+-]?\d+)?\)?$/.test(text);
+/** Numbers and what is between them: nothing that a cell could change. */
+const isConstant = (text: string): boolean => /^[\d.E+\-*/()]+$/.test(text);

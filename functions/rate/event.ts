@@ -1,5 +1,6 @@
 import { eventRate } from '../../src/rate/event';
 import { convertColumn } from '../column';
+import { sayEvent } from '../builtIn/linear';
 import { defineFunction } from '../define';
 import { stoichiometricNumber } from '../commonParameters';
 import { number, optional, readings } from '../parameters';
@@ -24,4 +25,5 @@ export default defineFunction({
   reference: 'doi:10.1351/goldbook.R05156',
   run: ({ times, change, coefficient }) =>
     convertColumn(times, (time) => eventRate(time, change, coefficient)),
+  builtIn: sayEvent,
 });

@@ -1,6 +1,7 @@
 import { InvalidInput } from '../../src/errors';
 import { concentrationFromAbsorbance } from '../../src/signal/absorbance';
 import { convertColumn } from '../column';
+import { sayAbsorbance } from '../builtIn/linear';
 import { defineFunction } from '../define';
 import { number, optional, readings } from '../parameters';
 import { quantity } from '../quantityParameters';
@@ -40,4 +41,5 @@ export default defineFunction({
       concentrationFromAbsorbance(reading, { absorptivity, path, blank, ...(second && { product: second }) }),
     );
   },
+  builtIn: sayAbsorbance,
 });

@@ -1,5 +1,6 @@
 import { concentrationFromConductivity, conductivityAt25 } from '../../src/signal/linear';
 import { convertColumn } from '../column';
+import { sayConductivity } from '../builtIn/linear';
 import { defineFunction } from '../define';
 import { number, optional, readings } from '../parameters';
 import { quantities, requireOneEach } from '../quantityParameters';
@@ -35,4 +36,5 @@ export default defineFunction({
       return concentrationFromConductivity(at25, start, end, initial);
     });
   },
+  builtIn: sayConductivity,
 });

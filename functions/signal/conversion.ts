@@ -1,5 +1,6 @@
 import { fractionConverted } from '../../src/signal/linear';
 import { convertColumn } from '../column';
+import { sayConversion } from '../builtIn/linear';
 import { defineFunction } from '../define';
 import { number, readings } from '../parameters';
 
@@ -19,4 +20,5 @@ export default defineFunction({
   reference: 'doi:10.1351/goldbook.E02229',
   run: ({ readings, start, end }) =>
     convertColumn(readings, (reading) => fractionConverted(reading, start, end)),
+  builtIn: sayConversion,
 });

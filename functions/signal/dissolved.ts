@@ -1,5 +1,6 @@
 import { dissolvedAmount, dissolvingGases } from '../../src/signal/henry';
 import { convertColumn } from '../column';
+import { sayDissolved } from '../builtIn/gas';
 import { defineFunction } from '../define';
 import { text } from '../parameters';
 import { quantity, quantityReadings } from '../quantityParameters';
@@ -27,4 +28,5 @@ export default defineFunction({
   reference: 'IAPWS G7-04; doi:10.1063/1.1564818; doi:10.1351/goldbook.H02783',
   run: ({ pressure, gas, volume, temperature }) =>
     convertColumn(pressure, (pascal) => dissolvedAmount(pascal, gas, volume, temperature)),
+  builtIn: sayDissolved,
 });

@@ -1,6 +1,7 @@
 import { gasFormed } from '../../src/signal/gasPressure';
 import { convertUnit, parseQuantity } from '../../src/units';
 import { convertColumn, firstNumber } from '../column';
+import { sayGasPressure } from '../builtIn/gas';
 import { defineFunction } from '../define';
 import { optional, readings, text } from '../parameters';
 import { quantities, quantity, requireOneEach } from '../quantityParameters';
@@ -49,4 +50,5 @@ export default defineFunction({
       gasFormed({ pressure: pressure * toPascal, temperature: temperatureOf(place) }, from, volume),
     );
   },
+  builtIn: sayGasPressure,
 });

@@ -2,6 +2,7 @@ import { gasAmount } from '../../src/signal/gasVolume';
 import { convertUnit } from '../../src/units';
 import { convertColumn } from '../column';
 import { saturation } from '../commonParameters';
+import { sayGasVolume } from '../builtIn/gas';
 import { defineFunction } from '../define';
 import { optional, readings, text } from '../parameters';
 import { quantities, quantity, requireOneEach } from '../quantityParameters';
@@ -51,4 +52,5 @@ export default defineFunction({
       }),
     );
   },
+  builtIn: sayGasVolume,
 });

@@ -2,6 +2,7 @@ import { amountLost, amountLostEstimate, massPerMole, requireVisibleLoss } from 
 import { molarMass } from '../../src/signal/molarMass';
 import { convertColumn, convertToRows, firstNumber, requireLine, type Column } from '../column';
 import { detail } from '../commonParameters';
+import { sayMassLoss } from '../builtIn/gas';
 import { defineFunction } from '../define';
 import { number, optional, readings, text } from '../parameters';
 import { quantity } from '../quantityParameters';
@@ -58,6 +59,7 @@ export default defineFunction({
         : standardRow(amountLostEstimate(mass, from, perMole, readability)),
     );
   },
+  builtIn: sayMassLoss,
 });
 
 const largestLoss = ({ numbers }: Column, start: number): number =>

@@ -1,5 +1,6 @@
 import { remainingReactant } from '../../src/signal/remaining';
 import { convertColumn } from '../column';
+import { sayRemaining } from '../builtIn/linear';
 import { defineFunction } from '../define';
 import { number, optional, readings } from '../parameters';
 
@@ -19,4 +20,5 @@ export default defineFunction({
   reference: 'doi:10.1351/goldbook.S06025',
   run: ({ formed, initial, ratio }) =>
     convertColumn(formed, (amount) => remainingReactant(amount, initial, ratio)),
+  builtIn: sayRemaining,
 });

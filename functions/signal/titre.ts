@@ -1,5 +1,6 @@
 import { titratedConcentration } from '../../src/signal/linear';
 import { convertColumn } from '../column';
+import { sayTitre } from '../builtIn/linear';
 import { defineFunction } from '../define';
 import { number, optional, readings } from '../parameters';
 import { quantity } from '../quantityParameters';
@@ -24,4 +25,5 @@ export default defineFunction({
     'Quench and titrate behind goggles; some quenched mixtures keep giving off gas. Local rules come first.',
   run: ({ volumes, titrant, aliquot, ratio }) =>
     convertColumn(volumes, (volume) => titratedConcentration(volume, titrant, aliquot, ratio)),
+  builtIn: sayTitre,
 });

@@ -1,5 +1,6 @@
 import { pressureLeft } from '../../src/signal/gasPressure';
 import { convertColumn } from '../column';
+import { sayTotalPressure } from '../builtIn/linear';
 import { defineFunction } from '../define';
 import { number, readings } from '../parameters';
 
@@ -20,4 +21,5 @@ export default defineFunction({
   caution:
     'Pressure in closed glass can burst it: stay below what the vessel is made for, with a shield and a relief valve. Local rules come first.',
   run: ({ totals, start, gain }) => convertColumn(totals, (total) => pressureLeft(total, start, gain)),
+  builtIn: sayTotalPressure,
 });

@@ -30,6 +30,15 @@ const coefficients: Readonly<Record<string, readonly [number, number, number]>> 
 export const dissolvingGases: readonly string[] = Object.keys(coefficients);
 
 /**
+ * A, B, C of a gas; nothing for one that the guideline does not know.
+ *
+ * @param gas formula
+ * @example henryCoefficients('CO2') // [-8.55445, 4.01195, 9.52345]
+ */
+export const henryCoefficients = (gas: string): readonly [number, number, number] | undefined =>
+  Object.hasOwn(coefficients, gas) ? coefficients[gas] : undefined;
+
+/**
  * Henry's law constant of a gas in water, lim f/x.
  *
  * ln(k/p*) = A/T_R + B τ^0.355/T_R + C T_R^−0.41 exp τ, T_R = T/T_c, τ = 1 − T_R
@@ -42,7 +51,7 @@ export const dissolvingGases: readonly string[] = Object.keys(coefficients);
  * @example henryConstant('CO2', 298.15) // 165644589
  */
 export function henryConstant(gas: string, temperature: number): number {
-  const known = Object.hasOwn(coefficients, gas) ? coefficients[gas] : undefined;
+  const known = henryCoefficients(gas);
   if (!known) throw new InvalidInput(`gas must be one of ${dissolvingGases.join(', ')}: got "${gas}"`);
   const [a, b, c] = known;
   const reduced = temperature / criticalTemperature;

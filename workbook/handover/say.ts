@@ -13,9 +13,6 @@ import type { Position, World } from './world';
 /** A cell holds no longer formula (Excel specifications and limits). */
 const longest = 8192;
 
-/** Younger than Excel 2010, yet in every program that reads these files today. */
-const allowed: ReadonlySet<string> = new Set(['NUMBERVALUE']);
-
 /** @returns the formula of each cell, counted from the first. @throws NotSaid */
 export function sayFormula(
   formula: string,
@@ -93,7 +90,7 @@ function checked(text: string): string {
   if (text.length >= longest)
     throw new NotSaid(`it would take ${text.length} characters, and a cell holds ${longest - 1}`);
   const young = tokensOf(text).find(
-    (token) => isFunction(token) && filedModernName(token.value) && !allowed.has(token.value.toUpperCase()),
+    (token) => isFunction(token) && filedModernName(token.value) !== undefined,
   );
   if (young) throw new NotSaid(`${young.value} is unknown to older programs`);
   return text;

@@ -20,8 +20,10 @@ export interface Outcome {
   readonly err: string;
 }
 
-export function recalc(...args: string[]): Outcome {
-  const bundle = join(root, 'dist', 'commands', 'recalc.cjs');
+export const recalc = (...args: string[]): Outcome => command('recalc', ...args);
+
+export function command(name: string, ...args: string[]): Outcome {
+  const bundle = join(root, 'dist', 'commands', `${name}.cjs`);
   const { status, stdout, stderr } = spawnSync(process.execPath, [bundle, ...args], {
     encoding: 'utf8',
     timeout: 60_000,

@@ -1,0 +1,214 @@
+/** Sheets to hand over: what is typed in each, and what is typed over it afterwards. Invented readings throughout. */
+import { column, type Typed } from '../engine/book';
+
+export interface Case {
+  readonly typed: Typed;
+  /** Whether its formulas can be said in built-in functions. */
+  readonly becomes: 'live' | 'frozen';
+  /** Inputs that someone changes in the copy. */
+  readonly changed: Typed;
+  /** What PACE makes of that: an error, or numbers as before. */
+  readonly then?: 'error';
+}
+
+const run = {
+  ...column('A2', [0, 20, 40, 60, 90, 120, 180, 240]),
+  ...column('B2', [0, 16, 28, 36.4, 44.8, 50, 55.2, 57.4]),
+};
+
+export const cases: Readonly<Record<string, Case>> = {
+  'Conversion, gaps and text': {
+    typed: {
+      ...column('A1', [32, null, 16, 'n/a', '=1/0', 0.5]),
+      B1: 32,
+      B2: -8,
+      C1: '=PACE.CONVERSION(A1:A6,B1,B2)',
+    },
+    becomes: 'live',
+    changed: { A1: 31, A2: 20, B2: -7.5 },
+  },
+  'Conversion of a truth value': {
+    typed: { ...column('A1', [32, true]), C1: '=PACE.CONVERSION(A1:A2,32,0)' },
+    becomes: 'frozen',
+    changed: {},
+  },
+  'Numbers written as text': {
+    typed: { ...column('A1', [32, '16,5']), C1: '=PACE.CONVERSION(A1:A2,32,0)' },
+    becomes: 'frozen',
+    changed: { A1: 33 },
+  },
+  'Conversion, end equals start': {
+    typed: { ...column('A1', [32, 16]), B1: 32, B2: -8, C1: '=PACE.CONVERSION(A1:A2,B1,B2)' },
+    becomes: 'live',
+    changed: { B2: 32 },
+    then: 'error',
+  },
+  'A block, beside it another': {
+    typed: {
+      A1: 1,
+      B1: 2,
+      A2: 3,
+      B2: 4,
+      D1: '=PACE.CONVERSION(A1:B2,0,8)',
+      A5: '=PACE.CONVERSION(D1:E2,1,0)',
+    },
+    becomes: 'live',
+    changed: { B1: 5 },
+  },
+  Remaining: {
+    typed: { ...column('A1', [0, 0.004, 0.008]), B1: 0.02, B2: 2, C1: '=PACE.REMAINING(A1:A3,B1,B2)' },
+    becomes: 'live',
+    changed: { A3: 0.009, B1: 0.03 },
+  },
+  'Remaining, too much formed': {
+    typed: { ...column('A1', [0, 0.004]), B1: 0.02, C1: '=PACE.REMAINING(A1:A2,B1)' },
+    becomes: 'live',
+    changed: { A2: 0.022 },
+    then: 'error',
+  },
+  Titre: {
+    typed: { ...column('A1', [12.4, 8.2]), B1: '0.02 mol/L', B2: 10, C1: '=PACE.TITRE(A1:A2,B1,B2,2.5)' },
+    becomes: 'live',
+    changed: { A1: 12.6, B1: '0.0205 mol/L' },
+  },
+  'Titre, negative volume': {
+    typed: { ...column('A1', [12.4, 8.2]), C1: '=PACE.TITRE(A1:A2,"20 mmol/L","5 mL")' },
+    becomes: 'live',
+    changed: { A2: -0.1 },
+    then: 'error',
+  },
+  'Total pressure': {
+    typed: { ...column('A1', [46.4, 55.1]), B1: 46.4, B2: 1.5, C1: '=PACE.TOTALPRESSURE(A1:A2,B1,B2)' },
+    becomes: 'live',
+    changed: { A2: 60, B2: 1.4 },
+  },
+  'Total pressure, gas lost': {
+    typed: { ...column('A1', [46.4, 40]), B1: -0.5, C1: '=PACE.TOTALPRESSURE(A1:A2,46.4,B1)' },
+    becomes: 'live',
+    changed: { A2: 20 },
+    then: 'error',
+  },
+  'Absorbance, path and blank': {
+    typed: { ...column('A1', [0.512, 0.3]), B1: 2455, B2: '5 mm', C1: '=PACE.ABSORBANCE(A1:A2,B1,B2,0.012)' },
+    becomes: 'live',
+    changed: { A1: 0.6, B2: '10 mm' },
+  },
+  'Absorbance of two': {
+    typed: {
+      ...column('A1', [0.512, 0.3]),
+      B1: 2455,
+      B2: 310,
+      C1: '=PACE.ABSORBANCE(A1:A2,B1,1,0,B2,"0.4 mmol/L")',
+    },
+    becomes: 'live',
+    changed: { B2: 400 },
+  },
+  Conductivity: {
+    typed: {
+      ...column('A1', [2.5, 1.7, 0.9]),
+      ...column('B1', [24.6, 25.1, 25.8]),
+      C1: '=PACE.CONDUCTIVITY(A1:A3,2.5,0.9,0.01,B1:B3,1.9)',
+      D1: '=PACE.CONDUCTIVITY(A1:A3,2.5,0.9,0.01)',
+    },
+    becomes: 'live',
+    changed: { A2: 1.6, B3: 27 },
+  },
+  'Timed events': {
+    typed: {
+      ...column('A1', [40, 25, null]),
+      B1: -0.002,
+      C1: '=PACE.EVENT(A1:A3)',
+      D1: '=PACE.EVENT(A1:A3,B1)',
+      E1: '=PACE.EVENT(A1,B1,-2)*1000',
+    },
+    becomes: 'live',
+    changed: { A3: 31, B1: -0.0025 },
+  },
+  'Gas over water': {
+    typed: {
+      ...run,
+      D1: '21.4 degC',
+      D2: '100.6 kPa',
+      D3: true,
+      D4: '35 mm',
+      E2: '=PACE.GASVOLUME(B2:B9,D1,D2,D3,"mL",D4)',
+    },
+    becomes: 'live',
+    changed: { B9: 58, D1: '23 degC', D3: false },
+  },
+  'Gas, a temperature each': {
+    typed: {
+      ...column('A1', [10, 20]),
+      ...column('B1', [21, 22.5]),
+      C1: 99.5,
+      D1: '=PACE.GASVOLUME(A1:A2,B1:B2,C1,0.9)',
+    },
+    becomes: 'live',
+    changed: { B2: 24, C1: 101.2 },
+  },
+  'Gas, below freezing and wet': {
+    typed: { A1: 10, B1: 20, D1: '=PACE.GASVOLUME(A1,B1,100,TRUE)' },
+    becomes: 'live',
+    changed: { B1: -3 },
+    then: 'error',
+  },
+  'Gas pressure': {
+    typed: {
+      ...column('A1', [null, 101.3, 104.6]),
+      ...column('B1', [25, 25, 25.4]),
+      C1: '=PACE.GASPRESSURE(A1:A3,"135 mL",B1:B3)',
+      D1: '=PACE.GASPRESSURE(A1:A3,135,25,760,"mmHg")',
+    },
+    becomes: 'live',
+    changed: { A2: 100.9, B3: 26 },
+  },
+  Dissolved: {
+    typed: { ...column('A1', [97, 80]), B1: 25, C1: '=PACE.DISSOLVED(A1:A2,"CO2",100,B1)' },
+    becomes: 'live',
+    changed: { A2: 60, B1: 18 },
+  },
+  'Mass loss': {
+    typed: {
+      ...column('A1', [187.352, 187.1, null, 186.9]),
+      B1: 0.001,
+      B2: '21 degC',
+      C1: '=PACE.MASSLOSS(A1:A4,"CO2",,B1,B2)',
+      D1: '=PACE.MASSLOSS(A1:A4,44.01,187.4,B1,,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { A1: 187.36, A4: 186.8, B2: '19.5 degC' },
+  },
+  'Mass loss that cannot be seen': {
+    typed: { ...column('A1', [100, 99]), B1: 0.01, C1: '=PACE.MASSLOSS(A1:A2,"H2",,B1)' },
+    becomes: 'live',
+    changed: { B1: 2 },
+    then: 'error',
+  },
+  'Within other formulas': {
+    typed: {
+      ...column('A1', [0, 0.004, 0.008]),
+      C1: '=SUM(PACE.REMAINING(A1:A3,0.02))*2',
+      D1: '=PACE.CONVERSION(PACE.REMAINING(A1:A3,0.02),0.02,0)',
+      E1: '=100*PACE.REMAINING(A1:A3,0.02)',
+    },
+    becomes: 'live',
+    changed: { A3: 0.009 },
+  },
+  'It’s another sheet': {
+    typed: {
+      C1: "=PACE.CONVERSION('Conversion, gaps and text'!A1:A6,'Conversion, gaps and text'!B1,-8)",
+    },
+    becomes: 'live',
+    changed: {},
+  },
+  'A fit': {
+    typed: { ...run, D2: '=PACE.COEFFICIENT(A2:A9,B2:B9,1,"free",,TRUE)' },
+    becomes: 'frozen',
+    changed: { B5: 36.5 },
+  },
+  'A fit that is given text': {
+    typed: { ...run, D1: 'free', D2: '=PACE.HALFLIFE(A2:A9,B2:B9,1,D1)' },
+    becomes: 'frozen',
+    changed: { D1: 'fres' },
+  },
+};

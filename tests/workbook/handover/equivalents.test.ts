@@ -1,0 +1,116 @@
+/** The copy worked out by programs that owe us nothing, before and after someone changes its inputs. */
+import { cellName } from '../../../functions/address';
+import { CellError, type CellValue } from '../../../functions/cell';
+import type { BookModel, CalculatedBook } from '../../../workbook/engine/engine';
+import { calculate } from '../../../workbook/engine/univer/headless';
+import { handOver, type HandedOver } from '../../../workbook/handover/handOver';
+import { changed, unchanged } from '../../../workbook/handover/methodSheet';
+import { createWorkbook } from '../../../workbook/xlsx/create';
+import { readWorkbook } from '../../../workbook/xlsx/read';
+import { typeCells } from '../../../workbook/xlsx/typeCells';
+import { book, type Typed } from '../engine/book';
+import { cases } from './cases';
+import { otherEngines, type Shown } from './otherEngines';
+
+const titles = Object.keys(cases);
+const bookOf = (typed: (title: string) => Typed): BookModel =>
+  book(Object.fromEntries(titles.map((title) => [sheetOf(title), typed(title)])));
+
+/** A sheet's name is at most 31 characters long. */
+const sheetOf = (title: string): string => title.slice(0, 31);
+
+let copy: HandedOver;
+let before: CalculatedBook;
+let after: CalculatedBook;
+let changedCopy: Uint8Array;
+
+beforeAll(async () => {
+  const model = bookOf((title) => cases[title].typed);
+  before = await calculate(model);
+  copy = await handOver(createWorkbook(model, before), { version: '1.2.3', date: '2026-12-01' });
+  after = await calculate(bookOf((title) => ({ ...cases[title].typed, ...cases[title].changed })));
+  changedCopy = withChanges(copy.bytes);
+}, 120_000);
+
+/** Typed over the inputs, in the copy itself. */
+function withChanges(bytes: Uint8Array): Uint8Array {
+  const now = readWorkbook(bytes);
+  const sheets = now.sheets.map((sheet) => {
+    const title = titles.find((one) => sheetOf(one) === sheet.name);
+    const changes = title === undefined ? [] : book({ x: cases[title].changed }).sheets[0].cells;
+    const isKept = ({ row, column }: { row: number; column: number }): boolean =>
+      !changes.some((cell) => cell.row === row && cell.column === column);
+    return { ...sheet, cells: [...sheet.cells.filter(isKept), ...changes] };
+  });
+  return typeCells(bytes, now, { ...now, sheets });
+}
+
+test.each(titles)('%s: every formula is handed over as it should be', (title) => {
+  const formulas = copy.formulas.filter(({ sheet }) => sheet === sheetOf(title));
+  expect(formulas.length).toBeGreaterThan(0);
+  for (const { why, said } of formulas)
+    expect({ why, live: said !== undefined }).toEqual({
+      why: cases[title].becomes === 'live' ? undefined : expect.any(String),
+      live: cases[title].becomes === 'live',
+    });
+});
+
+for (const engine of otherEngines) {
+  (engine.isInstalled ? describe : describe.skip)(engine.name, () => {
+    let shown: Shown;
+    let shownAfter: Shown;
+    beforeAll(() => {
+      shown = engine.recalculated(copy.bytes);
+      shownAfter = engine.recalculated(changedCopy);
+    }, 240_000);
+
+    test.each(titles)('%s: all values are ours', (title) => {
+      for (const { place, value } of resultsIn(title, before))
+        expectSame(shown.get(place) ?? null, value, place);
+    });
+
+    test.each(titles)('%s: the copy follows its inputs, or says that it does not', (title) => {
+      const { becomes, then } = cases[title];
+      const values = resultsIn(title, becomes === 'live' ? after : before);
+      for (const { place, value } of values) {
+        const theirs = shownAfter.get(place) ?? null;
+        if (then === 'error') expect({ place, theirs }).toEqual({ place, theirs: expect.any(CellError) });
+        else expectSame(theirs, value, place);
+      }
+    });
+
+    test('flags are down before a change, and up after it', () => {
+      const frozen = copy.formulas.flatMap((formula, n) =>
+        formula.said ? [] : [{ formula, cell: `Method!G${n + 6}` }],
+      );
+      expect(frozen.length).toBeGreaterThan(0);
+      for (const { formula, cell } of frozen) {
+        const title = titles.find((one) => sheetOf(one) === formula.sheet)!;
+        const isTouched = Object.keys(cases[title].changed).length > 0;
+        expect([cell, shown.get(cell)]).toEqual([cell, unchanged]);
+        expect([cell, shownAfter.get(cell)]).toEqual([cell, isTouched ? changed : unchanged]);
+      }
+    });
+  });
+}
+
+/** The cells that the formulas of a sheet cover, with what they show. */
+function resultsIn(title: string, calculated: CalculatedBook): { place: string; value: CellValue }[] {
+  return copy.formulas
+    .filter(({ sheet }) => sheet === sheetOf(title))
+    .flatMap(({ sheet, row, column, area }) =>
+      Array.from({ length: area.rows * area.columns }, (_, n) => {
+        const [r, c] = [row + Math.floor(n / area.columns), column + (n % area.columns)];
+        return { place: `${sheet}!${cellName(r, c)}`, value: calculated.shown(sheet, r, c) };
+      }),
+    );
+}
+
+function expectSame(theirs: CellValue, ours: CellValue, place: string): void {
+  if (typeof ours === 'number' && typeof theirs === 'number') {
+    const off = ours === 0 ? Math.abs(theirs) : Math.abs(theirs / ours - 1);
+    expect({ place, theirs, ours, isNear: off < 1e-9 }).toEqual({ place, theirs, ours, isNear: true });
+  } else if (ours instanceof CellError) {
+    expect({ place, theirs }).toEqual({ place, theirs: expect.objectContaining({ code: ours.code }) });
+  } else expect({ place, theirs: theirs ?? '' }).toEqual({ place, theirs: ours ?? '' });
+}
