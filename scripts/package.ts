@@ -5,24 +5,9 @@
 import { cpSync, existsSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { OfficeAddinManifest } from 'office-addin-manifest';
+import { manifestFor } from './packaged';
 
 const usage = 'usage: npm run package -- https://where.it.will.stand/folder OUT_FOLDER';
-
-/** The address in the checked-in manifest, for trying out on one's own machine. */
-const ownMachine = 'https://localhost:3000';
-
-/** Excel loads an add-in over HTTPS alone. @throws with the rule in words */
-export function requireAddress(text: string): string {
-  const url = URL.canParse(text) ? new URL(text) : undefined;
-  if (url?.protocol !== 'https:' || url.search !== '' || url.hash !== '') {
-    throw new Error(`the address must be https:// and no more than a folder: got "${text}"`);
-  }
-  return url.href.replace(/\/+$/, '');
-}
-
-/** The manifest with every address of ours moved. */
-export const manifestFor = (manifest: string, address: string): string =>
-  manifest.replaceAll(ownMachine, requireAddress(address));
 
 async function main(args: readonly string[]): Promise<void> {
   const [address, out] = args;
@@ -40,9 +25,7 @@ async function main(args: readonly string[]): Promise<void> {
   );
 }
 
-if (require.main === module) {
-  main(process.argv.slice(2)).catch((error: unknown) => {
-    console.error(error instanceof Error ? error.message : String(error));
-    process.exitCode = 2;
-  });
-}
+main(process.argv.slice(2)).catch((error: unknown) => {
+  console.error(error instanceof Error ? error.message : String(error));
+  process.exitCode = 2;
+});

@@ -1,5 +1,5 @@
 import { readFileSync } from 'node:fs';
-import { manifestFor, requireAddress } from '../../scripts/package';
+import { manifestFor, requireAddress } from '../../scripts/packaged';
 
 const manifest = readFileSync('manifest.xml', 'utf8');
 

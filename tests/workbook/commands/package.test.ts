@@ -1,0 +1,21 @@
+import { execFileSync } from 'node:child_process';
+import { existsSync, mkdtempSync, readFileSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import path from 'node:path';
+
+test('`npm run package` makes a folder with the bundle and a manifest that points to it', () => {
+  const out = path.join(mkdtempSync(path.join(tmpdir(), 'package-')), 'out');
+  const said = execFileSync(
+    process.execPath,
+    ['scripts/run.mjs', 'package', 'https://example.org/lab', out],
+    {
+      encoding: 'utf8',
+      stdio: ['ignore', 'pipe', 'ignore'],
+    },
+  );
+  expect(said).toContain('Flaskpace');
+  for (const file of ['manifest.xml', 'taskpane.html', 'addin.js', 'functions.json', 'assets/icon-32.png']) {
+    expect(existsSync(path.join(out, file))).toBe(true);
+  }
+  expect(readFileSync(path.join(out, 'manifest.xml'), 'utf8')).not.toContain('localhost');
+}, 180_000);
