@@ -6,7 +6,15 @@ import { longWork } from './actions/longWork';
 import { readPointedAt } from './actions/pointing';
 import { putting } from './actions/put';
 import { surveyRuns } from './actions/survey';
-import type { Choices, ManyChoice, OrderChoice, RateChoice, ReadingChoice, Task } from './choices';
+import type {
+  Choices,
+  ManyChoice,
+  OrderChoice,
+  RateChoice,
+  ReadingChoice,
+  Task,
+  TemperatureChoice,
+} from './choices';
 import type { WorkbookPort } from './port';
 import type { Run } from './runs';
 import type { Store } from './store';
@@ -21,6 +29,7 @@ export interface Actions {
   changeReading(part: Partial<ReadingChoice>): Promise<void>;
   changeRate(part: Partial<RateChoice>): Promise<void>;
   changeOrder(part: Partial<OrderChoice>): Promise<void>;
+  changeTemperature(part: Partial<TemperatureChoice>): Promise<void>;
   changeMany(part: Partial<ManyChoice>): Promise<void>;
   /** Asks PACE.SURVEY of the picked runs one after another, for the pane alone. */
   surveyRuns(): Promise<void>;
@@ -98,6 +107,7 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
     changeReading: changing('reading'),
     changeRate: changing('rate'),
     changeOrder: changing('order'),
+    changeTemperature: changing('temperature'),
     changeMany: changing('many'),
     surveyRuns: guarded(() => surveyRuns(bench, work)),
     stop: () => work.stop(),

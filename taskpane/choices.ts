@@ -1,7 +1,7 @@
 /** What a person has chosen at each step, as typed: an empty field is an argument left out. */
 
 /** The steps of the work; one is open at a time. */
-export type Task = 'reading' | 'rate' | 'order' | 'many';
+export type Task = 'reading' | 'rate' | 'order' | 'many' | 'temperature';
 
 export type RateKind = 'average' | 'tangent' | 'column';
 
@@ -46,6 +46,18 @@ export interface ManyChoice {
   readonly answer: ManyAnswer;
 }
 
+export type TemperatureAnswerKind = 'energy' | 'coefficient';
+
+export interface TemperatureChoice {
+  /** Columns of the sheet; `null` for those that the headings suggest, or for none. */
+  readonly temperatures: number | null;
+  readonly coefficients: number | null;
+  readonly uncertainties: number | null;
+  /** Where a coefficient is asked for. */
+  readonly at: string;
+  readonly answer: TemperatureAnswerKind;
+}
+
 export interface PutChoice {
   /** As typed: `'Gas run'!E3`. */
   readonly target: string;
@@ -64,6 +76,7 @@ export const firstChoices: Choices = {
   rate: { kind: 'tangent', from: '', to: '', time: '', points: '', degree: '', coefficient: '' },
   order: { order: '1', endpointKind: 'zero', endpoint: '', answer: 'coefficient' },
   many: { picked: null, answer: 'survey' },
+  temperature: { temperatures: null, coefficients: null, uncertainties: null, at: '', answer: 'energy' },
   put: { target: '', isOwn: false, withHeading: true, withDetail: false, inUse: [], question: null },
 };
 
@@ -72,5 +85,6 @@ export interface Choices {
   readonly rate: RateChoice;
   readonly order: OrderChoice;
   readonly many: ManyChoice;
+  readonly temperature: TemperatureChoice;
   readonly put: PutChoice;
 }

@@ -11,6 +11,7 @@ export type Quantity =
   | 'pH'
   | 'temperature'
   | 'fraction'
+  | 'coefficient'
   | 'unknown';
 
 export interface Heading {
@@ -34,6 +35,7 @@ const units: readonly (readonly [Quantity, RegExp])[] = [
 
 /** Words and symbols that name a quantity on their own. A single letter counts only when it stands alone. */
 const names: readonly (readonly [Quantity, RegExp])[] = [
+  ['coefficient', /^k(?![A-Za-z])|\brate (?:coefficient|constant)\b/],
   ['fraction', /^x$|\bfraction\b|\bconversion\b/i],
   ['time', /^t$|\b(?:time|elapsed|clock)\b/i],
   ['absorbance', /^A(?:bs)?\.?$|\babsorb|\bA\d{3}\b|\boptical density\b/i],
@@ -70,6 +72,16 @@ const bare = (unit: string): string => unit.trim().replace(/^\((.*)\)$/, '$1');
  * @example readHeading('V / mL') // { text: 'V / mL', quantity: 'volume', unit: 'mL' }
  */
 export function readHeading(text: string): Heading {
+  const heading = headingAsWritten(text);
+  return isResult.test(heading.text) && heading.quantity === 'time'
+    ? { ...heading, quantity: 'unknown' }
+    : heading;
+}
+
+/** In a unit of time, and yet no time at which something was read. */
+const isResult = /\bhalf[ -]?li(?:fe|ves)\b/i;
+
+function headingAsWritten(text: string): Heading {
   const trimmed = text.trim();
   for (const form of forms) {
     const match = form.exec(trimmed);

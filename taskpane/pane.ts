@@ -10,6 +10,7 @@ import { putInStep } from './steps/putIn';
 import { rateStep } from './steps/rate';
 import { readingStep } from './steps/reading';
 import { runStep } from './steps/run';
+import { temperatureStep } from './steps/temperature';
 import { taskBar } from './steps/tasks';
 import { createScenes, type Scene } from './scene';
 import { createStore, type State } from './store';
@@ -66,6 +67,7 @@ const steps: Readonly<Record<Task, (scene: Scene, actions: Actions) => HTMLEleme
   rate: rateStep,
   order: orderStep,
   many: manyStep,
+  temperature: temperatureStep,
 };
 
 export function view(scene: Scene, actions: Actions, host: string): HTMLElement {

@@ -3,7 +3,14 @@ import { allRuns, pickedRuns, type OneOfMany } from './calls/many';
 import { compareOrders, givenBy, orderAnswer, type OrderAnswer, type OrderLine } from './calls/order';
 import { rateAnswer, type RateAnswer } from './calls/rate';
 import { readingAnswer, type ReadingAnswer } from './calls/reading';
-import { firstChoices, type EndpointKind, type OrderChoice, type ReadingChoice } from './choices';
+import { temperatureAnswer, type TemperatureAnswer } from './calls/temperature';
+import {
+  firstChoices,
+  type EndpointKind,
+  type OrderChoice,
+  type ReadingChoice,
+  type TemperatureChoice,
+} from './choices';
 import { checkRun, type Check } from './findings';
 import { currentInsertion } from './insertions/current';
 import type { Insertion } from './insertions/insertion';
@@ -20,6 +27,7 @@ export interface Scene {
   readonly rate: RateAnswer | null;
   readonly order: OrderAnswer | null;
   readonly orders: Answered<readonly OrderLine[]> | null;
+  readonly temperature: TemperatureAnswer | null;
   /** Every run of the table, small; and those that were picked. */
   readonly stamps: readonly Stamp[];
   readonly picked: readonly OneOfMany[];
@@ -59,6 +67,10 @@ export function createScenes(): (state: State) => Scene {
       return compareOrders(givenBy(table, run, choice, { sheet: table.sheet, pointedAt }));
     },
   );
+  const temperature = remembered(
+    (table: Table, run: Run, choice: TemperatureChoice, pointedAt: State['pointedAt']) =>
+      temperatureAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
+  );
   const stamps = remembered(stampsOf);
   return (state) => {
     const { table, run, pointedAt } = state;
@@ -80,6 +92,9 @@ export function createScenes(): (state: State) => Scene {
       get orders() {
         return table && run && orders(table, run, endpointKind, endpoint, pointedAt);
       },
+      get temperature() {
+        return table && run && temperature(table, run, state.temperature, pointedAt);
+      },
       get stamps() {
         return table && run ? stamps(table, run) : [];
       },
@@ -99,6 +114,7 @@ export function createScenes(): (state: State) => Scene {
 
 function isAnswered(scene: Scene): boolean {
   const { task, order: choice } = scene.state;
+  if (task === 'temperature') return isTemperatureAnswered(scene);
   if (task === 'many') return scene.insertion !== null;
   if (task === 'reading') return scene.reading?.kind === 'column';
   if (task === 'rate') return scene.rate !== null && scene.rate.kind !== 'refused';
@@ -106,6 +122,11 @@ function isAnswered(scene: Scene): boolean {
   if (!order || !orders) return false;
   if (choice.answer === 'orders') return 'ok' in orders;
   return 'ok' in (choice.answer === 'curve' ? order.coefficient : order[choice.answer]);
+}
+
+function isTemperatureAnswered({ state, temperature }: Scene): boolean {
+  const answer = state.temperature.answer === 'energy' ? temperature?.energy : temperature?.predicted;
+  return !!answer && 'ok' in answer;
 }
 
 /** Asks again only when something that the answer rests on is another. */

@@ -28,6 +28,8 @@ export function take({ store }: Bench, block: RangeReading): string {
 function beginWith({ store }: Pick<Bench, 'store'>, table: Table, run: Run): void {
   store.choose('rate', startingTimes(table, run));
   store.choose('many', { picked: null });
+  store.choose('temperature', { temperatures: null, coefficients: null, uncertainties: null, at: '' });
+  if (headingOf(table, run.timeColumn).quantity === 'temperature') store.change({ task: 'temperature' });
   store.choose('order', { endpointKind: rises(table, run) ? 'free' : 'zero', endpoint: '' });
   chooseSignal({ store }, signalFor(headingOf(table, run.readingColumn)));
 }

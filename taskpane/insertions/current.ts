@@ -4,6 +4,7 @@ import { manyInsertion } from './many';
 import { orderInsertion } from './order';
 import { readingInsertion } from './reading';
 import { rateInsertion } from './rate';
+import { temperatureInsertion } from './temperature';
 
 /** What the open step would write; `null` while it has nothing to write. */
 export function currentInsertion(state: State): Insertion | null {
@@ -11,6 +12,7 @@ export function currentInsertion(state: State): Insertion | null {
   if (!table || !run) return null;
   if (task === 'order') return orderInsertion(table, run, state, put.withDetail);
   if (task === 'many') return manyInsertion(table, run, state);
+  if (task === 'temperature') return temperatureInsertion(table, run, state);
   if (task === 'reading') return readingInsertion(table, run, state);
   return rateInsertion(table, run, state.rate, put.withDetail);
 }

@@ -1,10 +1,11 @@
 /** Which cells are the run. */
-import { areaName, columnName } from '../../functions/address';
+import { areaName } from '../../functions/address';
 import { shown } from '../../src/errors';
 import type { Actions } from '../actions';
 import { h } from '../h';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
+import { columnField } from './columnField';
 import { findingsList } from './findings';
 import { button, selectField, step, type Choice } from './fields';
 
@@ -46,26 +47,9 @@ export function runStep(
     proposal
       ? button(`Use ${areaName(proposal.area)} instead`, () => void actions.chooseProposal())
       : button('Use the selected cells', () => void actions.chooseSelection()),
-    check && findingsList(check),
+    isFollowedInTime(table, run) && check && findingsList(check),
     caution(table, run),
   );
-}
-
-function columnField(
-  id: string,
-  label: string,
-  table: Table,
-  chosen: number,
-  choose: (column: number) => Promise<void>,
-): HTMLElement {
-  const choices = table.columns.map(({ column, heading }): Choice => {
-    const named =
-      heading.text === `column ${columnName(column)}`
-        ? heading.text
-        : `${columnName(column)}: ${heading.text}`;
-    return { value: String(column), label: named };
-  });
-  return selectField(id, label, choices, String(chosen), (value) => void choose(Number(value)));
 }
 
 /** So many rows still make a list that can be picked from; beyond, every nth. */
@@ -118,3 +102,7 @@ function caution(table: Table, run: Run): HTMLElement | null {
     'Keep the vessel vented, stand a shield before it, and follow the rules of your laboratory.',
   );
 }
+
+/** A table over temperature is no run, and a check of one would only mislead. */
+const isFollowedInTime = (table: Table, run: Run): boolean =>
+  headingOf(table, run.timeColumn).quantity !== 'temperature';

@@ -8,6 +8,7 @@ export const tasks: readonly (readonly [Task, string])[] = [
   ['rate', 'Rate'],
   ['order', 'Order'],
   ['many', 'All runs'],
+  ['temperature', 'Temperature'],
 ];
 
 export function taskBar(open: Task, actions: Actions): HTMLElement {

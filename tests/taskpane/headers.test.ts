@@ -22,6 +22,11 @@ test.each([
   ['s', 'unknown', ''],
   ['Remarks', 'unknown', ''],
   ['mL', 'volume', 'mL'],
+  ['half life / d', 'unknown', 'd'],
+  ['k / d⁻¹', 'coefficient', 'd⁻¹'],
+  ['rate coefficient, order 1 / min⁻¹', 'coefficient', 'min⁻¹'],
+  ['T / K', 'temperature', 'K'],
+  ['conversion', 'fraction', '1'],
 ])('readHeading(%j) is %s in %j', (text, quantity, unit) => {
   expect(readHeading(text)).toEqual({ text, quantity, unit });
 });

@@ -1,0 +1,136 @@
+/** The temperature step: rate coefficients over temperature, by the functions of that family. */
+import { celsiusZero, gasConstant } from '../../src/constants';
+import type { TemperatureChoice } from '../choices';
+import type { Run, Table } from '../runs';
+import { argumentOf, columnArgument, leftOut, truth, type Argument, type Pointing } from './argument';
+import { askForRows, formulaText } from './call';
+import { answeredEstimate, readEstimate, type Answered, type Estimate } from './estimate';
+import type { Point } from './order';
+
+/** Columns of the sheet. */
+export interface Columns {
+  readonly temperatures: number;
+  readonly coefficients: number;
+  readonly uncertainties: number | null;
+}
+
+/** As chosen, or else the first temperatures and the coefficients, or whatever stands right of them. */
+export function columnsFor({ columns }: Table, choice: TemperatureChoice): Columns {
+  const has = (column: number | null): column is number => columns.some((one) => one.column === column);
+  const first = (quantity: string): number | undefined =>
+    columns.find(({ heading }) => heading.quantity === quantity)?.column;
+  const temperatures = has(choice.temperatures)
+    ? choice.temperatures
+    : (first('temperature') ?? columns[0].column);
+  const others = columns.map(({ column }) => column).filter((column) => column !== temperatures);
+  const beside = others.find((column) => column > temperatures) ?? others[0];
+  return {
+    temperatures,
+    coefficients: has(choice.coefficients) ? choice.coefficients : (first('coefficient') ?? beside),
+    uncertainties: has(choice.uncertainties) ? choice.uncertainties : null,
+  };
+}
+
+interface Given {
+  readonly measured: readonly [Argument, Argument];
+  readonly at: Argument;
+  readonly uncertainties: Argument;
+}
+
+function givenBy(table: Table, run: Run, choice: TemperatureChoice, pointing: Pointing): Given {
+  const { temperatures, coefficients, uncertainties } = columnsFor(table, choice);
+  return {
+    measured: [columnArgument(table, run, temperatures), columnArgument(table, run, coefficients)],
+    at: argumentOf(choice.at, pointing),
+    uncertainties: uncertainties === null ? leftOut : columnArgument(table, run, uncertainties),
+  };
+}
+
+const energyCall = ({ measured, uncertainties }: Given, detail: Argument): [string, Argument[]] => [
+  'ARRHENIUS',
+  [...measured, uncertainties, detail],
+];
+const coefficientCall = ({ measured, at, uncertainties }: Given, detail: Argument): [string, Argument[]] => [
+  'COEFFICIENTAT',
+  [...measured, at, uncertainties, detail],
+];
+
+export function temperatureFormula(
+  table: Table,
+  run: Run,
+  choice: TemperatureChoice,
+  pointing: Pointing,
+  detail: boolean,
+): string {
+  const call = choice.answer === 'energy' ? energyCall : coefficientCall;
+  return formulaText(...call(givenBy(table, run, choice, pointing), detail ? truth(true) : leftOut));
+}
+
+export interface TemperatureAnswer {
+  /** Ea, kJ/mol. */
+  readonly energy: Answered<Estimate>;
+  readonly logFactor: Estimate | null;
+  /** `null` where no temperature is asked for. */
+  readonly predicted: (Answered<Estimate> & { readonly isExtrapolated: boolean }) | null;
+  /** ln k against 1000 K/T. */
+  readonly points: readonly Point[];
+  readonly line: readonly Point[];
+  /** The predicted coefficient in the same drawing. */
+  readonly mark: readonly Point[];
+}
+
+export function temperatureAnswer(
+  table: Table,
+  run: Run,
+  choice: TemperatureChoice,
+  pointing: Pointing,
+): TemperatureAnswer {
+  const given = givenBy(table, run, choice, pointing);
+  const rows = askForRows(...energyCall(given, truth(true)));
+  const energy = answeredEstimate(rows);
+  const logFactor = rows.length > 1 ? readEstimate(rows[1]) : null;
+  const isAsked = choice.at.trim() !== '';
+  const row = isAsked ? askForRows(...coefficientCall(given, truth(true))) : null;
+  const predicted = row && { ...answeredEstimate(row), isExtrapolated: row[0][5] === 'extrapolated' };
+  const points = pointsOf(given);
+  const mark = predicted && 'ok' in predicted ? markAt(predicted.ok, energy, logFactor) : [];
+  return {
+    energy,
+    logFactor,
+    predicted,
+    points,
+    line: lineThrough([...points, ...mark], energy, logFactor),
+    mark,
+  };
+}
+
+function pointsOf({ measured: [temperatures, coefficients] }: Given): Point[] {
+  const columnOf = ({ value }: Argument): readonly unknown[] => (Array.isArray(value) ? value.flat() : []);
+  const ks = columnOf(coefficients);
+  return columnOf(temperatures).flatMap((temperature, row) => {
+    const k = ks[row];
+    const isPoint = typeof temperature === 'number' && typeof k === 'number' && k > 0;
+    return isPoint ? [{ x: 1000 / (temperature + celsiusZero), y: Math.log(k) }] : [];
+  });
+}
+
+/** ln k = ln A − Ea/RT, drawn from what PACE.ARRHENIUS answered. */
+function lineThrough(
+  points: readonly Point[],
+  energy: Answered<Estimate>,
+  logFactor: Estimate | null,
+): Point[] {
+  if (!('ok' in energy) || !logFactor || points.length < 2) return [];
+  const xs = points.map(({ x }) => x);
+  return [Math.min(...xs), Math.max(...xs)].map((x) => ({
+    x,
+    y: logFactor.value - (energy.ok.value / gasConstant) * x,
+  }));
+}
+
+/** Where on the line the predicted coefficient lies, so that its temperature need not be read twice. */
+function markAt({ value }: Estimate, energy: Answered<Estimate>, logFactor: Estimate | null): Point[] {
+  if (!('ok' in energy) || !logFactor || energy.ok.value === 0) return [];
+  const y = Math.log(value);
+  return [{ x: ((logFactor.value - y) * gasConstant) / energy.ok.value, y }];
+}

@@ -1,0 +1,76 @@
+/** @jest-environment jsdom */
+import { functionNamed } from '../../functions/catalogue';
+import { openPane, type PaneBench } from './paneBench';
+
+let pane: PaneBench;
+afterEach(() => pane.close());
+
+/** CODATA 2022, J/(mol K). */
+const R = 8.314462618;
+const energy = 80; // kJ/mol
+/** k = A exp(−Ea/RT) with A chosen so that k is 0.001 per day at 25 °C. */
+const coefficientAt = (celsius: number): number =>
+  0.001 * Math.exp((-energy * 1000 * (1 / (celsius + 273.15) - 1 / 298.15)) / R);
+const table = [
+  ['θ / °C', 'k / d⁻¹', 'half life / d'],
+  ...[40, 50, 60, 70].map((t) => [t, coefficientAt(t), Math.LN2 / coefficientAt(t)]),
+];
+
+const open = async (): Promise<void> => {
+  pane = await openPane({ Store: table }, 'A2');
+};
+
+test('a table over temperature opens the temperature step, and is not checked as a run', async () => {
+  await open();
+  expect(pane.find('#task-temperature').getAttribute('aria-current')).toBe('step');
+  expect(pane.root.querySelector('.findings')).toBeNull();
+  expect(pane.find<HTMLSelectElement>('#coefficients').selectedOptions[0].textContent).toBe('B: k / d⁻¹');
+});
+
+test('the activation energy, its plot and its formula', async () => {
+  await open();
+  expect(pane.text('.result .value')).toBe('80 kJ/mol');
+  expect(pane.text('#formula')).toBe('=PACE.ARRHENIUS(Store!A2:A5,Store!B2:B5)');
+  expect(pane.find('#temperature svg').getAttribute('aria-label')).toBe(
+    'ln(k / d⁻¹) against 1000 K / T: 4 temperatures with the line through them',
+  );
+});
+
+test('a coefficient at another temperature is marked as extrapolated, with its caution', async () => {
+  await open();
+  await pane.type('#temperature-at', '25');
+  const [, predicted] = [...pane.root.querySelectorAll('#temperature .result')];
+  expect(predicted.querySelector('.value')!.textContent).toBe('0.001 d⁻¹');
+  expect(predicted.querySelector('.warning')!.textContent).toMatch(/^Extrapolated/);
+  expect(predicted.querySelector('.caution')!.textContent).toBe(functionNamed('COEFFICIENTAT')!.caution);
+  expect(pane.root.querySelector('svg .touch')!.getAttribute('d')).not.toBe('');
+  await pane.type('#temperature-at', '55 degC');
+  expect(pane.root.querySelector('#temperature .warning')).toBeNull();
+});
+
+test('what cannot be a temperature is told at its field', async () => {
+  await open();
+  await pane.type('#temperature-at', '-400');
+  expect(pane.text('#temperature-at-problem')).toMatch(/^temperature must be above -273.15/);
+});
+
+test('energy with limits: two named rows; a coefficient: one', async () => {
+  await open();
+  await pane.tick('#with-detail');
+  await pane.press('Put it in');
+  expect(['D2', 'D3', 'E1'].map(pane.book.valueAt)).toEqual(['Ea / (kJ/mol)', 'ln A', 'value']);
+  expect(pane.book.formulaAt('E2')).toBe('=PACE.ARRHENIUS(Store!A2:A5,Store!B2:B5,,TRUE)');
+  expect(pane.book.valueAt('E2')).toBeCloseTo(80, 6);
+  await pane.type('#temperature-at', '25');
+  await pane.choose('#temperature-answer', 'coefficient');
+  await pane.press('Put it in');
+  const target = pane.text('.notice').match(/Store!([A-Z]+2)/)![1];
+  expect(pane.book.formulaAt(target)).toBe('=PACE.COEFFICIENTAT(Store!A2:A5,Store!B2:B5,25,,TRUE)');
+  expect(pane.book.valueAt(target)).toBeCloseTo(0.001, 9);
+});
+
+test('coefficients that cannot be are refused in words', async () => {
+  pane = await openPane({ Store: table.map((row, r) => (r === 2 ? [row[0], -1, 3] : row)) }, 'A2');
+  expect(pane.text('.result .problem')).toMatch(/^coefficients must be above 0: row 2/);
+  expect(pane.find<HTMLButtonElement>('#put-in button.main').disabled).toBe(true);
+});
