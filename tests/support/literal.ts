@@ -3,13 +3,19 @@ import { callFunction } from '../../functions/call';
 import { functionNamed } from '../../functions/catalogue';
 import type { CellResult, CellValue } from '../../functions/cell';
 import { CellError } from '../../functions/cell';
+import type { CellFunction } from '../../functions/define';
 
-/** @param formula `=PACE.EVENT({40;25},,-1)` */
-export function calculate(formula: string): CellResult {
+/** The function that a formula calls and its arguments. @param formula `=PACE.EVENT({40;25},,-1)` */
+export function callIn(formula: string): { f: CellFunction; args: (CellResult | undefined)[] } {
   const match = /^=PACE\.([A-Z]+)\((.*)\)$/.exec(formula);
   const f = match && functionNamed(match[1]);
   if (!f) throw new Error(`not one call of a PACE function: ${formula}`);
-  return callFunction(f, match[2] === '' ? [] : splitTop(match[2], ',').map(argument));
+  return { f, args: match[2] === '' ? [] : splitTop(match[2], ',').map(argument) };
+}
+
+export function calculate(formula: string): CellResult {
+  const { f, args } = callIn(formula);
+  return callFunction(f, args);
 }
 
 /** @returns the words beside the error, after its code: `#VALUE! volume must …` */
