@@ -46,6 +46,16 @@ export class Given {
     return { text: argument.text, holds: [`ISNUMBER(${argument.text})`, ...within(argument.text, bounds)] };
   }
 
+  /** A number on which the form of the formula depends: taken as it is on the day of the copy. */
+  constant(name: string): { readonly value: number; readonly holds: readonly string[] } {
+    const argument = this.argument(name);
+    if (!argument) return { value: this.fallback(name) as number, holds: [] };
+    const cell = this.single(argument, name);
+    if (typeof cell !== 'number') throw new NotSaid(`${name} is not known to be a number`);
+    requireWithin(cell, this.parameters[name].bounds ?? {}, name, '1');
+    return { value: cell, holds: argument.area ? [`${argument.text}=${numberText(cell)}`] : [] };
+  }
+
   /** In the unit `to`: a bare number is one of the parameter's own unit, text carries its own. */
   quantity(name: string, to: string): Phrase {
     const argument = this.argument(name);

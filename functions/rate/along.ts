@@ -1,5 +1,6 @@
 import { ratesAlong } from '../../src/rate/tangent';
 import { detail } from '../commonParameters';
+import { sayAlong } from '../builtIn/rate';
 import { defineFunction } from '../define';
 import { column } from '../parameters';
 import { standardRow } from '../results';
@@ -30,4 +31,5 @@ export default defineFunction({
       rates.map((rate) => (detail ? standardRow(rate) : [rate.value])),
     );
   },
+  builtIn: sayAlong,
 });

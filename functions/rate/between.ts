@@ -1,5 +1,6 @@
 import { averageRate } from '../../src/rate/average';
 import { detail, stoichiometricNumber } from '../commonParameters';
+import { sayBetween } from '../builtIn/rate';
 import { defineFunction } from '../define';
 import { column, number } from '../parameters';
 import { estimateResult } from '../results';
@@ -24,4 +25,5 @@ export default defineFunction({
   reference: 'doi:10.1351/goldbook.R05156; doi:10.1093/biomet/73.3.625',
   run: ({ times, values, from, to, coefficient, detail }) =>
     estimateResult(averageRate(seriesOf(times, values), from, to, coefficient), detail),
+  builtIn: sayBetween,
 });

@@ -1,5 +1,6 @@
 import { tangentRate } from '../../src/rate/tangent';
 import { detail } from '../commonParameters';
+import { sayTangent } from '../builtIn/rate';
 import { defineFunction } from '../define';
 import { column, number } from '../parameters';
 import { estimateResult } from '../results';
@@ -27,4 +28,5 @@ export default defineFunction({
       tangentRate(seriesOf(times, values), time, { points, degree, stoichiometricNumber: coefficient }),
       detail,
     ),
+  builtIn: sayTangent,
 });

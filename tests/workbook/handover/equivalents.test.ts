@@ -4,7 +4,7 @@ import { CellError, type CellValue } from '../../../functions/cell';
 import type { BookModel, CalculatedBook } from '../../../workbook/engine/engine';
 import { calculate } from '../../../workbook/engine/univer/headless';
 import { handOver, type HandedOver } from '../../../workbook/handover/handOver';
-import { changed, unchanged } from '../../../workbook/handover/methodSheet';
+import { changed, unchanged, unwatched } from '../../../workbook/handover/methodSheet';
 import { createWorkbook } from '../../../workbook/xlsx/create';
 import { readWorkbook } from '../../../workbook/xlsx/read';
 import { typeCells } from '../../../workbook/xlsx/typeCells';
@@ -86,9 +86,10 @@ for (const engine of otherEngines) {
       expect(frozen.length).toBeGreaterThan(0);
       for (const { formula, cell } of frozen) {
         const title = titles.find((one) => sheetOf(one) === formula.sheet)!;
-        const isTouched = Object.keys(cases[title].changed).length > 0;
-        expect([cell, shown.get(cell)]).toEqual([cell, unchanged]);
-        expect([cell, shownAfter.get(cell)]).toEqual([cell, isTouched ? changed : unchanged]);
+        const { unwatched: isUnwatched, changed: changes } = cases[title];
+        const [down, up] = isUnwatched ? [unwatched, unwatched] : [unchanged, changed];
+        expect([title, shown.get(cell)]).toEqual([title, down]);
+        expect([title, shownAfter.get(cell)]).toEqual([title, Object.keys(changes).length > 0 ? up : down]);
       }
     });
   });

@@ -1,0 +1,92 @@
+/**
+ * Two columns that belong together, in array formulas: a pair with a gap counts as nothing. Gaps and order are
+ * those of the day a formula is worked out, not of the day it was written.
+ */
+import type { Given } from './given';
+import { sure, type Phrase } from './phrase';
+import { NotSaid } from './said';
+
+export class Pairs {
+  /** 1 for a pair of numbers, 0 for one with a gap. */
+  readonly both: string;
+  readonly count: string;
+  /** How many pairs there is room for. */
+  readonly size: number;
+  private readonly separator: ',' | ';';
+
+  private constructor(
+    readonly x: string,
+    readonly y: string,
+    readonly rows: number,
+    readonly columns: number,
+  ) {
+    this.both = `ISNUMBER(${x})*ISNUMBER(${y})`;
+    this.count = `SUM(${this.both})`;
+    this.size = rows * columns;
+    this.separator = columns > 1 ? ';' : ',';
+  }
+
+  /** @throws NotSaid where the columns do not lie alike, or hold what a formula cannot judge */
+  static of(given: Given, x: string, y: string): Pairs {
+    const [first, second] = [given.quantityReadings(x), given.quantityReadings(y)];
+    if (!first.isPlaced || !second.isPlaced) throw new NotSaid('a column is worked out within the formula');
+    if (first.rows !== second.rows || first.columns !== second.columns)
+      throw new NotSaid(`${x} and ${y} do not lie alike`);
+    if (first.rows > 1 && first.columns > 1) throw new NotSaid(`${x} is a block`);
+    if (first.rows * first.columns > mostPairs)
+      throw new NotSaid(`a column of more than ${mostPairs} pairs would make it slow`);
+    return new Pairs(first.whole, second.whole, first.rows, first.columns);
+  }
+
+  /** An error among the readings is the answer itself. */
+  get holds(): string[] {
+    return [`SUM(ISERROR(${this.x})+ISERROR(${this.y}))=0`];
+  }
+
+  /** Of each pair what the text says, and nothing of one with a gap: for MIN, MAX, SMALL and the like. */
+  some(text: string): string {
+    return `IF(${this.both},${text},"")`;
+  }
+
+  /** Of each pair what the text says, and 0 of one with a gap: for sums. */
+  each(text: string): string {
+    return `IF(${this.both},${text},0)`;
+  }
+
+  /** The sign of the slope through all pairs; 1 for a level column. */
+  trend(): string {
+    const x = this.each(this.x);
+    return `IF(SUM((${x}-SUM(${x})/${this.count})*${this.each(this.y)})<0,-1,1)`;
+  }
+
+  /** As given, or by the trend. */
+  stoichiometricNumber(given: Given): Phrase {
+    if (!given.has('coefficient')) return sure(this.trend());
+    const { text, holds } = given.number('coefficient');
+    return { text, holds: [...holds, `${text}<>0`] };
+  }
+
+  /** That a value of x lies among the pairs. */
+  within(at: string): string {
+    const all = this.some(this.x);
+    return `AND(${at}>=MIN(${all}),${at}<=MAX(${all}))`;
+  }
+
+  /** Least squares of y against terms of x, of which the first is a constant: a row of coefficients, last term first. */
+  fit({ y, terms, weight }: Fit): string {
+    const unit = (n: number): string =>
+      `{${terms.map((_, place) => (place === n ? 1 : 0)).join(this.separator)}}`;
+    const columns = terms.map((term, n) => (term === '1' ? unit(n) : `${term}*${unit(n)}`)).join('+');
+    return `LINEST(${weight}*${y},${weight}*(${columns}),FALSE,TRUE)`;
+  }
+}
+
+interface Fit {
+  readonly y: string;
+  readonly terms: readonly string[];
+  /** 0 leaves a pair out; else the root of its weight. */
+  readonly weight: string;
+}
+
+/** Each cell of a column works through all pairs. */
+const mostPairs = 500;
