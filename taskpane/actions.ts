@@ -8,6 +8,7 @@ import { putting } from './actions/put';
 import { surveyRuns } from './actions/survey';
 import type {
   Choices,
+  LookupChoice,
   ManyChoice,
   OrderChoice,
   RateChoice,
@@ -30,6 +31,7 @@ export interface Actions {
   changeRate(part: Partial<RateChoice>): Promise<void>;
   changeOrder(part: Partial<OrderChoice>): Promise<void>;
   changeTemperature(part: Partial<TemperatureChoice>): Promise<void>;
+  changeLookup(part: Partial<LookupChoice>): Promise<void>;
   changeMany(part: Partial<ManyChoice>): Promise<void>;
   /** Asks PACE.SURVEY of the picked runs one after another, for the pane alone. */
   surveyRuns(): Promise<void>;
@@ -108,6 +110,7 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
     changeRate: changing('rate'),
     changeOrder: changing('order'),
     changeTemperature: changing('temperature'),
+    changeLookup: changing('lookup'),
     changeMany: changing('many'),
     surveyRuns: guarded(() => surveyRuns(bench, work)),
     stop: () => work.stop(),

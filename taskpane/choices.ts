@@ -1,7 +1,7 @@
 /** What a person has chosen at each step, as typed: an empty field is an argument left out. */
 
 /** The steps of the work; one is open at a time. */
-export type Task = 'reading' | 'rate' | 'order' | 'many' | 'temperature';
+export type Task = 'reading' | 'rate' | 'order' | 'many' | 'temperature' | 'lookUp';
 
 export type RateKind = 'average' | 'tangent' | 'column';
 
@@ -58,6 +58,12 @@ export interface TemperatureChoice {
   readonly answer: TemperatureAnswerKind;
 }
 
+export interface LookupChoice {
+  readonly words: string;
+  /** The function whose help is open; empty for the list. */
+  readonly chosen: string;
+}
+
 export interface PutChoice {
   /** As typed: `'Gas run'!E3`. */
   readonly target: string;
@@ -77,6 +83,7 @@ export const firstChoices: Choices = {
   order: { order: '1', endpointKind: 'zero', endpoint: '', answer: 'coefficient' },
   many: { picked: null, answer: 'survey' },
   temperature: { temperatures: null, coefficients: null, uncertainties: null, at: '', answer: 'energy' },
+  lookup: { words: '', chosen: '' },
   put: { target: '', isOwn: false, withHeading: true, withDetail: false, inUse: [], question: null },
 };
 
@@ -86,5 +93,6 @@ export interface Choices {
   readonly order: OrderChoice;
   readonly many: ManyChoice;
   readonly temperature: TemperatureChoice;
+  readonly lookup: LookupChoice;
   readonly put: PutChoice;
 }

@@ -4,6 +4,7 @@ import { h } from './h';
 import { patch } from './patch';
 import type { WorkbookPort } from './port';
 import type { Task } from './choices';
+import { lookUpStep } from './steps/lookUp';
 import { manyStep } from './steps/many';
 import { orderStep } from './steps/order';
 import { putInStep } from './steps/putIn';
@@ -68,6 +69,7 @@ const steps: Readonly<Record<Task, (scene: Scene, actions: Actions) => HTMLEleme
   order: orderStep,
   many: manyStep,
   temperature: temperatureStep,
+  lookUp: lookUpStep,
 };
 
 export function view(scene: Scene, actions: Actions, host: string): HTMLElement {

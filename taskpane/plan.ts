@@ -14,11 +14,13 @@ export interface Plan {
   readonly description: string;
 }
 
-/** @returns the cell meant, on the run's sheet unless it names another; words when it means none */
+/** @returns the cell meant, on the given sheet, where there is one, unless it names another; words when it means none */
 function readTarget(sheet: string, typed: string): SheetArea | string {
   if (typed.trim() === '') return 'type the cell to write to, such as E3';
   const area = parseArea(typed);
   if (!area) return `a cell is written like E3 or 'Gas run'!E3: got "${typed.trim()}"`;
+  if (area.sheet === undefined && sheet === '')
+    return `name the sheet as well, such as 'Gas run'!E3: got "${typed.trim()}"`;
   return { sheet: area.sheet ?? sheet, row: area.row, column: area.column, rows: 1, columns: 1 };
 }
 

@@ -1,4 +1,5 @@
 /** Putting a formula into the sheet, and taking it back. */
+import { areaName } from '../../functions/address';
 import { readingAnswer } from '../calls/reading';
 import { currentInsertion } from '../insertions/current';
 import type { Insertion } from '../insertions/insertion';
@@ -24,17 +25,23 @@ export function putting(bench: Bench, work: LongWork): Putting {
 
   async function settle(): Promise<void> {
     const mine = ++question;
-    const { table, run, put } = store.state;
     const insertion = currentInsertion(store.state);
-    if (!table || !run || !insertion) return;
-    if (!put.isOwn) {
-      const target = await firstFree(port, table.area, run.firstRow, insertion.size);
+    if (!insertion) return;
+    if (!store.state.put.isOwn) {
+      const target = await placeFor(insertion);
       if (mine !== question) return;
       store.choose('put', { target });
     }
-    const plan = planFor(insertion, table.sheet, store.state.put);
+    const plan = planFor(insertion, sheetOf(store.state), store.state.put);
     const inUse = typeof plan === 'string' ? [] : await occupied(plan.area);
     if (mine === question) store.choose('put', { inUse });
+  }
+
+  async function placeFor({ isAtActiveCell, size }: Insertion): Promise<string> {
+    const { table, run } = store.state;
+    if (!isAtActiveCell && table && run) return firstFree(port, table.area, run.firstRow, size);
+    const cell = await port.activeCell();
+    return cell ? areaName(cell) : '';
   }
 
   /** Another sheet may have been named that does not exist: then writing will say so. */
@@ -43,10 +50,8 @@ export function putting(bench: Bench, work: LongWork): Putting {
   async function putIn(overwrite: boolean): Promise<void> {
     await reread(bench);
     const insertion = currentInsertion(store.state);
-    const { put } = store.state;
-    const sheet = store.state.table?.sheet;
-    if (sheet === undefined || !insertion) return;
-    const plan = planFor(insertion, sheet, put);
+    if (!insertion) return;
+    const plan = planFor(insertion, sheetOf(store.state), store.state.put);
     if (typeof plan === 'string') return notify('bad', plan);
     try {
       const isWhole = await write(plan, overwrite);
@@ -108,6 +113,9 @@ export function putting(bench: Bench, work: LongWork): Putting {
 
   return { settle, putIn, undoLast };
 }
+
+/** Where a cell named without its sheet is meant to be. */
+const sheetOf = ({ table }: State): string => table?.sheet ?? '';
 
 /** So many cells are written at one go. */
 const bitSize = 24;

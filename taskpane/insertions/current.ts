@@ -1,6 +1,7 @@
 import type { State } from '../store';
 import type { Insertion } from './insertion';
 import { manyInsertion } from './many';
+import { exampleInsertion } from './example';
 import { orderInsertion } from './order';
 import { readingInsertion } from './reading';
 import { rateInsertion } from './rate';
@@ -9,6 +10,7 @@ import { temperatureInsertion } from './temperature';
 /** What the open step would write; `null` while it has nothing to write. */
 export function currentInsertion(state: State): Insertion | null {
   const { table, run, task, put } = state;
+  if (task === 'lookUp') return exampleInsertion(state.lookup.chosen);
   if (!table || !run) return null;
   if (task === 'order') return orderInsertion(table, run, state, put.withDetail);
   if (task === 'many') return manyInsertion(table, run, state);

@@ -24,6 +24,8 @@ export interface Insertion {
   readonly reads: readonly SheetArea[];
   /** Whether uncertainty and limits can stand beside the value. */
   readonly hasDetail: boolean;
+  /** Whether it goes to the active cell, rather than beside the run. */
+  readonly isAtActiveCell?: boolean;
   /** Whether the run goes on with the column it puts in. */
   readonly becomesReadings?: boolean;
 }

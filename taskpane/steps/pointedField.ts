@@ -1,9 +1,10 @@
 /** A field that takes a number, words with a unit, or cells: typed, or pointed at in the sheet. */
-import { boundsInWords, type Parameter } from '../../functions/parameters';
+import type { Parameter } from '../../functions/parameters';
 import { isUnit } from '../../src/units';
 import type { Actions } from '../actions';
 import { h } from '../h';
 import { checkField } from './fields';
+import { parameterHelp } from './parameterHelp';
 
 export interface PointedField {
   readonly id: string;
@@ -58,13 +59,7 @@ export function pointedField(
         isMany ? 'Cells' : 'Cell',
       ),
     ),
-    h('p', { id: helpId, className: 'hint' }, helpFor(parameter)),
+    h('p', { id: helpId, className: 'hint' }, parameterHelp(parameter)),
     problem && h('p', { id: problemId, className: 'problem', role: 'alert' }, problem),
   );
-}
-
-function helpFor({ help, bounds, optional, whenOmitted }: Parameter): string {
-  const range = bounds ? boundsInWords(bounds) : '';
-  const omitted = optional && whenOmitted ? `left empty: ${whenOmitted}` : '';
-  return [help, range, omitted].filter(Boolean).join('; ');
 }

@@ -11,7 +11,7 @@ const title = 'Put it in';
 
 export function putInStep({ state, insertion, isAnswered }: Scene, actions: Actions): HTMLElement {
   const { table, put } = state;
-  if (!table || !insertion)
+  if (!insertion)
     return step(
       'put-in',
       title,
@@ -22,7 +22,7 @@ export function putInStep({ state, insertion, isAnswered }: Scene, actions: Acti
       ),
       undoButton(state, actions),
     );
-  const plan = planFor(insertion, table.sheet, put);
+  const plan = planFor(insertion, table?.sheet ?? '', put);
   const isReady = typeof plan !== 'string' && isAnswered;
   return step(
     'put-in',

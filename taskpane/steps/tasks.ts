@@ -9,6 +9,7 @@ export const tasks: readonly (readonly [Task, string])[] = [
   ['order', 'Order'],
   ['many', 'All runs'],
   ['temperature', 'Temperature'],
+  ['lookUp', 'Look up'],
 ];
 
 export function taskBar(open: Task, actions: Actions): HTMLElement {

@@ -2,9 +2,9 @@
 import { parseArea } from '../../functions/address';
 import { callFunction } from '../../functions/call';
 import { functionNamed } from '../../functions/catalogue';
-import { isRange, type CellRange, type CellResult } from '../../functions/cell';
+import { isRange, type CellRange, type CellResult, type CellValue } from '../../functions/cell';
 import type { SheetArea } from '../../taskpane/port';
-import { exampleArguments } from '../../workbook/engine/univer/exampleArguments';
+import { partsOf } from '../../taskpane/examples';
 
 /** @returns nothing for a formula that is no call of ours */
 export function answerOf(
@@ -22,9 +22,15 @@ function valueOf(text: string, sheet: string, read: (area: SheetArea) => CellRan
     const f = functionNamed(call[1])!;
     return callFunction(
       f,
-      exampleArguments(text).map((argument) => valueOf(argument, sheet, read)),
+      partsOf(text.slice(text.indexOf('(') + 1, text.lastIndexOf(')')), ',').map((argument) =>
+        valueOf(argument, sheet, read),
+      ),
     );
   }
+  if (text.startsWith('{'))
+    return partsOf(text.slice(1, -1), ';').map((row) =>
+      partsOf(row, ',').map((cell) => valueOf(cell, sheet, read) as CellValue),
+    );
   if (text === '') return undefined;
   if (text.startsWith('"')) return text.slice(1, -1).replace(/""/g, '"');
   if (text === 'TRUE' || text === 'FALSE') return text === 'TRUE';

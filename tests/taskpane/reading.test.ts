@@ -28,7 +28,9 @@ test('a gas run asks for what PACE.GASVOLUME needs, in its words', async () => {
   expect(pane.find<HTMLSelectElement>('#reading-what').value).toBe('GASVOLUME');
   expect(pane.text('.result')).toBe('Still needed: temperature, pressure');
   expect(pane.text('label[for=reading-temperature]')).toBe('temperature / degC');
-  expect(pane.text('#reading-pressure-help')).toBe('of the room; one value, or one a reading; above 0');
+  expect(pane.text('#reading-pressure-help')).toBe(
+    'of the room; one value, or one a reading; unit kPa; above 0',
+  );
   expect(pane.find<HTMLInputElement>('#reading-wet').placeholder).toBe('0, a dry gas');
   expect(pane.text('#reading .caution')).toBe(functionNamed('GASVOLUME')!.caution);
   expect(pane.find<HTMLButtonElement>('#put-in button.main').disabled).toBe(true);

@@ -1,0 +1,15 @@
+/** What a parameter's own definition says of it, in one line. */
+import { boundsInWords, type Parameter } from '../../functions/parameters';
+
+/** @example parameterHelp(…) // 'of the gas; unit degC; above -273.15' */
+export function parameterHelp({ help, unit, bounds, optional, whenOmitted }: Parameter): string {
+  const hasNone = unit === '1' || unit === 'any' || unit === 'text';
+  return [
+    help,
+    hasNone ? '' : `unit ${unit}`,
+    bounds ? boundsInWords(bounds) : '',
+    optional ? `left empty: ${whenOmitted ?? 'not used'}` : '',
+  ]
+    .filter(Boolean)
+    .join('; ');
+}
