@@ -1,6 +1,7 @@
 /** What Excel must be told of each function before it is ever called: the content of functions.json. */
 import { boundsInWords, type Parameter } from './parameters';
 import type { CellFunction } from './define';
+import { pageName } from './help/functionPage';
 
 export interface FunctionsMetadata {
   /** Error cells inside a range reach the function as errors. Honoured only in metadata written by hand, as this is. */
@@ -50,7 +51,7 @@ function describeFunction(f: CellFunction, helpBase: string | undefined): Functi
     id: f.name, // never changes: workbooks refer to it
     name: f.name,
     description: f.summary,
-    ...(helpBase === undefined ? {} : { helpUrl: `${helpBase}/${f.name.toLowerCase()}` }),
+    ...(helpBase === undefined ? {} : { helpUrl: `${helpBase}/${pageName(f)}` }),
     parameters: Object.entries(f.parameters).map(([name, parameter]) => describeParameter(name, parameter)),
     result: { type: 'any', dimensionality: canSpill(f) ? 'matrix' : 'scalar' },
     ...optionsOf(f),

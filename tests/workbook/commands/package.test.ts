@@ -14,8 +14,22 @@ test('`npm run package` makes a folder with the bundle and a manifest that point
     },
   );
   expect(said).toContain('Flaskpace');
-  for (const file of ['manifest.xml', 'taskpane.html', 'addin.js', 'functions.json', 'assets/icon-32.png']) {
+  for (const file of [
+    'manifest.xml',
+    'taskpane.html',
+    'addin.js',
+    'functions.json',
+    'assets/icon-32.png',
+    'help/tangent.html',
+  ]) {
     expect(existsSync(path.join(out, file))).toBe(true);
   }
   expect(readFileSync(path.join(out, 'manifest.xml'), 'utf8')).not.toContain('localhost');
+  const { functions } = JSON.parse(readFileSync(path.join(out, 'functions.json'), 'utf8')) as {
+    functions: { helpUrl: string }[];
+  };
+  for (const { helpUrl } of functions) {
+    expect(helpUrl.startsWith('https://example.org/lab/help/')).toBe(true);
+    expect(existsSync(path.join(out, helpUrl.replace('https://example.org/lab/', '')))).toBe(true);
+  }
 }, 180_000);
