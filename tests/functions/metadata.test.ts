@@ -82,5 +82,5 @@ test('help tells unit, bounds and what leaving out means', () => {
 test('a help link is given only where help pages stand', () => {
   expect(JSON.stringify(metadata)).not.toContain('helpUrl');
   const [first] = functionsMetadata(catalogue, { helpBase: 'https://example.org/help' }).functions;
-  expect(first.helpUrl).toBe(`https://example.org/help/${first.name.toLowerCase()}`);
+  expect(first.helpUrl).toBe(`https://example.org/help/${first.name.toLowerCase()}.html`);
 });
