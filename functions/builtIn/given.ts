@@ -110,6 +110,13 @@ export class Given {
     return cell === undefined || typeof cell === 'number';
   }
 
+  /** Whether a certain word is written there, in the formula itself. */
+  isWord(name: string, word: string): boolean {
+    const argument = this.argument(name);
+    const cell = argument?.cells?.[0]?.[0];
+    return !argument?.area && typeof cell === 'string' && cell.trim().toLowerCase() === word;
+  }
+
   /** Readings with a unit of their own where they are text. @throws NotSaid where some are */
   quantityReadings(name: string): Readings {
     const texts = this.argument(name)

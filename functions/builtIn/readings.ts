@@ -59,6 +59,18 @@ export class Readings {
     return area ? fixedArea(area) : text;
   }
 
+  /** All but the first or the last, for steps from one to the next. */
+  without(end: 'first' | 'last'): string {
+    const { area } = this.argument;
+    if (!area || this.rows * this.columns < 2) throw new NotSaid('its steps cannot be named');
+    const [rows, columns] = this.rows > 1 ? [this.rows - 1, this.columns] : [this.rows, this.columns - 1];
+    const from =
+      end === 'first'
+        ? { row: area.row + this.rows - rows, column: area.column + this.columns - columns }
+        : {};
+    return fixedArea({ ...area, ...from, rows, columns });
+  }
+
   /** Whether single readings can be named. */
   get isPlaced(): boolean {
     return this.argument.area !== undefined || this.argument.cells !== undefined;

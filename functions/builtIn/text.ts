@@ -2,11 +2,25 @@
 import { areaName, columnName, quotedSheet, type Area } from '../address';
 import { CellError, type CellValue } from '../cell';
 
-/** `-3` in brackets, since a formula reads -3^2 as 9. @example numberText(1e-7) // '1E-7' */
-export const numberText = (value: number): string => {
-  const text = String(value).toUpperCase();
-  return value < 0 ? `(${text})` : text;
-};
+/**
+ * A number as a formula takes it: `-3` in brackets, since a formula reads -3^2 as 9, and small ones written
+ * out, since beside a comparison not every program reads 1E-9 as one number.
+ *
+ * @example numberText(-2.5e-7) // '(-0.00000025)'
+ */
+export function numberText(value: number): string {
+  const [digits, exponent] = String(Math.abs(value)).split('e');
+  const text = exponent === undefined ? digits : writtenOut(digits, Number(exponent));
+  return value < 0 ? `(-${text})` : text;
+}
+
+/** Beyond these a number is hard to read, and the exponent stays. */
+const smallest = -15;
+
+function writtenOut(digits: string, exponent: number): string {
+  if (exponent >= 0 || exponent < smallest) return `${digits}E${exponent > 0 ? '+' : ''}${exponent}`;
+  return `0.${'0'.repeat(-exponent - 1)}${digits.replace('.', '')}`;
+}
 
 export function valueText(value: CellValue): string {
   if (value === null) return '""';

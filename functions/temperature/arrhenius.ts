@@ -1,5 +1,6 @@
 import { fitArrhenius } from '../../src/temperature/arrhenius';
 import { detail } from '../commonParameters';
+import { sayArrhenius } from '../builtIn/temperature';
 import { defineFunction } from '../define';
 import { standardRow } from '../results';
 import {
@@ -23,4 +24,5 @@ export default defineFunction({
     const { activationEnergy, logFactor } = fitArrhenius(measuredOf(given));
     return given.detail ? [standardRow(activationEnergy), standardRow(logFactor)] : activationEnergy.value;
   },
+  builtIn: sayArrhenius,
 });

@@ -1,6 +1,7 @@
 import { fitArrhenius } from '../../src/temperature/arrhenius';
 import { predictCoefficient } from '../../src/temperature/predict';
 import { detail } from '../commonParameters';
+import { sayCoefficientAt } from '../builtIn/temperature';
 import { defineFunction } from '../define';
 import { standardRow } from '../results';
 import { shelfLifeCaution } from './cautions';
@@ -39,4 +40,5 @@ export default defineFunction({
     if (!given.detail) return predicted.value;
     return [[...standardRow(predicted), predicted.isExtrapolated ? 'extrapolated' : '']];
   },
+  builtIn: sayCoefficientAt,
 });

@@ -1,5 +1,6 @@
 import { fitEyring, gibbsEnergyAt } from '../../src/temperature/eyring';
 import { detail } from '../commonParameters';
+import { sayEyring } from '../builtIn/temperature';
 import { defineFunction } from '../define';
 import { standardRow } from '../results';
 import {
@@ -32,4 +33,5 @@ export default defineFunction({
     const estimates = [fit.enthalpy, fit.entropy, gibbsEnergyAt(fit, roomTemperature)];
     return given.detail ? estimates.map(standardRow) : [estimates.map(({ value }) => value)];
   },
+  builtIn: sayEyring,
 });

@@ -3,6 +3,7 @@ import { InvalidInput } from '../../src/errors';
 import { pairReadings, requireDistinctTimes } from '../../src/series/series';
 import { holdingTimes, meanKineticTemperature } from '../../src/temperature/meanKinetic';
 import type { Column } from '../column';
+import { sayMeanTemp } from '../builtIn/temperature';
 import { defineFunction } from '../define';
 import { column, optional } from '../parameters';
 import { quantity } from '../quantityParameters';
@@ -41,6 +42,7 @@ export default defineFunction({
     const history = times ? heldHistory(temperatures, times) : { temperatures: readingsOf(temperatures) };
     return meanKineticTemperature(history.temperatures, energy, history.durations) - celsiusZero;
   },
+  builtIn: sayMeanTemp,
 });
 
 interface History {

@@ -1,4 +1,5 @@
 import { timeToConversion } from '../../src/temperature/timeTo';
+import { sayTimeTo } from '../builtIn/temperature';
 import { defineFunction } from '../define';
 import { number, optional } from '../parameters';
 import { shelfLifeCaution } from './cautions';
@@ -29,4 +30,5 @@ export default defineFunction({
   reference: 'doi:10.1351/goldbook.H02716; doi:10.1351/goldbook.O04322',
   caution: shelfLifeCaution,
   run: (conversion) => timeToConversion(conversion),
+  builtIn: sayTimeTo,
 });
