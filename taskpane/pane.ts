@@ -31,8 +31,10 @@ export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: Pan
   root.replaceChildren(pane);
 
   let shown = store.state.notice;
+  let isMounted = true;
+  const redraw = onceSoon(() => isMounted && patch(pane, draw(store.state)));
   const stopWatching = store.watch((state) => {
-    patch(pane, draw(state));
+    redraw();
     if (state.notice && state.notice !== shown) notify?.(state.notice.words, state.notice.tone);
     shown = state.notice;
   });
@@ -42,10 +44,24 @@ export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: Pan
   refresh();
 
   return () => {
+    isMounted = false;
     stopWatching();
     stopListening();
     window.removeEventListener('focus', refresh);
     root.replaceChildren();
+  };
+}
+
+/** However many changes come at one go, what follows from them is done once, before anything is shown. */
+function onceSoon(act: () => void): () => void {
+  let isDue = false;
+  return () => {
+    if (isDue) return;
+    isDue = true;
+    queueMicrotask(() => {
+      isDue = false;
+      act();
+    });
   };
 }
 

@@ -1,5 +1,6 @@
 /** Looking at the sheet: which block is the run, and what stands in it now. */
 import { rises } from '../calls/order';
+import { columnName } from '../../functions/address';
 import type { RateChoice } from '../choices';
 import { withHeadingsAbove } from '../place';
 import type { RangeReading, SheetArea } from '../port';
@@ -42,14 +43,25 @@ export function chooseSignal({ store }: Pick<Bench, 'store'>, what: string): voi
   store.choose('reading', { what, inputs });
 }
 
-/** The readings may have been edited since. */
+/** The readings may have been edited since, the headings too, or another workbook been opened. */
 export async function reread({ store, port }: Bench): Promise<void> {
   const { table, run } = store.state;
   if (!table || !run) return;
-  const fresh = await port.read(table.area);
-  if (store.state.table?.area !== table.area || isSameCells(fresh, table)) return;
-  store.change({ table: { ...table, cells: fresh.cells }, survey: null });
+  const fresh = await port.read(table.area).catch(() => null);
+  if (store.state.table?.area !== table.area || (fresh && isSameCells(fresh, table))) return;
+  const found = fresh && findTable(fresh);
+  if (found === null || typeof found === 'string')
+    store.change({ table: null, run: null, survey: null, proposal: null });
+  else
+    store.change({ table: { ...table, cells: found.cells, columns: renewed(table, found) }, survey: null });
 }
+
+/** Columns stay what they are, under the headings that stand above them now. */
+const renewed = (table: Table, found: Table): Table['columns'] =>
+  table.columns.map((one) => {
+    const now = found.columns.find(({ column }) => column === one.column);
+    return now && now.heading.text !== `column ${columnName(one.column)}` ? now : one;
+  });
 
 const isSameCells = ({ cells }: RangeReading, table: Table): boolean =>
   cells.length === table.cells.length &&

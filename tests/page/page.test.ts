@@ -5,6 +5,7 @@
 import { longestStart, startBench, type BenchPage, type PageBench } from './bench';
 import { accessSuite } from './suites/access';
 import { filesSuite } from './suites/files';
+import { journeysSuite } from './suites/journeys';
 import { paneSuite } from './suites/pane';
 import { portSuite } from './suites/port';
 import { sheetSuite } from './suites/sheet';
@@ -22,6 +23,7 @@ afterAll(() => bench?.close());
 describe('the sheet', () => sheetSuite(() => sheet));
 describe('files', () => filesSuite(() => sheet));
 describe('the pane', () => paneSuite(() => sheet));
+describe('whole jobs in the pane', () => journeysSuite(() => sheet));
 describe('the port', () => portSuite(() => sheet));
 describe('everyone', () => accessSuite(() => sheet));
 describe('the start', () => startSuite(() => bench));

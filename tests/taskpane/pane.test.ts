@@ -266,3 +266,19 @@ test('a clean run is called so, quietly', async () => {
   expect(text('.findings .count')).toBe('nothing found in 11 pairs');
   expect(root.querySelector('.findings li')).toBeNull();
 });
+
+test('an edited heading gives its unit at once', async () => {
+  await open();
+  book.set('B1', 'V / L');
+  book.select('B1');
+  await settled();
+  expect(text('.result .unit')).toBe('L/s');
+});
+
+test('a run that is gone is forgotten, and what stands there now is looked at', async () => {
+  await open();
+  for (let row = 1; row <= 12; row++) ['A', 'B'].forEach((column) => book.set(`${column}${row}`, null));
+  book.select('F20');
+  await settled();
+  expect(text('#run .hint')).toMatch(/^Click a cell in your table/);
+});

@@ -64,7 +64,7 @@ export function accessSuite(sheet: () => BenchPage): void {
   });
 }
 
-async function violations(
+export async function violations(
   { page }: BenchPage,
   include: readonly string[],
   rules?: readonly string[],
