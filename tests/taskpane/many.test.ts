@@ -31,6 +31,7 @@ test('every run is a small plot, and all are picked', async () => {
 test('a survey is seen in the pane before it is written', async () => {
   await open();
   await pane.press('Survey these 3 runs here');
+  for (let wait = 0; wait < 200 && surveyRows().length === 0; wait++) await pane.settled();
   expect(surveyRows()).toEqual(['A110.0693110', 'A210.0346620', 'A310.0462115']);
   await pane.tick('#run-2');
   expect(pane.root.querySelector('.survey')).toBeNull();

@@ -108,7 +108,6 @@ export function journeysSuite(sheet: () => BenchPage): void {
       },
       [act, watch] as const,
     );
-    process.stderr.write(`${act[0]} ${shownAfter.toFixed(0)} ms\n`);
     expect(shownAfter).toBeLessThan(1000);
   });
 
