@@ -3,6 +3,7 @@ import { standardRowTexts } from './estimate';
 import type { Given } from './given';
 import { holdsOf } from './phrase';
 import { Pairs } from './pairs';
+import { RisingRun } from './risingRun';
 import { NotSaid, oneValue, type Said } from './said';
 import { where } from './text';
 
@@ -32,6 +33,30 @@ function interpolated(pairs: Pairs, at: string): string {
     `SUM(${pairs.each(`IF(${x}=${time},${y},0)`)})/SUM(${pairs.each(`IF(${x}=${time},1,0)`)})`;
   const share = `IF(${after}=${before},0,(${at}-${before})/(${after}-${before}))`;
   return `(${mean(before)}+(${mean(after)}-${mean(before)})*${share})`;
+}
+
+interface Slope {
+  /** 1 for each reading that counts. */
+  readonly inside: string;
+  readonly points: string;
+  readonly at: string;
+  readonly degree: number;
+  readonly nu: string;
+}
+
+/** The slope of a polynomial through some readings, as a rate: the five cells of the standard row. */
+function slopeRow(pairs: Pairs, { inside, points, at, degree, nu }: Slope): string[] {
+  const distance = pairs.each(`${pairs.x}-${at}`);
+  const terms = ['1', distance, ...Array.from({ length: degree - 1 }, (_, n) => `${distance}^${n + 2}`)];
+  const fit = pairs.fit({ y: pairs.each(pairs.y), terms, weight: inside });
+  const [k, size] = [degree + 1, pairs.size];
+  const freedom = `(${points}-${k})`;
+  return standardRowTexts({
+    value: `INDEX(${fit},1,${degree})/${nu}`,
+    // LINEST counts the readings outside among its degrees of freedom
+    uncertainty: `INDEX(${fit},2,${degree})*SQRT(${size - k}/${freedom})/ABS(${nu})`,
+    degreesOfFreedom: freedom,
+  });
 }
 
 /** A tangent in a window whose number of readings is given. */
@@ -67,20 +92,9 @@ class Tangent {
   row(at: string): string[] {
     const { pairs, points, degree, nu } = this;
     const inside = this.window(at);
-    const distance = pairs.each(`${pairs.x}-${at}`);
-    const terms = Array.from({ length: degree + 1 }, (_, n) =>
-      n < 2 ? ['1', distance][n] : `${distance}^${n}`,
+    return slopeRow(pairs, { inside, points, at, degree, nu }).map(
+      (cell) => `IF(SUM(${inside})=${points},${cell},#VALUE!)`,
     );
-    const fit = pairs.fit({ y: pairs.each(pairs.y), terms, weight: inside });
-    const [k, size] = [degree + 1, pairs.size];
-    const freedom = `(${points}-${k})`;
-    const cells = standardRowTexts({
-      value: `INDEX(${fit},1,${degree})/${nu}`,
-      // LINEST counts the readings outside the window among its degrees of freedom
-      uncertainty: `INDEX(${fit},2,${degree})*SQRT(${size - k}/${freedom})/ABS(${nu})`,
-      degreesOfFreedom: freedom,
-    });
-    return cells.map((cell) => `IF(SUM(${inside})=${points},${cell},#VALUE!)`);
   }
 
   /** 1 for each of the nearest readings; of two as far off on either side the earlier. */
@@ -119,4 +133,31 @@ export function sayAlong(given: Given): Said {
       return where([...tangent.holds, ...detail.holds], `IF(${isPair},${tangent.row(time)[part]},"")`);
     },
   };
+}
+
+/** A parabola, and two readings to judge its scatter by. */
+const fewest = 5;
+
+/** The initial rate of a run without gaps, in the order of its times. */
+export function sayStart(given: Given): Said {
+  const run = new RisingRun(given);
+  const { pairs } = run;
+  const [share, nu, detail] = [
+    given.number('share'),
+    pairs.stoichiometricNumber(given),
+    given.flag('detail'),
+  ];
+  const all = pairs.size;
+  const few = Math.max(1, Math.min(3, Math.floor(all / 5)));
+  const [first, last] = [run.value(0), run.stretch('values', all - few, all - 1)];
+  const limit = `${share.text}*ABS(AVERAGE(${last})-${first})`;
+  const beyond = `MIN(IF(ABS(${pairs.y}-${first})>${limit},${run.places},${all + 1}))-1`;
+  const points = `MIN(${all},MAX(${fewest},${beyond}))`;
+  const inside = `IF(${run.places}<=${points},1,0)`;
+  const cells = slopeRow(pairs, { inside, points, at: run.time(0), degree: 2, nu: nu.text });
+  const say = (column: number): string =>
+    where([...run.holds(true), ...holdsOf(share, nu), ...detail.holds], cells[column]);
+  if (all < 3) throw new NotSaid('fewer than three readings');
+  if (!detail.value) return oneValue(say(0));
+  return { cell: (_, column) => say(column) };
 }

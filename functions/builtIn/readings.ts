@@ -1,4 +1,5 @@
 /** A range of readings in a formula: one by one, or as a whole. */
+import type { Area } from '../address';
 import { numberInText } from '../column';
 import type { Bounds } from '../parameters';
 import { NotSaid, type Argument } from './said';
@@ -59,16 +60,32 @@ export class Readings {
     return area ? fixedArea(area) : text;
   }
 
+  /** Where they lie. @throws NotSaid for readings that lie nowhere */
+  requireArea(): Area {
+    const { area, text } = this.argument;
+    if (!area) throw new NotSaid(`${text} is written out in the formula`);
+    return area;
+  }
+
+  /** Of a column or row: from one place up to another, both counted from 0. */
+  stretch(from: number, to: number): string {
+    const area = this.requireArea();
+    return this.rows > 1
+      ? fixedArea({ ...area, row: area.row + from, rows: to - from + 1 })
+      : fixedArea({ ...area, column: area.column + from, columns: to - from + 1 });
+  }
+
+  /** One column of a block. */
+  column(n: number): string {
+    const area = this.requireArea();
+    return fixedArea({ ...area, column: area.column + n, columns: 1 });
+  }
+
   /** All but the first or the last, for steps from one to the next. */
   without(end: 'first' | 'last'): string {
-    const { area } = this.argument;
-    if (!area || this.rows * this.columns < 2) throw new NotSaid('its steps cannot be named');
-    const [rows, columns] = this.rows > 1 ? [this.rows - 1, this.columns] : [this.rows, this.columns - 1];
-    const from =
-      end === 'first'
-        ? { row: area.row + this.rows - rows, column: area.column + this.columns - columns }
-        : {};
-    return fixedArea({ ...area, ...from, rows, columns });
+    const count = this.rows * this.columns;
+    if (count < 2) throw new NotSaid('one reading has no steps');
+    return end === 'first' ? this.stretch(1, count - 1) : this.stretch(0, count - 2);
   }
 
   /** Whether single readings can be named. */

@@ -3,6 +3,7 @@ import type { Estimate } from '../../src/estimate';
 import { block, columnsBeside } from '../block';
 import type { CellValue } from '../cell';
 import { detail } from '../commonParameters';
+import { sayExponents } from '../builtIn/exponents';
 import { defineFunction } from '../define';
 import { column } from '../parameters';
 import { standardRow } from '../results';
@@ -39,6 +40,7 @@ export default defineFunction({
     if (!detail) return [[...found.orders.map(({ value }) => value), found.rateCoefficient.value]];
     return [...found.orders.map(orderRow), [...standardRow(found.rateCoefficient), '']];
   },
+  builtIn: sayExponents,
 });
 
 const orderRow = (order: Estimate): CellValue[] => [...standardRow(order), nearestSimpleOrder(order) ?? ''];

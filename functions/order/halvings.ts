@@ -1,6 +1,7 @@
 import { InvalidInput } from '../../src/errors';
 import { successiveHalfLives } from '../../src/order/halvings';
 import { endpoint } from '../commonParameters';
+import { sayHalvings } from '../builtIn/course';
 import { defineFunction } from '../define';
 import { seriesOf } from '../run';
 import { runParameters } from './lawParameters';
@@ -21,4 +22,5 @@ export default defineFunction({
     }
     return successiveHalfLives(seriesOf(times, values), endpoint).map((halfLife) => [halfLife]);
   },
+  builtIn: sayHalvings,
 });

@@ -1,4 +1,5 @@
 import { normalisedTimes } from '../../src/order/normalisedTime';
+import { sayNormalTime } from '../builtIn/course';
 import { defineFunction } from '../define';
 import { column, number } from '../parameters';
 import { besideTimes, seriesOf } from '../run';
@@ -25,4 +26,5 @@ export default defineFunction({
       Array.from(normalisedTimes(series, exponent), (time) => [time]),
     );
   },
+  builtIn: sayNormalTime,
 });

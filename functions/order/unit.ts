@@ -1,4 +1,5 @@
 import { rateCoefficientUnit } from '../../src/order/unit';
+import { sayUnit } from '../builtIn/unit';
 import { defineFunction } from '../define';
 import { number, optional, text } from '../parameters';
 
@@ -17,4 +18,5 @@ export default defineFunction({
   example: { formula: '=PACE.UNIT(2)', equals: 'L mol⁻¹ s⁻¹' },
   reference: 'doi:10.1351/goldbook.O04322',
   run: ({ order, concentrationunit, timeunit }) => rateCoefficientUnit(order, concentrationunit, timeunit),
+  builtIn: sayUnit,
 });

@@ -1,5 +1,6 @@
 import { startRateOf } from '../../src/rate/start';
 import { detail, stoichiometricNumber } from '../commonParameters';
+import { sayStart } from '../builtIn/rate';
 import { defineFunction } from '../define';
 import { column, number, optional } from '../parameters';
 import { estimateResult } from '../results';
@@ -30,4 +31,5 @@ export default defineFunction({
       startRateOf(seriesOf(times, values), { share, stoichiometricNumber: coefficient }),
       detail,
     ),
+  builtIn: sayStart,
 });

@@ -2,6 +2,7 @@ import { InvalidInput } from '../../src/errors';
 import { ionFromPH, type AcidityIon } from '../../src/signal/acidity';
 import { highestIonicStrength } from '../../src/signal/activity';
 import { convertColumn } from '../column';
+import { sayAcidity } from '../builtIn/acidity';
 import { defineFunction } from '../define';
 import { optional, readings, text } from '../parameters';
 import { quantity } from '../quantityParameters';
@@ -40,6 +41,7 @@ export default defineFunction({
     const ion = ionNamed(species);
     return convertColumn(pH, (value) => ionFromPH(value, ion, { ionicStrength: ionicstrength, temperature }));
   },
+  builtIn: sayAcidity,
 });
 
 function ionNamed(species: string): AcidityIon {

@@ -4,6 +4,7 @@ import { timeFromNumber, timeFromText, type TimeReading } from '../../src/signal
 import { convertUnit } from '../../src/units';
 import { CellError, shownCell, type CellRange, type CellValue } from '../cell';
 import { inRows, placeInWords } from '../column';
+import { sayClock } from '../builtIn/clock';
 import { defineFunction } from '../define';
 import { isLeftOut, optional, required, single, text, type Parameter } from '../parameters';
 
@@ -92,4 +93,5 @@ export default defineFunction({
     });
     return inRows(answers, times.rows, times.columns);
   },
+  builtIn: sayClock,
 });

@@ -1,6 +1,7 @@
 import { calibrationLine, concentrationFromLine } from '../../src/signal/calibration';
 import { convertColumn, convertToRows, requireLine } from '../column';
 import { detail, uncertainties } from '../commonParameters';
+import { sayStandards } from '../builtIn/standards';
 import { defineFunction } from '../define';
 import { column, flag, number, optional, readings } from '../parameters';
 import { standardRow } from '../results';
@@ -44,4 +45,5 @@ export default defineFunction({
       standardRow(concentrationFromLine(line, reading, replicates)),
     );
   },
+  builtIn: sayStandards,
 });

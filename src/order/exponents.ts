@@ -91,7 +91,7 @@ function requireVaried(concentrations: readonly Float64Array[], { factor }: Line
 }
 
 /** Orders that reactions commonly have. */
-const commonOrders = [-2, -1, -0.5, 0, 0.5, 1, 1.5, 2, 3] as const;
+export const commonOrders = [-2, -1, -0.5, 0, 0.5, 1, 1.5, 2, 3] as const;
 
 /**
  * The simple order nearest to an estimate, where its 95 % limits hold it; `null` otherwise.

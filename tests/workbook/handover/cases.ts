@@ -355,4 +355,117 @@ export const cases: Readonly<Record<string, Case>> = {
     changed: { A1: 1 },
     then: 'error',
   },
+  Acidity: {
+    typed: {
+      ...column('A1', [3, 2.5, null, 11]),
+      B1: '0.1 mol/L',
+      C1: '=PACE.ACIDITY(A1:A4)',
+      D1: '=PACE.ACIDITY(A1:A4,B1,25,"OH")',
+      E1: '=PACE.ACIDITY(A1:A4,,"30 degC","OH")',
+    },
+    becomes: 'live',
+    changed: { A3: 4.2, B1: '0.2 mol/L' },
+  },
+  'Acidity, out of bounds': {
+    typed: { ...column('A1', [3, 2.5]), C1: '=PACE.ACIDITY(A1:A2)' },
+    becomes: 'live',
+    changed: { A2: 17 },
+    then: 'error',
+  },
+  Unit: {
+    typed: { A1: 2, A2: 'mmol/L', C1: '=PACE.UNIT(A1,A2,"min")', C2: '=PACE.UNIT(1.5)' },
+    becomes: 'live',
+    changed: { A1: 1 },
+  },
+  Standards: {
+    typed: {
+      ...column('A1', [0, 2, 4, null, 8]),
+      ...column('B1', [0.11, 0.49, 0.92, 1.3, 1.69]),
+      ...column('C1', [0.3, 0.7, 'n/a', 1.75]),
+      E1: '=PACE.STANDARDS(A1:A5,B1:B5,C1:C4)',
+      F1: '=PACE.STANDARDS(A1:A5,B1:B5,C1:C4,,,3,TRUE)',
+      K1: '=PACE.STANDARDS(A1:A5,B1:B5,C1:C4,,TRUE,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { A4: 6, B2: 0.5, C2: 0.8 },
+  },
+  'Standards, a reading beyond them': {
+    typed: {
+      ...column('A1', [0, 2, 4]),
+      ...column('B1', [0.1, 0.5, 0.9]),
+      C1: 0.7,
+      E1: '=PACE.STANDARDS(A1:A3,B1:B3,C1)',
+    },
+    becomes: 'live',
+    changed: { C1: 1.2 },
+    then: 'error',
+  },
+  'Initial rate': {
+    typed: {
+      ...run,
+      D2: '=PACE.START(A2:A9,B2:B9)',
+      D3: '=PACE.START(A2:A9,B2:B9,0.9,,TRUE)',
+      D4: '=PACE.START(A2:A9,B2:B9,1,2)',
+    },
+    becomes: 'live',
+    changed: { B3: 15, A9: 250 },
+  },
+  'Normalised time': {
+    typed: {
+      ...run,
+      E1: 1.5,
+      D2: '=PACE.NORMALTIME(A2:A9,B2:B9,E1)',
+      F2: '=PACE.NORMALTIME(A2:A9,B2:B9,0)',
+    },
+    becomes: 'live',
+    changed: { B5: 36, E1: 0.5 },
+  },
+  'Normalised time that cannot be': {
+    typed: { ...run, B2: 1, E1: 1.5, D2: '=PACE.NORMALTIME(A2:A9,B2:B9,E1)' },
+    becomes: 'live',
+    changed: { B3: -1 },
+    then: 'error',
+  },
+  'Half lives read off': {
+    typed: {
+      ...column('A1', [0, 10, 20, 32, 45]),
+      ...column('B1', [8, 4.1, 2.2, 1.1, 0.4]),
+      D1: '=PACE.HALVINGS(A1:A5,B1:B5)',
+      E1: '=PACE.HALVINGS(A1:A5,B1:B5,0.3)',
+    },
+    becomes: 'live',
+    changed: { B2: 4.3, A5: 44 },
+  },
+  'Clock times': {
+    typed: {
+      ...column('A1', [0.9985, 0.9999, 0.0012, 0.004]),
+      C1: '=PACE.CLOCK(A1:A4,"min","first")',
+      D1: '=PACE.CLOCK(A1:A4)',
+    },
+    becomes: 'live',
+    changed: { A3: 0.0015, A4: 0.0051 },
+  },
+  Exponents: {
+    typed: {
+      ...column('A1', [0.003, 0.0047, 0.0067, null, 0.011]),
+      ...column('B1', [0.1, 0.1, 0.15, 0.2, 0.2]),
+      ...column('C1', [0.1, 0.15, 0.1, 0.1, 0.08]),
+      E1: '=PACE.EXPONENTS(A1:A5,B1:C5)',
+      E3: '=PACE.EXPONENTS(A1:A5,B1:C5,TRUE)',
+      E8: '=PACE.EXPONENTS(A1:A5,B1:B5,TRUE)',
+    },
+    becomes: 'live',
+    changed: { A2: 0.0049, A4: 0.012 },
+  },
+  'Exponents, reactants always changed together': {
+    typed: {
+      ...column('A1', [0.003, 0.0047, 0.0067, 0.011]),
+      ...column('B1', [0.1, 0.1, 0.2, 0.2]),
+      ...column('C1', [0.1, 0.15, 0.2, 0.3]),
+      E1: '=PACE.EXPONENTS(A1:A4,B1:C4)',
+    },
+    becomes: 'live',
+    changed: { C1: 0.2, C2: 0.2, C3: 0.4, C4: 0.4 },
+    then: 'error',
+  },
 };
