@@ -1,10 +1,11 @@
 /** The pane over a workbook in memory, and the hands of a person. */
 import { mountPane } from '../../taskpane/pane';
+import type { WorkbookPort } from '../../taskpane/port';
 import { memoryWorkbook, type MemoryWorkbook, type Sheets } from './memoryPort';
 
-export interface PaneBench {
+/** A person at the pane. */
+export interface PaneHands {
   readonly root: HTMLElement;
-  readonly book: MemoryWorkbook;
   find<E extends HTMLElement>(selector: string): E;
   text(selector: string): string;
   type(selector: string, typed: string): Promise<void>;
@@ -16,14 +17,22 @@ export interface PaneBench {
   close(): void;
 }
 
+export interface PaneBench extends PaneHands {
+  readonly book: MemoryWorkbook;
+}
+
 const settled = (): Promise<void> => new Promise((resolve) => setTimeout(resolve, 5));
 
 export async function openPane(sheets: Sheets, at: string): Promise<PaneBench> {
-  const root = document.createElement('main');
-  document.body.append(root);
   const book = memoryWorkbook(sheets);
   book.select(at);
-  const unmount = mountPane(root, book.port);
+  return { book, ...(await openPaneOver(book.port)) };
+}
+
+export async function openPaneOver(port: WorkbookPort): Promise<PaneHands> {
+  const root = document.createElement('main');
+  document.body.append(root);
+  const unmount = mountPane(root, port);
   await settled();
 
   const find = <E extends HTMLElement>(selector: string): E => {
@@ -37,7 +46,6 @@ export async function openPane(sheets: Sheets, at: string): Promise<PaneBench> {
   };
   return {
     root,
-    book,
     find,
     text: (selector) => find(selector).textContent ?? '',
     async type(selector, typed) {
