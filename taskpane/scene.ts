@@ -8,6 +8,7 @@ import {
   firstChoices,
   type EndpointKind,
   type OrderChoice,
+  type RateChoice,
   type ReadingChoice,
   type TemperatureChoice,
 } from './choices';
@@ -53,7 +54,9 @@ const stampsOf = (table: Table, run: Run): Stamp[] =>
 /** One for each pane: what rests on unchanged parts of the state is not calculated again. */
 export function createScenes(): (state: State) => Scene {
   const check = remembered(checkRun);
-  const rate = remembered(rateAnswer);
+  const rate = remembered((table: Table, run: Run, choice: RateChoice, pointedAt: State['pointedAt']) =>
+    rateAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
+  );
   const reading = remembered((table: Table, run: Run, choice: ReadingChoice, pointedAt: State['pointedAt']) =>
     readingAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
   );
@@ -84,7 +87,7 @@ export function createScenes(): (state: State) => Scene {
         return table && run && reading(table, run, state.reading, pointedAt);
       },
       get rate() {
-        return table && run && rate(table, run, state.rate);
+        return table && run && rate(table, run, state.rate, pointedAt);
       },
       get order() {
         return table && run && order(table, run, state.order, pointedAt);

@@ -7,14 +7,14 @@ import type { State } from '../store';
 import type { Bench } from './bench';
 
 /** What the fields of all steps that take cells as well as numbers point at. */
-function namesIn({ order, reading, temperature }: State, sheet: string): readonly string[] {
+function namesIn({ rate, order, reading, temperature }: State, sheet: string): readonly string[] {
   const parameters = functionOf(reading.what)?.parameters ?? {};
   const inputs = Object.entries(reading.inputs).map(([name, typed]) =>
     pointedName(typed, sheet, parameters[name]?.kind === 'text'),
   );
-  return [pointedName(order.endpoint, sheet), pointedName(temperature.at, sheet), ...inputs].flatMap(
-    (name) => name ?? [],
-  );
+  const { kind: _, ...typed } = rate;
+  const others = [...Object.values(typed), order.endpoint, temperature.at];
+  return [...others.map((one) => pointedName(one, sheet)), ...inputs].flatMap((name) => name ?? []);
 }
 
 /** Nothing is stored where nothing has changed, so that nothing is calculated again. */

@@ -2,7 +2,7 @@
 import { CellError, isRange, type CellResult } from '../../functions/cell';
 import type { RateChoice, RateKind } from '../choices';
 import type { Run, Table } from '../runs';
-import { columnArgument, leftOut, truth, typedArgument, type Argument } from './argument';
+import { argumentOf, columnArgument, leftOut, truth, type Argument, type Pointing } from './argument';
 import { ask, formulaText, refusalOf } from './call';
 import { readEstimate, type Estimate } from './estimate';
 
@@ -19,8 +19,14 @@ const fields: Readonly<Record<RateKind, readonly Exclude<keyof RateChoice, 'kind
   column: ['points', 'degree', 'coefficient'],
 };
 
-function argumentsFor(table: Table, run: Run, rate: RateChoice, detail: boolean): Argument[] {
-  const typed = fields[rate.kind].map((field) => typedArgument(rate[field]));
+function argumentsFor(
+  table: Table,
+  run: Run,
+  rate: RateChoice,
+  pointing: Pointing,
+  detail: boolean,
+): Argument[] {
+  const typed = fields[rate.kind].map((field) => argumentOf(rate[field], pointing));
   return [
     columnArgument(table, run, run.timeColumn),
     columnArgument(table, run, run.readingColumn),
@@ -30,8 +36,22 @@ function argumentsFor(table: Table, run: Run, rate: RateChoice, detail: boolean)
 }
 
 /** As it is typed into a cell: `=PACE.TANGENT('Gas run'!A3:A20,'Gas run'!C3:C20,30)`. */
-export const rateFormula = (table: Table, run: Run, rate: RateChoice, detail: boolean): string =>
-  formulaText(functionFor[rate.kind], argumentsFor(table, run, rate, detail));
+export const rateFormula = (
+  table: Table,
+  run: Run,
+  rate: RateChoice,
+  pointing: Pointing,
+  detail: boolean,
+): string => formulaText(functionFor[rate.kind], argumentsFor(table, run, rate, pointing, detail));
+
+/** The same choice with what stands in the cells pointed at, for drawing. */
+export function resolved(rate: RateChoice, pointing: Pointing): RateChoice {
+  const typed = fields[rate.kind].map((field) => {
+    const { value } = argumentOf(rate[field], pointing);
+    return [field, value === undefined || value === null ? '' : String(value)];
+  });
+  return { ...rate, ...Object.fromEntries(typed) };
+}
 
 export type RateAnswer =
   /** `field` is the argument the words speak of, where they name one that can be typed. */
@@ -40,8 +60,8 @@ export type RateAnswer =
   /** Row by row beside the readings; `null` where a row has no rate. */
   | { readonly kind: 'column'; readonly rates: readonly (Estimate | null)[] };
 
-export function rateAnswer(table: Table, run: Run, rate: RateChoice): RateAnswer {
-  const result: CellResult = ask(functionFor[rate.kind], argumentsFor(table, run, rate, true));
+export function rateAnswer(table: Table, run: Run, rate: RateChoice, pointing: Pointing): RateAnswer {
+  const result: CellResult = ask(functionFor[rate.kind], argumentsFor(table, run, rate, pointing, true));
   if (result instanceof CellError) return refusal(result, rate.kind);
   const rows = isRange(result) ? result : [[result]];
   if (rate.kind === 'column') return { kind: 'column', rates: rows.map(readEstimate) };

@@ -16,5 +16,5 @@ export function currentInsertion(state: State): Insertion | null {
   if (task === 'many') return manyInsertion(table, run, state);
   if (task === 'temperature') return temperatureInsertion(table, run, state);
   if (task === 'reading') return readingInsertion(table, run, state);
-  return rateInsertion(table, run, state.rate, put.withDetail);
+  return rateInsertion(table, run, state, put.withDetail);
 }

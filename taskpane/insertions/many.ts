@@ -22,7 +22,7 @@ export function manyInsertion(table: Table, run: Run, state: State): Insertion |
 
 function insertionOf(table: Table, run: Run, state: State): Insertion {
   const { withDetail } = state.put;
-  if (state.many.answer === 'rate') return rateInsertion(table, run, state.rate, withDetail);
+  if (state.many.answer === 'rate') return rateInsertion(table, run, state, withDetail);
   // a table of orders a run would be a sheet of its own
   const answer = state.order.answer === 'orders' ? 'coefficient' : state.order.answer;
   return orderInsertion(table, run, { ...state, order: { ...state.order, answer } }, withDetail);

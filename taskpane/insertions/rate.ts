@@ -2,22 +2,30 @@ import { rateFormula } from '../calls/rate';
 import type { RateChoice } from '../choices';
 import { rateUnit } from '../headers';
 import { columnOf, headingOf, type Run, type Table } from '../runs';
+import type { State } from '../store';
 import { detailColumns, headingsFor, oneFormula, type Insertion } from './insertion';
 
 /** `rate at 30 s`: for headings and messages. */
 export function rateName(table: Table, run: Run, rate: RateChoice): string {
   const { unit } = headingOf(table, run.timeColumn);
-  const withUnit = (typed: string): string => [typed.trim(), unit].filter(Boolean).join(' ');
+  // of a cell it is the place that is known, and the number may change
+  const withUnit = (typed: string): string =>
+    [typed.trim(), /[A-Z]/i.test(typed) ? '' : unit].filter(Boolean).join(' ');
   if (rate.kind === 'average') return `average rate ${rate.from.trim()} to ${withUnit(rate.to)}`;
   return rate.kind === 'tangent' ? `rate at ${withUnit(rate.time)}` : 'rate';
 }
 
-export function rateInsertion(table: Table, run: Run, rate: RateChoice, withDetail: boolean): Insertion {
+export function rateInsertion(
+  table: Table,
+  run: Run,
+  { rate, pointedAt }: Pick<State, 'rate' | 'pointedAt'>,
+  withDetail: boolean,
+): Insertion {
   const name = rateName(table, run, rate);
   const unit = rateUnit(headingOf(table, run.readingColumn), headingOf(table, run.timeColumn));
   return {
     name,
-    ...oneFormula(rateFormula(table, run, rate, withDetail), {
+    ...oneFormula(rateFormula(table, run, rate, { sheet: table.sheet, pointedAt }, withDetail), {
       rows: rate.kind === 'column' ? run.lastRow - run.firstRow + 1 : 1,
       columns: detailColumns(withDetail),
     }),

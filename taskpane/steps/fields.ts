@@ -12,6 +12,8 @@ export interface TextField {
   readonly problem?: string | null;
   readonly numeric?: boolean;
   readonly onInput: (value: string) => void;
+  /** Takes the active cell in place of what is typed. */
+  readonly onPoint?: () => void;
 }
 
 export function textField({
@@ -23,25 +25,46 @@ export function textField({
   problem,
   numeric = true,
   onInput,
+  onPoint,
 }: TextField): HTMLElement {
   const problemId = `${id}-problem`;
+  const input = h('input', {
+    id,
+    type: 'text',
+    inputmode: numeric ? 'decimal' : 'text',
+    autocomplete: 'off',
+    spellcheck: 'false',
+    value,
+    placeholder: whenEmpty,
+    'aria-invalid': problem ? 'true' : null,
+    'aria-describedby': problem ? problemId : null,
+    oninput: (event) => onInput((event.target as HTMLInputElement).value),
+  });
   return h(
     'div',
     { className: 'field' },
     h('label', { for: id }, unit ? `${label} / ${unit}` : label),
-    h('input', {
-      id,
-      type: 'text',
-      inputmode: numeric ? 'decimal' : 'text',
-      autocomplete: 'off',
-      spellcheck: 'false',
-      value,
-      placeholder: whenEmpty,
-      'aria-invalid': problem ? 'true' : null,
-      'aria-describedby': problem ? problemId : null,
-      oninput: (event) => onInput((event.target as HTMLInputElement).value),
-    }),
+    onPoint ? h('div', { className: 'beside' }, input, pointButton(label, onPoint)) : input,
     problem && h('p', { id: problemId, className: 'problem', role: 'alert' }, problem),
+  );
+}
+
+/** @param dimension cells are taken for a range, the active cell for one value */
+export function pointButton(
+  name: string,
+  onPoint: () => void,
+  dimension: 'scalar' | 'matrix' = 'scalar',
+): HTMLElement {
+  const isMany = dimension === 'matrix';
+  return h(
+    'button',
+    {
+      type: 'button',
+      className: 'small',
+      'aria-label': `${isMany ? 'Cells: take the selected ones' : 'Cell: take the active one'} for ${name}`,
+      onclick: onPoint,
+    },
+    isMany ? 'Cells' : 'Cell',
   );
 }
 

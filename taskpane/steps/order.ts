@@ -10,7 +10,7 @@ import { plainPlot } from '../plots/runPlot';
 import { headingOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
 import { estimateLines, formulaLine, result } from './estimate';
-import { button, choiceOfOne, selectField, step, textField } from './fields';
+import { choiceOfOne, selectField, step, textField } from './fields';
 
 const orders: readonly (readonly [string, string])[] = [
   ['0', '0'],
@@ -93,8 +93,8 @@ function endpointFields(order: OrderChoice, { coefficient }: OrderAnswer, action
             whenEmpty: '0',
             problem,
             onInput: (typed) => void set(typed),
+            onPoint: () => void actions.pointAt('cell', set),
           }),
-          button('Take the active cell', () => void actions.pointAt('cell', set), 'small'),
         ]
       : []),
   ];

@@ -3,7 +3,7 @@ import type { Parameter } from '../../functions/parameters';
 import { isUnit } from '../../src/units';
 import type { Actions } from '../actions';
 import { h } from '../h';
-import { checkField } from './fields';
+import { checkField, pointButton } from './fields';
 import { parameterHelp } from './parameterHelp';
 
 export interface PointedField {
@@ -28,7 +28,6 @@ export function pointedField(
       checkField(id, `${name}: ${parameter.help}`, value === 'TRUE', (on) => void change(on ? 'TRUE' : '')),
     );
   const [helpId, problemId] = [`${id}-help`, `${id}-problem`];
-  const isMany = dimension === 'matrix';
   return h(
     'div',
     { className: 'field' },
@@ -48,15 +47,10 @@ export function pointedField(
         'aria-describedby': problem ? `${helpId} ${problemId}` : helpId,
         oninput: (event) => void change((event.target as HTMLInputElement).value),
       }),
-      h(
-        'button',
-        {
-          type: 'button',
-          className: 'small',
-          'aria-label': `${isMany ? 'Cells: take the selected ones' : 'Cell: take the active one'} for ${name}`,
-          onclick: () => void actions.pointAt(isMany ? 'selection' : 'cell', change),
-        },
-        isMany ? 'Cells' : 'Cell',
+      pointButton(
+        name,
+        () => void actions.pointAt(dimension === 'matrix' ? 'selection' : 'cell', change),
+        dimension,
       ),
     ),
     h('p', { id: helpId, className: 'hint' }, parameterHelp(parameter)),

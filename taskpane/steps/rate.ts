@@ -1,7 +1,7 @@
 /** Which rate, what it is, and the formula that gives it. */
 import type { Actions } from '../actions';
 import type { Estimate } from '../calls/estimate';
-import { rateFormula, type RateAnswer } from '../calls/rate';
+import { rateFormula, resolved, type RateAnswer } from '../calls/rate';
 import type { RateChoice, RateKind } from '../choices';
 import { plainNumber, valueWithUncertainty } from '../format';
 import { h, type Child } from '../h';
@@ -21,20 +21,22 @@ const kinds: readonly (readonly [RateKind, string])[] = [
 ];
 
 export function rateStep(
-  { state: { table, run, rate, put }, rate: answer }: Scene,
+  { state: { table, run, rate, put, pointedAt }, rate: answer }: Scene,
   actions: Actions,
 ): HTMLElement {
   if (!table || !run || !answer)
     return step('rate', 'Rate', h('p', { className: 'hint' }, 'Choose a run first.'));
   const unit = rateUnit(headingOf(table, run.readingColumn), headingOf(table, run.timeColumn));
+  const pointing = { sheet: table.sheet, pointedAt };
   return step(
     'rate',
     'Rate',
     choiceOfOne('kind', 'Which rate', kinds, rate.kind, (kind) => void actions.changeRate({ kind })),
     fieldsFor(table, run, rate, answer, actions),
-    ...drawing(table, run, rate, answer, unit),
+    ...drawing(table, run, resolved(rate, pointing), answer, unit),
     result(...inWords(table, run, rate, answer, unit)),
-    formulaLine(rateFormula(table, run, rate, put.withDetail), actions),
+    h('p', { className: 'hint' }, scaleCaution),
+    formulaLine(rateFormula(table, run, rate, pointing, put.withDetail), actions),
   );
 }
 
@@ -57,7 +59,9 @@ function fieldsFor(
       label,
       value: rate[name],
       problem: wrong?.field === name ? wrong.words : null,
+      numeric: false,
       onInput: (typed) => void actions.changeRate({ [name]: typed }),
+      onPoint: () => void actions.pointAt('cell', (cell) => actions.changeRate({ [name]: cell })),
       ...more,
     });
   const window = [
@@ -85,6 +89,10 @@ function fieldsFor(
     ),
   );
 }
+
+/** Heat goes with volume, cooling with surface. */
+const scaleCaution =
+  'A rate read on a few millilitres says nothing about how heat gets out of a large vessel.';
 
 const howItIsDone: Readonly<Record<RateKind, string>> = {
   average:

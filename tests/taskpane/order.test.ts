@@ -61,7 +61,7 @@ test('the reading at the end: a cell counts as much as a number', async () => {
   expect(pane.text('.result .value')).toBe('0.06931 min⁻¹');
   pane.book.select('D1');
   await pane.settled();
-  await pane.press('Take the active cell');
+  await pane.press('Cell');
   expect(pane.find<HTMLInputElement>('#endpoint').value).toBe('Run!D1');
   expect(pane.text('.result .value')).toBe('0.06931 min⁻¹');
   expect(pane.text('#formula')).toBe('=PACE.COEFFICIENT(Run!A2:A7,Run!B2:B7,1,Run!D1)');

@@ -282,3 +282,18 @@ test('a run that is gone is forgotten, and what stands there now is looked at', 
   await settled();
   expect(text('#run .hint')).toMatch(/^Click a cell in your table/);
 });
+
+test('a time can be pointed at: the formula names the cell, the drawing and the value follow it', async () => {
+  await open({ 'Gas run': gasRun.map((row, r) => [...row, null, r === 0 ? 30 : null]) });
+  book.select('D1');
+  await settled();
+  find('#rate-time').parentElement!.querySelector('button')!.click();
+  await settled();
+  expect(text('#formula')).toBe("=PACE.TANGENT('Gas run'!A2:A12,'Gas run'!B2:B12,'Gas run'!D1)");
+  expect(text('.result .value')).toMatch(/^2\.4/);
+  expect(find('.plot .rate-line').getAttribute('d')).toMatch(/L/);
+  book.set('D1', 80);
+  book.select('D1');
+  await settled();
+  expect(text('.result .value')).toMatch(/^1\.4/);
+});
