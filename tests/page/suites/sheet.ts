@@ -43,6 +43,17 @@ export function sheetSuite(sheet: () => BenchPage): void {
     expect(sheet().page.workers()).toHaveLength(1);
   });
 
+  test('Enter puts in what was typed, whatever the list of names suggests', async () => {
+    await sheet().select("'Gas run'!Q1");
+    await sheet().page.keyboard.type('=PACE.EVENT');
+    await sheet().page.getByText('PACE.EVENT', { exact: true }).first().waitFor();
+    await sheet().page.keyboard.press('Backspace'); // PACE.EVEN: still suggested, and no name
+    await sheet().page.keyboard.press('Enter');
+    const shown = async (): Promise<unknown> => (await sheet().cells("'Gas run'!Q1"))[0][0];
+    await waitUntil(async () => (await shown()) !== null);
+    expect(await shown()).toMatchObject({ code: '#NAME?' });
+  });
+
   test('a spill can be referred to by its first cell', async () => {
     await sheet().type("'Gas run'!Q1", '=PACE.EVENT({20;25;40})');
     await sheet().type("'Gas run'!R1", '=SUM(Q1#)');

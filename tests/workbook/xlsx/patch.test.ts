@@ -193,7 +193,9 @@ describe('spills', () => {
       `<c r="A1" cm="1" t="e">${dynamic('A1', 'SEQUENCE(3)')}<v>#VALUE!</v></c>`,
     );
     expect(rowsOf(result.bytes)).toContain('<c r="A2"><v>5</v></c>');
-    expect(result.errors).toEqual([{ cell: 'Run!A1', error: expect.objectContaining({ code: '#SPILL!' }) }]);
+    expect(result.errors).toEqual([
+      { sheet: 'Run', row: 0, column: 0, error: expect.objectContaining({ code: '#SPILL!' }) },
+    ]);
   });
 
   test('make room for one another: one leaves a cell, another takes it', async () => {

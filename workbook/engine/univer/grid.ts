@@ -14,7 +14,12 @@ import type { LongWork } from '../../../functions/longWork';
 import type { BookModel } from '../engine';
 import type { Grid, GridArea, Stop } from '../grid';
 import { nameControls } from './grid/accessibleNames';
-import { acceptSpillReferences, copySpilledValues, showOwnErrorWords } from './grid/amendments';
+import {
+  acceptSpillReferences,
+  copySpilledValues,
+  enterTakesNoSuggestion,
+  showOwnErrorWords,
+} from './grid/amendments';
 import { bookOf, calculatedOf } from './grid/book';
 import { bootGrid } from './grid/boot';
 import { showFittingNumbers } from './grid/fittingNumbers';
@@ -69,6 +74,7 @@ export function createGrid(
   });
   copySpilledValues(injector, () => sheets.workbook);
   acceptSpillReferences(injector);
+  enterTakesNoSuggestion(injector);
   showFittingNumbers(injector);
   const stopNaming = nameControls(container);
 

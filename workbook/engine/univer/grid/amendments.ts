@@ -1,8 +1,15 @@
 /** What the grid (0.25.1) does not do by itself, and a person expects. */
-import { ICommandService, type Injector, type IDisposable, type Workbook } from '@univerjs/core';
+import {
+  ICommandService,
+  toDisposable,
+  type Injector,
+  type IDisposable,
+  type Workbook,
+} from '@univerjs/core';
 import { FormulaDataModel } from '@univerjs/engine-formula';
 import { SetRangeValuesCommand, SetRangeValuesMutation } from '@univerjs/sheets';
 import { CellAlertManagerService, ISheetClipboardService, type ICellAlert } from '@univerjs/sheets-ui';
+import { IShortcutService, KeyCode } from '@univerjs/ui';
 import { messageAt, withoutHash } from '../register';
 
 /** The key under which the grid explains an error in a cell. */
@@ -36,6 +43,23 @@ export function copySpilledValues(injector: Injector, workbook: () => Workbook):
       return cell?.v === undefined || cell.v === null ? undefined : { v: cell.v, t: cell.t };
     },
   } as Parameters<ISheetClipboardService['addClipboardHook']>[0]);
+}
+
+/** What the grid calls the keys of its list of function names, followed by the editor's own name. */
+const suggestionKeys = 'sheet.formula-embedding-editor.search_function.';
+
+/**
+ * Enter puts the formula into the cell as it was typed; only Tab or a click takes a suggested name. The grid's
+ * Enter would take one too, also from a list that has not caught up with quick typing: another function then
+ * stands in the cell than the one that was typed.
+ */
+export function enterTakesNoSuggestion(injector: Injector): void {
+  const shortcuts = injector.get(IShortcutService);
+  const register = shortcuts.registerShortcut.bind(shortcuts);
+  shortcuts.registerShortcut = (item) =>
+    item.id.startsWith(suggestionKeys) && item.binding === KeyCode.ENTER
+      ? toDisposable(() => undefined)
+      : register(item);
 }
 
 /** `F2#` typed into a cell becomes the function that the engine knows it by. */
