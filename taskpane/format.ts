@@ -30,6 +30,18 @@ export function plainNumber(value: number, digits = 4): string {
 }
 
 /**
+ * The numbers along an axis, counted in one power of ten where plain ones would not fit beside it.
+ *
+ * @example axisNumbers([0, 0.0002, 0.0004]) // { numbers: ['0', '2', '4'], times: '× 10⁻⁴' }
+ */
+export function axisNumbers(values: readonly number[]): { numbers: string[]; times: string } {
+  const exponent = exponentOf(values.reduce((most, value) => Math.max(most, Math.abs(value)), 0));
+  const power = isPlain(exponent) ? 0 : exponent;
+  const numbers = values.map((value) => minus(String(Number((value / 10 ** power).toPrecision(4)))));
+  return { numbers, times: power === 0 ? '' : `× 10${raised(power)}` };
+}
+
+/**
  * The uncertainty to two digits, the value to the same decimal place.
  *
  * @param uncertainty a standard uncertainty; `null` where the data leave none. What is left of one by the

@@ -1,5 +1,5 @@
 /** The axes of a small plot, with their names and units. */
-import { plainNumber } from '../format';
+import { axisNumbers } from '../format';
 import { svg } from '../h';
 import { linearScale, roundRange, ticks, type Scale } from './scale';
 
@@ -45,10 +45,12 @@ export function plot(
     role: 'img',
     'aria-label': summary,
   };
+  const [across, up] = [ticks(x.from, x.to, tickCount.x), ticks(y.from, y.to, tickCountFor(height))];
+  const [acrossIn, upIn] = [axisNumbers(across), axisNumbers(up)];
   return svg(
     'svg',
     shape,
-    ...ticks(y.from, y.to, tickCountFor(height)).flatMap((value) => [
+    ...up.flatMap((value, place) => [
       svg('line', {
         class: 'grid',
         x1: margin.left,
@@ -56,15 +58,15 @@ export function plot(
         y1: y.place(value),
         y2: y.place(value),
       }),
-      label(plainNumber(value), margin.left - 6, y.place(value) + 4, 'end'),
+      label(upIn.numbers[place], margin.left - 6, y.place(value) + 4, 'end'),
     ]),
-    ...ticks(x.from, x.to, tickCount.x).flatMap((value) => [
+    ...across.flatMap((value, place) => [
       svg('line', { class: 'tick', x1: x.place(value), x2: x.place(value), y1: bottom, y2: bottom + 4 }),
-      label(plainNumber(value), x.place(value), bottom + 15, 'middle'),
+      label(acrossIn.numbers[place], x.place(value), bottom + 15, 'middle'),
     ]),
     svg('path', { class: 'axis', d: `M${margin.left} ${margin.top}V${bottom}H${size.width - margin.right}` }),
-    label(names.y, 4, 11, 'start', 'name'),
-    label(names.x, size.width - margin.right, height - 5, 'end', 'name'),
+    label(`${names.y} ${upIn.times}`.trim(), 4, 11, 'start', 'name'),
+    label(`${names.x} ${acrossIn.times}`.trim(), size.width - margin.right, height - 5, 'end', 'name'),
     ...marks,
   );
 }

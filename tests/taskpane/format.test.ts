@@ -1,4 +1,4 @@
-import { plainNumber, valueWithUncertainty } from '../../taskpane/format';
+import { axisNumbers, plainNumber, valueWithUncertainty } from '../../taskpane/format';
 
 test.each([
   [0.48123, 0.00231, '0.4812 ± 0.0023'],
@@ -24,3 +24,13 @@ test.each([
   [-2.5, '−2.5'],
   [0, '0'],
 ])('plainNumber(%p) is %j', (value, written) => expect(plainNumber(value)).toBe(written));
+
+test.each([
+  [[0, 0.0002, 0.0004], ['0', '2', '4'], '× 10⁻⁴'],
+  [[-0.005, 0, 0.005], ['−0.005', '0', '0.005'], ''],
+  [[0, 0.0005, 0.001], ['0', '0.0005', '0.001'], ''],
+  [[0, 250000], ['0', '2.5'], '× 10⁵'],
+  [[0], ['0'], ''],
+])('axisNumbers(%j) share one power of ten', (values, numbers, times) => {
+  expect(axisNumbers(values)).toEqual({ numbers, times });
+});
