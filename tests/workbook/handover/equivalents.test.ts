@@ -9,7 +9,7 @@ import { createWorkbook } from '../../../workbook/xlsx/create';
 import { readWorkbook } from '../../../workbook/xlsx/read';
 import { typeCells } from '../../../workbook/xlsx/typeCells';
 import { book, type Typed } from '../engine/book';
-import { cases } from './cases';
+import { cases } from './cases/cases';
 import { otherEngines, type Shown } from './otherEngines';
 
 const titles = Object.keys(cases);

@@ -88,6 +88,18 @@ describe('the file', () => {
     expect(formulasIn(copy)).not.toMatch(/PACE|_xldudf/i);
   });
 
+  test('a name that stands for one of our formulas stands for its value', async () => {
+    const names =
+      '<definedNames><definedName name="area">Run!$A$1</definedName><definedName name="rate">-_xldudf_PACE_EVENT(Run!$A$1:$A$2)*1</definedName></definedNames>';
+    const rows =
+      '<row r="1"><c r="A1"><v>40</v></c><c r="C1"><f>SUM(rate)</f></c></row><row r="2"><c r="A2"><v>25</v></c></row>';
+    const copy = await copyOf(packageOf({ sheets: { Run: worksheet(rows) }, names }));
+    expect(textOf(copy, 'xl/workbook.xml')).toContain(
+      '<definedName name="area">Run!$A$1</definedName><definedName name="rate">{-0.025;-0.04}</definedName>',
+    );
+    expect(formulasIn(copy)).not.toMatch(/PACE|_xldudf/i);
+  });
+
   test('all that holds none of our formulas stays byte for byte', async () => {
     const bytes = packageOf({
       sheets: { Run: worksheet(readings), Other: worksheet('<row r="3"><c r="A3"><v>1</v></c></row>') },

@@ -1,0 +1,66 @@
+/** What is read off a run as a whole, and orders from initial rates. */
+import { column } from '../../engine/book';
+import type { Cases } from './case';
+import { run } from './run';
+
+export const course: Cases = {
+  'Initial rate': {
+    typed: {
+      ...run,
+      D2: '=PACE.START(A2:A9,B2:B9)',
+      D3: '=PACE.START(A2:A9,B2:B9,0.9,,TRUE)',
+      D4: '=PACE.START(A2:A9,B2:B9,1,2)',
+    },
+    becomes: 'live',
+    changed: { B3: 15, A9: 250 },
+  },
+  'Normalised time': {
+    typed: {
+      ...run,
+      E1: 1.5,
+      D2: '=PACE.NORMALTIME(A2:A9,B2:B9,E1)',
+      F2: '=PACE.NORMALTIME(A2:A9,B2:B9,0)',
+    },
+    becomes: 'live',
+    changed: { B5: 36, E1: 0.5 },
+  },
+  'Normalised time that cannot be': {
+    typed: { ...run, B2: 1, E1: 1.5, D2: '=PACE.NORMALTIME(A2:A9,B2:B9,E1)' },
+    becomes: 'live',
+    changed: { B3: -1 },
+    then: 'error',
+  },
+  'Half lives read off': {
+    typed: {
+      ...column('A1', [0, 10, 20, 32, 45]),
+      ...column('B1', [8, 4.1, 2.2, 1.1, 0.4]),
+      D1: '=PACE.HALVINGS(A1:A5,B1:B5)',
+      E1: '=PACE.HALVINGS(A1:A5,B1:B5,0.3)',
+    },
+    becomes: 'live',
+    changed: { B2: 4.3, A5: 44 },
+  },
+  Exponents: {
+    typed: {
+      ...column('A1', [0.003, 0.0047, 0.0067, null, 0.011]),
+      ...column('B1', [0.1, 0.1, 0.15, 0.2, 0.2]),
+      ...column('C1', [0.1, 0.15, 0.1, 0.1, 0.08]),
+      E1: '=PACE.EXPONENTS(A1:A5,B1:C5)',
+      E3: '=PACE.EXPONENTS(A1:A5,B1:C5,TRUE)',
+      E8: '=PACE.EXPONENTS(A1:A5,B1:B5,TRUE)',
+    },
+    becomes: 'live',
+    changed: { A2: 0.0049, A4: 0.012 },
+  },
+  'Exponents, reactants always changed together': {
+    typed: {
+      ...column('A1', [0.003, 0.0047, 0.0067, 0.011]),
+      ...column('B1', [0.1, 0.1, 0.2, 0.2]),
+      ...column('C1', [0.1, 0.15, 0.2, 0.3]),
+      E1: '=PACE.EXPONENTS(A1:A4,B1:C4)',
+    },
+    becomes: 'live',
+    changed: { C1: 0.2, C2: 0.2, C3: 0.4, C4: 0.4 },
+    then: 'error',
+  },
+};
