@@ -31,8 +31,9 @@ function summary(formulas: readonly HandedFormula[]): string {
 const origin = { version: packageJson.version, date: new Date().toISOString().slice(0, 10) };
 
 void runFileCommand(process.argv.slice(2), usage, async (input) => {
-  const { bytes, formulas, errors } = await handOver(input, origin);
-  return { bytes, summary: summary(formulas), details: frozenLines(formulas), errors: errorLines(errors) };
+  const { bytes, formulas, names, errors } = await handOver(input, origin);
+  const details = [...frozenLines(formulas), ...names.map(({ name }) => `  frozen  the name ${name}`)];
+  return { bytes, summary: summary(formulas), details, errors: errorLines(errors) };
 }).then((code) => {
   process.exitCode = code;
 });

@@ -13,6 +13,7 @@ import { checked } from './check';
 import { handFormulas, type HandedFormula } from './handed';
 import { mergedCells } from './mergedCells';
 import { methodSheet, noteText, type Origin } from './methodSheet';
+import { freezeNames, frozenNames, type FrozenName } from './names';
 import { addNotes } from './notes';
 import { rewriteSheet, type RewrittenCell } from './rewriteSheet';
 import { respelled } from './respelled';
@@ -23,6 +24,8 @@ export interface HandedOver {
   readonly bytes: Uint8Array;
   /** Formulas that called us. */
   readonly formulas: readonly HandedFormula[];
+  /** Names that stood for a formula with one of ours, and now for a value. */
+  readonly names: readonly FrozenName[];
   /** Cells of the whole workbook that show an error, in reading order. */
   readonly errors: CalculatedBook['errors'];
 }
@@ -36,7 +39,9 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
   const parts = findParts(pack);
   const world = new World(book, calculated);
   const formulas = await checked(handFormulas(world, calculated, mergedCells(pack, parts.sheets)), world);
-  if (formulas.length === 0) return { bytes: recalculated, formulas, errors: calculated.errors };
+  const names = await frozenNames(book);
+  if (formulas.length + names.length === 0)
+    return { bytes: recalculated, formulas, names, errors: calculated.errors };
   for (const sheet of parts.sheets) {
     const cells = [
       ...formulas.filter((formula) => formula.sheet === sheet.name).flatMap(cellsOf),
@@ -50,9 +55,10 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
     if (notes.length > 0) addNotes(pack, sheet, notes);
   }
   const taken = new Set(parts.sheets.map(({ name }) => name.toLowerCase()));
-  addSheet(pack, parts, methodSheet(freeName(taken), formulas, world, origin));
+  addSheet(pack, parts, methodSheet(freeName(taken), { formulas, names }, world, origin));
+  freezeNames(pack, parts.workbook, names);
   dropCalcChain(pack, parts);
-  return { bytes: pack.bytes(), formulas, errors: calculated.errors };
+  return { bytes: pack.bytes(), formulas, names, errors: calculated.errors };
 }
 
 function cellsOf({ row, column, said, values }: HandedFormula): RewrittenCell[] {

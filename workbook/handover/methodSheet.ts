@@ -14,6 +14,7 @@ import {
   vacuumPermittivity,
 } from '../../src/constants';
 import type { HandedFormula } from './handed';
+import type { FrozenName } from './names';
 import type { NewSheet, SheetCell } from './sheetPart';
 import { fingerprintOf, fingerprintTolerance } from './stale';
 import type { World } from './world';
@@ -41,7 +42,7 @@ const headings = (...words: string[]): SheetCell[] => words.map((heading) => ({ 
 
 export function methodSheet(
   name: string,
-  formulas: readonly HandedFormula[],
+  { formulas, names }: { readonly formulas: readonly HandedFormula[]; readonly names: readonly FrozenName[] },
   world: World,
   { version, date }: Origin,
 ): NewSheet {
@@ -55,6 +56,8 @@ export function methodSheet(
     headings('Sheet', 'Cells', 'Formula as it was', 'Now', 'Inputs then', 'Inputs now', 'State'),
   ];
   for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
+  for (const { name: own, refersTo, value } of names)
+    rows.push(['a name', own, `=${refersTo}`, `frozen: it stands for ${value}`]);
   rows.push([], headings('Function', 'Unit', 'What it answers', 'How it is worked out', 'Reference'));
   rows.push(...functionsOf(formulas).map(functionRow));
   rows.push([], headings('Constant', 'Unit', 'Value', 'Source'));

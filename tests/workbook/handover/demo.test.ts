@@ -1,0 +1,42 @@
+/** The whole demo workbook, handed over and worked out by other programs. */
+import { CellError, type CellValue } from '../../../functions/cell';
+import { demoWorkbook } from '../../../workbook/demo/demo';
+import { calculate } from '../../../workbook/engine/univer/headless';
+import { handOver, type HandedOver } from '../../../workbook/handover/handOver';
+import { createWorkbook } from '../../../workbook/xlsx/create';
+import { otherEngines, shownIn } from './otherEngines';
+
+let copy: HandedOver;
+beforeAll(async () => {
+  const model = demoWorkbook();
+  const bytes = createWorkbook(model, await calculate(model));
+  copy = await handOver(bytes, { version: '1.2.3', date: '2026-12-01' });
+}, 120_000);
+
+/** Numbers to nine digits, errors by their code. */
+const near = (value: CellValue): CellValue | string => {
+  if (typeof value === 'number') return value.toPrecision(9);
+  return value instanceof CellError ? value.code : (value ?? '');
+};
+
+test('most of what it asks of a run stays live', () => {
+  const live = copy.formulas.filter(({ said }) => said);
+  expect(live.length).toBeGreaterThan(copy.formulas.length / 3);
+  expect(live.some(({ original }) => original.includes('GASVOLUME'))).toBe(true);
+});
+
+for (const engine of otherEngines) {
+  (engine.isInstalled ? test : test.skip)(
+    `${engine.name} shows every cell as it is here`,
+    () => {
+      const shown = engine.recalculated(copy.bytes);
+      const ours = [...shownIn(copy.bytes)];
+      expect(ours.length).toBeGreaterThan(1000);
+      const theirs = ours.map(([place]): [string, CellValue] => [place, shown.get(place) ?? null]);
+      const seen = (list: [string, CellValue][]): string[] =>
+        list.map(([place, value]) => `${place} ${near(value)}`);
+      expect(seen(theirs)).toEqual(seen(ours));
+    },
+    120_000,
+  );
+}
