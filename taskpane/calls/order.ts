@@ -1,6 +1,5 @@
 /** The order step: what the functions of that family say of the chosen run. */
 import { CellError, type CellValue } from '../../functions/cell';
-import { functionNamed } from '../../functions/catalogue';
 import type { OrderAnswerKind, OrderChoice } from '../choices';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
 import { argumentOf, columnArgument, leftOut, quoted, truth, type Argument, type Pointing } from './argument';
@@ -170,14 +169,14 @@ function fitted(
 /** As PACE.UNIT writes it; a reading without a unit has none in any power. */
 export function coefficientUnit(order: number, table: Table, run: Run): string {
   const [reading, time] = [headingOf(table, run.readingColumn), headingOf(table, run.timeColumn)];
-  const perTime = unitText(1, 'mol/L', time.unit || 's');
   if (time.unit === '') return 'time unit⁻¹ and reading unit, by the order';
+  const perTime = unitText(1, 'mol/L', time.unit);
   if (reading.unit === '1' || order === 1) return perTime;
   return unitText(order, reading.unit, time.unit) || `${perTime}, with the reading unit to the power 1 − n`;
 }
 
 function unitText(order: number, concentration: string, time: string): string {
-  if (!functionNamed('UNIT') || concentration === '') return '';
+  if (concentration === '') return '';
   const answer = ask('UNIT', [{ value: order, text: '' }, quoted(concentration), quoted(time)]);
   return typeof answer === 'string' ? answer : '';
 }

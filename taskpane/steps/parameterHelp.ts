@@ -1,7 +1,7 @@
 /** What a parameter's own definition says of it, in one line. */
 import { boundsInWords, type Parameter } from '../../functions/parameters';
 
-/** @example parameterHelp(…) // 'of the gas; unit degC; above -273.15' */
+/** `of the gas; unit degC; above -273.15` */
 export function parameterHelp({ help, unit, bounds, optional, whenOmitted }: Parameter): string {
   const hasNone = unit === '1' || unit === 'any' || unit === 'text';
   return [
