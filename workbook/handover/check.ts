@@ -63,23 +63,28 @@ function firstOff(
   calculated: CalculatedBook,
 ): string | undefined {
   if (!said) return undefined;
+  const size = largest(values);
   for (const [r, line] of values.entries()) {
     for (const [c, ours] of line.entries()) {
       if (!isJudged(values, r, c)) continue;
       const theirs = calculated.formula(sheet, row + r, aside + column + c)?.value ?? null;
-      if (!isSame(ours, theirs)) return `built-in functions give ${shown(theirs)} for ${shown(ours)}`;
+      if (!isSame(ours, theirs, size)) return `built-in functions give ${shown(theirs)} for ${shown(ours)}`;
     }
   }
   return undefined;
 }
 
-function isSame(ours: CellValue, theirs: CellValue): boolean {
+/** @param size the largest number of the whole result: a 0 among rates can come out as their rounding */
+function isSame(ours: CellValue, theirs: CellValue, size: number): boolean {
   if (typeof ours === 'number' && typeof theirs === 'number')
-    return (
-      Math.abs(ours - theirs) <= tolerance * Math.max(Math.abs(ours), Number.MIN_VALUE) || ours === theirs
-    );
+    return Math.abs(ours - theirs) <= tolerance * Math.max(Math.abs(ours), size / 1000);
   if (ours instanceof CellError) return theirs instanceof CellError && theirs.code === ours.code;
   return (ours ?? '') === (theirs ?? '');
 }
+
+const largest = (values: HandedFormula['values']): number =>
+  values
+    .flat()
+    .reduce<number>((most, value) => (typeof value === 'number' ? Math.max(most, Math.abs(value)) : most), 0);
 
 const shown = (value: CellValue): string => (value instanceof CellError ? value.code : JSON.stringify(value));

@@ -13,9 +13,9 @@ beforeAll(async () => {
   copy = await handOver(bytes, { version: '1.2.3', date: '2026-12-01' });
 }, 120_000);
 
-/** Numbers to nine digits, errors by their code. */
+/** Numbers to nine digits, or nothing where a sum leaves its rounding; errors by their code. */
 const near = (value: CellValue): CellValue | string => {
-  if (typeof value === 'number') return value.toPrecision(9);
+  if (typeof value === 'number') return Math.abs(value) < 1e-13 ? 0 : value.toPrecision(9);
   return value instanceof CellError ? value.code : (value ?? '');
 };
 
