@@ -37,13 +37,17 @@ export function successiveHalfLives(series: Series, endpoint?: number): number[]
   return reached.slice(1).map((time, i) => time - reached[i]);
 }
 
-/** The first time, then when 1/2, 1/4 … are first left. */
+/**
+ * The first time, then when 1/2, 1/4 … are first left. A reading at or past the end ends the reckoning: one more
+ * level is met on the way to it, and all those below lie within its scatter.
+ */
 function halvingTimes(times: Float64Array, shares: Float64Array): number[] {
   const reached = [times[0]];
   let level = 0.5;
   for (let i = 1; i < times.length; i++) {
-    while (shares[i] <= level && level > 1e-9) {
+    while (shares[i] <= level) {
       reached.push(crossing(times[i - 1], shares[i - 1], times[i], shares[i], level));
+      if (shares[i] <= 0) return reached;
       level /= 2;
     }
   }

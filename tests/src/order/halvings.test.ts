@@ -35,6 +35,11 @@ test('a reading beyond the end is met by a straight line', () => {
   expect(successiveHalfLives(pairReadings([0, 1, 2], [1, 0.75, -0.25]))[0]).toBeCloseTo(1.25, 12);
 });
 
+test('a reading at or past the end ends the reckoning: no shower of tiny half lives', () => {
+  expect(successiveHalfLives(pairReadings([0, 1, 2, 3, 4], [8, 4, 2, -0.1, 0.2]))).toHaveLength(3);
+  expect(successiveHalfLives(pairReadings([0, 1, 2], [8, 4, 0]))).toHaveLength(2);
+});
+
 test('what successiveHalfLives refuses, in words', () => {
   expect(() => successiveHalfLives(pairReadings([0, 1, 2], [8, 7, 6]))).toThrow(
     'a half life needs a run down to half: 75 % is left at least',
