@@ -48,11 +48,15 @@ export function sayHalvings(given: Given): Said {
   const reached = (halving: number): string => {
     if (halving === 0) return run.time(0);
     const left = 0.5 ** halving;
-    const place = `MIN(IF(${shares}<=${left},${run.places},${pairs.size + 1}))`;
+    const placeOf = (share: number): string => `MIN(IF(${shares}<=${share},${run.places},${pairs.size + 1}))`;
+    const place = placeOf(left);
     const share = (back: 0 | 1): string => `((INDEX(${pairs.y},${place}-${back})-${from})/${first})`;
     const time = (back: 0 | 1): string => `INDEX(${pairs.x},${place}-${back})`;
     const part = `IF(${share(0)}>0,LN(${share(1)}/${left})/LN(${share(1)}/${share(0)}),(${share(1)}-${left})/(${share(1)}-${share(0)}))`;
-    return `IF(${place}>${pairs.size},NA(),${time(1)}+${part}*(${time(0)}-${time(1)}))`;
+    const found = `${time(1)}+${part}*(${time(0)}-${time(1)})`;
+    // a reading at or past the end ends the reckoning after the first level it meets
+    const isOver = halving === 1 ? 'FALSE' : `AND(${place}=${placeOf(2 * left)},${share(0)}<=0)`;
+    return `IF(${place}>${pairs.size},NA(),IF(${isOver},NA(),${found}))`;
   };
   if (pairs.size < 2) throw new NotSaid('fewer than two readings');
   return { cell: (row) => where(holds, `${reached(row + 1)}-${reached(row)}`) };

@@ -40,6 +40,15 @@ export const course: Cases = {
     becomes: 'live',
     changed: { B2: 4.3, A5: 44 },
   },
+  'Half lives of a run that passes its end': {
+    typed: {
+      ...column('A1', [0, 10, 20, 30, 40]),
+      ...column('B1', [8, 4.1, 2.2, -0.1, 0.2]),
+      D1: '=PACE.HALVINGS(A1:A5,B1:B5)',
+    },
+    becomes: 'live',
+    changed: { B3: 2.1 },
+  },
   Exponents: {
     typed: {
       ...column('A1', [0.003, 0.0047, 0.0067, null, 0.011]),
