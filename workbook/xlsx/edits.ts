@@ -5,11 +5,17 @@ export interface Edit extends Span {
   readonly text: string;
 }
 
-/** Edits must not overlap; those at one place follow each other in the order given. */
+/**
+ * Those at one place follow each other in the order given, insertions before what is replaced there: a new cell
+ * may stand right before a changed one.
+ *
+ * @throws where two edits overlap, since one of them would be lost
+ */
 export function applyEdits(text: string, edits: readonly Edit[]): string {
   const pieces: string[] = [];
   let at = 0;
-  for (const edit of [...edits].sort((a, b) => a.start - b.start)) {
+  for (const edit of [...edits].sort((a, b) => a.start - b.start || a.end - b.end)) {
+    if (edit.start < at) throw new Error(`two changes overlap at character ${edit.start}`);
     pieces.push(text.slice(at, edit.start), edit.text);
     at = edit.end;
   }

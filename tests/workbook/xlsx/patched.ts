@@ -1,6 +1,7 @@
 /** What the tests of patching have in common: one sheet in, its rows after recalculation out. */
+import { parseArea } from '../../../functions/address';
 import { recalculate } from '../../../workbook/commands/recalculate';
-import { packageOf, rowsOf, worksheet } from './package';
+import { packageOf, partsOf, rowsOf, worksheet } from './package';
 
 export const recalculated = async (bytes: Uint8Array): Promise<Uint8Array> =>
   (await recalculate(bytes)).bytes;
