@@ -3,8 +3,18 @@ import { parseArea } from '../../../functions/address';
 import { recalculate } from '../../../workbook/commands/recalculate';
 import { packageOf, partsOf, rowsOf, worksheet } from './package';
 
-export const recalculated = async (bytes: Uint8Array): Promise<Uint8Array> =>
-  (await recalculate(bytes)).bytes;
+/** Whatever a test looks at: each cell stands once, in reading order, in every sheet. */
+export async function recalculated(bytes: Uint8Array): Promise<Uint8Array> {
+  const after = (await recalculate(bytes)).bytes;
+  for (const [path, part] of Object.entries(partsOf(after))) {
+    if (!/worksheets\/[^/]+\.xml$/.test(path)) continue;
+    const cells = new TextDecoder().decode(part).matchAll(/<(?:\w+:)?c [^>]*?\br="([A-Z]+\d+)"/g);
+    const places = [...cells].map(([, name]) => parseArea(name)!);
+    const order = places.map(({ row, column }) => row * 20_000 + column);
+    order.slice(1).forEach((place, i) => expect(place).toBeGreaterThan(order[i]));
+  }
+  return after;
+}
 
 /** The rows of one sheet, before and after. */
 export async function rows(before: string, options: Parameters<typeof worksheet>[1] = {}): Promise<string> {
