@@ -18,7 +18,7 @@ export function everyFunction(): SheetModel {
     );
     row += heightOf(f) + 1;
   }
-  return { name: 'Every function', cells, columnWidths: { 0: 22, 1: 92, 2: 96, 3: 22, 4: 22 } };
+  return { name: 'Every function', cells, columnWidths: { 0: 22, 1: 60, 2: 58, 3: 22, 4: 22 } };
 }
 
 const heightOf = ({ example }: CellFunction): number => (isRange(example.equals) ? example.equals.length : 1);
