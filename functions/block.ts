@@ -1,19 +1,6 @@
 /** Several columns side by side, each belonging to the same times or runs. */
 import { InvalidInput } from '../src/errors';
-import { readColumn, type Column } from './column';
-import { required, type About, type Parameter } from './parameters';
-
-/** A rectangle of numbers; blank and text cells are gaps. */
-export function block(about: About): Parameter<Column> {
-  return {
-    kind: 'column',
-    help: about.help,
-    unit: about.unit ?? 'any',
-    dimension: 'matrix',
-    optional: false,
-    read: (cells, name) => readColumn(required(cells, name)),
-  };
-}
+import type { Column } from './column';
 
 /**
  * The block's columns, or its rows where it lies the way of a row that they belong to.

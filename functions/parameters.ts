@@ -111,16 +111,25 @@ export function number(about: About & Bounds): Parameter<number> {
   };
 }
 
-/** Times or readings from which something is estimated: one column or one row; blank and text cells are gaps. */
-export function column(about: About): Parameter<Column> {
+/** A rectangle of numbers, such as several runs side by side; blank and text cells are gaps. */
+export function block(about: About): Parameter<Column> {
   return {
     kind: 'column',
     help: about.help,
     unit: about.unit ?? 'any',
     dimension: 'matrix',
     optional: false,
+    read: (cells, name) => readColumn(required(cells, name)),
+  };
+}
+
+/** Times or readings from which something is estimated: one column or one row; blank and text cells are gaps. */
+export function column(about: About): Parameter<Column> {
+  const any = block(about);
+  return {
+    ...any,
     read(cells, name) {
-      const read = readColumn(required(cells, name));
+      const read = any.read(cells, name);
       requireLine(read, name);
       return read;
     },

@@ -1,7 +1,7 @@
 /** The reference of all functions in docs/functions.md, worked out from the definitions. */
-import { CellError, isRange, type CellResult, type CellValue } from './cell';
+import { isRange, type CellResult } from './cell';
 import { typedName, type CellFunction } from './define';
-import { boundsInWords, type Parameter } from './parameters';
+import { argumentFacts, argumentHeadings, exampleCell } from './documented';
 import { byFamily, signature } from './readmeTable';
 
 /** Everything a definition says, one part a function. */
@@ -32,35 +32,22 @@ function part(f: CellFunction): string {
 
 const parameterTable = ({ parameters }: CellFunction): string =>
   [
-    '| argument | meaning | unit | must be | left out |',
-    '|---|---|---|---|---|',
-    ...Object.entries(parameters).map(([name, parameter]) => parameterRow(name, parameter)),
-  ].join('\n');
-
-function parameterRow(name: string, { help, unit, bounds, optional, whenOmitted }: Parameter): string {
-  const cells = [
-    `\`${name}\``,
-    help,
-    unit === '1' ? '' : unit,
-    bounds ? boundsInWords(bounds) : '',
-    optional ? (whenOmitted ?? 'not used') : 'needed',
-  ];
-  return `| ${cells.map((cell) => cell.replaceAll('|', '\\|')).join(' | ')} |`;
-}
+    ['argument', ...argumentHeadings],
+    ['argument', ...argumentHeadings].map(() => '---'),
+    ...Object.entries(parameters).map(([name, parameter]) => [
+      `\`${name}\``,
+      ...argumentFacts(parameter).map((fact) => fact.replaceAll('|', '\\|')),
+    ]),
+  ]
+    .map((cells, row) => (row === 1 ? `|${cells.join('|')}|` : `| ${cells.join(' | ')} |`))
+    .join('\n');
 
 /** Rows with ; between them and cells with , as in a formula; tables by their first row alone. */
 function shown(result: CellResult): string {
-  if (!isRange(result)) return `\`${cell(result)}\``;
-  const rows = result.map((row) => row.map(cell).join(', '));
+  if (!isRange(result)) return `\`${exampleCell(result)}\``;
+  const rows = result.map((row) => row.map(exampleCell).join(', '));
   const isTable = typeof result[0][0] === 'string';
   return isTable
     ? `a table with the headings of its first row, ${rows.length} rows`
     : `\`${rows.join('; ')}\``;
 }
-
-const cell = (value: CellValue): string =>
-  value instanceof CellError
-    ? value.code
-    : typeof value === 'number'
-      ? String(Number(value.toPrecision(8)))
-      : String(value ?? '');

@@ -1,7 +1,8 @@
 /** The help page of one function, from its definition alone. */
-import { CellError, isRange, type CellResult, type CellValue } from '../cell';
+import { isRange, type CellResult } from '../cell';
 import { typedName, type CellFunction } from '../define';
-import { boundsInWords, type Parameter } from '../parameters';
+import { argumentFacts, argumentHeadings, exampleCell } from '../documented';
+import type { Parameter } from '../parameters';
 import { signature } from '../readmeTable';
 import { escaped, page } from './html';
 
@@ -33,7 +34,7 @@ export function functionPage(f: CellFunction): string {
 }
 
 const argumentTable = ({ parameters }: CellFunction): string => `<table>
-<thead><tr><th>name</th><th>meaning</th><th>unit</th><th>must be</th><th>left out</th></tr></thead>
+<thead><tr>${['name', ...argumentHeadings].map((heading) => `<th>${heading}</th>`).join('')}</tr></thead>
 <tbody>
 ${Object.entries(parameters)
   .map(([name, parameter]) => argumentRow(name, parameter))
@@ -41,14 +42,8 @@ ${Object.entries(parameters)
 </tbody>
 </table>`;
 
-function argumentRow(name: string, { help, unit, bounds, optional, whenOmitted }: Parameter): string {
-  const cells = [
-    `<code>${name}</code>`,
-    escaped(help),
-    unit === '1' ? '' : escaped(unit),
-    bounds ? boundsInWords(bounds) : '',
-    optional ? escaped(whenOmitted ?? 'not used') : 'needed',
-  ];
+function argumentRow(name: string, parameter: Parameter): string {
+  const cells = [`<code>${name}</code>`, ...argumentFacts(parameter).map(escaped)];
   return `<tr>${cells.map((cell) => `<td>${cell}</td>`).join('')}</tr>`;
 }
 
@@ -69,15 +64,10 @@ function answerInWords({ result, parameters }: CellFunction): string {
 function shown(result: CellResult): string {
   const rows = isRange(result) ? result : [[result]];
   const body = rows.map(
-    (row) => `<tr>${row.map((cell) => `<td>${escaped(cellText(cell))}</td>`).join('')}</tr>`,
+    (row) => `<tr>${row.map((cell) => `<td>${escaped(exampleCell(cell))}</td>`).join('')}</tr>`,
   );
   return `<p class="quiet">shows</p>\n<table><tbody>${body.join('')}</tbody></table>`;
 }
-
-const cellText = (cell: CellValue): string => {
-  if (cell instanceof CellError) return cell.code;
-  return typeof cell === 'number' ? String(Number(cell.toPrecision(8))) : String(cell ?? '');
-};
 
 /** A DOI leads to its document. */
 const linked = (reference: string): string =>

@@ -1,11 +1,11 @@
 import { nearestSimpleOrder, partialOrders } from '../../src/order/exponents';
 import type { Estimate } from '../../src/estimate';
-import { block, columnsBeside } from '../block';
+import { columnsBeside } from '../block';
 import type { CellValue } from '../cell';
 import { detail } from '../commonParameters';
 import { sayExponents } from '../builtIn/exponents';
 import { defineFunction } from '../define';
-import { column } from '../parameters';
+import { block, column } from '../parameters';
 import { standardRow } from '../results';
 
 export default defineFunction({

@@ -1,12 +1,12 @@
 import { InvalidInput } from '../../src/errors';
 import { surveyRun, type SurveyedRun } from '../../src/order/survey';
 import { pairReadings } from '../../src/series/series';
-import { block, columnsBeside } from '../block';
+import { columnsBeside } from '../block';
 import type { CellValue } from '../cell';
 import type { Column } from '../column';
 import { endpoint } from '../commonParameters';
 import { defineFunction } from '../define';
-import { column, number, optional } from '../parameters';
+import { block, column, number, optional } from '../parameters';
 import { orNotAvailable } from '../results';
 import { lawMethod } from './lawParameters';
 
