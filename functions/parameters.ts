@@ -92,107 +92,83 @@ export function requireWithin(value: number, bounds: Bounds, name: string, unit:
   );
 }
 
+/** What a kind of parameter says of itself, before anything is read. */
+type Kind<T> = Omit<Parameter<T>, 'dimension' | 'optional' | 'read'>;
+
+/** A parameter that takes one value, in one cell. */
+export const ofOneCell = <T>(
+  kind: Kind<T>,
+  readCell: (cell: CellValue, name: string) => T,
+): Parameter<T> => ({
+  ...kind,
+  dimension: 'scalar',
+  optional: false,
+  read: (cells, name) => readCell(single(required(cells, name), name), name),
+});
+
+/** A parameter that takes a range. */
+export const ofRange = <T>(
+  kind: Kind<T>,
+  readRange: (cells: CellRange, name: string) => T,
+): Parameter<T> => ({
+  ...kind,
+  dimension: 'matrix',
+  optional: false,
+  read: (cells, name) => readRange(required(cells, name), name),
+});
+
 /** One pure number or one number in the unit of the columns. */
-export function number(about: About & Bounds): Parameter<number> {
-  const { help, unit = '1', ...bounds } = about;
-  return {
-    kind: 'number',
-    help,
-    unit,
-    dimension: 'scalar',
-    optional: false,
-    bounds,
-    read(cells, name) {
-      const cell = single(required(cells, name), name);
-      if (typeof cell !== 'number')
-        throw new InvalidInput(`${name} must be a number: got ${shownCell(cell)}`);
-      return requireWithin(cell, bounds, name, unit);
-    },
-  };
+export function number({ help, unit = '1', ...bounds }: About & Bounds): Parameter<number> {
+  return ofOneCell({ kind: 'number', help, unit, bounds }, (cell, name) => {
+    if (typeof cell !== 'number') throw new InvalidInput(`${name} must be a number: got ${shownCell(cell)}`);
+    return requireWithin(cell, bounds, name, unit);
+  });
 }
 
 /** A rectangle of numbers, such as several runs side by side; blank and text cells are gaps. */
-export function block(about: About): Parameter<Column> {
-  return {
-    kind: 'column',
-    help: about.help,
-    unit: about.unit ?? 'any',
-    dimension: 'matrix',
-    optional: false,
-    read: (cells, name) => readColumn(required(cells, name)),
-  };
-}
+export const block = ({ help, unit = 'any' }: About): Parameter<Column> =>
+  ofRange({ kind: 'column', help, unit }, readColumn);
 
 /** Times or readings from which something is estimated: one column or one row; blank and text cells are gaps. */
-export function column(about: About): Parameter<Column> {
-  const any = block(about);
-  return {
-    ...any,
-    read(cells, name) {
-      const read = any.read(cells, name);
-      requireLine(read, name);
-      return read;
-    },
-  };
-}
+export const column = ({ help, unit = 'any' }: About): Parameter<Column> =>
+  ofRange({ kind: 'column', help, unit }, (cells, name) => {
+    const read = readColumn(cells);
+    requireLine(read, name);
+    return read;
+  });
 
 /** Readings that are converted one by one, in any shape. */
-export function readings(about: About & Bounds): Parameter<Column> {
-  const { help, unit = 'any', ...bounds } = about;
-  return {
-    kind: 'readings',
-    help,
-    unit,
-    dimension: 'matrix',
-    optional: false,
-    bounds,
-    keepsErrors: true,
-    read(cells, name) {
-      const read = readColumn(required(cells, name));
-      read.numbers.forEach((value, place) => {
-        if (value !== null) requireWithin(value, bounds, name, unit, placeInWords(place, read));
-      });
-      return read;
-    },
-  };
+export function readings({ help, unit = 'any', ...bounds }: About & Bounds): Parameter<Column> {
+  return ofRange({ kind: 'readings', help, unit, bounds, keepsErrors: true }, (cells, name) => {
+    const read = readColumn(cells);
+    read.numbers.forEach((value, place) => {
+      if (value !== null) requireWithin(value, bounds, name, unit, placeInWords(place, read));
+    });
+    return read;
+  });
 }
 
 /** TRUE or FALSE; 1 and 0 count as such. */
-export function flag(about: About): Parameter<boolean> {
-  return {
-    kind: 'flag',
-    help: about.help,
-    unit: '1',
-    dimension: 'scalar',
-    optional: false,
-    read(cells, name) {
-      const cell = single(required(cells, name), name);
-      if (typeof cell === 'boolean') return cell;
-      if (cell === 0 || cell === 1) return cell === 1;
-      throw new InvalidInput(`${name} must be TRUE or FALSE: got ${shownCell(cell)}`);
-    },
-  };
-}
+export const flag = ({ help }: About): Parameter<boolean> =>
+  ofOneCell({ kind: 'flag', help, unit: '1' }, (cell, name) => {
+    if (typeof cell === 'boolean') return cell;
+    if (cell === 0 || cell === 1) return cell === 1;
+    throw new InvalidInput(`${name} must be TRUE or FALSE: got ${shownCell(cell)}`);
+  });
 
 /** A word, a unit, a formula; a bare number where `orNumber` allows it. */
 export function text(about: About): Parameter<string>;
 export function text(about: About & { readonly orNumber: true }): Parameter<string | number>;
-export function text(about: About & { readonly orNumber?: true }): Parameter<string | number> {
-  return {
-    kind: 'text',
-    help: about.help,
-    unit: about.unit ?? 'text',
-    dimension: 'scalar',
-    optional: false,
-    read(cells, name) {
-      const cell = single(required(cells, name), name);
-      if (typeof cell === 'string' && cell.trim() !== '') return cell.trim();
-      if (about.orNumber && typeof cell === 'number') return cell;
-      throw new InvalidInput(
-        `${name} must be text${about.orNumber ? ' or a number' : ''}: got ${shownCell(cell)}`,
-      );
-    },
-  };
+export function text({
+  help,
+  unit = 'text',
+  orNumber = false,
+}: About & { readonly orNumber?: boolean }): Parameter<string | number> {
+  return ofOneCell({ kind: 'text', help, unit }, (cell, name) => {
+    if (typeof cell === 'string' && cell.trim() !== '') return cell.trim();
+    if (orNumber && typeof cell === 'number') return cell;
+    throw new InvalidInput(`${name} must be text${orNumber ? ' or a number' : ''}: got ${shownCell(cell)}`);
+  });
 }
 
 const fallbackInWords = (fallback: unknown): string | undefined =>

@@ -1,9 +1,9 @@
 /** Kinds of parameter that physics gives a unit: a bare number means the one documented, text carries its own. */
 import { InvalidInput } from '../src/errors';
 import { convertQuantity, parseQuantity } from '../src/units';
-import { CellError, shownCell, type CellValue } from './cell';
+import { CellError, shownCell, type CellRange, type CellValue } from './cell';
 import { placeInWords, type Column } from './column';
-import { required, requireWithin, single, type About, type Bounds, type Parameter } from './parameters';
+import { ofOneCell, ofRange, requireWithin, type About, type Bounds, type Parameter } from './parameters';
 
 interface AboutQuantity extends About, Bounds {
   /** Of a bare number. */
@@ -13,41 +13,33 @@ interface AboutQuantity extends About, Bounds {
 }
 
 /** One physical quantity: a bare number in `unit`, or text with a unit of its own. Read as a number of `to`. */
-export function quantity(about: AboutQuantity): Parameter<number> {
-  const { help, unit, to, ...bounds } = about;
-  return {
-    kind: 'quantity',
-    help,
-    unit,
-    dimension: 'scalar',
-    optional: false,
-    bounds,
-    read: (cells, name) => readQuantity(single(required(cells, name), name), { name, unit, to, bounds }),
-  };
-}
+export const quantity = ({ help, unit, to, ...bounds }: AboutQuantity): Parameter<number> =>
+  ofOneCell({ kind: 'quantity', help, unit, bounds }, (cell, name) =>
+    readQuantity(cell, { name, unit, to, bounds }),
+  );
 
 /** The same for every reading, or one a reading: a quantity, or a range of them as long as the readings. */
-export function quantities(about: AboutQuantity): Parameter<readonly number[]> {
-  const { help, unit, to, ...bounds } = about;
-  return {
-    kind: 'quantities',
-    help: `${help}; one value, or one a reading`,
-    unit,
-    dimension: 'matrix',
-    optional: false,
-    bounds,
-    read(cells, name) {
-      const rows = required(cells, name);
-      const shape = { rows: rows.length, columns: rows[0]?.length ?? 0 };
-      const flat = rows.flat();
-      return flat.map((cell, place) => {
-        if (cell instanceof CellError) throw cell;
-        const where = flat.length === 1 ? '' : placeInWords(place, shape);
-        return readQuantity(cell, { name, unit, to, bounds, where });
-      });
-    },
-  };
+export function quantities({ help, unit, to, ...bounds }: AboutQuantity): Parameter<readonly number[]> {
+  const kind = { kind: 'quantities', help: `${help}; one value, or one a reading`, unit, bounds } as const;
+  return ofRange(kind, (cells, name) =>
+    eachIn(cells, (cell, where) => {
+      if (cell instanceof CellError) throw cell;
+      return readQuantity(cell, { name, unit, to, bounds, where });
+    }),
+  );
 }
+
+/** Goes through a range, row by row. @param read is told where a cell stands, unless it is the only one */
+function eachIn<T>(cells: CellRange, read: (cell: CellValue, where: string, place: number) => T): T[] {
+  const flat = cells.flat();
+  const shape = shapeOf(cells);
+  return flat.map((cell, place) => read(cell, flat.length === 1 ? '' : placeInWords(place, shape), place));
+}
+
+const shapeOf = (cells: CellRange): Pick<Column, 'rows' | 'columns'> => ({
+  rows: cells.length,
+  columns: cells[0]?.length ?? 0,
+});
 
 /**
  * One quantity for all readings, or one each.
@@ -88,27 +80,14 @@ function readQuantity(
 }
 
 /** Readings with units, converted one by one, in any shape; text without a figure is a gap. */
-export function quantityReadings(about: AboutQuantity): Parameter<Column> {
-  const { help, unit, to, ...bounds } = about;
-  return {
-    kind: 'readings',
-    help,
-    unit,
-    dimension: 'matrix',
-    optional: false,
-    bounds,
-    keepsErrors: true,
-    read(cells, name) {
-      const rows = required(cells, name);
-      const shape = { rows: rows.length, columns: rows[0].length };
-      const errors = new Map<number, CellError>();
-      const numbers = rows.flat().map((cell, place) => {
-        if (cell instanceof CellError) errors.set(place, cell);
-        const isReading = typeof cell === 'number' || (typeof cell === 'string' && /\d/.test(cell));
-        const where = rows.flat().length === 1 ? '' : placeInWords(place, shape);
-        return isReading ? readQuantity(cell, { name, unit, to, bounds, where }) : null;
-      });
-      return { ...shape, numbers, errors };
-    },
-  };
+export function quantityReadings({ help, unit, to, ...bounds }: AboutQuantity): Parameter<Column> {
+  return ofRange({ kind: 'readings', help, unit, bounds, keepsErrors: true }, (cells, name) => {
+    const errors = new Map<number, CellError>();
+    const numbers = eachIn(cells, (cell, where, place) => {
+      if (cell instanceof CellError) errors.set(place, cell);
+      const isReading = typeof cell === 'number' || (typeof cell === 'string' && /\d/.test(cell));
+      return isReading ? readQuantity(cell, { name, unit, to, bounds, where }) : null;
+    });
+    return { ...shapeOf(cells), numbers, errors };
+  });
 }

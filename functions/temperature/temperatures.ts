@@ -4,7 +4,7 @@ import { InvalidInput, shown } from '../../src/errors';
 import { parseQuantity } from '../../src/units';
 import { shownCell, type CellValue } from '../cell';
 import { numberInText, placeInWords, readColumn, requireLine, type Column } from '../column';
-import { required, requireWithin, single, type About, type Parameter } from '../parameters';
+import { ofOneCell, ofRange, requireWithin, type About, type Parameter } from '../parameters';
 
 const unit = 'degC';
 const bounds = { above: -celsiusZero };
@@ -19,51 +19,31 @@ interface Reading {
 const hottestUnasked = 200;
 
 /** A column of temperatures, read as kelvin. */
-export function temperatures({ help }: About): Parameter<Column> {
-  return {
-    kind: 'quantities',
-    help,
-    unit,
-    dimension: 'matrix',
-    optional: false,
-    bounds,
-    read(cells, name) {
-      const rows = required(cells, name);
-      const shape = { rows: rows.length, columns: rows[0]?.length ?? 0 };
-      const bare: (number | undefined)[] = [];
-      const inKelvin = rows.map((row, r) =>
-        row.map((cell, c): CellValue => {
-          const reading = readTemperature(cell, name, () => placeInWords(r * shape.columns + c, shape));
-          if (!reading) return cell;
-          bare.push(reading.bare);
-          return reading.kelvin;
-        }),
-      );
-      requireCelsius(bare, name);
-      const column = readColumn(inKelvin);
-      requireLine(column, name);
-      return column;
-    },
-  };
-}
+export const temperatures = ({ help }: About): Parameter<Column> =>
+  ofRange({ kind: 'quantities', help, unit, bounds }, (cells, name) => {
+    const shape = { rows: cells.length, columns: cells[0]?.length ?? 0 };
+    const bare: (number | undefined)[] = [];
+    const inKelvin = cells.map((row, r) =>
+      row.map((cell, c): CellValue => {
+        const reading = readTemperature(cell, name, () => placeInWords(r * shape.columns + c, shape));
+        if (!reading) return cell;
+        bare.push(reading.bare);
+        return reading.kelvin;
+      }),
+    );
+    requireCelsius(bare, name);
+    const column = readColumn(inKelvin);
+    requireLine(column, name);
+    return column;
+  });
 
 /** One temperature. @returns the bare number too, so that a function can question it beside the others */
-export function temperature({ help }: About): Parameter<Reading> {
-  return {
-    kind: 'quantity',
-    help,
-    unit,
-    dimension: 'scalar',
-    optional: false,
-    bounds,
-    read(cells, name) {
-      const cell = single(required(cells, name), name);
-      const reading = readTemperature(cell, name);
-      if (reading) return reading;
-      throw new InvalidInput(`${name} must be a number or text with a unit: got ${shownCell(cell)}`);
-    },
-  };
-}
+export const temperature = ({ help }: About): Parameter<Reading> =>
+  ofOneCell({ kind: 'quantity', help, unit, bounds }, (cell, name) => {
+    const reading = readTemperature(cell, name);
+    if (reading) return reading;
+    throw new InvalidInput(`${name} must be a number or text with a unit: got ${shownCell(cell)}`);
+  });
 
 /** @returns nothing for a gap: a blank cell, or text without a figure */
 function readTemperature(cell: CellValue, name: string, place?: () => string): Reading | undefined {
