@@ -1,12 +1,10 @@
 /**
- * `{40;"16,0"}` as it is meant: the engine (0.25.1) cuts at every comma and semicolon, inside words too,
- * and takes 1E-5 for a word.
+ * `{40;"16,0"}` as it is meant: the engine (0.25.1) cuts at every comma and semicolon, inside words too.
  */
 import {
   ArrayValueObject,
   StringValueObject,
   ValueObjectFactory,
-  NumberValueObject,
   type BaseValueObject,
 } from '@univerjs/engine-formula';
 
@@ -46,8 +44,7 @@ function rowsOf(inside: string): string[][] {
 
 function constant(text: string): BaseValueObject {
   const cell = text.trim();
-  if (/^".*"$/s.test(cell)) return StringValueObject.create(cell.slice(1, -1).replace(/""/g, '"'));
-  return cell !== '' && Number.isFinite(Number(cell))
-    ? NumberValueObject.create(Number(cell))
+  return /^".*"$/s.test(cell)
+    ? StringValueObject.create(cell.slice(1, -1).replace(/""/g, '"'))
     : ValueObjectFactory.create(cell);
 }

@@ -12,6 +12,7 @@ import { engineFunction, type EngineFunctionClass } from './engineFunction';
 import { exampleArguments } from './exampleArguments';
 import { containFaults } from './faults';
 import { mendLargeSpills } from './largeSpills';
+import { mendNumerals } from './numerals';
 import { noteMessages } from './words';
 
 export { forgetMessages, messageAt } from './words';
@@ -32,6 +33,7 @@ export interface FormulaPluginConfig {
 export function formulaPluginConfig(longWork?: LongWork): FormulaPluginConfig {
   mendArrayConstants();
   mendLargeSpills();
+  mendNumerals();
   containFaults();
   noteMessages();
   return {
