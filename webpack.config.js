@@ -1,6 +1,6 @@
 /**
  * Three builds:
- *   addin     what Excel loads: functions and pane in one bundle, one runtime   → dist/addin
+ *   addin     what Excel loads: functions and pane in one bundle, one runtime   → dist/addin, for scripts/package.ts
  *   workbook  the local workbook page: grid, pane, functions                    → dist/workbook
  *   commands  recalc, start and the rest, for Node                              → dist/commands
  * `webpack --config-name workbook` builds one of them.
@@ -31,16 +31,16 @@ const base = (name) => ({
 const addin = {
   ...base('addin'),
   entry: { addin: './taskpane/addin.ts' },
+  // a name that changes with its content can be kept by a browser for ever
+  output: { ...base('addin').output, filename: 'built/[name].[contenthash:12].js' },
   plugins: [
-    new MiniCssExtractPlugin(),
+    new MiniCssExtractPlugin({ filename: 'built/[name].[contenthash:12].css' }),
     new HtmlWebpackPlugin({
       filename: 'taskpane.html',
       template: './taskpane/taskpane.html',
       scriptLoading: 'defer',
     }),
-    new CopyWebpackPlugin({
-      patterns: ['manifest.xml', 'functions/functions.json', { from: 'assets', to: 'assets' }],
-    }),
+    new CopyWebpackPlugin({ patterns: [{ from: 'assets', to: 'assets' }] }),
   ],
 };
 

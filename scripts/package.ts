@@ -1,38 +1,32 @@
 /**
  * Makes the folder that a web server must offer so that Excel can load the add-in, with its help pages, and
- * the manifest that points there: `npm run package -- https://example.org/flaskpace OUT_FOLDER`.
+ * the manifest that points there: `npm run package -- --url https://example.org/flaskpace OUT_FOLDER`.
  */
-import { cpSync, existsSync, mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { readFileSync } from 'node:fs';
 import path from 'node:path';
 import { OfficeAddinManifest } from 'office-addin-manifest';
-import { catalogue } from '../functions/catalogue';
-import { helpFiles } from '../functions/help/files';
-import { functionsMetadata } from '../functions/metadata';
-import { asJson } from './derived';
-import { manifestFor, requireAddress } from './packaged';
+import { packagedFiles } from './package/files';
+import { readOptions, usage } from './package/options';
+import { versionAt } from './package/version';
+import { requireRoom, writeFiles } from './package/write';
 
-const usage = 'usage: npm run package -- https://where.it.will.stand/folder OUT_FOLDER';
-
-async function main(args: readonly string[]): Promise<void> {
-  const [address, out] = args;
-  if (args.length !== 2) throw new Error(usage);
-  const manifest = manifestFor(readFileSync('manifest.xml', 'utf8'), address);
-  if (existsSync(out) && readdirSync(out).length > 0)
-    throw new Error(`the folder must be empty: ${out} is not`);
-  cpSync(path.join('dist', 'addin'), out, { recursive: true });
-  writeFileSync(
-    path.join(out, 'functions.json'),
-    asJson(functionsMetadata(catalogue, { helpBase: `${requireAddress(address)}/help` })),
-  );
-  mkdirSync(path.join(out, 'help'));
-  for (const [name, content] of helpFiles(catalogue)) writeFileSync(path.join(out, 'help', name), content);
+async function main(words: readonly string[]): Promise<void> {
+  if (words.length === 0 || words.includes('--help') || words.includes('-h')) return void console.log(usage);
+  const { address, out, version = defaultVersion() } = readOptions(words);
+  requireRoom(out);
+  const manifest = readFileSync('manifest.xml', 'utf8');
+  writeFiles(out, packagedFiles(path.join('dist', 'addin'), manifest, address, version));
   const file = path.join(out, 'manifest.xml');
-  writeFileSync(file, manifest);
   // read back as Office's own tools read it
-  const { displayName, version, id } = await OfficeAddinManifest.readManifestFile(file);
+  const { displayName, version: written } = await OfficeAddinManifest.readManifestFile(file);
   console.log(
-    `${displayName} ${version} (${id}) is in ${out}: put the folder at ${address}, then load ${file} in Excel`,
+    `${displayName} ${written} is in ${out}: put the folder at ${address}, then load ${file} in Excel`,
   );
+}
+
+function defaultVersion(): string {
+  const { version } = JSON.parse(readFileSync('package.json', 'utf8')) as { version: string };
+  return versionAt(version, new Date());
 }
 
 main(process.argv.slice(2)).catch((error: unknown) => {

@@ -126,7 +126,7 @@ test('every address is https, on one host, and leads to a file that the build ma
     .flatMap(({ attributes }) => Object.values(attributes))
     .filter((value) => /^https:\/\/localhost/.test(value));
   expect(addresses.length).toBeGreaterThan(5);
-  const built = ['taskpane.html', 'addin.js', 'functions.json'];
+  const built = ['taskpane.html', 'addin.js', 'functions.json', 'help/index.html'];
   for (const address of addresses) {
     const file = fileOf(address);
     expect(new URL(address).origin).toBe('https://localhost:3000');
