@@ -1,7 +1,15 @@
 /** What a person can do in the pane. Actions alone both change the store and ask the workbook. */
 import { areaName } from '../functions/address';
 import { benchOf, guardedBy } from './actions/bench';
-import { changeRun, chooseSignal, lookForProposal, reread, selectedBlock, take } from './actions/look';
+import {
+  changeRun,
+  chooseSignal,
+  correctTable,
+  lookForProposal,
+  reread,
+  selectedBlock,
+  take,
+} from './actions/look';
 import { longWork } from './actions/longWork';
 import { readPointedAt } from './actions/pointing';
 import { putting } from './actions/put';
@@ -17,7 +25,7 @@ import type {
   TemperatureChoice,
 } from './choices';
 import type { WorkbookPort } from './port';
-import type { Run } from './runs';
+import type { Corrections, Run } from './runs';
 import type { Store } from './store';
 
 export interface Actions {
@@ -25,6 +33,8 @@ export interface Actions {
   chooseSelection(): Promise<void>;
   chooseProposal(): Promise<void>;
   changeRun(part: Partial<Run>): Promise<void>;
+  /** Reads the same cells in another way than was guessed. */
+  correctTable(part: Corrections): Promise<void>;
   openTask(task: Task): Promise<void>;
   changeSignal(what: string): Promise<void>;
   changeReading(part: Partial<ReadingChoice>): Promise<void>;
@@ -94,6 +104,10 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
     }),
     changeRun: guarded(async (part) => {
       changeRun(bench, part);
+      await settle();
+    }),
+    correctTable: guarded(async (part) => {
+      correctTable(bench, part);
       await settle();
     }),
     openTask: guarded(async (task) => {

@@ -41,7 +41,7 @@ export interface OrderChoice {
 export type ManyAnswer = 'survey' | 'order' | 'rate';
 
 export interface ManyChoice {
-  /** Columns of readings; `null` for all that are like the chosen run. */
+  /** By their keys; `null` for all that are like the chosen run. */
   readonly picked: readonly number[] | null;
   readonly answer: ManyAnswer;
 }

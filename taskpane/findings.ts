@@ -4,6 +4,7 @@ import { rawColumn } from '../functions/series/rawColumn';
 import { findings } from '../src/series/check/findings';
 import { nothingFound } from '../src/series/check/nothingFound';
 import { columnOf, type Run, type Table } from './runs';
+import { placeName } from './turned';
 
 export interface Concern {
   /** What was seen: `one row holds a number stored as text: "16,0"`. */
@@ -25,14 +26,15 @@ const asItStands = rawColumn({ help: 'as it stands' });
 
 export function checkRun(table: Table, run: Run): Check {
   const [times, values] = [run.timeColumn, run.readingColumn].map(
-    (column) => asItStands.read(columnOf(table, column, run).cells, 'column').cells,
+    (column) => asItStands.read(columnOf(table, column, run), 'column').cells,
   );
   const raw = { times, values };
   const concerns = findings(raw).map(({ places, ...words }) => ({
     ...words,
     where: placesInWords(
       places.map((place) => run.firstRow + place),
-      { rows: values.length, columns: 1 },
+      table.isTurned ? { rows: 1, columns: values.length } : { rows: values.length, columns: 1 },
+      (row) => placeName(row, table.isTurned),
     ),
   }));
   return { concerns, clean: concerns.length === 0 ? nothingFound(raw) : '' };

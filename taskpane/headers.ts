@@ -103,6 +103,17 @@ function headingAsWritten(text: string): Heading {
   return { text: trimmed, quantity: 'unknown', unit: '' };
 }
 
+/** A heading that names no unit, with the one that is known of it all the same. */
+export function withUnit(heading: Heading, unit: string): Heading {
+  if (heading.unit !== '' || unit.trim() === '') return heading;
+  const { quantity } = readHeading(`${heading.text} / ${unit.trim()}`);
+  return {
+    ...heading,
+    quantity: heading.quantity === 'unknown' ? quantity : heading.quantity,
+    unit: unit.trim(),
+  };
+}
+
 /** Is this cell a unit and nothing else, as on a row of units under the names? */
 export const isUnitOnly = (text: string): boolean => quantityOfUnit(bare(text)) !== 'unknown';
 

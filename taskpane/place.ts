@@ -1,56 +1,93 @@
-/** Where things are in the sheet around a run: headings above a selection, free cells beside it. */
+/** Where things are in the sheet around a run: headings beside a selection, free cells for an answer. */
 import { areaName, parseArea } from '../functions/address';
-import type { CellValue } from '../functions/cell';
+import type { CellRange, CellValue } from '../functions/cell';
+import type { Insertion } from './insertions/insertion';
 import type { RangeReading, SheetArea, WorkbookPort } from './port';
+import type { Run, Table } from './runs';
+import { turnedArea, turnedCells } from './turned';
 
 /** Names and units stand on one row or two. */
 const headingRows = 2;
 
 const isText = (cell: CellValue): boolean => typeof cell === 'string' && cell.trim() !== '';
 
-/** A selection of numbers alone, widened to the headings that stand right above it. */
-export async function withHeadingsAbove(port: WorkbookPort, selection: RangeReading): Promise<RangeReading> {
-  const { area, cells } = selection;
-  const above = Math.min(headingRows, area.row);
-  const startsWithNumbers = cells[0].filter((cell) => typeof cell === 'number').length >= 2;
-  if (above === 0 || !startsWithNumbers) return selection;
-  const wider = await port.read({ ...area, row: area.row - above, rows: area.rows + above });
-  const firstText = wider.cells.slice(0, above).findIndex((row) => row.some(isText));
-  const noHeading = firstText < 0 || wider.cells.slice(firstText, above).some((row) => !row.some(isText));
-  if (noHeading) return selection;
-  const cut = { ...wider.area, row: wider.area.row + firstText, rows: wider.area.rows - firstText };
-  return { area: cut, cells: wider.cells.slice(firstText) };
+/** A selection of numbers alone, widened to the headings that stand right above it, or else left of it. */
+export async function withHeadings(port: WorkbookPort, selection: RangeReading): Promise<RangeReading> {
+  return (await widened(port, selection, false)) ?? (await widened(port, selection, true)) ?? selection;
 }
 
-/** How far to the right a free place is looked for; a sheet ends at column XFD. */
+/** @returns nothing where there is no heading in every row looked at, from the first that has one on */
+async function widened(
+  port: WorkbookPort,
+  { area: selected, cells: selectedCells }: RangeReading,
+  isTurned: boolean,
+): Promise<RangeReading | null> {
+  const asRead = (area: SheetArea): SheetArea => (isTurned ? turnedArea(area) : area);
+  const cellsAsRead = (cells: CellRange): CellRange => (isTurned ? turnedCells(cells) : cells);
+  const area = asRead(selected);
+  const above = Math.min(headingRows, area.row);
+  const startsWithNumbers =
+    cellsAsRead(selectedCells)[0].filter((cell) => typeof cell === 'number').length >= 2;
+  if (above === 0 || !startsWithNumbers) return null;
+  const wider = await port.read(asRead({ ...area, row: area.row - above, rows: area.rows + above }));
+  const cells = cellsAsRead(wider.cells);
+  const isHeading = (row: readonly CellValue[]): boolean => (isTurned ? row.every(isText) : row.some(isText));
+  const firstText = cells.slice(0, above).findIndex(isHeading);
+  if (firstText < 0 || !cells.slice(firstText, above).every(isHeading)) return null;
+  const rows = above - firstText;
+  return {
+    area: asRead({ ...area, row: area.row - rows, rows: area.rows + rows }),
+    cells: cellsAsRead(cells.slice(firstText)),
+  };
+}
+
+/** How far a free place is looked for; a sheet ends at column XFD. */
 const farthest = 60;
 const lastColumn = 16383;
 
-/** The first cell right of the block where the answer and a heading above it fit into empty cells. */
+/**
+ * The first cell where the answer and its heading fit into empty cells: right of the table, and for a
+ * table whose runs stand in rows below it.
+ */
 export async function firstFree(
   port: WorkbookPort,
-  block: SheetArea,
-  row: number,
-  size: { readonly rows: number; readonly columns: number },
+  table: Table,
+  chosen: Run,
+  { size, isAlongRun = false, beside = chosen }: Insertion,
 ): Promise<string> {
-  const left = block.column + block.columns;
-  const top = Math.max(row - 1, 0);
-  const reach = Math.min(farthest, lastColumn - left + 1);
-  const strip: SheetArea = {
-    sheet: block.sheet,
-    row: top,
-    column: left,
-    rows: size.rows + 1,
-    columns: reach,
-  };
+  const asRead = (area: SheetArea): SheetArea => (table.isTurned ? turnedArea(area) : area);
+  const whole = asRead(table.area);
+  const end = whole.column + whole.columns;
+  const one = { sheet: table.sheet, rows: 1, columns: 1 };
+  if (isAlongRun || !table.isTurned) {
+    const answer = asRead({ ...one, row: 0, column: 0, ...size });
+    const top = Math.max(beside.firstRow - 1, 0);
+    const strip = { ...answer, row: top, rows: answer.rows + 1, column: end };
+    const column = await freeColumn(port, strip, asRead);
+    return areaName(asRead({ ...one, row: beside.firstRow, column }));
+  }
+  // a row left blank keeps it apart from the table, and its heading stands above it
+  const strip = { ...one, row: whole.row, rows: size.columns, column: end + 1, columns: size.rows + 1 };
+  const column = await freeColumn(port, strip, asRead);
+  return areaName(asRead({ ...one, row: whole.row, column: column + 1 }));
+}
+
+/** Where a strip of that height, moved along, first meets empty cells as wide as it is. */
+async function freeColumn(
+  port: WorkbookPort,
+  strip: SheetArea,
+  asRead: (area: SheetArea) => SheetArea,
+): Promise<number> {
+  const reach = Math.min(farthest, lastColumn - strip.column + 1);
   const taken = new Set<number>();
-  for (const name of await port.occupied(strip)) {
-    const area = parseArea(name);
+  for (const name of await port.occupied(asRead({ ...strip, columns: reach }))) {
+    const found = parseArea(name);
+    const area = found && asRead({ ...found, sheet: strip.sheet });
     for (let place = 0; area && place < area.columns; place++) taken.add(area.column + place);
   }
-  let column = left;
-  while (column < left + reach && hasAny(taken, column, size.columns)) column++;
-  return areaName({ sheet: block.sheet, row, column, rows: 1, columns: 1 });
+  let column = strip.column;
+  while (column < strip.column + reach && hasAny(taken, column, strip.columns)) column++;
+  return column;
 }
 
 const hasAny = (taken: ReadonlySet<number>, first: number, count: number): boolean =>

@@ -30,22 +30,33 @@ export function planFor(insertion: Insertion, sheet: string, put: PutChoice): Pl
   if (typeof target === 'string') return target;
   const { name, parts, size, reads } = insertion;
   const headings = put.withHeading ? insertion.headings : [];
-  if (headings.length > 0 && target.row === 0)
-    return 'row 1 leaves no room for a heading above: choose a lower cell, or no heading';
+  const isLeft = insertion.headingsStand === 'left';
+  if (headings.length > 0 && (isLeft ? target.column : target.row) === 0)
+    return isLeft
+      ? 'column A leaves no room for a heading left of it: choose a cell further right, or no heading'
+      : 'row 1 leaves no room for a heading above: choose a lower cell, or no heading';
   const answer = { ...target, ...size };
   const overlapped = reads.find((area) => meets(answer, area));
   if (overlapped)
     return `the answer would cover its own readings in ${areaName(overlapped)}: choose another cell`;
   return {
     cells: [
-      ...headings.map((value, place) => ({ area: cell(target, -1, place), content: { value } })),
+      ...headings.map((value, place) => ({
+        area: isLeft ? cell(target, place, -1) : cell(target, -1, place),
+        content: { value },
+      })),
       ...parts.map(({ down, right, ...rest }) => ({ area: cell(target, down, right), ...rest })),
     ],
-    area: headings.length > 0 ? { ...answer, row: answer.row - 1, rows: answer.rows + 1 } : answer,
+    area: headings.length > 0 ? withHeadings(answer, isLeft) : answer,
     target,
     description: `${name} in ${areaName(target)}`,
   };
 }
+
+const withHeadings = (answer: SheetArea, isLeft: boolean): SheetArea =>
+  isLeft
+    ? { ...answer, column: answer.column - 1, columns: answer.columns + 1 }
+    : { ...answer, row: answer.row - 1, rows: answer.rows + 1 };
 
 const cell = (target: SheetArea, down: number, right: number): SheetArea => ({
   ...target,

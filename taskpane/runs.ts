@@ -1,8 +1,8 @@
-/** A block of cells → the columns in it that are times or readings, and the run a person most likely means. */
-import { areaName, columnName } from '../functions/address';
+/** What a table and a run are, and what stands in them. */
 import type { CellRange, CellValue } from '../functions/cell';
-import { isUnitOnly, readHeading, type Heading } from './headers';
+import type { Heading } from './headers';
 import type { RangeReading, SheetArea } from './port';
+import { turnedArea, turnedCells } from './turned';
 
 export interface TableColumn {
   /** In the sheet, from 0. */
@@ -10,14 +10,44 @@ export interface TableColumn {
   readonly heading: Heading;
 }
 
-/** Columns of numbers under headings. Rows are the sheet's own, from 0. */
+/** Rows that belong to one of several runs under each other. */
+export interface Stretch {
+  readonly name: string;
+  readonly firstRow: number;
+  readonly lastRow: number;
+}
+
+/** What a person has said of a table in place of what was guessed. */
+export interface Corrections {
+  readonly isTurned?: boolean;
+  /** The column of run names; `null` where there is none. */
+  readonly names?: number | null;
+  /** By column, where its heading names none. */
+  readonly units?: Readonly<Record<number, string>>;
+}
+
+/**
+ * Columns of numbers under headings. Rows and columns are the sheet's own, from 0; where the runs stand in
+ * rows the table is read turned, so that a column here is a row of the sheet.
+ */
 export interface Table {
   readonly sheet: string;
+  /** As it stands in the sheet. */
   readonly area: SheetArea;
+  readonly isTurned: boolean;
+  /** As the table is read. */
   readonly cells: CellRange;
   readonly columns: readonly TableColumn[];
   readonly firstRow: number;
   readonly lastRow: number;
+  /** All that has a heading or holds something, words too: one of them may name the runs. */
+  readonly labels: readonly TableColumn[];
+  /** The column that names the runs, where several stand under each other. */
+  readonly names: number | null;
+  readonly stretches: readonly Stretch[];
+  /** In words, which runs do not lie together; empty where all do. */
+  readonly apart: string;
+  readonly corrections: Corrections;
 }
 
 /** One run: which column holds the times, which the readings, and the rows that count. */
@@ -29,47 +59,12 @@ export interface Run {
 }
 
 const isNumber = (cell: CellValue | undefined): cell is number => typeof cell === 'number';
-const isText = (cell: CellValue | undefined): cell is string =>
-  typeof cell === 'string' && cell.trim() !== '';
 
-/** @returns why there is no run in this block, in words, or the table */
-export function findTable({ area, cells }: RangeReading): Table | string {
-  const first = cells.findIndex((row) => row.filter(isNumber).length >= 2);
-  if (first < 0) return noNumbers(cells, area);
-  const last = cells.length - 1 - [...cells].reverse().findIndex((row) => row.some(isNumber));
-  const columns = Array.from({ length: area.columns }, (_, place) => place)
-    .filter((place) => isNumeric(cells.slice(first, last + 1).map((row) => row[place])))
-    .map((place) => ({
-      column: area.column + place,
-      heading: headingAbove(cells, first, place, area.column + place),
-    }));
-  if (columns.length < 2)
-    return `a run needs a column of times and a column of readings: ${areaName(area)} has one column of numbers`;
-  if (last - first < 1) return `a run needs two readings or more: ${areaName(area)} has one row of numbers`;
-  return { sheet: area.sheet, area, cells, columns, firstRow: area.row + first, lastRow: area.row + last };
-}
-
-function noNumbers(cells: CellRange, area: SheetArea): string {
-  return cells.flat().some(isNumber)
-    ? `a run needs a column of times and a column of readings, side by side: ${areaName(area)} has one column of numbers`
-    : `a run is made of numbers: ${areaName(area)} holds none`;
-}
-
-/** At least two numbers, and no more words than numbers. */
-function isNumeric(cells: readonly (CellValue | undefined)[]): boolean {
-  const numbers = cells.filter(isNumber).length;
-  return numbers >= 2 && numbers >= cells.filter(isText).length;
-}
-
-/** The words above the numbers; a row of units is read together with the names above it. */
-function headingAbove(cells: CellRange, first: number, place: number, column: number): Heading {
-  const [near, far] = [cells[first - 1]?.[place], cells[first - 2]?.[place]];
-  if (isText(near) && isText(far) && isUnitOnly(near)) {
-    return readHeading(`${far.trim()} / ${near.trim().replace(/^\((.*)\)$/, '$1')}`);
-  }
-  if (isText(near)) return readHeading(near);
-  return { text: `column ${columnName(column)}`, quantity: 'unknown', unit: '' };
-}
+/** The block that the table was found in. */
+export const blockOf = ({ area, cells, isTurned }: Table): RangeReading => ({
+  area,
+  cells: isTurned ? turnedCells(cells) : cells,
+});
 
 /** The time column that serves a reading: the nearest to its left, or the only one. */
 export function timeColumnFor(table: Table, readingColumn: number): number {
@@ -79,7 +74,7 @@ export function timeColumnFor(table: Table, readingColumn: number): number {
   return (toTheLeft[toTheLeft.length - 1] ?? candidates[0]).column;
 }
 
-/** The first column of readings with its times, over all rows. */
+/** The first column of readings with its times, over all rows or those of the first run. */
 export function proposeRun(table: Table): Run {
   const anyTime = table.columns.some(({ heading }) => heading.quantity === 'time');
   const reading =
@@ -88,26 +83,42 @@ export function proposeRun(table: Table): Run {
   const timeColumn = timeColumnFor(table, reading.column);
   const other = table.columns.find(({ column }) => column !== timeColumn)!;
   const readingColumn = reading.column === timeColumn ? other.column : reading.column;
-  return { timeColumn, readingColumn, firstRow: table.firstRow, lastRow: table.lastRow };
+  const { firstRow, lastRow } = table.stretches[0] ?? table;
+  return { timeColumn, readingColumn, firstRow, lastRow };
 }
+
+/** The rows that a run can have: of its stretch where several runs stand under each other. */
+export const limitsOf = (table: Table, row: number): Pick<Run, 'firstRow' | 'lastRow'> =>
+  stretchAt(table, row) ?? table;
+
+export const stretchAt = ({ stretches }: Table, row: number): Stretch | undefined =>
+  stretches.find(({ firstRow, lastRow }) => row >= firstRow && row <= lastRow);
 
 export function headingOf(table: Table, column: number): Heading {
   return table.columns.find((one) => one.column === column)!.heading;
 }
 
-/** The cells of one column over the run's rows, as an area and as values. */
-export function columnOf(table: Table, column: number, { firstRow, lastRow }: Run): RangeReading {
-  const area = { sheet: table.sheet, row: firstRow, column, rows: lastRow - firstRow + 1, columns: 1 };
-  const cells = table.cells
-    .slice(firstRow - table.area.row, lastRow - table.area.row + 1)
-    .map((row) => [row[column - table.area.column] ?? null]);
-  return { area, cells };
+/** Columns side by side over the run's rows, as the sheet names them. */
+export function areaOf(
+  { sheet, isTurned }: Table,
+  column: number,
+  { firstRow, lastRow }: Pick<Run, 'firstRow' | 'lastRow'>,
+  columns = 1,
+): SheetArea {
+  const area = { sheet, row: firstRow, column, rows: lastRow - firstRow + 1, columns };
+  return isTurned ? turnedArea(area) : area;
+}
+
+/** The cells of one column over the run's rows, one below the other however the table lies. */
+export function columnOf(table: Table, column: number, { firstRow, lastRow }: Run): CellRange {
+  const { row, column: left } = table.isTurned ? turnedArea(table.area) : table.area;
+  return table.cells.slice(firstRow - row, lastRow - row + 1).map((cells) => [cells[column - left] ?? null]);
 }
 
 /** Points of the run that are numbers on both sides, in the order of the sheet. */
 export function pointsOf(table: Table, run: Run): { readonly time: number; readonly value: number }[] {
-  const times = columnOf(table, run.timeColumn, run).cells;
-  const values = columnOf(table, run.readingColumn, run).cells;
+  const times = columnOf(table, run.timeColumn, run);
+  const values = columnOf(table, run.readingColumn, run);
   return times.flatMap(([time], row) => {
     const value = values[row][0];
     return isNumber(time) && isNumber(value) ? [{ time, value }] : [];

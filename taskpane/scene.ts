@@ -39,14 +39,14 @@ export interface Scene {
 
 /** A run as the strip shows it. */
 export interface Stamp {
-  readonly column: number;
+  readonly key: number;
   readonly name: string;
   readonly path: string;
 }
 
 const stampsOf = (table: Table, run: Run): Stamp[] =>
-  allRuns(table, run).map(({ heading, run: one }) => ({
-    column: one.readingColumn,
+  allRuns(table, run).map(({ key, heading, run: one }) => ({
+    key,
     name: heading.text,
     path: miniaturePath(table, one),
   }));

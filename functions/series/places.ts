@@ -1,11 +1,19 @@
 /** Rows of a range as a person counts them, many at a time. */
 import type { Column } from '../column';
 
-/** `row 7`, `rows 3 and 5`, `rows 3, 5 and 9 to 14`; a row of cells is counted in columns. */
-export function placesInWords(places: readonly number[], shape: Pick<Column, 'rows' | 'columns'>): string {
+/**
+ * `row 7`, `rows 3 and 5`, `rows 3, 5 and 9 to 14`; a row of cells is counted in columns.
+ *
+ * @param nameOf what a place is called, where it is not counted from 1
+ */
+export function placesInWords(
+  places: readonly number[],
+  shape: Pick<Column, 'rows' | 'columns'>,
+  nameOf: (place: number) => string = (place) => String(place + 1),
+): string {
   if (places.length === 0) return 'the whole run';
   const noun = shape.rows === 1 && shape.columns > 1 ? 'column' : 'row';
-  const stretches = stretchesOf(places).flatMap(inWords);
+  const stretches = stretchesOf(places).flatMap((stretch) => inWords(stretch, nameOf));
   const said = stretches.length > longest ? [...stretches.slice(0, longest), 'more'] : stretches;
   const list = said.length < 2 ? said[0] : `${said.slice(0, -1).join(', ')} and ${said[said.length - 1]}`;
   return `${noun}${places.length === 1 ? '' : 's'} ${list}`;
@@ -27,7 +35,7 @@ function stretchesOf(places: readonly number[]): Stretch[] {
 }
 
 /** Two rows are named both; three or more by the first and the last. */
-function inWords([first, last]: Stretch): string[] {
-  if (last - first >= 2) return [`${first + 1} to ${last + 1}`];
-  return first === last ? [`${first + 1}`] : [`${first + 1}`, `${last + 1}`];
+function inWords([first, last]: Stretch, nameOf: (place: number) => string): string[] {
+  if (last - first >= 2) return [`${nameOf(first)} to ${nameOf(last)}`];
+  return first === last ? [nameOf(first)] : [nameOf(first), nameOf(last)];
 }

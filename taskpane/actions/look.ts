@@ -1,34 +1,63 @@
 /** Looking at the sheet: which block is the run, and what stands in it now. */
 import { rises } from '../calls/order';
-import { columnName } from '../../functions/address';
 import type { RateChoice } from '../choices';
-import { withHeadingsAbove } from '../place';
-import type { RangeReading, SheetArea } from '../port';
-import { findTable, headingOf, pointsOf, proposeRun, timeColumnFor, type Run, type Table } from '../runs';
+import { findTable } from '../findTable';
+import { withHeadings } from '../place';
+import type { RangeReading } from '../port';
+import {
+  blockOf,
+  headingOf,
+  limitsOf,
+  pointsOf,
+  proposeRun,
+  timeColumnFor,
+  type Corrections,
+  type Run,
+  type Table,
+} from '../runs';
 import { functionOf, knownInputs, signalFor } from '../signals';
+import { unnamed } from '../turned';
 import type { Bench } from './bench';
 
 export async function selectedBlock({ port }: Bench): Promise<RangeReading | null> {
   const selection = await port.selection();
   const isBlock = selection && selection.area.rows > 1;
-  return isBlock ? withHeadingsAbove(port, selection) : port.regionAroundActiveCell();
+  return isBlock ? withHeadings(port, selection) : port.regionAroundActiveCell();
 }
 
 /** @returns why the block is no run; empty when it has become the run */
 export function take({ store }: Bench, block: RangeReading): string {
   const table = findTable(block);
   if (typeof table === 'string') return table;
-  const run = proposeRun(table);
-  store.change({ table, run, survey: null, proposal: null, hint: '', notice: null });
-  beginWith({ store }, table, run);
-  store.choose('put', { isOwn: false, question: null });
+  beginWith({ store }, table);
   return '';
 }
 
-/** What each step begins with on another run. */
-function beginWith({ store }: Pick<Bench, 'store'>, table: Table, run: Run): void {
+/** The same cells, read as the person says. */
+export function correctTable({ store }: Bench, part: Corrections): void {
+  const { table, run } = store.state;
+  if (!table || !run) return;
+  // columns named before are others once the table is turned
+  const corrections = part.isTurned === undefined ? { ...table.corrections, ...part } : part;
+  const found = findTable(blockOf(table), corrections);
+  if (typeof found === 'string') return store.change({ hint: found });
+  if (part.units === undefined) return beginWith({ store }, found);
+  const before = headingOf(table, run.readingColumn).quantity;
+  store.change({ table: found, survey: null });
+  const heading = headingOf(found, run.readingColumn);
+  if (heading.quantity !== before) chooseSignal({ store }, signalFor(heading));
+}
+
+/** The table's first run, and what each step begins with on it. */
+function beginWith({ store }: Pick<Bench, 'store'>, table: Table): void {
+  const run = proposeRun(table);
+  store.change({ table, run, survey: null, proposal: null, hint: '', notice: null });
+  store.choose('put', { isOwn: false, question: null });
   store.choose('rate', startingTimes(table, run));
   store.choose('many', { picked: null });
+  // runs below each other make no block that one formula could survey
+  if (table.stretches.length > 0 && store.state.many.answer === 'survey')
+    store.choose('many', { answer: 'order' });
   store.choose('temperature', { temperatures: null, coefficients: null, uncertainties: null, at: '' });
   if (headingOf(table, run.timeColumn).quantity === 'temperature') store.change({ task: 'temperature' });
   store.choose('order', { endpointKind: rises(table, run) ? 'free' : 'zero', endpoint: '' });
@@ -49,23 +78,33 @@ export async function reread({ store, port }: Bench): Promise<void> {
   if (!table || !run) return;
   const fresh = await port.read(table.area).catch(() => null);
   if (store.state.table?.area !== table.area || (fresh && isSameCells(fresh, table))) return;
-  const found = fresh && findTable(fresh);
+  const { corrections, isTurned } = table;
+  const found = fresh && findTable(fresh, { ...corrections, isTurned });
   if (found === null || typeof found === 'string')
     store.change({ table: null, run: null, survey: null, proposal: null });
-  else
-    store.change({ table: { ...table, cells: found.cells, columns: renewed(table, found) }, survey: null });
+  else {
+    const { cells, stretches, apart } = found;
+    store.change({
+      table: { ...table, cells, stretches, apart, columns: renewed(table, found) },
+      survey: null,
+    });
+  }
 }
 
 /** Columns stay what they are, under the headings that stand above them now. */
 const renewed = (table: Table, found: Table): Table['columns'] =>
   table.columns.map((one) => {
     const now = found.columns.find(({ column }) => column === one.column);
-    return now && now.heading.text !== `column ${columnName(one.column)}` ? now : one;
+    return now && now.heading.text !== unnamed(one.column, table.isTurned) ? now : one;
   });
 
-const isSameCells = ({ cells }: RangeReading, table: Table): boolean =>
-  cells.length === table.cells.length &&
-  cells.every((row, r) => row.every((cell, c) => Object.is(cell, table.cells[r][c])));
+function isSameCells({ cells }: RangeReading, table: Table): boolean {
+  const { cells: known } = blockOf(table);
+  return (
+    cells.length === known.length &&
+    cells.every((row, r) => row.every((cell, c) => Object.is(cell, known[r][c])))
+  );
+}
 
 export async function lookForProposal(bench: Bench): Promise<void> {
   const { store } = bench;
@@ -77,13 +116,16 @@ export async function lookForProposal(bench: Bench): Promise<void> {
     else store.change({ hint: typeof found === 'string' ? found : '' });
     return;
   }
-  const isNew = found && typeof found === 'object' && !isSameBlock(found.area, table.area);
+  const isNew = found && typeof found === 'object' && !isSameBlock(found, table);
   store.change({ proposal: isNew ? block : null, hint: '' });
 }
 
-/** A block that begins where the run's does and reaches as far down is the run, grown by what was written beside it. */
-const isSameBlock = (a: SheetArea, b: SheetArea): boolean =>
-  a.sheet === b.sheet && a.row === b.row && a.column === b.column && a.rows === b.rows;
+/** A block that begins where the run's does and is as long is the run, grown by what was written beside it. */
+const isSameBlock = ({ area: a }: Table, { area: b, isTurned }: Table): boolean =>
+  a.sheet === b.sheet &&
+  a.row === b.row &&
+  a.column === b.column &&
+  (isTurned ? a.columns === b.columns : a.rows === b.rows);
 
 /** Times to begin with: the whole run for an average, the middle reading for a tangent. */
 function startingTimes(table: Table, run: Run): Partial<RateChoice> {
@@ -113,7 +155,8 @@ function settledRun(table: Table, run: Run, part: Partial<Run>): Run {
     part.readingColumn !== undefined && part.timeColumn === undefined
       ? timeColumnFor(table, part.readingColumn)
       : next.timeColumn;
-  const within = (row: number): number => Math.min(Math.max(row, table.firstRow), table.lastRow);
+  const limits = limitsOf(table, next.firstRow);
+  const within = (row: number): number => Math.min(Math.max(row, limits.firstRow), limits.lastRow);
   const firstRow = within(next.firstRow);
   return { ...next, timeColumn, firstRow, lastRow: Math.max(within(next.lastRow), firstRow) };
 }

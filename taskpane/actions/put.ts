@@ -7,6 +7,7 @@ import { firstFree } from '../place';
 import { planFor, type Plan } from '../plan';
 import { CellsInUse, type CellToWrite, type SheetArea, type WriteReceipt } from '../port';
 import type { Deed, State } from '../store';
+import { turnedArea } from '../turned';
 import type { Bench } from './bench';
 import { adoptColumn } from './adopt';
 import type { LongWork } from './longWork';
@@ -37,9 +38,9 @@ export function putting(bench: Bench, work: LongWork): Putting {
     if (mine === question) store.choose('put', { inUse });
   }
 
-  async function placeFor({ isAtActiveCell, size }: Insertion): Promise<string> {
+  async function placeFor(insertion: Insertion): Promise<string> {
     const { table, run } = store.state;
-    if (!isAtActiveCell && table && run) return firstFree(port, table.area, run.firstRow, size);
+    if (!insertion.isAtActiveCell && table && run) return firstFree(port, table, run, insertion);
     const cell = await port.activeCell();
     return cell ? areaName(cell) : '';
   }
@@ -95,8 +96,9 @@ export function putting(bench: Bench, work: LongWork): Putting {
     const { table, run, reading, pointedAt } = store.state;
     const answer = table && run && readingAnswer(table, run, reading, { sheet: table.sheet, pointedAt });
     if (answer?.kind !== 'column') return false;
-    if (!(await adoptColumn(bench, plan, headings[0], answer.cells))) return false;
-    changeRun(bench, { readingColumn: plan.target.column, timeColumn: run!.timeColumn });
+    const readingColumn = await adoptColumn(bench, plan, headings[0], answer.cells);
+    if (readingColumn === null) return false;
+    changeRun(bench, { readingColumn, timeColumn: run!.timeColumn });
     return true;
   }
 
@@ -127,10 +129,9 @@ const inBits = (cells: readonly CellToWrite[]): (readonly CellToWrite[])[] =>
 
 /** The run has gone on with the column that is taken away. */
 function meansWritten({ receipts }: Deed, { table, run }: State): boolean {
-  return receipts.some(
-    ({ area }) => area.sheet === table?.sheet && run !== null && holds(area, run.readingColumn),
-  );
+  return receipts.some(({ area }) => {
+    if (!table || !run || area.sheet !== table.sheet) return false;
+    const { column, columns } = table.isTurned ? turnedArea(area) : area;
+    return run.readingColumn >= column && run.readingColumn < column + columns;
+  });
 }
-
-const holds = ({ column, columns }: SheetArea, other: number): boolean =>
-  other >= column && other < column + columns;

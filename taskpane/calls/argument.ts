@@ -1,7 +1,8 @@
 /** What is typed into a field → an argument of a cell function: its value, and how a formula says it. */
 import { areaName, parseArea } from '../../functions/address';
 import type { CellRange, CellResult } from '../../functions/cell';
-import { columnOf, type Run, type Table } from '../runs';
+import { areaOf, columnOf, type Run, type Table } from '../runs';
+import { turnedCells } from '../turned';
 
 export interface Argument {
   readonly value: CellResult | undefined;
@@ -50,7 +51,14 @@ export function argumentOf(typed: string, { sheet, pointedAt }: Pointing, isWord
   return { value: cells.length === 1 && cells[0].length === 1 ? cells[0][0] : cells, text: name };
 }
 
+/** In the shape in which the sheet holds it, so that a refusal names the same places. */
 export function columnArgument(table: Table, run: Run, column: number): Argument {
-  const { area, cells } = columnOf(table, column, run);
-  return { value: cells, text: areaName(area) };
+  return {
+    value: inShapeOf(table, columnOf(table, column, run)),
+    text: areaName(areaOf(table, column, run)),
+  };
 }
+
+/** What was read turned, as the sheet holds it; and an answer in its shape, as the table is read. */
+export const inShapeOf = ({ isTurned }: Table, cells: CellRange): CellRange =>
+  isTurned ? turnedCells(cells) : cells;

@@ -184,7 +184,7 @@ function unitText(order: number, concentration: string, time: string): string {
 /** For a rising run the end is asked for: nothing says where it lies. */
 export function rises(table: Table, run: Run): boolean {
   const values = columnOf(table, run.readingColumn, run)
-    .cells.flat()
+    .flat()
     .filter((cell) => typeof cell === 'number');
   return values.length > 1 && values[values.length - 1] > values[0];
 }

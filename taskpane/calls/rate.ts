@@ -2,7 +2,15 @@
 import { CellError, isRange, type CellResult } from '../../functions/cell';
 import type { RateChoice, RateKind } from '../choices';
 import type { Run, Table } from '../runs';
-import { argumentOf, columnArgument, leftOut, truth, type Argument, type Pointing } from './argument';
+import {
+  argumentOf,
+  inShapeOf,
+  columnArgument,
+  leftOut,
+  truth,
+  type Argument,
+  type Pointing,
+} from './argument';
 import { ask, formulaText, refusalOf } from './call';
 import { readEstimate, type Estimate } from './estimate';
 
@@ -64,7 +72,7 @@ export function rateAnswer(table: Table, run: Run, rate: RateChoice, pointing: P
   const result: CellResult = ask(functionFor[rate.kind], argumentsFor(table, run, rate, pointing, true));
   if (result instanceof CellError) return refusal(result, rate.kind);
   const rows = isRange(result) ? result : [[result]];
-  if (rate.kind === 'column') return { kind: 'column', rates: rows.map(readEstimate) };
+  if (rate.kind === 'column') return { kind: 'column', rates: inShapeOf(table, rows).map(readEstimate) };
   const one = readEstimate(rows[0]);
   if (one) return { kind: 'one', rate: one };
   const [cell] = rows[0];

@@ -5,7 +5,7 @@ import type { ReadingChoice } from '../choices';
 import type { Heading } from '../headers';
 import { headingOf, type Run, type Table } from '../runs';
 import { fieldsOf, functionOf, readingsParameter, signalNamed } from '../signals';
-import { argumentOf, columnArgument, leftOut, type Argument, type Pointing } from './argument';
+import { argumentOf, inShapeOf, columnArgument, leftOut, type Argument, type Pointing } from './argument';
 import { ask, formulaText, refusalOf } from './call';
 
 function argumentsFor(
@@ -40,7 +40,7 @@ export type ReadingAnswer =
   | { readonly kind: 'missing'; readonly names: readonly string[] }
   /** `field` is the parameter the words speak of, where they name one. */
   | { readonly kind: 'refused'; readonly words: string; readonly field: string | null }
-  /** A cell a reading. */
+  /** A cell a reading, below each other however the table lies. */
   | { readonly kind: 'column'; readonly cells: CellRange };
 
 export function readingAnswer(
@@ -55,7 +55,8 @@ export function readingAnswer(
   const missing = fields.filter(({ name, parameter }) => !parameter.optional && !choice.inputs[name]?.trim());
   if (missing.length > 0) return { kind: 'missing', names: missing.map(({ name }) => name) };
   const result = ask(f.name, argumentsFor(f, table, run, choice, pointing));
-  if (!(result instanceof CellError)) return { kind: 'column', cells: isRange(result) ? result : [[result]] };
+  if (!(result instanceof CellError))
+    return { kind: 'column', cells: isRange(result) ? inShapeOf(table, result) : [[result]] };
   const words = refusalOf(result);
   return {
     kind: 'refused',

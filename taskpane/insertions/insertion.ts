@@ -1,6 +1,7 @@
 /** What a step would write: its formulas and their headings, in places counted from the cell they are put at. */
 import { standardRowHeadings } from '../../functions/results';
 import type { CellToWrite, SheetArea } from '../port';
+import type { Run, Table } from '../runs';
 
 export interface Size {
   readonly rows: number;
@@ -18,12 +19,17 @@ export interface Insertion {
   readonly parts: readonly Part[];
   /** Of all that stands below the headings. */
   readonly size: Size;
-  /** Written above when asked for, one a column; none where the answer brings its own. */
+  /** Written when asked for, above each column or left of each row; none where the answer brings its own. */
   readonly headings: readonly string[];
+  readonly headingsStand?: 'above' | 'left';
   /** The cells that it reads, which it must not cover. */
   readonly reads: readonly SheetArea[];
   /** Whether uncertainty and limits can stand beside the value. */
   readonly hasDetail: boolean;
+  /** Whether it has a cell a reading, and stands beside them. */
+  readonly isAlongRun?: boolean;
+  /** The run it begins beside, where that is not the chosen one. */
+  readonly beside?: Run;
   /** Whether it goes to the active cell, rather than beside the run. */
   readonly isAtActiveCell?: boolean;
   /** Whether the run goes on with the column it puts in. */
@@ -35,6 +41,25 @@ export function oneFormula(formula: string, size: Size): Pick<Insertion, 'parts'
   const spills = size.rows * size.columns > 1 ? { spills: size } : {};
   return { parts: [{ down: 0, right: 0, content: { formula }, ...spills }], size };
 }
+
+/** What has a cell a reading lies as the run does: in a row beside a row, its headings left of it. */
+export function alongRun({ isTurned }: Table, insertion: Insertion): Insertion {
+  if (!isTurned) return { ...insertion, isAlongRun: true };
+  return {
+    ...insertion,
+    parts: insertion.parts.map(({ down, right, spills, ...rest }) => ({
+      ...rest,
+      down: right,
+      right: down,
+      ...(spills && { spills: turnedSize(spills) }),
+    })),
+    size: turnedSize(insertion.size),
+    headingsStand: 'left',
+    isAlongRun: true,
+  };
+}
+
+const turnedSize = ({ rows, columns }: Size): Size => ({ rows: columns, columns: rows });
 
 /** `/ mL`, `/ (mL/s)`; words stand in brackets of their own. */
 function inUnit(unit: string): string {

@@ -2,7 +2,7 @@ import { areaName } from '../../functions/address';
 import { isOneBlock, pickedRuns, surveyLaw, type OneOfMany } from '../calls/many';
 import { columnArgument } from '../calls/argument';
 import { formulaText } from '../calls/call';
-import { columnOf, type Run, type Table } from '../runs';
+import { areaOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
 import { oneFormula, type Insertion, type Part } from './insertion';
 import { orderInsertion } from './order';
@@ -17,7 +17,8 @@ export function manyInsertion(table: Table, run: Run, state: State): Insertion |
   if (runs.length === 0) return null;
   if (state.many.answer === 'survey') return surveyInsertion(table, runs, state);
   const each = runs.map((one) => insertionOf(table, one.run, state));
-  return each[0].size.rows === 1 ? inRows(table, runs, each) : inColumns(table, runs, each);
+  if (!each[0].isAlongRun) return inRows(table, runs, each);
+  return table.stretches.length > 0 ? inStretches(table, runs, each) : inLines(table, runs, each);
 }
 
 function insertionOf(table: Table, run: Run, state: State): Insertion {
@@ -43,8 +44,8 @@ function surveyInsertion(
 ): Insertion | null {
   if (!isOneBlock(runs)) return null;
   const [{ run }] = runs;
-  const first = columnOf(table, run.readingColumn, run).area;
-  const block = { value: undefined, text: areaName({ ...first, columns: runs.length }) };
+  const area = areaOf(table, run.readingColumn, run, runs.length);
+  const block = { value: undefined, text: areaName(area) };
   const args = [
     columnArgument(table, run, run.timeColumn),
     block,
@@ -72,22 +73,52 @@ function inRows(table: Table, runs: readonly OneOfMany[], each: readonly Inserti
     headings: ['run', ...headings],
     reads: readsOfAll(table, runs),
     hasDetail,
+    beside: runs[0].run,
   };
 }
 
-/** Columns beside each other, under the name of each run. */
-function inColumns(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
-  const [{ name, hasDetail, size }] = each;
+/** Columns beside each other, under the name of each run; rows below each other where runs stand in rows. */
+function inLines(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
+  const [{ size }] = each;
+  const { isTurned } = table;
   return {
-    name: counted(name, runs.length),
+    ...each[0],
+    name: counted(each[0].name, runs.length),
     parts: each.flatMap(({ parts }, place) =>
-      parts.map((part) => ({ ...part, right: part.right + place * size.columns })),
+      parts.map((part) => moved(part, isTurned ? [place * size.rows, 0] : [0, place * size.columns])),
     ),
-    size: { rows: size.rows, columns: size.columns * each.length },
+    size: isTurned
+      ? { ...size, rows: size.rows * each.length }
+      : { ...size, columns: size.columns * each.length },
     headings: each.flatMap(({ headings }, place) =>
       headings.map((heading) => `${runs[place].heading.text}: ${heading}`),
     ),
     reads: readsOfAll(table, runs),
-    hasDetail,
   };
 }
+
+/** One column through all runs, each answer in the rows of its own run. */
+function inStretches(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
+  const top = runs[0].run.firstRow;
+  const { lastRow } = runs[runs.length - 1].run;
+  const { isTurned } = table;
+  const [{ size }] = each;
+  const rows = lastRow - top + 1;
+  return {
+    ...each[0],
+    name: counted(each[0].name, runs.length),
+    parts: each.flatMap(({ parts }, place) => {
+      const below = runs[place].run.firstRow - top;
+      return parts.map((part) => moved(part, isTurned ? [0, below] : [below, 0]));
+    }),
+    size: isTurned ? { ...size, columns: rows } : { ...size, rows },
+    reads: readsOfAll(table, runs),
+    beside: runs[0].run,
+  };
+}
+
+const moved = (part: Part, [down, right]: readonly [number, number]): Part => ({
+  ...part,
+  down: part.down + down,
+  right: part.right + right,
+});

@@ -2,7 +2,7 @@ import { coefficientUnit, givenBy, orderFormula } from '../calls/order';
 import type { OrderChoice } from '../choices';
 import { headingOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
-import { detailColumns, headingsFor, oneFormula, type Insertion, type Size } from './insertion';
+import { alongRun, detailColumns, headingsFor, oneFormula, type Insertion, type Size } from './insertion';
 import { readsOf } from './rate';
 
 /** Of the table that PACE.ORDERS answers: its headings, six simple orders and the free one. */
@@ -18,13 +18,14 @@ export function orderInsertion(
   const detail = hasDetail && withDetail;
   const formula = orderFormula(givenBy(table, run, order, { sheet: table.sheet, pointedAt }), order, detail);
   const name = orderName(order);
-  return {
+  const insertion: Insertion = {
     name,
     ...oneFormula(formula, sizeOf(order, run, detail)),
     headings: order.answer === 'orders' ? [] : headingsFor(name, unitFor(table, run, order), detail),
     reads: readsOf(table, run),
     hasDetail,
   };
+  return order.answer === 'curve' ? alongRun(table, insertion) : insertion;
 }
 
 function sizeOf({ answer }: OrderChoice, run: Run, detail: boolean): Size {

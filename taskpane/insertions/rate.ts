@@ -1,9 +1,9 @@
 import { rateFormula } from '../calls/rate';
 import type { RateChoice } from '../choices';
 import { rateUnit } from '../headers';
-import { columnOf, headingOf, type Run, type Table } from '../runs';
+import { areaOf, headingOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
-import { detailColumns, headingsFor, oneFormula, type Insertion } from './insertion';
+import { alongRun, detailColumns, headingsFor, oneFormula, type Insertion } from './insertion';
 
 /** `rate at 30 s`: for headings and messages. */
 export function rateName(table: Table, run: Run, rate: RateChoice): string {
@@ -23,7 +23,7 @@ export function rateInsertion(
 ): Insertion {
   const name = rateName(table, run, rate);
   const unit = rateUnit(headingOf(table, run.readingColumn), headingOf(table, run.timeColumn));
-  return {
+  const insertion: Insertion = {
     name,
     ...oneFormula(rateFormula(table, run, rate, { sheet: table.sheet, pointedAt }, withDetail), {
       rows: rate.kind === 'column' ? run.lastRow - run.firstRow + 1 : 1,
@@ -33,7 +33,8 @@ export function rateInsertion(
     reads: readsOf(table, run),
     hasDetail: true,
   };
+  return rate.kind === 'column' ? alongRun(table, insertion) : insertion;
 }
 
 export const readsOf = (table: Table, run: Run): Insertion['reads'] =>
-  [run.timeColumn, run.readingColumn].map((column) => columnOf(table, column, run).area);
+  [run.timeColumn, run.readingColumn].map((column) => areaOf(table, column, run));

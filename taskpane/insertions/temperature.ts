@@ -1,6 +1,6 @@
 import { standardRowHeadings } from '../../functions/results';
 import { columnsFor, temperatureFormula } from '../calls/temperature';
-import { columnOf, headingOf, type Run, type Table } from '../runs';
+import { areaOf, headingOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
 import { detailColumns, headingsFor, oneFormula, type Insertion } from './insertion';
 
@@ -13,9 +13,7 @@ export function temperatureInsertion(
   const pointing = { sheet: table.sheet, pointedAt };
   const formula = temperatureFormula(table, run, temperature, pointing, withDetail);
   const columns = columnsFor(table, temperature);
-  const reads = [columns.temperatures, columns.coefficients].map(
-    (column) => columnOf(table, column, run).area,
-  );
+  const reads = [columns.temperatures, columns.coefficients].map((column) => areaOf(table, column, run));
   const { unit } = headingOf(table, columns.coefficients);
   if (temperature.answer === 'energy')
     return { ...(withDetail ? twoRows(formula) : oneEnergy(formula)), reads, hasDetail: true };

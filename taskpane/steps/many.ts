@@ -34,10 +34,10 @@ export function manyStep({ state, stamps, picked, insertion }: Scene, actions: A
     h(
       'div',
       { className: 'row' },
-      button('All', () => void actions.changeMany({ picked: stamps.map(({ column }) => column) }), 'small'),
+      button('All', () => void actions.changeMany({ picked: stamps.map(({ key }) => key) }), 'small'),
       button('None', () => void actions.changeMany({ picked: [] }), 'small'),
     ),
-    strip(stamps, new Set(picked.map((one) => one.run.readingColumn)), actions),
+    strip(stamps, new Set(picked.map(({ key }) => key)), actions),
     selectField(
       'many-answer',
       'What to put in',
@@ -49,7 +49,7 @@ export function manyStep({ state, stamps, picked, insertion }: Scene, actions: A
       h(
         'p',
         { className: 'problem' },
-        'a survey takes runs that share their times and stand side by side: pick such, or a formula each',
+        'one survey takes runs that share their times and stand side by side: pick such, or a formula each',
       ),
     first !== undefined && formulaLine(first, actions),
     progress
@@ -63,27 +63,27 @@ export function manyStep({ state, stamps, picked, insertion }: Scene, actions: A
 }
 
 function strip(stamps: readonly Stamp[], picked: ReadonlySet<number>, actions: Actions): HTMLElement {
-  const toggled = (column: number): number[] =>
-    picked.has(column) ? [...picked].filter((other) => other !== column) : [...picked, column];
+  const toggled = (key: number): number[] =>
+    picked.has(key) ? [...picked].filter((other) => other !== key) : [...picked, key];
   return h(
     'ul',
     { className: 'stamps', 'aria-label': 'runs' },
-    ...stamps.map(({ column, name, path }) =>
+    ...stamps.map(({ key, name, path }) =>
       h(
         'li',
         {},
         h(
           'label',
-          { for: `run-${column}` },
+          { for: `run-${key}` },
           miniature(path),
           h(
             'span',
             {},
             h('input', {
-              id: `run-${column}`,
+              id: `run-${key}`,
               type: 'checkbox',
-              checked: picked.has(column),
-              onchange: () => void actions.changeMany({ picked: toggled(column) }),
+              checked: picked.has(key),
+              onchange: () => void actions.changeMany({ picked: toggled(key) }),
             }),
             name,
           ),

@@ -123,7 +123,7 @@ function ratesByTime(
   run: Run,
   rates: readonly (Estimate | null)[],
 ): { time: number; rate: Estimate }[] {
-  const times = columnOf(table, run.timeColumn, run).cells;
+  const times = columnOf(table, run.timeColumn, run);
   return rates.flatMap((rate, row) => {
     const time = times[row]?.[0];
     return rate && typeof time === 'number' ? [{ time, rate }] : [];

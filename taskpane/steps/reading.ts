@@ -93,7 +93,7 @@ function drawing(f: CellFunction, table: Table, run: Run, answer: ReadingAnswer)
   if (answer.kind !== 'column') return [];
   const { text, unit } = convertedHeading(f, table, run);
   const [heading] = headingsFor(text, unit, false);
-  const times = columnOf(table, run.timeColumn, run).cells;
+  const times = columnOf(table, run.timeColumn, run);
   const points = times.flatMap(([time], row) => {
     const value = answer.cells[row]?.[0];
     return typeof time === 'number' && typeof value === 'number' ? [{ time, value }] : [];

@@ -2,12 +2,14 @@
 import { areaName } from '../../functions/address';
 import { shown } from '../../src/errors';
 import type { Actions } from '../actions';
-import { h } from '../h';
-import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
+import { h, type Child } from '../h';
+import { columnOf, headingOf, limitsOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
+import { placeName } from '../turned';
 import { columnField } from './columnField';
 import { findingsList } from './findings';
-import { button, selectField, step, type Choice } from './fields';
+import { button, selectField, step, textField, type Choice } from './fields';
+import { howItIsRead } from './howItIsRead';
 
 export function runStep(
   { state: { table, run, proposal, hint }, check }: Scene,
@@ -30,6 +32,7 @@ export function runStep(
     'run',
     'Run',
     h('p', { className: 'where' }, areaName(table.area)),
+    ...runField(table, run, actions),
     h(
       'div',
       { className: 'pair' },
@@ -39,17 +42,53 @@ export function runStep(
       columnField('reading-column', 'Readings', table, run.readingColumn, (readingColumn) =>
         actions.changeRun({ readingColumn }),
       ),
-      rowField('first-row', 'From row', table, run, 'firstRow', actions),
-      rowField('last-row', 'To row', table, run, 'lastRow', actions),
+      unitField('time-unit', 'Unit of times', table, run.timeColumn, actions),
+      unitField('reading-unit', 'Unit of readings', table, run.readingColumn, actions),
+      rowField('first-row', 'From', table, run, 'firstRow', actions),
+      rowField('last-row', 'To', table, run, 'lastRow', actions),
     ),
     h('p', { className: 'hint' }, pointsInWords(table, run)),
+    table.apart !== '' && h('p', { className: 'problem' }, `${table.apart}.`),
     hint !== '' && h('p', { className: 'problem', role: 'alert' }, hint),
+    howItIsRead(table, actions),
     proposal
       ? button(`Use ${areaName(proposal.area)} instead`, () => void actions.chooseProposal())
       : button('Use the selected cells', () => void actions.chooseSelection()),
     isFollowedInTime(table, run) && check && findingsList(check),
     caution(table, run),
   );
+}
+
+/** Which of several runs under each other. */
+function runField({ stretches }: Table, { firstRow: chosen }: Run, actions: Actions): Child[] {
+  if (stretches.length === 0) return [];
+  const current = stretches.find(({ firstRow, lastRow }) => chosen >= firstRow && chosen <= lastRow);
+  return [
+    selectField(
+      'run-name',
+      `Run, of ${stretches.length}`,
+      stretches.map(({ name, firstRow }) => ({ value: String(firstRow), label: name })),
+      String(current?.firstRow ?? ''),
+      (value) => {
+        const { firstRow, lastRow } = stretches.find((one) => String(one.firstRow) === value)!;
+        void actions.changeRun({ firstRow, lastRow });
+      },
+    ),
+  ];
+}
+
+/** Asked for only where the heading does not say it. */
+function unitField(id: string, label: string, table: Table, column: number, actions: Actions): Child {
+  const { units = {} } = table.corrections;
+  if (units[column] === undefined && headingOf(table, column).unit !== '') return null;
+  return textField({
+    id,
+    label,
+    value: units[column] ?? '',
+    numeric: false,
+    whenEmpty: 'heading says none',
+    onInput: (unit) => void actions.correctTable({ units: { ...units, [column]: unit } }),
+  });
 }
 
 /** So many rows still make a list that can be picked from; beyond, every nth. */
@@ -63,18 +102,19 @@ function rowField(
   which: 'firstRow' | 'lastRow',
   actions: Actions,
 ): HTMLElement {
-  const all = { ...run, firstRow: table.firstRow, lastRow: table.lastRow };
-  const times = columnOf(table, run.timeColumn, all).cells;
+  const all = { ...run, ...limitsOf(table, run.firstRow) };
+  const times = columnOf(table, run.timeColumn, all);
   const stride = Math.ceil(times.length / longestList);
   const choices = times.flatMap(([time], place): Choice[] => {
-    const row = table.firstRow + place;
-    const isListed = place % stride === 0 || row === table.lastRow || row === run[which];
-    const words = typeof time === 'number' ? `${row + 1} (${shown(time)})` : `${row + 1}`;
+    const row = all.firstRow + place;
+    const isListed = place % stride === 0 || row === all.lastRow || row === run[which];
+    const name = placeName(row, table.isTurned);
+    const words = typeof time === 'number' ? `${name} (${shown(time)})` : name;
     return isListed ? [{ value: String(row), label: words }] : [];
   });
   return selectField(
     id,
-    label,
+    `${label} ${table.isTurned ? 'column' : 'row'}`,
     choices,
     String(run[which]),
     (value) => void actions.changeRun({ [which]: Number(value) }),
@@ -85,9 +125,10 @@ function pointsInWords(table: Table, run: Run): string {
   const points = pointsOf(table, run).length;
   const gaps = run.lastRow - run.firstRow + 1 - points;
   const counted = `${points} ${points === 1 ? 'reading' : 'readings'}`;
+  const place = table.isTurned ? 'column' : 'row';
   return gaps === 0
     ? counted
-    : `${counted}; ${gaps} ${gaps === 1 ? 'row without a pair of numbers is' : 'rows without a pair of numbers are'} skipped`;
+    : `${counted}; ${gaps} ${gaps === 1 ? `${place} without a pair of numbers is` : `${place}s without a pair of numbers are`} skipped`;
 }
 
 /** Volume and pressure are how a gas run is read. */

@@ -1,6 +1,7 @@
 import { CellError, type CellValue } from '../../functions/cell';
 import { checkRun, type Check } from '../../taskpane/findings';
-import { findTable, proposeRun, type Table } from '../../taskpane/runs';
+import { findTable } from '../../taskpane/findTable';
+import { proposeRun, type Table } from '../../taskpane/runs';
 
 /** Halved every 10 s from 64, in rows 6 to 14 of the sheet; readings can be put in place of others. */
 function checked(odd: Readonly<Record<number, CellValue>> = {}): Check {

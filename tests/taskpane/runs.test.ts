@@ -1,6 +1,7 @@
 import type { CellValue } from '../../functions/cell';
 import type { RangeReading } from '../../taskpane/port';
-import { columnOf, findTable, pointsOf, proposeRun, timeColumnFor, type Table } from '../../taskpane/runs';
+import { findTable } from '../../taskpane/findTable';
+import { areaOf, columnOf, pointsOf, proposeRun, timeColumnFor, type Table } from '../../taskpane/runs';
 
 const block = (...cells: CellValue[][]): RangeReading => ({
   area: { sheet: 'Runs', row: 4, column: 1, rows: cells.length, columns: cells[0].length },
@@ -78,8 +79,6 @@ test('pointsOf skips rows that are no pair of numbers, columnOf keeps them', () 
     { time: 0, value: 0 },
     { time: 30, value: 12 },
   ]);
-  expect(columnOf(table, 2, run)).toEqual({
-    area: { sheet: 'Runs', row: 5, column: 2, rows: 4, columns: 1 },
-    cells: [[0], [null], [9], [12]],
-  });
+  expect(columnOf(table, 2, run)).toEqual([[0], [null], [9], [12]]);
+  expect(areaOf(table, 2, run)).toEqual({ sheet: 'Runs', row: 5, column: 2, rows: 4, columns: 1 });
 });
