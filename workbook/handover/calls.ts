@@ -22,8 +22,19 @@ export interface GivenArgument extends Stretch {
 
 type Placed = Token & { readonly loc: [number, number] };
 
+/** Formulas of one column share most of their arguments, and each is looked at from several sides. */
+const known = new Map<string, readonly Placed[]>();
+const mostKnown = 1000;
+
 /** @param formula without a leading `=` */
-export const tokensOf = (formula: string): Placed[] => tokenize(formula, { withLocation: true }) as Placed[];
+export function tokensOf(formula: string): readonly Placed[] {
+  const before = known.get(formula);
+  if (before) return before;
+  if (known.size >= mostKnown) known.clear();
+  const tokens = tokenize(formula, { withLocation: true }) as Placed[];
+  known.set(formula, tokens);
+  return tokens;
+}
 
 /** The calls that stand in no other call of ours. */
 export function callsIn(formula: string): Call[] {

@@ -1,7 +1,8 @@
 /** Built-in formulas are believed only after our own engine has worked them out: each must come to our value. */
 import { CellError, type CellValue } from '../../functions/cell';
-import type { BookModel, CalculatedBook, CellModel } from '../engine/engine';
+import type { BookModel, CalculatedBook, CellModel, SheetModel } from '../engine/engine';
 import { calculate } from '../engine/univer/headless';
+import { alike } from './alike';
 import { frozen, type HandedFormula } from './handed';
 import type { World } from './world';
 
@@ -11,52 +12,85 @@ const tolerance = 1e-9;
 /** Columns to the right, beyond what any sheet of readings uses. */
 const aside = 8000;
 
-/** The same formulas; those that came to something else are frozen. */
+/** Formulas alike in all but their numbers, and cells of one long result: so many of them are enough. */
+const mostJudged = 60;
+
+/**
+ * The same formulas; those that came to something else are frozen. Where a single one of those alike did,
+ * each of them is judged.
+ */
 export async function checked(formulas: readonly HandedFormula[], world: World): Promise<HandedFormula[]> {
-  if (!formulas.some(({ said }) => said)) return [...formulas];
-  const calculated = await calculate(withFormulasAside(world.book, formulas));
+  const groups = alike(
+    formulas.filter(({ said }) => said),
+    world,
+  );
+  const first = groups.flatMap((group) => group.filter((_, place) => isChosen(place, group.length)));
+  const isFirst = new Set(first);
+  const off = await judged(first, world);
+  const doubtful = groups.filter((group) => group.some((formula) => off.has(formula))).flat();
+  const rest = await judged(
+    doubtful.filter((formula) => !isFirst.has(formula)),
+    world,
+  );
   return formulas.map((formula) => {
-    const off = firstOff(formula, calculated);
-    return off === undefined ? formula : frozen(formula, off);
+    const why = off.get(formula) ?? rest.get(formula);
+    return why === undefined ? formula : frozen(formula, why);
   });
 }
 
-/** Cells of a long result differ in the reading they take alone: so many of them are enough. */
-const mostJudged = 60;
+/** Spread over all, the first and the last among them. */
+const isChosen = (place: number, all: number): boolean =>
+  all <= mostJudged || place === all - 1 || place % Math.ceil(all / mostJudged) === 0;
+
+/** @returns of those that came to something else, to what */
+async function judged(
+  formulas: readonly HandedFormula[],
+  world: World,
+): Promise<ReadonlyMap<HandedFormula, string>> {
+  if (formulas.length === 0) return new Map();
+  const calculated = await calculate(withFormulasAside(formulas, world));
+  return new Map(
+    formulas.flatMap((formula) => {
+      const off = firstOff(formula, calculated);
+      return off === undefined ? [] : [[formula, off]];
+    }),
+  );
+}
 
 function isJudged(values: HandedFormula['values'], row: number, column: number): boolean {
-  const all = values.length * values[0].length;
-  const place = row * values[0].length + column;
-  return all <= mostJudged || place === all - 1 || place % Math.ceil(all / mostJudged) === 0;
+  return isChosen(row * values[0].length + column, values.length * values[0].length);
 }
 
-/** Each formula is judged by itself: what it reads from another of ours is that one's value. */
-function withFormulasAside(book: BookModel, formulas: readonly HandedFormula[]): BookModel {
-  const bySheet = new Map<string, CellModel[]>();
-  for (const { sheet, row, column, said, values } of formulas) {
-    const cells = bySheet.get(sheet) ?? [];
-    bySheet.set(sheet, cells);
-    values.forEach((line, r) =>
-      line.forEach((value, c) => {
-        cells.push({ row: row + r, column: column + c, value });
-        const formula = isJudged(values, r, c) ? said?.[r][c] : undefined;
-        if (formula !== undefined)
-          cells.push({ row: row + r, column: aside + column + c, value: null, formula });
-      }),
-    );
-  }
+/** Each formula is judged by itself: whatever it reads has the value it shows, be it typed or worked out. */
+function withFormulasAside(formulas: readonly HandedFormula[], world: World): BookModel {
+  const { book } = world;
   return {
     ...book,
-    sheets: book.sheets.map((sheet) => {
-      const added = bySheet.get(sheet.name) ?? [];
-      const taken = new Set(added.map(({ row, column }) => `${row},${column}`));
-      return {
-        ...sheet,
-        cells: [...sheet.cells.filter(({ row, column }) => !taken.has(`${row},${column}`)), ...added],
-      };
-    }),
+    sheets: book.sheets.map((sheet) => ({
+      ...sheet,
+      cells: [
+        ...sheet.cells.flatMap((cell) =>
+          cell.formula === undefined ? [cell] : resultOf(cell, sheet, world),
+        ),
+        ...formulas.filter((formula) => formula.sheet === sheet.name).flatMap(cellsAside),
+      ],
+    })),
   };
 }
+
+function resultOf({ row, column }: CellModel, sheet: SheetModel, world: World): CellModel[] {
+  const area = world.spillAt({ sheet: sheet.name, row, column });
+  return world
+    .cellsIn(area, sheet.name)
+    .flatMap((line, r) => line.map((value, c) => ({ row: row + r, column: column + c, value })));
+}
+
+const cellsAside = ({ row, column, said, values }: HandedFormula): CellModel[] =>
+  (said ?? []).flatMap((line, r) =>
+    line.flatMap((formula, c) =>
+      isJudged(values, r, c) ? [{ row: row + r, column: aside + column + c, value: null, formula }] : [],
+    ),
+  );
 
 function firstOff(
   { sheet, row, column, said, values }: HandedFormula,

@@ -5,7 +5,7 @@ import type { CalculatedBook } from '../engine/engine';
 import { calculate } from '../engine/univer/headless';
 import { dropCalcChain } from '../xlsx/calcChain';
 import { findParts, readXml } from '../xlsx/parts';
-import { patchWorkbook } from '../xlsx/patch';
+import { patchPackage } from '../xlsx/patch';
 import { readWorkbook } from '../xlsx/read';
 import { encodeXml } from '../xlsx/xml';
 import { Package } from '../xlsx/zip';
@@ -34,14 +34,14 @@ export interface HandedOver {
 export async function handOver(bytes: Uint8Array, origin: Origin): Promise<HandedOver> {
   const book = readWorkbook(bytes);
   const calculated = await calculate(book);
-  const recalculated = patchWorkbook(bytes, book, calculated);
-  const pack = Package.open(recalculated);
+  const pack = Package.open(bytes);
   const parts = findParts(pack);
+  patchPackage(pack, parts, book, calculated);
   const world = new World(book, calculated);
   const formulas = await checked(handFormulas(world, calculated, mergedCells(pack, parts.sheets)), world);
   const names = await frozenNames(book);
   if (formulas.length + names.length === 0)
-    return { bytes: recalculated, formulas, names, errors: calculated.errors };
+    return { bytes: pack.bytes(), formulas, names, errors: calculated.errors };
   for (const sheet of parts.sheets) {
     const cells = [
       ...formulas.filter((formula) => formula.sheet === sheet.name).flatMap(cellsOf),

@@ -16,6 +16,8 @@ export interface Position {
 }
 
 export class World {
+  private readonly cells = new Map<string, CellRange>();
+
   constructor(
     readonly book: BookModel,
     private readonly calculated: CalculatedBook,
@@ -80,7 +82,15 @@ export class World {
     return [...new Map(areas.map((area) => [areaName(area), area])).values()];
   }
 
+  /** Formulas of one column mostly read the same cells: looked up once. */
   cellsIn(area: Area, sheet: string): CellRange {
+    const place = areaName({ ...area, sheet: area.sheet ?? sheet });
+    const cells = this.cells.get(place) ?? this.lookUp(area, sheet);
+    this.cells.set(place, cells);
+    return cells;
+  }
+
+  private lookUp(area: Area, sheet: string): CellRange {
     return Array.from({ length: area.rows }, (_, r) =>
       Array.from({ length: area.columns }, (__, c) =>
         this.calculated.shown(area.sheet ?? sheet, area.row + r, area.column + c),

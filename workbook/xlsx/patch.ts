@@ -2,7 +2,7 @@
 import type { BookModel, CalculatedBook } from '../engine/engine';
 import { dropCalcChain } from './calcChain';
 import { dynamicArrayMark } from './dynamicArrays';
-import { findParts, readXml } from './parts';
+import { findParts, readXml, type WorkbookParts } from './parts';
 import { patchSheet } from './patchSheet';
 import { readSharedStrings } from './sharedStrings';
 import { encodeXml } from './xml';
@@ -16,7 +16,17 @@ import { Package } from './zip';
  */
 export function patchWorkbook(bytes: Uint8Array, book: BookModel, calculated: CalculatedBook): Uint8Array {
   const pack = Package.open(bytes);
-  const parts = findParts(pack);
+  patchPackage(pack, findParts(pack), book, calculated);
+  return pack.bytes();
+}
+
+/** The same in a package that is open already. @throws NotAWorkbook */
+export function patchPackage(
+  pack: Package,
+  parts: WorkbookParts,
+  book: BookModel,
+  calculated: CalculatedBook,
+): void {
   const sharedStrings = readSharedStrings(pack, parts.sharedStrings);
   let mark: string | undefined;
   let newArrays = false;
@@ -35,7 +45,6 @@ export function patchWorkbook(bytes: Uint8Array, book: BookModel, calculated: Ca
     if (after.xml !== before) pack.write(path, encodeXml(after.xml));
   }
   if (newArrays) dropCalcChain(pack, parts);
-  return pack.bytes();
 }
 
 function formulasOf(book: BookModel, sheet: string): Map<string, string> {

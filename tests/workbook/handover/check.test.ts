@@ -1,0 +1,51 @@
+/** Built-in formulas that come to something else than we did must not be believed. */
+import { functionNamed } from '../../../functions/catalogue';
+import { calculate } from '../../../workbook/engine/univer/headless';
+import { checked } from '../../../workbook/handover/check';
+import type { HandedFormula } from '../../../workbook/handover/handed';
+import { World } from '../../../workbook/handover/world';
+import { book, column } from '../engine/book';
+
+const times = Array.from({ length: 200 }, (_, n) => n + 1);
+const readings = [...times, 'x'];
+
+/** 1/t of the reading in this row, beside it. */
+const handed = (row: number, said: string): HandedFormula => ({
+  sheet: 'Run',
+  row,
+  column: 1,
+  original: `PACE.EVENT(A${row + 1})`,
+  functions: [functionNamed('EVENT')!],
+  area: { row, column: 1, rows: 1, columns: 1 },
+  values: [[row < times.length ? 1 / times[row] : '']],
+  said: [[said]],
+});
+
+async function frozenAmong(formulas: readonly HandedFormula[]): Promise<HandedFormula[]> {
+  const typed = column(
+    'B1',
+    readings.map((_, n) => `=PACE.EVENT(A${n + 1})`),
+  );
+  const model = book({ Run: { ...column('A1', readings), ...typed } });
+  const all = await checked(formulas, new World(model, await calculate(model)));
+  return all.filter(({ said }) => !said);
+}
+
+test('all are right: all stay live', async () => {
+  expect(await frozenAmong(times.map((_, n) => handed(n, `1/A${n + 1}`)))).toEqual([]);
+});
+
+test('one of the first is wrong: every one that is, is frozen, and no other', async () => {
+  const wrong = [0, 101, 150];
+  const frozen = await frozenAmong(
+    times.map((_, n) => handed(n, wrong.includes(n) ? `2/A${n + 1}` : `1/A${n + 1}`)),
+  );
+  expect(frozen.map(({ row }) => row)).toEqual(wrong);
+  expect(frozen[1].why).toBe('built-in functions give 0.0196078431372549 for 0.00980392156862745');
+});
+
+test('a formula that reads another kind of cell is judged by itself', async () => {
+  const all = times.map((_, n) => handed(n, `1/A${n + 1}`));
+  all.splice(1, 0, handed(times.length, `1/A${times.length + 1}`)); // at a place that is passed over
+  expect((await frozenAmong(all)).map(({ row }) => row)).toEqual([times.length]);
+});
