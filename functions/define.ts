@@ -13,14 +13,31 @@ export type Values<P extends Parameters> = {
 /** The parts of the job, in the order of the work. */
 export type Family = 'reading' | 'rate' | 'order' | 'temperature' | 'mechanism' | 'care';
 
+/** In the notation of equation/equation.ts. */
+export interface Equations {
+  readonly lines: readonly string[];
+  /** Every quantity in them, with its unit where it must have one. */
+  readonly where: Readonly<Record<string, string>>;
+}
+
+/** A call that answers with an error; the words beside it are what the function says. */
+export interface Refusal {
+  readonly formula: string;
+  readonly mend: string;
+}
+
 export interface Definition<P extends Parameters> {
   /** Without the namespace: `TANGENT`. Three letters or more, no dot, no underscore, and never changed. */
   readonly name: string;
   readonly family: Family;
   /** One sentence, for argument help and tables. */
   readonly summary: string;
-  /** How it is worked out, for the help page: equation, method, what is taken for granted. */
+  /** What it works out, typeset on the help page; left out where words say it all. */
+  readonly equations?: Equations;
+  /** How it is worked out: method, and what is taken for granted. */
   readonly method: string;
+  /** What an uncertainty of the answer rests on, or why there is none. */
+  readonly uncertainty: string;
   readonly parameters: P;
   readonly result: { readonly unit: string; readonly shape: 'one value' | 'as given' | 'column' | 'table' };
   /** Typed into an empty cell it gives `equals`: the value, or the first cells of each row that spills. */
@@ -30,6 +47,10 @@ export interface Definition<P extends Parameters> {
     /** Relative, where the outside value has fewer digits than ours; rounding alone when left out. */
     readonly within?: number;
   };
+  /** Calls that are refused, beyond what the bounds of its parameters say, and what helps then. */
+  readonly refusals?: readonly Refusal[];
+  /** Names of functions that the same job may need, before or after. */
+  readonly seeAlso: readonly string[];
   /** DOI or standard. */
   readonly reference: string;
   /** Where the work this serves can hurt someone. */

@@ -1,6 +1,15 @@
 /** What every page about a function says the same way: its arguments, and its example's cells. */
 import { CellError, type CellValue } from './cell';
+import type { CellFunction } from './define';
+import { inLine } from './equation/equation';
 import { boundsInWords, type Parameter } from './parameters';
+
+/** Equations, their quantities and the method in one text, for where nothing can be typeset. */
+export function howInWords({ equations, method }: CellFunction): string {
+  if (!equations) return method;
+  const quantities = Object.entries(equations.where).map(([sign, meaning]) => `${sign} ${meaning}`);
+  return `${equations.lines.map(inLine).join('; ')} (${quantities.join('; ')}). ${method}`;
+}
 
 /** Columns of a table of arguments, after their names. */
 export const argumentHeadings = ['meaning', 'unit', 'must be', 'left out'] as const;

@@ -1,7 +1,7 @@
 /** What Excel must be told of each function before it is ever called: the content of functions.json. */
 import { boundsInWords, type Parameter } from './parameters';
 import type { CellFunction } from './define';
-import { pageName } from './help/functionPage';
+import { pageName } from './help/pageName';
 
 export interface FunctionsMetadata {
   /** Error cells inside a range reach the function as errors. Honoured only in metadata written by hand, as this is. */

@@ -1,7 +1,8 @@
 /** The reference of all functions in docs/functions.md, worked out from the definitions. */
 import { isRange, type CellResult } from './cell';
-import { typedName, type CellFunction } from './define';
+import { typedName, type CellFunction, type Equations } from './define';
 import { argumentFacts, argumentHeadings, exampleCell } from './documented';
+import { asLatex } from './equation/latex';
 import { byFamily, signature } from './readmeTable';
 
 /** Everything a definition says, one part a function. */
@@ -23,12 +24,23 @@ function part(f: CellFunction): string {
     f.summary,
     `\`${signature(f)}\` in ${f.result.unit === '1' ? 'pure numbers' : f.result.unit}`,
     parameterTable(f),
+    ...(f.equations ? [typeset(f.equations), quantities(f.equations)] : []),
     `**How.** ${f.method}`,
+    `**How sure.** ${f.uncertainty}`,
     `**Example.** \`${f.example.formula}\` shows ${shown(f.example.equals)}`,
     ...(f.caution === undefined ? [] : [`**Take care.** ${f.caution}`]),
+    `**See also.** ${f.seeAlso.map((name) => `[${typedName({ name })}](#pace${name.toLowerCase()})`).join(', ')}`,
     `**Source.** ${f.reference}`,
   ].join('\n\n');
 }
+
+const typeset = ({ lines }: Equations): string =>
+  lines.map((line) => `\`\`\`math\n${asLatex(line)}\n\`\`\``).join('\n\n');
+
+const quantities = ({ where }: Equations): string =>
+  Object.entries(where)
+    .map(([sign, meaning]) => `\`${sign}\` ${meaning}`)
+    .join('; ');
 
 const parameterTable = ({ parameters }: CellFunction): string =>
   [

@@ -1,5 +1,6 @@
 /** Finding a function by its name or by words of its help. */
 import { catalogue } from '../functions/catalogue';
+import { howInWords } from '../functions/documented';
 import { typedName, type CellFunction, type Family } from '../functions/define';
 
 export const families: readonly (readonly [Family, string])[] = [
@@ -15,7 +16,7 @@ const wordsOf = (f: CellFunction): string =>
   [
     typedName(f),
     f.summary,
-    f.method,
+    howInWords(f),
     ...Object.entries(f.parameters).flatMap(([name, { help }]) => [name, help]),
   ].join(' ');
 

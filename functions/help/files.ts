@@ -1,14 +1,32 @@
 /** All help pages as files, to be put beside each other anywhere. */
-import type { CellFunction } from '../define';
-import { functionPage, pageName } from './functionPage';
-import { styles } from './html';
-import { indexPage, script } from './indexPage';
+import { typedName, type CellFunction } from '../define';
+import { errorsPage } from './errorsPage';
+import { everythingPage } from './everythingPage';
+import { functionPage } from './functionPage';
+import { indexPage } from './indexPage';
+import { pageName } from './pageName';
+import { searched, searchScript, waysTo } from './search';
+import { styles } from './styles';
 
 /** By file name. */
-export const helpFiles = (catalogue: readonly CellFunction[]): ReadonlyMap<string, string> =>
-  new Map([
-    ['index.html', indexPage(catalogue)],
-    ['help.css', styles],
-    ['help.js', script],
-    ...catalogue.map((f): [string, string] => [pageName(f), functionPage(f)]),
+export function helpFiles(catalogue: readonly CellFunction[]): ReadonlyMap<string, string> {
+  const pages = catalogue.map((f) => ({ f, to: pageName(f), html: functionPage(f) }));
+  const errors = errorsPage();
+  const search = searchScript([
+    ...pages.map(({ f, to, html }) =>
+      searched(to, html, { title: typedName(f), summary: f.summary, more: waysTo(f.name) }),
+    ),
+    searched('errors.html', errors, {
+      title: 'When a cell shows an error',
+      summary: 'What any function may say, and what helps.',
+    }),
   ]);
+  return new Map([
+    ['index.html', indexPage(catalogue)],
+    ['errors.html', errors],
+    ['everything.html', everythingPage(catalogue)],
+    ['help.css', styles],
+    ['help.js', search],
+    ...pages.map(({ to, html }): [string, string] => [to, html]),
+  ]);
+}

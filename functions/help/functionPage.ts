@@ -1,51 +1,60 @@
 /** The help page of one function, from its definition alone. */
-import { isRange, type CellResult } from '../cell';
+import { functionNamed } from '../catalogue';
 import { typedName, type CellFunction } from '../define';
-import { argumentFacts, argumentHeadings, exampleCell } from '../documented';
-import type { Parameter } from '../parameters';
+import { argumentFacts, argumentHeadings } from '../documented';
 import { signature } from '../readmeTable';
-import { escaped, page } from './html';
+import { equationSection } from './equations';
+import { exampleSection } from './exampleSheet';
+import { escaped, page, table } from './html';
+import { refusalSection } from './refusals';
 
-/** Where a function's page lies, beside the index. */
-export const pageName = ({ name }: Pick<CellFunction, 'name'>): string => `${name.toLowerCase()}.html`;
+export const functionPage = (f: CellFunction): string =>
+  page(
+    `${typedName(f)} – Flaskpace`,
+    article(f, (name) => `${name}.html`),
+  );
 
-export function functionPage(f: CellFunction): string {
+/** Where a function's part of a page, or its page, is found. */
+type LinkTo = (name: string) => string;
+
+/** All that is said of a function. @param level of its heading, 2 where several stand on one page */
+export function article(f: CellFunction, linkTo: LinkTo, level = 1): string {
+  const [first, second] = [`h${level}`, `h${level + 1}`];
+  const heading = (text: string): string => `<${second}>${text}</${second}>`;
   const parts = [
-    '<nav><a href="index.html">All functions</a></nav>',
-    `<h1>${typedName(f)}</h1>`,
-    `<p>${escaped(f.summary)}</p>`,
+    `<${first} id="${f.name.toLowerCase()}">${typedName(f)}</${first}>`,
+    `<p class="lead">${escaped(f.summary)}</p>`,
     `<pre>${escaped(signature(f))}</pre>`,
-    f.caution === undefined ? '' : `<p class="caution"><strong>Take care.</strong> ${escaped(f.caution)}</p>`,
-    '<h2>Arguments</h2>',
+    f.caution && `<p class="caution"><strong>Take care.</strong> ${escaped(f.caution)}</p>`,
+    heading('What you give'),
     argumentTable(f),
-    '<h2>Answer</h2>',
+    heading('What you get'),
     `<p>${escaped(answerInWords(f))}</p>`,
-    '<h2>How it is worked out</h2>',
+    heading('How it is worked out'),
+    f.equations && equationSection(f.equations),
     `<p>${escaped(f.method)}</p>`,
-    '<h2>Example</h2>',
-    `<pre>${escaped(f.example.formula)}</pre>`,
-    shown(f.example.equals),
-    '<h2>When it refuses</h2>',
-    '<p><code>#VALUE!</code> with words: the call can be mended, and the words say the rule, where it broke and the value seen. <code>#N/A</code> with words: the call is sound, but the data cannot tell. Rest the pointer on the cell’s mark to read them.</p>',
-    '<h2>Source</h2>',
+    heading('How sure it is'),
+    `<p>${escaped(f.uncertainty)}</p>`,
+    heading('Example'),
+    exampleSection(f),
+    heading('When it refuses'),
+    refusalSection(f),
+    heading('See also'),
+    neighbours(f, linkTo),
+    heading('Source'),
     `<p>${linked(f.reference)}</p>`,
   ];
-  return page(`${typedName(f)} – Flaskpace`, parts.filter(Boolean).join('\n'));
+  return parts.filter(Boolean).join('\n');
 }
 
-const argumentTable = ({ parameters }: CellFunction): string => `<table>
-<thead><tr>${['name', ...argumentHeadings].map((heading) => `<th>${heading}</th>`).join('')}</tr></thead>
-<tbody>
-${Object.entries(parameters)
-  .map(([name, parameter]) => argumentRow(name, parameter))
-  .join('\n')}
-</tbody>
-</table>`;
-
-function argumentRow(name: string, parameter: Parameter): string {
-  const cells = [`<code>${name}</code>`, ...argumentFacts(parameter).map(escaped)];
-  return `<tr>${cells.map((cell) => `<td>${cell}</td>`).join('')}</tr>`;
-}
+const argumentTable = ({ parameters }: CellFunction): string =>
+  table(
+    ['name', ...argumentHeadings],
+    Object.entries(parameters).map(([name, parameter]) => [
+      `<code>${name}</code>`,
+      ...argumentFacts(parameter).map(escaped),
+    ]),
+  );
 
 const shapes: Readonly<Record<CellFunction['result']['shape'], string>> = {
   'one value': 'One value',
@@ -57,16 +66,18 @@ const shapes: Readonly<Record<CellFunction['result']['shape'], string>> = {
 function answerInWords({ result, parameters }: CellFunction): string {
   const unit = result.unit === '1' ? 'a pure number' : `unit: ${result.unit}`;
   const detail =
-    'detail' in parameters ? '; with detail TRUE, a row with its uncertainty and 95 % limits' : '';
+    'detail' in parameters
+      ? '; with detail TRUE a row: value, standard uncertainty, lower and upper 95 % limit, degrees of freedom'
+      : '';
   return `${shapes[result.shape]}; ${unit}${detail}.`;
 }
 
-function shown(result: CellResult): string {
-  const rows = isRange(result) ? result : [[result]];
-  const body = rows.map(
-    (row) => `<tr>${row.map((cell) => `<td>${escaped(exampleCell(cell))}</td>`).join('')}</tr>`,
-  );
-  return `<p class="quiet">shows</p>\n<table><tbody>${body.join('')}</tbody></table>`;
+function neighbours({ seeAlso }: CellFunction, linkTo: LinkTo): string {
+  const items = seeAlso.map((name) => {
+    const f = functionNamed(name)!;
+    return `<li><a href="${linkTo(name.toLowerCase())}">${typedName(f)}</a> ${escaped(f.summary)}</li>`;
+  });
+  return `<ul class="functions">\n${items.join('\n')}\n</ul>`;
 }
 
 /** A DOI leads to its document. */

@@ -1,38 +1,48 @@
-/** Where help begins: which function answers what, with a search that needs no network. */
+/** Where help begins: which function answers what. */
 import { typedName, type CellFunction } from '../define';
 import { byFamily } from '../readmeTable';
-import { pageName } from './functionPage';
-import { escaped, page } from './html';
+import { escaped, page, table } from './html';
+import { pageName } from './pageName';
+import { byMeasurement, byQuestion, job, type Way } from './ways';
 
 export function indexPage(catalogue: readonly CellFunction[]): string {
-  const families = byFamily(catalogue).map(
-    ([heading, functions]) =>
-      `<section><h2>${heading}</h2><table><tbody>\n${functions.map(row).join('\n')}\n</tbody></table></section>`,
-  );
   const body = [
     '<h1>Which function do I need?</h1>',
-    '<p class="search"><label>Look for <input id="look-for" type="search" autocomplete="off" /></label></p>',
-    ...families,
+    '<p class="lead">Two columns, time and reading, become the answer that is owed: amount, rate, order, rate coefficient, half life, prediction.</p>',
+    '<p class="search"><label for="look-for">Look for a word on all pages</label> <input id="look-for" type="search" autocomplete="off" placeholder="balance, half life, shelf life …" /></p>',
+    '<p id="found-count" class="quiet" role="status"></p>',
+    '<ul id="found" class="found" hidden=""></ul>',
+    '<div id="ways">',
+    '<h2>The way of the job</h2>',
+    `<ol class="way">\n${job.map(step).join('\n')}\n</ol>`,
+    '<h2>What did you measure with?</h2>',
+    wayTable(['you have', 'functions, in the order of use'], byMeasurement),
+    '<h2>What do you want to know?</h2>',
+    wayTable(['question', 'functions'], byQuestion),
+    '<h2>All functions</h2>',
+    ...byFamily(catalogue).map(
+      ([heading, functions]) =>
+        `<h3>${heading}</h3>\n<ul class="functions">\n${functions.map(item).join('\n')}\n</ul>`,
+    ),
+    '</div>',
     '<script src="help.js"></script>',
   ];
-  return page('Flaskpace: the functions', body.join('\n'));
+  return page('Flaskpace: which function do I need?', body.join('\n'));
 }
 
-const row = (f: CellFunction): string =>
-  `<tr><td><a href="${pageName(f)}">${typedName(f)}</a></td><td>${escaped(f.summary)}</td></tr>`;
+const step = ({ from, functions, hint }: Way): string =>
+  `<li><strong>${from}</strong><span class="quiet">${hint ?? ''}</span>${functions.map((name) => `<a href="${pageName({ name })}">${name}</a>`).join('')}</li>`;
 
-/** Hides what does not hold every word that is typed. */
-export const script = `const box = document.getElementById('look-for');
-box.addEventListener('input', () => {
-  const words = box.value.toLowerCase().split(/\\s+/);
-  for (const section of document.querySelectorAll('section')) {
-    let found = 0;
-    for (const row of section.querySelectorAll('tr')) {
-      const text = row.textContent.toLowerCase();
-      row.hidden = !words.every((word) => text.includes(word));
-      if (!row.hidden) found++;
-    }
-    section.hidden = found === 0;
-  }
-});
-`;
+const link = (name: string): string => `<a href="${pageName({ name })}">${typedName({ name })}</a>`;
+
+const wayTable = (headings: readonly string[], ways: readonly Way[]): string =>
+  table(
+    headings,
+    ways.map(({ from, functions, hint }) => [
+      escaped(from),
+      `${functions.map(link).join(', ')}${hint ? `<br /><span class="quiet">${escaped(hint)}</span>` : ''}`,
+    ]),
+  );
+
+const item = (f: CellFunction): string =>
+  `<li><a href="${pageName(f)}">${typedName(f)}</a> ${escaped(f.summary)}</li>`;

@@ -32,4 +32,17 @@ export function fitKnownLaw(given: Values<typeof knownLawParameters>): RateLawFi
 
 /** Of the method, which all state. */
 export const lawMethod =
-  'The integrated law of order n, y = y∞ + (y₀ − y∞)[1 + (n−1)κt]^(−1/(n−1)), is fitted to the readings as they are by nonlinear least squares, y₀ and y∞ projected out; nothing is linearised. Time counts from the first reading.';
+  'The integrated law of order n (the second line at order 1) is fitted to the readings as they are by nonlinear least squares; y₀ and y∞ enter linearly and are projected out. Nothing is linearised. Time counts from the first reading.';
+
+export const lawLines = ['y = y∞ + (y₀ − y∞)[1 + (n − 1)κt]^(−1/(n − 1))', 'y = y∞ + (y₀ − y∞) exp(−κt)'];
+
+export const lawQuantities = {
+  y: 'reading',
+  'y₀': 'reading at the first time, fitted',
+  'y∞': 'endpoint, the reading at infinite time',
+  n: 'order',
+  κ: 'reduced rate coefficient, per time: k times the first distance from the end to the power n − 1',
+  t: 'time since the first reading',
+};
+
+export const lawEquations = { lines: lawLines, where: lawQuantities };

@@ -2,15 +2,18 @@ import { fitRateLaw } from '../../src/order/fit';
 import { orderEstimate } from '../../src/order/profile';
 import { detail } from '../commonParameters';
 import { defineFunction } from '../define';
+import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow } from '../results';
 import { seriesOf, uncertaintiesOf } from '../run';
-import { lawMethod, lawParameters, runParameters } from './lawParameters';
+import { lawEquations, lawMethod, lawParameters, runParameters } from './lawParameters';
 
 export default defineFunction({
   name: 'ORDER',
   family: 'order',
   summary: 'Overall order of reaction of a run, fitted as a free number.',
-  method: `${lawMethod} The order is fitted with it. Limits are those of the profile likelihood; below two half lives they are wide, and rightly so.`,
+  equations: lawEquations,
+  method: `${lawMethod} The order is fitted with it. Below two half lives its limits are wide, and rightly so.`,
+  uncertainty: uncertaintyOf.profile,
   parameters: { ...runParameters, ...lawParameters, detail: detail() },
   result: { unit: '1', shape: 'one value' },
   // 1/c grows evenly with time: order 2
@@ -18,6 +21,21 @@ export default defineFunction({
     formula: '=PACE.ORDER({0;1;2;3;5;9},{1;0.5;0.333333333333333;0.25;0.166666666666667;0.1})',
     equals: 2,
   },
+  refusals: [
+    {
+      formula: '=PACE.ORDER({0;10;20;30},{0;4;6;7})',
+      mend: 'Give the reading at infinite time as endpoint, or "free" to have it fitted.',
+    },
+    {
+      formula: '=PACE.ORDER({0;10},{8;4},"free")',
+      mend: 'Take more readings. Each number that is fitted needs one.',
+    },
+    {
+      formula: '=PACE.ORDER({0;10;20;30},{8;8;8;8})',
+      mend: 'Nothing happens in this column: check that it is the right one.',
+    },
+  ],
+  seeAlso: ['ORDERS', 'HALVINGS', 'EXPONENTS'],
   reference: 'doi:10.1351/goldbook.O04322; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
   run({ times, values, endpoint, uncertainties, detail }) {
     const series = seriesOf(times, values);

@@ -3,7 +3,7 @@ import { orNotAvailable } from '../results';
 import type { CellValue } from '../cell';
 import { defineFunction } from '../define';
 import { seriesOf, uncertaintiesOf } from '../run';
-import { lawMethod, lawParameters, runParameters } from './lawParameters';
+import { lawLines, lawMethod, lawParameters, lawQuantities, runParameters } from './lawParameters';
 
 const headings = [
   'order',
@@ -21,7 +21,21 @@ export default defineFunction({
   name: 'ORDERS',
   family: 'order',
   summary: 'Which order of reaction a run follows: the simple orders and a free one side by side.',
-  method: `${lawMethod} Orders 0, ½, 1, 1½, 2 and 3 and a free order; the weight is each simple order's share of the evidence by AICc (Hurvich and Tsai 1989), and the runs test asks whether residuals run in a pattern. The verdict rests on the weights, the free order's limits and how many half lives were followed. R² of the straight-line plot is shown, and never decides.`,
+  equations: {
+    lines: [...lawLines, 'AICc = N ln(S/N) + 2p + 2p(p + 1)/(N − p − 1)', 'w = exp(−Δ/2)/(∑ exp(−Δ/2))'],
+    where: {
+      ...lawQuantities,
+      AICc: 'Akaike’s criterion, corrected for few readings',
+      N: 'number of readings',
+      S: 'sum of squared residuals',
+      p: 'number of fitted parameters, the scatter counted',
+      w: 'weight of one order; the sum is over all simple orders',
+      Δ: 'its AICc above the least',
+    },
+  },
+  method: `${lawMethod} Orders 0, ½, 1, 1½, 2 and 3 and a free order are fitted. The weight w is each simple order's share of the evidence by AICc (Hurvich and Tsai 1989). The runs test asks whether the residuals run in a pattern. The verdict rests on the weights, the free order's limits and how many half lives were followed. R² of the straight-line plot is shown, and never decides.`,
+  uncertainty:
+    'k has its standard uncertainty from the curvature of the fit. The free order’s limits behind the verdict are those of the profile likelihood: PACE.ORDER with detail TRUE shows them.',
   parameters: { ...runParameters, ...lawParameters },
   result: { unit: 'as the headings say', shape: 'table' },
   // halved every 10
@@ -29,6 +43,13 @@ export default defineFunction({
     formula: '=PACE.ORDERS({0;10;20;30;40;50},{32;16;8;4;2;1})',
     equals: [['order'], [0], [0.5], [1, 0.06931471805599453], [1.5], [2], [3], [1, 0.06931471805599453]],
   },
+  refusals: [
+    {
+      formula: '=PACE.ORDERS({0;10;20;30},{0;4;6;7})',
+      mend: 'Give the reading at infinite time as endpoint, or "free" to have it fitted.',
+    },
+  ],
+  seeAlso: ['ORDER', 'COEFFICIENT', 'HALVINGS', 'CHECK'],
   reference: 'doi:10.1351/goldbook.O04322; doi:10.1093/biomet/76.2.297',
   run({ times, values, endpoint, uncertainties }) {
     const series = seriesOf(times, values);

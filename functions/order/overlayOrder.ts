@@ -3,6 +3,7 @@ import { overlayExponent, type OverlayRun } from '../../src/order/overlay';
 import { pairReadings } from '../../src/series/series';
 import type { Column } from '../column';
 import { defineFunction } from '../define';
+import { uncertaintyOf } from '../uncertaintyOf';
 import { column } from '../parameters';
 import { standardRow } from '../results';
 
@@ -10,8 +11,18 @@ export default defineFunction({
   name: 'OVERLAYORDER',
   family: 'order',
   summary: 'Order in a reactant: the exponent that best lays two runs on one curve.',
+  equations: {
+    lines: ['τ = ∫c^β dt'],
+    where: {
+      τ: 'normalised time, on which the products of both runs are laid',
+      c: 'concentration of the reactant',
+      β: 'order in the reactant',
+      t: 'time',
+    },
+  },
   method:
-    'Products of both runs against normalised time ∫cᵝdt; β is where the scatter about one common polynomial, of a degree that AICc chooses, is least. A standard row: value, standard uncertainty, 95 % limits by the profile likelihood, degrees of freedom. The runs must differ in the reactant, and in nothing else.',
+    'β is where the scatter of both runs about one common polynomial, of a degree that AICc chooses, exceeds that about two separate ones least. A standard row: value, standard uncertainty, 95 % limits, degrees of freedom. The runs must differ in the reactant, and in nothing else.',
+  uncertainty: uncertaintyOf.profile,
   parameters: {
     times1: column({ help: 'times of the first run', unit: 'time' }),
     products1: column({ help: 'product formed in it' }),
@@ -27,6 +38,17 @@ export default defineFunction({
     equals: [[1]],
     within: 0.05,
   },
+  refusals: [
+    {
+      formula: '=PACE.OVERLAYORDER({0;1;2;3},{0;4;6;7},{8;4;2;1},{0;1;2;3},{0;4;6;7},{8;4;2;1})',
+      mend: 'Make a second run with the reactant at another concentration.',
+    },
+    {
+      formula: '=PACE.OVERLAYORDER({0;1},{0;4},{8;4},{0;1},{0;2},{4;2})',
+      mend: 'Take more readings in each run.',
+    },
+  ],
+  seeAlso: ['NORMALTIME', 'EXPONENTS', 'ORDER'],
   reference: 'doi:10.1002/anie.201609757',
   run: ({ times1, products1, reactants1, times2, products2, reactants2 }) => [
     standardRow(

@@ -8,7 +8,7 @@ import { endpoint } from '../commonParameters';
 import { defineFunction } from '../define';
 import { block, column, number, optional } from '../parameters';
 import { orNotAvailable } from '../results';
-import { lawMethod } from './lawParameters';
+import { lawEquations, lawMethod } from './lawParameters';
 
 const headings = [
   'run',
@@ -26,7 +26,10 @@ export default defineFunction({
   family: 'order',
   summary:
     'Many runs at a glance: order, rate coefficient, half life, initial rate and what needs a second look.',
+  equations: lawEquations,
   method: `${lawMethod} One row a run below the headings. Conversion is that of the fitted law at the last reading. A run that cannot be fitted says why among its flags, and the others are not lost.`,
+  uncertainty:
+    'k has its standard uncertainty from the curvature of the fit and the scatter about it. For 95 % limits of one run: PACE.COEFFICIENT with detail TRUE.',
   parameters: {
     times: column({ help: 'times that all runs share', unit: 'time' }),
     block: block({ help: 'readings, one column a run' }),
@@ -38,6 +41,13 @@ export default defineFunction({
     formula: '=PACE.SURVEY({0;10;20;30;40},{8,16;4,4;2,1;1,0.25;0.5,0.0625},1)',
     equals: [['run'], [1, 1, 0.06931471805599453], [2, 1, 0.13862943611198906]],
   },
+  refusals: [
+    {
+      formula: '=PACE.SURVEY({0;10;20;30},{8,16;4,4;2,1},1)',
+      mend: 'Choose as many rows of readings as there are times.',
+    },
+  ],
+  seeAlso: ['COEFFICIENT', 'ORDERS', 'CHECK'],
   reference: 'doi:10.1351/goldbook.O04322',
   isLong: true,
   run({ times, block, order, endpoint }) {

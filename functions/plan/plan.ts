@@ -9,8 +9,20 @@ export default defineFunction({
   name: 'PLAN',
   family: 'mechanism',
   summary: 'When to take readings so that a rate coefficient, or the order, comes out as surely as it can.',
+  equations: {
+    lines: ['F = ∑ᵢ gᵢgᵢᵀ/σ²', 'C = F⁻¹', 'u_k = √C_kk'],
+    where: {
+      F: 'Fisher’s information on ln k and c₀',
+      gᵢ: 'sensitivity of the reading at a time to ln k and c₀',
+      σ: 'noise',
+      C: 'covariance of ln k and c₀ to expect',
+      C_kk: 'its entry for ln k',
+      u_k: 'relative standard uncertainty of k',
+    },
+  },
   method:
     'For k: the times that make its variance smallest by Fisher’s information, c₀ fitted as well (known with one reading) and the end 0; beside them the standard uncertainty to expect. For a rival order: the times at which its best curve misses the true one most (T-optimality), and the chance that a test at the 5 % level rules it out. No reading later than six half lives. A time that comes twice asks for two readings. The plan is as good as the k it starts from.',
+  uncertainty: 'The one to expect is computed from the noise you give, before any reading is taken.',
   parameters: {
     order: number({ help: 'n in −dc/dt = kcⁿ, as believed' }),
     coefficient: number({ help: 'rate coefficient, as believed', unit: 'initial^(1−n) per time', above: 0 }),
@@ -30,6 +42,11 @@ export default defineFunction({
     equals: [['time'], [10, 0.002718281828459045]],
     within: 1e-7,
   },
+  refusals: [
+    { formula: '=PACE.PLAN(1,0.1,1,0.01,5,1)', mend: 'Give as goal another order than the one believed.' },
+    { formula: '=PACE.PLAN(1,0.1,1,0.01,2,2)', mend: 'Plan three readings or more.' },
+  ],
+  seeAlso: ['COEFFICIENT', 'ORDERS', 'COURSE'],
   reference:
     'doi:10.1093/biomet/62.1.57; Atkinson, Donev and Tobias, Optimum Experimental Designs (2007), 17',
   isLong: true,

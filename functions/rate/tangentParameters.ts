@@ -16,6 +16,21 @@ export const tangentParameters = {
   coefficient: stoichiometricNumber(),
 };
 
-/** Of the method, which both state. */
+/** Of the method, which both state; at the usual degree of 2. */
+export const tangentEquations = {
+  lines: ['yᵢ = b₀ + b₁(tᵢ − t) + b₂(tᵢ − t)² + eᵢ', 'r = b₁/ν'],
+  where: {
+    yᵢ: 'one of the nearest readings',
+    tᵢ: 'its time',
+    t: 'time at which the rate is wanted',
+    'b₀': 'height of the curve there',
+    'b₁': 'slope of the curve there: the tangent',
+    'b₂': 'bend of the curve',
+    eᵢ: 'scatter; the sum of its squares is made least',
+    r: 'rate of reaction',
+    ν: 'coefficient, the stoichiometric number of the species',
+  },
+};
+
 export const tangentMethod =
-  'r = (1/ν) dy/dt by unweighted least squares of a polynomial through the nearest readings, on one side at the ends; a tie goes to the earlier reading. Left out, the number of readings is the one for which the expected squared error of the slopes, bend and scatter together, is smallest over the run. With the number given, the standard uncertainty comes from the scatter about the polynomial, with points − degree − 1 degrees of freedom, and knows nothing of a bend the polynomial cannot follow; with the number left out, uncertainty and limits are those of one degree more in the same readings, which are nearly free of that bias, from the scatter pooled over the run.';
+  'A polynomial through the nearest readings by unweighted least squares, on one side at the ends; of two readings equally near, the earlier counts. Left out, the number of readings is the one for which the expected squared error of the slopes, bend and scatter together, is smallest over the run.';

@@ -9,8 +9,17 @@ import { CellError, type CellValue } from '../cell';
 import type { Column } from '../column';
 import { detail } from '../commonParameters';
 import { defineFunction } from '../define';
+import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow, standardRowHeadings } from '../results';
-import { filled, schemeMethod, schemeParameters, speciesAt, stepAt, timesOf } from './schemeParameters';
+import {
+  filled,
+  schemeEquations,
+  schemeMethod,
+  schemeParameters,
+  speciesAt,
+  stepAt,
+  timesOf,
+} from './schemeParameters';
 
 /** Beyond this correlation two coefficients are hard to tell apart, which the answer says. */
 const closeCorrelation = 0.95;
@@ -24,7 +33,9 @@ export default defineFunction({
   name: 'FITCOURSE',
   family: 'mechanism',
   summary: 'Rate coefficients of a written mechanism, fitted to the readings of several species at once.',
+  equations: schemeEquations,
   method: `${schemeMethod} The coefficients given are where the search starts. Least squares over all readings as they are, each counting alike, so all columns must be in one unit; coefficients are searched as logarithms, with sensitivities integrated beside the concentrations; where start values lead to a poorer fit than coefficients that suit the length of the run, the better is taken. Limits are those of the profile likelihood. A coefficient that the readings cannot tell, or whose standard uncertainty exceeds itself, is #N/A and says why. With detail: a row a coefficient, and after the standard row the one it is hard to tell from.`,
+  uncertainty: uncertaintyOf.profile,
   parameters: { ...schemeParameters, observed, detail: detail() },
   result: { unit: 'concentration^(1−n) per time', shape: 'table' },
   // A halves every 10, B is not observed
@@ -33,6 +44,21 @@ export default defineFunction({
     equals: [[0.06931471805599453]],
     within: 1e-8,
   },
+  refusals: [
+    {
+      formula: '=PACE.FITCOURSE("A -> B",0.1,{8;0},{0;10;20},{8;4;2})',
+      mend: 'Give a column for each species, blank where it was not observed.',
+    },
+    {
+      formula: '=PACE.FITCOURSE("A -> B",0,{8;0},{0;10;20},{8,;4,;2,})',
+      mend: 'Start from any value above 0 that suits the length of the run.',
+    },
+    {
+      formula: '=PACE.FITCOURSE("A -> B; B -> C",{0.1;0.1},{8;0;0},{10},{4,,})',
+      mend: 'Take more readings than there are coefficients.',
+    },
+  ],
+  seeAlso: ['COURSE', 'ORDERS', 'PLAN'],
   reference: 'doi:10.1007/s10543-023-00967-x; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
   isLong: true,
   run({ scheme, coefficients, initial, times, observed: readings, detail: isDetailed }) {

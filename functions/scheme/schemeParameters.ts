@@ -70,5 +70,17 @@ export const speciesAt =
   (place: number): string =>
     species[place] ?? 'a species that the scheme does not have';
 
+export const schemeEquations = {
+  lines: ['vⱼ = kⱼ ∏ᵢ cᵢ^(a_ij)', 'dcᵢ/dt = ∑ⱼ ν_ij vⱼ'],
+  where: {
+    vⱼ: 'rate of step j',
+    kⱼ: 'rate coefficient of step j',
+    cᵢ: 'concentration of species i',
+    a_ij: 'how often species i stands on the left side of step j',
+    t: 'time',
+    ν_ij: 'stoichiometric number of species i in step j: what stands on the right less what stands on the left',
+  },
+};
+
 export const schemeMethod =
-  "A step's rate is v = k ∏ c^(coefficient) over its left side as written, and each species changes by its net number times v. The equations are integrated by a Rosenbrock method of order 5 with analytic derivatives, which stiff mechanisms do not slow down; initial belongs to time 0.";
+  'Each step is taken as elementary, as written. The equations are integrated by a Rosenbrock method of order 5 with analytic derivatives, which stiff mechanisms do not slow down; initial belongs to time 0.';

@@ -3,6 +3,7 @@ import { concentrationFromAbsorbance } from '../../src/signal/absorbance';
 import { convertColumn } from '../column';
 import { sayAbsorbance } from '../builtIn/linear';
 import { defineFunction } from '../define';
+import { uncertaintyOf } from '../uncertaintyOf';
 import { number, optional, readings } from '../parameters';
 import { quantity } from '../quantityParameters';
 
@@ -10,8 +11,21 @@ export default defineFunction({
   name: 'ABSORBANCE',
   family: 'reading',
   summary: 'Concentration, mol/L, from absorbance by the law of Beer and Lambert.',
+  equations: {
+    lines: ['c = (A − A₀)/(εl)', 'c = [(A − A₀)/l − ε_p c_tot]/(ε − ε_p)'],
+    where: {
+      c: 'concentration, mol/L',
+      A: 'absorbance read, decadic',
+      'A₀': 'blank',
+      ε: 'absorptivity, molar, of the species wanted',
+      l: 'path, the length through the sample',
+      ε_p: 'molar absorptivity of the product; 0 where it does not absorb',
+      c_tot: 'total, reactant and product together',
+    },
+  },
   method:
-    'c = (A − A₀)/(εl). Where the reactant turns one to one into a product that absorbs as well, c = [(A − A₀)/l − ε(product)·total]/(ε − ε(product)). Straight only up to an absorbance of about 2 on most instruments (common practice).',
+    'The law of Beer and Lambert. Where the reactant turns one to one into a product that absorbs as well, the second equation holds. On most instruments it is straight only up to an absorbance of about 2 (common practice).',
+  uncertainty: uncertaintyOf.conversion,
   parameters: {
     readings: readings({ help: 'absorbance, decadic, one or many', unit: '1' }),
     absorptivity: number({ help: 'molar, of the species wanted', unit: 'L/(mol cm)', atLeast: 0 }),
@@ -30,6 +44,18 @@ export default defineFunction({
   },
   result: { unit: 'mol/L', shape: 'as given' },
   example: { formula: '=PACE.ABSORBANCE({0.012;0.512},2500,1,0.012)', equals: [[0], [0.0002]] },
+  refusals: [
+    { formula: '=PACE.ABSORBANCE(0.5,2500,1,0,900)', mend: 'Give both product and total, or neither.' },
+    {
+      formula: '=PACE.ABSORBANCE(0.5,2500,1,0,2500,0.001)',
+      mend: 'At this wavelength the reaction cannot be seen: choose another.',
+    },
+    {
+      formula: '=PACE.ABSORBANCE(0.5,0)',
+      mend: 'Give the molar absorptivity of the species at this wavelength, from standards if need be: PACE.STANDARDS.',
+    },
+  ],
+  seeAlso: ['STANDARDS', 'COEFFICIENT', 'ORDERS', 'CONVERSION'],
   reference: 'doi:10.1351/goldbook.B00626',
   run({ readings, absorptivity, path, blank, product, total }) {
     if ((product === undefined) !== (total === undefined)) {

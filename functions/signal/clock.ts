@@ -6,6 +6,7 @@ import { CellError, shownCell, type CellRange, type CellValue } from '../cell';
 import { inRows, placeInWords } from '../column';
 import { sayClock } from '../builtIn/clock';
 import { defineFunction } from '../define';
+import { uncertaintyOf } from '../uncertaintyOf';
 import { isLeftOut, optional, required, single, text, type Parameter } from '../parameters';
 
 /** What a clock showed, cell by cell, in the shape given. */
@@ -72,6 +73,7 @@ export default defineFunction({
   summary: 'Time a run has taken, from what a stopwatch or a clock showed.',
   method:
     'A workbook keeps times as days; this gives them in a unit of your choice, to a microsecond. Clock times without a date may pass midnight: a step back by more than half a day starts the next one. 4:30 is hours and minutes, as the workbook itself reads it; 4:30.0 and "4 min 30 s" are minutes.',
+  uncertainty: uncertaintyOf.conversion,
   parameters: {
     times: clockReadings,
     unit: optional(text({ help: 'unit of the answer' }), 's'),
@@ -79,6 +81,15 @@ export default defineFunction({
   },
   result: { unit: 's unless unit says otherwise', shape: 'as given' },
   example: { formula: '=PACE.CLOCK({"23:58:30";"0:04:30"},"min","first")', equals: [[0], [6]] },
+  refusals: [
+    {
+      formula: '=PACE.CLOCK({"4:75:00"})',
+      mend: 'Write minutes and seconds below 60, or the unit with each: "4 h 75 min".',
+    },
+    { formula: '=PACE.CLOCK({46000.5;0.6},"s","first")', mend: 'Give every time its date, or none.' },
+    { formula: '=PACE.CLOCK({0;60},"mL")', mend: 'Give a unit of time: s, min, h, day.' },
+  ],
+  seeAlso: ['CHECK', 'GASVOLUME', 'MASSLOSS'],
   reference: 'ISO 8601-1:2019',
   run({ times, unit, start }) {
     const unitInSeconds = convertUnit(1, unit, 's', 'unit');

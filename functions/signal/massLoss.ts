@@ -4,6 +4,7 @@ import { convertColumn, convertToRows, firstNumber, requireLine, type Column } f
 import { detail } from '../commonParameters';
 import { sayMassLoss } from '../builtIn/gas';
 import { defineFunction } from '../define';
+import { uncertaintyOf } from '../uncertaintyOf';
 import { number, optional, readings, text } from '../parameters';
 import { quantity } from '../quantityParameters';
 import { standardRow, unknownUncertaintyRow } from '../results';
@@ -12,8 +13,24 @@ export default defineFunction({
   name: 'MASSLOSS',
   family: 'reading',
   summary: 'Amount of gas gone, mol, from the mass of the vessel that it leaves.',
+  equations: {
+    lines: ['n = (m₀ − m)/M', 'M = M_gas + M_w p*/(p − p*)', 'u_n = δ/(M√6)'],
+    where: {
+      n: 'amount of gas gone, mol',
+      'm₀': 'mass at the start',
+      m: 'mass read',
+      M: 'mass that leaves with each mole of gas',
+      M_gas: 'molar mass of the gas',
+      M_w: 'molar mass of water',
+      'p*': 'vapour pressure of water at the temperature; 0 for a dry gas',
+      p: 'pressure of the room',
+      u_n: 'standard uncertainty of n',
+      δ: 'readability, the smallest step of the balance',
+    },
+  },
   method:
-    'n = (m₀ − m)/M. With a temperature, M also counts the water vapour that the gas carries off saturated, M(H₂O)p*/(p − p*) per mole of gas. A readability d gives each loss the standard uncertainty d/√6 (GUM F.2.2.1), and a run whose largest loss stays below 3.29 of these cannot be seen (detection limit, Currie 1995).',
+    'With a temperature, each mole of gas carries off the water vapour that saturates it, and M counts it. With a readability δ, a run whose largest loss stays below 3.29 standard uncertainties cannot be seen (detection limit, Currie 1995).',
+  uncertainty: uncertaintyOf.readability,
   parameters: {
     masses: readings({
       help: 'mass of the vessel with its contents, or the change a tared balance shows',
@@ -41,6 +58,21 @@ export default defineFunction({
   result: { unit: 'mol', shape: 'as given' },
   // 0.44009 g of CO2, at 44.009 g/mol (standard atomic weights 2021)
   example: { formula: '=PACE.MASSLOSS({187.352;186.91191},"CO2")', equals: [[0], [0.01]] },
+  refusals: [
+    {
+      formula: '=PACE.MASSLOSS({100;99.99},"H2",,0.01)',
+      mend: 'Use a finer balance, a larger batch, or catch the gas: the loss is too small for this balance.',
+    },
+    {
+      formula: '=PACE.MASSLOSS({100;99},"C02")',
+      mend: 'Write CO2 with the letter O. A formula is made of element symbols and counts; the molar mass in g/mol will do as well.',
+    },
+    {
+      formula: '=PACE.MASSLOSS({100;99},"CO2",,,"100 degC",101)',
+      mend: 'Check temperature and pressure: at these the water boils.',
+    },
+  ],
+  seeAlso: ['REMAINING', 'TANGENT', 'GASVOLUME'],
   reference: 'doi:10.1515/pac-2019-0603; doi:10.1351/pac199567101699; JCGM 100:2008',
   caution:
     'Never close the vessel to keep spray in: the gas must leave freely. A loose plug of glass wool holds the spray. Local rules come first.',

@@ -18,8 +18,19 @@ export default defineFunction({
   name: 'MEANTEMP',
   family: 'temperature',
   summary: 'Mean kinetic temperature of a logged history, degC.',
+  equations: {
+    lines: ['exp(−E_a/(RT_m)) = (∑ᵢ wᵢ exp(−E_a/(RTᵢ)))/(∑ᵢ wᵢ)'],
+    where: {
+      T_m: 'mean kinetic temperature, K',
+      E_a: 'energy, the activation energy',
+      R: 'molar gas constant, 8.314463 J/(mol K)',
+      Tᵢ: 'temperature of a reading, K',
+      wᵢ: 'time that it stands for',
+    },
+  },
   method:
-    'T = (Ea/R)/−ln[Σ w exp(−Ea/RT)/Σ w], the one temperature that does as much as the history did. With times each reading counts from halfway to the reading before until halfway to the next, so that intervals may differ and a gap is shared by its neighbours; readings of one time share theirs. Without times all count alike. 83.144 kJ/mol is the activation energy common in the stability guidelines.',
+    'The one temperature that does as much as the history did; warm spells count for more than in the plain mean. With times each reading counts from halfway to the reading before until halfway to the next, so that intervals may differ and a gap is shared by its neighbours; readings of one time share theirs. Without times all count alike. 83.144 kJ/mol is the activation energy common in the stability guidelines.',
+  uncertainty: 'None is given: the logger’s own uncertainty carries over almost unchanged.',
   parameters: {
     temperatures: temperatures({ help: 'readings of the logger' }),
     times: optional(
@@ -36,6 +47,11 @@ export default defineFunction({
   result: { unit: 'degC', shape: 'one value' },
   // half the time at 20 °C and half at 30 °C, at thirty digits
   example: { formula: '=PACE.MEANTEMP({20;30})', equals: 26.25987771169222 },
+  refusals: [
+    { formula: '=PACE.MEANTEMP({293;303})', mend: 'Give °C, or write the unit in each cell: "293 K".' },
+    { formula: '=PACE.MEANTEMP({20;30},{0;1;2})', mend: 'Give one time for each temperature.' },
+  ],
+  seeAlso: ['COEFFICIENTAT', 'ARRHENIUS', 'TIMETO'],
   reference: 'Haynes 1971, doi:10.1002/jps.2600600629; ICH Q1A(R2) (2003), glossary',
   caution: shelfLifeCaution,
   run({ temperatures, times, energy }) {

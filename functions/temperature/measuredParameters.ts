@@ -62,3 +62,14 @@ function requireSomePair(temperatures: Column, coefficients: Column): void {
 /** Of the method, which all state. */
 export const weightsInWords =
   'Least squares are of logarithms: each k counts with the same relative uncertainty, or with (k/u)² where uncertainties u are given; their scale comes from the scatter about the line. The choice matters: a nonlinear fit to k itself without uncertainties heeds the hottest runs alone, and on five published coefficients over 226 K moves the activation energy from 185 to 198 kJ/mol.';
+
+export const arrheniusEquations = {
+  lines: ['k = A exp(−E_a/(RT))', 'ln k = ln A − E_a/(RT)'],
+  where: {
+    k: 'rate coefficient',
+    A: 'pre-exponential factor, in the unit of k',
+    E_a: 'activation energy',
+    R: 'molar gas constant, 8.314463 J/(mol K)',
+    T: 'temperature, K',
+  },
+};

@@ -71,6 +71,9 @@ function massOf(body: string, whole: string, offset: number): number {
 
   function countOf(digits: string, at: number): number {
     if (digits === '') return 1;
-    return Number(digits) > 0 ? Number(digits) : failAt(at, 'a count of 0');
+    if (Number(digits) === 0) failAt(at, 'a count of 0');
+    // C02, with a zero for the letter, would pass for two atoms of carbon
+    if (digits.startsWith('0')) failAt(at, 'a count that begins with 0');
+    return Number(digits);
   }
 }

@@ -1,6 +1,7 @@
 /** Every function, found by name or words, with its help and its example. */
 import { functionNamed } from '../../functions/catalogue';
 import { typedName, type CellFunction } from '../../functions/define';
+import { howInWords } from '../../functions/documented';
 import type { Actions } from '../actions';
 import { h, type Child } from '../h';
 import { families, lookUp, signature } from '../lookup';
@@ -75,7 +76,13 @@ function article(f: CellFunction, actions: Actions): Child[] {
       h('dd', {}, `${f.result.shape}, unit ${f.result.unit}`),
     ),
     f.caution !== undefined && h('p', { className: 'caution' }, f.caution),
-    h('details', {}, h('summary', {}, 'How it is worked out'), h('p', { className: 'hint' }, f.method)),
+    h(
+      'details',
+      {},
+      h('summary', {}, 'How it is worked out'),
+      h('p', { className: 'hint' }, howInWords(f)),
+      h('p', { className: 'hint' }, f.uncertainty),
+    ),
     h('p', { className: 'hint' }, `Reference: ${f.reference}`),
     h('p', { className: 'what' }, 'Example'),
     formulaLine(f.example.formula, actions),

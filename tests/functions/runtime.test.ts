@@ -40,6 +40,8 @@ const shared = {
   family: 'rate' as const,
   summary: '',
   method: '',
+  uncertainty: '',
+  seeAlso: [],
   result: { unit: '1', shape: 'one value' as const },
   example: { formula: '', equals: 0 },
   reference: '',

@@ -4,7 +4,7 @@ import { callFunction } from '../../functions/call';
 import { functionNamed } from '../../functions/catalogue';
 import { isRange, type CellRange, type CellResult, type CellValue } from '../../functions/cell';
 import type { SheetArea } from '../../taskpane/port';
-import { partsOf } from '../../taskpane/examples';
+import { partsOf } from '../../functions/literal';
 
 /** @returns nothing for a formula that is no call of ours */
 export function answerOf(

@@ -2,6 +2,7 @@
 import { areaName, cellName } from '../../functions/address';
 import { CellError } from '../../functions/cell';
 import { typedName, type CellFunction } from '../../functions/define';
+import { howInWords } from '../../functions/documented';
 import { signature } from '../../functions/readmeTable';
 import {
   avogadroConstant,
@@ -70,7 +71,7 @@ const functionsOf = (formulas: readonly HandedFormula[]): CellFunction[] => [
 ];
 
 function functionRow(f: CellFunction): SheetCell[] {
-  return [{ heading: typedName(f) }, f.result.unit, `${signature(f)}: ${f.summary}`, f.method, f.reference];
+  return [{ heading: typedName(f) }, f.result.unit, `${signature(f)}: ${f.summary}`, howInWords(f), f.reference];
 }
 
 export const unwatched = 'not watched';
@@ -104,7 +105,7 @@ export function noteText(
   const first = values[0][0];
   const error =
     first instanceof CellError && first.message ? [`It showed ${first.code}: ${first.message}`] : [];
-  const method = functions.map((f) => `${typedName(f)}: ${f.method}`);
+  const method = functions.map((f) => `${typedName(f)}: ${howInWords(f)}`);
   return [
     `Frozen on ${date} by Flaskpace ${version}: ${why}.`,
     `It was =${original}`,

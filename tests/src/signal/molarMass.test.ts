@@ -53,6 +53,7 @@ test.each([
   ['CuSO4·5', `${rule}nothing at character 8 of "CuSO4·5"`],
   ['CuSO4·5Hx', `${rule}"Hx" has no standard atomic weight at character 8 of "CuSO4·5Hx"`],
   ['K3[Fe(CN)6)', `${rule}")" closes "[" at character 11 of "K3[Fe(CN)6)"`],
+  ['C02', `${rule}a count that begins with 0 at character 2 of "C02"`],
   ['0H2O', `${rule}a count of 0 at character 1 of "0H2O"`],
 ])('molarMass("%s") says where it broke', (formula, message) => {
   expect(() => molarMass(formula)).toThrow(new InvalidInput(message));
