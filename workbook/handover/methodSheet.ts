@@ -71,7 +71,13 @@ const functionsOf = (formulas: readonly HandedFormula[]): CellFunction[] => [
 ];
 
 function functionRow(f: CellFunction): SheetCell[] {
-  return [{ heading: typedName(f) }, f.result.unit, `${signature(f)}: ${f.summary}`, howInWords(f), f.reference];
+  return [
+    { heading: typedName(f) },
+    f.result.unit,
+    `${signature(f)}: ${f.summary}`,
+    howInWords(f),
+    f.reference,
+  ];
 }
 
 export const unwatched = 'not watched';
