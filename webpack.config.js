@@ -30,14 +30,14 @@ const base = (name) => ({
 
 const addin = {
   ...base('addin'),
-  entry: { addin: './taskpane/addin.ts' },
+  entry: { addin: './workbook/addin/main.ts' },
   // a name that changes with its content can be kept by a browser for ever
   output: { ...base('addin').output, filename: 'built/[name].[contenthash:12].js' },
   plugins: [
     new MiniCssExtractPlugin({ filename: 'built/[name].[contenthash:12].css' }),
     new HtmlWebpackPlugin({
       filename: 'taskpane.html',
-      template: './taskpane/taskpane.html',
+      template: './workbook/addin/taskpane.html',
       scriptLoading: 'defer',
     }),
     new CopyWebpackPlugin({ patterns: [{ from: 'assets', to: 'assets' }] }),

@@ -12,7 +12,7 @@ const everywhere = ['package-lock.json', 'webpack.config.js', 'src', 'functions'
 
 /** Files and folders that go into each bundle of webpack.config.js. */
 const sources = {
-  addin: [...everywhere, 'taskpane', 'assets'],
+  addin: [...everywhere, 'taskpane', 'workbook', 'assets'],
   workbook: [...everywhere, 'taskpane', 'workbook', 'assets'],
   commands: [
     ...everywhere,

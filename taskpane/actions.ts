@@ -1,6 +1,7 @@
 /** What a person can do in the pane. Actions alone both change the store and ask the workbook. */
 import { areaName } from '../functions/address';
 import { benchOf, guardedBy } from './actions/bench';
+import { handingOver } from './actions/handOver';
 import {
   changeRun,
   chooseSignal,
@@ -24,6 +25,7 @@ import type {
   Task,
   TemperatureChoice,
 } from './choices';
+import type { CopyMaker } from './copying';
 import type { WorkbookPort } from './port';
 import type { Corrections, Run } from './runs';
 import type { Store } from './store';
@@ -55,16 +57,22 @@ export interface Actions {
   putIn(overwrite: boolean): Promise<void>;
   declineOverwrite(): void;
   undoLast(): Promise<void>;
+  /** Makes a copy of the workbook that needs no add-in. */
+  makeCopy(): Promise<void>;
+  /** Gives the copy that was made. */
+  giveCopy(): Promise<void>;
   copy(text: string): Promise<void>;
   /** Reads the sheet again: the selection moved, or the pane came back into view. */
   refresh(): Promise<void>;
 }
 
-export function createActions(store: Store, port: WorkbookPort): Actions {
+/** @param makeCopy left out where there is nobody to make one */
+export function createActions(store: Store, port: WorkbookPort, makeCopy?: CopyMaker): Actions {
   const bench = benchOf(store, port);
   const guarded = guardedBy(bench);
   const work = longWork(bench);
   const { settle, putIn, undoLast } = putting(bench, work);
+  const copying = handingOver(bench, makeCopy);
 
   /** A choice is changed, with all that hangs on it. */
   const changing = <Step extends keyof Choices>(step: Step) =>
@@ -127,7 +135,10 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
     changeLookup: changing('lookup'),
     changeMany: changing('many'),
     surveyRuns: guarded(() => surveyRuns(bench, work)),
-    stop: () => work.stop(),
+    stop() {
+      work.stop();
+      copying.stop();
+    },
     pointAt: guarded(pointAt),
     changeTarget: guarded(changeTarget),
     targetActiveCell: guarded(() => pointAt('cell', changeTarget)),
@@ -138,6 +149,8 @@ export function createActions(store: Store, port: WorkbookPort): Actions {
     putIn: guarded(putIn),
     declineOverwrite: () => store.choose('put', { question: null }),
     undoLast: guarded(undoLast),
+    makeCopy: guarded(copying.make),
+    giveCopy: guarded(copying.give),
     copy: guarded(async (text) => {
       await navigator.clipboard.writeText(text);
       bench.notify('good', 'formula copied');

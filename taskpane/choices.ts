@@ -1,7 +1,7 @@
 /** What a person has chosen at each step, as typed: an empty field is an argument left out. */
 
 /** The steps of the work; one is open at a time. */
-export type Task = 'reading' | 'rate' | 'order' | 'many' | 'temperature' | 'lookUp';
+export type Task = 'reading' | 'rate' | 'order' | 'many' | 'temperature' | 'handOver' | 'lookUp';
 
 export type RateKind = 'average' | 'tangent' | 'column';
 

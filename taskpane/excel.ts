@@ -1,6 +1,8 @@
-/** The workbook port over Office.js, and the only caller of it. Each call is one batch with as few syncs as it can do with. */
+/** The workbook port over Office.js; nothing but this and its folder calls it. Each call is one batch with as few syncs as it can do with. */
 import { cellName, parseArea, type Area } from '../functions/address';
 import { CellError, type CellRange, type CellValue, type ErrorCode } from '../functions/cell';
+import { excelFiles } from './excel/files';
+import { allSupport, type HostSupport } from './excel/support';
 import {
   CellsInUse,
   type CellToWrite,
@@ -22,9 +24,10 @@ interface Snapshot {
   }[];
 }
 
-export function excelPort(host = 'Excel'): WorkbookPort {
+export function excelPort({ name, files }: HostSupport = allSupport): WorkbookPort {
   return {
-    host,
+    host: name,
+    ...(files && { files: excelFiles }),
     selection: () => Excel.run(readSelection),
     regionAroundActiveCell: () => Excel.run(readRegion),
     activeCell: () => Excel.run(readActiveCell),

@@ -1,9 +1,11 @@
 /** The pane: draws the steps whenever something changes, and listens to the workbook. */
 import { createActions, type Actions } from './actions';
 import { h } from './h';
+import type { CopyMaker } from './copying';
 import { patch } from './patch';
 import type { WorkbookPort } from './port';
 import type { Task } from './choices';
+import { handOverStep } from './steps/handOver';
 import { lookUpStep } from './steps/lookUp';
 import { manyStep } from './steps/many';
 import { orderStep } from './steps/order';
@@ -17,16 +19,22 @@ import { createScenes, type Scene } from './scene';
 import { createStore, type State } from './store';
 
 export interface PaneOptions {
+  /** Left out where nobody can make one. */
+  readonly makeCopy?: CopyMaker;
   /** Shows a notice in the host's own way as well. */
   readonly notify?: (words: string, tone: 'good' | 'bad') => void;
 }
 
 /** @returns a function that takes the pane away again */
-export function mountPane(root: HTMLElement, port: WorkbookPort, { notify }: PaneOptions = {}): () => void {
+export function mountPane(
+  root: HTMLElement,
+  port: WorkbookPort,
+  { makeCopy, notify }: PaneOptions = {},
+): () => void {
   const store = createStore();
-  const actions = createActions(store, port);
+  const actions = createActions(store, port, makeCopy);
   const sceneOf = createScenes();
-  const draw = (state: State): HTMLElement => view(sceneOf(state), actions, port.host);
+  const draw = (state: State): HTMLElement => view(sceneOf(state), actions, port);
   const pane = draw(store.state);
   root.replaceChildren(pane);
 
@@ -79,25 +87,31 @@ function oneAtATime(look: () => Promise<void>): () => void {
   };
 }
 
-const steps: Readonly<Record<Task, (scene: Scene, actions: Actions) => HTMLElement>> = {
+/** What the views show of the workbook's host; they ask nothing of it. */
+type Host = Pick<WorkbookPort, 'host' | 'files'>;
+
+type Step = (scene: Scene, actions: Actions, host: Host) => HTMLElement;
+
+const steps: Readonly<Record<Task, Step>> = {
   reading: readingStep,
   rate: rateStep,
   order: orderStep,
   many: manyStep,
   temperature: temperatureStep,
+  handOver: ({ state }, actions, { files }) => handOverStep(state, files, actions),
   lookUp: lookUpStep,
 };
 
-export function view(scene: Scene, actions: Actions, host: string): HTMLElement {
+export function view(scene: Scene, actions: Actions, host: Host): HTMLElement {
   const { notice, task } = scene.state;
   return h(
     'div',
     { className: 'flaskpace' },
-    h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host)),
+    h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host.host)),
     runStep(scene, actions),
     taskBar(task, actions),
-    steps[task](scene, actions),
-    putInStep(scene, actions),
+    steps[task](scene, actions, host),
+    task !== 'handOver' && putInStep(scene, actions),
     h('p', { className: `notice ${notice?.tone ?? ''}`, role: 'status' }, notice?.words ?? ''),
   );
 }

@@ -37,9 +37,23 @@ export class CellsInUse extends Error {
   }
 }
 
+/** The workbook as a file, where the host gives it. */
+export interface WorkbookFiles {
+  /** What becomes of a file that is given: `opens as a new workbook`. */
+  readonly gives: string;
+  /** For the button that gives it: `Open the copy`. */
+  readonly verb: string;
+  /** The workbook as it stands now, as an .xlsx file; `missing` says in words what could not be put into it. */
+  read(): Promise<{ readonly bytes: Uint8Array; readonly missing?: string }>;
+  /** Gives the person another workbook. @returns what became of it, in words; `null` when they thought better of it */
+  give(bytes: Uint8Array): Promise<string | null>;
+}
+
 export interface WorkbookPort {
   /** For the notice line: `Excel`, `local workbook`. */
   readonly host: string;
+  /** Left out where the host gives no files. */
+  readonly files?: WorkbookFiles;
   /** The selected cells, trimmed to the used part of the sheet; `null` when nothing sensible is selected. */
   selection(): Promise<RangeReading | null>;
   /** The block of filled cells around the active cell. */

@@ -118,7 +118,7 @@ export function createScenes(): (state: State) => Scene {
 function isAnswered(scene: Scene): boolean {
   const { task, order: choice } = scene.state;
   if (task === 'temperature') return isTemperatureAnswered(scene);
-  if (task === 'many' || task === 'lookUp') return scene.insertion !== null;
+  if (task === 'many' || task === 'lookUp' || task === 'handOver') return scene.insertion !== null;
   if (task === 'reading') return scene.reading?.kind === 'column';
   if (task === 'rate') return scene.rate !== null && scene.rate.kind !== 'refused';
   const { order, orders } = scene;

@@ -2,6 +2,7 @@
 import type { CellRange } from '../functions/cell';
 import type { Surveyed } from './calls/many';
 import { firstChoices, type Choices, type Task } from './choices';
+import type { HandedCopy } from './copying';
 import type { RangeReading, WriteReceipt } from './port';
 import type { Run, Table } from './runs';
 
@@ -23,6 +24,11 @@ export interface Survey {
   readonly isWhole: boolean;
 }
 
+/** The copy for someone who installs nothing: on its way, or made. */
+export type Copying =
+  | { readonly kind: 'making'; readonly doing: string }
+  | { readonly kind: 'made'; readonly copy: HandedCopy; readonly at: Date };
+
 /** What was written at one go, and what the pane was about before: both can be brought back. */
 export interface Deed {
   readonly description: string;
@@ -42,6 +48,7 @@ export interface State extends Choices {
   readonly pointedAt: ReadonlyMap<string, CellRange>;
   readonly survey: Survey | null;
   readonly progress: Progress | null;
+  readonly copying: Copying | null;
   readonly deeds: readonly Deed[];
   readonly notice: Notice | null;
 }
@@ -56,6 +63,7 @@ export const firstState: State = {
   pointedAt: new Map(),
   survey: null,
   progress: null,
+  copying: null,
   deeds: [],
   notice: null,
 };

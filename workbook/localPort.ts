@@ -6,11 +6,12 @@ import {
   type CellToWrite,
   type RangeReading,
   type SheetArea,
+  type WorkbookFiles,
   type WorkbookPort,
 } from '../taskpane/port';
 import type { CellToSet, Grid } from './engine/grid';
 
-export function localPort(grid: Grid): WorkbookPort {
+export function localPort(grid: Grid, files: WorkbookFiles): WorkbookPort {
   const requireSheet = (sheet: string): void => {
     if (!grid.sheets().includes(sheet)) throw new Error(`there is no sheet named "${sheet}"`);
   };
@@ -35,6 +36,7 @@ export function localPort(grid: Grid): WorkbookPort {
 
   return {
     host: 'local workbook',
+    files,
     async selection() {
       const selected = grid.selected();
       const used = selected && usedPart(grid, selected);

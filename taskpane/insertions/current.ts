@@ -11,7 +11,7 @@ import { temperatureInsertion } from './temperature';
 export function currentInsertion(state: State): Insertion | null {
   const { table, run, task, put } = state;
   if (task === 'lookUp') return exampleInsertion(state.lookup.chosen);
-  if (!table || !run) return null;
+  if (!table || !run || task === 'handOver') return null;
   if (task === 'order') return orderInsertion(table, run, state, put.withDetail);
   if (task === 'many') return manyInsertion(table, run, state);
   if (task === 'temperature') return temperatureInsertion(table, run, state);

@@ -6,6 +6,7 @@ import { planFor, type Plan } from '../plan';
 import type { Scene } from '../scene';
 import type { State } from '../store';
 import { button, checkField, step, textField } from './fields';
+import { list } from './list';
 
 const title = 'Put it in';
 
@@ -93,13 +94,6 @@ function question(areas: readonly string[], actions: Actions): HTMLElement {
     ),
   );
 }
-
-const longestList = 4;
-
-const list = (names: readonly string[]): string =>
-  names.length <= longestList
-    ? names.join(', ')
-    : `${names.slice(0, longestList).join(', ')} and ${names.length - longestList} more`;
 
 function undoButton({ deeds }: State, actions: Actions): HTMLElement | null {
   const last = deeds[deeds.length - 1];

@@ -9,6 +9,7 @@ export const tasks: readonly (readonly [Task, string])[] = [
   ['order', 'Order'],
   ['many', 'All runs'],
   ['temperature', 'Temperature'],
+  ['handOver', 'Hand over'],
   ['lookUp', 'Look up'],
 ];
 

@@ -1,5 +1,5 @@
 /** The pane over a workbook in memory, and the hands of a person. */
-import { mountPane } from '../../taskpane/pane';
+import { mountPane, type PaneOptions } from '../../taskpane/pane';
 import type { WorkbookPort } from '../../taskpane/port';
 import { memoryWorkbook, type MemoryWorkbook, type Sheets } from './memoryPort';
 
@@ -29,10 +29,10 @@ export async function openPane(sheets: Sheets, at: string): Promise<PaneBench> {
   return { book, ...(await openPaneOver(book.port)) };
 }
 
-export async function openPaneOver(port: WorkbookPort): Promise<PaneHands> {
+export async function openPaneOver(port: WorkbookPort, options?: PaneOptions): Promise<PaneHands> {
   const root = document.createElement('main');
   document.body.append(root);
-  const unmount = mountPane(root, port);
+  const unmount = mountPane(root, port, options);
   await settled();
 
   const find = <E extends HTMLElement>(selector: string): E => {

@@ -28,6 +28,9 @@ export interface Documents {
   open(): Promise<void>;
   saveAs(): Promise<void>;
   demo(): Promise<void>;
+  /** The workbook as a file would hold it now. */
+  file(): Promise<Updated>;
+  readonly name: string;
   readonly isUnsaved: boolean;
 }
 
@@ -126,6 +129,10 @@ export function documentsOf(
     open: guarded(open, 'the file was not opened'),
     saveAs: guarded(async () => void (await save()), 'the file was not saved'),
     demo: guarded(demo, 'the demo was not opened'),
+    file: fileNow,
+    get name() {
+      return shown.name;
+    },
     get isUnsaved() {
       return isUnsaved;
     },

@@ -4,10 +4,12 @@ import { h } from '../../taskpane/h';
 import { mountPane } from '../../taskpane/pane';
 import { startWorker } from '../../taskpane/startWorker';
 import '../../taskpane/pane.css';
+import { copyOnWorker } from '../copying/copyOnWorker';
 import { demoWorkbook } from '../demo/demo';
 import { createGrid } from '../engine/univer/grid';
 import { localPort } from '../localPort';
 import { followActiveCell } from './cellLine';
+import { pageFiles } from './copies';
 import { documentsOf, selectFirstNumber } from './documents';
 import { fileFormat } from './fileFormat';
 import './page.css';
@@ -38,8 +40,8 @@ async function start(): Promise<void> {
   selectFirstNumber(grid, demo);
 
   followActiveCell(part('cell-line'), grid);
-  const port = localPort(grid);
-  mountPane(part('pane'), port);
+  const port = localPort(grid, pageFiles(documents));
+  mountPane(part('pane'), port, { makeCopy: copyOnWorker });
   moveBetween([
     { element: strip.element },
     { element: part('sheet'), focus: () => grid.focus() },

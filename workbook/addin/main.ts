@@ -1,12 +1,14 @@
 /** What Excel loads: the cell functions at once, the pane when Office is ready; one runtime for both. */
-import { workerWork } from '../functions/longWork';
-import { associateAll, keepLoadedWithWorkbook } from '../functions/runtime';
-import { blanksIn, excelPort } from './excel';
-import { h } from './h';
-import { hostName, notice } from './host';
-import { mountPane } from './pane';
-import { startWorker } from './startWorker';
-import './pane.css';
+import { workerWork } from '../../functions/longWork';
+import { associateAll, keepLoadedWithWorkbook } from '../../functions/runtime';
+import { blanksIn, excelPort } from '../../taskpane/excel';
+import { supportOf } from '../../taskpane/excel/support';
+import { h } from '../../taskpane/h';
+import { hostName, notice } from '../../taskpane/host';
+import { mountPane } from '../../taskpane/pane';
+import '../../taskpane/pane.css';
+import { startWorker } from '../../taskpane/startWorker';
+import { copyOnWorker } from '../copying/copyOnWorker';
 import './taskpane.css';
 
 // not inside onReady: a workbook may calculate before the pane is shown
@@ -31,7 +33,10 @@ async function start(root: HTMLElement): Promise<void> {
     root.replaceChildren(h('p', {}, 'Flaskpace works inside Excel: open it from the Home tab there.'));
     return;
   }
-  mountPane(root, excelPort(host), { notify: (words, tone) => tone === 'bad' && notice(words) });
+  mountPane(root, excelPort(supportOf(host)), {
+    makeCopy: copyOnWorker,
+    notify: (words, tone) => tone === 'bad' && notice(words),
+  });
   await keepLoadedWithWorkbook(globalThis);
 }
 

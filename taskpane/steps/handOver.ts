@@ -1,0 +1,116 @@
+/** A copy of the workbook for someone who installs nothing. */
+import type { Actions } from '../actions';
+import type { HandedCopy } from '../copying';
+import { h, type Child } from '../h';
+import type { WorkbookFiles } from '../port';
+import type { Copying, State } from '../store';
+import { button, step } from './fields';
+import { list } from './list';
+
+const title = 'Hand over';
+
+/** @param files left out where the host gives none */
+export function handOverStep(
+  { copying }: State,
+  files: WorkbookFiles | undefined,
+  actions: Actions,
+): HTMLElement {
+  return step('hand-over', title, ...(files ? withFiles(copying, files, actions) : elsewhere()));
+}
+
+function withFiles(copying: Copying | null, { gives, verb }: WorkbookFiles, actions: Actions): Child[] {
+  const isMaking = copying?.kind === 'making';
+  return [
+    h(
+      'p',
+      {},
+      'Makes a copy of this workbook for someone who installs nothing. This workbook stays as it is.',
+    ),
+    h(
+      'ul',
+      { className: 'plain' },
+      h('li', {}, 'Formulas that built-in functions can say work on in them.'),
+      h('li', {}, 'Others, such as fits, are frozen to their value, with a note.'),
+      h('li', {}, 'A new sheet, “Method”, tells how each was worked out.'),
+      h('li', {}, `The copy ${gives}.`),
+    ),
+    h('p', { className: 'hint', role: 'status' }, said(copying)),
+    isMaking && making(actions),
+    copying?.kind === 'made' && made(copying.copy),
+    copying?.kind === 'made' && button(verb, () => void actions.giveCopy(), 'main'),
+    !isMaking &&
+      button(
+        copying ? 'Make it again' : 'Make the copy',
+        () => void actions.makeCopy(),
+        copying ? '' : 'main',
+      ),
+  ];
+}
+
+/** Stays where it is, so that it is read out. */
+function said(copying: Copying | null): string {
+  if (!copying) return '';
+  if (copying.kind === 'making') return `${copying.doing} …`;
+  const time = copying.at.toLocaleTimeString([], { hour: '2-digit', minute: '2-digit' });
+  const { live, frozen } = copying.copy;
+  return live + frozen.length > 0
+    ? `The copy, of the workbook as it was at ${time}:`
+    : `No formula of ours stands in this workbook: the copy of ${time} is the same, calculated anew.`;
+}
+
+/** How far it is nobody knows; that it goes on can be seen. */
+const making = (actions: Actions): HTMLElement =>
+  h(
+    'div',
+    { className: 'progress' },
+    h('progress', { 'aria-label': 'making the copy' }),
+    button('Stop', () => actions.stop(), 'small'),
+  );
+
+function made({ live, frozen, failing }: HandedCopy): HTMLElement | false {
+  const count = frozen.reduce((sum, { cells }) => sum + cells.length, 0);
+  if (live + count === 0) return false;
+  return h(
+    'div',
+    { className: 'report' },
+    h(
+      'dl',
+      { className: 'counts' },
+      ...counted(live, 'live: they follow their inputs'),
+      ...counted(count, 'frozen to their value'),
+      ...(failing.length > 0 ? counted(failing.length, 'showed an error before, and still do') : []),
+    ),
+    frozen.length > 0 && details('What is frozen, and why', frozen),
+    failing.length > 0 && details('Which showed an error', [{ why: '', cells: failing }]),
+  );
+}
+
+const counted = (count: number, meaning: string): Child[] => [
+  h('dt', {}, String(count)),
+  h('dd', {}, meaning),
+];
+
+const details = (summary: string, groups: HandedCopy['frozen']): HTMLElement =>
+  h(
+    'details',
+    {},
+    h('summary', {}, summary),
+    h(
+      'ul',
+      { className: 'plain' },
+      ...groups.map(({ why, cells }) =>
+        h('li', {}, why && `${why}: `, h('span', { className: 'where' }, list(cells))),
+      ),
+    ),
+  );
+
+/** Where the host keeps the file to itself there are two other ways. */
+const elsewhere = (): Child[] => [
+  h('p', {}, 'This Excel does not let an add-in read the workbook’s file. Save the workbook, then either'),
+  h(
+    'ul',
+    { className: 'plain' },
+    h('li', {}, 'open it in Flaskpace’s local workbook (npm start) and choose Hand over there, or'),
+    h('li', {}, 'run ', h('code', {}, 'npm run handover -- IN.xlsx OUT.xlsx'), '.'),
+  ),
+];

@@ -1,0 +1,17 @@
+import type { WorkbookFiles } from '../../taskpane/port';
+import type { Documents } from './documents';
+import { saveFile } from './files';
+
+/** The open workbook as a file, and where a copy of it goes. */
+export const pageFiles = (documents: Documents): WorkbookFiles => ({
+  gives: 'is saved as a file of its own',
+  verb: 'Save the copy…',
+  read: () => documents.file(),
+  async give(bytes) {
+    const name = await saveFile(copyName(documents.name), async () => bytes);
+    return name && `the copy is saved as ${name}`;
+  },
+});
+
+/** @example copyName('Week 3.xlsx') // 'Week 3 handed over.xlsx' */
+export const copyName = (name: string): string => `${name.replace(/\.xls[xm]$/i, '')} handed over.xlsx`;
