@@ -41,7 +41,7 @@ export interface BenchPage {
   /** Shows the demo as it is at first, whatever was done to it. */
   showDemo(): Promise<void>;
   /** Shows these rows of a sheet "Gas run" in place of the demo, from A1 on; what begins with = is a formula. */
-  show(rows: readonly (readonly (number | string)[])[]): Promise<void>;
+  show(rows: readonly (readonly (number | string | null)[])[]): Promise<void>;
   /** Waits until the cells show this. */
   shows(reference: string, expected: CellRange): Promise<void>;
   close(): Promise<void>;
@@ -151,7 +151,7 @@ function listenTo(page: Page, address: string): string[] {
   return complaints;
 }
 
-function bookOf(rows: readonly (readonly (number | string)[])[]): BookModel {
+function bookOf(rows: readonly (readonly (number | string | null)[])[]): BookModel {
   const cells = rows.flatMap((row, r) =>
     row.map((typed, c): CellModel => {
       const place = { row: r, column: c };

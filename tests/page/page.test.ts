@@ -5,6 +5,7 @@
 import { longestStart, startBench, type BenchPage, type PageBench } from './bench';
 import { accessSuite } from './suites/access';
 import { filesSuite } from './suites/files';
+import { handOverSuite } from './suites/handOver';
 import { journeysSuite } from './suites/journeys';
 import { paneSuite } from './suites/pane';
 import { portSuite } from './suites/port';
@@ -24,6 +25,7 @@ describe('the sheet', () => sheetSuite(() => sheet));
 describe('files', () => filesSuite(() => sheet));
 describe('the pane', () => paneSuite(() => sheet));
 describe('whole jobs in the pane', () => journeysSuite(() => sheet));
+describe('handing over', () => handOverSuite(() => sheet));
 describe('the port', () => portSuite(() => sheet));
 describe('everyone', () => accessSuite(() => sheet));
 describe('the start', () => startSuite(() => bench));

@@ -1,0 +1,51 @@
+/** The add-in in a real browser: what Excel loads, with a stand-in for Excel itself. */
+import { readWorkbook } from '../../workbook/xlsx/read';
+import { createWorkbook } from '../../workbook/xlsx/create';
+import { demoWorkbook } from '../../workbook/demo/demo';
+import { calculate } from '../../workbook/engine/univer/headless';
+import { startAddin, type AddinBench, type AddinPage } from './addinBench';
+import { longestStart } from './bench';
+
+jest.setTimeout(120_000);
+
+let bench: AddinBench;
+beforeAll(async () => {
+  bench = await startAddin();
+}, longestStart);
+afterAll(() => bench?.close());
+
+const press = (addin: AddinPage, label: string): Promise<void> =>
+  addin.page.getByRole('button', { name: label }).click();
+
+const times = [0, 10, 20, 30, 40, 50];
+const fading = { Run: [['t / min', 'A'], ...times.map((t) => [t, 0.8 * 0.5 ** (t / 10)])] };
+
+test('the functions are there at once, and the pane finds the run', async () => {
+  const addin = await bench.open({ sheets: fading });
+  expect(await addin.page.evaluate(() => window.standIn.functions)).toContain('TANGENT');
+  await addin.page.locator('#run .where', { hasText: 'Run!A1:B7' }).waitFor();
+  await press(addin, 'Order');
+  await addin.page.locator('#order .result .value', { hasText: '0.06931' }).waitFor();
+  expect(addin.complaints).toEqual([]);
+  await addin.close();
+});
+
+test('the workbook is handed over in Excel’s own page: the spreadsheet engine comes with it, from nowhere else', async () => {
+  const demo = demoWorkbook();
+  const file = createWorkbook(demo, await calculate(demo));
+  const addin = await bench.open({ sheets: fading, file });
+  await press(addin, 'Hand over');
+  await press(addin, 'Make the copy');
+  await addin.page.locator('#hand-over .report').waitFor({ timeout: 90_000 });
+  expect(await addin.page.locator('#hand-over .counts').innerText()).toMatch(/^\d+\s+live/);
+  await press(addin, 'Open the copy');
+  await addin.page.locator('.notice.good').waitFor();
+  const [opened] = await addin.page.evaluate(() => window.standIn.office.opened);
+  const copy = readWorkbook(new Uint8Array(Buffer.from(opened, 'base64')));
+  expect(copy.sheets.map(({ name }) => name)).toEqual([...demo.sheets.map(({ name }) => name), 'Method']);
+  const formulas = copy.sheets.flatMap(({ cells }) => cells.flatMap(({ formula }) => formula ?? []));
+  expect(formulas.length).toBeGreaterThan(100);
+  expect(formulas.filter((formula) => formula.includes('PACE'))).toEqual([]);
+  expect(addin.complaints).toEqual([]);
+  await addin.close();
+});
