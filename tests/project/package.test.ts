@@ -93,7 +93,7 @@ describe('_headers', () => {
         .split(' ')
         .slice(1);
     expect(directive('script-src')).toContain(
-      new URL(/<script src="([^"]+)"/.exec(readFileSync('taskpane/taskpane.html', 'utf8'))![1]).origin,
+      new URL(/<script src="([^"]+)"/.exec(readFileSync('workbook/addin/taskpane.html', 'utf8'))![1]).origin,
     );
     expect(directive('script-src')).not.toContain("'unsafe-inline'");
     expect(directive('frame-ancestors')).toContain('https://*.officeapps.live.com');
