@@ -16,6 +16,7 @@ import { methodSheet, noteText, type Origin } from './methodSheet';
 import { freezeNames, frozenNames, type FrozenName } from './names';
 import { addNotes } from './notes';
 import { rewriteSheet, type RewrittenCell } from './rewriteSheet';
+import { dropLinks, dropPane, ownLinks } from './ownReferences';
 import { respelled } from './respelled';
 import { addSheet } from './sheetPart';
 import { World } from './world';
@@ -36,6 +37,8 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
   const calculated = await calculate(book);
   const pack = Package.open(bytes);
   const parts = findParts(pack);
+  dropPane(pack);
+  const links = ownLinks(pack, parts);
   patchPackage(pack, parts, book, calculated);
   const world = new World(book, calculated);
   const formulas = await checked(handFormulas(world, calculated, mergedCells(pack, parts.sheets)), world);
@@ -58,6 +61,7 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
   addSheet(pack, parts, methodSheet(freeName(taken), { formulas, names }, world, origin));
   freezeNames(pack, parts.workbook, names);
   dropCalcChain(pack, parts);
+  dropLinks(pack, parts, links);
   return { bytes: pack.bytes(), formulas, names, errors: calculated.errors };
 }
 

@@ -42,6 +42,12 @@ export class Package {
     return change !== undefined ? change !== null : this.entries.some((entry) => entry.name === name);
   }
 
+  /** Of all parts that are there now. */
+  names(): string[] {
+    const all = new Set([...this.entries.map(({ name }) => name), ...this.changes.keys()]);
+    return [...all].filter((name) => this.has(name));
+  }
+
   /** @throws NotAWorkbook when the part is missing or damaged */
   read(name: string): Uint8Array {
     const change = this.changes.get(name);
