@@ -1,5 +1,5 @@
 /** A fitted law over its readings, and what it leaves of each. */
-import { plainNumber } from '../format';
+import { plainNumber } from '../../functions/format';
 import type { Heading } from '../headers';
 import { dots, frameFor, line, plot, type Place } from './frame';
 

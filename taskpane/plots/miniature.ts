@@ -1,7 +1,7 @@
 /** A run as small as a stamp: its shape and no more. */
 import { svg } from '../h';
 import { pointsOf, type Run, type Table } from '../runs';
-import { linearScale } from './scale';
+import { linearScale } from '../../functions/drawing/scale';
 
 export const stamp = { width: 64, height: 32 };
 const margin = 3;

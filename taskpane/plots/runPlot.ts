@@ -1,5 +1,5 @@
 /** A run as it was read, with the line of the rate laid over it. */
-import { plainNumber } from '../format';
+import { plainNumber } from '../../functions/format';
 import type { Heading } from '../headers';
 import { headingOf, pointsOf, type Run, type Table } from '../runs';
 import { dots, frameFor, line, plot, type Frame } from './frame';

@@ -1,7 +1,7 @@
 /** A value with its uncertainty, and the formula that gives it: drawn the same way in every step. */
 import type { Actions } from '../actions';
 import type { Estimate } from '../calls/estimate';
-import { plainNumber, valueWithUncertainty } from '../format';
+import { plainNumber, valueWithUncertainty } from '../../functions/format';
 import { h, type Child } from '../h';
 import { button } from './fields';
 

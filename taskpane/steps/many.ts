@@ -2,7 +2,7 @@
 import type { Actions } from '../actions';
 import { isOneBlock, type Surveyed } from '../calls/many';
 import type { ManyAnswer } from '../choices';
-import { plainNumber, valueWithUncertainty } from '../format';
+import { plainNumber, valueWithUncertainty } from '../../functions/format';
 import { h, type Child } from '../h';
 import { miniature } from '../plots/miniature';
 import type { Scene, Stamp } from '../scene';

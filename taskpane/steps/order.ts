@@ -3,7 +3,7 @@ import type { Actions } from '../actions';
 import { givenBy, orderFormula, type OrderAnswer, type OrderLine } from '../calls/order';
 import type { Answered, Estimate } from '../calls/estimate';
 import type { EndpointKind, OrderAnswerKind, OrderChoice } from '../choices';
-import { plainNumber, valueWithUncertainty } from '../format';
+import { plainNumber, valueWithUncertainty } from '../../functions/format';
 import { h, type Child } from '../h';
 import { fitPlot, residualPlot } from '../plots/fitPlot';
 import { plainPlot } from '../plots/runPlot';

@@ -3,7 +3,7 @@ import type { Actions } from '../actions';
 import type { Estimate } from '../calls/estimate';
 import { rateFormula, resolved, type RateAnswer } from '../calls/rate';
 import type { RateChoice, RateKind } from '../choices';
-import { plainNumber, valueWithUncertainty } from '../format';
+import { plainNumber, valueWithUncertainty } from '../../functions/format';
 import { h, type Child } from '../h';
 import { rateUnit } from '../headers';
 import { rateName } from '../insertions/rate';

@@ -2,7 +2,7 @@
 import type { Actions } from '../actions';
 import { convertedHeading, readingFormula, type ReadingAnswer } from '../calls/reading';
 import type { ReadingChoice } from '../choices';
-import { plainNumber } from '../format';
+import { plainNumber } from '../../functions/format';
 import { h, type Child } from '../h';
 import { headingsFor } from '../insertions/insertion';
 import { plainPlot, runPlot } from '../plots/runPlot';

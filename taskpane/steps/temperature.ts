@@ -3,7 +3,7 @@ import { functionNamed } from '../../functions/catalogue';
 import type { Actions } from '../actions';
 import { columnsFor, temperatureFormula, type TemperatureAnswer } from '../calls/temperature';
 import type { TemperatureAnswerKind } from '../choices';
-import { plainNumber } from '../format';
+import { plainNumber } from '../../functions/format';
 import { h, type Child } from '../h';
 import { arrheniusPlot } from '../plots/arrheniusPlot';
 import { headingOf, type Table } from '../runs';

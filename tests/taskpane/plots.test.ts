@@ -1,7 +1,7 @@
 /** @jest-environment jsdom */
 import { overlayFor } from '../../taskpane/plots/overlay';
 import { runPlot } from '../../taskpane/plots/runPlot';
-import { linearScale, roundRange, ticks } from '../../taskpane/plots/scale';
+import { linearScale, roundRange, ticks } from '../../functions/drawing/scale';
 import { readHeading } from '../../taskpane/headers';
 import { firstState } from '../../taskpane/store';
 

@@ -1,30 +1,11 @@
 import type { SheetModel } from '../engine/engine';
+import { dyeAtFourDoses } from '../../functions/demo/runs';
 import { invented, scientific, standardHeadings } from './look';
 import { SheetBuilder } from './sheet';
 
-/** Minutes, and absorbance at four doses of activator. */
-const readings = [
-  [0, 0.804, 0.801, 0.801, 0.799],
-  [4, 0.742, 0.696, 0.648, 0.607],
-  [8, 0.696, 0.607, 0.524, 0.462],
-  [12, 0.653, 0.528, 0.425, 0.348],
-  [16, 0.599, 0.462, 0.349, 0.262],
-  [20, 0.552, 0.406, 0.28, 0.202],
-  [24, 0.519, 0.355, 0.227, 0.149],
-  [28, 0.48, 0.31, 0.18, 0.116],
-  [32, 0.449, 0.273, 0.146, 0.088],
-  [36, 0.42, 0.232, 0.128, 0.064],
-  [40, 0.387, 0.211, 0.104, 0.053],
-  [44, 0.363, 0.176, 0.074, 0.041],
-  [48, 0.343, 0.155, 0.065, 0.029],
-  [52, 0.313, 0.14, 0.058, 0.025],
-  [56, 0.289, 0.121, 0.044, 0.017],
-  [60, 0.266, 0.101, 0.04, 0.015],
-];
-
 /** Four runs that share their times, seen together and one of them in detail. */
 export function doses(): SheetModel {
-  const last = 4 + readings.length;
+  const last = 4 + dyeAtFourDoses.length;
   const [t, all, one] = [`A5:A${last}`, `B5:E${last}`, `D5:D${last}`];
   return new SheetBuilder('Four doses')
     .block('A1', [['Dye fading at four doses of activator, by absorbance']], { bold: true })
@@ -32,7 +13,7 @@ export function doses(): SheetModel {
     .block('A4', [['t / min', 'A, half', 'A, single', 'A, double', 'A, triple', 'double, fitted']], {
       bold: true,
     })
-    .block('A5', readings)
+    .block('A5', dyeAtFourDoses)
     .down('F5', [`=PACE.CURVE(${t},${one},1)`], { numberFormat: '0.0000' })
     .format(`F6:F${last}`, '0.0000')
     .block('H4', [['All runs, order 1']], { bold: true })

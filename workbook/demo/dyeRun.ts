@@ -1,34 +1,7 @@
 import type { SheetModel } from '../engine/engine';
+import { dyeFading } from '../../functions/demo/runs';
 import { columnWidths, invented, orderTableFormats, scientific, standardHeadings } from './look';
 import { SheetBuilder } from './sheet';
-
-/** Minutes and absorbance; one reading was missed. */
-const readings = [
-  [0, 0.815],
-  [2, 0.769],
-  [4, 0.729],
-  [6, 0.681],
-  [8, 0.642],
-  [10, 0.604],
-  [13, 0.556],
-  [16, 'missed'],
-  [19, 0.467],
-  [22, 0.426],
-  [26, 0.375],
-  [30, 0.338],
-  [35, 0.288],
-  [40, 0.246],
-  [45, 0.212],
-  [50, 0.186],
-  [55, 0.16],
-  [60, 0.139],
-  [70, 0.105],
-  [80, 0.078],
-  [90, 0.059],
-  [100, 0.046],
-  [110, 0.034],
-  [120, 0.025],
-];
 
 /** Doses of activator, and the time a stain took to lose its colour. */
 const timings = [
@@ -39,13 +12,13 @@ const timings = [
 
 /** Bleach activator fading a test dye, followed by absorbance. */
 export function dyeRun(): SheetModel {
-  const last = 4 + readings.length;
+  const last = 4 + dyeFading.length;
   const [t, a] = [`A5:A${last}`, `B5:B${last}`];
   const sheet = new SheetBuilder('Dye fading')
     .block('A1', [['Test dye fading under bleach activator, by absorbance']], { bold: true })
     .block('A2', [[invented]])
     .block('A4', [['t / min', 'A', 'r / min⁻¹']], { bold: true })
-    .block('A5', readings)
+    .block('A5', dyeFading)
     .down('C5', [`=PACE.ALONG(${t},${a})`], { numberFormat: scientific })
     .format(`C6:C${last}`, scientific)
     .block('F4', [['Conditions']], { bold: true })

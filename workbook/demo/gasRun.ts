@@ -1,39 +1,17 @@
 import type { SheetModel } from '../engine/engine';
+import { fizzByBurette } from '../../functions/demo/runs';
 import { columnWidths, invented, orderTableFormats, scientific, standardHeadings } from './look';
 import { SheetBuilder } from './sheet';
 
-const readings = [
-  [0, 0],
-  [10, 8.8],
-  [20, 16.0],
-  [30, 22.4],
-  [40, 28.0],
-  [50, 32.4],
-  [60, 36.4],
-  [75, 41.0],
-  [90, 44.8],
-  [105, 48.0],
-  [120, 50.0],
-  [140, 52.6],
-  [160, 54.2],
-  [180, 55.2],
-  [210, 56.6],
-  [240, 57.4],
-  [270, 58.0],
-  [300, 58.0],
-  [330, 58.4],
-  [360, 58.6],
-];
-
 /** A tablet's fizz caught over water. */
 export function gasRun(): SheetModel {
-  const last = 4 + readings.length;
+  const last = 4 + fizzByBurette.length;
   const [t, n] = [`A5:A${last}`, `C5:C${last}`];
   const sheet = new SheetBuilder('Gas run')
     .block('A1', [['Fizz run by gas burette: a quarter tablet in 50 mL of water']], { bold: true })
     .block('A2', [[invented]])
     .block('A4', [['t / s', 'V / mL', 'n / mol', 'r / (mol/s)']], { bold: true })
-    .block('A5', readings)
+    .block('A5', fizzByBurette)
     .down('C5', [`=PACE.GASVOLUME(B5:B${last},G5,G6,G7)`], { numberFormat: scientific })
     .down('D5', [`=PACE.ALONG(${t},${n})`], { numberFormat: scientific })
     .format(`C6:D${last}`, scientific)

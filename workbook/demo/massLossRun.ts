@@ -1,17 +1,12 @@
 import type { SheetModel } from '../engine/engine';
+import { fizzByBalance } from '../../functions/demo/runs';
 import { columnWidths, invented, orderTableFormats, scientific, standardHeadings } from './look';
 import { SheetBuilder } from './sheet';
 
 const interval = 15; // s
-const masses = [
-  214.37, 213.68, 213.26, 212.98, 212.78, 212.63, 212.51, 212.43, 212.34, 212.28, 212.23, 212.19, 212.14,
-  212.11, 212.08, 212.05, 212.03, 212.01, 211.99, 211.97, 211.95, 211.94, 211.93, 211.91, 211.9, 211.88,
-  211.88,
-];
-
 /** A whole tablet in a beaker on the balance. */
 export function massLossRun(): SheetModel {
-  const last = 4 + masses.length;
+  const last = 4 + fizzByBalance.length;
   const [t, left] = [`A5:A${last}`, `D5:D${last}`];
   const sheet = new SheetBuilder('Mass loss')
     .block('A1', [['Fizz run by balance: one tablet in 200 mL of warm water, beaker open']], { bold: true })
@@ -19,7 +14,7 @@ export function massLossRun(): SheetModel {
     .block('A4', [['t / s', 'm / g', 'n(CO2) / mol', 'n(left) / mol']], { bold: true })
     .block(
       'A5',
-      masses.map((mass, i) => [i * interval, mass]),
+      fizzByBalance.map((mass, i) => [i * interval, mass]),
     )
     .down('C5', [`=PACE.MASSLOSS(B5:B${last},"CO2",,G6,G5)`], { numberFormat: '0.00000' })
     .down('D5', [`=PACE.REMAINING(C5:C${last},G7)`], { numberFormat: '0.00000' })

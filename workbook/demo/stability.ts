@@ -1,23 +1,13 @@
 import type { SheetModel } from '../engine/engine';
+import { peroxideKept } from '../../functions/demo/runs';
 import { invented, standardHeadings } from './look';
 import { SheetBuilder } from './sheet';
-
-/** Days, and mL of 0.0200 mol/L permanganate that 1.00 mL of peroxide took, at four temperatures. */
-const titres = [
-  [0, 18.1, 18.1, 18.0, 18.1],
-  [7, 17.85, 17.4, 16.35, 14.15],
-  [14, 17.6, 16.7, 14.8, 11.05],
-  [21, 17.35, 16.05, 13.4, 8.75],
-  [28, 17.15, 15.55, 12.1, 6.85],
-  [42, 16.6, 14.3, 9.95, 4.25],
-  [56, 16.25, 13.3, 8.2, 2.45],
-];
 
 const runs = ['F', 'G', 'H', 'I'];
 
 /** Peroxide kept warm, and how long it should last in the store and in the refrigerator. */
 export function stability(): SheetModel {
-  const last = 5 + titres.length;
+  const last = 5 + peroxideKept.length;
   const t = `A6:A${last}`;
   const fits = (what: string): string[] =>
     runs.map((column) => `=PACE.${what}(${t},${column}6:${column}${last},1)`);
@@ -33,7 +23,7 @@ export function stability(): SheetModel {
     .block('A5', [['t / d', '40 °C', '50 °C', '60 °C', '70 °C', '40 °C', '50 °C', '60 °C', '70 °C']], {
       bold: true,
     })
-    .block('A6', titres, { numberFormat: '0.00' })
+    .block('A6', peroxideKept, { numberFormat: '0.00' })
     .block('F6', [[`=PACE.TITRE(B6:E${last},"0.0200 mol/L","1.00 mL",2.5)`]], { numberFormat: '0.0000' })
     .format('G6:I6', '0.0000')
     .format(`F7:I${last}`, '0.0000')

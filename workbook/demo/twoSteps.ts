@@ -1,29 +1,11 @@
 import type { SheetModel } from '../engine/engine';
+import { dyeInTwoSteps } from '../../functions/demo/runs';
 import { invented, standardHeadings } from './look';
 import { SheetBuilder } from './sheet';
 
-/** Minutes, and mmol/L of dye and of its pale intermediate. */
-const readings = [
-  [0, 0.0998, 0],
-  [4, 0.0776, 0.0217],
-  [8, 0.0607, 0.0364],
-  [12, 0.0482, 0.045],
-  [16, 0.037, 0.0519],
-  [20, 0.0288, 0.055],
-  [26, 0.0194, 0.0577],
-  [32, 0.0131, 0.0561],
-  [40, 0.0089, 0.0531],
-  [50, 0.0045, 0.0453],
-  [60, 0.0011, 0.0393],
-  [75, 0.0009, 0.0305],
-  [90, 0.001, 0.022],
-  [110, 0, 0.0148],
-  [130, 0.0001, 0.0101],
-];
-
 /** A dye that fades by way of a pale intermediate. */
 export function twoSteps(): SheetModel {
-  const last = 4 + readings.length;
+  const last = 4 + dyeInTwoSteps.length;
   const t = `A5:A${last}`;
   return new SheetBuilder('Two steps')
     .block('A1', [['A dye that fades by way of a pale intermediate']], { bold: true })
@@ -33,7 +15,7 @@ export function twoSteps(): SheetModel {
       [['t / min', 'dye', 'pale', 'clear', null, 'dye, fitted', 'pale, fitted', 'clear, fitted']],
       { bold: true },
     )
-    .block('A5', readings)
+    .block('A5', dyeInTwoSteps)
     .block('F5', [[`=PACE.COURSE(K5,K12:K13,K6:K8,${t})`]], { numberFormat: '0.0000' })
     .format('G5:H5', '0.0000')
     .format(`F6:H${last}`, '0.0000')

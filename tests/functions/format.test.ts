@@ -1,4 +1,4 @@
-import { axisNumbers, plainNumber, valueWithUncertainty } from '../../taskpane/format';
+import { axisNumbers, plainNumber, valueWithUncertainty } from '../../functions/format';
 
 test.each([
   [0.48123, 0.00231, '0.4812 ± 0.0023'],
