@@ -55,8 +55,11 @@ export interface Definition<P extends Parameters> {
   readonly reference: string;
   /** Where the work this serves can hurt someone. */
   readonly caution?: string;
-  /** May take long enough for a sheet to stand still: done on another thread where there is one. */
-  readonly isLong?: true;
+  /**
+   * May take long enough for a sheet to stand still, always or from so many cells in its arguments on: done on
+   * another thread where there is one.
+   */
+  readonly isLong?: true | { readonly fromCells: number };
   readonly run: (values: Values<P>) => CellResult;
   /** The same in built-in spreadsheet functions, for a copy that needs no add-in; left out where there is none. */
   readonly builtIn?: BuiltIn;

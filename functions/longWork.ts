@@ -62,11 +62,14 @@ export function answerJob({ id, name, args }: Job): Answer {
   return { id, result: toPlain(result) };
 }
 
+/** What a worker says first: that its script was found and runs. */
+export const ready = 'ready';
+
 /** The part of a browser's Worker that is used. */
 export interface WorkerLike {
   postMessage(job: Job): void;
   terminate(): void;
-  onmessage: ((event: { readonly data: Answer }) => void) | null;
+  onmessage: ((event: { readonly data: Answer | typeof ready }) => void) | null;
   onerror: ((event: unknown) => void) | null;
 }
 
@@ -77,12 +80,21 @@ interface Waiting {
   settle(result: CellResult): void;
 }
 
-const stopped = (): CellError =>
+export const stopped = (): CellError =>
   new CellError('#N/A', 'stopped before it was done: edit the cell to start again');
+
+const brokeOff = (): CellError =>
+  new CellError('#N/A', 'the calculation broke off, perhaps for want of memory: hand over fewer cells');
+
+const patience = 15; // min
+
+const tookTooLong = (): CellError =>
+  new CellError('#N/A', `not done after ${patience} minutes, so it was ended: hand over fewer cells`);
 
 /**
  * One job after another on one worker, which is started when first needed. A job that is stopped while it runs
- * takes its worker with it; where none can be started the work is done here after all.
+ * takes its worker with it, as does one that breaks it or never ends; where none can be started the work is done
+ * here after all. Every answer comes, as an error if need be.
  *
  * @param tell what is under way, at every start, and `null` when nothing is any more
  */
@@ -93,7 +105,8 @@ export function workerWork(
   const queue: Waiting[] = [];
   let worker: WorkerLike | undefined;
   let current: Waiting | undefined;
-  let isBroken = false;
+  let watch: ReturnType<typeof setTimeout> | undefined;
+  let isUseless = false; // no worker can be had on this page
   let lastId = 0;
 
   function next(): void {
@@ -102,26 +115,35 @@ export function workerWork(
     if (!current) return tell(null);
     const waiting = current;
     tell({ name: typedName(waiting.f), waiting: queue.length, stop: () => stop(waiting) });
+    if (isUseless) return doHere(waiting);
     try {
-      if (isBroken) throw new Error('no worker');
       worker ??= started();
       worker.postMessage(waiting.job);
+      watch = setTimeout(() => end(waiting, tookTooLong()), patience * 60_000);
     } catch {
-      isBroken = true;
-      finish(waiting, callFunction(waiting.f, waiting.args));
+      isUseless = true;
+      doHere(waiting);
     }
   }
 
   function started(): WorkerLike {
     const fresh = startWorker();
-    fresh.onmessage = ({ data }) => current?.job.id === data.id && finish(current, fromPlain(data.result));
+    let isReady = false;
+    fresh.onmessage = ({ data }) => {
+      if (data === ready) isReady = true;
+      else if (current?.job.id === data.id) finish(current, fromPlain(data.result));
+    };
     fresh.onerror = () => {
+      if (fresh !== worker) return;
       dismiss();
-      isBroken = true;
-      if (current) finish(current, callFunction(current.f, current.args));
+      isUseless = !isReady;
+      if (current && isReady) finish(current, brokeOff());
+      else if (current) doHere(current);
     };
     return fresh;
   }
+
+  const doHere = (waiting: Waiting): void => finish(waiting, callFunction(waiting.f, waiting.args));
 
   function dismiss(): void {
     worker?.terminate();
@@ -129,6 +151,7 @@ export function workerWork(
   }
 
   function finish(waiting: Waiting, result: CellResult): void {
+    clearTimeout(watch);
     if (current === waiting) current = undefined;
     waiting.settle(result);
     next();
@@ -139,10 +162,12 @@ export function workerWork(
     if (place >= 0) {
       queue.splice(place, 1);
       waiting.settle(stopped());
-    } else if (current === waiting) {
-      dismiss();
-      finish(waiting, stopped());
-    }
+    } else if (current === waiting) end(waiting, stopped());
+  }
+
+  function end(waiting: Waiting, result: CellError): void {
+    dismiss();
+    finish(waiting, result);
   }
 
   return {

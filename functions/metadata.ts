@@ -1,4 +1,5 @@
 /** What Excel must be told of each function before it is ever called: the content of functions.json. */
+import { mayBeLong } from './caller';
 import { boundsInWords, type Parameter } from './parameters';
 import type { CellFunction } from './define';
 import { pageName } from './help/pageName';
@@ -61,7 +62,7 @@ function describeFunction(f: CellFunction, helpBase: string | undefined): Functi
 function optionsOf(f: CellFunction): Pick<FunctionMetadata, 'options'> {
   const options = {
     ...(takesRanges(f) ? { requiresParameterAddresses: true as const } : {}),
-    ...(f.isLong ? { cancelable: true as const } : {}),
+    ...(mayBeLong(f) ? { cancelable: true as const } : {}),
   };
   return Object.keys(options).length > 0 ? { options } : {};
 }

@@ -1,9 +1,8 @@
 /** The cell functions inside Excel: its arguments → ours, our results → its own. */
-import { callFunction } from './call';
+import { sharingCaller, type Caller } from './caller';
 import { catalogue } from './catalogue';
 import { CellError, isRange, type CellRange, type CellResult, type CellValue, type ErrorCode } from './cell';
 import type { CellFunction } from './define';
-import type { LongWork } from './longWork';
 
 /** The part of Excel's global that is used, so that it can be absent and can be stood in for. */
 export interface CustomFunctionsHost {
@@ -14,7 +13,10 @@ export interface CustomFunctionsHost {
 interface Globals {
   readonly CustomFunctions?: CustomFunctionsHost;
   readonly Office?: {
-    readonly addin?: { setStartupBehavior(behaviour: string): Promise<void> };
+    readonly addin?: {
+      getStartupBehavior?(): Promise<string>;
+      setStartupBehavior(behaviour: string): Promise<void>;
+    };
     readonly StartupBehavior?: { readonly load: string };
   };
 }
@@ -39,14 +41,14 @@ export type BlanksIn = (address: string) => Promise<readonly (readonly boolean[]
 /** What stands behind the functions in Excel. */
 export interface Backing {
   readonly blanksIn?: BlanksIn;
-  readonly longWork?: LongWork;
+  readonly caller?: Caller;
 }
 
 /** Does nothing where Excel is not: Office.js did not load, or this is another page. */
-export function associateAll(globals: object, { blanksIn, longWork }: Backing = {}): void {
+export function associateAll(globals: object, { blanksIn, caller = sharingCaller() }: Backing = {}): void {
   const host = (globals as Globals).CustomFunctions;
   if (!host || typeof host.associate !== 'function') return;
-  const backing = { blanksIn: blanksIn && sharingLooks(blanksIn), longWork };
+  const backing = { blanksIn: blanksIn && sharingLooks(blanksIn), caller };
   for (const f of catalogue) host.associate(f.name, excelHandler(f, host, backing));
 }
 
@@ -60,12 +62,17 @@ function sharingLooks(blanksIn: BlanksIn): BlanksIn {
   };
 }
 
-/** A workbook saved with our formulas wakes the functions when it is opened. Does nothing where that is unknown. */
+/**
+ * A workbook saved with our formulas wakes the functions when it is opened. It is told so once, since that changes
+ * the workbook. Does nothing where the host does not know of it.
+ */
 export async function keepLoadedWithWorkbook(globals: object): Promise<void> {
   const { Office } = globals as Globals;
   if (!Office?.addin?.setStartupBehavior) return;
+  const load = Office.StartupBehavior?.load ?? 'Load';
   try {
-    await Office.addin.setStartupBehavior(Office.StartupBehavior?.load ?? 'Load');
+    if ((await Office.addin.getStartupBehavior?.()) === load) return;
+    await Office.addin.setStartupBehavior(load);
   } catch {
     // a host without shared runtime; the functions work in this session all the same
   }
@@ -85,27 +92,32 @@ interface Invocation {
 export function excelHandler(
   f: CellFunction,
   host: CustomFunctionsHost,
-  { blanksIn, longWork }: Backing = {},
+  { blanksIn, caller = sharingCaller() }: Backing = {},
 ): (...args: unknown[]) => unknown {
   const count = Object.keys(f.parameters).length;
-  const answerTo = (args: readonly unknown[], invocation?: Invocation): unknown => {
+  const answerTo = (args: readonly unknown[], stop?: AbortSignal): unknown => {
     const cells = args.map((argument) => fromExcel(argument, host));
-    if (!f.isLong || !longWork) return forExcel(callFunction(f, cells), host);
-    const stop = new AbortController();
-    if (invocation) invocation.onCanceled = () => stop.abort();
-    return longWork.run(f, cells, stop.signal).then((result) => forExcel(result, host));
+    const result = caller.call(f, cells, stop);
+    return result instanceof Promise ? result.then((late) => forExcel(late, host)) : forExcel(result, host);
   };
   return (...all) => {
     const args = all.slice(0, count);
     const invocation = all[count] as Invocation | undefined;
-    const answer = (given: readonly unknown[]): unknown => answerTo(given, invocation);
+    const stop = invocation && caller.mayBePromise(f) ? stopOf(invocation) : undefined;
     const addresses = invocation?.parameterAddresses ?? [];
     const doubtful = args.some((argument, place) => addresses[place] && hasDoubtfulZero(argument));
-    if (!blanksIn || !doubtful) return answer(args);
+    if (!blanksIn || !doubtful) return answerTo(args, stop);
     return Promise.all(args.map((argument, place) => withBlanks(argument, addresses[place], blanksIn))).then(
-      answer,
+      (looked) => answerTo(looked, stop),
     );
   };
+}
+
+/** From the first moment on, since Excel may lose interest while a zero is being looked at. */
+function stopOf(invocation: Invocation): AbortSignal {
+  const stop = new AbortController();
+  invocation.onCanceled = () => stop.abort();
+  return stop.signal;
 }
 
 /** Excel hands a blank inside a range over as 0, which among other numbers would count as a reading. */

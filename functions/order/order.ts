@@ -37,6 +37,7 @@ export default defineFunction({
   ],
   seeAlso: ['ORDERS', 'HALVINGS', 'EXPONENTS'],
   reference: 'doi:10.1351/goldbook.O04322; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
+  isLong: { fromCells: 3000 },
   run({ times, values, endpoint, uncertainties, detail }) {
     const series = seriesOf(times, values);
     const fit = fitRateLaw(series, {

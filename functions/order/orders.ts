@@ -51,6 +51,7 @@ export default defineFunction({
   ],
   seeAlso: ['ORDER', 'COEFFICIENT', 'HALVINGS', 'CHECK'],
   reference: 'doi:10.1351/goldbook.O04322; doi:10.1093/biomet/76.2.297',
+  isLong: { fromCells: 1500 },
   run({ times, values, endpoint, uncertainties }) {
     const series = seriesOf(times, values);
     const weights = uncertaintiesOf(series, values, uncertainties);

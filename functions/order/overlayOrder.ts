@@ -50,6 +50,7 @@ export default defineFunction({
   ],
   seeAlso: ['NORMALTIME', 'EXPONENTS', 'ORDER'],
   reference: 'doi:10.1002/anie.201609757',
+  isLong: { fromCells: 600 },
   run: ({ times1, products1, reactants1, times2, products2, reactants2 }) => [
     standardRow(
       overlayExponent(runOf(times1, products1, reactants1, '1'), runOf(times2, products2, reactants2, '2')),

@@ -30,6 +30,7 @@ export default defineFunction({
   refusals: [{ formula: '=PACE.CHECK({0;10;20},{8;4})', mend: 'Choose both columns with the same rows.' }],
   seeAlso: ['ORDERS', 'TANGENT', 'SURVEY'],
   reference: 'doi:10.1080/01621459.1974.10482962; doi:10.1093/biomet/76.2.297',
+  isLong: { fromCells: 2000 },
   run({ times, values }) {
     const run = { times: times.cells, values: values.cells };
     const found = findings(run);

@@ -60,6 +60,7 @@ export default defineFunction({
   ],
   seeAlso: ['ABSORBANCE', 'CONVERSION', 'COEFFICIENT'],
   reference: 'EURACHEM/CITAC Guide CG 4, 3rd ed. (2012), E.4; doi:10.1351/pac199870040993',
+  isLong: { fromCells: 6000 },
   run({ concentrations, standards, readings, uncertainties, origin, replicates, detail }) {
     const series = seriesOf(concentrations, standards);
     const line = calibrationLine(

@@ -1,6 +1,14 @@
+import { sharingCaller } from '../../functions/caller';
 import { functionNamed } from '../../functions/catalogue';
 import { CellError } from '../../functions/cell';
-import { answerJob, workerWork, type Answer, type Job, type WorkerLike } from '../../functions/longWork';
+import {
+  answerJob,
+  ready,
+  workerWork,
+  type Answer,
+  type Job,
+  type WorkerLike,
+} from '../../functions/longWork';
 import { excelHandler } from '../../functions/runtime';
 
 /** A worker that answers when it is told to; what crosses is cloned, as between threads. */
@@ -98,6 +106,38 @@ test('where no worker can be started, or it breaks, the work is done here', asyn
   expect(await answer).toEqual([[0.025]]);
 });
 
+test('a job that breaks a worker which has run is an error with words, and the next gets a new worker', async () => {
+  const fake = fakeWorkers();
+  const work = workerWork(fake.start);
+  const [first, second] = [work.run(event, [40]), work.run(event, [50])];
+  fake.workers[0].worker.onmessage!({ data: ready });
+  fake.workers[0].worker.onerror!(new Error('out of memory'));
+  expect(await first).toMatchObject({ code: '#N/A', message: expect.stringContaining('broke off') });
+  expect(fake.workers[0].isEnded).toBe(true);
+  fake.answer(1);
+  expect(await second).toEqual([[0.02]]);
+});
+
+test('a job that never ends is ended, and the next gets a new worker', async () => {
+  jest.useFakeTimers();
+  try {
+    const fake = fakeWorkers();
+    const work = workerWork(fake.start);
+    const [first, second] = [work.run(event, [40]), work.run(event, [50])];
+    jest.advanceTimersByTime(15 * 60_000);
+    expect(await first).toMatchObject({
+      code: '#N/A',
+      message: expect.stringMatching(/^not done after 15 min/),
+    });
+    expect(fake.workers[0].isEnded).toBe(true);
+    fake.answer(1);
+    expect(await second).toEqual([[0.02]]);
+    expect(jest.getTimerCount()).toBe(0);
+  } finally {
+    jest.useRealTimers();
+  }
+});
+
 test('Excel gets a promise for a long function, and its cancelling stops the work', async () => {
   class ExcelError {
     constructor(
@@ -107,12 +147,12 @@ test('Excel gets a promise for a long function, and its cancelling stops the wor
   }
   const fake = fakeWorkers();
   const host = { associate: () => undefined, Error: ExcelError };
-  const call = excelHandler(planned, host, { longWork: workerWork(fake.start) });
+  const call = excelHandler(planned, host, { caller: sharingCaller(workerWork(fake.start)) });
   const invocation: { onCanceled?: () => void } = {};
   const first = call(1, 0.1, 1, 0.01, 1, null, invocation) as Promise<unknown>;
   fake.answer();
   expect((await first) as unknown[][]).toHaveLength(2);
-  const second = call(1, 0.1, 1, 0.01, 1, null, invocation) as Promise<unknown>;
+  const second = call(1, 0.2, 1, 0.01, 1, null, invocation) as Promise<unknown>;
   invocation.onCanceled!();
   await expect(second).rejects.toMatchObject({ code: '#N/A' });
 });

@@ -245,6 +245,9 @@ test('keepLoadedWithWorkbook asks for it once, and never fails', async () => {
     Office: { addin: { setStartupBehavior }, StartupBehavior: { load: 'Load' } },
   });
   expect(setStartupBehavior.mock.calls).toEqual([['Load']]);
+  const told = { setStartupBehavior, getStartupBehavior: async () => 'Load' };
+  await keepLoadedWithWorkbook({ Office: { addin: told, StartupBehavior: { load: 'Load' } } });
+  expect(setStartupBehavior).toHaveBeenCalledTimes(1);
   await keepLoadedWithWorkbook({});
   await keepLoadedWithWorkbook({ Office: {} });
   await keepLoadedWithWorkbook({

@@ -1,4 +1,5 @@
 /** What Excel loads: the cell functions at once, the pane when Office is ready; one runtime for both. */
+import { sharingCaller } from '../../functions/caller';
 import { workerWork } from '../../functions/longWork';
 import { associateAll, keepLoadedWithWorkbook } from '../../functions/runtime';
 import { blanksIn, excelPort } from '../../taskpane/excel';
@@ -17,7 +18,7 @@ associateAll(globalThis, {
     await Office.onReady();
     return blanksIn(address);
   },
-  longWork: workerWork(startWorker),
+  caller: sharingCaller(workerWork(startWorker)),
 });
 
 async function start(root: HTMLElement): Promise<void> {

@@ -1,5 +1,6 @@
 /** Our cell functions in the engine: every definition of the catalogue, with its argument help. */
 import { FunctionType, type IFunctionInfo } from '@univerjs/engine-formula';
+import { sharingCaller, type Caller } from '../../../functions/caller';
 import { catalogue } from '../../../functions/catalogue';
 import { typedName, type CellFunction } from '../../../functions/define';
 import type { LongWork } from '../../../functions/longWork';
@@ -36,15 +37,16 @@ export function formulaPluginConfig(longWork?: LongWork): FormulaPluginConfig {
   mendNumerals();
   containFaults();
   noteMessages();
+  const caller = sharingCaller(longWork);
   return {
-    function: [...catalogue.flatMap((f) => underBothNames(f, longWork)), [AnchorArray, anchorArray]],
+    function: [...catalogue.flatMap((f) => underBothNames(f, caller)), [AnchorArray, anchorArray]],
     description: catalogue.map(argumentHelp),
   };
 }
 
 /** The engine looks names up in capitals. */
-function underBothNames(f: CellFunction, longWork?: LongWork): [EngineFunctionClass, string][] {
-  const Class = engineFunction(f, longWork);
+function underBothNames(f: CellFunction, caller: Caller): [EngineFunctionClass, string][] {
+  const Class = engineFunction(f, caller);
   return [
     [Class, typedName(f)],
     [Class, filedName(f).toUpperCase()],
