@@ -14,7 +14,7 @@ import { pairReadings, type Series } from '../../src/series/series';
 const runs = 200;
 const points = 50;
 
-const series = Array.from({ length: runs }, (_, run) => firstOrderRun(run));
+export const series = Array.from({ length: runs }, (_, run) => firstOrderRun(run));
 
 /** c = 3 + 40 exp(−kt) to the nearest hundredth, which scatters like readings of a display. */
 function firstOrderRun(run: number): Series {

@@ -17,7 +17,9 @@ function counting(isLong?: CellFunction['isLong']): { f: CellFunction; times(): 
     parameters: { x: readings({ help: '' }), y: optional(number({ help: '' })) },
     result: { unit: '1', shape: 'one value' },
     example: { formula: '', equals: 0 },
+    uncertainty: '',
     reference: '',
+    seeAlso: [],
     ...(isLong === undefined ? {} : { isLong }),
     run: ({ x }) => {
       times++;

@@ -1,10 +1,16 @@
-/** The add-in as Excel loads it: built, served, in a real browser, with a stand-in where Excel's own Office.js would be. */
+/**
+ * The add-in as Excel loads it: packaged, served with exactly the headers that its folder asks for, in a real browser,
+ * with a stand-in where Excel's own Office.js would be.
+ */
 import { execFileSync } from 'node:child_process';
+import { mkdtempSync, rmSync } from 'node:fs';
+import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { build, type Plugin } from 'esbuild';
 import type { Browser, BrowserContextOptions, Page } from 'playwright-core';
-import { pageServer } from '../../workbook/commands/start/server';
+import { packageListener } from '../../scripts/package/serve';
 import type { OfficeSetting } from '../taskpane/fakeOffice';
 import type { BenchSheets } from '../taskpane/portContract';
 import { launchBrowser } from './browser';
@@ -27,6 +33,7 @@ export interface Opened {
 
 export interface AddinBench {
   readonly browser: Browser;
+  readonly address: string;
   open(workbook: Opened, options?: BrowserContextOptions): Promise<AddinPage>;
   close(): Promise<void>;
 }
@@ -39,9 +46,11 @@ export interface AddinPage {
 }
 
 export async function startAddin(): Promise<AddinBench> {
-  execFileSync(process.execPath, [join(root, 'scripts', 'run.mjs'), 'build', 'all'], { stdio: 'inherit' });
+  const folder = mkdtempSync(join(tmpdir(), 'addin-'));
+  const words = ['package', '--url', 'https://localhost:3000', join(folder, 'made')];
+  execFileSync(process.execPath, [join(root, 'scripts', 'run.mjs'), ...words], { cwd: root, stdio: 'pipe' });
   const office = await officeScript();
-  const server = pageServer(join(root, 'dist', 'addin'));
+  const server = createServer(packageListener(join(folder, 'made')));
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
   const address = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
   const browser = await launchBrowser();
@@ -52,7 +61,6 @@ export async function startAddin(): Promise<AddinBench> {
   ): Promise<AddinPage> {
     const context = await browser.newContext({
       viewport: { width: 320, height: 900 },
-      bypassCSP: true,
       ...options,
     });
     const page = await context.newPage();
@@ -79,10 +87,12 @@ export async function startAddin(): Promise<AddinBench> {
 
   return {
     browser,
+    address,
     open,
     async close() {
       await browser.close();
       server.close();
+      rmSync(folder, { recursive: true, force: true });
     },
   };
 }

@@ -4,9 +4,12 @@ import { fakeExcel } from '../taskpane/fakeExcel';
 import { fakeOffice, type FakeOffice, type OfficeSetting } from '../taskpane/fakeOffice';
 import type { BenchSheets } from '../taskpane/portContract';
 
+type Handler = (...args: unknown[]) => unknown;
+
 export interface StandIn {
   readonly office: FakeOffice;
-  readonly functions: string[];
+  /** By id: what Excel would call. */
+  readonly functions: ReadonlyMap<string, Handler>;
   select(reference: string): void;
 }
 
@@ -16,10 +19,13 @@ interface Left {
 }
 
 const { sheets, file, setting } = (globalThis as unknown as Left).left;
-const functions: string[] = [];
+const functions = new Map<string, Handler>();
 const { select } = fakeExcel(sheets);
 const office = fakeOffice({ ...setting, file: Uint8Array.from(atob(file), (sign) => sign.charCodeAt(0)) });
 Object.assign(globalThis, {
-  CustomFunctions: { associate: (id: string) => functions.push(id), Error: CellError },
+  CustomFunctions: {
+    associate: (id: string, handler: Handler) => functions.set(id, handler),
+    Error: CellError,
+  },
   standIn: { office, functions, select } satisfies StandIn,
 });

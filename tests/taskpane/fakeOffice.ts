@@ -15,6 +15,8 @@ export interface FakeOffice {
   readonly opened: string[];
   /** Files that nobody has closed. */
   unclosed(): number;
+  /** What the workbook was told to do when it is opened again. */
+  readonly startups: string[];
 }
 
 interface Result {
@@ -27,6 +29,7 @@ type Done = (result: Result) => void;
 /** Call it after the fake of Excel, which it lends the opening of other workbooks. */
 export function fakeOffice({ file, lacks = [], platform = 'PC', refusal }: OfficeSetting = {}): FakeOffice {
   const opened: string[] = [];
+  const startups: string[] = [];
   let unclosed = 0;
   const succeed = (done: Done, value?: unknown): void => void setTimeout(() => done({ status: 'ok', value }));
   const fail = (done: Done, message: string): void =>
@@ -63,6 +66,11 @@ export function fakeOffice({ file, lacks = [], platform = 'PC', refusal }: Offic
             file && !refusal ? succeed(done, openFile(options)) : fail(done, refusal ?? 'there is no file'),
         },
       },
+      StartupBehavior: { none: 'None', load: 'Load' },
+      addin: {
+        getStartupBehavior: async () => startups.at(-1) ?? 'None',
+        setStartupBehavior: async (behaviour: string) => void startups.push(behaviour),
+      },
       FileType: { Compressed: 'compressed' },
       AsyncResultStatus: { Succeeded: 'ok' },
     },
@@ -70,5 +78,5 @@ export function fakeOffice({ file, lacks = [], platform = 'PC', refusal }: Offic
   Object.assign((globalThis as unknown as { Excel: object }).Excel, {
     createWorkbook: async (base64: string) => void opened.push(base64),
   });
-  return { opened, unclosed: () => unclosed };
+  return { opened, startups, unclosed: () => unclosed };
 }
