@@ -75,6 +75,14 @@ export const namespace = 'PACE';
 /** As it is typed: `PACE.TANGENT`. */
 export const typedName = (f: Pick<CellFunction, 'name'>): string => `${namespace}.${f.name}`;
 
+/** As argument help shows it: `PACE.EVENT(times, [change], [coefficient])`. */
+export function signature(f: CellFunction): string {
+  const parameters = Object.entries(f.parameters).map(([name, { optional }]) =>
+    optional ? `[${name}]` : name,
+  );
+  return `${typedName(f)}(${parameters.join(', ')})`;
+}
+
 export function defineFunction<const P extends Parameters>(definition: Definition<P>): CellFunction {
   return definition as unknown as CellFunction;
 }

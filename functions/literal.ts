@@ -35,15 +35,19 @@ function cell(text: string): CellValue {
   return value;
 }
 
+/** As {@link cutAt}, without the blanks around. */
+export const partsOf = (text: string, separator: ',' | ';'): string[] =>
+  cutAt(text, separator).map((part) => part.trim());
+
 /** Cuts at a sign that stands in no brackets, braces or quotes. */
-export function partsOf(text: string, separator: ',' | ';'): string[] {
+export function cutAt(text: string, separator: ',' | ';'): string[] {
   const parts = [''];
   let depth = 0;
-  for (const piece of text.match(/"(?:[^"]|"")*"|[^"]/g) ?? []) {
+  for (const piece of text.match(/"(?:[^"]|"")*"|'(?:[^']|'')*'|[^"]/g) ?? []) {
     if (piece === '(' || piece === '{') depth += 1;
     if (piece === ')' || piece === '}') depth -= 1;
     if (piece === separator && depth === 0) parts.push('');
     else parts[parts.length - 1] += piece;
   }
-  return parts.map((part) => part.trim());
+  return parts;
 }

@@ -1,5 +1,5 @@
 /** The table of functions in the README, worked out from the definitions. */
-import { typedName, type CellFunction, type Family } from './define';
+import { signature, type CellFunction, type Family } from './define';
 
 const families: Readonly<Record<Family, string>> = {
   reading: 'From reading to amount',
@@ -9,14 +9,6 @@ const families: Readonly<Record<Family, string>> = {
   mechanism: 'Mechanism and planning',
   care: 'Care',
 };
-
-/** As argument help shows it: `PACE.EVENT(times, [change], [coefficient])`. */
-export function signature(f: CellFunction): string {
-  const parameters = Object.entries(f.parameters).map(([name, { optional }]) =>
-    optional ? `[${name}]` : name,
-  );
-  return `${typedName(f)}(${parameters.join(', ')})`;
-}
 
 /** The families that have functions, in the order of the work, with their headings. */
 export const byFamily = (

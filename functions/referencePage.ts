@@ -1,9 +1,9 @@
 /** The reference of all functions in docs/functions.md, worked out from the definitions. */
 import { isRange, type CellResult } from './cell';
-import { typedName, type CellFunction, type Equations } from './define';
+import { signature, typedName, type CellFunction, type Equations } from './define';
 import { argumentFacts, argumentHeadings, exampleCell } from './documented';
 import { asLatex } from './equation/latex';
-import { byFamily, signature } from './readmeTable';
+import { byFamily } from './readmeTable';
 
 /** Everything a definition says, one part a function. */
 export function referencePage(catalogue: readonly CellFunction[]): string {

@@ -38,9 +38,3 @@ export function lookUp(typed: string): readonly CellFunction[] {
     .sort((a, b) => a.rank - b.rank)
     .map(({ f }) => f);
 }
-
-/** `PACE.TANGENT(times, values, time, [points], [degree])`: what need not be given stands in brackets. */
-export function signature(f: CellFunction): string {
-  const names = Object.entries(f.parameters).map(([name, { optional }]) => (optional ? `[${name}]` : name));
-  return `${typedName(f)}(${names.join(', ')})`;
-}

@@ -1,11 +1,11 @@
 /**
  * Makes the page look like a freshly drawn view while keeping the elements that stay: focus, caret,
- * scroll and live regions survive a redraw.
+ * scroll and live regions survive a redraw. What stands in an element marked `data-kept` is its own.
  */
 export function patch(current: Element, next: Element): void {
   patchAttributes(current, next);
   patchHandlers(current, next);
-  patchChildren(current, next);
+  if (!next.hasAttribute('data-kept')) patchChildren(current, next);
   patchProperties(current, next);
 }
 
@@ -19,7 +19,16 @@ function patchAttributes(current: Element, next: Element): void {
   }
 }
 
-const handlers = ['onclick', 'oninput', 'onchange', 'onkeydown', 'onsubmit', 'ontoggle'] as const;
+const handlers = [
+  'onclick',
+  'oninput',
+  'onchange',
+  'onkeydown',
+  'onfocus',
+  'onmouseenter',
+  'onsubmit',
+  'ontoggle',
+] as const;
 
 function patchHandlers(current: Element, next: Element): void {
   if (!(current instanceof HTMLElement && next instanceof HTMLElement)) return;

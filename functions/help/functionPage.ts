@@ -1,8 +1,7 @@
 /** The help page of one function, from its definition alone. */
 import { functionNamed } from '../catalogue';
-import { typedName, type CellFunction } from '../define';
+import { signature, typedName, type CellFunction } from '../define';
 import { argumentFacts, argumentHeadings } from '../documented';
-import { signature } from '../readmeTable';
 import { equationSection } from './equations';
 import { exampleSection } from './exampleSheet';
 import { escaped, page, table } from './html';

@@ -1,5 +1,8 @@
 /** The temperature step: rate coefficients over temperature, by the functions of that family. */
-import { celsiusZero, gasConstant } from '../../src/constants';
+import { isRange } from '../../functions/cell';
+import { measuredParameters } from '../../functions/temperature/measuredParameters';
+import { gasConstant } from '../../src/constants';
+import { InvalidInput } from '../../src/errors';
 import type { TemperatureChoice } from '../choices';
 import type { Run, Table } from '../runs';
 import { argumentOf, columnArgument, leftOut, truth, type Argument, type Pointing } from './argument';
@@ -104,14 +107,24 @@ export function temperatureAnswer(
   };
 }
 
+/** Temperatures as the functions themselves read them, text with a unit too. */
 function pointsOf({ measured: [temperatures, coefficients] }: Given): Point[] {
-  const columnOf = ({ value }: Argument): readonly unknown[] => (Array.isArray(value) ? value.flat() : []);
-  const ks = columnOf(coefficients);
-  return columnOf(temperatures).flatMap((temperature, row) => {
+  const kelvins = numbersIn('temperatures', temperatures);
+  const ks = numbersIn('coefficients', coefficients);
+  return kelvins.flatMap((kelvin, row) => {
     const k = ks[row];
-    const isPoint = typeof temperature === 'number' && typeof k === 'number' && k > 0;
-    return isPoint ? [{ x: 1000 / (temperature + celsiusZero), y: Math.log(k) }] : [];
+    const isPoint = kelvin !== null && k !== null && k > 0;
+    return isPoint ? [{ x: 1000 / kelvin, y: Math.log(k) }] : [];
   });
+}
+
+function numbersIn(name: keyof typeof measuredParameters, { value }: Argument): readonly (number | null)[] {
+  try {
+    return isRange(value) ? measuredParameters[name].read(value, name).numbers : [];
+  } catch (error) {
+    if (error instanceof InvalidInput) return []; // the function says why, in words
+    throw error;
+  }
 }
 
 /** ln k = ln A − Ea/RT, drawn from what PACE.ARRHENIUS answered. */

@@ -1,9 +1,7 @@
-/** A value with its uncertainty, and the formula that gives it: drawn the same way in every step. */
-import type { Actions } from '../actions';
+/** A value with its uncertainty, drawn the same way in every step. */
 import type { Estimate } from '../calls/estimate';
 import { plainNumber, valueWithUncertainty } from '../../functions/format';
 import { h, type Child } from '../h';
-import { button } from './fields';
 
 /** `rate at 30 s`, the value with its unit, and the limits in words. */
 export const estimateLines = (what: string, estimate: Estimate, unit: string): Child[] => [
@@ -33,12 +31,3 @@ export function limitsInWords({ uncertainty, lower, upper, degreesOfFreedom }: E
 /** What is said at once, to a screen reader as well, whenever it changes. */
 export const result = (...children: readonly Child[]): HTMLElement =>
   h('div', { className: 'result', role: 'status', 'aria-atomic': 'true' }, ...children);
-
-export function formulaLine(formula: string, actions: Actions): HTMLElement {
-  return h(
-    'div',
-    { className: 'formula' },
-    h('code', { id: 'formula', tabindex: '0', 'aria-label': 'formula' }, formula),
-    button('Copy', () => void actions.copy(formula), 'small'),
-  );
-}

@@ -1,14 +1,14 @@
 /** Every function, found by name or words, with its help and its example. */
 import { functionNamed } from '../../functions/catalogue';
-import { typedName, type CellFunction } from '../../functions/define';
+import { signature, typedName, type CellFunction } from '../../functions/define';
 import { howInWords } from '../../functions/documented';
 import type { Actions } from '../actions';
 import { h, type Child } from '../h';
-import { families, lookUp, signature } from '../lookup';
+import { families, lookUp } from '../lookup';
 import { parameterHelp } from './parameterHelp';
 import type { Scene } from '../scene';
-import { formulaLine } from './estimate';
 import { button, step, textField } from './fields';
+import { formulaLine } from './formulaLine';
 
 export function lookUpStep({ state: { lookup } }: Scene, actions: Actions): HTMLElement {
   const chosen = functionNamed(lookup.chosen);

@@ -7,8 +7,8 @@ import { h, type Child } from '../h';
 import { miniature } from '../plots/miniature';
 import type { Scene, Stamp } from '../scene';
 import type { Survey } from '../store';
-import { formulaLine } from './estimate';
 import { button, selectField, step } from './fields';
+import { formulaLine } from './formulaLine';
 import { progressBar } from './progress';
 
 const answers: readonly { readonly value: ManyAnswer; readonly label: string }[] = [

@@ -9,8 +9,9 @@ import { fitPlot, residualPlot } from '../plots/fitPlot';
 import { plainPlot } from '../plots/runPlot';
 import { headingOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
-import { estimateLines, formulaLine, result } from './estimate';
+import { estimateLines, result } from './estimate';
 import { choiceOfOne, selectField, step, textField } from './fields';
+import { formulaLine } from './formulaLine';
 
 const orders: readonly (readonly [string, string])[] = [
   ['0', '0'],

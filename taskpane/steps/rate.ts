@@ -11,8 +11,9 @@ import { overlayFor } from '../plots/overlay';
 import { plainPlot, ratesPlot, runPlot } from '../plots/runPlot';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
-import { estimateLines, formulaLine, result, valueLines } from './estimate';
+import { estimateLines, result, valueLines } from './estimate';
 import { choiceOfOne, step, textField } from './fields';
+import { formulaLine } from './formulaLine';
 
 const kinds: readonly (readonly [RateKind, string])[] = [
   ['average', 'Average'],

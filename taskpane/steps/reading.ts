@@ -10,8 +10,9 @@ import { columnOf, headingOf, type Run, type Table } from '../runs';
 import type { CellFunction } from '../../functions/define';
 import type { Scene } from '../scene';
 import { asItIs, fieldsOf, functionOf, signals, unitProblem } from '../signals';
-import { formulaLine, result } from './estimate';
+import { result } from './estimate';
 import { selectField, step } from './fields';
+import { formulaLine } from './formulaLine';
 import { pointedField } from './pointedField';
 
 const choices = [

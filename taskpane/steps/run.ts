@@ -47,7 +47,7 @@ export function runStep(
       rowField('first-row', 'From', table, run, 'firstRow', actions),
       rowField('last-row', 'To', table, run, 'lastRow', actions),
     ),
-    h('p', { className: 'hint' }, pointsInWords(table, run)),
+    isFollowedInTime(table, run) && h('p', { className: 'hint' }, pointsInWords(table, run)),
     table.apart !== '' && h('p', { className: 'problem' }, `${table.apart}.`),
     hint !== '' && h('p', { className: 'problem', role: 'alert' }, hint),
     howItIsRead(table, actions),

@@ -9,8 +9,9 @@ import { arrheniusPlot } from '../plots/arrheniusPlot';
 import { headingOf, type Table } from '../runs';
 import type { Scene } from '../scene';
 import { columnField } from './columnField';
-import { estimateLines, formulaLine, result } from './estimate';
+import { estimateLines, result } from './estimate';
 import { selectField, step } from './fields';
+import { formulaLine } from './formulaLine';
 import { pointedField } from './pointedField';
 
 const answers: readonly { readonly value: TemperatureAnswerKind; readonly label: string }[] = [

@@ -1,7 +1,8 @@
 /** @jest-environment jsdom */
 import { catalogue, functionNamed } from '../../functions/catalogue';
+import { signature } from '../../functions/define';
 import { exampleSize } from '../../taskpane/examples';
-import { families, lookUp, signature } from '../../taskpane/lookup';
+import { families, lookUp } from '../../taskpane/lookup';
 import { openPane, type PaneBench } from './paneBench';
 
 let pane: PaneBench;

@@ -74,3 +74,17 @@ test('coefficients that cannot be are refused in words', async () => {
   expect(pane.text('.result .problem')).toMatch(/^coefficients must be above 0: row 2/);
   expect(pane.find<HTMLButtonElement>('#put-in button.main').disabled).toBe(true);
 });
+
+test('temperatures written with their unit are taken as what they are, in kelvin too', async () => {
+  const written = [40, 50, 60, 70].map((t, i) => [
+    ['40 °C', '50.0 degC', '333.15 K', '70 degC'][i],
+    coefficientAt(t),
+  ]);
+  pane = await openPane({ Store: [['bath', 'k / d⁻¹'], ...written] }, 'A2');
+  await pane.tick('#task-temperature');
+  expect(pane.text('.result .value')).toBe('80 kJ/mol');
+  expect(pane.text('#formula')).toBe('=PACE.ARRHENIUS(Store!A2:A5,Store!B2:B5)');
+  expect(pane.find('#temperature svg').getAttribute('aria-label')).toContain('4 temperatures');
+  await pane.press('Put it in');
+  expect(pane.book.valueAt('C2')).toBeCloseTo(80, 8);
+});
