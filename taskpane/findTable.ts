@@ -54,7 +54,8 @@ function gridIn({ area: stands, cells: standing }: RangeReading, isTurned: boole
   const lines = Array.from({ length: area.columns }, (_, place) => {
     const below = cells.slice(first, last + 1).map((row) => row[place]);
     const heading = headingAbove(cells, first, place, unnamed(area.column + place, isTurned));
-    return { column: area.column + place, heading: withUnit(heading, commonUnit(below)), below };
+    const unit = commonUnit(below) || unitOfGroup(cells, first, place);
+    return { column: area.column + place, heading: withUnit(heading, unit), below };
   });
   const columns = lines.filter(({ below }) => isNumeric(below)).map(named);
   if (columns.length < 2)
@@ -104,6 +105,17 @@ function headingAbove(cells: CellRange, first: number, place: number, without: s
   }
   if (isText(near)) return readHeading(near);
   return { text: isNumber(near) ? String(near) : without, quantity: 'unknown', unit: '' };
+}
+
+/** Of `V / mL` that stands once above the names of several runs: it holds as far as the next such heading. */
+function unitOfGroup(cells: CellRange, first: number, place: number): string {
+  if (!isText(cells[first - 1]?.[place])) return '';
+  const group = cells[first - 2]
+    ?.slice(0, place + 1)
+    .filter(isText)
+    .at(-1);
+  const { unit } = readHeading(group ?? '');
+  return isUnitOnly(unit) ? unit : '';
 }
 
 /** The unit that every cell of a column carries itself: `°C` of `21.4 °C` and `25 °C`. */

@@ -96,7 +96,9 @@ function headingAsWritten(text: string): Heading {
     if (byName !== 'unknown' && form !== forms[3]) return { text: trimmed, quantity: byName, unit };
   }
   const byUnit = quantityOfUnit(bare(trimmed));
-  const byName = quantityOfName(trimmed);
+  // `A, first tablet`: what stands behind the comma tells runs apart
+  const ofWhole = quantityOfName(trimmed);
+  const byName = ofWhole === 'unknown' ? quantityOfName(trimmed.split(',')[0].trim()) : ofWhole;
   if (byName !== 'unknown') return { text: trimmed, quantity: byName, unit: unitless.has(byName) ? '1' : '' };
   if (byUnit !== 'unknown' && trimmed.length > 1)
     return { text: trimmed, quantity: byUnit, unit: bare(trimmed) };

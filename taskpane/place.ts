@@ -72,7 +72,10 @@ export async function firstFree(
   return areaName(asRead({ ...one, row: whole.row, column: column + 1 }));
 }
 
-/** Where a strip of that height, moved along, first meets empty cells as wide as it is. */
+/**
+ * Where a strip of that height, moved along, first meets empty cells as wide as it is: next to the table or
+ * to what was written there before, or else with a blank column on either side, so that it touches nothing.
+ */
 async function freeColumn(
   port: WorkbookPort,
   strip: SheetArea,
@@ -85,10 +88,13 @@ async function freeColumn(
     const area = found && asRead({ ...found, sheet: strip.sheet });
     for (let place = 0; area && place < area.columns; place++) taken.add(area.column + place);
   }
-  let column = strip.column;
-  while (column < strip.column + reach && hasAny(taken, column, strip.columns)) column++;
-  return column;
+  const isFree = (column: number): boolean => !taken.has(column);
+  const columnsFrom = (first: number, count: number): number[] =>
+    Array.from({ length: count }, (_, place) => first + place);
+  const fits = (column: number): boolean => {
+    const isJoined = !columnsFrom(strip.column, column - strip.column).some(isFree);
+    return (isJoined || isFree(column - 1)) && columnsFrom(column, strip.columns + 1).every(isFree);
+  };
+  const end = strip.column + reach;
+  return columnsFrom(strip.column, reach).find(fits) ?? end;
 }
-
-const hasAny = (taken: ReadonlySet<number>, first: number, count: number): boolean =>
-  Array.from({ length: count }, (_, place) => first + place).some((column) => taken.has(column));

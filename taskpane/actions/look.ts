@@ -91,12 +91,15 @@ export async function reread({ store, port }: Bench): Promise<void> {
   }
 }
 
-/** Columns stay what they are, under the headings that stand above them now. */
-const renewed = (table: Table, found: Table): Table['columns'] =>
-  table.columns.map((one) => {
+/** Columns stay what they are, under the headings that stand above them now; what has come since is added. */
+function renewed(table: Table, found: Table): Table['columns'] {
+  const known = table.columns.map((one) => {
     const now = found.columns.find(({ column }) => column === one.column);
     return now && now.heading.text !== unnamed(one.column, table.isTurned) ? now : one;
   });
+  const added = found.columns.filter(({ column }) => known.every((one) => one.column !== column));
+  return [...known, ...added].sort((a, b) => a.column - b.column);
+}
 
 function isSameCells({ cells }: RangeReading, table: Table): boolean {
   const { cells: known } = blockOf(table);

@@ -47,7 +47,8 @@ const list = (concerns: readonly Concern[]): HTMLElement =>
 
 const inWords = ({ finding, where, meaning, advice }: Concern): HTMLElement[] => [
   h('p', { className: 'finding' }, `${sentence(finding)} `, h('span', { className: 'place' }, `(${where})`)),
-  h('p', { className: 'hint' }, `${sentence(meaning)}. `, h('strong', {}, `${sentence(advice)}.`)),
+  h('p', {}, `${sentence(advice)}.`),
+  h('details', {}, h('summary', {}, 'Why'), h('p', { className: 'hint' }, `${sentence(meaning)}.`)),
 ];
 
 const sentence = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);

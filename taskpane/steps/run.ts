@@ -42,10 +42,14 @@ export function runStep(
       columnField('reading-column', 'Readings', table, run.readingColumn, (readingColumn) =>
         actions.changeRun({ readingColumn }),
       ),
-      unitField('time-unit', 'Unit of times', table, run.timeColumn, actions),
-      unitField('reading-unit', 'Unit of readings', table, run.readingColumn, actions),
       rowField('first-row', 'From', table, run, 'firstRow', actions),
       rowField('last-row', 'To', table, run, 'lastRow', actions),
+    ),
+    h(
+      'div',
+      { className: 'pair' },
+      unitField('time-unit', 'Unit of times', table, run.timeColumn, actions),
+      unitField('reading-unit', 'Unit of readings', table, run.readingColumn, actions),
     ),
     isFollowedInTime(table, run) && h('p', { className: 'hint' }, pointsInWords(table, run)),
     table.apart !== '' && h('p', { className: 'problem' }, `${table.apart}.`),

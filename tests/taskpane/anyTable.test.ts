@@ -150,6 +150,22 @@ test('a unit that the heading leaves out is the person’s to give, and goes onc
   expect(tableOf(rows('gas / L'), { units }).columns[1].heading.unit).toBe('L');
 });
 
+test('a heading above several names gives them its unit, as far as the next', () => {
+  const table = tableOf([
+    [null, 'V / mL', null, 'c / (mol/L)', null],
+    ['t / d', '40 °C', '50 °C', '40 °C', '50 °C'],
+    [0, 18, 18, 0.9, 0.9],
+    [7, 17, 16, 0.85, 0.8],
+  ]);
+  expect(table.columns.map(({ heading }) => [heading.text, heading.unit])).toEqual([
+    ['t / d', 'd'],
+    ['40 °C', 'mL'],
+    ['50 °C', 'mL'],
+    ['40 °C', 'mol/L'],
+    ['50 °C', 'mol/L'],
+  ]);
+});
+
 test('temperatures written with their unit are a column of them', () => {
   const table = tableOf([
     ['bath', 'k / d⁻¹'],

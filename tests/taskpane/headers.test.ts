@@ -27,6 +27,8 @@ test.each([
   ['rate coefficient, order 1 / min⁻¹', 'coefficient', 'min⁻¹'],
   ['T / K', 'temperature', 'K'],
   ['conversion', 'fraction', '1'],
+  ['A, half the dose', 'absorbance', '1'],
+  ['volume, first tablet', 'volume', ''],
 ])('readHeading(%j) is %s in %j', (text, quantity, unit) => {
   expect(readHeading(text)).toEqual({ text, quantity, unit });
 });

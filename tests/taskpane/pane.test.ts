@@ -109,7 +109,8 @@ test('a place is proposed where nothing stands in the way', async () => {
   await tick('#kind-column');
   expect(find<HTMLInputElement>('#target').value).toBe("'Gas run'!C2");
   await tick('#with-detail');
-  expect(find<HTMLInputElement>('#target').value).toBe("'Gas run'!F2");
+  // a blank column stays between it and the note
+  expect(find<HTMLInputElement>('#target').value).toBe("'Gas run'!G2");
 });
 
 test('the active cell can be the target', async () => {
@@ -256,7 +257,7 @@ test('what could spoil a result stands at the run: three at once, the rest on de
   const count = Number(/^(\d+) things to look at$/.exec(text('.findings .count'))![1]);
   expect(count).toBeGreaterThan(3);
   expect(root.querySelectorAll('.findings > ul > li')).toHaveLength(3);
-  expect(text('.findings summary')).toBe(`and ${count - 3} more`);
+  expect(text('.findings > details > summary')).toBe(`and ${count - 3} more`);
   expect(root.querySelectorAll('.findings li')).toHaveLength(count);
   expect(text('.findings')).toContain('(row 10)'); // where 900 stands
 });
