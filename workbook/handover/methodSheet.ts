@@ -1,9 +1,8 @@
 /** The sheet "Method": what each formula was and is now, how it is worked out, with which constants. */
 import { areaName, cellName } from '../../functions/address';
 import { CellError } from '../../functions/cell';
-import { typedName, type CellFunction } from '../../functions/define';
+import { signature, typedName, type CellFunction } from '../../functions/define';
 import { howInWords } from '../../functions/documented';
-import { signature } from '../../functions/readmeTable';
 import {
   avogadroConstant,
   boltzmannConstant,
