@@ -16,11 +16,12 @@ const superscripts: Readonly<Record<string, string>> = {
 
 const raised = (exponent: number): string => [...String(exponent)].map((sign) => superscripts[sign]).join('');
 const minus = (text: string): string => text.replace(/-/g, '−');
-const exponentOf = (value: number): number =>
+/** Of ten, in the first digit of a number; 0 for 0. */
+export const exponentOf = (value: number): number =>
   value === 0 ? 0 : Number(value.toExponential(11).split('e')[1]);
 
 /** Beyond these powers of ten a number is written with one. */
-const isPlain = (exponent: number): boolean => exponent >= -3 && exponent <= 4;
+export const isPlain = (exponent: number): boolean => exponent >= -3 && exponent <= 4;
 
 /** @example plainNumber(0.000123456) // '1.235 × 10⁻⁴' */
 export function plainNumber(value: number, digits = 4): string {
@@ -41,17 +42,19 @@ export function axisNumbers(values: readonly number[]): { numbers: string[]; tim
   return { numbers, times: power === 0 ? '' : `× 10${raised(power)}` };
 }
 
+/** What is left of an uncertainty by the rounding of the arithmetic, as in invented data without scatter. */
+export const isRounding = (value: number, uncertainty: number): boolean =>
+  uncertainty <= 1e-10 * Math.abs(value) || !Number.isFinite(uncertainty);
+
 /**
  * The uncertainty to two digits, the value to the same decimal place.
  *
- * @param uncertainty a standard uncertainty; `null` where the data leave none. What is left of one by the
- *   rounding of the arithmetic, as in invented data without scatter, is not shown
+ * @param uncertainty a standard uncertainty; `null` where the data leave none; one of mere rounding is not shown
  * @example valueWithUncertainty(0.48123, 0.00231) // '0.4812 ± 0.0023'
  * @see JCGM 100:2008 (GUM), 7.2.6
  */
 export function valueWithUncertainty(value: number, uncertainty: number | null): string {
-  const isRounding = uncertainty !== null && uncertainty <= 1e-10 * Math.abs(value);
-  if (uncertainty === null || isRounding || !Number.isFinite(uncertainty)) return plainNumber(value);
+  if (uncertainty === null || isRounding(value, uncertainty)) return plainNumber(value);
   const exponent = Math.max(exponentOf(value), exponentOf(uncertainty));
   const power = isPlain(exponent) ? 0 : exponent;
   const lastDigit = exponentOf(Number(uncertainty.toPrecision(2))) - 1;

@@ -216,14 +216,14 @@ async function write(
   for (const { cell, range } of targets) {
     // what stands where a formula will spill would stop it
     if (inUse.length > 0) range.clear(Excel.ClearApplyTo.contents);
+    if (cell.numberFormats) range.numberFormat = cell.numberFormats as (string | null)[][]; // null: as it is
     fill(rangeOf(sheets.get(cell.area.sheet)!, cell.area), cell);
   }
   await context.sync();
   return { description, area: around(cells.map(reachOf)), snapshot };
 }
 
-function fill(range: Excel.Range, { content, numberFormat }: CellToWrite): void {
-  if (numberFormat !== undefined) range.numberFormat = [[numberFormat]];
+function fill(range: Excel.Range, { content }: CellToWrite): void {
   if ('formula' in content) range.formulas = [[content.formula]];
   else range.values = [[asTyped(content.value)]];
 }

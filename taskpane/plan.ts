@@ -1,11 +1,22 @@
 /** What "Put it in" would write, worked out before anything is touched. */
 import { areaName, parseArea } from '../functions/address';
 import type { PutChoice } from './choices';
-import type { Insertion } from './insertions/insertion';
+import type { Insertion, Part } from './insertions/insertion';
 import type { CellToWrite, SheetArea } from './port';
 
+/** A cell to write whose formats are not worked out yet. */
+export type PlannedCell = Omit<CellToWrite, 'numberFormats'> & Pick<Part, 'formats'>;
+
+/** The formats take the answer, so they are worked out only for what is put in. */
+export function finished({ formats, ...cell }: PlannedCell): CellToWrite {
+  const numberFormats = formats?.() ?? [];
+  const { rows, columns } = cell.spills ?? cell.area;
+  const fits = numberFormats.length === rows && numberFormats.every((row) => row.length === columns);
+  return fits ? { ...cell, numberFormats } : cell; // an answer that is refused has no formats
+}
+
 export interface Plan {
-  readonly cells: readonly CellToWrite[];
+  readonly cells: readonly PlannedCell[];
   /** Everything that will be filled, as one block. */
   readonly area: SheetArea;
   /** The first cell below the headings. */

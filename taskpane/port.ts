@@ -19,7 +19,8 @@ export interface CellToWrite {
   readonly area: SheetArea;
   readonly content: { readonly value: CellValue } | { readonly formula: string };
   readonly spills?: { readonly rows: number; readonly columns: number };
-  readonly numberFormat?: string;
+  /** Of every cell that it fills, row by row; left out, and where `null`, cells keep the formats they have. */
+  readonly numberFormats?: readonly (readonly (string | null)[])[];
 }
 
 /** What a write changed, enough to put it back. Opaque to the pane. */

@@ -63,7 +63,13 @@ export function localPort(grid: Grid, files: WorkbookFiles): WorkbookPort {
       const reach = cells.flatMap((cell) => placesIn(reachOf(cell)));
       const snapshot = reach.map((place): CellToSet => ({ ...place, ...grid.typed(place) }));
       // what stands where a formula will spill would block it
-      const emptied = reach.map((place): CellToSet => ({ ...place, value: null }));
+      const emptied = cells.flatMap((cell) =>
+        placesIn(reachOf(cell)).map((place): CellToSet => ({
+          ...place,
+          value: null,
+          ...formatAt(cell, place),
+        })),
+      );
       await grid.set([...emptied, ...cells.map(cellToSet)]);
       return { description, area: reachOf(cells[0]), snapshot };
     },
@@ -79,9 +85,17 @@ export function localPort(grid: Grid, files: WorkbookFiles): WorkbookPort {
 
 const reachOf = ({ area, spills }: CellToWrite): SheetArea => ({ ...area, ...spills });
 
-function cellToSet({ area: { sheet, row, column }, content, numberFormat }: CellToWrite): CellToSet {
+function cellToSet({ area: { sheet, row, column }, content }: CellToWrite): CellToSet {
   const typed = 'formula' in content ? { value: null, formula: content.formula } : { value: content.value };
-  return { sheet, row, column, ...typed, ...(numberFormat === undefined ? {} : { numberFormat }) };
+  return { sheet, row, column, ...typed };
+}
+
+function formatAt(
+  { area, numberFormats }: CellToWrite,
+  { row, column }: Pick<SheetArea, 'row' | 'column'>,
+): Pick<CellToSet, 'numberFormat'> {
+  const numberFormat = numberFormats?.[row - area.row]?.[column - area.column];
+  return numberFormat ? { numberFormat } : {};
 }
 
 function placesIn({ sheet, row, column, rows, columns }: SheetArea): Omit<CellToSet, 'value'>[] {

@@ -4,8 +4,8 @@ import { readingAnswer } from '../calls/reading';
 import { currentInsertion } from '../insertions/current';
 import type { Insertion } from '../insertions/insertion';
 import { firstFree } from '../place';
-import { planFor, type Plan } from '../plan';
-import { CellsInUse, type CellToWrite, type SheetArea, type WriteReceipt } from '../port';
+import { finished, planFor, type Plan, type PlannedCell } from '../plan';
+import { CellsInUse, type SheetArea, type WriteReceipt } from '../port';
 import type { Deed, State } from '../store';
 import { turnedArea } from '../turned';
 import type { Bench } from './bench';
@@ -78,8 +78,8 @@ export function putting(bench: Bench, work: LongWork): Putting {
     const inUse = overwrite || bits.length === 1 ? [] : await port.occupied(area);
     if (inUse.length > 0) throw new CellsInUse(inUse);
     const receipts: WriteReceipt[] = [];
-    const one = async (bit: readonly CellToWrite[]): Promise<void> => {
-      receipts.push(await port.write(bit, { overwrite, description }));
+    const one = async (bit: readonly PlannedCell[]): Promise<void> => {
+      receipts.push(await port.write(bit.map(finished), { overwrite, description }));
     };
     try {
       if (bits.length > 1) return await work.through('writing', bits, one);
@@ -122,7 +122,7 @@ const sheetOf = ({ table }: State): string => table?.sheet ?? '';
 /** So many cells are written at one go. */
 const bitSize = 24;
 
-const inBits = (cells: readonly CellToWrite[]): (readonly CellToWrite[])[] =>
+const inBits = (cells: readonly PlannedCell[]): (readonly PlannedCell[])[] =>
   Array.from({ length: Math.ceil(cells.length / bitSize) }, (_, i) =>
     cells.slice(i * bitSize, (i + 1) * bitSize),
   );

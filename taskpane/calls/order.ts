@@ -1,5 +1,5 @@
 /** The order step: what the functions of that family say of the chosen run. */
-import { CellError, type CellValue } from '../../functions/cell';
+import { CellError, type CellRange, type CellValue } from '../../functions/cell';
 import type { OrderAnswerKind, OrderChoice } from '../choices';
 import { columnOf, headingOf, pointsOf, type Run, type Table } from '../runs';
 import { argumentOf, columnArgument, leftOut, quoted, truth, type Argument, type Pointing } from './argument';
@@ -81,6 +81,11 @@ export function orderFormula(given: Given, choice: OrderChoice, detail: boolean)
       ? { value: undefined, text: callText('ORDER', [given.times, given.values, given.endpoint]) }
       : orderArgument(choice.order, given);
   return `=${callText(...calls[choice.answer](given, order, detail ? truth(true) : leftOut))}`;
+}
+
+/** What such a formula answers in the sheet, with all of the standard row where it has one. */
+export function orderRows(given: Given, choice: OrderChoice): CellRange {
+  return askForRows(...calls[choice.answer](given, orderArgument(choice.order, given), truth(true)));
 }
 
 /** The verdict on every order, for which the endpoint matters and the chosen order does not. */

@@ -1,5 +1,7 @@
 /** What a step would write: its formulas and their headings, in places counted from the cell they are put at. */
 import { standardRowHeadings } from '../../functions/results';
+import type { Answered, Estimate } from '../calls/estimate';
+import { standardRowFormats, turned, type NumberFormats } from '../numberFormats';
 import type { CellToWrite, SheetArea } from '../port';
 import type { Run, Table } from '../runs';
 
@@ -8,9 +10,11 @@ export interface Size {
   readonly columns: number;
 }
 
-export interface Part extends Omit<CellToWrite, 'area'> {
+export interface Part extends Omit<CellToWrite, 'area' | 'numberFormats'> {
   readonly down: number;
   readonly right: number;
+  /** Worked out when it is put in, since it takes the answer. */
+  readonly formats?: () => NumberFormats;
 }
 
 export interface Insertion {
@@ -37,9 +41,18 @@ export interface Insertion {
 }
 
 /** One formula, as large as its answer. */
-export function oneFormula(formula: string, size: Size): Pick<Insertion, 'parts' | 'size'> {
+export function oneFormula(
+  formula: string,
+  size: Size,
+  formats?: () => NumberFormats,
+): Pick<Insertion, 'parts' | 'size'> {
   const spills = size.rows * size.columns > 1 ? { spills: size } : {};
-  return { parts: [{ down: 0, right: 0, content: { formula }, ...spills }], size };
+  return { parts: [{ down: 0, right: 0, content: { formula }, formats, ...spills }], size };
+}
+
+/** Of the first columns of the standard row, as many as are put in; nothing where there is no answer. */
+export function estimateFormats(answer: Answered<Estimate>, columns: number): NumberFormats {
+  return 'ok' in answer ? [standardRowFormats(answer.ok).slice(0, columns)] : [];
 }
 
 /** What has a cell a reading lies as the run does: in a row beside a row, its headings left of it. */
@@ -47,11 +60,12 @@ export function alongRun({ isTurned }: Table, insertion: Insertion): Insertion {
   if (!isTurned) return { ...insertion, isAlongRun: true };
   return {
     ...insertion,
-    parts: insertion.parts.map(({ down, right, spills, ...rest }) => ({
+    parts: insertion.parts.map(({ down, right, spills, formats, ...rest }) => ({
       ...rest,
       down: right,
       right: down,
       ...(spills && { spills: turnedSize(spills) }),
+      ...(formats && { formats: () => turned(formats()) }),
     })),
     size: turnedSize(insertion.size),
     headingsStand: 'left',

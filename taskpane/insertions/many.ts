@@ -1,7 +1,8 @@
 import { areaName } from '../../functions/address';
 import { isOneBlock, pickedRuns, surveyLaw, type OneOfMany } from '../calls/many';
-import { columnArgument } from '../calls/argument';
-import { formulaText } from '../calls/call';
+import { columnArgument, type Argument } from '../calls/argument';
+import { askForRows, formulaText } from '../calls/call';
+import { everyRow, tableColumns, type NumberFormats } from '../numberFormats';
 import { areaOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
 import { oneFormula, type Insertion, type Part } from './insertion';
@@ -46,18 +47,39 @@ function surveyInsertion(
   const [{ run }] = runs;
   const area = areaOf(table, run.readingColumn, run, runs.length);
   const block = { value: undefined, text: areaName(area) };
-  const args = [
-    columnArgument(table, run, run.timeColumn),
-    block,
-    ...surveyLaw(order, { sheet: table.sheet, pointedAt }),
-  ];
+  const law = surveyLaw(order, { sheet: table.sheet, pointedAt });
+  const args = [columnArgument(table, run, run.timeColumn), block, ...law];
   return {
     name: counted('survey', runs.length),
-    ...oneFormula(formulaText('SURVEY', args), { rows: runs.length + 1, columns: surveyColumns }),
+    ...oneFormula(formulaText('SURVEY', args), { rows: runs.length + 1, columns: surveyColumns }, () =>
+      surveyFormats(table, runs, law),
+    ),
     headings: [],
     reads: readsOfAll(table, runs),
     hasDetail: false,
   };
+}
+
+/** So many runs are surveyed to see how large the numbers are. */
+const mostSampled = 8;
+
+function surveyFormats(table: Table, runs: readonly OneOfMany[], law: readonly Argument[]): NumberFormats {
+  const step = Math.ceil(runs.length / mostSampled);
+  const sampled = runs.filter((_, place) => place % step === 0);
+  const surveyed = sampled.map(({ run }) =>
+    askForRows('SURVEY', [
+      columnArgument(table, run, run.timeColumn),
+      columnArgument(table, run, run.readingColumn),
+      ...law,
+    ]),
+  );
+  const headings = surveyed[0][0].map(String);
+  if (headings.length < surveyColumns) return [];
+  const columns = tableColumns(
+    headings,
+    surveyed.flatMap((rows) => rows.slice(1)),
+  );
+  return [headings.map(() => null), ...everyRow(columns, runs.length)];
 }
 
 /** One row a run: its name, then its answer. */

@@ -1,8 +1,19 @@
-import { coefficientUnit, givenBy, orderFormula } from '../calls/order';
+import { answeredEstimate } from '../calls/estimate';
+import { coefficientUnit, givenBy, orderFormula, orderRows } from '../calls/order';
+import type { CellRange } from '../../functions/cell';
 import type { OrderChoice } from '../choices';
+import { columnFormat, everyRow, numbersIn, tableFormats, type NumberFormats } from '../numberFormats';
 import { headingOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
-import { alongRun, detailColumns, headingsFor, oneFormula, type Insertion, type Size } from './insertion';
+import {
+  alongRun,
+  detailColumns,
+  estimateFormats,
+  headingsFor,
+  oneFormula,
+  type Insertion,
+  type Size,
+} from './insertion';
 import { readsOf } from './rate';
 
 /** Of the table that PACE.ORDERS answers: its headings, six simple orders and the free one. */
@@ -16,16 +27,25 @@ export function orderInsertion(
 ): Insertion {
   const hasDetail = !['curve', 'orders'].includes(order.answer);
   const detail = hasDetail && withDetail;
-  const formula = orderFormula(givenBy(table, run, order, { sheet: table.sheet, pointedAt }), order, detail);
+  const given = givenBy(table, run, order, { sheet: table.sheet, pointedAt });
+  const size = sizeOf(order, run, detail);
   const name = orderName(order);
   const insertion: Insertion = {
     name,
-    ...oneFormula(formula, sizeOf(order, run, detail)),
+    ...oneFormula(orderFormula(given, order, detail), size, () =>
+      formatsFor(order, orderRows(given, order), size),
+    ),
     headings: order.answer === 'orders' ? [] : headingsFor(name, unitFor(table, run, order), detail),
     reads: readsOf(table, run),
     hasDetail,
   };
   return order.answer === 'curve' ? alongRun(table, insertion) : insertion;
+}
+
+function formatsFor({ answer }: OrderChoice, rows: CellRange, { columns }: Size): NumberFormats {
+  if (answer === 'orders') return tableFormats(rows);
+  if (answer !== 'curve') return estimateFormats(answeredEstimate(rows), columns);
+  return everyRow([columnFormat(numbersIn(rows))], rows.length);
 }
 
 function sizeOf({ answer }: OrderChoice, run: Run, detail: boolean): Size {

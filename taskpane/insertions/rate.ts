@@ -1,9 +1,18 @@
-import { rateFormula } from '../calls/rate';
+import { rateAnswer, rateFormula, type RateAnswer } from '../calls/rate';
 import type { RateChoice } from '../choices';
 import { rateUnit } from '../headers';
+import { columnsFormats, everyRow, type NumberFormats } from '../numberFormats';
 import { areaOf, headingOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
-import { alongRun, detailColumns, headingsFor, oneFormula, type Insertion } from './insertion';
+import {
+  alongRun,
+  detailColumns,
+  estimateFormats,
+  headingsFor,
+  oneFormula,
+  type Insertion,
+  type Size,
+} from './insertion';
 
 /** `rate at 30 s`: for headings and messages. */
 export function rateName(table: Table, run: Run, rate: RateChoice): string {
@@ -23,17 +32,26 @@ export function rateInsertion(
 ): Insertion {
   const name = rateName(table, run, rate);
   const unit = rateUnit(headingOf(table, run.readingColumn), headingOf(table, run.timeColumn));
+  const pointing = { sheet: table.sheet, pointedAt };
+  const size = {
+    rows: rate.kind === 'column' ? run.lastRow - run.firstRow + 1 : 1,
+    columns: detailColumns(withDetail),
+  };
   const insertion: Insertion = {
     name,
-    ...oneFormula(rateFormula(table, run, rate, { sheet: table.sheet, pointedAt }, withDetail), {
-      rows: rate.kind === 'column' ? run.lastRow - run.firstRow + 1 : 1,
-      columns: detailColumns(withDetail),
-    }),
+    ...oneFormula(rateFormula(table, run, rate, pointing, withDetail), size, () =>
+      formatsFor(rateAnswer(table, run, rate, pointing), size),
+    ),
     headings: headingsFor(name, unit, withDetail),
     reads: readsOf(table, run),
     hasDetail: true,
   };
   return rate.kind === 'column' ? alongRun(table, insertion) : insertion;
+}
+
+function formatsFor(answer: RateAnswer, { rows, columns }: Size): NumberFormats {
+  if (answer.kind === 'column') return everyRow(columnsFormats(answer.rates).slice(0, columns), rows);
+  return answer.kind === 'one' ? estimateFormats({ ok: answer.rate }, columns) : [];
 }
 
 export const readsOf = (table: Table, run: Run): Insertion['reads'] =>

@@ -1,4 +1,5 @@
-import { convertedHeading, readingFormula } from '../calls/reading';
+import { convertedHeading, readingAnswer, readingFormula } from '../calls/reading';
+import { columnFormat, everyRow, numbersIn, type NumberFormats } from '../numberFormats';
 import type { Run, Table } from '../runs';
 import { functionOf } from '../signals';
 import type { State } from '../store';
@@ -14,10 +15,16 @@ export function readingInsertion(
   const f = functionOf(reading.what);
   if (!f) return null;
   const { text, unit } = convertedHeading(f, table, run);
-  const formula = readingFormula(f, table, run, reading, { sheet: table.sheet, pointedAt });
+  const pointing = { sheet: table.sheet, pointedAt };
+  const formula = readingFormula(f, table, run, reading, pointing);
+  const rows = run.lastRow - run.firstRow + 1;
+  const formats = (): NumberFormats => {
+    const answer = readingAnswer(table, run, reading, pointing);
+    return answer.kind === 'column' ? everyRow([columnFormat(numbersIn(answer.cells))], rows) : [];
+  };
   return alongRun(table, {
     name: text,
-    ...oneFormula(formula, { rows: run.lastRow - run.firstRow + 1, columns: 1 }),
+    ...oneFormula(formula, { rows, columns: 1 }, formats),
     headings: headingsFor(text, unit, false),
     reads: readsOf(table, run),
     hasDetail: false,

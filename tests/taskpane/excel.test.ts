@@ -3,8 +3,8 @@ import { fakeExcel } from './fakeExcel';
 import { portContract, portErrorCells, type BenchSheets, type PortBench } from './portContract';
 
 function open(sheets: BenchSheets): PortBench {
-  const { select } = fakeExcel(sheets);
-  return { port: excelPort(), select };
+  const { select, numberFormat } = fakeExcel(sheets);
+  return { port: excelPort(), select, numberFormat };
 }
 
 portContract('Excel', open);

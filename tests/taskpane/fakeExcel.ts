@@ -34,7 +34,13 @@ function typed(input: unknown): Cell {
 
 type Loose = Record<string, unknown>;
 
-export function fakeExcel(sheets: BenchSheets): { select(reference: string): void } {
+export interface FakeExcel {
+  select(reference: string): void;
+  /** Of one cell. */
+  numberFormat(reference: string): string;
+}
+
+export function fakeExcel(sheets: BenchSheets): FakeExcel {
   const names = Object.keys(sheets);
   const cells = new Map<string, Cell>();
   const key = (sheet: string, row: number, column: number): string => `${sheet}!${row}!${column}`;
@@ -62,8 +68,13 @@ export function fakeExcel(sheets: BenchSheets): { select(reference: string): voi
       valueTypes: grid(area, (r, c) => at(r, c).type),
       formulas: grid(area, (r, c) => at(r, c).formula),
       numberFormat: grid(area, (r, c) => at(r, c).format),
+      // of contents alone: formats stay
       clear: () =>
-        pending.push(() => grid(area, (r, c) => cells.delete(key(sheet, area.row + r, area.column + c)))),
+        pending.push(() =>
+          grid(area, (r, c) =>
+            cells.set(key(sheet, area.row + r, area.column + c), { ...blank, format: at(r, c).format }),
+          ),
+        ),
       select: () => pending.push(() => ((shownSheet = sheet), (selected = area))),
       getCell: (r: number, c: number) =>
         rangeAt(sheet, { row: area.row + r, column: area.column + c, rows: 1, columns: 1 }),
@@ -82,9 +93,10 @@ export function fakeExcel(sheets: BenchSheets): { select(reference: string): voi
       );
     };
     return settable(mock, {
-      values: (rows) => put(rows, (_, next) => typed(next)),
-      formulas: (rows) => put(rows, (_, next) => typed(next)),
-      numberFormat: (rows) => put(rows, (old, next) => ({ ...old, format: String(next) })),
+      values: (rows) => put(rows, ({ format }, next) => ({ ...typed(next), format })),
+      formulas: (rows) => put(rows, ({ format }, next) => ({ ...typed(next), format })),
+      numberFormat: (rows) =>
+        put(rows, (old, next) => (next === null ? old : { ...old, format: String(next) })),
     });
   }
 
@@ -180,6 +192,10 @@ export function fakeExcel(sheets: BenchSheets): { select(reference: string): voi
       const { sheet = shownSheet, ...area } = parseArea(reference)!;
       [shownSheet, selected] = [sheet, area];
       handlers.forEach((handler) => void handler());
+    },
+    numberFormat(reference) {
+      const { sheet = shownSheet, row, column } = parseArea(reference)!;
+      return (cells.get(key(sheet, row, column)) ?? blank).format;
     },
   };
 }

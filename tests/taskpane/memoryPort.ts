@@ -17,17 +17,21 @@ interface Cell {
   readonly formula?: string;
 }
 
+const plainFormat = 'General';
+
 export interface MemoryWorkbook {
   readonly port: WorkbookPort;
   /** `'Gas run'!A1:B9`; the active cell is its first. */
   select(reference: string): void;
   set(reference: string, value: CellValue): void;
   formulaAt(reference: string): string | undefined;
+  numberFormat(reference: string): string;
   valueAt(reference: string): CellValue;
 }
 
 export function memoryWorkbook(sheets: Sheets): MemoryWorkbook {
   const cells = new Map<string, Cell>();
+  const formats = new Map<string, string>();
   const names = Object.keys(sheets);
   const key = (sheet: string, row: number, column: number): string => `${sheet}!${row}!${column}`;
   for (const [sheet, rows] of Object.entries(sheets)) {
@@ -131,7 +135,12 @@ export function memoryWorkbook(sheets: Sheets): MemoryWorkbook {
       const touched = toWrite.flatMap((one) =>
         places(reachOf(one)).map(([r, c]) => key(one.area.sheet, r, c)),
       );
-      const snapshot = touched.map((name) => [name, cells.get(name)] as const);
+      const snapshot = touched.map((name) => [name, cells.get(name), formats.get(name)] as const);
+      for (const { area: to, numberFormats = [] } of toWrite) {
+        numberFormats.forEach((row, r) =>
+          row.forEach((format, c) => format && formats.set(key(to.sheet, to.row + r, to.column + c), format)),
+        );
+      }
       touched.forEach((name) => cells.delete(name));
       for (const one of toWrite) {
         const name = key(one.area.sheet, one.area.row, one.area.column);
@@ -149,9 +158,11 @@ export function memoryWorkbook(sheets: Sheets): MemoryWorkbook {
       return { description, area: reachOf(toWrite[0]), snapshot };
     },
     async undo({ snapshot }) {
-      for (const [name, cell] of snapshot as [string, Cell | undefined][]) {
+      for (const [name, cell, format] of snapshot as [string, Cell?, string?][]) {
         if (cell) cells.set(name, cell);
         else cells.delete(name);
+        if (format) formats.set(name, format);
+        else formats.delete(name);
       }
     },
     async reveal(of) {
@@ -174,6 +185,10 @@ export function memoryWorkbook(sheets: Sheets): MemoryWorkbook {
     formulaAt(reference) {
       const { sheet, row, column } = area(reference);
       return cells.get(key(sheet, row, column))?.formula;
+    },
+    numberFormat(reference) {
+      const { sheet, row, column } = area(reference);
+      return formats.get(key(sheet, row, column)) ?? plainFormat;
     },
     valueAt(reference) {
       const of = area(reference);

@@ -8,6 +8,8 @@ export interface PortBench {
   readonly port: WorkbookPort;
   /** Selects as a person would; the active cell is the first of the area. */
   select(reference: string): void | Promise<void>;
+  /** Of one cell, `General` where it has none of its own. */
+  numberFormat(reference: string): string | Promise<string>;
   dispose?(): void | Promise<void>;
 }
 
@@ -160,6 +162,39 @@ export function portContract(
       await port.undo(receipt);
       expect(bare(await port.occupied(area('F2')))).toEqual(['F2']);
       expect(await cellsIn('F2')).not.toEqual([[7]]);
+    });
+
+    const formatsIn = (...references: string[]): Promise<string[]> =>
+      Promise.all(references.map(async (one) => bench.numberFormat(`'Gas run'!${one}`)));
+    const table: CellToWrite = {
+      ...formula('F2', '={1,2;3,4}', 2, 2),
+      numberFormats: [
+        ['0.00', null],
+        ['0.00', '0.0E+00'],
+      ],
+    };
+
+    test('number formats reach as far as the formula, where they are given', async () => {
+      await port.write([value('F1', 'rate'), table], plain);
+      expect(await formatsIn('F1', 'F2', 'F3', 'G2', 'G3')).toEqual([
+        'General',
+        '0.00',
+        '0.00',
+        'General',
+        '0.0E+00',
+      ]);
+    });
+
+    test('undo brings back the formats that were there, and those that were not', async () => {
+      await port.write([{ ...value('F2', 3.5), numberFormats: [['0.000']] }], plain);
+      const receipt = await port.write([table], forced);
+      expect(await formatsIn('F2')).toEqual(['0.00']);
+      await port.undo(receipt);
+      expect(await formatsIn('F2', 'F3', 'G3')).toEqual(['0.000', 'General', 'General']);
+      expect(await cellsIn('F2:G3')).toEqual([
+        [3.5, null],
+        [null, null],
+      ]);
     });
 
     test('a receipt says what was done and where', async () => {

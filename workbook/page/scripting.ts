@@ -2,7 +2,7 @@
 import { parseArea } from '../../functions/address';
 import type { WorkbookPort } from '../../taskpane/port';
 import type { BookModel } from '../engine/engine';
-import type { Grid } from '../engine/grid';
+import type { Grid, GridArea } from '../engine/grid';
 
 export interface Scripting {
   /** What the pane works through. */
@@ -11,18 +11,24 @@ export interface Scripting {
   open(book: BookModel): Promise<void>;
   /** Selects cells as a person would: `'Gas run'!B2:B9`. */
   select(reference: string): void;
+  /** Of one cell, as a file has it: `0.00`. */
+  numberFormat(reference: string): string;
 }
 
 export function offerToScripts(grid: Grid, port: WorkbookPort): void {
+  const areaOf = (reference: string): GridArea => {
+    const area = parseArea(reference);
+    if (!area) throw new Error(`a reference is written like 'Gas run'!B2:B9: got "${reference}"`);
+    return { sheet: grid.active()?.sheet ?? grid.sheets()[0], ...area };
+  };
   const scripting: Scripting = {
     port,
     open: (book) => grid.open(book),
     select(reference) {
-      const area = parseArea(reference);
-      if (!area) throw new Error(`a reference is written like 'Gas run'!B2:B9: got "${reference}"`);
-      grid.select({ sheet: grid.active()?.sheet ?? grid.sheets()[0], ...area });
+      grid.select(areaOf(reference));
       grid.focus();
     },
+    numberFormat: (reference) => grid.typed(areaOf(reference)).numberFormat ?? 'General',
   };
   Object.assign(window, { flaskpace: scripting });
 }

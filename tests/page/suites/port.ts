@@ -15,7 +15,12 @@ export function portSuite(sheet: () => BenchPage): void {
 
   async function open(sheets: BenchSheets): Promise<PortBench> {
     await sheet().open(bookOf(sheets));
-    return { port, select: (reference) => sheet().select(reference) };
+    return {
+      port,
+      select: (reference) => sheet().select(reference),
+      numberFormat: (reference) =>
+        sheet().page.evaluate((one) => window.flaskpace.numberFormat(one), reference),
+    };
   }
 
   /** An error is put in as a formula that ends in it: nothing but plain data crosses into the page. */
