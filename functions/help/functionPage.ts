@@ -4,20 +4,30 @@ import { signature, typedName, type CellFunction } from '../define';
 import { argumentFacts, argumentHeadings } from '../documented';
 import { equationSection } from './equations';
 import { exampleSection } from './exampleSheet';
+import { figure } from './figure';
 import { escaped, page, table } from './html';
+import type { Picture } from './pictures/picture';
 import { refusalSection } from './refusals';
 
-export const functionPage = (f: CellFunction): string =>
-  page(
-    `${typedName(f)} – Flaskpace`,
-    article(f, (name) => `${name}.html`),
-  );
+export function functionPage(f: CellFunction, pictures: readonly Picture[]): string {
+  const body = article(f, {
+    linkTo: (name) => `${name}.html`,
+    level: 1,
+    pictures: pictures.filter(({ functions }) => functions.includes(f.name)),
+  });
+  return page(`${typedName(f)} – Flaskpace`, body);
+}
 
-/** Where a function's part of a page, or its page, is found. */
-type LinkTo = (name: string) => string;
+interface Surroundings {
+  /** Where a function's part of a page, or its page, is found. */
+  readonly linkTo: (name: string) => string;
+  /** Of its heading. */
+  readonly level: number;
+  readonly pictures: readonly Picture[];
+}
 
-/** All that is said of a function. @param level of its heading, 2 where several stand on one page */
-export function article(f: CellFunction, linkTo: LinkTo, level = 1): string {
+/** All that is said of a function. */
+export function article(f: CellFunction, { linkTo, level, pictures }: Surroundings): string {
   const [first, second] = [`h${level}`, `h${level + 1}`];
   const heading = (text: string): string => `<${second}>${text}</${second}>`;
   const parts = [
@@ -34,6 +44,7 @@ export function article(f: CellFunction, linkTo: LinkTo, level = 1): string {
     `<p>${escaped(f.method)}</p>`,
     heading('How sure it is'),
     `<p>${escaped(f.uncertainty)}</p>`,
+    ...pictures.map((picture) => figure(picture, level + 1)),
     heading('Example'),
     exampleSection(f),
     heading('When it refuses'),
@@ -71,7 +82,7 @@ function answerInWords({ result, parameters }: CellFunction): string {
   return `${shapes[result.shape]}; ${unit}${detail}.`;
 }
 
-function neighbours({ seeAlso }: CellFunction, linkTo: LinkTo): string {
+function neighbours({ seeAlso }: CellFunction, linkTo: Surroundings['linkTo']): string {
   const items = seeAlso.map((name) => {
     const f = functionNamed(name)!;
     return `<li><a href="${linkTo(name.toLowerCase())}">${typedName(f)}</a> ${escaped(f.summary)}</li>`;

@@ -7,6 +7,7 @@ export const escaped = (text: string): string => text.replace(/[&<>"]/g, (sign) 
 /** On every page, in this order. */
 const ways = [
   ['index.html', 'Which function?'],
+  ['pictures.html', 'Pictures'],
   ['errors.html', 'Errors'],
   ['everything.html', 'All on one page'],
 ] as const;

@@ -49,6 +49,29 @@ math[display='block'] { width: max-content; margin: 0.5rem 0; }
 dl.where { display: grid; grid-template-columns: max-content 1fr; gap: 0.1rem 0.9rem; margin: 0.5rem 0; }
 dl.where dt, dl.where dd { margin: 0; }
 dl.where math { font-size: 1.05em; }
+figure { margin: 0.75rem 0 1.5rem; }
+.panels { display: grid; grid-template-columns: repeat(auto-fit, minmax(min(100%, 19rem), 1fr)); gap: 0.75rem 1.25rem; }
+.panel { max-width: 32rem; display: flex; flex-direction: column; justify-content: space-between; }
+.panel .heading { margin: 0 0 0.35rem; font-size: 0.95em; line-height: 1.35; }
+figcaption { margin-top: 0.5rem; color: var(--quiet); }
+.plot { display: block; width: 100%; height: auto; fill: none; overflow: visible; }
+.plot text { fill: var(--quiet); font: 11px system-ui, 'Segoe UI', sans-serif; }
+.plot text.name, .plot text.note { fill: var(--ink); font-size: 12px; }
+.plot text.note { paint-order: stroke; stroke: var(--paper); stroke-width: 3px; }
+.plot .grid { stroke: var(--rule); }
+.plot :is(.axis, .tick) { stroke: var(--edge); }
+.plot :is(.readings, .touch) { stroke: var(--reading); stroke-linecap: round; stroke-width: 5px; }
+.plot .later { stroke: var(--edge); stroke-width: 3.5px; }
+.plot .fourth { stroke: var(--ink); }
+.plot .window { stroke: var(--press); stroke-width: 7px; }
+.plot .touch { stroke: var(--rate); stroke-width: 7.5px; }
+.plot .curve { stroke: var(--press); stroke-width: 1.5px; }
+.plot .rate-line { stroke: var(--rate); stroke-width: 2px; }
+.plot .beyond { stroke: var(--reading); stroke-width: 1.5px; stroke-dasharray: 4 3; }
+.plot .bar { stroke: var(--rate); stroke-width: 1.5px; }
+.plot .band { fill: var(--press); fill-opacity: 0.14; }
+.plot .drop { stroke: var(--edge); stroke-dasharray: 2 3; }
+.plot .stem { stroke: var(--reading); stroke-width: 1.5px; }
 input { font: inherit; padding: 0.45rem 0.6rem; width: 100%; color: inherit; background: var(--card); border: 1px solid var(--edge); border-radius: 4px; }
 .found { list-style: none; padding: 0; }
 .found li, .functions li { margin: 0.35rem 0; }
