@@ -2,6 +2,7 @@
 import type { BuiltIn } from './builtIn/said';
 import type { CellResult } from './cell';
 import type { Parameter } from './parameters';
+import type { WatchedFits } from './watchedFit';
 
 export type Parameters = Readonly<Record<string, Parameter>>;
 
@@ -63,11 +64,14 @@ export interface Definition<P extends Parameters> {
   readonly run: (values: Values<P>) => CellResult;
   /** The same in built-in spreadsheet functions, for a copy that needs no add-in; left out where there is none. */
   readonly builtIn?: BuiltIn;
+  /** What it fits, for the same copy: the numbers stay as they were, and a formula tells whether they still fit. */
+  readonly fits?: WatchedFits<Values<P>>;
 }
 
 /** A definition whose parameter types have been checked and can be forgotten. */
-export type CellFunction = Omit<Definition<Parameters>, 'run'> & {
+export type CellFunction = Omit<Definition<Parameters>, 'run' | 'fits'> & {
   readonly run: (values: Readonly<Record<string, unknown>>) => CellResult;
+  readonly fits?: WatchedFits<Readonly<Record<string, unknown>>>;
 };
 
 export const namespace = 'PACE';

@@ -4,12 +4,16 @@ export interface EstimateText {
   readonly value: string;
   readonly uncertainty: string;
   readonly degreesOfFreedom: string;
+  /** Of the limits; left out where degrees of freedom are whole. */
+  readonly studentFactor?: string;
 }
 
 /** Its five cells; without degrees of freedom there is no uncertainty. */
-export function standardRowTexts({ value, uncertainty, degreesOfFreedom }: EstimateText): string[] {
+export function standardRowTexts(estimate: EstimateText): string[] {
+  const { value, uncertainty, degreesOfFreedom } = estimate;
+  const { studentFactor = `TINV(0.05,${degreesOfFreedom})` } = estimate;
   const known = (text: string): string => `IF(${degreesOfFreedom}>0,${text},NA())`;
-  const reach = `TINV(0.05,${degreesOfFreedom})*${uncertainty}`;
+  const reach = `${studentFactor}*${uncertainty}`;
   return [
     value,
     known(uncertainty),
@@ -17,4 +21,10 @@ export function standardRowTexts({ value, uncertainty, degreesOfFreedom }: Estim
     known(`${value}+${reach}`),
     degreesOfFreedom,
   ];
+}
+
+/** Student's factor for 95 % limits: TINV, for which degrees of freedom must be whole, by the beta distribution. */
+export function studentFactorText(degreesOfFreedom: string): string {
+  const share = `BETAINV(0.95,0.5,${degreesOfFreedom}/2)`;
+  return `SQRT(${degreesOfFreedom}*${share}/(1-${share}))`;
 }

@@ -1,12 +1,15 @@
 /** What a call was given, in words of a formula: numbers, quantities, flags and readings, with what must hold of each. */
 import { convertQuantity, convertUnit, parseQuantity } from '../../src/units';
-import type { CellValue } from '../cell';
+import { areaName } from '../address';
+import { CellError, type CellValue } from '../cell';
 import type { Parameters } from '../define';
-import { isLeftOut, requireWithin, type Bounds, type Parameter } from '../parameters';
+import { isLeftOut, requireWithin, type Parameter } from '../parameters';
 import { sure, type Phrase } from './phrase';
 import { Readings } from './readings';
-import { NotSaid, type Argument, type Arguments } from './said';
+import { NotSaid, type Argument, type Arguments, type OfTheDay } from './said';
+import { converted, numberBefore, tidy, within } from './quantities';
 import { numberText, quoted } from './text';
+import type { Workings } from './workings';
 
 /** A quantity for each reading; the same for all where `isOne`. */
 export interface Quantities {
@@ -19,16 +22,72 @@ export class Given {
   constructor(
     private readonly parameters: Parameters,
     private readonly given: Arguments,
+    private readonly sheet?: Workings,
   ) {}
+
+  /** @throws NotSaid where the copy has no such sheet */
+  get workings(): Workings {
+    if (!this.sheet) throw new NotSaid('there is no sheet for its workings');
+    return this.sheet;
+  }
+
+  /** The same call, as a formula on the sheet "Workings" has to name its arguments. */
+  fromWorkings(): Given {
+    const { sheet } = this.workings;
+    const named = this.names.map((name) => {
+      const argument = this.laidOut(name);
+      if (!argument?.area) return [name, argument];
+      const area = { sheet, ...argument.area };
+      return [name, { ...argument, area, text: areaName(area) }];
+    });
+    return new Given(this.parameters, Object.fromEntries(named) as Arguments, this.sheet);
+  }
+
+  /** A number as the sheet "Workings" names it; what must hold of it is said where the formula stands. */
+  numberFromWorkings(name: string): string {
+    if (!this.argument(name)?.cells) throw new NotSaid(`${name} is worked out within the formula`);
+    return this.fromWorkings().number(name).text;
+  }
+
+  /** What stays as it was, and from which arguments it was found. */
+  ofTheDay(what: string, ...names: readonly string[]): OfTheDay {
+    return { what, from: names.flatMap((name) => this.given[name]?.area ?? []) };
+  }
+
+  /** What the function itself reads there on the day of the copy. @throws NotSaid where that is not known */
+  today<T>(name: string): T {
+    const argument = this.argument(name);
+    if (argument && !argument.cells) throw new NotSaid(`${name} is worked out within the formula`);
+    if (argument?.cells?.flat().some((cell) => cell instanceof CellError))
+      throw new NotSaid(`${name} holds an error`);
+    return this.parameters[name].read(argument?.cells, name) as T;
+  }
+
+  /** Of all parameters. */
+  get names(): string[] {
+    return Object.keys(this.parameters);
+  }
 
   /** Nothing where the argument was left out. A cell that is blank today may be filled tomorrow. */
   argument(name: string): Argument | undefined {
-    const argument = this.given[name];
+    const argument = this.laidOut(name);
     if (!argument) return undefined;
     if (!argument.cells || !isLeftOut(argument.cells)) return argument;
     if (argument.area && this.parameters[name].optional)
       throw new NotSaid(`${name} is a blank cell, which a formula would read as 0`);
     return argument.area ? argument : undefined;
+  }
+
+  /** Columns that are written out in the formula stand on the sheet "Workings": not all programs work with such arrays. */
+  private laidOut(name: string): Argument | undefined {
+    const argument = this.given[name];
+    const { cells, area, text } = argument ?? {};
+    if (!cells || area || !this.sheet || cells.flat().length < 2) return argument;
+    if (!['column', 'quantities', 'uncertainties'].includes(this.parameters[name].kind)) return argument;
+    const own = this.sheet
+      .table(`Written in a formula: ${text}`, () => cells)
+      .area(cells.length, cells[0].length);
+    return { text: areaName(own), area: own, cells };
   }
 
   has(name: string): boolean {
@@ -194,50 +253,4 @@ export class Given {
     if (cells.length !== 1 || cells[0].length !== 1) throw new NotSaid(`${name} is more than one cell`);
     return cells[0][0];
   }
-}
-
-/** The conditions of a bound, for a text that is not known to keep it. */
-function within(text: string, { above, atLeast, below, atMost, whole }: Bounds): string[] {
-  const holds: string[] = [];
-  if (above !== undefined) holds.push(`${text}>${numberText(above)}`);
-  if (atLeast !== undefined) holds.push(`${text}>=${numberText(atLeast)}`);
-  if (below !== undefined) holds.push(`${text}<${numberText(below)}`);
-  if (atMost !== undefined) holds.push(`${text}<=${numberText(atMost)}`);
-  if (whole) holds.push(`${text}=INT(${text})`);
-  return holds;
-}
-
-/** Units differ by a factor, temperatures by a step as well. */
-function converted(text: string, from: string, to: string): string {
-  if (from === to) return text;
-  const step = convertUnit(0, from, to, '');
-  const factor = tidy(convertUnit(1, from, to, '') - step, step === 0 ? 15 : 13);
-  const scaled =
-    factor === 1
-      ? text
-      : factor < 1 && isWhole(1 / factor)
-        ? `${text}/${tidy(1 / factor)}`
-        : `${text}*${numberText(factor)}`;
-  return step === 0 ? `(${scaled})` : `(${scaled}+${numberText(step)})`;
-}
-
-/** Conversions leave a last digit that is not meant: 9.999999999999999E-5. */
-const tidy = (value: number, digits = 15): number => Number(value.toPrecision(digits));
-const isWhole = (value: number): boolean => Number.isInteger(tidy(value));
-
-/**
- * `21.4 degC` in a cell: the number before the unit, which must stay the unit it is. Figures without their
- * point are read, then divided: what a point means differs from country to country, and the function that
- * asks for it is not the same in all programs.
- */
-function numberBefore(text: string, cell: string, name: string): [string, string[], string] {
-  const [, number, unit] = /^([+-]?\d*\.?\d+)(\s*[^\d\s.].*)$/.exec(cell) ?? [];
-  if (number === undefined || unit.includes('.'))
-    throw new NotSaid(`${name} is text that no formula can read`);
-  const length = [...unit].length;
-  return [
-    `VALUE(SUBSTITUTE(LEFT(${text},LEN(${text})-${length}),".",""))/10^MAX(0,LEN(${text})-${length}-FIND(".",${text}&"."))`,
-    [`EXACT(RIGHT(${text},${length}),${quoted(unit)})`],
-    unit.trim(),
-  ];
 }

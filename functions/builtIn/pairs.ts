@@ -43,6 +43,12 @@ export class Pairs {
     return [`SUM(ISERROR(${this.x})+ISERROR(${this.y}))=0`];
   }
 
+  /** 1, 2, 3 … beside the pairs, where they stand in cells. */
+  get places(): string {
+    const first = this.x.replace(/:.*/, '');
+    return this.columns > 1 ? `COLUMN(${this.x})-COLUMN(${first})+1` : `ROW(${this.x})-ROW(${first})+1`;
+  }
+
   /** Of each pair what the text says, and nothing of one with a gap: for MIN, MAX, SMALL and the like. */
   some(text: string): string {
     return `IF(${this.both},${text},"")`;

@@ -81,6 +81,12 @@ export class Readings {
     return fixedArea({ ...area, column: area.column + n, columns: 1 });
   }
 
+  /** One row of a block. */
+  row(n: number): string {
+    const area = this.requireArea();
+    return fixedArea({ ...area, row: area.row + n, rows: 1 });
+  }
+
   /** All but the first or the last, for steps from one to the next. */
   without(end: 'first' | 'last'): string {
     const count = this.rows * this.columns;

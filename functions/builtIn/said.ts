@@ -25,6 +25,15 @@ export interface Said {
   readonly cell?: (row: number, column: number) => string;
   /** An expression for the whole result, for use inside another formula. */
   readonly whole?: () => string;
+  /** What in it stays as it was on the day of the copy, such as a fit; nothing where it all follows its inputs. */
+  readonly ofTheDay?: OfTheDay;
+}
+
+export interface OfTheDay {
+  /** In words. */
+  readonly what: string;
+  /** The cells it was found from. */
+  readonly from: readonly Area[];
 }
 
 /** The call cannot be said in built-in functions; the message says why, with no full stop. */

@@ -1,10 +1,17 @@
-import { fitRateLaw } from '../../src/order/fit';
 import { heightAt } from '../../src/order/curve';
+import { sayCurve, type AnyFits } from '../builtIn/law';
 import { convertColumn } from '../column';
 import { defineFunction } from '../define';
 import { number, optional, readings } from '../parameters';
-import { seriesOf, uncertaintiesOf } from '../run';
-import { lawEquations, lawMethod, lawParameters, runParameters } from './lawParameters';
+import { seriesOf } from '../run';
+import {
+  fitKnownLaw,
+  knownLawFits,
+  lawEquations,
+  lawMethod,
+  lawParameters,
+  runParameters,
+} from './lawParameters';
 
 export default defineFunction({
   name: 'CURVE',
@@ -35,10 +42,10 @@ export default defineFunction({
   ],
   seeAlso: ['COEFFICIENT', 'ORDERS'],
   reference: 'doi:10.1351/goldbook.O04322',
-  run({ times, values, order, attimes, endpoint, uncertainties }) {
-    const series = seriesOf(times, values);
-    const weights = uncertaintiesOf(series, values, uncertainties);
-    const fit = fitRateLaw(series, { order, endpoint, uncertainties: weights });
-    return convertColumn(attimes ?? times, (time) => heightAt(fit, series, time));
+  run({ attimes, ...given }) {
+    const [fit, series] = [fitKnownLaw(given), seriesOf(given.times, given.values)];
+    return convertColumn(attimes ?? given.times, (time) => heightAt(fit, series, time));
   },
+  fits: knownLawFits,
+  builtIn: (given) => sayCurve(knownLawFits as AnyFits, given),
 });

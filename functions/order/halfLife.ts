@@ -2,7 +2,14 @@ import { halfLifeEstimate } from '../../src/order/profile';
 import { defineFunction } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow } from '../results';
-import { fitKnownLaw, knownLawParameters, lawLines, lawMethod, lawQuantities } from './lawParameters';
+import {
+  fitKnownLaw,
+  knownLawFits,
+  knownLawParameters,
+  lawLines,
+  lawMethod,
+  lawQuantities,
+} from './lawParameters';
 
 export default defineFunction({
   name: 'HALFLIFE',
@@ -37,4 +44,5 @@ export default defineFunction({
     const fit = fitKnownLaw(given);
     return given.detail ? [standardRow(halfLifeEstimate(fit))] : fit.halfLife;
   },
+  fits: knownLawFits,
 });

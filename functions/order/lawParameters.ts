@@ -4,6 +4,7 @@ import { detail, endpoint, uncertainties } from '../commonParameters';
 import type { Values } from '../define';
 import { column, number } from '../parameters';
 import { seriesOf, uncertaintiesOf } from '../run';
+import { watched, type WatchedFits } from '../watchedFit';
 
 export const runParameters = {
   times: column({ help: 'times of the run', unit: 'time' }),
@@ -20,7 +21,7 @@ export const knownLawParameters = {
   detail: detail(),
 };
 
-export function fitKnownLaw(given: Values<typeof knownLawParameters>): RateLawFit {
+export function fitKnownLaw(given: Omit<Values<typeof knownLawParameters>, 'detail'>): RateLawFit {
   const { times, values, order, endpoint } = given;
   const series = seriesOf(times, values);
   return fitRateLaw(series, {
@@ -29,6 +30,13 @@ export function fitKnownLaw(given: Values<typeof knownLawParameters>): RateLawFi
     uncertainties: uncertaintiesOf(series, values, given.uncertainties),
   });
 }
+
+/** What COEFFICIENT, HALFLIFE and CURVE fit alike. */
+export const knownLawFits: WatchedFits<Omit<Values<typeof knownLawParameters>, 'detail'>> = {
+  what: 'Rate law of known order',
+  readings: 'values',
+  of: (given) => [watched(fitKnownLaw(given), seriesOf(given.times, given.values))],
+};
 
 /** Of the method, which all state. */
 export const lawMethod =

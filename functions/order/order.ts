@@ -1,11 +1,15 @@
-import { fitRateLaw } from '../../src/order/fit';
+import { fitRateLaw, type RateLawFit } from '../../src/order/fit';
 import { orderEstimate } from '../../src/order/profile';
+import type { Series } from '../../src/series/series';
 import { detail } from '../commonParameters';
-import { defineFunction } from '../define';
+import { defineFunction, type Values } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow } from '../results';
 import { seriesOf, uncertaintiesOf } from '../run';
+import { watched } from '../watchedFit';
 import { lawEquations, lawMethod, lawParameters, runParameters } from './lawParameters';
+
+const parameters = { ...runParameters, ...lawParameters };
 
 export default defineFunction({
   name: 'ORDER',
@@ -14,7 +18,7 @@ export default defineFunction({
   equations: lawEquations,
   method: `${lawMethod} The order is fitted with it. Below two half lives its limits are wide, and rightly so.`,
   uncertainty: uncertaintyOf.profile,
-  parameters: { ...runParameters, ...lawParameters, detail: detail() },
+  parameters: { ...parameters, detail: detail() },
   result: { unit: '1', shape: 'one value' },
   // 1/c grows evenly with time: order 2
   example: {
@@ -38,13 +42,25 @@ export default defineFunction({
   seeAlso: ['ORDERS', 'HALVINGS', 'EXPONENTS'],
   reference: 'doi:10.1351/goldbook.O04322; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
   isLong: { fromCells: 3000 },
-  run({ times, values, endpoint, uncertainties, detail }) {
-    const series = seriesOf(times, values);
-    const fit = fitRateLaw(series, {
-      order: 'free',
-      endpoint,
-      uncertainties: uncertaintiesOf(series, values, uncertainties),
-    });
+  run({ detail, ...given }) {
+    const { fit } = fitFreeOrder(given);
     return detail ? [standardRow(orderEstimate(fit))] : fit.order;
   },
+  fits: {
+    what: 'Rate law of free order',
+    readings: 'values',
+    of(given) {
+      const { fit, series } = fitFreeOrder(given);
+      return [watched(fit, series)];
+    },
+  },
 });
+
+function fitFreeOrder({ times, values, endpoint, uncertainties }: Values<typeof parameters>): {
+  readonly fit: RateLawFit;
+  readonly series: Series;
+} {
+  const series = seriesOf(times, values);
+  const weights = uncertaintiesOf(series, values, uncertainties);
+  return { fit: fitRateLaw(series, { order: 'free', endpoint, uncertainties: weights }), series };
+}

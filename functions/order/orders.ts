@@ -1,8 +1,10 @@
-import { compareOrders, type OrderRow } from '../../src/order/orders';
+import { compareOrders, type OrderRow, type OrderTable } from '../../src/order/orders';
+import type { Series } from '../../src/series/series';
 import { orNotAvailable } from '../results';
 import type { CellValue } from '../cell';
-import { defineFunction } from '../define';
+import { defineFunction, type Values } from '../define';
 import { seriesOf, uncertaintiesOf } from '../run';
+import { watched } from '../watchedFit';
 import { lawLines, lawMethod, lawParameters, lawQuantities, runParameters } from './lawParameters';
 
 const headings = [
@@ -16,6 +18,8 @@ const headings = [
   'runs test p',
   'verdict',
 ] as const;
+
+const parameters = { ...runParameters, ...lawParameters };
 
 export default defineFunction({
   name: 'ORDERS',
@@ -36,7 +40,7 @@ export default defineFunction({
   method: `${lawMethod} Orders 0, ½, 1, 1½, 2 and 3 and a free order are fitted. The weight w is each simple order's share of the evidence by AICc (Hurvich and Tsai 1989). The runs test asks whether the residuals run in a pattern. The verdict rests on the weights, the free order's limits and how many half lives were followed. R² of the straight-line plot is shown, and never decides.`,
   uncertainty:
     'k has its standard uncertainty from the curvature of the fit. The free order’s limits behind the verdict are those of the profile likelihood: PACE.ORDER with detail TRUE shows them.',
-  parameters: { ...runParameters, ...lawParameters },
+  parameters,
   result: { unit: 'as the headings say', shape: 'table' },
   // halved every 10
   example: {
@@ -52,13 +56,30 @@ export default defineFunction({
   seeAlso: ['ORDER', 'COEFFICIENT', 'HALVINGS', 'CHECK'],
   reference: 'doi:10.1351/goldbook.O04322; doi:10.1093/biomet/76.2.297',
   isLong: { fromCells: 1500 },
-  run({ times, values, endpoint, uncertainties }) {
-    const series = seriesOf(times, values);
-    const weights = uncertaintiesOf(series, values, uncertainties);
-    const { rows, free } = compareOrders(series, { endpoint, uncertainties: weights });
+  run(given) {
+    const { rows, free } = compared(given).table;
     return [[...headings], ...rows.map((row) => cells(row)), cells(free, 'only simple orders are weighed')];
   },
+  fits: {
+    what: 'Rate laws of simple orders and a free one',
+    readings: 'values',
+    of(given) {
+      const { table, series } = compared(given);
+      return [...table.rows, table.free].flatMap((row) =>
+        row.fit ? [watched(row.fit, series, row === table.free ? 'free order' : `order ${row.order}`)] : [],
+      );
+    },
+  },
 });
+
+function compared({ times, values, endpoint, uncertainties }: Values<typeof parameters>): {
+  readonly table: OrderTable;
+  readonly series: Series;
+} {
+  const series = seriesOf(times, values);
+  const weights = uncertaintiesOf(series, values, uncertainties);
+  return { table: compareOrders(series, { endpoint, uncertainties: weights }), series };
+}
 
 function cells(row: OrderRow, noWeight = 'too few readings to weigh the orders'): CellValue[] {
   const { fit, why } = row;

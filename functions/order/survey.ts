@@ -8,6 +8,7 @@ import { endpoint } from '../commonParameters';
 import { defineFunction } from '../define';
 import { block, column, number, optional } from '../parameters';
 import { orNotAvailable } from '../results';
+import { watched } from '../watchedFit';
 import { lawEquations, lawMethod } from './lawParameters';
 
 const headings = [
@@ -54,6 +55,17 @@ export default defineFunction({
     const runs = columnsBeside(block, times, { block: 'block', beside: 'times' });
     const surveyed = runs.map((run, i) => rowOf(times, run, i + 1, { order: order ?? 'free', endpoint }));
     return [[...headings], ...surveyed];
+  },
+  fits: {
+    what: 'Rate laws of several runs',
+    readings: 'block',
+    of: ({ times, block, order, endpoint }) =>
+      columnsBeside(block, times, { block: 'block', beside: 'times' }).flatMap((run, line) => {
+        if (run.numbers.every((value, i) => value === null || times.numbers[i] === null)) return [];
+        const series = pairReadings(times.numbers, run.numbers);
+        const { fit } = surveyRun(series, { order: order ?? 'free', endpoint });
+        return fit ? [{ ...watched(fit, series, `run ${line + 1}`), line }] : [];
+      }),
   },
 });
 

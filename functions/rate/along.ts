@@ -1,6 +1,6 @@
 import { ratesAlong } from '../../src/rate/tangent';
 import { detail } from '../commonParameters';
-import { sayAlong } from '../builtIn/rate';
+import { sayAlong } from '../builtIn/tangent';
 import { defineFunction } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { column } from '../parameters';

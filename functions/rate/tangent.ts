@@ -1,6 +1,6 @@
 import { tangentRate } from '../../src/rate/tangent';
 import { detail } from '../commonParameters';
-import { sayTangent } from '../builtIn/rate';
+import { sayTangent } from '../builtIn/tangent';
 import { defineFunction } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { column, number } from '../parameters';

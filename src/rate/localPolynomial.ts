@@ -125,6 +125,13 @@ export function fitLocalPolynomial(
 }
 
 /**
+ * A reading ahead is nearer than one behind when it is so by more than rounding: 0.3 and 0.1 are as far from 0.2.
+ *
+ * @example nearerBy // 0.999999999999
+ */
+export const nearerBy = 1 - 1e-12;
+
+/**
  * The window of the `count` points nearest to a time, ties to the earlier; times in ascending order.
  *
  * @param from where to begin looking, a first index that is not too far right (a column walks forward)
@@ -133,6 +140,6 @@ export function fitLocalPolynomial(
  */
 export function nearestWindow(times: Float64Array, count: number, at: number, from = 0): number {
   let first = from;
-  while (first + count < times.length && times[first + count] - at < at - times[first]) first++;
+  while (first + count < times.length && times[first + count] - at < nearerBy * (at - times[first])) first++;
   return first;
 }

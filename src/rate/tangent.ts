@@ -21,7 +21,7 @@ export interface TangentOptions {
   readonly stoichiometricNumber?: number;
 }
 
-interface Window {
+export interface TangentWindow {
   readonly points: number;
   readonly degree: number;
   readonly stoichiometricNumber: number;
@@ -29,7 +29,16 @@ interface Window {
   readonly scatter?: Scatter;
 }
 
-function settle(series: Series, { points, degree = 2, stoichiometricNumber }: TangentOptions): Window {
+/**
+ * The window that the tangents of a run rest on.
+ *
+ * @throws as {@link tangentRate}
+ * @example tangentWindow(pairReadings([0, 1, 2, 3], [9, 4, 1, 0]), { points: 3 }).degree // 2
+ */
+export function tangentWindow(
+  series: Series,
+  { points, degree = 2, stoichiometricNumber }: TangentOptions,
+): TangentWindow {
   if (!Number.isInteger(degree) || degree < 1 || degree > highestDegree) {
     throw new InvalidInput(`degree must be a whole number from 1 to ${highestDegree}: got ${shown(degree)}`);
   }
@@ -81,7 +90,7 @@ export function slopeAsRate(fit: LocalFit, stoichiometricNumber: number): Estima
 const own = emptyLocalFit();
 const finer = emptyLocalFit();
 
-function rateIn(series: Series, window: Window, first: number, time: number): Estimate {
+function rateIn(series: Series, window: TangentWindow, first: number, time: number): Estimate {
   const { times, values } = series;
   const { points, degree, stoichiometricNumber, scatter } = window;
   const rate = slopeAsRate(
@@ -136,7 +145,7 @@ function differentTimes(times: Float64Array, first: number, count: number): numb
  */
 export function tangentRate(series: Series, time: number, options: TangentOptions = {}): Estimate {
   requireFinite({ time });
-  const window = settle(series, options);
+  const window = tangentWindow(series, options);
   requireWithinRun(series.times, time);
   return rateIn(series, window, nearestWindow(series.times, window.points, time), time);
 }
@@ -149,7 +158,7 @@ export function tangentRate(series: Series, time: number, options: TangentOption
  * @example ratesAlong(pairReadings([0, 1, 2, 3], [9, 4, 1, 0]), { points: 3 })[3].value // 0
  */
 export function ratesAlong(series: Series, options: TangentOptions = {}): Estimate[] {
-  const window = settle(series, options);
+  const window = tangentWindow(series, options);
   const { times } = series;
   const rates: Estimate[] = new Array(times.length);
   for (let i = 0, first = 0; i < times.length; i++) {

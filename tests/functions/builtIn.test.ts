@@ -77,10 +77,16 @@ test.each<[string, string, Readonly<Record<string, Argument>>, RegExp]>([
     /start is not a number/,
   ],
   [
-    'a tangent whose window the data choose',
-    'TANGENT',
-    { times: range('A1:A3', 0, 1, 2), values: range('B1:B3', 3, 2, 1), time: literal('1', 1) },
-    /number of readings for a tangent is chosen from the data/,
+    'an average rate with its limits, where there is no room aside',
+    'BETWEEN',
+    {
+      times: range('A1:A3', 0, 1, 2),
+      values: range('B1:B3', 3, 2, 1),
+      from: literal('0', 0),
+      to: literal('1', 1),
+      detail: literal('TRUE', true),
+    },
+    /there is no sheet for its workings/,
   ],
   [
     'columns that lie differently',

@@ -10,7 +10,8 @@ const usage = `Writes a copy of IN.xlsx that needs no add-in, OUT.xlsx, for some
 
 Each call of a PACE function becomes built-in functions where these can say the same. The rest is frozen to
 its value, with a note beside it; a new sheet, "Method", tells what each formula was, how it is worked out,
-and whether the inputs of a frozen cell are still those it was frozen with. IN is never changed; OUT appears,
+and whether the inputs of a frozen cell are still those it was frozen with. What no single cell can work out
+stands on a new sheet "Workings". IN is never changed; OUT appears,
 or is replaced, only when it is complete. All else in the file stays as it was, byte for byte.
 
 Exit code  0  done
@@ -18,9 +19,14 @@ Exit code  0  done
            2  not done: the error output says why, and nothing was written
 `;
 
-/** One line a frozen formula: where, and why. */
+/** One line a formula that is frozen, in whole or in part: where, and why or what. */
 const frozenLines = (formulas: readonly HandedFormula[]): string[] =>
-  formulas.filter(({ said }) => !said).map((formula) => `  frozen  ${placeOf(formula)}  ${formula.why}`);
+  formulas.flatMap((formula) => {
+    if (!formula.said) return [`  frozen  ${placeOf(formula)}  ${formula.why}`];
+    return formula.ofTheDay === undefined
+      ? []
+      : [`  live    ${placeOf(formula)}  but as on this day: ${formula.ofTheDay.what}`];
+  });
 
 function summary(formulas: readonly HandedFormula[]): string {
   const live = formulas.filter(({ said }) => said).length;

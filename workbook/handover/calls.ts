@@ -41,6 +41,10 @@ export function callsIn(formula: string): Call[] {
   return callsAmong(tokensOf(formula));
 }
 
+/** These calls and those within them. */
+export const allCalls = (calls: readonly Call[]): Call[] =>
+  calls.flatMap((call) => [call, ...allCalls(call.given.flatMap((argument) => argument.calls))]);
+
 const opens = (token: Token): boolean => isOperator(token) && (token.value === '(' || token.value === '{');
 const closes = (token: Token): boolean => isOperator(token) && (token.value === ')' || token.value === '}');
 

@@ -4,6 +4,8 @@ import type { BookModel, CalculatedBook, CellModel, SheetModel } from '../engine
 import { calculate } from '../engine/univer/headless';
 import { alike } from './alike';
 import { frozen, type HandedFormula } from './handed';
+import type { NewSheet } from './sheetPart';
+import type { WorkingsSheet } from './workings';
 import type { World } from './world';
 
 /** Relative; what two ways of writing one sum differ by is a thousand times less. */
@@ -15,27 +17,41 @@ const aside = 8000;
 /** Formulas alike in all but their numbers, and cells of one long result: so many of them are enough. */
 const mostJudged = 60;
 
-/**
- * The same formulas; those that came to something else are frozen. Where a single one of those alike did,
- * each of them is judged.
- */
-export async function checked(formulas: readonly HandedFormula[], world: World): Promise<HandedFormula[]> {
+export interface Checked {
+  /** The same formulas; those that came to something else are frozen. */
+  readonly formulas: readonly HandedFormula[];
+  /** The sheet of their workings, worked out; nothing where they need none. */
+  readonly workings?: NewSheet;
+}
+
+/** Where a single one of formulas that are alike came to something else, each of them is judged. */
+export async function checked(
+  formulas: readonly HandedFormula[],
+  world: World,
+  workings: WorkingsSheet,
+): Promise<Checked> {
+  const book = settled(world);
+  const worked = workings.isEmpty ? undefined : await calculate(withSheet(book, workings.model()));
+  const whole = worked ? withSheet(book, workings.values(worked)) : book;
   const groups = alike(
     formulas.filter(({ said }) => said),
     world,
   );
   const first = groups.flatMap((group) => group.filter((_, place) => isChosen(place, group.length)));
   const isFirst = new Set(first);
-  const off = await judged(first, world);
+  const off = await judged(first, whole);
   const doubtful = groups.filter((group) => group.some((formula) => off.has(formula))).flat();
   const rest = await judged(
     doubtful.filter((formula) => !isFirst.has(formula)),
-    world,
+    whole,
   );
-  return formulas.map((formula) => {
-    const why = off.get(formula) ?? rest.get(formula);
-    return why === undefined ? formula : frozen(formula, why);
-  });
+  return {
+    formulas: formulas.map((formula) => {
+      const why = off.get(formula) ?? rest.get(formula);
+      return why === undefined ? formula : frozen(formula, why);
+    }),
+    ...(worked ? { workings: workings.sheet(worked) } : {}),
+  };
 }
 
 /** Spread over all, the first and the last among them. */
@@ -45,10 +61,10 @@ const isChosen = (place: number, all: number): boolean =>
 /** @returns of those that came to something else, to what */
 async function judged(
   formulas: readonly HandedFormula[],
-  world: World,
+  book: BookModel,
 ): Promise<ReadonlyMap<HandedFormula, string>> {
   if (formulas.length === 0) return new Map();
-  const calculated = await calculate(withFormulasAside(formulas, world));
+  const calculated = await calculate(withFormulasAside(formulas, book));
   return new Map(
     formulas.flatMap((formula) => {
       const off = firstOff(formula, calculated);
@@ -61,22 +77,35 @@ function isJudged(values: HandedFormula['values'], row: number, column: number):
   return isChosen(row * values[0].length + column, values.length * values[0].length);
 }
 
-/** Each formula is judged by itself: whatever it reads has the value it shows, be it typed or worked out. */
-function withFormulasAside(formulas: readonly HandedFormula[], world: World): BookModel {
+/** The book with every formula replaced by what it shows: each of ours is then judged by itself. */
+function settled(world: World): BookModel {
   const { book } = world;
   return {
     ...book,
     sheets: book.sheets.map((sheet) => ({
       ...sheet,
-      cells: [
-        ...sheet.cells.flatMap((cell) =>
-          cell.formula === undefined ? [cell] : resultOf(cell, sheet, world),
-        ),
-        ...formulas.filter((formula) => formula.sheet === sheet.name).flatMap(cellsAside),
-      ],
+      cells: sheet.cells.flatMap((cell) =>
+        cell.formula === undefined ? [cell] : resultOf(cell, sheet, world),
+      ),
     })),
   };
 }
+
+const withSheet = (book: BookModel, sheet: SheetModel): BookModel => ({
+  ...book,
+  sheets: [...book.sheets, sheet],
+});
+
+const withFormulasAside = (formulas: readonly HandedFormula[], book: BookModel): BookModel => ({
+  ...book,
+  sheets: book.sheets.map((sheet) => ({
+    ...sheet,
+    cells: [
+      ...sheet.cells,
+      ...formulas.filter((formula) => formula.sheet === sheet.name).flatMap(cellsAside),
+    ],
+  })),
+});
 
 function resultOf({ row, column }: CellModel, sheet: SheetModel, world: World): CellModel[] {
   const area = world.spillAt({ sheet: sheet.name, row, column });

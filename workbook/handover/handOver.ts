@@ -12,13 +12,14 @@ import { Package } from '../xlsx/zip';
 import { checked } from './check';
 import { handFormulas, type HandedFormula } from './handed';
 import { mergedCells } from './mergedCells';
-import { methodSheet, noteText, type Origin } from './methodSheet';
+import { isOfTheDay, methodSheet, noteText, type Origin } from './methodSheet';
 import { freezeNames, frozenNames, type FrozenName } from './names';
 import { addNotes } from './notes';
 import { rewriteSheet, type RewrittenCell } from './rewriteSheet';
 import { dropLinks, dropPane, ownLinks } from './ownReferences';
 import { respelled } from './respelled';
 import { addSheet } from './sheetPart';
+import { WorkingsSheet } from './workings';
 import { World } from './world';
 
 export interface HandedOver {
@@ -41,7 +42,13 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
   const links = ownLinks(pack, parts);
   patchPackage(pack, parts, book, calculated);
   const world = new World(book, calculated);
-  const formulas = await checked(handFormulas(world, calculated, mergedCells(pack, parts.sheets)), world);
+  const taken = new Set(parts.sheets.map(({ name }) => name.toLowerCase()));
+  const aside = new WorkingsSheet(freeName('Workings', taken));
+  const { formulas, workings } = await checked(
+    handFormulas(world, calculated, mergedCells(pack, parts.sheets), aside),
+    world,
+    aside,
+  );
   const names = await frozenNames(book);
   if (formulas.length + names.length === 0)
     return { bytes: pack.bytes(), formulas, names, errors: calculated.errors };
@@ -53,12 +60,12 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
     if (cells.length > 0)
       pack.write(sheet.path, encodeXml(rewriteSheet(readXml(pack, sheet.path), sheet.path, cells)));
     const notes = formulas
-      .filter((formula) => formula.sheet === sheet.name && !formula.said)
+      .filter((formula) => formula.sheet === sheet.name && isOfTheDay(formula))
       .map((formula) => ({ row: formula.row, column: formula.column, text: noteText(formula, origin) }));
     if (notes.length > 0) addNotes(pack, sheet, notes);
   }
-  const taken = new Set(parts.sheets.map(({ name }) => name.toLowerCase()));
-  addSheet(pack, parts, methodSheet(freeName(taken), { formulas, names }, world, origin));
+  addSheet(pack, parts, methodSheet(freeName('Method', taken), { formulas, names }, world, origin));
+  if (workings) addSheet(pack, parts, workings);
   freezeNames(pack, parts.workbook, names);
   dropCalcChain(pack, parts);
   dropLinks(pack, parts, links);
@@ -74,9 +81,9 @@ function cellsOf({ row, column, said, values }: HandedFormula): RewrittenCell[] 
   );
 }
 
-function freeName(taken: ReadonlySet<string>): string {
+function freeName(wanted: string, taken: ReadonlySet<string>): string {
   for (let n = 1; ; n++) {
-    const name = n === 1 ? 'Method' : `Method ${n}`;
+    const name = n === 1 ? wanted : `${wanted} ${n}`;
     if (!taken.has(name.toLowerCase())) return name;
   }
 }

@@ -1,13 +1,15 @@
 /** What becomes of each formula that calls our functions: live in built-in functions, or frozen to its value. */
 import type { Area } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
-import { NotSaid } from '../../functions/builtIn/said';
+import { NotSaid, type OfTheDay } from '../../functions/builtIn/said';
 import type { CellFunction } from '../../functions/define';
 import { isSpill, type CalculatedBook } from '../engine/engine';
 import { callsOurs } from '../xlsx/formulaText';
 import { isArrayFormula } from './arrayFormula';
-import { callsIn, type Call } from './calls';
-import { sayFormula } from './say';
+import { allCalls, callsIn } from './calls';
+import { sayFormula, type Scene } from './say';
+import { watchFits } from './fits';
+import type { WorkingsSheet } from './workings';
 import type { Position, World } from './world';
 
 export interface HandedFormula extends Position {
@@ -20,8 +22,12 @@ export interface HandedFormula extends Position {
   readonly values: readonly (readonly CellValue[])[];
   /** The formula of each cell in built-in functions, row by row; nothing where it is frozen. */
   readonly said?: readonly (readonly string[])[];
+  /** What in it stays as it was on the day of the copy, although it is live. */
+  readonly ofTheDay?: OfTheDay;
   /** Why it is frozen. */
   readonly why?: string;
+  /** Where the fits of a frozen formula stand, with whether they still fit. */
+  readonly fits?: readonly string[];
 }
 
 /** @param merged whether a cell is one of several that were merged, where no array formula may stand */
@@ -29,11 +35,12 @@ export function handFormulas(
   world: World,
   calculated: CalculatedBook,
   merged: (position: Position) => boolean,
+  workings: WorkingsSheet,
 ): HandedFormula[] {
   return world.book.sheets.flatMap(({ name: sheet, cells }) =>
     cells.flatMap(({ row, column, formula }) =>
       formula !== undefined && callsOurs(formula)
-        ? [handFormula(formula, { sheet, row, column }, world, calculated, merged)]
+        ? [handFormula(formula, { sheet, row, column }, { sheet, world, workings }, calculated, merged)]
         : [],
     ),
   );
@@ -42,11 +49,12 @@ export function handFormulas(
 function handFormula(
   original: string,
   position: Position,
-  world: World,
+  scene: Scene,
   calculated: CalculatedBook,
   merged: (position: Position) => boolean,
 ): HandedFormula {
   const { sheet, row, column } = position;
+  const { world, workings } = scene;
   const area = world.spillAt(position);
   const each = <T>(of: (r: number, c: number) => T): T[][] =>
     Array.from({ length: area.rows }, (_, r) => Array.from({ length: area.columns }, (__, c) => of(r, c)));
@@ -61,21 +69,24 @@ function handFormula(
     const outcome = calculated.formula(sheet, row, column);
     if (outcome?.value instanceof CellError && isSpill(outcome) && outcome.value.code === '#SPILL!')
       throw new NotSaid('its result had no room');
-    const formulaAt = sayFormula(original, position, world);
-    const said = each(formulaAt);
-    if (merged(position) && isArrayFormula(said[0][0])) throw new NotSaid('it stands in merged cells');
-    return { ...common, said };
+    return workings.attempt(() => {
+      const { at, ...kept } = sayFormula(original, position, scene);
+      const said = each(at);
+      if (merged(position) && isArrayFormula(said[0][0])) throw new NotSaid('it stands in merged cells');
+      return { ...common, said, ...kept };
+    });
   } catch (error) {
-    if (error instanceof NotSaid) return { ...common, why: error.message };
-    throw error;
+    if (!(error instanceof NotSaid)) throw error;
+    const fits = watchFits(original, position, scene);
+    return { ...common, why: error.message, ...(fits.length > 0 ? { fits } : {}) };
   }
 }
 
-const allCalls = (calls: readonly Call[]): Call[] =>
-  calls.flatMap((call) => [call, ...allCalls(call.given.flatMap((argument) => argument.calls))]);
-
 /** The same formula, frozen after all. */
-export const frozen = ({ said: _said, ...formula }: HandedFormula, why: string): HandedFormula => ({
+export const frozen = (
+  { said: _said, ofTheDay: _ofTheDay, ...formula }: HandedFormula,
+  why: string,
+): HandedFormula => ({
   ...formula,
   why,
 });

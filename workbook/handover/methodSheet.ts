@@ -50,7 +50,7 @@ export function methodSheet(
     headings('Method'),
     [`A copy that needs no add-in, made by Flaskpace ${version} on ${date}.`],
     [
-      'What calls of PACE functions could be said in built-in functions is live and follows its inputs. The rest is frozen to the value it had: the last column tells whether its inputs are still those of that day.',
+      'What calls of PACE functions could be said in built-in functions is live and follows its inputs. The rest is frozen to the value it had: the last column tells whether its inputs are still those of that day. What needs more than one cell stands on the sheet Workings.',
     ],
     [],
     headings('Sheet', 'Cells', 'Formula as it was', 'Now', 'Inputs then', 'Inputs now', 'State'),
@@ -84,27 +84,38 @@ export const unchanged = 'inputs as they were';
 export const changed = 'inputs have changed';
 
 function formulaRow(formula: HandedFormula, row: number, world: World): SheetCell[] {
-  const { sheet, original, said, why, area } = formula;
+  const { sheet, original, said, why, ofTheDay, fits, area } = formula;
   const known: SheetCell[] = [sheet, areaName(area), `=${original}`];
-  if (said) return [...known, 'live, in built-in functions'];
-  const frozenCells: SheetCell[] = [...known, `frozen: ${why}`];
-  const inputs = world.areasIn(world.spelledOut(original, formula), sheet);
-  if (inputs.length === 0) return [...frozenCells, null, null, 'no inputs but those in the formula'];
+  if (!isOfTheDay(formula)) return [...known, 'live, in built-in functions'];
+  const now = said
+    ? `live, in built-in functions, but as on the day of the copy: ${ofTheDay?.what}`
+    : `frozen: ${why}`;
+  const where = fits ? `; what was fitted stands from ${fits.join(' and ').replace(/\$/g, '')} on` : '';
+  return [...known, now + where, ...watch(formula, row, world)];
+}
+
+/** Whether the inputs are still those of the day: a sum over them then, the same now, and the words for it. */
+function watch(formula: HandedFormula, row: number, world: World): SheetCell[] {
+  const { sheet, original, ofTheDay } = formula;
+  const inputs = ofTheDay?.from ?? world.areasIn(world.spelledOut(original, formula), sheet);
+  if (inputs.length === 0) return [null, null, 'no inputs but those in the formula'];
   const print = fingerprintOf(inputs, sheet, world);
-  if (!print || print.formula.length > 8000) return [...frozenCells, null, null, unwatched];
+  if (!print || print.formula.length > 8000) return [null, null, unwatched];
   const [then, now] = [cellName(row - 1, 4), cellName(row - 1, 5)];
   const same = `IF(ISERROR(${now}),FALSE,ABS(${now}-${then})<${fingerprintTolerance}*MAX(1,ABS(${then})))`;
   return [
-    ...frozenCells,
     print.value,
     { formula: print.formula, value: print.value },
     { formula: `IF(${same},"${unchanged}","${changed}")`, value: unchanged },
   ];
 }
 
-/** The words beside a frozen cell. */
+/** Whether it stays, in whole or in part, as it was on the day of the copy: it is watched, and has a note. */
+export const isOfTheDay = ({ said, ofTheDay }: HandedFormula): boolean => !said || ofTheDay !== undefined;
+
+/** The words beside a cell that is frozen, or live but for something. */
 export function noteText(
-  { original, why, functions, values }: HandedFormula,
+  { original, why, ofTheDay, functions, values }: HandedFormula,
   { version, date }: Origin,
 ): string {
   const first = values[0][0];
@@ -112,7 +123,9 @@ export function noteText(
     first instanceof CellError && first.message ? [`It showed ${first.code}: ${first.message}`] : [];
   const method = functions.map((f) => `${typedName(f)}: ${howInWords(f)}`);
   return [
-    `Frozen on ${date} by Flaskpace ${version}: ${why}.`,
+    ofTheDay === undefined
+      ? `Frozen on ${date} by Flaskpace ${version}: ${why}.`
+      : `Live, but as on ${date} (Flaskpace ${version}): ${ofTheDay.what}.`,
     `It was =${original}`,
     ...error,
     ...method,

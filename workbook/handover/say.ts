@@ -1,34 +1,52 @@
 /** A formula that calls our functions → the same in built-in ones, one formula for each cell of its result. */
 import { isFunction, isOperator } from '@borgar/fx/xlsx';
 import { Given } from '../../functions/builtIn/given';
-import { NotSaid, type Argument, type Arguments, type Said } from '../../functions/builtIn/said';
+import {
+  NotSaid,
+  type Argument,
+  type Arguments,
+  type OfTheDay,
+  type Said,
+} from '../../functions/builtIn/said';
 import { typedName } from '../../functions/define';
 import { InvalidInput } from '../../src/errors';
 import { applyEdits } from '../xlsx/edits';
 import { filedModernName } from '../xlsx/modernFunctions';
 import { argumentOf, whole } from './arguments';
 import { callsIn, tokensOf, type Call, type GivenArgument } from './calls';
+import type { WorkingsSheet } from './workings';
 import type { Position, World } from './world';
 
 /** A cell holds no longer formula (Excel specifications and limits). */
 const longest = 8192;
 
-/** @returns the formula of each cell, counted from the first. @throws NotSaid */
-export function sayFormula(
-  formula: string,
-  position: Position,
-  world: World,
-): (row: number, column: number) => string {
-  const text = world.spelledOut(formula, position);
+/** Where a formula stands, and what it may ask for. */
+export interface Scene {
+  readonly sheet: string;
+  readonly world: World;
+  readonly workings: WorkingsSheet;
+}
+
+export interface SaidFormula {
+  /** Of each cell, counted from the first. @throws NotSaid */
+  readonly at: (row: number, column: number) => string;
+  /** What in it stays as it was on the day of the copy. */
+  readonly ofTheDay?: OfTheDay;
+}
+
+/** @throws NotSaid */
+export function sayFormula(formula: string, position: Position, scene: Scene): SaidFormula {
+  const text = scene.world.spelledOut(formula, position);
   const calls = callsIn(text);
   const [only] = calls;
   const isAlone =
     calls.length === 1 && text.slice(0, only.start).trim() === '' && text.slice(only.end).trim() === '';
-  const said = isAlone
-    ? sayCall(only, text, position.sheet, world)
-    : sayAround(calls, text, position.sheet, world);
-  const { rows, columns } = world.spillAt(position);
-  return (row, column) => checked(cellText(said, row, column, rows * columns === 1));
+  const said = isAlone ? sayCall(only, text, scene) : sayAround(calls, text, scene);
+  const { rows, columns } = scene.world.spillAt(position);
+  return {
+    at: (row, column) => checked(cellText(said, row, column, rows * columns === 1)),
+    ...(said.ofTheDay === undefined ? {} : { ofTheDay: said.ofTheDay }),
+  };
 }
 
 function cellText({ cell, whole: all }: Said, row: number, column: number, isSingle: boolean): string {
@@ -38,47 +56,76 @@ function cellText({ cell, whole: all }: Said, row: number, column: number, isSin
 }
 
 /** Calls within a larger formula. */
-function sayAround(calls: readonly Call[], text: string, sheet: string, world: World): Said {
+function sayAround(calls: readonly Call[], text: string, scene: Scene): Said {
   const tokens = tokensOf(text);
   if (tokens.some((token) => isFunction(token) && /^(?:LET|LAMBDA)$/i.test(token.value)))
     throw new NotSaid('it stands within LET or LAMBDA');
   if (tokens.some((token) => isOperator(token) && token.value === '@'))
     throw new NotSaid('it stands beside an @');
-  const expression = applyEdits(
-    text,
-    calls.map((call) => ({
-      start: call.start,
-      end: call.end,
-      text: whole(wholeOf(sayCall(call, text, sheet, world), call)),
-    })),
-  );
-  return { whole: () => expression };
+  const { said: expression, ofTheDay } = withCallsSaid(text, 0, text, calls, scene);
+  return { whole: () => expression, ...ofTheDay };
 }
 
-function sayCall({ f, given }: Call, text: string, sheet: string, world: World): Said {
+/** A stretch of a formula with the calls in it said, and what stays as it was in any of them. */
+function withCallsSaid(
+  stretch: string,
+  start: number,
+  text: string,
+  calls: readonly Call[],
+  scene: Scene,
+): { readonly said: string; readonly ofTheDay: Pick<Said, 'ofTheDay'> } {
+  const saids = calls.map((call) => sayCall(call, text, scene));
+  const edits = calls.map((call, n) => ({
+    start: call.start - start,
+    end: call.end - start,
+    text: whole(wholeOf(saids[n], call)),
+  }));
+  return { said: applyEdits(stretch, edits), ofTheDay: together(saids) };
+}
+
+function together(saids: readonly Said[]): Pick<Said, 'ofTheDay'> {
+  const all = saids.flatMap(({ ofTheDay }) => ofTheDay ?? []);
+  if (all.length === 0) return {};
+  const what = [...new Set(all.map((one) => one.what))].join('; ');
+  return { ofTheDay: { what, from: all.flatMap(({ from }) => from) } };
+}
+
+function sayCall(call: Call, text: string, scene: Scene): Said {
+  const { f } = call;
   if (!f.builtIn) throw new NotSaid(`${typedName(f)} has no counterpart in built-in functions`);
-  const names = Object.keys(f.parameters);
-  const sayArgument = (argument: GivenArgument): Argument | undefined => {
-    if (argument.start === argument.end) return undefined;
-    const { calls, start } = argument;
-    const own = text.slice(start, argument.end);
-    if (calls.length === 0) return argumentOf(own, sheet, world);
-    const edits = calls.map((call) => ({
-      start: call.start - start,
-      end: call.end - start,
-      text: whole(wholeOf(sayCall(call, text, sheet, world), call)),
-    }));
-    return { text: whole(applyEdits(own, edits)) };
-  };
-  const args: Arguments = Object.fromEntries(
-    names.map((name, place) => [name, given[place] && sayArgument(given[place])]),
-  );
+  const inner: Said[] = [];
+  const given = givenTo(call, text, scene, (own, start, calls) => {
+    const { said, ofTheDay } = withCallsSaid(own, start, text, calls, scene);
+    inner.push(ofTheDay);
+    return { text: whole(said) };
+  });
   try {
-    return f.builtIn(new Given(f.parameters, args));
+    const said = f.builtIn(given);
+    return { ...said, ...together([said, ...inner]) };
   } catch (error) {
     if (error instanceof InvalidInput) throw new NotSaid(error.message);
     throw error;
   }
+}
+
+/** @param nested what becomes of an argument with calls of ours in it */
+export function givenTo(
+  { f, given }: Call,
+  text: string,
+  { sheet, world, workings }: Scene,
+  nested: (own: string, start: number, calls: readonly Call[]) => Argument,
+): Given {
+  const sayArgument = (argument: GivenArgument | undefined): Argument | undefined => {
+    if (!argument || argument.start === argument.end) return undefined;
+    const own = text.slice(argument.start, argument.end);
+    return argument.calls.length === 0
+      ? argumentOf(own, sheet, world)
+      : nested(own, argument.start, argument.calls);
+  };
+  const args: Arguments = Object.fromEntries(
+    Object.keys(f.parameters).map((name, place) => [name, sayArgument(given[place])]),
+  );
+  return new Given(f.parameters, args, workings.seenFrom(sheet));
 }
 
 function wholeOf(said: Said, { f }: Call): string {

@@ -71,6 +71,7 @@ test('nearestWindow: the nearest readings, a tie to the earlier, one-sided at th
   const times = Float64Array.of(0, 1, 2, 3, 4, 10);
   expect(nearestWindow(times, 2, 1.5)).toBe(1);
   expect(nearestWindow(times, 2, 2)).toBe(1); // 1 and 3 are as near
+  expect(nearestWindow(Float64Array.of(0.1, 0.2, 0.3), 2, 0.2)).toBe(0); // so are 0.1 and 0.3, whatever rounding says
   expect(nearestWindow(times, 3, 0)).toBe(0);
   expect(nearestWindow(times, 3, 10)).toBe(3);
   expect(nearestWindow(times, 3, 6.9)).toBe(3); // 4, 10 and 3 are 2.9, 3.1 and 3.9 away

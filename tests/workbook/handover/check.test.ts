@@ -3,6 +3,7 @@ import { functionNamed } from '../../../functions/catalogue';
 import { calculate } from '../../../workbook/engine/univer/headless';
 import { checked } from '../../../workbook/handover/check';
 import type { HandedFormula } from '../../../workbook/handover/handed';
+import { WorkingsSheet } from '../../../workbook/handover/workings';
 import { World } from '../../../workbook/handover/world';
 import { book, column } from '../engine/book';
 
@@ -27,8 +28,9 @@ async function frozenAmong(formulas: readonly HandedFormula[]): Promise<HandedFo
     readings.map((_, n) => `=PACE.EVENT(A${n + 1})`),
   );
   const model = book({ Run: { ...column('A1', readings), ...typed } });
-  const all = await checked(formulas, new World(model, await calculate(model)));
-  return all.filter(({ said }) => !said);
+  const world = new World(model, await calculate(model));
+  const all = await checked(formulas, world, new WorkingsSheet('Workings'));
+  return all.formulas.filter(({ said }) => !said);
 }
 
 test('all are right: all stay live', async () => {

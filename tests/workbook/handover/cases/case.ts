@@ -9,6 +9,8 @@ export interface Case {
   readonly changed: Typed;
   /** Left out where the inputs of a frozen formula can be watched. */
   readonly unwatched?: true;
+  /** The change is none of those that a flag is raised for. */
+  readonly flagStaysDown?: true;
   /** What PACE makes of that: an error, or numbers as before. */
   readonly then?: 'error';
 }

@@ -1,6 +1,7 @@
 /** All sheets to hand over. Invented readings throughout. */
 import type { Cases } from './case';
 import { course } from './course';
+import { fits } from './fits';
 import { formulas } from './formulas';
 import { gas } from './gas';
 import { linear } from './linear';
@@ -15,5 +16,6 @@ export const cases: Cases = {
   ...readings,
   ...rate,
   ...course,
+  ...fits,
   ...temperature,
 };

@@ -24,6 +24,20 @@ export const rate: Cases = {
     becomes: 'live',
     changed: { A5: 26, B4: 'lost' },
   },
+  'Average rate with its limits': {
+    typed: {
+      ...run,
+      D1: 30,
+      D2: '=PACE.BETWEEN(A2:A9,B2:B9,0,D1,,TRUE)',
+      D3: '=PACE.BETWEEN(A2:A9,B2:B9,95,110,-2,TRUE)',
+      ...column('A11', [20, 0, 10, 10, null, 30, 55, 40]),
+      ...column('B11', [5, 9, 7.1, 6.9, 4, 3.7, 2.6, 3.3]),
+      D11: '=PACE.BETWEEN(A11:A18,B11:B18,5,D1,,TRUE)',
+      D12: '=PACE.BETWEEN(A11:A12,B11:B12,5,15,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { B3: 15, B4: null, D1: 50, A15: 12 },
+  },
   'Average rate, beyond the run': {
     typed: { ...run, D1: 30, D2: '=PACE.BETWEEN(A2:A9,B2:B9,0,D1)' },
     becomes: 'live',
@@ -48,10 +62,51 @@ export const rate: Cases = {
     becomes: 'live',
     changed: { B4: 27, B6: null, D1: 70 },
   },
-  'Tangent, window chosen from the data': {
-    typed: { ...run, D2: '=PACE.TANGENT(A2:A9,B2:B9,60)' },
-    becomes: 'frozen',
-    changed: { A9: 250 },
+  'Tangent, window chosen from data': {
+    typed: {
+      ...run,
+      D1: 70,
+      D2: '=PACE.TANGENT(A2:A9,B2:B9,60)',
+      D3: '=PACE.TANGENT(A2:A9,B2:B9,D1,,,-2,TRUE)',
+      D4: '=PACE.TANGENT(A2:A9,B2:B9,0,,1,,TRUE)',
+      D6: '=PACE.ALONG(A2:A9,B2:B9)',
+      F6: '=PACE.ALONG(A2:A9,B2:B9,,,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { B4: 28.1, A9: 250, D1: 65 },
+  },
+  'Tangent, window chosen, gaps': {
+    typed: {
+      ...column('A1', [90, 10, 20, null, 20, 30, 40, 55, 60, 70, 80, 0]),
+      ...column('B1', [3.1, 9.2, 8.1, 7.7, 8.2, 7.1, 6.3, 5.4, 4.9, 4.2, 'lost', 10.1]),
+      D1: '=PACE.ALONG(A1:A12,B1:B12,,,,TRUE)',
+      J1: '=PACE.TANGENT(A1:A12,B1:B12,0.5,,,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { B6: 7.15, B11: 'gone' },
+  },
+  'Tangent, window chosen, late': {
+    typed: {
+      ...column('A1', [86400, 90000, 93600, 97200, 100800, 104400, 108000, 111600, 115200, 118800]),
+      ...column('B1', [0.0201, 0.0182, 0.0166, 0.0149, 0.0137, 0.0122, 0.0113, 0.0101, 0.0093, 0.0083]),
+      D1: '=PACE.ALONG(A1:A10,B1:B10,,,,TRUE)',
+      J1: '=PACE.TANGENT(A1:A10,B1:B10,100000,,3,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { B3: 0.01661 },
+  },
+  'Tangent, window chosen, a row of few': {
+    typed: {
+      ...Object.fromEntries(
+        ['A', 'B', 'C', 'D'].flatMap((name, n) => [
+          [`${name}1`, 0.1 * n],
+          [`${name}2`, [9, 7, 5.5, 4.6][n]],
+        ]),
+      ),
+      A4: '=PACE.ALONG(A1:D1,A2:D2,,,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { C2: 5.7 },
   },
   'Rates along a run': {
     typed: { ...run, D2: '=PACE.ALONG(A2:A9,B2:B9,5)', F2: '=PACE.ALONG(A2:A9,B2:B9,5,2,,TRUE)' },
