@@ -17,7 +17,10 @@ export async function recalculate(bytes: Uint8Array): Promise<Recalculated> {
   const calculated = await calculate(book);
   return {
     bytes: patchWorkbook(bytes, book, calculated),
-    formulas: book.sheets.flatMap(({ cells }) => cells).filter(({ formula }) => formula !== undefined).length,
+    formulas: book.sheets.reduce(
+      (sum, { cells }) => sum + cells.filter(({ formula }) => formula !== undefined).length,
+      0,
+    ),
     errors: calculated.errors,
   };
 }

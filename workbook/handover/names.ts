@@ -6,7 +6,7 @@ import { calculate } from '../engine/univer/headless';
 import { applyEdits, type Edit } from '../xlsx/edits';
 import { callsOurs, typedFormula } from '../xlsx/formulaText';
 import { readXml } from '../xlsx/parts';
-import { encodeXml, localName, plainText, scanXml, xmlText } from '../xlsx/xml';
+import { encodeXml, localName, plainText, scanXml, tagStart, xmlText } from '../xlsx/xml';
 import type { Package } from '../xlsx/zip';
 
 export interface FrozenName {
@@ -70,8 +70,7 @@ export function freezeNames(pack: Package, workbook: string, names: readonly Fro
     close({ name }, end) {
       if (localName(name) !== 'definedName' || open < 0) return;
       const frozen = names.find(({ refersTo }) => refersTo === typedFormula(plainText(text)));
-      if (frozen)
-        edits.push({ start: open, end: xml.lastIndexOf('<', end - 1), text: xmlText(frozen.value) });
+      if (frozen) edits.push({ start: open, end: tagStart(xml, end), text: xmlText(frozen.value) });
       open = -1;
     },
   });

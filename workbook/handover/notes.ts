@@ -6,7 +6,7 @@ import { cellName } from '../../functions/address';
 import { addDefaultType, addPart, freePath, relate } from '../xlsx/addPart';
 import { applyEdits, insertion, type Edit } from '../xlsx/edits';
 import { elementsIn, readXml, relationshipsOf, type SheetPart } from '../xlsx/parts';
-import { encodeXml, localName, scanXml, xmlText } from '../xlsx/xml';
+import { encodeXml, localName, scanXml, tagStart, xmlText } from '../xlsx/xml';
 import type { Package } from '../xlsx/zip';
 
 export interface Note {
@@ -78,11 +78,11 @@ function withDrawing(xml: string, path: string, id: string): string {
     open({ name }, end) {
       depth += 1;
       if (depth === 1) prefix = name.slice(0, name.length - localName(name).length);
-      if (depth === 2 && place < 0 && after.has(localName(name))) place = xml.lastIndexOf('<', end - 1);
+      if (depth === 2 && place < 0 && after.has(localName(name))) place = tagStart(xml, end);
     },
     close(_tag, end) {
       depth -= 1;
-      if (depth === 0 && place < 0) place = xml.lastIndexOf('<', end - 1);
+      if (depth === 0 && place < 0) place = tagStart(xml, end);
     },
   });
   const element = `<${prefix}legacyDrawing xmlns:r="${office}" r:id="${id}"/>`;
@@ -102,7 +102,7 @@ function extendComments(pack: Package, path: string, notes: readonly Note[]): vo
     open: () => undefined,
     close({ name }, end) {
       const prefix = name.slice(0, name.length - localName(name).length);
-      const start = xml.lastIndexOf('<', end - 1);
+      const start = tagStart(xml, end);
       if (localName(name) === 'authors')
         edits.push(insertion(start, `<${prefix}author>${author}</${prefix}author>`));
       if (localName(name) === 'commentList')

@@ -19,7 +19,8 @@ export interface RewrittenCell {
 }
 
 export function rewriteSheet(xml: string, part: string, cells: readonly RewrittenCell[]): string {
-  const sheet = scanSheet(xml, part);
+  const rows = new Set(cells.map(({ row }) => row));
+  const sheet = scanSheet(xml, part, ({ row }) => rows.has(row));
   const wanted = new Map(cells.map((cell) => [`${cell.row},${cell.column}`, cell]));
   const edits: Edit[] = [];
   for (const scanned of sheet.rows.flatMap((row) => row.cells)) {

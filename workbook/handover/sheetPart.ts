@@ -5,7 +5,7 @@ import { addPart, freePath, relate } from '../xlsx/addPart';
 import { cellXml } from '../xlsx/cellXml';
 import { applyEdits, insertion, type Edit } from '../xlsx/edits';
 import { elementsIn, readXml, type WorkbookParts } from '../xlsx/parts';
-import { encodeXml, localName, scanXml, xmlAttribute, xmlText } from '../xlsx/xml';
+import { encodeXml, localName, scanXml, tagStart, xmlAttribute, xmlText } from '../xlsx/xml';
 import type { Package } from '../xlsx/zip';
 import { formulaElement } from './rewriteSheet';
 
@@ -40,7 +40,7 @@ export function addSheet(pack: Package, parts: WorkbookParts, sheet: NewSheet): 
       if (localName(name) !== 'sheets') return;
       const prefix = name.slice(0, name.length - localName(name).length);
       const element = `<${prefix}sheet xmlns:r="${office}" name="${xmlAttribute(sheet.name)}" sheetId="${number}" r:id="${id}"/>`;
-      edits.push(insertion(xml.lastIndexOf('<', end - 1), element));
+      edits.push(insertion(tagStart(xml, end), element));
     },
   });
   pack.write(parts.workbook, encodeXml(applyEdits(xml, edits)));

@@ -88,9 +88,22 @@ export function filedValue(cell: ScannedCell, sharedStrings: readonly string[]):
       return text === '1' || text === 'true';
     case 'e':
       return new CellError((text ?? '#VALUE!') as ErrorCode);
+    case 'd':
+      return text === undefined ? null : serialDate(text);
     default:
-      return text === undefined || text === '' ? null : Number(text);
+      return text === undefined || text.trim() === '' ? null : finite(Number(text));
   }
+}
+
+/** What is no number, or none that a cell can hold, is as good as nothing. */
+const finite = (value: number): number | null => (Number.isFinite(value) ? value : null);
+
+const day = 86_400_000; // ms
+
+/** A date as the standard spells it, `2026-12-01T08:00:00`, in days as cells count them. */
+function serialDate(text: string): number | null {
+  const time = Date.parse(/T.*(?:Z|[+-]\d\d:\d\d)$|^[^T]*$/.test(text) ? text : `${text}Z`);
+  return finite((time - Date.UTC(1899, 11, 30)) / day);
 }
 
 /** Whether a cell that shows `filed` need not be touched to show `value`. */

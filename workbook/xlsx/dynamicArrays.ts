@@ -3,7 +3,7 @@
  * ([MS-XLSX] 2.4.58, XLDAPR). Without it Excel reads an array formula as one of fixed size.
  */
 import { applyEdits, insertion, type Edit } from './edits';
-import { elementsOf, encodeXml, scanXml, localName } from './xml';
+import { elementsOf, encodeXml, localName, scanXml, tagStart } from './xml';
 import { addPart, relate } from './addPart';
 import { readXml, type WorkbookParts } from './parts';
 import type { Package } from './zip';
@@ -61,7 +61,7 @@ function extended(xml: string, path: string, type: number): string {
   const ends = new Map<string, { inner: number; after: number }>();
   scanXml(xml, path, {
     open: () => undefined,
-    close: ({ name }, end) => ends.set(localName(name), { inner: xml.lastIndexOf('<', end - 1), after: end }),
+    close: ({ name }, end) => ends.set(localName(name), { inner: tagStart(xml, end), after: end }),
   });
   const types = ends.get('metadataTypes');
   const cells = ends.get('cellMetadata');

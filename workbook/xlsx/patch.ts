@@ -50,8 +50,8 @@ export function patchPackage(
 function formulasOf(book: BookModel, sheet: string): Map<string, string> {
   const cells = book.sheets.find(({ name }) => name === sheet)?.cells ?? [];
   return new Map(
-    cells.flatMap(({ row, column, formula }) =>
-      formula === undefined ? [] : [[`${row},${column}`, formula]],
-    ),
+    cells
+      .filter(({ formula }) => formula !== undefined)
+      .map(({ row, column, formula }) => [`${row},${column}`, formula!]),
   );
 }

@@ -27,7 +27,20 @@ export interface PatchedSheet {
 }
 
 export function patchSheet(xml: string, part: string, sheet: SheetToPatch): PatchedSheet {
-  return new SheetPatch(xml, scanSheet(xml, part), sheet).result();
+  return new SheetPatch(xml, scanSheet(xml, part, reached(sheet)), sheet).result();
+}
+
+/** Formulas, and cells behind one in rows that it has filled or fills now: no others can change. */
+function reached(sheet: SheetToPatch): (cell: ScannedCell) => boolean {
+  let lastRow = -1;
+  return (cell) => {
+    const formula = childOf(cell, 'f');
+    if (formula === undefined) return cell.row <= lastRow;
+    const before = areaBefore({ ...cell, formula });
+    const spill = sheet.formula(cell.row, cell.column)?.spill ?? { rows: 1 };
+    lastRow = Math.max(lastRow, cell.row + Math.max(before.rows, spill.rows) - 1);
+    return true;
+  };
 }
 
 const key = (row: number, column: number): string => `${row},${column}`;

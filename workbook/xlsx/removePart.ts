@@ -1,7 +1,7 @@
 /** Parts taken out of a package: with their content type, and all by which others found them. */
 import { applyEdits, type Edit } from './edits';
 import { readXml, relationshipsOf, relationshipsPath } from './parts';
-import { encodeXml, localName, scanXml } from './xml';
+import { encodeXml, localName, scanXml, tagStart } from './xml';
 import type { Package } from './zip';
 
 /** @param from the part whose relationship leads to it; `''` for the package itself */
@@ -27,8 +27,7 @@ export function dropElements(
   const open: { start: number; openEnd: number; attributes: Readonly<Record<string, string>> }[] = [];
   scanXml(xml, path, {
     open: ({ name, attributes }, end) => {
-      if (localName(name) === element)
-        open.push({ start: xml.lastIndexOf('<', end - 1), openEnd: end, attributes });
+      if (localName(name) === element) open.push({ start: tagStart(xml, end), openEnd: end, attributes });
     },
     close: ({ name }, end) => {
       if (localName(name) !== element) return;

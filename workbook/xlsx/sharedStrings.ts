@@ -1,14 +1,27 @@
 /** The table of texts that cells refer to by number; phonetic hints are no part of a text. */
-import { elementsIn } from './parts';
-import { plainText } from './xml';
+import { readXml } from './parts';
+import { localName, plainText, scanXml } from './xml';
 import type { Package } from './zip';
 
 export function readSharedStrings(pack: Package, path: string | undefined): string[] {
   if (path === undefined || !pack.has(path)) return [];
   const strings: string[] = [];
-  for (const { name, inside, text } of elementsIn(pack, path)) {
-    if (name === 'si') strings.push('');
-    else if (name === 't' && !inside.includes('rPh')) strings[strings.length - 1] += plainText(text);
-  }
+  let [isText, isHint] = [false, false];
+  let item = '';
+  scanXml(readXml(pack, path), path, {
+    open({ name }) {
+      isText = localName(name) === 't';
+      isHint ||= localName(name) === 'rPh';
+      if (localName(name) === 'si') item = '';
+    },
+    text(text) {
+      if (isText && !isHint) item += text;
+    },
+    close({ name }) {
+      isText = false;
+      if (localName(name) === 'rPh') isHint = false;
+      if (localName(name) === 'si') strings.push(plainText(item));
+    },
+  });
   return strings;
 }

@@ -1,6 +1,6 @@
 /** A sheet's XML with the place of every cell in it, so that one can be changed and the rest left alone. */
 import { columnIndex } from '../../functions/address';
-import { localName, scanXml } from './xml';
+import { localName, scanXml, tagStart } from './xml';
 
 /** Places in the text: `end` is the first character after. */
 export interface Span {
@@ -33,6 +33,7 @@ export interface ScannedCell extends Holder {
 
 export interface ScannedRow extends Holder {
   readonly row: number;
+  /** Those that were kept. */
   readonly cells: ScannedCell[];
   /** Some cell tells its column only by following another. */
   countsCells: boolean;
@@ -57,8 +58,15 @@ export interface ScannedSheet {
 export const childOf = (cell: ScannedCell, name: string): ScannedChild | undefined =>
   cell.children.find((child) => child.name === name);
 
-/** @throws NotAWorkbook where the XML is not well formed */
-export function scanSheet(xml: string, part: string): ScannedSheet {
+/**
+ * @param keeps asked once a cell is read to its end; what nobody will look at again need not be kept
+ * @throws NotAWorkbook where the XML is not well formed
+ */
+export function scanSheet(
+  xml: string,
+  part: string,
+  keeps: (cell: ScannedCell) => boolean = () => true,
+): ScannedSheet {
   const rows: ScannedRow[] = [];
   const widths: ScannedWidth[] = [];
   let prefix = '';
@@ -67,10 +75,13 @@ export function scanSheet(xml: string, part: string): ScannedSheet {
   let row: ScannedRow | undefined;
   let cell: ScannedCell | undefined;
   let child: ScannedChild | undefined;
+  let lastColumn = -1;
   let depth = 0;
+  /** How deep a phonetic hint stands in a text, of which it is no part. */
+  let hint = 0;
 
   const holder = (end: number, closed: boolean): Holder => {
-    const start = xml.lastIndexOf('<', end - 1); // no attribute can hold a <
+    const start = tagStart(xml, end);
     return { start, openEnd: end, contentEnd: closed ? start : -1, end: closed ? end : -1, closed };
   };
 
@@ -79,7 +90,7 @@ export function scanSheet(xml: string, part: string): ScannedSheet {
       depth += 1;
       const name = localName(full);
       if (name === 'dimension' && depth === 2) {
-        dimension = { start: xml.lastIndexOf('<', end - 1), end, ref: attributes.ref };
+        dimension = { start: tagStart(xml, end), end, ref: attributes.ref };
       } else if (name === 'col' && depth === 3 && attributes.width !== undefined) {
         const { min, max, width } = attributes;
         widths.push({ first: Number(min) - 1, last: Number(max) - 1, width: Number(width) });
@@ -92,24 +103,28 @@ export function scanSheet(xml: string, part: string): ScannedSheet {
         const number = attributes.r === undefined ? (rows.at(-1)?.row ?? -1) + 1 : Number(attributes.r) - 1;
         row = { ...holder(end, isSelfClosing), row: number, cells: [], countsCells: false };
         rows.push(row);
+        lastColumn = -1;
       } else if (name === 'c' && depth === 4 && row) {
         const named = attributes.r === undefined ? undefined : columnIndex(attributes.r.replace(/\d+$/, ''));
         row.countsCells ||= named === undefined;
-        const column = named ?? (row.cells.at(-1)?.column ?? -1) + 1;
-        cell = { ...holder(end, isSelfClosing), row: row.row, column, attributes, children: [] };
-        row.cells.push(cell);
+        lastColumn = named ?? lastColumn + 1;
+        cell = { ...holder(end, isSelfClosing), row: row.row, column: lastColumn, attributes, children: [] };
       } else if (depth === 5 && cell) {
-        child = { start: xml.lastIndexOf('<', end - 1), end: -1, name, attributes, text: '' };
+        child = { start: tagStart(xml, end), end: -1, name, attributes, text: '' };
         cell.children.push(child);
+      } else if (name === 'rPh') {
+        hint = depth;
       }
     },
     close(_tag, end) {
+      if (depth === hint) hint = 0;
       if (depth === 5 && child) {
         child.end = end;
         child = undefined;
       }
       if (depth === 4 && cell) {
         shut(cell, xml, end);
+        if (keeps(cell)) row?.cells.push(cell);
         cell = undefined;
       }
       if (depth === 3 && row) {
@@ -120,7 +135,7 @@ export function scanSheet(xml: string, part: string): ScannedSheet {
       depth -= 1;
     },
     text(text) {
-      if (child) child.text += text;
+      if (child && hint === 0) child.text += text;
     },
   });
   return { prefix, rows, data, dimension, widths };
@@ -128,6 +143,6 @@ export function scanSheet(xml: string, part: string): ScannedSheet {
 
 function shut(element: Holder, xml: string, end: number): void {
   if (element.closed) return;
-  element.contentEnd = xml.lastIndexOf('<', end - 1);
+  element.contentEnd = tagStart(xml, end);
   element.end = end;
 }

@@ -33,6 +33,22 @@ describe('values', () => {
     ]);
   });
 
+  test('a date in words is the number of its day; what is no number is nothing; hints are no part of a text', () => {
+    const book = read(
+      '<row r="1"><c r="A1" t="d"><v>2026-12-01T12:00:00</v></c><c r="B1" t="d"><v>1900-03-01</v></c><c r="C1"><v>none</v></c><c r="D1" t="e"><v>#GETTING_DATA</v></c><c r="E1" t="e"><v>#SPILL!</v></c><c r="F1" t="inlineStr"><is><t>said</t><rPh sb="0" eb="1"><t>hint</t></rPh></is></c></row>',
+    );
+    const values = ['A1', 'B1', 'C1', 'D1', 'E1', 'F1'].map((name) => cell(book, name)?.value);
+    // 1 March 1900 is day 61 in every program that counts the 29 February 1900 of old
+    expect(values).toEqual([
+      46357.5,
+      61,
+      undefined,
+      new CellError('#BUSY!'),
+      new CellError('#VALUE!'),
+      'said',
+    ]);
+  });
+
   test('what a formula spilled is left out, since nobody typed it', () => {
     const book = read(
       '<row r="1"><c r="A1" cm="1"><f t="array" ref="A1:A2">_xlfn.SEQUENCE(2)</f><v>1</v></c></row><row r="2"><c r="A2"><v>2</v></c></row><row r="3"><c r="A3"><v>2</v></c></row>',
@@ -100,6 +116,20 @@ describe('formulas', () => {
       '<row r="1"><c r="B1"><f t="shared" ref="B1:B3" si="0">_xldudf_PACE_EVENT(A1,$A$1)</f></c></row><row r="3"><c r="B3"><f t="shared" si="0"/></c></row>',
     );
     expect(cell(book, 'B3')?.formula).toBe('PACE.EVENT(A3,$A$1)');
+  });
+
+  test('a shared one moves what is relative in it, in every kind of reference, and nothing else', () => {
+    const book = read(
+      `<row r="2"><c r="D2"><f t="shared" ref="D2:E3" si="4">SUM(A2:B2,$A2,A$2,'My run'!A2,C:C)&amp;"A2"&amp;rate</f></c></row><row r="3"><c r="E3"><f t="shared" si="4"/></c></row>`,
+    );
+    expect(cell(book, 'E3')?.formula).toBe(`SUM(B3:C3,$A3,B$2,'My run'!B3,D:D)&"A2"&rate`);
+  });
+
+  test('a data table is no formula: its cells keep their values', () => {
+    const book = read(
+      '<row r="1"><c r="B1"><f t="dataTable" ref="B1:B2" dt2D="0" dtr="0" r1="A1"/><v>7</v></c></row>',
+    );
+    expect(cell(book, 'B1')).toEqual({ row: 0, column: 1, value: 7 });
   });
 
   test('names, but not those that Excel keeps for itself', () => {

@@ -12,8 +12,10 @@ interface SheetOutcome {
   /** Where a formula stands, or has spilled to. */
   readonly results: ReadonlyMap<string, { readonly row: number; readonly column: number }>;
   readonly formulas: ReadonlyMap<string, Calculated>;
-  /** Typed values, results and what results spilled. */
+  /** Results and what results spilled. */
   readonly shown: ReadonlyMap<string, CellValue>;
+  /** What was typed in a cell where no result shows. */
+  typed(row: number, column: number): CellValue;
 }
 
 type CalculatedError = CalculatedBook['errors'][number];
@@ -26,7 +28,10 @@ export function readOutcome(book: BookModel, settled: Settled): CalculatedBook {
   );
   return {
     formula: (sheet, row, column) => outcomes.get(sheet)?.formulas.get(key(row, column)),
-    shown: (sheet, row, column) => outcomes.get(sheet)?.shown.get(key(row, column)) ?? null,
+    shown(sheet, row, column) {
+      const outcome = outcomes.get(sheet);
+      return outcome?.shown.get(key(row, column)) ?? outcome?.typed(row, column) ?? null;
+    },
     errors: book.sheets.flatMap((sheet) => errorsIn(sheet, outcomes.get(sheet.name)!)),
   };
 }
@@ -39,9 +44,6 @@ function sheetOutcome(sheet: SheetModel, id: string, { result, circular }: Settl
   const shown = new Map<string, CellValue>();
   const places = new Map<string, { row: number; column: number }>();
 
-  for (const { row, column, value, formula } of sheet.cells) {
-    if (formula === undefined) shown.set(key(row, column), value);
-  }
   for (const { row, column } of sheet.cells.filter(hasFormula)) {
     const range = ranges?.[row]?.[column];
     const circle = circular.get(circleKey(id, row, column));
@@ -63,7 +65,24 @@ function sheetOutcome(sheet: SheetModel, id: string, { result, circular }: Settl
       }
     }
   }
-  return { results: places, formulas, shown };
+  return { results: places, formulas, shown, typed: typedIn(sheet) };
+}
+
+/** Most sheets of readings are never asked: their cells are put in order once one of them is. */
+function typedIn({ cells }: SheetModel): SheetOutcome['typed'] {
+  let rows: Map<number, Map<number, CellValue>> | undefined;
+  return (row, column) => {
+    if (!rows) {
+      rows = new Map();
+      for (const { row: r, column: c, value, formula } of cells) {
+        if (formula !== undefined) continue;
+        const line = rows.get(r);
+        if (line) line.set(c, value);
+        else rows.set(r, new Map([[c, value]]));
+      }
+    }
+    return rows.get(row)?.get(column) ?? null;
+  };
 }
 
 const hasFormula = (cell: CellModel): boolean => cell.formula !== undefined;

@@ -1,0 +1,115 @@
+/** What was typed into a sheet, read cell by cell: nothing of the XML around them is kept. */
+import { columnIndex, parseArea, type Area } from '../../functions/address';
+import { CellError, type CellValue } from '../../functions/cell';
+import type { CellModel, SheetModel } from '../engine/engine';
+import { filedValue } from './cellXml';
+import { callsOurs, typedFormula } from './formulaText';
+import { withIntersections } from './intersection';
+import { SharedFormulas } from './sharedFormulas';
+import { childOf, scanSheet, type ScannedCell, type ScannedChild, type ScannedWidth } from './sheetScan';
+import type { CellLook } from './styles';
+
+export interface SheetContext {
+  readonly sharedStrings: readonly string[];
+  readonly looks: readonly CellLook[];
+}
+
+/** @throws NotAWorkbook where the XML is not well formed */
+export function readSheet(
+  xml: string,
+  part: string,
+  context: SheetContext,
+): Pick<SheetModel, 'cells' | 'columnWidths'> {
+  const cells: CellModel[] = [];
+  const shared = new SharedFormulas();
+  const spills = new Spills();
+  const { widths } = scanSheet(xml, part, (scanned) => {
+    const own = childOf(scanned, 'f');
+    const formula = own === undefined ? '' : formulaOf(scanned, own, shared);
+    if (own?.attributes.t === 'array') spills.add(own.attributes.ref);
+    // nobody typed what another cell's formula spilled
+    if (formula !== '' || !spills.cover(scanned)) {
+      const cell = cellModel(scanned, formula, context);
+      if (cell) cells.push(cell);
+    }
+    return false;
+  });
+  const columnWidths = widthsByColumn(widths, cells);
+  return { cells, ...(Object.keys(columnWidths).length > 0 ? { columnWidths } : {}) };
+}
+
+/** A plain formula takes one cell of a range where it wants one value; ours are meant as they would be typed. */
+function formulaOf(cell: ScannedCell, own: ScannedChild, shared: SharedFormulas): string {
+  const filed = shared.textOf(cell, own);
+  if (filed === '') return '';
+  const typed = typedFormula(filed);
+  return own.attributes.t === 'array' || callsOurs(typed) ? typed : withIntersections(typed);
+}
+
+function cellModel(
+  scanned: ScannedCell,
+  formula: string,
+  { sharedStrings, looks }: SheetContext,
+): CellModel | undefined {
+  const { row, column, attributes } = scanned;
+  const { bold, wrap, numberFormat } = looks[Number(attributes.s ?? 0)] ?? {};
+  const value = valueOf(scanned, sharedStrings);
+  if (value === null && formula === '' && !bold && !wrap) return undefined;
+  return {
+    row,
+    column,
+    value,
+    ...(formula === '' ? {} : { formula }),
+    ...(numberFormat === undefined ? {} : { numberFormat }),
+    ...(bold ? { bold } : {}),
+    ...(wrap ? { wrap } : {}),
+  };
+}
+
+const readErrors: ReadonlySet<string> = new Set([
+  '#NULL!',
+  '#DIV/0!',
+  '#VALUE!',
+  '#REF!',
+  '#NAME?',
+  '#NUM!',
+  '#N/A',
+]);
+
+/** Errors that no file should hold are read as #VALUE!, as Excel itself writes them. */
+function valueOf(cell: ScannedCell, sharedStrings: readonly string[]): CellValue {
+  const value = filedValue(cell, sharedStrings);
+  if (value instanceof CellError && !readErrors.has(value.code))
+    return new CellError((value.code as string) === '#GETTING_DATA' ? '#BUSY!' : '#VALUE!');
+  return value;
+}
+
+/** Areas that array formulas fill, forgotten once the rows below them are read. */
+class Spills {
+  private areas: Area[] = [];
+  private row = -1;
+
+  add(ref: string | undefined): void {
+    const area = parseArea(ref ?? '');
+    if (area && area.rows * area.columns > 1) this.areas.push(area);
+  }
+
+  cover({ row, column }: ScannedCell): boolean {
+    if (row !== this.row) this.areas = this.areas.filter((area) => row < area.row + area.rows);
+    this.row = row;
+    return this.areas.some((area) => column >= area.column && column < area.column + area.columns);
+  }
+}
+
+/** One entry can stand for all columns to the end of the sheet: those in use, or in sight, are enough. */
+function widthsByColumn(
+  widths: readonly ScannedWidth[],
+  cells: readonly CellModel[],
+): Record<number, number> {
+  const lastUsed = cells.reduce((last, { column }) => Math.max(last, column), columnIndex('Z'));
+  const list: Record<number, number> = {};
+  for (const { first, last, width } of widths) {
+    for (let column = first; column <= Math.min(last, lastUsed); column++) list[column] = width;
+  }
+  return list;
+}
