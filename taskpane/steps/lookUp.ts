@@ -2,6 +2,7 @@
 import { functionNamed } from '../../functions/catalogue';
 import { signature, typedName, type CellFunction } from '../../functions/define';
 import { howInWords } from '../../functions/documented';
+import { helpAddress } from '../../functions/help/pageName';
 import type { Actions } from '../actions';
 import { h, type Child } from '../h';
 import { families, lookUp } from '../lookup';
@@ -84,7 +85,16 @@ function article(f: CellFunction, actions: Actions): Child[] {
       h('p', { className: 'hint' }, f.uncertainty),
     ),
     h('p', { className: 'hint' }, `Reference: ${f.reference}`),
+    readMore(f),
     h('p', { className: 'what' }, 'Example'),
     formulaLine(f.example.formula, actions),
   ];
 }
+
+/** Its page with equations, pictures and what helps when it refuses; beside the pane on whatever serves it. */
+const readMore = (f: CellFunction): HTMLElement =>
+  h(
+    'p',
+    {},
+    h('a', { href: helpAddress(f), target: '_blank', rel: 'noopener' }, `All about ${typedName(f)}`),
+  );

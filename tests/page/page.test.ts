@@ -6,6 +6,7 @@ import { longestStart, startBench, type BenchPage, type PageBench } from './benc
 import { accessSuite } from './suites/access';
 import { filesSuite } from './suites/files';
 import { handOverSuite } from './suites/handOver';
+import { helpSuite } from './suites/help';
 import { journeysSuite } from './suites/journeys';
 import { paneSuite } from './suites/pane';
 import { portSuite } from './suites/port';
@@ -27,6 +28,7 @@ describe('the pane', () => paneSuite(() => sheet));
 describe('whole jobs in the pane', () => journeysSuite(() => sheet));
 describe('handing over', () => handOverSuite(() => sheet));
 describe('the port', () => portSuite(() => sheet));
+describe('help', () => helpSuite(() => sheet));
 describe('everyone', () => accessSuite(() => sheet));
 describe('the start', () => startSuite(() => bench));
 

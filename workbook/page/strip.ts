@@ -1,4 +1,5 @@
 /** The strip above the sheet: what this is, which file is open, and what can be done with files. */
+import { helpAddress } from '../../functions/help/pageName';
 import { h } from '../../taskpane/h';
 
 export interface StripActions {
@@ -31,6 +32,7 @@ export function fillStrip(element: HTMLElement, actions: StripActions): Strip {
       button('Save as…', actions.saveAs, 'Save this workbook as an .xlsx file'),
       button('Demo', actions.demo, 'Show the demo workbook'),
     ),
+    h('a', { className: 'help', href: helpAddress(), target: '_blank', rel: 'noopener' }, 'Help'),
     said,
   );
   return {

@@ -15,25 +15,35 @@ const types: Readonly<Record<string, string>> = {
   '.ttf': 'font/ttf',
 };
 
+const typeOf = (name: string): string => types[extname(name)] ?? 'application/octet-stream';
+
 type Headers = Readonly<Record<string, string>>;
 
-/** @param headersOf what goes along with a file, by its path from the folder on; with what is refused, by '' */
-export function filesOf(folder: string, headersOf: (name: string) => Headers): RequestListener {
+/**
+ * @param headersOf what goes along with a file, by its path from the folder on; with what is refused, by ''
+ * @param made a text that is made when it is asked for, by the same; nothing for all else
+ */
+export function filesOf(
+  folder: string,
+  headersOf: (name: string) => Headers,
+  made: Offer['made'] = () => undefined,
+): RequestListener {
   // what is not on this list is not served: no path is ever taken from a request
   const files = filesBelow(folder);
-  return (request, response) => answer(request, response, { folder, files, headersOf });
+  return (request, response) => answer(request, response, { folder, files, headersOf, made });
 }
 
 interface Offer {
   readonly folder: string;
   readonly files: ReadonlySet<string>;
   headersOf(name: string): Headers;
+  made(name: string): string | undefined;
 }
 
 function answer(
   request: IncomingMessage,
   response: ServerResponse,
-  { folder, files, headersOf }: Offer,
+  { folder, files, headersOf, made }: Offer,
 ): void {
   const refuse = (status: number, words: string): void => refused(response, status, words, headersOf(''));
   if (!isOurs(request.headers.host)) return refuse(421, 'this address is not served here');
@@ -42,7 +52,14 @@ function answer(
     return refuse(405, 'only reading is served here');
   }
   const name = fileAsked(request.url ?? '/');
-  if (name === null || !files.has(name)) return refuse(404, 'there is no such file');
+  if (name === null) return refuse(404, 'there is no such file');
+  if (!files.has(name)) {
+    const text = made(name);
+    if (text === undefined) return refuse(404, 'there is no such file');
+    response.writeHead(200, { ...headersOf(name), 'Content-Type': typeOf(name) });
+    response.end(request.method === 'HEAD' ? undefined : text);
+    return;
+  }
   const tag = tagOf(join(folder, name));
   if (tag === null) return refuse(404, 'there is no such file');
   if (request.headers['if-none-match'] === tag) {
@@ -50,8 +67,7 @@ function answer(
     response.end();
     return;
   }
-  const type = types[extname(name)] ?? 'application/octet-stream';
-  response.writeHead(200, { ...headersOf(name), ETag: tag, 'Content-Type': type });
+  response.writeHead(200, { ...headersOf(name), ETag: tag, 'Content-Type': typeOf(name) });
   if (request.method === 'HEAD') {
     response.end();
     return;

@@ -1,5 +1,8 @@
-/** Serves the workbook page, and nothing else, to this machine. */
+/** Serves the workbook page and the help pages, and nothing else, to this machine. */
 import { createServer, type Server } from 'node:http';
+import { catalogue } from '../../../functions/catalogue';
+import { helpFiles } from '../../../functions/help/files';
+import { helpFolder } from '../../../functions/help/pageName';
 import { filesOf } from './folder';
 
 /**
@@ -26,4 +29,14 @@ const headers = {
   'Cache-Control': 'no-cache', // asked for each time, since the page may have been built anew
 };
 
-export const pageServer = (folder: string): Server => createServer(filesOf(folder, () => headers));
+export const pageServer = (folder: string): Server => createServer(filesOf(folder, () => headers, help()));
+
+/** Made at the first question, since their pictures take a second or two. */
+function help(): (name: string) => string | undefined {
+  let files: ReadonlyMap<string, string> | undefined;
+  return (name) => {
+    if (!name.startsWith(`${helpFolder}/`)) return undefined;
+    files ??= helpFiles(catalogue);
+    return files.get(name.slice(helpFolder.length + 1));
+  };
+}
