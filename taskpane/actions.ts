@@ -15,6 +15,7 @@ import { longWork } from './actions/longWork';
 import { readPointedAt } from './actions/pointing';
 import { putting } from './actions/put';
 import { surveyRuns } from './actions/survey';
+import { pickedRuns } from './calls/many';
 import type {
   Choices,
   LookupChoice,
@@ -45,6 +46,8 @@ export interface Actions {
   changeTemperature(part: Partial<TemperatureChoice>): Promise<void>;
   changeLookup(part: Partial<LookupChoice>): Promise<void>;
   changeMany(part: Partial<ManyChoice>): Promise<void>;
+  /** One run more among those picked, or one less. */
+  pickRun(key: number, isPicked: boolean): Promise<void>;
   /** Asks PACE.SURVEY of the picked runs one after another, for the pane alone. */
   surveyRuns(): Promise<void>;
   /** Ends long work; what is done by then stays. */
@@ -83,6 +86,14 @@ export function createActions(store: Store, port: WorkbookPort, makeCopy?: CopyM
       await readPointedAt(bench);
       await settle();
     });
+
+  const changeMany = changing('many');
+
+  function pickRun(key: number, isPicked: boolean): Promise<void> {
+    const { table, run, many } = store.state;
+    const keys = table && run ? pickedRuns(table, run, many).map((one) => one.key) : [];
+    return changeMany({ picked: isPicked ? [...keys, key] : keys.filter((one) => one !== key) });
+  }
 
   async function pointAt(what: 'cell' | 'selection', use: (name: string) => Promise<void>): Promise<void> {
     const selection = what === 'selection' ? await port.selection() : null;
@@ -133,7 +144,8 @@ export function createActions(store: Store, port: WorkbookPort, makeCopy?: CopyM
     changeOrder: changing('order'),
     changeTemperature: changing('temperature'),
     changeLookup: changing('lookup'),
-    changeMany: changing('many'),
+    changeMany,
+    pickRun,
     surveyRuns: guarded(() => surveyRuns(bench, work)),
     stop() {
       work.stop();

@@ -2,6 +2,7 @@
 import { createActions, type Actions } from './actions';
 import { h } from './h';
 import type { CopyMaker } from './copying';
+import { drawn } from './later';
 import { patch } from './patch';
 import type { WorkbookPort } from './port';
 import type { Task } from './choices';
@@ -35,7 +36,7 @@ export function mountPane(
   const actions = createActions(store, port, makeCopy);
   const sceneOf = createScenes();
   const draw = (state: State): HTMLElement => view(sceneOf(state), actions, port);
-  const pane = draw(store.state);
+  const pane = drawn(draw(store.state));
   root.replaceChildren(pane);
 
   let shown = store.state.notice;

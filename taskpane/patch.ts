@@ -1,3 +1,5 @@
+import { drawn, showsTheSame, withChildren } from './later';
+
 /**
  * Makes the page look like a freshly drawn view while keeping the elements that stay: focus, caret,
  * scroll and live regions survive a redraw. What stands in an element marked `data-kept` is its own.
@@ -5,7 +7,8 @@
 export function patch(current: Element, next: Element): void {
   patchAttributes(current, next);
   patchHandlers(current, next);
-  if (!next.hasAttribute('data-kept')) patchChildren(current, next);
+  if (!next.hasAttribute('data-kept') && !showsTheSame(current, next))
+    patchChildren(current, withChildren(next));
   patchProperties(current, next);
 }
 
@@ -32,21 +35,26 @@ const handlers = [
 
 function patchHandlers(current: Element, next: Element): void {
   if (!(current instanceof HTMLElement && next instanceof HTMLElement)) return;
-  for (const handler of handlers) Object.assign(current, { [handler]: next[handler] });
+  for (const handler of handlers) {
+    const wanted = next[handler];
+    if (current[handler] !== wanted) Object.assign(current, { [handler]: wanted });
+  }
 }
 
 function patchChildren(current: Element, next: Element): void {
   const wanted = [...next.childNodes];
   wanted.forEach((node, place) => {
     const old = current.childNodes[place];
-    if (!old) current.append(node);
+    if (!old) current.append(ready(node));
     else if (old instanceof Element && node instanceof Element && isSame(old, node)) patch(old, node);
     else if (old.nodeType === Node.TEXT_NODE && node.nodeType === Node.TEXT_NODE) {
       if (old.nodeValue !== node.nodeValue) old.nodeValue = node.nodeValue;
-    } else old.replaceWith(node);
+    } else old.replaceWith(ready(node));
   });
   while (current.childNodes.length > wanted.length) current.lastChild!.remove();
 }
+
+const ready = (node: ChildNode): ChildNode => (node instanceof Element ? drawn(node) : node);
 
 /** Two elements with different ids are different things, however alike. */
 const isSame = (a: Element, b: Element): boolean => a.tagName === b.tagName && a.id === b.id;

@@ -1,5 +1,6 @@
 /** Labelled controls, drawn the same way in every step. */
 import { h, type Child } from '../h';
+import { later } from '../later';
 
 export interface TextField {
   readonly id: string;
@@ -84,10 +85,15 @@ export function selectField(
     'div',
     { className: 'field' },
     h('label', { for: id }, label),
-    h(
-      'select',
-      { id, 'data-chosen': chosen, onchange: (event) => onChange((event.target as HTMLSelectElement).value) },
-      ...choices.map(({ value, label: words }) => h('option', { value, selected: value === chosen }, words)),
+    later(
+      h('select', {
+        id,
+        'data-chosen': chosen,
+        onchange: (event) => onChange((event.target as HTMLSelectElement).value),
+      }),
+      [JSON.stringify(choices)],
+      () =>
+        choices.map(({ value, label: words }) => h('option', { value, selected: value === chosen }, words)),
     ),
   );
 }

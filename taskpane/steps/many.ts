@@ -4,6 +4,7 @@ import { isOneBlock, type Surveyed } from '../calls/many';
 import type { ManyAnswer } from '../choices';
 import { plainNumber, valueWithUncertainty } from '../../functions/format';
 import { h, type Child } from '../h';
+import { later } from '../later';
 import { miniature } from '../plots/miniature';
 import type { Scene, Stamp } from '../scene';
 import type { Survey } from '../store';
@@ -63,37 +64,36 @@ export function manyStep({ state, stamps, picked, insertion }: Scene, actions: A
 }
 
 function strip(stamps: readonly Stamp[], picked: ReadonlySet<number>, actions: Actions): HTMLElement {
-  const toggled = (key: number): number[] =>
-    picked.has(key) ? [...picked].filter((other) => other !== key) : [...picked, key];
   return h(
     'ul',
     { className: 'stamps', 'aria-label': 'runs' },
-    ...stamps.map(({ key, name, path }) =>
-      h(
-        'li',
-        {},
-        h(
-          'label',
-          { for: `run-${key}` },
-          miniature(path),
-          h(
-            'span',
-            {},
-            h('input', {
-              id: `run-${key}`,
-              type: 'checkbox',
-              checked: picked.has(key),
-              onchange: () => void actions.changeMany({ picked: toggled(key) }),
-            }),
-            name,
-          ),
-        ),
-      ),
-    ),
+    ...stamps.map((stamp) => {
+      const isPicked = picked.has(stamp.key);
+      return later(h('li'), [stamp, isPicked], () => [stampOf(stamp, isPicked, actions)]);
+    }),
   );
 }
 
-function surveyTable({ rows, isWhole }: Survey): HTMLElement {
+const stampOf = ({ key, name, path }: Stamp, isPicked: boolean, actions: Actions): HTMLElement =>
+  h(
+    'label',
+    { for: `run-${key}` },
+    miniature(path),
+    h(
+      'span',
+      {},
+      h('input', {
+        id: `run-${key}`,
+        type: 'checkbox',
+        checked: isPicked,
+        onchange: (event) => void actions.pickRun(key, (event.target as HTMLInputElement).checked),
+      }),
+      name,
+    ),
+  );
+
+function surveyTable(survey: Survey): HTMLElement {
+  const { rows, isWhole } = survey;
   const heading = (words: string): HTMLElement => h('th', { scope: 'col' }, words);
   return h(
     'table',
@@ -104,7 +104,7 @@ function surveyTable({ rows, isWhole }: Survey): HTMLElement {
       {},
       h('tr', {}, heading('run'), heading('order'), heading('rate coefficient'), heading('half life')),
     ),
-    h('tbody', {}, ...rows.flatMap(surveyRows)),
+    later(h('tbody'), [survey], () => rows.flatMap(surveyRows)),
   );
 }
 

@@ -3,6 +3,7 @@ import { areaName } from '../../functions/address';
 import { shown } from '../../src/errors';
 import type { Actions } from '../actions';
 import { h, type Child } from '../h';
+import { later } from '../later';
 import { columnOf, headingOf, limitsOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
 import { placeName } from '../turned';
@@ -11,26 +12,29 @@ import { findingsList } from './findings';
 import { button, selectField, step, textField, type Choice } from './fields';
 import { howItIsRead } from './howItIsRead';
 
-export function runStep(
-  { state: { table, run, proposal, hint }, check }: Scene,
-  actions: Actions,
-): HTMLElement {
-  if (!table || !run) {
-    return step(
-      'run',
-      'Run',
-      h(
-        'p',
-        { className: 'hint' },
-        'Click a cell in your table of times and readings, or select its columns with their headings.',
-      ),
-      hint !== '' && h('p', { className: 'problem', role: 'alert' }, hint),
-      button('Use the selected cells', () => void actions.chooseSelection(), 'main'),
-    );
-  }
-  return step(
-    'run',
-    'Run',
+/** Drawn again only for another run or block: a table of many columns has long lists to choose from. */
+export function runStep(scene: Scene, actions: Actions): HTMLElement {
+  const { table, run, proposal, hint } = scene.state;
+  return later(step('run', 'Run'), [table, run, proposal, hint], () =>
+    table && run ? chosenRun(table, run, scene, actions) : noRun(hint, actions),
+  );
+}
+
+const noRun = (hint: string, actions: Actions): Child[] => [
+  h(
+    'p',
+    { className: 'hint' },
+    'Click a cell in your table of times and readings, or select its columns with their headings.',
+  ),
+  hint !== '' && problem(hint),
+  button('Use the selected cells', () => void actions.chooseSelection(), 'main'),
+];
+
+const problem = (words: string): HTMLElement => h('p', { className: 'problem', role: 'alert' }, words);
+
+function chosenRun(table: Table, run: Run, { state, check }: Scene, actions: Actions): Child[] {
+  const { proposal, hint } = state;
+  return [
     h('p', { className: 'where' }, areaName(table.area)),
     ...runField(table, run, actions),
     h(
@@ -53,14 +57,14 @@ export function runStep(
     ),
     isFollowedInTime(table, run) && h('p', { className: 'hint' }, pointsInWords(table, run)),
     table.apart !== '' && h('p', { className: 'problem' }, `${table.apart}.`),
-    hint !== '' && h('p', { className: 'problem', role: 'alert' }, hint),
+    hint !== '' && problem(hint),
     howItIsRead(table, actions),
     proposal
       ? button(`Use ${areaName(proposal.area)} instead`, () => void actions.chooseProposal())
       : button('Use the selected cells', () => void actions.chooseSelection()),
     isFollowedInTime(table, run) && check && findingsList(check),
     caution(table, run),
-  );
+  ];
 }
 
 /** Which of several runs under each other. */

@@ -1,5 +1,6 @@
 /** @jest-environment jsdom */
 import { h } from '../../taskpane/h';
+import { drawn, later } from '../../taskpane/later';
 import { patch } from '../../taskpane/patch';
 
 test('patch brings words, attributes and children up to date', () => {
@@ -48,4 +49,53 @@ test('what a person opened stays open, and a view can open it', () => {
   const current = h('div', {}, h('details', { open: true }), h('details', {}));
   patch(current, h('div', {}, h('details', {}), h('details', { open: true })));
   expect([...current.querySelectorAll('details')].map(({ open }) => open)).toEqual([true, true]);
+});
+
+describe('what is put off', () => {
+  const list = (words: string, on: unknown, draw = jest.fn(() => [h('li', {}, words)])) => ({
+    draw,
+    view: () => h('div', {}, later(h('ul'), [on], draw)),
+  });
+
+  test('is drawn with the page, again where it rests on something else, and not otherwise', () => {
+    const [first, same, other] = [list('one', 1), list('unseen', 1), list('two', 2)];
+    const current = drawn(first.view());
+    expect(current.textContent).toBe('one');
+    patch(current, same.view());
+    expect([current.textContent, same.draw.mock.calls.length]).toEqual(['one', 0]);
+    patch(current, other.view());
+    expect(current.textContent).toBe('two');
+    patch(current, list('unseen', 2).view());
+    expect(current.textContent).toBe('two');
+  });
+
+  test('is drawn where it comes new to the page, and where something else stood in its place', () => {
+    const current = h('main', {}, h('ul', {}, h('li', {}, 'plain')));
+    patch(
+      current,
+      h(
+        'main',
+        {},
+        later(h('ul'), [1], () => [h('li', {}, 'put off')]),
+        list('added', 1).view(),
+      ),
+    );
+    expect(current.textContent).toBe('put offadded');
+    patch(current, h('main', {}, h('ul', {}, h('li', {}, 'plain'))));
+    patch(
+      current,
+      h(
+        'main',
+        {},
+        later(h('ul'), [1], () => [h('li', {}, 'again')]),
+      ),
+    );
+    expect(current.textContent).toBe('again');
+  });
+
+  test('is drawn below what was put off itself', () => {
+    const inner = (): HTMLElement => later(h('b'), [1], () => ['inner']);
+    const current = drawn(later(h('div'), [1], () => [h('p', {}, inner())]));
+    expect(current.textContent).toBe('inner');
+  });
 });
