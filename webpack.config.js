@@ -73,6 +73,7 @@ const commands = {
     bench: './tests/bench/bench.ts',
     simulate: './tests/simulations/simulate.ts',
     package: './scripts/package.ts',
+    excel: './scripts/excel.ts',
   },
   output: { ...base('commands').output, filename: '[name].cjs' },
   optimization: { minimize: false },

@@ -18,6 +18,7 @@ const needs = {
   bench: ['commands'],
   simulate: ['commands'],
   package: ['addin', 'commands'],
+  excel: ['addin', 'commands'],
 };
 const wholes = { page: ['workbook', 'commands'], all: ['addin', 'workbook', 'commands'] };
 
