@@ -1,5 +1,6 @@
 /** `npm run handover -- IN.xlsx OUT.xlsx` */
 import packageJson from '../../package.json';
+import { elsewhereLine } from '../handover/elsewhere';
 import type { HandedFormula } from '../handover/handed';
 import { handOver, placeOf, showsError } from '../handover/handOver';
 import { counted, errorLines, runFileCommand } from './fileCommand';
@@ -37,8 +38,12 @@ function summary(formulas: readonly HandedFormula[]): string {
 const origin = { version: packageJson.version, date: new Date().toISOString().slice(0, 10) };
 
 void runFileCommand(process.argv.slice(2), usage, async (input) => {
-  const { bytes, formulas, names, errors } = await handOver(input, origin);
-  const details = [...frozenLines(formulas), ...names.map(({ name }) => `  frozen  the name ${name}`)];
+  const { bytes, formulas, names, elsewhere, errors } = await handOver(input, origin);
+  const details = [
+    ...frozenLines(formulas),
+    ...names.map(({ name }) => `  frozen  the name ${name}`),
+    ...elsewhere.map((call) => `  left    ${elsewhereLine(call)}`),
+  ];
   return { bytes, summary: summary(formulas), details, errors: errorLines(errors) };
 }).then((code) => {
   process.exitCode = code;

@@ -10,6 +10,7 @@ import { readWorkbook } from '../xlsx/read';
 import { encodeXml } from '../xlsx/xml';
 import { Package } from '../xlsx/zip';
 import { checked } from './check';
+import { callsElsewhere, type CallElsewhere } from './elsewhere';
 import { handFormulas, type HandedFormula } from './handed';
 import { mergedCells } from './mergedCells';
 import { isOfTheDay, methodSheet, noteText, type Origin } from './methodSheet';
@@ -19,6 +20,7 @@ import { rewriteSheet, type RewrittenCell } from './rewriteSheet';
 import { dropLinks, dropPane, ownLinks } from './ownReferences';
 import { respelled } from './respelled';
 import { addSheet } from './sheetPart';
+import { dropColumnFormulas } from './tableColumns';
 import { WorkingsSheet } from './workings';
 import { World } from './world';
 
@@ -28,6 +30,8 @@ export interface HandedOver {
   readonly formulas: readonly HandedFormula[];
   /** Names that stood for a formula with one of ours, and now for a value. */
   readonly names: readonly FrozenName[];
+  /** Calls of ours that stand in no cell, and stay. */
+  readonly elsewhere: readonly CallElsewhere[];
   /** Cells of the whole workbook that show an error, in reading order. */
   readonly errors: CalculatedBook['errors'];
 }
@@ -50,8 +54,10 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
     aside,
   );
   const names = await frozenNames(book);
-  if (formulas.length + names.length === 0)
-    return { bytes: pack.bytes(), formulas, names, errors: calculated.errors };
+  const elsewhere = callsElsewhere(pack, parts.sheets);
+  const told = { formulas, names, elsewhere };
+  if (formulas.length + names.length + elsewhere.length === 0)
+    return { bytes: pack.bytes(), ...told, errors: calculated.errors };
   for (const sheet of parts.sheets) {
     const cells = [
       ...formulas.filter((formula) => formula.sheet === sheet.name).flatMap(cellsOf),
@@ -64,12 +70,13 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
       .map((formula) => ({ row: formula.row, column: formula.column, text: noteText(formula, origin) }));
     if (notes.length > 0) addNotes(pack, sheet, notes);
   }
-  addSheet(pack, parts, methodSheet(freeName('Method', taken), { formulas, names }, world, origin));
+  addSheet(pack, parts, methodSheet(freeName('Method', taken), told, world, origin));
   if (workings) addSheet(pack, parts, workings);
   freezeNames(pack, parts.workbook, names);
+  dropColumnFormulas(pack, parts);
   dropCalcChain(pack, parts);
   dropLinks(pack, parts, links);
-  return { bytes: pack.bytes(), formulas, names, errors: calculated.errors };
+  return { bytes: pack.bytes(), ...told, errors: calculated.errors };
 }
 
 function cellsOf({ row, column, said, values }: HandedFormula): RewrittenCell[] {

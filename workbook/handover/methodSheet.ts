@@ -14,7 +14,7 @@ import {
   vacuumPermittivity,
 } from '../../src/constants';
 import type { HandedFormula } from './handed';
-import type { FrozenName } from './names';
+import type { HandedOver } from './handOver';
 import type { NewSheet, SheetCell } from './sheetPart';
 import { fingerprintOf, fingerprintTolerance } from './stale';
 import type { World } from './world';
@@ -42,7 +42,7 @@ const headings = (...words: string[]): SheetCell[] => words.map((heading) => ({ 
 
 export function methodSheet(
   name: string,
-  { formulas, names }: { readonly formulas: readonly HandedFormula[]; readonly names: readonly FrozenName[] },
+  { formulas, names, elsewhere }: Pick<HandedOver, 'formulas' | 'names' | 'elsewhere'>,
   world: World,
   { version, date }: Origin,
 ): NewSheet {
@@ -58,6 +58,8 @@ export function methodSheet(
   for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
   for (const { name: own, refersTo, value } of names)
     rows.push(['a name', own, `=${refersTo}`, `frozen: it stands for ${value}`]);
+  for (const { where, formula, loss } of elsewhere)
+    rows.push([where, null, `=${formula}`, `left as it was: without the add-in ${loss}`]);
   rows.push([], headings('Function', 'Unit', 'What it answers', 'How it is worked out', 'Reference'));
   rows.push(...functionsOf(formulas).map(functionRow));
   rows.push([], headings('Constant', 'Unit', 'Value', 'Source'));
