@@ -36,7 +36,7 @@ export default defineFunction({
   ],
   seeAlso: ['TANGENT', 'START'],
   reference: 'doi:10.1021/ac60214a047; doi:10.1351/goldbook.R05156',
-  isLong: { fromCells: 1000 },
+  isLong: { fromCells: 4000 },
   run({ times, values, points, degree, coefficient, detail }) {
     const series = seriesOf(times, values);
     const rates = ratesAlong(series, { points, degree, stoichiometricNumber: coefficient });

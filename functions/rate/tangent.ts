@@ -42,7 +42,7 @@ export default defineFunction({
   ],
   seeAlso: ['ALONG', 'START', 'BETWEEN'],
   reference: 'doi:10.1021/ac60214a047; doi:10.1351/goldbook.R05156',
-  isLong: { fromCells: 1000 },
+  isLong: { fromCells: 4000 },
   run: ({ times, values, time, points, degree, coefficient, detail }) =>
     estimateResult(
       tangentRate(seriesOf(times, values), time, { points, degree, stoichiometricNumber: coefficient }),

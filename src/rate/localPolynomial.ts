@@ -33,12 +33,14 @@ export const emptyLocalFit = (): LocalFit => ({
 export const highestDegree = 5;
 
 // scratch space for one window, grown as needed
+let scaled = new Float64Array(64);
 let current = new Float64Array(64);
 let previous = new Float64Array(64);
 let residuals = new Float64Array(64);
 
 function makeRoom(count: number): void {
   if (current.length >= count) return;
+  scaled = new Float64Array(2 * count);
   current = new Float64Array(2 * count);
   previous = new Float64Array(2 * count);
   residuals = new Float64Array(2 * count);
@@ -48,6 +50,7 @@ function makeRoom(count: number): void {
  * Fits the points `first … first + count − 1` and writes the result into `fit`.
  *
  * @param at time at which height and slope are wanted
+ * @param below gets the polynomial of one degree less, which is met on the way
  * @throws InvalidInput when the window holds fewer different times than degree + 1
  * @example fitLocalPolynomial(Float64Array.of(0, 1, 2), Float64Array.of(0, 1, 4), 0, 3, 2, 1, emptyLocalFit()).slope // 2
  */
@@ -59,16 +62,25 @@ export function fitLocalPolynomial(
   degree: number,
   at: number,
   fit: LocalFit,
+  below?: LocalFit,
 ): LocalFit {
   makeRoom(count);
   // times are taken from `at` in units of the window's half-width, so that powers keep their digits
   const scale =
     Math.max(at - times[first], times[first + count - 1] - at, times[first + count - 1] - times[first]) || 1;
   fit.value = fit.slope = fit.slopeVariance = fit.valueVariance = 0;
+  let norm = count;
+  let product = 0;
+  let centre = 0;
   for (let i = 0; i < count; i++) {
+    const time = (times[first + i] - at) / scale;
+    const value = values[first + i];
+    scaled[i] = time;
     current[i] = 1;
     previous[i] = 0;
-    residuals[i] = values[first + i];
+    residuals[i] = value;
+    product += value;
+    centre += time;
   }
   // at the point itself: height and slope of the current and the previous polynomial
   let height = 1;
@@ -76,35 +88,35 @@ export function fitLocalPolynomial(
   let heightBefore = 0;
   let riseBefore = 0;
   let normBefore = 1;
+  let share = 0;
   for (let k = 0; ; k++) {
-    let norm = 0;
-    let product = 0;
-    let centre = 0;
-    for (let i = 0; i < count; i++) {
-      const p = current[i];
-      const square = p * p;
-      norm += square;
-      product += p * residuals[i];
-      centre += ((times[first + i] - at) / scale) * square;
-    }
     if (!(norm > 1e-24 * normBefore)) {
       throw new InvalidInput(
         `a polynomial of degree ${degree} needs ${degree + 1} different times in its window: got ${k}`,
       );
     }
-    const share = product / norm;
+    if (below && k === degree) Object.assign(below, fit);
+    share = product / norm;
     fit.value += share * height;
     fit.slope += share * rise;
     fit.valueVariance += (height * height) / norm;
     fit.slopeVariance += (rise * rise) / norm;
-    for (let i = 0; i < count; i++) residuals[i] -= share * current[i];
     if (k === degree) break;
     const alpha = centre / norm;
     const beta = k === 0 ? 0 : norm / normBefore;
+    normBefore = norm;
+    norm = product = centre = 0;
     for (let i = 0; i < count; i++) {
-      const next = ((times[first + i] - at) / scale - alpha) * current[i] - beta * previous[i];
-      previous[i] = current[i];
+      const p = current[i];
+      const next = (scaled[i] - alpha) * p - beta * previous[i];
+      const residual = residuals[i] - share * p;
+      const square = next * next;
+      previous[i] = p;
       current[i] = next;
+      residuals[i] = residual;
+      norm += square;
+      product += next * residual;
+      centre += scaled[i] * square;
     }
     // the same recurrence and its derivative, at t = at where the scaled time is 0
     const nextHeight = -alpha * height - beta * heightBefore;
@@ -113,15 +125,25 @@ export function fitLocalPolynomial(
     riseBefore = rise;
     height = nextHeight;
     rise = nextRise;
-    normBefore = norm;
   }
-  let sum = 0;
-  for (let i = 0; i < count; i++) sum += residuals[i] * residuals[i];
-  fit.residualSumOfSquares = sum;
+  let squares = 0;
+  let squaresBelow = 0;
+  for (let i = 0; i < count; i++) {
+    const residual = residuals[i] - share * current[i];
+    squares += residual * residual;
+    squaresBelow += residuals[i] * residuals[i];
+  }
+  finish(fit, squares, scale, count - degree - 1);
+  if (below) finish(below, squaresBelow, scale, count - degree);
+  return fit;
+}
+
+/** From the window's own units of time to those of the run. */
+function finish(fit: LocalFit, squares: number, scale: number, degreesOfFreedom: number): void {
+  fit.residualSumOfSquares = squares;
   fit.slope /= scale;
   fit.slopeVariance /= scale * scale;
-  fit.degreesOfFreedom = count - degree - 1;
-  return fit;
+  fit.degreesOfFreedom = degreesOfFreedom;
 }
 
 /**

@@ -93,13 +93,12 @@ const finer = emptyLocalFit();
 function rateIn(series: Series, window: TangentWindow, first: number, time: number): Estimate {
   const { times, values } = series;
   const { points, degree, stoichiometricNumber, scatter } = window;
-  const rate = slopeAsRate(
-    fitLocalPolynomial(times, values, first, points, degree, time, own),
-    stoichiometricNumber,
-  );
-  if (!scatter) return rate;
-  fitLocalPolynomial(times, values, first, points, degree + 1, time, finer);
-  return withoutBias(rate, finer, stoichiometricNumber, scatter);
+  if (!scatter) {
+    fitLocalPolynomial(times, values, first, points, degree, time, own);
+    return slopeAsRate(own, stoichiometricNumber);
+  }
+  fitLocalPolynomial(times, values, first, points, degree + 1, time, finer, own);
+  return withoutBias(slopeAsRate(own, stoichiometricNumber), finer, stoichiometricNumber, scatter);
 }
 
 /**

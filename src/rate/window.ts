@@ -16,6 +16,9 @@ import type { Series } from '../series/series';
  * because degree d + 1 misses the same bend: the trial ends at windows whose polynomials of that degree
  * miss the readings by twice their scatter or more, in squares.
  *
+ * Wide windows that lie close together hold almost the same readings: of those, only every so many are tried,
+ * so that the work grows with the readings and not with their square.
+ *
  * @param degree of the tangent
  * @returns a count from degree + 3 (or all readings, if fewer) up to all readings
  * @example defaultWindow(pairReadings([0, 1, 2, 3], [4, 3, 1, 1]), 2) // 4
@@ -49,6 +52,16 @@ interface Trial {
   readonly misfit: number;
 }
 
+/** Windows tried for each width of a window; all of them where it holds fewer readings than that. */
+const triedPerWidth = 32;
+
+/** No more windows of one width than this: their mean is then known to a hundredth or so. */
+const mostTried = 4096;
+
+/** How far apart the windows that are tried begin. */
+const strideOf = (count: number, all: number): number =>
+  Math.max(1, Math.floor(count / triedPerWidth), Math.floor(all / mostTried));
+
 /** Counts grow by about a quarter each. */
 const nextCount = (count: number, all: number): number =>
   Math.min(all, Math.max(count + 2, Math.round(count * 1.25)));
@@ -65,19 +78,19 @@ function tried(
   let squaredBias = 0;
   let scatter = 0;
   let squares = 0;
-  for (let i = 0, first = 0; i < times.length; i++) {
+  let windows = 0;
+  const stride = strideOf(count, times.length);
+  for (let i = 0, first = 0; i < times.length; i += stride, windows++) {
     first = nearestWindow(times, count, times[i], first);
-    fitLocalPolynomial(times, values, first, count, degree, times[i], low);
-    fitLocalPolynomial(times, values, first, count, degree + 1, times[i], high);
+    fitLocalPolynomial(times, values, first, count, degree + 1, times[i], high, low);
     squaredBias += (high.slope - low.slope) ** 2 - variance * (high.slopeVariance - low.slopeVariance);
     scatter += variance * low.slopeVariance;
     squares += high.residualSumOfSquares;
   }
-  const all = times.length;
   return {
-    squaredBias: squaredBias / all,
-    scatter: scatter / all,
-    misfit: squares / (all * high.degreesOfFreedom),
+    squaredBias: squaredBias / windows,
+    scatter: scatter / windows,
+    misfit: squares / (windows * high.degreesOfFreedom),
   };
 }
 

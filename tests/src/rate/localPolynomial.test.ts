@@ -25,6 +25,19 @@ describe.each(reference.cases)('local polynomial $id', ({ id, dataset, degree, k
       expect(fit.degreesOfFreedom).toBe(df[i]);
     },
   );
+
+  test('fitLocalPolynomial of one degree more meets it on the way', () => {
+    slope.forEach((_, i) => {
+      const first = isInitial ? 0 : indexWindow(i, k, t.length);
+      if (new Set(t.subarray(first, first + k)).size < degree + 2) return; // replicates
+      const below = emptyLocalFit();
+      fitLocalPolynomial(t, y, first, k, degree + 1, isInitial ? 0 : t[i], emptyLocalFit(), below);
+      const error = Math.sqrt((below.residualSumOfSquares / below.degreesOfFreedom) * below.slopeVariance);
+      expect(Math.abs(below.slope - slope[i])).toBeLessThan(1e-10 * largest(slope));
+      expect(Math.abs(error / se[i] - 1)).toBeLessThan(1e-10);
+      expect(below.degreesOfFreedom).toBe(df[i]);
+    });
+  });
 });
 
 test('tangentRate and ratesAlong agree with the reference on an even grid, end windows one-sided', () => {

@@ -82,6 +82,8 @@ const settings = [
   { order: 1, readings: 41, noise: 0.03, better: 10, worse: 1.7 },
   { order: 0.5, readings: 25, noise: 0.02, better: 10, worse: 2.5 },
   { order: 1, readings: 101, noise: 0.01, better: 20, worse: 1 },
+  // wide windows, of which not all are tried
+  { order: 1, readings: 801, noise: 0.01, better: 1000, worse: 1.2 },
   // bends hard at the start and hardly later, where one count for the whole run must be a compromise
   { order: 2, readings: 41, noise: 0.02, better: 0.5, worse: 2.2 },
 ];
@@ -107,7 +109,8 @@ test.each(settings)(
   'defaultWindow, order $order, $readings readings, noise $noise: $better times better than 5 readings, within $worse of the best count',
   (setting) => {
     const chosen = squaredError(undefined, setting);
-    const fixed = [5, 7, 9, 11, 15, 21, 25].map((points) => squaredError(points, setting));
+    const counts = [5, 7, 9, 11, 15, 21, 25, 101, 251, 401].filter((points) => points <= setting.readings);
+    const fixed = counts.map((points) => squaredError(points, setting));
     expect(fixed[0] / chosen).toBeGreaterThan(setting.better);
     expect(chosen / Math.min(...fixed)).toBeLessThan(setting.worse);
   },
