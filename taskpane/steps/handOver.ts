@@ -19,7 +19,6 @@ export function handOverStep(
 }
 
 function withFiles(copying: Copying | null, { gives, verb }: WorkbookFiles, actions: Actions): Child[] {
-  const isMaking = copying?.kind === 'making';
   return [
     h(
       'p',
@@ -35,15 +34,9 @@ function withFiles(copying: Copying | null, { gives, verb }: WorkbookFiles, acti
       h('li', {}, `The copy ${gives}.`),
     ),
     h('p', { className: 'hint', role: 'status' }, said(copying)),
-    isMaking && making(actions),
-    copying?.kind === 'made' && made(copying.copy),
-    copying?.kind === 'made' && button(verb, () => void actions.giveCopy(), 'main'),
-    !isMaking &&
-      button(
-        copying ? 'Make it again' : 'Make the copy',
-        () => void actions.makeCopy(),
-        copying ? '' : 'main',
-      ),
+    copying?.kind === 'making' && making(actions),
+    ...(copying?.kind === 'made' ? made(copying.copy, verb, actions) : []),
+    !copying && button('Make the copy', () => void actions.makeCopy(), 'main'),
   ];
 }
 
@@ -67,21 +60,27 @@ const making = (actions: Actions): HTMLElement =>
     button('Stop', () => actions.stop(), 'small'),
   );
 
-function made({ live, frozen, failing }: HandedCopy): HTMLElement | false {
-  const count = frozen.reduce((sum, { cells }) => sum + cells.length, 0);
-  if (live + count === 0) return false;
-  return h(
+const made = (copy: HandedCopy, verb: string, actions: Actions): Child[] => [
+  counts(copy),
+  h(
     'div',
-    { className: 'report' },
-    h(
-      'dl',
-      { className: 'counts' },
-      ...counted(live, 'live: they follow their inputs'),
-      ...counted(count, 'frozen to their value'),
-      ...(failing.length > 0 ? counted(failing.length, 'showed an error before, and still do') : []),
-    ),
-    frozen.length > 0 && details('What is frozen, and why', frozen),
-    failing.length > 0 && details('Which showed an error', [{ why: '', cells: failing }]),
+    { className: 'row' },
+    button(verb, () => void actions.giveCopy(), 'main'),
+    button('Make it again', () => void actions.makeCopy()),
+  ),
+  copy.frozen.length > 0 && details('What is frozen, and why', copy.frozen),
+  copy.failing.length > 0 && details('Which showed an error', [{ why: '', cells: copy.failing }]),
+];
+
+function counts({ live, frozen, failing }: HandedCopy): HTMLElement | false {
+  const frozenCount = frozen.reduce((sum, { cells }) => sum + cells.length, 0);
+  if (live + frozenCount === 0) return false;
+  return h(
+    'dl',
+    { className: 'counts' },
+    ...counted(live, 'live: they follow their inputs'),
+    ...counted(frozenCount, 'frozen to their value'),
+    ...(failing.length > 0 ? counted(failing.length, 'showed an error before, and still do') : []),
   );
 }
 

@@ -6,6 +6,8 @@ import { h, type Child } from '../h';
 import { later } from '../later';
 import { columnOf, headingOf, limitsOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
+import { functionOf } from '../signals';
+import type { State } from '../store';
 import { placeName } from '../turned';
 import { columnField } from './columnField';
 import { findingsList } from './findings';
@@ -15,10 +17,14 @@ import { howItIsRead } from './howItIsRead';
 /** Drawn again only for another run or block: a table of many columns has long lists to choose from. */
 export function runStep(scene: Scene, actions: Actions): HTMLElement {
   const { table, run, proposal, hint } = scene.state;
-  return later(step('run', 'Run'), [table, run, proposal, hint], () =>
+  return later(step('run', 'Run'), [table, run, proposal, hint, isCautioned(scene.state)], () =>
     table && run ? chosenRun(table, run, scene, actions) : noRun(hint, actions),
   );
 }
+
+/** The open step has a caution of its own. */
+const isCautioned = ({ task, reading }: State): boolean =>
+  task === 'reading' && functionOf(reading.what)?.caution !== undefined;
 
 const noRun = (hint: string, actions: Actions): Child[] => [
   h(
@@ -63,7 +69,7 @@ function chosenRun(table: Table, run: Run, { state, check }: Scene, actions: Act
       ? button(`Use ${areaName(proposal.area)} instead`, () => void actions.chooseProposal())
       : button('Use the selected cells', () => void actions.chooseSelection()),
     isFollowedInTime(table, run) && check && findingsList(check),
-    caution(table, run),
+    !isCautioned(state) && caution(table, run),
   ];
 }
 

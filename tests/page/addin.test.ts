@@ -6,6 +6,7 @@ import { demoWorkbook } from '../../workbook/demo/demo';
 import { calculate } from '../../workbook/engine/univer/headless';
 import { startAddin, type AddinBench, type AddinPage } from './addinBench';
 import { longestStart } from './bench';
+import { violations } from './suites/access';
 
 jest.setTimeout(120_000);
 
@@ -38,7 +39,7 @@ test('the workbook is handed over in Excel’s own page: the spreadsheet engine 
   const addin = await bench.open({ sheets: fading, file });
   await press(addin, 'Hand over');
   await press(addin, 'Make the copy');
-  await addin.page.locator('#hand-over .report').waitFor({ timeout: 90_000 });
+  await addin.page.locator('#hand-over .counts').waitFor({ timeout: 90_000 });
   expect(await addin.page.locator('#hand-over .counts').innerText()).toMatch(/^\d+\s+live/);
   await press(addin, 'Open the copy');
   await addin.page.locator('.notice.good').waitFor();
@@ -51,3 +52,64 @@ test('the workbook is handed over in Excel’s own page: the spreadsheet engine 
   expect(addin.complaints).toEqual([]);
   await addin.close();
 });
+
+const pages = [
+  { name: 'dark, 320 px wide', width: 320, options: { colorScheme: 'dark' } },
+  { name: 'light, 480 px wide', width: 480, options: { colorScheme: 'light' } },
+  { name: 'colours of the system’s own, 320 px wide', width: 320, options: { forcedColors: 'active' } },
+] as const;
+
+test.each(pages)('every step holds to the rules of accessibility: $name', async ({ width, options }) => {
+  const addin = await bench.open({ sheets: fading }, { viewport: { width, height: 700 }, ...options });
+  await addin.page.locator('#run .where', { hasText: 'Run!A1:B7' }).waitFor();
+  const steps = await addin.page.locator('nav button').all();
+  expect(steps.length).toBe(7);
+  for (const step of steps) {
+    await step.click();
+    const name = await step.innerText();
+    await addin.page.mouse.move(0, 0);
+    await faded(addin);
+    expect([name, await violations(addin, ['#pane'])]).toEqual([name, []]);
+    expect([name, await widthTaken(addin)]).toEqual([name, width]);
+  }
+  expect(addin.complaints).toEqual([]);
+  await addin.close();
+});
+
+test('enlarged to twice its size in 320 px, no step is cut off at the side', async () => {
+  const addin = await bench.open({ sheets: fading }, { viewport: { width: 160, height: 350 } });
+  for (const step of await addin.page.locator('nav button').all()) {
+    await step.click();
+    expect([await step.innerText(), await widthTaken(addin)]).toEqual([await step.innerText(), 160]);
+  }
+  await addin.close();
+});
+
+test('colours follow Office, also against the system', async () => {
+  const brightness = (addin: AddinPage): Promise<number> =>
+    addin.page.evaluate(() => {
+      const { backgroundColor } = getComputedStyle(document.querySelector('.flaskpace')!);
+      return Math.max(...backgroundColor.match(/\d+/g)!.map(Number));
+    });
+  const black = { theme: { isDarkTheme: true } };
+  const grey = { theme: { bodyBackgroundColor: '#262626' } };
+  const white = { theme: { bodyBackgroundColor: '#FFFFFF' } };
+  for (const [setting, colorScheme, isDark] of [
+    [black, 'light', true],
+    [grey, 'light', true],
+    [white, 'dark', false],
+    [{}, 'dark', true],
+    [{}, 'light', false],
+  ] as const) {
+    const addin = await bench.open({ sheets: fading, setting }, { colorScheme });
+    expect((await brightness(addin)) < 128).toBe(isDark);
+    await addin.close();
+  }
+});
+
+/** Colours fade from one to the other. */
+const faded = ({ page }: AddinPage): Promise<void> =>
+  page.evaluate(async () => void (await Promise.all(document.getAnimations().map((one) => one.finished))));
+
+const widthTaken = ({ page }: AddinPage): Promise<number> =>
+  page.evaluate(() => document.documentElement.scrollWidth);

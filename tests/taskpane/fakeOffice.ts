@@ -6,6 +6,8 @@ export interface OfficeSetting {
   /** Requirement sets that this host lacks: `ExcelApi 1.12`. */
   readonly lacks?: readonly string[];
   readonly platform?: string;
+  /** Colours of Office; a host without any says nothing. */
+  readonly theme?: { readonly isDarkTheme?: boolean; readonly bodyBackgroundColor?: string };
   /** What it answers in place of a file. */
   readonly refusal?: string;
 }
@@ -27,7 +29,13 @@ interface Result {
 type Done = (result: Result) => void;
 
 /** Call it after the fake of Excel, which it lends the opening of other workbooks. */
-export function fakeOffice({ file, lacks = [], platform = 'PC', refusal }: OfficeSetting = {}): FakeOffice {
+export function fakeOffice({
+  file,
+  lacks = [],
+  platform = 'PC',
+  refusal,
+  theme,
+}: OfficeSetting = {}): FakeOffice {
   const opened: string[] = [];
   const startups: string[] = [];
   let unclosed = 0;
@@ -58,6 +66,7 @@ export function fakeOffice({ file, lacks = [], platform = 'PC', refusal }: Offic
       context: {
         host: 'Excel',
         platform,
+        officeTheme: theme,
         requirements: {
           isSetSupported: (set: string, version: string) => !lacks.includes(`${set} ${version}`),
         },

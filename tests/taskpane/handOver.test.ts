@@ -38,13 +38,13 @@ test('the workbook’s file is read whole, its copy told of, and opened beside i
   const makeCopy = jest.fn<ReturnType<CopyMaker>, Parameters<CopyMaker>>(async () => copy);
   await open(makeCopy);
   await pane.press('Make the copy');
-  await until(() => pane.root.querySelector('.report') !== null);
+  await until(() => pane.root.querySelector('.counts') !== null);
   expect(Buffer.from(makeCopy.mock.calls[0][0]).equals(Buffer.from(file))).toBe(true);
   expect(office.unclosed()).toBe(0);
   expect(pane.text('.counts')).toBe(
     '3live: they follow their inputs6frozen to their value1showed an error before, and still do',
   );
-  expect(pane.text('.report')).toContain('a fit: A1, A2, A3, A4 and 1 more');
+  expect(pane.text('#hand-over')).toContain('a fit: A1, A2, A3, A4 and 1 more');
   expect(office.opened).toEqual([]);
   await pane.press('Open the copy');
   expect(office.opened.map((text) => Buffer.from(text, 'base64').equals(Buffer.from(copy.bytes)))).toEqual([
@@ -62,7 +62,7 @@ test('while it is made it can be stopped, and then nothing is given', async () =
   await until(() => pane.text('#hand-over [role=status]').startsWith('calculating'));
   await pane.press('Stop');
   expect(pane.text('.notice')).toContain('no copy was made');
-  expect(pane.root.querySelector('.report, progress')).toBeNull();
+  expect(pane.root.querySelector('.counts, progress')).toBeNull();
   await pane.press('Make the copy'); // and it can be tried again
   await pane.press('Stop');
 });

@@ -4,11 +4,13 @@ import { workerWork } from '../../functions/longWork';
 import { associateAll, keepLoadedWithWorkbook } from '../../functions/runtime';
 import { blanksIn, excelPort } from '../../taskpane/excel';
 import { supportOf } from '../../taskpane/excel/support';
+import { officeIsDark } from '../../taskpane/excel/theme';
 import { h } from '../../taskpane/h';
 import { hostName, notice } from '../../taskpane/host';
 import { mountPane } from '../../taskpane/pane';
 import '../../taskpane/pane.css';
 import { startWorker } from '../../taskpane/startWorker';
+import { followTheme } from '../../taskpane/theme';
 import { copyOnWorker } from '../copying/copyOnWorker';
 import './taskpane.css';
 
@@ -29,6 +31,7 @@ async function start(root: HTMLElement): Promise<void> {
     return;
   }
   await Office.onReady();
+  followTheme(undefined, officeIsDark);
   const host = hostName();
   if (host === null) {
     root.replaceChildren(h('p', {}, 'Flaskpace works inside Excel: open it from the Home tab there.'));

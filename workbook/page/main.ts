@@ -3,6 +3,7 @@ import { workerWork } from '../../functions/longWork';
 import { h } from '../../taskpane/h';
 import { mountPane } from '../../taskpane/pane';
 import { startWorker } from '../../taskpane/startWorker';
+import { followTheme } from '../../taskpane/theme';
 import '../../taskpane/pane.css';
 import { copyOnWorker } from '../copying/copyOnWorker';
 import { demoWorkbook } from '../demo/demo';
@@ -21,15 +22,14 @@ import { waitingFor } from './waitingFor';
 const part = (id: string): HTMLElement => document.getElementById(id)!;
 
 async function start(): Promise<void> {
-  const dark = window.matchMedia('(prefers-color-scheme: dark)');
+  const isDark = followTheme((isDarkNow) => grid.setDark(isDarkNow));
   const gridElement = part('grid');
   gridElement.replaceChildren();
   const demo = demoWorkbook();
   const grid = createGrid(gridElement, demo, {
-    isDark: dark.matches,
+    isDark,
     longWork: workerWork(startWorker, waitingFor(part('long-work'))),
   });
-  dark.addEventListener('change', () => grid.setDark(dark.matches));
 
   const strip = fillStrip(part('strip'), {
     open: () => void documents.open(),

@@ -65,7 +65,7 @@ export function accessSuite(sheet: () => BenchPage): void {
 }
 
 export async function violations(
-  { page }: BenchPage,
+  { page }: Pick<BenchPage, 'page'>,
   include: readonly string[],
   rules?: readonly string[],
 ): Promise<string[]> {
