@@ -11,19 +11,26 @@ export function howInWords({ equations, method }: CellFunction): string {
   return `${equations.lines.map(inLine).join('; ')} (${quantities.join('; ')}). ${method}`;
 }
 
+/** Typed as degC, since a keyboard has no ring; read as °C. */
+export const asRead = (unit: string): string => unit.replace(/\bdegC\b/g, '°C');
+
 /** Columns of a table of arguments, after their names. */
 export const argumentHeadings = ['meaning', 'unit', 'must be', 'left out'] as const;
 
 /** What stands in them; empty where there is nothing to say. */
 export const argumentFacts = ({ help, unit, bounds, optional, whenOmitted }: Parameter): string[] => [
   help,
-  unit === '1' ? '' : unit,
+  unit === '1' ? '' : asRead(unit),
   bounds ? boundsInWords(bounds) : '',
-  optional ? (whenOmitted ?? 'not used') : 'needed',
+  optional ? asRead(whenOmitted ?? 'not used') : 'needed',
 ];
+
+/** What the rounding of the arithmetic leaves of nothing: an example’s numbers are far larger. */
+const rounding = 1e-14;
 
 /** A cell of an example, to eight digits. */
 export function exampleCell(value: CellValue): string {
   if (value instanceof CellError) return value.code;
-  return typeof value === 'number' ? String(Number(value.toPrecision(8))) : String(value ?? '');
+  if (typeof value !== 'number') return String(value ?? '');
+  return value !== 0 && Math.abs(value) < rounding ? '≈ 0' : String(Number(value.toPrecision(8)));
 }

@@ -1,4 +1,5 @@
 /** The table of functions in the README, worked out from the definitions. */
+import { asRead } from './documented';
 import { signature, type CellFunction, type Family } from './define';
 
 const families: Readonly<Record<Family, string>> = {
@@ -30,5 +31,5 @@ export const readmeTable = (catalogue: readonly CellFunction[]): string =>
 const table = (functions: readonly CellFunction[]): string[] => [
   '| function | answers | unit |',
   '|---|---|---|',
-  ...functions.map((f) => `| \`${signature(f)}\` | ${f.summary} | ${f.result.unit} |`),
+  ...functions.map((f) => `| \`${signature(f)}\` | ${f.summary} | ${asRead(f.result.unit)} |`),
 ];

@@ -1,7 +1,7 @@
 /** The reference of all functions in docs/functions.md, worked out from the definitions. */
 import { isRange, type CellResult } from './cell';
 import { signature, typedName, type CellFunction, type Equations } from './define';
-import { argumentFacts, argumentHeadings, exampleCell } from './documented';
+import { argumentFacts, argumentHeadings, asRead, exampleCell } from './documented';
 import { asLatex } from './equation/latex';
 import { byFamily } from './readmeTable';
 
@@ -22,7 +22,7 @@ function part(f: CellFunction): string {
   return [
     `### ${typedName(f)}`,
     f.summary,
-    `\`${signature(f)}\` in ${f.result.unit === '1' ? 'pure numbers' : f.result.unit}`,
+    `\`${signature(f)}\` in ${f.result.unit === '1' ? 'pure numbers' : asRead(f.result.unit)}`,
     parameterTable(f),
     ...(f.equations ? [typeset(f.equations), quantities(f.equations)] : []),
     `**How.** ${f.method}`,

@@ -37,7 +37,7 @@ export const anyRefusals: readonly Refusal[] = [
   { formula: '=PACE.COEFFICIENT({5;5;5},{8;4;2},1)', mend: 'Check the column of times: all are the same.' },
   {
     formula: '=PACE.GASVOLUME(20,"21 degrees",101)',
-    mend: 'Write the unit as degC, K, kPa, mmHg, mL, L, mol/L and so on.',
+    mend: 'Write the unit as degC (or °C), K, kPa, mmHg, mL, L, mol/L and so on.',
   },
   { formula: '=PACE.GASVOLUME(20,"-300 degC",101)', mend: 'Check the number and its unit.' },
   {

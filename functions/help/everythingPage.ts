@@ -7,9 +7,9 @@ import type { Picture } from './pictures/picture';
 
 export function everythingPage(catalogue: readonly CellFunction[], pictures: readonly Picture[]): string {
   const linkTo = (name: string): string => `#${name}`;
-  // each once, with the first function that it is of
+  // each once, with the function that it is of first of all
   const firstOf = ({ name }: CellFunction): readonly Picture[] =>
-    pictures.filter(({ functions }) => catalogue.find((f) => functions.includes(f.name))?.name === name);
+    pictures.filter(({ functions }) => functions[0] === name);
   const body = [
     '<h1>All functions</h1>',
     '<p class="screen">To print, or to read from end to end.</p>',

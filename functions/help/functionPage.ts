@@ -1,7 +1,7 @@
 /** The help page of one function, from its definition alone. */
 import { functionNamed } from '../catalogue';
 import { signature, typedName, type CellFunction } from '../define';
-import { argumentFacts, argumentHeadings } from '../documented';
+import { argumentFacts, argumentHeadings, asRead } from '../documented';
 import { equationSection } from './equations';
 import { exampleSection } from './exampleSheet';
 import { figure } from './figure';
@@ -74,7 +74,7 @@ const shapes: Readonly<Record<CellFunction['result']['shape'], string>> = {
 };
 
 function answerInWords({ result, parameters }: CellFunction): string {
-  const unit = result.unit === '1' ? 'a pure number' : `unit: ${result.unit}`;
+  const unit = result.unit === '1' ? 'a pure number' : `unit: ${asRead(result.unit)}`;
   const detail =
     'detail' in parameters
       ? '; with detail TRUE a row: value, standard uncertainty, lower and upper 95 % limit, degrees of freedom'

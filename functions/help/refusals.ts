@@ -1,6 +1,8 @@
 /** What a function says when it refuses, and what helps: the words come from the function itself. */
+import { isUnit } from '../../src/units';
 import { CellError } from '../cell';
 import type { CellFunction, Refusal } from '../define';
+import { asRead } from '../documented';
 import { calculate } from '../literal';
 import { boundsInWords, type Bounds, type Parameter } from '../parameters';
 import { escaped, table } from './html';
@@ -15,8 +17,11 @@ export function wordsOf(formula: string): CellError {
 
 export function refusalSection(f: CellFunction): string {
   const own = (f.refusals ?? []).map(refusalRow);
-  const bounds = Object.entries(f.parameters).flatMap(([name, parameter]) => boundsRow(name, parameter));
-  const rows = [...own, ...bounds];
+  const said = own.map(([cell]) => cell).join('\n');
+  const bounds = Object.entries(f.parameters)
+    .map(([name, parameter]) => boundsRow(name, parameter))
+    .filter((row) => row !== undefined && !said.includes(row[0].split(':')[0]));
+  const rows = [...own, ...(bounds as string[][])];
   const known = rows.length > 0 ? table(['the cell says', 'what helps'], rows) : '';
   return `${known}\n<p>What any function may say, of columns, gaps and units, stands in <a href="errors.html">When a cell shows an error</a>.</p>`;
 }
@@ -29,15 +34,17 @@ export function refusalRow({ formula, mend }: Refusal): string[] {
   ];
 }
 
-/** The rule that stands in the definition, broken once. */
-function boundsRow(name: string, { bounds, read, unit }: Parameter): string[][] {
-  const value = bounds && outside(bounds);
-  if (value === undefined) return [];
+/** The rule that stands in the definition, broken once; nothing where there is none. */
+function boundsRow(name: string, { bounds = {}, read, unit }: Parameter): string[] | undefined {
+  const value = outside(bounds);
+  if (value === undefined) return undefined;
+  const rule = boundsInWords(bounds);
+  const number = bounds.whole ? rule : /^\d/.test(rule) ? `a number, ${rule}` : `a number ${rule}`;
+  const mend = `Give ${number}${isUnit(unit) ? `, in ${asRead(unit)}` : ''}.`;
   try {
     read([[value]], name);
   } catch (error) {
-    const mend = `Give ${name} ${boundsInWords(bounds!)}${unit.includes(' ') || unit === '1' || unit === 'any' ? '' : `, in ${unit}`}.`;
-    return [[`<code>#VALUE!</code> ${escaped((error as Error).message)}`, escaped(mend)]];
+    return [`<code>#VALUE!</code> ${escaped((error as Error).message)}`, escaped(mend)];
   }
   throw new Error(`${name} takes ${value}, which its bounds do not`);
 }

@@ -2,7 +2,6 @@ import { eventRate } from '../../src/rate/event';
 import { convertColumn } from '../column';
 import { sayEvent } from '../builtIn/linear';
 import { defineFunction } from '../define';
-import { uncertaintyOf } from '../uncertaintyOf';
 import { stoichiometricNumber } from '../commonParameters';
 import { number, optional, readings } from '../parameters';
 
@@ -21,7 +20,7 @@ export default defineFunction({
   },
   method:
     'The mean rate until the event. Without a change it is 1/t, which compares runs whose event is the same. That it stands for the initial rate is common practice where little has reacted by then.',
-  uncertainty: uncertaintyOf.conversion,
+  uncertainty: 'None is given. Time the same event several times: the scatter of the answers tells.',
   parameters: {
     times: readings({ help: 'time until the event, one or many', unit: 'time', above: 0 }),
     change: optional(

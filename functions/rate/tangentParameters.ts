@@ -33,4 +33,4 @@ export const tangentEquations = {
 };
 
 export const tangentMethod =
-  'A polynomial through the nearest readings by unweighted least squares, on one side at the ends; of two readings equally near, the earlier counts. Left out, the number of readings is the one for which the expected squared error of the slopes, bend and scatter together, is smallest over the run.';
+  'A polynomial through the nearest readings by unweighted least squares, on one side at the ends; of two readings equally near, the earlier counts. With points left out, their number is the one for which the expected squared error of the slopes, bend and scatter together, is smallest over the run.';

@@ -6,7 +6,6 @@ import { CellError, shownCell, type CellRange, type CellValue } from '../cell';
 import { inRows, placeInWords } from '../column';
 import { sayClock } from '../builtIn/clock';
 import { defineFunction } from '../define';
-import { uncertaintyOf } from '../uncertaintyOf';
 import { isLeftOut, optional, required, single, text, type Parameter } from '../parameters';
 
 /** What a clock showed, cell by cell, in the shape given. */
@@ -73,7 +72,7 @@ export default defineFunction({
   summary: 'Time a run has taken, from what a stopwatch or a clock showed.',
   method:
     'A workbook keeps times as days; this gives them in a unit of your choice, to a microsecond. Clock times without a date may pass midnight: a step back by more than half a day starts the next one. 4:30 is hours and minutes, as the workbook itself reads it; 4:30.0 and "4 min 30 s" are minutes.',
-  uncertainty: uncertaintyOf.conversion,
+  uncertainty: 'None is given: a clock is taken at its word.',
   parameters: {
     times: clockReadings,
     unit: optional(text({ help: 'unit of the answer' }), 's'),

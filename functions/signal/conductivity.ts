@@ -37,7 +37,7 @@ export default defineFunction({
       undefined,
       'readings are taken as they are',
     ),
-    percent: optional(number({ help: 'change per degC at 25 degC', unit: '%', above: 0, atMost: 10 }), 2),
+    percent: optional(number({ help: 'change per °C at 25 °C', unit: '%', above: 0, atMost: 10 }), 2),
   },
   result: { unit: 'of initial', shape: 'as given' },
   example: {

@@ -17,7 +17,7 @@ const usualEnergy = 83144;
 export default defineFunction({
   name: 'MEANTEMP',
   family: 'temperature',
-  summary: 'Mean kinetic temperature of a logged history, degC.',
+  summary: 'Mean kinetic temperature of a logged history, °C.',
   equations: {
     lines: ['exp(−E_a/(RT_m)) = (∑ᵢ wᵢ exp(−E_a/(RTᵢ)))/(∑ᵢ wᵢ)'],
     where: {
@@ -30,7 +30,8 @@ export default defineFunction({
   },
   method:
     'The one temperature that does as much as the history did; warm spells count for more than in the plain mean. With times each reading counts from halfway to the reading before until halfway to the next, so that intervals may differ and a gap is shared by its neighbours; readings of one time share theirs. Without times all count alike. 83.144 kJ/mol is the activation energy common in the stability guidelines.',
-  uncertainty: 'None is given: the logger’s own uncertainty carries over almost unchanged.',
+  uncertainty:
+    'None is given. A shift of the whole log, as by a logger that shows half a degree too much, carries over almost unchanged.',
   parameters: {
     temperatures: temperatures({ help: 'readings of the logger' }),
     times: optional(
