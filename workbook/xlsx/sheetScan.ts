@@ -77,8 +77,9 @@ export function scanSheet(
   let child: ScannedChild | undefined;
   let lastColumn = -1;
   let depth = 0;
-  /** How deep a phonetic hint stands in a text, of which it is no part. */
-  let hint = 0;
+  /** Whether what comes next is text of a cell: not the space between elements, nor a phonetic hint. */
+  let isText = false;
+  let isHint = false;
 
   const holder = (end: number, closed: boolean): Holder => {
     const start = tagStart(xml, end);
@@ -112,12 +113,15 @@ export function scanSheet(
       } else if (depth === 5 && cell) {
         child = { start: tagStart(xml, end), end: -1, name, attributes, text: '' };
         cell.children.push(child);
-      } else if (name === 'rPh') {
-        hint = depth;
+        isText = name !== 'is';
+      } else if (cell) {
+        isHint ||= name === 'rPh';
+        isText = name === 't' && !isHint;
       }
     },
-    close(_tag, end) {
-      if (depth === hint) hint = 0;
+    close({ name }, end) {
+      isText = false;
+      if (localName(name) === 'rPh') isHint = false;
       if (depth === 5 && child) {
         child.end = end;
         child = undefined;
@@ -135,7 +139,7 @@ export function scanSheet(
       depth -= 1;
     },
     text(text) {
-      if (child && hint === 0) child.text += text;
+      if (child && isText) child.text += text;
     },
   });
   return { prefix, rows, data, dimension, widths };

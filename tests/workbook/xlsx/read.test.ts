@@ -49,6 +49,32 @@ describe('values', () => {
     ]);
   });
 
+  test('the space by which a writer sets its elements apart is no part of a text', () => {
+    const book = read(
+      `<row r="1">
+        <c r="A1" t="inlineStr">
+          <is>
+            <t>plain</t>
+          </is>
+        </c>
+        <c r="B1" t="inlineStr">
+          <is>
+            <r><rPr><b/></rPr>
+              <t xml:space="preserve">in </t>
+            </r>
+            <r><t>parts</t></r>
+          </is>
+        </c>
+        <c r="C1">
+          <f>A1&amp;"x"</f>
+          <v>7</v>
+        </c>
+      </row>`,
+    );
+    expect(['A1', 'B1', 'C1'].map((name) => cell(book, name)?.value)).toEqual(['plain', 'in parts', 7]);
+    expect(cell(book, 'C1')?.formula).toBe('A1&"x"');
+  });
+
   test('what a formula spilled is left out, since nobody typed it', () => {
     const book = read(
       '<row r="1"><c r="A1" cm="1"><f t="array" ref="A1:A2">_xlfn.SEQUENCE(2)</f><v>1</v></c></row><row r="2"><c r="A2"><v>2</v></c></row><row r="3"><c r="A3"><v>2</v></c></row>',
