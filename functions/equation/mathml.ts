@@ -69,10 +69,11 @@ function quantity({ letter, isChange, below, mark, of }: QuantitySign): string {
   return `<mrow>${change}${sign}${species}</mrow>`;
 }
 
-/** A product of more than letters reads better with a little room; operators bring their own. */
+/** Functions and fractions read better with a little room; operators bring their own. */
 function isSetApart(parts: readonly Part[], place: number): boolean {
   if (place === 0) return false;
-  const [before, here] = [parts[place - 1], parts[place]];
-  const isQuiet = ({ kind }: Part): boolean => kind !== 'operator' && kind !== 'function' && kind !== 'sum';
-  return isQuiet(before) && isQuiet(here) && (here.kind === 'fraction' || before.kind === 'fraction');
+  const [before, here] = [parts[place - 1].kind, parts[place].kind];
+  if (before === 'function') return here !== 'brackets';
+  if (before === 'operator' || before === 'sum' || here === 'operator') return false;
+  return here === 'function' || here === 'fraction' || before === 'fraction';
 }

@@ -35,10 +35,10 @@ pre { margin: 0.5rem 0; padding: 0.6rem 0.8rem; border: 1px solid var(--rule); b
 table { border-collapse: collapse; width: 100%; }
 th, td { padding: 0.35rem 0.9rem 0.35rem 0; border-bottom: 1px solid var(--rule); text-align: start; vertical-align: top; font-weight: normal; }
 thead th { color: var(--quiet); font-size: 0.9em; }
-table.cells { width: auto; font-variant-numeric: tabular-nums; }
+table.cells { width: max-content; font-variant-numeric: tabular-nums; }
 table.cells th, table.cells td { padding: 0.15rem 0.75rem; border: 1px solid var(--rule); }
 table.cells th { color: var(--quiet); text-align: center; }
-table.cells td { background: var(--card); }
+table.cells td { max-width: 20rem; background: var(--card); }
 .lead { font-size: 1.1rem; }
 .caution { padding: 0.6rem 0.8rem; background: var(--warn-paper); border-radius: 4px; }
 .quiet { color: var(--quiet); }
@@ -91,7 +91,10 @@ input { font: inherit; padding: 0.45rem 0.6rem; width: 100%; color: inherit; bac
   body { max-width: none; padding: 0; font-size: 10pt; background: none; }
   h1, h2, h3 { break-after: avoid; }
   figure, tr, pre, .equations { break-inside: avoid; }
-  .one-function { break-before: page; }
+  .wide { overflow: visible; }
+  table.cells { width: auto; }
+  .one-function + .one-function { border-top: 1px solid var(--rule); }
+  h2:has(+ .one-function) { break-before: page; }
   a { color: inherit; text-decoration: none; }
 }
 `;
