@@ -12,6 +12,7 @@ import { paneSuite } from './suites/pane';
 import { portSuite } from './suites/port';
 import { sheetSuite } from './suites/sheet';
 import { startSuite } from './suites/start';
+import { tablesSuite } from './suites/tables';
 
 let bench: PageBench;
 let sheet: BenchPage;
@@ -27,6 +28,7 @@ describe('files', () => filesSuite(() => sheet));
 describe('the pane', () => paneSuite(() => sheet));
 describe('whole jobs in the pane', () => journeysSuite(() => sheet));
 describe('handing over', () => handOverSuite(() => sheet));
+describe('tables of any kind', () => tablesSuite(() => sheet));
 describe('the port', () => portSuite(() => sheet));
 describe('help', () => helpSuite(() => sheet));
 describe('everyone', () => accessSuite(() => sheet));

@@ -80,3 +80,33 @@ test('temperature: a table over temperature is known as one', async () => {
   await pane.press('Put it in');
   expect(await holds('C2')).toBe('=PACE.ARRHENIUS(Run!A2:A3,Run!B2:B3)');
 });
+
+test('runs in rows: formulas take rows, and the answers stand below', async () => {
+  await open([
+    ['t / min', ...times],
+    ['A1', ...times.map((t) => 0.8 * 0.5 ** (t / 10))],
+    ['A2', ...times.map((t) => 0.8 * 0.5 ** (t / 20))],
+  ]);
+  await pane.tick('#task-many');
+  expect(pane.text('#formula')).toBe('=PACE.SURVEY(Run!B1:G1,Run!B2:G3,1)');
+  await pane.tick('#task-rate');
+  await pane.tick('#kind-column');
+  await pane.press('Put it in');
+  expect(await holds('A4')).toBe('rate (reading unit per min)');
+  expect(await holds('B4')).toBe('=PACE.ALONG(Run!B1:G1,Run!B2:G2)');
+  await pane.press('Undo');
+  expect([await holds('A4'), await holds('B4')]).toEqual(['', '']);
+});
+
+test('runs under each other: a formula each, beside the first', async () => {
+  const rows = (name: string, halfLife: number): CellValue[][] =>
+    times.map((t) => [name, t, 0.8 * 0.5 ** (t / halfLife)]);
+  await open([['well', 't / min', 'A'], ...rows('A1', 10), ...rows('A2', 20)]);
+  await pane.choose('#run-name', '7');
+  await pane.tick('#task-order');
+  expect(pane.text('#order .result .value')).toBe('0.03466 min⁻¹');
+  await pane.tick('#task-many');
+  await pane.press('Put it in');
+  expect(await holds('D3')).toBe('A2');
+  expect(await holds('E3')).toBe('=PACE.COEFFICIENT(Run!B8:B13,Run!C8:C13,1)');
+});
