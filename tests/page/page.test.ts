@@ -28,7 +28,11 @@ describe('files', () => filesSuite(() => sheet));
 describe('the pane', () => paneSuite(() => sheet));
 describe('whole jobs in the pane', () => journeysSuite(() => sheet));
 describe('handing over', () => handOverSuite(() => sheet));
-describe('tables of any kind', () => tablesSuite(() => sheet));
+describe('tables of any kind', () =>
+  tablesSuite(
+    () => sheet,
+    () => bench,
+  ));
 describe('the port', () => portSuite(() => sheet));
 describe('help', () => helpSuite(() => sheet));
 describe('everyone', () => accessSuite(() => sheet));

@@ -1,7 +1,7 @@
 /** The pane on tables as people make them, and on the demo as it opens. */
 import { CellError, type CellValue } from '../../../functions/cell';
 import { oneOfEachKind } from '../../taskpane/faultySheets';
-import { waitUntil, type BenchPage } from '../bench';
+import { waitUntil, type BenchPage, type PageBench } from '../bench';
 
 const times = [0, 10, 20, 30, 40, 50, 60];
 /** Halved in its own time: k = ln 2 / half life. */
@@ -22,7 +22,7 @@ const formulas: Readonly<Record<string, string>> = { '#DIV/0!': '=1/0', '#N/A': 
 const typed = (cell: CellValue): number | string =>
   cell instanceof CellError ? formulas[cell.code] : ((cell ?? '') as number | string);
 
-export function tablesSuite(sheet: () => BenchPage): void {
+export function tablesSuite(sheet: () => BenchPage, bench: () => PageBench): void {
   const pane = (selector: string) => sheet().page.locator(`#pane ${selector}`);
   const press = (label: RegExp | string): Promise<void> =>
     sheet().page.getByRole('complementary').getByRole('button', { name: label, exact: true }).click();
@@ -112,17 +112,21 @@ export function tablesSuite(sheet: () => BenchPage): void {
     expect(await sheet().page.evaluate(() => String(window.getSelection()))).toBe(whole);
   });
 
-  test('from the demo as it opens, one click in the data and one in the pane lead to a rate', async () => {
-    await sheet().show([['nothing here']]);
-    await sheet().select("'Gas run'!A1");
-    await says('#run .hint', /^Click a cell/);
-    await sheet().showDemo();
-    await sheet().select("'Gas run'!B8");
-    await says('#rate .result .value', /mL\/s$/);
-    await press('Put it in');
-    await says('.notice.good', 'written: rate at');
-    const [, target] = /'Gas run'!([A-Z]+\d+)$/.exec(await pane('.notice').innerText())!;
-    await waitUntil(async () => typeof (await cell(target)) === 'number');
-    expect(await cell(target)).toBeGreaterThan(0);
+  test('the demo, just opened: one click in the data and one in the pane lead to a rate', async () => {
+    const fresh = await bench().open();
+    const beside = fresh.page.getByRole('complementary');
+    await fresh.select("'Gas run'!B8");
+    await beside
+      .locator('#rate .result .value')
+      .filter({ hasText: /mL\/s$/ })
+      .waitFor();
+    await beside.getByRole('button', { name: 'Put it in', exact: true }).click();
+    const written = beside.locator('.notice.good');
+    await written.filter({ hasText: /^written: rate at/ }).waitFor();
+    const [target] = /'Gas run'![A-Z]+\d+$/.exec(await written.innerText())!;
+    const rate = async (): Promise<unknown> => (await fresh.cells(target))[0][0];
+    await waitUntil(async () => typeof (await rate()) === 'number');
+    expect(await rate()).toBeGreaterThan(0);
+    await fresh.close();
   });
 }
