@@ -87,6 +87,10 @@ export function signature(f: CellFunction): string {
   return `${typedName(f)}(${parameters.join(', ')})`;
 }
 
+/** Whether its answer can take more than one cell: `[detail]` turns one value into a row. */
+export const canSpill = (f: Pick<CellFunction, 'result' | 'parameters'>): boolean =>
+  f.result.shape !== 'one value' || 'detail' in f.parameters;
+
 export function defineFunction<const P extends Parameters>(definition: Definition<P>): CellFunction {
   return definition as unknown as CellFunction;
 }

@@ -1,7 +1,7 @@
 /** What Excel must be told of each function before it is ever called: the content of functions.json. */
 import { mayBeLong } from './caller';
 import { boundsInWords, type Parameter } from './parameters';
-import type { CellFunction } from './define';
+import { canSpill, type CellFunction } from './define';
 import { pageName } from './help/pageName';
 
 export interface FunctionsMetadata {
@@ -88,9 +88,6 @@ export function parameterHelp({ help, unit, bounds, optional, whenOmitted }: Par
 }
 
 const unitlessUnits = new Set(['', '1', 'any', 'text']);
-
-/** `[detail]` turns one value into a row. */
-const canSpill = (f: CellFunction): boolean => f.result.shape !== 'one value' || 'detail' in f.parameters;
 
 const takesRanges = (f: CellFunction): boolean =>
   Object.values(f.parameters).some(({ dimension }) => dimension === 'matrix');

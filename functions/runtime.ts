@@ -2,7 +2,7 @@
 import { sharingCaller, type Caller } from './caller';
 import { catalogue } from './catalogue';
 import { CellError, isRange, type CellRange, type CellResult, type CellValue, type ErrorCode } from './cell';
-import type { CellFunction } from './define';
+import { canSpill, type CellFunction } from './define';
 
 /** The part of Excel's global that is used, so that it can be absent and can be stood in for. */
 export interface CustomFunctionsHost {
@@ -98,7 +98,9 @@ export function excelHandler(
   const answerTo = (args: readonly unknown[], stop?: AbortSignal): unknown => {
     const cells = args.map((argument) => fromExcel(argument, host));
     const result = caller.call(f, cells, stop);
-    return result instanceof Promise ? result.then((late) => forExcel(late, host)) : forExcel(result, host);
+    return result instanceof Promise
+      ? result.then((late) => forExcel(f, late, host))
+      : forExcel(f, result, host);
   };
   return (...all) => {
     const args = all.slice(0, count);
@@ -162,11 +164,16 @@ function errorFromExcel(error: { readonly code?: string; readonly message?: stri
   return new CellError((error.code as ErrorCode | undefined) ?? '#VALUE!', error.message ?? '');
 }
 
-/** @throws Excel's own error object where the whole result is an error */
-function forExcel(result: CellResult, host: CustomFunctionsHost): unknown {
+/**
+ * What is declared to spill is handed over as rows, even where it is one cell.
+ *
+ * @throws Excel's own error object where the whole result is an error
+ */
+function forExcel(f: CellFunction, result: CellResult, host: CustomFunctionsHost): unknown {
   if (isRange(result)) return (result as CellRange).map((row) => row.map((cell) => cellForExcel(cell, host)));
   if (result instanceof CellError) throw errorForExcel(result, host);
-  return result;
+  const cell = cellForExcel(result, host);
+  return canSpill(f) ? [[cell]] : cell;
 }
 
 const cellForExcel = (cell: CellValue, host: CustomFunctionsHost): unknown =>

@@ -1,42 +1,84 @@
-/** The same answers in Excel, as its side is documented, as in the local workbook: every function, cell for cell. */
+/** The same answers in Excel, as its side is documented, as when a function is called by itself, cell for cell. */
 import { callFunction } from '../../functions/call';
+import { sharingCaller } from '../../functions/caller';
 import { catalogue } from '../../functions/catalogue';
-import { CellError, isRange, type CellResult } from '../../functions/cell';
-import { typedName, type CellFunction } from '../../functions/define';
-import { asShownByExcel, throughExcel } from '../support/excelHost';
+import type { CellResult } from '../../functions/cell';
+import { typedName } from '../../functions/define';
+import type { LongWork } from '../../functions/longWork';
+import { asShownByExcel, ExcelError, excelSide } from '../support/excelHost';
+import { functionCases, withCell } from '../support/functionCases';
 import { callIn } from '../support/literal';
 
-type Arguments = (CellResult | undefined)[];
+const expected = (one: (typeof functionCases)[number]): unknown =>
+  asShownByExcel(callFunction(one.f, one.args));
 
-const each = catalogue.map((f) => [typedName(f), f] as const);
-
-/** The same call with one cell of each range changed: the last but one, where there are three or more. */
-const withCell = (args: Arguments, cell: CellResult): Arguments =>
-  args.map((argument) => {
-    if (argument === undefined || !isRange(argument) || argument.length < 3) return argument;
-    const place = argument.length - 2;
-    return argument.map((row, r) => (r === place ? row.map(() => cell as never) : row));
-  });
-
-async function agree(f: CellFunction, args: Arguments): Promise<void> {
-  expect(await throughExcel(f, args)).toEqual(asShownByExcel(callFunction(f, args)));
-}
-
-describe.each(each)('%s through Excel', (_, f) => {
-  const { args } = callIn(f.example.formula);
-
-  test('its example, with arguments left out as null', () => agree(f, args));
-  test('a blank cell in every range, which arrives as 0', () => agree(f, withCell(args, null)));
-  test('a true zero in every range, which arrives as 0 too', () => agree(f, withCell(args, 0)));
-  test('words in every range', () => agree(f, withCell(args, 'n/a')));
-  test('an error cell in every range', () => agree(f, withCell(args, new CellError('#DIV/0!'))));
-  test('nothing at all', () => agree(f, []));
+test.each(functionCases.map((one) => [one.title, one] as const))('%s', async (_, one) => {
+  expect(await excelSide().call(one.f, one.args).shown).toEqual(expected(one));
 });
 
 test('a blank and a zero are told apart: the answers differ', async () => {
   const { f, args } = callIn('=PACE.GASVOLUME({1;2;3},20,100)');
-  const blank = (await throughExcel(f, withCell(args, null))) as unknown[][];
-  const zero = (await throughExcel(f, withCell(args, 0))) as unknown[][];
+  const excel = excelSide();
+  const [blank, zero] = await Promise.all([null, 0].map((cell) => excel.call(f, withCell(args, cell)).shown));
   expect(blank[1]).toEqual(['']);
   expect(zero[1]).toEqual([0]);
 });
+
+/** Looks into the sheet and long work that end when they are told to. */
+function slowHost() {
+  const waiting: (() => void)[] = [];
+  const stops: AbortSignal[] = [];
+  const longWork: LongWork = {
+    run: (f, args, stop) =>
+      new Promise<CellResult>((settle) => {
+        stops.push(stop!);
+        waiting.push(() => settle(callFunction(f, args)));
+      }),
+  };
+  const beforeLook = (): Promise<void> => new Promise((settle) => waiting.push(settle));
+  return { waiting, stops, excel: excelSide({ caller: sharingCaller(longWork), beforeLook }) };
+}
+
+/** Lets all that can go on go on. */
+const breathe = (): Promise<void> => new Promise((resolve) => setImmediate(resolve));
+
+test('all calls at once: looks into the sheet and long work end last first, and every answer is the right one', async () => {
+  const { waiting, excel } = slowHost();
+  const calls = functionCases.map((one) => ({ one, shown: excel.call(one.f, one.args).shown }));
+  const all = Promise.all(calls.map(({ shown }) => shown));
+  let steps = 0;
+  for (await breathe(); waiting.length > 0; await breathe(), steps++) waiting.pop()!();
+  expect(steps).toBeGreaterThan(20);
+  expect(await all).toEqual(calls.map(({ one }) => expected(one)));
+});
+
+describe.each(catalogue.filter(({ isLong }) => isLong === true).map((f) => [typedName(f), f] as const))(
+  '%s, which takes long',
+  (_, f) => {
+    const { args } = callIn(f.example.formula);
+
+    test('is cancelled: its cell gets an error, and nobody goes on working', async () => {
+      const { stops, waiting, excel } = slowHost();
+      const { shown, cancel } = excel.call(f, args);
+      // a zero among the arguments is looked at first
+      while (stops.length === 0) {
+        await breathe();
+        if (stops.length === 0) waiting.pop()!();
+      }
+      cancel();
+      expect(await shown).toEqual([[new ExcelError('#N/A', expect.stringContaining('stopped') as never)]]);
+      expect(stops[0].aborted).toBe(true);
+    });
+
+    test('is asked for by two cells: one calculation, and one cell can leave', async () => {
+      const { stops, waiting, excel } = slowHost();
+      const [left, stayed] = [excel.call(f, args), excel.call(f, args)];
+      for (await breathe(); stops.length === 0; await breathe()) waiting.splice(0).forEach((go) => go());
+      left.cancel();
+      await left.shown;
+      for (await breathe(); waiting.length > 0; await breathe()) waiting.pop()!();
+      expect(await stayed.shown).toEqual(asShownByExcel(callFunction(f, args)));
+      expect(stops).toHaveLength(1);
+    });
+  },
+);
