@@ -56,7 +56,7 @@ export interface Actions {
   pointAt(what: 'cell' | 'selection', take: (name: string) => Promise<void>): Promise<void>;
   changeTarget(typed: string): Promise<void>;
   targetActiveCell(): Promise<void>;
-  changeOptions(part: { withHeading?: boolean; withDetail?: boolean }): Promise<void>;
+  changeOptions(part: { withHeading?: boolean; withDetail?: boolean; withChart?: boolean }): Promise<void>;
   putIn(overwrite: boolean): Promise<void>;
   declineOverwrite(): void;
   undoLast(): Promise<void>;

@@ -71,6 +71,7 @@ export interface PutChoice {
   readonly isOwn: boolean;
   readonly withHeading: boolean;
   readonly withDetail: boolean;
+  readonly withChart: boolean;
   /** Cells to be filled that hold something now. */
   readonly inUse: readonly string[];
   /** The person has asked to write: say yes or no to these cells. */
@@ -84,7 +85,15 @@ export const firstChoices: Choices = {
   many: { picked: null, answer: 'survey' },
   temperature: { temperatures: null, coefficients: null, uncertainties: null, at: '', answer: 'energy' },
   lookup: { words: '', chosen: '' },
-  put: { target: '', isOwn: false, withHeading: true, withDetail: false, inUse: [], question: null },
+  put: {
+    target: '',
+    isOwn: false,
+    withHeading: true,
+    withDetail: false,
+    withChart: false,
+    inUse: [],
+    question: null,
+  },
 };
 
 export interface Choices {

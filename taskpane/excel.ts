@@ -1,6 +1,7 @@
 /** The workbook port over Office.js; nothing but this and its folder calls it. Each call is one batch with as few syncs as it can do with. */
 import { cellName, parseArea, type Area } from '../functions/address';
 import { CellError, type CellRange, type CellValue, type ErrorCode } from '../functions/cell';
+import { drawChart, removeChart, type DrawnChart } from './excel/chart';
 import { excelFiles } from './excel/files';
 import { allSupport, type HostSupport } from './excel/support';
 import {
@@ -17,6 +18,7 @@ const contents = { values: true, valueTypes: true };
 
 /** A cell as it was: its formula, or its value where it has none. */
 interface Snapshot {
+  readonly chart?: DrawnChart;
   readonly blocks: readonly {
     readonly area: SheetArea;
     readonly formulas: unknown[][];
@@ -24,9 +26,10 @@ interface Snapshot {
   }[];
 }
 
-export function excelPort({ name, files }: HostSupport = allSupport): WorkbookPort {
+export function excelPort({ name, files, charts }: HostSupport = allSupport): WorkbookPort {
   return {
     host: name,
+    canChart: charts,
     ...(files && { files: excelFiles }),
     selection: () => Excel.run(readSelection),
     regionAroundActiveCell: () => Excel.run(readRegion),
@@ -192,7 +195,7 @@ const reachOf = ({ area, spills }: CellToWrite): SheetArea => ({ ...area, ...spi
 async function write(
   context: Excel.RequestContext,
   cells: readonly CellToWrite[],
-  { overwrite, description }: { readonly overwrite: boolean; readonly description: string },
+  { overwrite, description, chart }: Parameters<WorkbookPort['write']>[1],
 ): Promise<WriteReceipt> {
   const sheets = new Map<string, Excel.Worksheet>();
   for (const { area } of cells) {
@@ -206,20 +209,24 @@ async function write(
   await context.sync();
   const inUse = targets.flatMap(({ cell, range }) => filledCells(range, reachOf(cell)));
   if (inUse.length > 0 && !overwrite) throw new CellsInUse(inUse);
-  const snapshot: Snapshot = {
-    blocks: targets.map(({ cell, range: { formulas, numberFormat } }) => ({
-      area: reachOf(cell),
-      formulas,
-      numberFormat,
-    })),
-  };
+  const blocks: Snapshot['blocks'] = targets.map(({ cell, range: { formulas, numberFormat } }) => ({
+    area: reachOf(cell),
+    formulas,
+    numberFormat,
+  }));
   for (const { cell, range } of targets) {
     // what stands where a formula will spill would stop it
     if (inUse.length > 0) range.clear(Excel.ClearApplyTo.contents);
     if (cell.numberFormats) range.numberFormat = cell.numberFormats as (string | null)[][]; // null: as it is
     fill(rangeOf(sheets.get(cell.area.sheet)!, cell.area), cell);
   }
+  const sheet = chart && (await sheetNamed(context, chart.at.sheet));
+  const drawn = sheet && drawChart(sheet, (area) => rangeOf(sheet, area), chart);
   await context.sync();
+  const snapshot: Snapshot = {
+    blocks,
+    ...(drawn && { chart: { sheet: chart!.at.sheet, name: drawn.name } }),
+  };
   return { description, area: around(cells.map(reachOf)), snapshot };
 }
 
@@ -236,7 +243,8 @@ function asTyped(value: CellValue): string | number | boolean {
 }
 
 async function putBack(context: Excel.RequestContext, receipt: WriteReceipt): Promise<void> {
-  const { blocks } = receipt.snapshot as Snapshot;
+  const { blocks, chart } = receipt.snapshot as Snapshot;
+  if (chart) await removeChart(context, chart);
   const targets: Excel.Range[] = [];
   for (const { area } of blocks) {
     const range = rangeOf(await sheetNamed(context, area.sheet), area);

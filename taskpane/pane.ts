@@ -89,7 +89,7 @@ function oneAtATime(look: () => Promise<void>): () => void {
 }
 
 /** What the views show of the workbook's host; they ask nothing of it. */
-type Host = Pick<WorkbookPort, 'host' | 'files'>;
+type Host = Pick<WorkbookPort, 'host' | 'files' | 'canChart'>;
 
 type Step = (scene: Scene, actions: Actions, host: Host) => HTMLElement;
 
@@ -112,7 +112,7 @@ export function view(scene: Scene, actions: Actions, host: Host): HTMLElement {
     runStep(scene, actions),
     taskBar(task, actions),
     steps[task](scene, actions, host),
-    task !== 'handOver' && putInStep(scene, actions),
+    task !== 'handOver' && putInStep(scene, actions, host.canChart),
     h('p', { className: `notice ${notice?.tone ?? ''}`, role: 'status' }, notice?.words ?? ''),
   );
 }

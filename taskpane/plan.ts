@@ -2,7 +2,7 @@
 import { areaName, parseArea } from '../functions/address';
 import type { PutChoice } from './choices';
 import type { Insertion, Part } from './insertions/insertion';
-import type { CellToWrite, SheetArea } from './port';
+import type { CellToWrite, ChartToDraw, SheetArea } from './port';
 
 /** A cell to write whose formats are not worked out yet. */
 export type PlannedCell = Omit<CellToWrite, 'numberFormats'> & Pick<Part, 'formats'>;
@@ -21,6 +21,8 @@ export interface Plan {
   readonly area: SheetArea;
   /** The first cell below the headings. */
   readonly target: SheetArea;
+  /** Where one is asked for. */
+  readonly chart?: ChartToDraw;
   /** For the undo button: `rate at 30 s in 'Gas run'!E3`. */
   readonly description: string;
 }
@@ -50,6 +52,7 @@ export function planFor(insertion: Insertion, sheet: string, put: PutChoice): Pl
   const overlapped = reads.find((area) => meets(answer, area));
   if (overlapped)
     return `the answer would cover its own readings in ${areaName(overlapped)}: choose another cell`;
+  const area = headings.length > 0 ? withHeadings(answer, isLeft) : answer;
   return {
     cells: [
       ...headings.map((value, place) => ({
@@ -58,9 +61,22 @@ export function planFor(insertion: Insertion, sheet: string, put: PutChoice): Pl
       })),
       ...parts.map(({ down, right, ...rest }) => ({ area: cell(target, down, right), ...rest })),
     ],
-    area: headings.length > 0 ? withHeadings(answer, isLeft) : answer,
+    area,
     target,
+    ...(put.withChart && insertion.chart && { chart: chartBeside(area, answer, insertion) }),
     description: `${name} in ${areaName(target)}`,
+  };
+}
+
+/** One column clear of all that is put in. */
+function chartBeside(area: SheetArea, answer: SheetArea, { name, chart }: Insertion): ChartToDraw {
+  const { axes, x, y, isFit } = chart!;
+  const readings = { name: axes.y, x, y, isLine: false };
+  return {
+    title: isFit ? `${axes.y}: ${name}` : axes.y,
+    axes,
+    series: isFit ? [readings, { name, x, y: answer, isLine: true }] : [readings],
+    at: { ...area, column: area.column + area.columns + 1, rows: 1, columns: 1 },
   };
 }
 

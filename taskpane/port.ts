@@ -23,6 +23,21 @@ export interface CellToWrite {
   readonly numberFormats?: readonly (readonly (string | null)[])[];
 }
 
+/** A scatter chart of columns, or rows, of one sheet. */
+export interface ChartToDraw {
+  readonly title: string;
+  readonly axes: { readonly x: string; readonly y: string };
+  /** Points, or a line through them. */
+  readonly series: readonly {
+    readonly name: string;
+    readonly x: SheetArea;
+    readonly y: SheetArea;
+    readonly isLine: boolean;
+  }[];
+  /** The cell under its upper left corner. */
+  readonly at: SheetArea;
+}
+
 /** What a write changed, enough to put it back. Opaque to the pane. */
 export interface WriteReceipt {
   readonly description: string;
@@ -55,6 +70,8 @@ export interface WorkbookPort {
   readonly host: string;
   /** Left out where the host gives no files. */
   readonly files?: WorkbookFiles;
+  /** Whether charts can be drawn over its cells. */
+  readonly canChart: boolean;
   /** The selected cells, trimmed to the used part of the sheet; `null` when nothing sensible is selected. */
   selection(): Promise<RangeReading | null>;
   /** The block of filled cells around the active cell. */
@@ -69,7 +86,12 @@ export interface WorkbookPort {
   /** Writes all or nothing. @throws CellsInUse unless `overwrite` */
   write(
     cells: readonly CellToWrite[],
-    options: { readonly overwrite: boolean; readonly description: string },
+    options: {
+      readonly overwrite: boolean;
+      readonly description: string;
+      /** Only where it can be drawn. */
+      readonly chart?: ChartToDraw;
+    },
   ): Promise<WriteReceipt>;
   /** Puts back what a write changed. */
   undo(receipt: WriteReceipt): Promise<void>;

@@ -37,6 +37,7 @@ export function localPort(grid: Grid, files: WorkbookFiles): WorkbookPort {
   return {
     host: 'local workbook',
     files,
+    canChart: false,
     async selection() {
       const selected = grid.selected();
       const used = selected && usedPart(grid, selected);

@@ -72,14 +72,15 @@ export function putting(bench: Bench, work: LongWork): Putting {
   }
 
   /** All or nothing where it is little; bit by bit, so that it can be stopped, where it is much. */
-  async function write({ cells, area, description }: Plan, overwrite: boolean): Promise<boolean> {
+  async function write({ cells, area, chart, description }: Plan, overwrite: boolean): Promise<boolean> {
     const { table, run, reading, deeds } = store.state;
     const bits = inBits(cells);
     const inUse = overwrite || bits.length === 1 ? [] : await port.occupied(area);
     if (inUse.length > 0) throw new CellsInUse(inUse);
     const receipts: WriteReceipt[] = [];
     const one = async (bit: readonly PlannedCell[]): Promise<void> => {
-      receipts.push(await port.write(bit.map(finished), { overwrite, description }));
+      const withChart = port.canChart && bit === bits[bits.length - 1] ? { chart } : {};
+      receipts.push(await port.write(bit.map(finished), { overwrite, description, ...withChart }));
     };
     try {
       if (bits.length > 1) return await work.through('writing', bits, one);

@@ -3,7 +3,7 @@ import { standardRowHeadings } from '../../functions/results';
 import type { Answered, Estimate } from '../calls/estimate';
 import { standardRowFormats, turned, type NumberFormats } from '../numberFormats';
 import type { CellToWrite, SheetArea } from '../port';
-import type { Run, Table } from '../runs';
+import { areaOf, headingOf, type Run, type Table } from '../runs';
 
 export interface Size {
   readonly rows: number;
@@ -17,6 +17,14 @@ export interface Part extends Omit<CellToWrite, 'area' | 'numberFormats'> {
   readonly formats?: () => NumberFormats;
 }
 
+/** The readings over their times, and the answer as a line where it is one through them. */
+export interface ChartOfRun {
+  readonly axes: { readonly x: string; readonly y: string };
+  readonly x: SheetArea;
+  readonly y: SheetArea;
+  readonly isFit: boolean;
+}
+
 export interface Insertion {
   /** For headings and the undo button: `rate at 30 s`. */
   readonly name: string;
@@ -28,6 +36,8 @@ export interface Insertion {
   readonly headingsStand?: 'above' | 'left';
   /** The cells that it reads, which it must not cover. */
   readonly reads: readonly SheetArea[];
+  /** What a chart beside it would show. */
+  readonly chart?: ChartOfRun;
   /** Whether uncertainty and limits can stand beside the value. */
   readonly hasDetail: boolean;
   /** Whether it has a cell a reading, and stands beside them. */
@@ -54,6 +64,13 @@ export function oneFormula(
 export function estimateFormats(answer: Answered<Estimate>, columns: number): NumberFormats {
   return 'ok' in answer ? [standardRowFormats(answer.ok).slice(0, columns)] : [];
 }
+
+export const chartOf = (table: Table, run: Run, isFit: boolean): ChartOfRun => ({
+  axes: { x: headingOf(table, run.timeColumn).text, y: headingOf(table, run.readingColumn).text },
+  x: areaOf(table, run.timeColumn, run),
+  y: areaOf(table, run.readingColumn, run),
+  isFit,
+});
 
 /** What has a cell a reading lies as the run does: in a row beside a row, its headings left of it. */
 export function alongRun({ isTurned }: Table, insertion: Insertion): Insertion {

@@ -105,6 +105,7 @@ function inLines(table: Table, runs: readonly OneOfMany[], each: readonly Insert
   const { isTurned } = table;
   return {
     ...each[0],
+    chart: undefined,
     name: counted(each[0].name, runs.length),
     parts: each.flatMap(({ parts }, place) =>
       parts.map((part) => moved(part, isTurned ? [place * size.rows, 0] : [0, place * size.columns])),
@@ -128,6 +129,7 @@ function inStretches(table: Table, runs: readonly OneOfMany[], each: readonly In
   const rows = lastRow - top + 1;
   return {
     ...each[0],
+    chart: undefined,
     name: counted(each[0].name, runs.length),
     parts: each.flatMap(({ parts }, place) => {
       const below = runs[place].run.firstRow - top;

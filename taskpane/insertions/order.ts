@@ -7,6 +7,7 @@ import { headingOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
 import {
   alongRun,
+  chartOf,
   detailColumns,
   estimateFormats,
   headingsFor,
@@ -38,6 +39,7 @@ export function orderInsertion(
     headings: order.answer === 'orders' ? [] : headingsFor(name, unitFor(table, run, order), detail),
     reads: readsOf(table, run),
     hasDetail,
+    ...(order.answer !== 'orders' && { chart: chartOf(table, run, order.answer === 'curve') }),
   };
   return order.answer === 'curve' ? alongRun(table, insertion) : insertion;
 }

@@ -6,6 +6,7 @@ import { areaOf, headingOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
 import {
   alongRun,
+  chartOf,
   detailColumns,
   estimateFormats,
   headingsFor,
@@ -45,6 +46,7 @@ export function rateInsertion(
     headings: headingsFor(name, unit, withDetail),
     reads: readsOf(table, run),
     hasDetail: true,
+    ...(rate.kind !== 'column' && { chart: chartOf(table, run, false) }),
   };
   return rate.kind === 'column' ? alongRun(table, insertion) : insertion;
 }

@@ -10,7 +10,12 @@ import { list } from './list';
 
 const title = 'Put it in';
 
-export function putInStep({ state, insertion, isAnswered }: Scene, actions: Actions): HTMLElement {
+/** @param canChart whether the workbook's host draws charts */
+export function putInStep(
+  { state, insertion, isAnswered }: Scene,
+  actions: Actions,
+  canChart: boolean,
+): HTMLElement {
   const { table, put } = state;
   if (!insertion)
     return step(
@@ -53,6 +58,14 @@ export function putInStep({ state, insertion, isAnswered }: Scene, actions: Acti
           'Uncertainty and limits beside it',
           put.withDetail,
           (withDetail) => void actions.changeOptions({ withDetail }),
+        ),
+      canChart &&
+        insertion.chart &&
+        checkField(
+          'with-chart',
+          insertion.chart.isFit ? 'A chart of the readings and the fit' : 'A chart of the readings',
+          put.withChart,
+          (withChart) => void actions.changeOptions({ withChart }),
         ),
     ),
     ...(typeof plan === 'string' ? [] : preview(plan, put.inUse)),

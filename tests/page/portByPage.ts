@@ -61,6 +61,7 @@ export async function portByPage(page: Page): Promise<WorkbookPort> {
 
   return {
     host: await page.evaluate(() => window.flaskpace.port.host),
+    canChart: await page.evaluate(() => window.flaskpace.port.canChart),
     selection: () => call<RangeReading | null>('selection').then(readingOrNone),
     regionAroundActiveCell: () => call<RangeReading | null>('regionAroundActiveCell').then(readingOrNone),
     activeCell: () => call('activeCell'),

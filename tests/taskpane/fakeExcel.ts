@@ -5,6 +5,7 @@
 import { OfficeMockObject } from 'office-addin-mock';
 import { parseArea, type Area } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
+import { fakeCharts, type FakeChart } from './fakeCharts';
 import type { BenchSheets } from './portContract';
 
 interface Cell {
@@ -36,6 +37,8 @@ type Loose = Record<string, unknown>;
 
 export interface FakeExcel {
   select(reference: string): void;
+  /** What Excel draws over its cells. */
+  readonly charts: readonly FakeChart[];
   /** Of one cell. */
   numberFormat(reference: string): string;
 }
@@ -51,6 +54,7 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
   }
   let [shownSheet, selected]: [string, Area] = [names[0], { row: 0, column: 0, rows: 1, columns: 1 }];
   const handlers = new Set<() => Promise<void>>();
+  const drawn = fakeCharts();
   let created: { mock: OfficeMockObject; commit(): void }[] = [];
 
   const grid = <T>({ rows, columns }: Area, pick: (r: number, c: number) => T): T[][] =>
@@ -92,12 +96,13 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
         ),
       );
     };
-    return settable(mock, {
+    const setters: Setters = {
       values: (rows) => put(rows, ({ format }, next) => ({ ...typed(next), format })),
       formulas: (rows) => put(rows, ({ format }, next) => ({ ...typed(next), format })),
       numberFormat: (rows) =>
         put(rows, (old, next) => (next === null ? old : { ...old, format: String(next) })),
-    });
+    };
+    return settable(mock, setters, false, { place: { sheet, ...area } });
   }
 
   function surrounding(sheet: string, start: Area): Area {
@@ -127,7 +132,7 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
       getUsedRangeOrNullObject: () => usedRange(name),
     });
     created.push({ mock, commit: () => undefined });
-    return settable(mock, {}, !isThere);
+    return settable(mock, {}, !isThere, { charts: drawn.on(name) });
   }
 
   function usedRange(name: string): Loose {
@@ -170,6 +175,7 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
     workbook,
     async sync() {
       created.forEach(({ commit }) => commit());
+      drawn.commit();
       await Promise.all(created.map(({ mock }) => mock.sync()));
     },
   };
@@ -184,10 +190,13 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
       },
       RangeValueType: { empty: 'Empty', error: 'Error' },
       ClearApplyTo: { contents: 'Contents' },
+      ChartType: { xyscatter: 'XYScatter', xyscatterSmoothNoMarkers: 'XYScatterSmoothNoMarkers' },
+      ChartSeriesBy: { rows: 'Rows', columns: 'Columns' },
     },
   });
 
   return {
+    charts: drawn.shown,
     select(reference) {
       const { sheet = shownSheet, ...area } = parseArea(reference)!;
       [shownSheet, selected] = [sheet, area];
@@ -205,15 +214,17 @@ function boundsOf(rows: readonly number[], columns: readonly number[]): Area {
   return { row, column, rows: Math.max(...rows) - row + 1, columns: Math.max(...columns) - column + 1 };
 }
 
-/** The mock as the code under test sees it: setting a property is a command; `isNullObject` needs no load of its own. */
-function settable(
-  mock: OfficeMockObject,
-  setters: Record<string, (rows: unknown[][]) => void>,
-  isNullObject = false,
-): Loose {
+type Setters = Record<string, (rows: unknown[][]) => void>;
+
+/**
+ * The mock as the code under test sees it: setting a property is a command; `isNullObject` needs no load of
+ * its own, nor has what stands beside the mock.
+ */
+function settable(mock: OfficeMockObject, setters: Setters, isNullObject = false, beside: Loose = {}): Loose {
   return new Proxy(mock as unknown as Loose, {
     get(target, property: string) {
       if (property === 'isNullObject') return isNullObject;
+      if (property in beside) return beside[property];
       const value = target[property];
       return typeof value === 'function' ? (value as (...args: unknown[]) => unknown).bind(target) : value;
     },

@@ -103,6 +103,7 @@ export function memoryWorkbook(sheets: Sheets): MemoryWorkbook {
 
   const port: WorkbookPort = {
     host: 'memory',
+    canChart: false,
     async selection() {
       const used = usedArea(selected.sheet);
       if (!used) return null;
