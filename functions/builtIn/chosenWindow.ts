@@ -13,6 +13,8 @@ import type { Table, WorkingCell } from './workings';
 
 /** Rows of the table along the run. */
 const [chosen, used, variance, freedom, factor, headings, firstRow] = [0, 1, 2, 3, 4, 5, 6];
+/** And its columns, the time first. */
+const [before, missed, left, slopes] = [1, 2, 3, 4];
 
 /** The window that the data choose on the day of the copy; without scatter where the run has none to judge by. */
 export function windowOfTheDay(given: Given): TangentWindow {
@@ -55,12 +57,13 @@ export class ChosenWindow {
     rows[chosen] = [points, 'readings in a window, as chosen on the day of the copy'];
     rows[used] = [{ formula: `MIN(${own.cell(chosen, 0)},${run.count})` }, 'readings used'];
     rows[variance] = [
-      { formula: `SUMSQ(${column(1)})/${own.cell(freedom, 0)}` },
+      { formula: `SUMSQ(${column(missed)})/${own.cell(freedom, 0)}` },
       'variance of a single reading, pooled over the run',
     ];
-    rows[freedom] = [{ formula: `SUM(${column(2)})` }, 'degrees of freedom'];
+    rows[freedom] = [{ formula: `SUM(${column(left)})` }, 'degrees of freedom'];
     rows[factor] = [{ formula: studentFactorText(own.cell(freedom, 0)) }, 'Student’s factor for 95 %'];
     rows[headings] = [
+      'time',
       'readings before window',
       `missed by degree ${degree + 1}`,
       'freedom left',
@@ -73,9 +76,10 @@ export class ChosenWindow {
     const { run, degree } = this;
     return Array.from({ length: run.size }, (_, n): WorkingCell[] => {
       const time = run.time(n);
-      const fit = new PolynomialAt(run, own.cell(used, 0), own.cell(firstRow + n, 0), time, degree);
+      const fit = new PolynomialAt(run, own.cell(used, 0), own.cell(firstRow + n, before), time, degree);
       const known = (formula: string): WorkingCell => ({ formula: `IF(ISNUMBER(${time}),${formula},"")` });
       return [
+        known(time),
         known(fit.first),
         known(`${run.value(n)}-${fit.finerHeight(fit.readings)}`),
         // what the polynomial has there when this reading is 1 and all others are 0
@@ -103,7 +107,7 @@ export class ChosenWindow {
   rowAlong(time: string): string[] {
     const { run, along } = this;
     const place = `MATCH(${time},${run.times},0)`;
-    return this.row([3, 4, 5].map((column) => `INDEX(${along.range(firstRow, column, run.size)},${place})`));
+    return this.row([0, 1, 2].map((n) => `INDEX(${along.range(firstRow, slopes + n, run.size)},${place})`));
   }
 
   /** The uncertainty and the limits are those of one degree more, which is nearly free of bias. */

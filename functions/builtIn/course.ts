@@ -1,65 +1,76 @@
 /** What is read off a run reading by reading, said in built-in functions. */
 import type { Given } from './given';
+import { Means } from './means';
 import { holdsOf } from './phrase';
-import { RisingRun } from './risingRun';
+import { SortedRun } from './sortedRun';
 import { NotSaid, type Said } from './said';
 import { where } from './text';
+import type { WorkingCell } from './workings';
 
 /** Σ[(cᵢ + cᵢ₋₁)/2]ᵝ(tᵢ − tᵢ₋₁) up to each reading. */
 export function sayNormalTime(given: Given): Said {
-  const run = new RisingRun(given);
-  const exponent = given.number('exponent');
-  const [b, all] = [exponent.text, run.pairs.size];
-  const least = `MIN(${run.pairs.y})`;
-  const allowed = `OR(AND(${b}>=0,${b}=INT(${b})),${least}>0,AND(${b}>0,${least}>=0))`;
-  const holds = [...run.holds(false), ...holdsOf(exponent), allowed, `${run.time(all - 1)}>${run.time(0)}`];
-  const isRow = run.pairs.columns > 1;
+  const run = new SortedRun(given);
+  const { pairs } = run;
+  const [exponent, b] = [given.number('exponent'), given.numberFromWorkings('exponent')];
+  const title = `Normalised time with the exponent ${b}: ${run.name}`;
+  const table = given.workings.table(title, (own) => [
+    ['time', 'normalised time'].map((heading) => ({ heading })),
+    ...Array.from({ length: run.size }, (_, n): WorkingCell[] => {
+      if (n === 0) return [{ formula: run.time(0) }, 0];
+      const step = `(${run.time(n)}-${run.time(n - 1)})`;
+      const mean = `((${run.value(n - 1)}+${run.value(n)})/2)`;
+      const sum = `${own.cell(n, 1)}+IF(${b}=0,1,${mean}^${b})*${step}`;
+      const known = (formula: string): WorkingCell => ({
+        formula: `IF(ISNUMBER(${run.time(n)}),${formula},"")`,
+      });
+      return [known(run.time(n)), known(sum)];
+    }),
+  ]);
+  const least = `MIN(${run.values})`;
+  const allowed = `OR(AND(${exponent.text}>=0,${exponent.text}=INT(${exponent.text})),${least}>0,AND(${exponent.text}>0,${least}>=0))`;
+  const holds = [...pairs.holds, ...holdsOf(exponent), allowed, `MAX(${run.times})>MIN(${run.times})`];
+  const [times, values] = [given.readings('times'), given.readings('values')];
   return {
     cell(row, column) {
-      const n = isRow ? column : row;
-      if (n === 0) return where(holds, '0');
-      const [before, after] = (['times', 'values'] as const).reduce<[string, string][]>(
-        (list, of) => [...list, [run.stretch(of, 0, n - 1), run.stretch(of, 1, n)]],
-        [],
-      );
-      const steps = `(${before[1]}-${before[0]})`;
-      const means = `((${after[0]}+${after[1]})/2)`;
-      const whole = `SUM(${means}^${b}*${steps})`;
-      return where(holds, `IF(${b}=0,${run.time(n)}-${run.time(0)},${whole})`);
+      const [time, value] = [times.element(row, column), values.element(row, column)];
+      // readings of one time share theirs
+      const own = `INDEX(${table.range(1, 1, run.size)},MATCH(${time},${run.times},0))`;
+      return where(holds, `IF(ISNUMBER(${time})*ISNUMBER(${value}),${own},"")`);
     },
   };
 }
 
 /** The times that each halving of the distance from the end took. */
 export function sayHalvings(given: Given): Said {
-  const run = new RisingRun(given);
-  const { pairs } = run;
+  const run = new SortedRun(given);
+  const means = new Means(given, run);
+  const [times, values] = means.columns;
+  const { pairs, numbers, size } = run;
+  if (size < 2) throw new NotSaid('fewer than two readings');
   const end = given.has('endpoint') ? given.number('endpoint') : undefined;
   const from = end?.text ?? '0';
-  const first = `(${run.value(0)}-${from})`;
+  const first = `(${means.mean(0)}-${from})`;
   const holds = [
-    ...run.holds(true),
+    ...pairs.holds,
     ...holdsOf(...(end ? [end] : [])),
+    `MAX(${run.times})>MIN(${run.times})`,
     // a rising column needs its end
-    ...(end ? [] : [`OR(${pairs.trend()}<0,${level(pairs)})`]),
+    ...(end ? [] : [`OR(${run.direction}<0,MAX(${run.values})=MIN(${run.values}))`]),
     `${first}<>0`,
   ];
-  const shares = `(${pairs.y}-${from})/${first}`;
   const reached = (halving: number): string => {
     if (halving === 0) return run.time(0);
     const left = 0.5 ** halving;
-    const placeOf = (share: number): string => `MIN(IF(${shares}<=${share},${run.places},${pairs.size + 1}))`;
+    const placeOf = (share: number): string =>
+      `MIN(IF(ISNUMBER(${values}),IF((${values}-${from})/${first}<=${share},${numbers},${size + 1}),${size + 1}))`;
     const place = placeOf(left);
-    const share = (back: 0 | 1): string => `((INDEX(${pairs.y},${place}-${back})-${from})/${first})`;
-    const time = (back: 0 | 1): string => `INDEX(${pairs.x},${place}-${back})`;
+    const share = (back: 0 | 1): string => `((INDEX(${values},${place}-${back})-${from})/${first})`;
+    const time = (back: 0 | 1): string => `INDEX(${times},${place}-${back})`;
     const part = `IF(${share(0)}>0,LN(${share(1)}/${left})/LN(${share(1)}/${share(0)}),(${share(1)}-${left})/(${share(1)}-${share(0)}))`;
     const found = `${time(1)}+${part}*(${time(0)}-${time(1)})`;
     // a reading at or past the end ends the reckoning after the first level it meets
     const isOver = halving === 1 ? 'FALSE' : `AND(${place}=${placeOf(2 * left)},${share(0)}<=0)`;
-    return `IF(${place}>${pairs.size},NA(),IF(${isOver},NA(),${found}))`;
+    return `IF(${place}>${size},NA(),IF(${isOver},NA(),${found}))`;
   };
-  if (pairs.size < 2) throw new NotSaid('fewer than two readings');
   return { cell: (row) => where(holds, `${reached(row + 1)}-${reached(row)}`) };
 }
-
-const level = ({ y }: { readonly y: string }): string => `MAX(${y})=MIN(${y})`;

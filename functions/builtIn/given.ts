@@ -45,7 +45,8 @@ export class Given {
 
   /** A number as the sheet "Workings" names it; what must hold of it is said where the formula stands. */
   numberFromWorkings(name: string): string {
-    if (!this.argument(name)?.cells) throw new NotSaid(`${name} is worked out within the formula`);
+    const argument = this.argument(name);
+    if (argument && !argument.cells) throw new NotSaid(`${name} is worked out within the formula`);
     return this.fromWorkings().number(name).text;
   }
 

@@ -3,11 +3,9 @@ import { standardRowTexts } from './estimate';
 import type { Given } from './given';
 import { holdsOf } from './phrase';
 import { Pairs } from './pairs';
-import { RisingRun } from './risingRun';
 import { SingleScatter } from './singleScatter';
-import { slopeRow } from './slope';
 import { SortedRun } from './sortedRun';
-import { NotSaid, oneValue, type Said } from './said';
+import { oneValue, type Said } from './said';
 import { where } from './text';
 
 export function sayBetween(given: Given): Said {
@@ -48,31 +46,4 @@ function interpolated(pairs: Pairs, at: string): string {
     `SUM(${pairs.each(`IF(${x}=${time},${y},0)`)})/SUM(${pairs.each(`IF(${x}=${time},1,0)`)})`;
   const share = `IF(${after}=${before},0,(${at}-${before})/(${after}-${before}))`;
   return `(${mean(before)}+(${mean(after)}-${mean(before)})*${share})`;
-}
-
-/** A parabola, and two readings to judge its scatter by. */
-const fewest = 5;
-
-/** The initial rate of a run without gaps, in the order of its times. */
-export function sayStart(given: Given): Said {
-  const run = new RisingRun(given);
-  const { pairs } = run;
-  const [share, nu, detail] = [
-    given.number('share'),
-    pairs.stoichiometricNumber(given),
-    given.flag('detail'),
-  ];
-  const all = pairs.size;
-  const few = Math.max(1, Math.min(3, Math.floor(all / 5)));
-  const [first, last] = [run.value(0), run.stretch('values', all - few, all - 1)];
-  const limit = `${share.text}*ABS(AVERAGE(${last})-${first})`;
-  const beyond = `MIN(IF(ABS(${pairs.y}-${first})>${limit},${run.places},${all + 1}))-1`;
-  const points = `MIN(${all},MAX(${fewest},${beyond}))`;
-  const inside = `IF(${run.places}<=${points},1,0)`;
-  const cells = slopeRow(pairs, { inside, points, at: run.time(0), degree: 2, nu: nu.text });
-  const say = (column: number): string =>
-    where([...run.holds(true), ...holdsOf(share, nu), ...detail.holds], cells[column]);
-  if (all < 3) throw new NotSaid('fewer than three readings');
-  if (!detail.value) return oneValue(say(0));
-  return { cell: (_, column) => say(column) };
 }

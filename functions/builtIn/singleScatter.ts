@@ -1,6 +1,7 @@
 /** The scatter of single readings without a model of the run (src/rate/average.ts, with its source), on "Workings". */
 import { studentFactorText } from './estimate';
 import type { Given } from './given';
+import { Means } from './means';
 import type { SortedRun } from './sortedRun';
 import type { Table, WorkingCell } from './workings';
 
@@ -9,14 +10,17 @@ const [inner, deviation, freedom, factor, headings, firstRow] = [0, 1, 2, 3, 4, 
 
 export class SingleScatter {
   private readonly table: Table;
+  private readonly means: Means;
 
   constructor(
     given: Given,
     private readonly run: SortedRun,
   ) {
+    const means = new Means(given, run);
+    this.means = means;
     this.table = given.workings.table(`Scatter of single readings: ${run.name}`, (own) => [
       ...head(own, run.size),
-      ...Array.from({ length: run.size }, (_, n) => row(run, own, n)),
+      ...Array.from({ length: run.size }, (_, n) => row(means, own, n)),
     ]);
   }
 
@@ -32,15 +36,13 @@ export class SingleScatter {
     return this.table.cell(factor, 0);
   }
 
-  /** y(to) − y(from), and its variance in units of a reading's own: two cells, worked out from the means beside them. */
+  /** y(to) − y(from), and its variance in units of a reading's own: two cells, worked out from the means beside it. */
   change(given: Given): { readonly value: string; readonly spread: string } {
-    const { table, run } = this;
     const [from, to] = [given.numberFromWorkings('from'), given.numberFromWorkings('to')];
-    const [times, means, counts] = [0, 1, 2].map((column) => table.range(firstRow, column, run.size));
+    const [times, means, counts] = this.means.columns;
     const weights = `(${shares(times, to)}-(${shares(times, from)}))`;
     const each = (text: string): string => `SUM(IF(ISNUMBER(${times}),${text},0))`;
-    const title = `From ${from} to ${to}: ${run.name}`;
-    const own = given.workings.table(title, () => [
+    const own = given.workings.table(`From ${from} to ${to}: ${this.run.name}`, () => [
       ['change', 'its variance factor'].map((heading) => ({ heading })),
       [each(`${weights}*${means}`), each(`${weights}^2/${counts}`)].map((formula) => ({ formula })),
     ]);
@@ -57,7 +59,7 @@ function shares(times: string, at: string): string {
 }
 
 function head(own: Table, size: number): WorkingCell[][] {
-  const [m, all] = [own.cell(inner, 0), own.range(firstRow, 4, size)];
+  const [m, all] = [own.cell(inner, 0), own.range(firstRow, 1, size)];
   // neighbouring pseudo-residuals share readings
   const overlap = `2*((${m}-1)*4/9+MAX(0,${m}-2)/36)/${m}`;
   const rows: WorkingCell[][] = [];
@@ -71,30 +73,17 @@ function head(own: Table, size: number): WorkingCell[][] {
     { formula: `IF(${m}>0,${studentFactorText(own.cell(freedom, 0))},0)` },
     'Student’s factor for 95 %',
   ];
-  rows[headings] = ['time', 'mean reading', 'readings', 'share of the later', 'scatter squared'].map(
-    (heading) => ({ heading }),
-  );
+  rows[headings] = ['share of the later', 'scatter squared'].map((heading) => ({ heading }));
   return rows;
 }
 
-function row(run: SortedRun, own: Table, n: number): WorkingCell[] {
-  const at = (column: number, step = 0): string => own.cell(firstRow + n + step, column);
-  const known = (formula: string): WorkingCell => ({ formula: `IF(ISNUMBER(${at(0)}),${formula},"")` });
-  const { times, values } = run;
-  const next = `IF(MAX(${times})>${at(0, -1)},MIN(IF(ISNUMBER(${times}),IF(${times}>${at(0, -1)},${times},""),"")),"")`;
-  const cells: WorkingCell[] = [
-    { formula: n === 0 ? run.time(0) : `IF(ISNUMBER(${at(0, -1)}),${next},"")` },
-    known(`SUMIF(${times},${at(0)},${values})/COUNTIF(${times},${at(0)})`),
-    known(`COUNTIF(${times},${at(0)})`),
-  ];
-  if (n === 0 || n === run.size - 1) return cells;
-  const between = (formula: string): WorkingCell => ({ formula: `IF(ISNUMBER(${at(0, 1)}),${formula},"")` });
-  const right = at(3);
-  return [
-    ...cells,
-    between(`(${at(0)}-${at(0, -1)})/(${at(0, 1)}-${at(0, -1)})`),
-    between(
-      `((1-${right})*${at(1, -1)}+${right}*${at(1, 1)}-${at(1)})^2/((1-${right})^2/${at(2, -1)}+${right}^2/${at(2, 1)}+1/${at(2)})`,
-    ),
-  ];
+/** A mean against the straight line through its two neighbours; nothing of the first and the last. */
+function row({ run, time, mean, count }: Means, own: Table, n: number): WorkingCell[] {
+  if (n === 0 || n === run.size - 1) return [];
+  const right = own.cell(firstRow + n, 0);
+  const off = `(1-${right})*${mean(n - 1)}+${right}*${mean(n + 1)}-${mean(n)}`;
+  const spread = `(1-${right})^2/${count(n - 1)}+${right}^2/${count(n + 1)}+1/${count(n)}`;
+  return [`(${time(n)}-${time(n - 1)})/(${time(n + 1)}-${time(n - 1)})`, `(${off})^2/(${spread})`].map(
+    (formula) => ({ formula: `IF(ISNUMBER(${time(n + 1)}),${formula},"")` }),
+  );
 }

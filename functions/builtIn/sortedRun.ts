@@ -54,10 +54,15 @@ export class SortedRun {
   time = (n: number): string => this.table.cell(firstRow + n, 0);
   value = (n: number): string => this.table.cell(firstRow + n, 1);
 
+  /** 1 where the run rises or is level, −1 where it falls. */
+  get direction(): string {
+    return this.table.cell(1, 0);
+  }
+
   /** As given, or by the trend. */
   get stoichiometricNumber(): Phrase {
     if (this.given.has('coefficient')) return this.pairs.stoichiometricNumber(this.given);
-    return { text: this.table.cell(1, 0), holds: [] };
+    return { text: this.direction, holds: [] };
   }
 }
 

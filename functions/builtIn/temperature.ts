@@ -5,8 +5,10 @@ import { standardRowTexts } from './estimate';
 import type { Given } from './given';
 import { holdsOf } from './phrase';
 import { Pairs } from './pairs';
+import { SortedRun } from './sortedRun';
 import { oneValue, type Said } from './said';
 import { numberText, where } from './text';
+import type { WorkingCell } from './workings';
 
 /** ln(k/scale) as a straight line in 1/T − 1/centre, by weighted least squares. */
 class LineOverTemperature {
@@ -148,31 +150,47 @@ export function sayMeanTemp(given: Given): Said {
   const perKelvin = `${energy.text}/${gasConstant}`;
   const plausible = celsius.none('<=', '200').map((hold) => hold.replace(/=0$/, '>0'));
   const holds = [...celsius.holds, ...plausible, ...energy.holds, `SUM(${`ISERROR(${t})`}*1)=0`];
-  // from the highest temperature down, so that no exponential vanishes
-  const highest = `(MAX(${t})+${celsiusZero})`;
-  const share = `EXP(${perKelvin}*(1/${highest}-1/(${t}+${celsiusZero})))`;
-  const of = (mean: string): string => `1/(1/${highest}-LN(${mean})/(${perKelvin}))-${celsiusZero}`;
-  if (!given.has('times')) {
-    return oneValue(where(holds, of(`SUM(IF(ISNUMBER(${t}),${share},0))/COUNT(${t})`)));
-  }
-  const pairs = Pairs.of(given, 'times', 'temperatures');
-  const { each, steps } = trapezia(given);
-  const mean = `SUM(${steps}*(${each((range) => share.replaceAll(t, range))})/2)/(MAX(${pairs.x})-MIN(${pairs.x}))`;
-  return oneValue(where([...holds, ...holdsOf(energy), ...complete(pairs, steps)], of(mean)));
-}
-
-/** Neighbours in a column without gaps: their steps in time, and the sum of something at both ends of each. */
-function trapezia(given: Given): { steps: string; each(of: (range: string) => string): string } {
-  const [times, values] = [given.readings('times'), given.readings('temperatures')];
-  return {
-    steps: `(${times.without('first')}-${times.without('last')})`,
-    each: (of) => `${of(values.without('first'))}+${of(values.without('last'))}`,
+  const of = (temperatures: string, mean: (share: string) => string): string => {
+    // from the highest temperature down, so that no exponential vanishes
+    const highest = `(MAX(${temperatures})+${celsiusZero})`;
+    const share = `EXP(${perKelvin}*(1/${highest}-1/(${temperatures}+${celsiusZero})))`;
+    return `1/(1/${highest}-LN(${mean(share)})/(${perKelvin}))-${celsiusZero}`;
   };
+  if (!given.has('times')) {
+    return oneValue(
+      where(
+        holds,
+        of(t, (share) => `SUM(IF(ISNUMBER(${t}),${share},0))/COUNT(${t})`),
+      ),
+    );
+  }
+  const run = new SortedRun(given, 'times', 'temperatures');
+  const held = holdingTimes(given, run);
+  const mean = of(run.values, (share) => `SUM(IF(ISNUMBER(${run.times}),${held}*${share},0))/SUM(${held})`);
+  const isHistory = `MAX(${run.times})>MIN(${run.times})`;
+  // a single reading is its own mean
+  const whole = `IF(${run.count}=1,${run.value(0)},IF(${isHistory},${mean},#VALUE!))`;
+  return oneValue(where([...holds, ...run.pairs.holds, `${run.count}>0`], whole));
 }
 
-/** That there are no gaps, and times rise. */
-function complete(pairs: Pairs, steps: string): string[] {
-  return [`${pairs.count}=${pairs.size}`, `SUM(IF(${steps}>0,0,1))=0`];
+/** How long each reading stands for: from halfway to the time before until halfway to the next, shared by those of one time. */
+function holdingTimes(given: Given, run: SortedRun): string {
+  const { times, size } = run;
+  const table = given.workings.table(`Time that each reading stands for: ${run.name}`, () => [
+    ['time', 'stands for'].map((heading) => ({ heading })),
+    ...Array.from({ length: size }, (_, n): WorkingCell[] => {
+      const time = run.time(n);
+      const beside = (nearest: 'MAX' | 'MIN', side: '<' | '>'): string => {
+        const last = nearest === 'MAX' ? 'MIN' : 'MAX';
+        const all = `IF(ISNUMBER(${times}),IF(${times}${side}${time},${times},""),"")`;
+        return `IF(${time}=${last}(${times}),${time},${nearest}(${all}))`;
+      };
+      const known = (formula: string): WorkingCell => ({ formula: `IF(ISNUMBER(${time}),${formula},"")` });
+      const held = `(${beside('MIN', '>')}-${beside('MAX', '<')})/2/COUNTIF(${times},${time})`;
+      return [known(time), known(held)];
+    }),
+  ]);
+  return table.range(1, 1, size);
 }
 
 export function sayTimeTo(given: Given): Said {

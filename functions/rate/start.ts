@@ -1,6 +1,6 @@
 import { startRateOf } from '../../src/rate/start';
 import { detail, stoichiometricNumber } from '../commonParameters';
-import { sayStart } from '../builtIn/rate';
+import { sayStart } from '../builtIn/start';
 import { defineFunction } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { column, number, optional } from '../parameters';

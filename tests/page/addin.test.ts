@@ -45,7 +45,11 @@ test('the workbook is handed over in Excel’s own page: the spreadsheet engine 
   await addin.page.locator('.notice.good').waitFor();
   const [opened] = await addin.page.evaluate(() => window.standIn.office.opened);
   const copy = readWorkbook(new Uint8Array(Buffer.from(opened, 'base64')));
-  expect(copy.sheets.map(({ name }) => name)).toEqual([...demo.sheets.map(({ name }) => name), 'Method']);
+  expect(copy.sheets.map(({ name }) => name)).toEqual([
+    ...demo.sheets.map(({ name }) => name),
+    'Method',
+    'Workings',
+  ]);
   const formulas = copy.sheets.flatMap(({ cells }) => cells.flatMap(({ formula }) => formula ?? []));
   expect(formulas.length).toBeGreaterThan(100);
   expect(formulas.filter((formula) => formula.includes('PACE'))).toEqual([]);

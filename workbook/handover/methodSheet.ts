@@ -49,36 +49,70 @@ export function methodSheet(
   const rows: SheetCell[][] = [
     headings('Method'),
     [`A copy that needs no add-in, made by Flaskpace ${version} on ${date}.`],
-    [
-      'What calls of PACE functions could be said in built-in functions is live and follows its inputs. The rest is frozen to the value it had: the last column tells whether its inputs are still those of that day. What needs more than one cell stands on the sheet Workings.',
-    ],
+    ...wrapped(
+      'What calls of PACE functions could be said in built-in functions is live and follows its inputs. The rest is frozen to the value it had; the column State tells whether its inputs are still those of that day. What needs more than one cell stands on the sheet Workings.',
+    ).map((line): SheetCell[] => [line]),
     [],
-    headings('Sheet', 'Cells', 'Formula as it was', 'Now', 'Inputs then', 'Inputs now', 'State'),
+    headings(
+      'Sheet',
+      'Cells',
+      'State',
+      'Inputs then',
+      'Inputs now',
+      'Formula as it was',
+      'What became of it',
+    ),
   ];
   for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
   for (const { name: own, refersTo, value } of names)
-    rows.push(['a name', own, `=${refersTo}`, `frozen: it stands for ${value}`]);
+    rows.push(['a name', own, 'frozen', null, null, `=${refersTo}`, `frozen: it stands for ${value}`]);
   for (const { where, formula, loss } of elsewhere)
-    rows.push([where, null, `=${formula}`, `left as it was: without the add-in ${loss}`]);
-  rows.push([], headings('Function', 'Unit', 'What it answers', 'How it is worked out', 'Reference'));
-  rows.push(...functionsOf(formulas).map(functionRow));
-  rows.push([], headings('Constant', 'Unit', 'Value', 'Source'));
-  rows.push(...constants.map(([what, value, unit, source]): SheetCell[] => [what, unit, value, source]));
-  return { name, rows, widths: [18, 14, 48, 48, 20, 20, 24] };
+    rows.push([
+      where,
+      null,
+      'as it was',
+      null,
+      null,
+      `=${formula}`,
+      `left as it was: without the add-in ${loss}`,
+    ]);
+  for (const f of functionsOf(formulas)) rows.push([], ...functionRows(f));
+  rows.push([], headings('Constant', '', 'Value', 'Unit', 'Source'));
+  rows.push(
+    ...constants.map(([what, value, unit, source]): SheetCell[] => [what, null, value, unit, source]),
+  );
+  return { name, rows, widths: [18, 14, 28, 16, 16, 50, 70] };
 }
 
 const functionsOf = (formulas: readonly HandedFormula[]): CellFunction[] => [
   ...new Set(formulas.flatMap(({ functions }) => functions)),
 ];
 
-function functionRow(f: CellFunction): SheetCell[] {
+/** Each text in lines of its own: cells to the right of it stay empty, so that it can be read to its end. */
+function functionRows(f: CellFunction): SheetCell[][] {
+  const under = (label: string, text: string): SheetCell[][] =>
+    wrapped(text).map((line, n) => [n === 0 ? label : null, null, line]);
   return [
-    { heading: typedName(f) },
-    f.result.unit,
-    `${signature(f)}: ${f.summary}`,
-    howInWords(f),
-    f.reference,
+    [{ heading: typedName(f) }, null, f.summary],
+    ...under('typed as', signature(f)),
+    ...under('unit', f.result.unit),
+    ...under('worked out by', howInWords(f)),
+    ...under('source', f.reference),
   ];
+}
+
+/** Characters in a line. */
+const lineLength = 150;
+
+function wrapped(text: string): string[] {
+  const lines = [''];
+  for (const word of text.split(' ')) {
+    const last = lines[lines.length - 1];
+    if (last === '') lines[lines.length - 1] = word;
+    else if (last.length + word.length < lineLength) lines[lines.length - 1] = `${last} ${word}`;
+    else lines.push(word);
+  }
+  return lines;
 }
 
 export const unwatched = 'not watched';
@@ -87,28 +121,29 @@ export const changed = 'inputs have changed';
 
 function formulaRow(formula: HandedFormula, row: number, world: World): SheetCell[] {
   const { sheet, original, said, why, ofTheDay, fits, area } = formula;
-  const known: SheetCell[] = [sheet, areaName(area), `=${original}`];
-  if (!isOfTheDay(formula)) return [...known, 'live, in built-in functions'];
+  const place: SheetCell[] = [sheet, areaName(area)];
+  if (!isOfTheDay(formula))
+    return [...place, 'live', null, null, `=${original}`, 'said in built-in functions'];
   const now = said
-    ? `live, in built-in functions, but as on the day of the copy: ${ofTheDay?.what}`
+    ? `said in built-in functions, but as on the day of the copy: ${ofTheDay?.what}`
     : `frozen: ${why}`;
   const where = fits ? `; what was fitted stands from ${fits.join(' and ').replace(/\$/g, '')} on` : '';
-  return [...known, now + where, ...watch(formula, row, world)];
+  return [...place, ...watch(formula, row, world), `=${original}`, now + where];
 }
 
-/** Whether the inputs are still those of the day: a sum over them then, the same now, and the words for it. */
+/** Whether the inputs are still those of the day, in words: a sum over them then, and the same now. */
 function watch(formula: HandedFormula, row: number, world: World): SheetCell[] {
   const { sheet, original, ofTheDay } = formula;
   const inputs = ofTheDay?.from ?? world.areasIn(world.spelledOut(original, formula), sheet);
-  if (inputs.length === 0) return [null, null, 'no inputs but those in the formula'];
+  if (inputs.length === 0) return ['no inputs in cells', null, null];
   const print = fingerprintOf(inputs, sheet, world);
-  if (!print || print.formula.length > 8000) return [null, null, unwatched];
-  const [then, now] = [cellName(row - 1, 4), cellName(row - 1, 5)];
+  if (!print || print.formula.length > 8000) return [unwatched, null, null];
+  const [then, now] = [cellName(row - 1, 3), cellName(row - 1, 4)];
   const same = `IF(ISERROR(${now}),FALSE,ABS(${now}-${then})<${fingerprintTolerance}*MAX(1,ABS(${then})))`;
   return [
+    { formula: `IF(${same},"${unchanged}","${changed}")`, value: unchanged },
     print.value,
     { formula: print.formula, value: print.value },
-    { formula: `IF(${same},"${unchanged}","${changed}")`, value: unchanged },
   ];
 }
 

@@ -54,7 +54,8 @@ function sheetXml({ rows, widths }: NewSheet): string {
     (cells, row) =>
       `<row r="${row + 1}">${cells.map((cell, column) => newCell(cell, row, column)).join('')}</row>`,
   );
-  return `${head}<worksheet xmlns="${main}"><cols>${columns.join('')}</cols><sheetData>${data.join('')}</sheetData></worksheet>`;
+  // printed across, as wide as a page
+  return `${head}<worksheet xmlns="${main}"><sheetPr><pageSetUpPr fitToPage="1"/></sheetPr><cols>${columns.join('')}</cols><sheetData>${data.join('')}</sheetData><pageSetup orientation="landscape" fitToHeight="0"/></worksheet>`;
 }
 
 function newCell(cell: SheetCell, row: number, column: number): string {

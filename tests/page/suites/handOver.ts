@@ -33,7 +33,7 @@ export function handOverSuite(sheet: () => BenchPage): void {
     const [download] = await Promise.all([sheet().page.waitForEvent('download'), press('Save the copy…')]);
     expect(download.suggestedFilename()).toMatch(/ handed over\.xlsx$/);
     const copy = readWorkbook(new Uint8Array(await readFile(await download.path())));
-    expect(copy.sheets.map(({ name }) => name)).toEqual(['Gas run', 'Method']);
+    expect(copy.sheets.map(({ name }) => name)).toEqual(['Gas run', 'Method', 'Workings']);
     const formulas = copy.sheets.flatMap(({ cells }) => cells.flatMap(({ formula }) => formula ?? []));
     expect(formulas.filter((formula) => /PACE/.test(formula))).toEqual([]);
     const [[slope]] = await sheet().cells("'Gas run'!C2");

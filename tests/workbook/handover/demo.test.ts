@@ -16,7 +16,9 @@ beforeAll(async () => {
 /** Numbers to nine digits, or nothing where a sum leaves its rounding; errors by their code. */
 function isNear(theirs: CellValue, ours: CellValue): boolean {
   if (typeof ours === 'number' && typeof theirs === 'number')
-    return Math.abs(theirs - ours) <= 1e-9 * Math.abs(ours) + 1e-13;
+    return (
+      Math.max(Math.abs(theirs), Math.abs(ours)) < 1e-12 || Math.abs(theirs - ours) <= 1e-9 * Math.abs(ours)
+    );
   if (ours instanceof CellError) return theirs instanceof CellError && theirs.code === ours.code;
   return (theirs ?? '') === (ours ?? '');
 }

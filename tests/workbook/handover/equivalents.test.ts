@@ -91,8 +91,9 @@ for (const engine of otherEngines) {
     });
 
     test('flags are down before a change, and up after it', () => {
+      const firstRow = 1 + headingsRow(shown);
       const watched = copy.formulas.flatMap((formula, n) =>
-        formula.said && formula.ofTheDay === undefined ? [] : [{ formula, cell: `Method!G${n + 6}` }],
+        formula.said && formula.ofTheDay === undefined ? [] : [{ formula, cell: `Method!C${n + firstRow}` }],
       );
       expect(watched.length).toBeGreaterThan(0);
       for (const { formula, cell } of watched) {
@@ -105,6 +106,12 @@ for (const engine of otherEngines) {
       }
     });
   });
+}
+
+/** Above the formulas, on the sheet "Method". */
+function headingsRow(shown: Shown): number {
+  const place = [...shown].find(([at, value]) => /^Method!C\d+$/.test(at) && value === 'State')![0];
+  return Number(place.replace('Method!C', ''));
 }
 
 /** The cells that the formulas of a sheet cover, with what they show. */

@@ -14,6 +14,43 @@ export const course: Cases = {
     becomes: 'live',
     changed: { B3: 15, A9: 250 },
   },
+  'Initial rate, unsorted with gaps': {
+    typed: {
+      ...column('A1', [40, 0, 5, 5, null, 10, 20, 15, 30, 60]),
+      ...column('B1', [2.2, 9, 7.4, 7.6, 5, 6.2, 4.2, 5.1, 3.1, 1.2]),
+      D1: 0.35,
+      D2: '=PACE.START(A1:A10,B1:B10,,,TRUE)',
+      D3: '=PACE.START(A1:A10,B1:B10,D1,-2,TRUE)',
+      D4: '=PACE.START(A1:A5,B1:B5,1,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { A5: 12, B6: 'lost', D1: 0.6 },
+  },
+  'Initial rate of two times': {
+    typed: { ...run, D2: '=PACE.START(A2:A4,B2:B4)' },
+    becomes: 'live',
+    changed: { A4: null },
+    then: 'error',
+  },
+  'Normalised time, unsorted with gaps': {
+    typed: {
+      ...column('A1', [20, 0, 10, 10, 30, null, 25]),
+      ...column('B1', [5, 9, 7.1, 6.9, 4, 3, 'lost']),
+      D1: 0.7,
+      E1: '=PACE.NORMALTIME(A1:A7,B1:B7,D1)',
+    },
+    becomes: 'live',
+    changed: { A6: 26, B4: null, D1: 0 },
+  },
+  'Half lives read off, unsorted': {
+    typed: {
+      ...column('A1', [45, 10, 20, 20, 32, 0, 60]),
+      ...column('B1', [0.4, 4.1, 2.3, 2.1, 1.1, 8, null]),
+      D1: '=PACE.HALVINGS(A1:A7,B1:B7)',
+    },
+    becomes: 'live',
+    changed: { B2: 4.3, B3: null, A7: 70, B7: 0.3 },
+  },
   'Normalised time': {
     typed: {
       ...run,

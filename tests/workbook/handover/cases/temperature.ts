@@ -57,6 +57,15 @@ export const temperature: Cases = {
     becomes: 'live',
     changed: { A2: 40, B4: 9, C3: 35 },
   },
+  'Mean temperature of a log with gaps': {
+    typed: {
+      ...column('A1', [20, 24.5, 31, null, 22, 27, 25]),
+      ...column('B1', [0, 9, 5, 6, 12, 12, null]),
+      D1: '=PACE.MEANTEMP(A1:A7,B1:B7)',
+    },
+    becomes: 'live',
+    changed: { A2: 'lost', B7: 14, B5: 11 },
+  },
   'Time to a conversion': {
     typed: {
       A1: 0.5,
