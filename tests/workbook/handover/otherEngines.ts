@@ -15,6 +15,8 @@ export interface OtherEngine {
   readonly name: string;
   readonly isInstalled: boolean;
   recalculated(bytes: Uint8Array): Shown;
+  /** The file as the program saves it anew. */
+  saved(bytes: Uint8Array): Uint8Array;
 }
 
 const answers = (command: string): boolean => spawnSync(command, ['--version']).status === 0;
@@ -44,18 +46,21 @@ function engine(name: string, command: string, args: (folder: string) => string[
   return {
     name,
     isInstalled,
-    recalculated(bytes) {
-      const folder = mkdtempSync(join(tmpdir(), 'copy-'));
-      try {
-        writeFileSync(join(folder, 'book.xlsx'), withoutResults(bytes));
-        execFileSync('mkdir', ['-p', join(folder, 'out')]);
-        execFileSync(command, args(folder), { stdio: 'pipe', timeout: 120_000 });
-        return shownIn(readFileSync(join(folder, 'out', 'book.xlsx')));
-      } finally {
-        rmSync(folder, { recursive: true, force: true });
-      }
-    },
+    recalculated: (bytes) => shownIn(saved(withoutResults(bytes))),
+    saved,
   };
+
+  function saved(bytes: Uint8Array): Uint8Array {
+    const folder = mkdtempSync(join(tmpdir(), 'copy-'));
+    try {
+      writeFileSync(join(folder, 'book.xlsx'), bytes);
+      execFileSync('mkdir', ['-p', join(folder, 'out')]);
+      execFileSync(command, args(folder), { stdio: 'pipe', timeout: 120_000 });
+      return readFileSync(join(folder, 'out', 'book.xlsx'));
+    } finally {
+      rmSync(folder, { recursive: true, force: true });
+    }
+  }
 }
 
 /** No formula keeps a value: a program that only showed what the file says would show nothing. */
