@@ -26,7 +26,7 @@ type Headers = Readonly<Record<string, string>>;
 export function filesOf(
   folder: string,
   headersOf: (name: string) => Headers,
-  made: Offer['made'] = () => undefined,
+  made: Offer['made'] = () => Promise.resolve(undefined),
 ): RequestListener {
   // what is not on this list is not served: no path is ever taken from a request
   const files = filesBelow(folder);
@@ -37,7 +37,7 @@ interface Offer {
   readonly folder: string;
   readonly files: ReadonlySet<string>;
   headersOf(name: string): Headers;
-  made(name: string): string | undefined;
+  made(name: string): Promise<string | undefined>;
 }
 
 function answer(
@@ -54,10 +54,12 @@ function answer(
   const name = fileAsked(request.url ?? '/');
   if (name === null) return refuse(404, 'there is no such file');
   if (!files.has(name)) {
-    const text = made(name);
-    if (text === undefined) return refuse(404, 'there is no such file');
-    response.writeHead(200, { ...headersOf(name), 'Content-Type': typeOf(name) });
-    response.end(request.method === 'HEAD' ? undefined : text);
+    const answered = (text: string | undefined): void => {
+      if (text === undefined) return refuse(404, 'there is no such file');
+      response.writeHead(200, { ...headersOf(name), 'Content-Type': typeOf(name) });
+      response.end(request.method === 'HEAD' ? undefined : text);
+    };
+    made(name).then(answered, () => response.destroy());
     return;
   }
   const tag = tagOf(join(folder, name));

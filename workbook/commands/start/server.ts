@@ -1,7 +1,5 @@
 /** Serves the workbook page and the help pages, and nothing else, to this machine. */
 import { createServer, type Server } from 'node:http';
-import { catalogue } from '../../../functions/catalogue';
-import { helpFiles } from '../../../functions/help/files';
 import { helpFolder } from '../../../functions/help/pageName';
 import { filesOf } from './folder';
 
@@ -31,12 +29,20 @@ const headers = {
 
 export const pageServer = (folder: string): Server => createServer(filesOf(folder, () => headers, help()));
 
-/** Made at the first question, since their pictures take a second or two. */
-function help(): (name: string) => string | undefined {
-  let files: ReadonlyMap<string, string> | undefined;
-  return (name) => {
+/** Loaded and made at the first question, since the page should not wait for it. */
+function help(): (name: string) => Promise<string | undefined> {
+  let files: Promise<ReadonlyMap<string, string>> | undefined;
+  return async (name) => {
     if (!name.startsWith(`${helpFolder}/`)) return undefined;
-    files ??= helpFiles(catalogue);
-    return files.get(name.slice(helpFolder.length + 1));
+    files ??= made();
+    return (await files).get(name.slice(helpFolder.length + 1));
   };
+}
+
+async function made(): Promise<ReadonlyMap<string, string>> {
+  const [{ catalogue }, { helpFiles }] = await Promise.all([
+    import('../../../functions/catalogue'),
+    import('../../../functions/help/files'),
+  ]);
+  return helpFiles(catalogue);
 }
