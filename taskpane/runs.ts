@@ -1,5 +1,7 @@
 /** What a table and a run are, and what stands in them. */
 import type { CellRange, CellValue } from '../functions/cell';
+import { numberInText } from '../functions/column';
+import { InvalidInput } from '../src/errors';
 import type { Heading } from './headers';
 import type { RangeReading, SheetArea } from './port';
 import { turnedArea, turnedCells } from './turned';
@@ -58,8 +60,6 @@ export interface Run {
   readonly lastRow: number;
 }
 
-const isNumber = (cell: CellValue | undefined): cell is number => typeof cell === 'number';
-
 /** The block that the table was found in. */
 export const blockOf = ({ area, cells, isTurned }: Table): RangeReading => ({
   area,
@@ -115,12 +115,23 @@ export function columnOf(table: Table, column: number, { firstRow, lastRow }: Ru
   return table.cells.slice(firstRow - row, lastRow - row + 1).map((cells) => [cells[column - left] ?? null]);
 }
 
+/** As the functions take it, a number stored as text too; nothing where they refuse it or pass over it. */
+function numberIn(cell: CellValue): number | null {
+  if (typeof cell !== 'string') return typeof cell === 'number' ? cell : null;
+  try {
+    return numberInText(cell, () => '');
+  } catch (error) {
+    if (error instanceof InvalidInput) return null; // it could mean two numbers
+    throw error;
+  }
+}
+
 /** Points of the run that are numbers on both sides, in the order of the sheet. */
 export function pointsOf(table: Table, run: Run): { readonly time: number; readonly value: number }[] {
   const times = columnOf(table, run.timeColumn, run);
   const values = columnOf(table, run.readingColumn, run);
-  return times.flatMap(([time], row) => {
-    const value = values[row][0];
-    return isNumber(time) && isNumber(value) ? [{ time, value }] : [];
+  return times.flatMap(([cell], row) => {
+    const [time, value] = [numberIn(cell), numberIn(values[row][0])];
+    return time !== null && value !== null ? [{ time, value }] : [];
   });
 }

@@ -59,7 +59,9 @@ function beginWith({ store }: Pick<Bench, 'store'>, table: Table): void {
   if (table.stretches.length > 0 && store.state.many.answer === 'survey')
     store.choose('many', { answer: 'order' });
   store.choose('temperature', { temperatures: null, coefficients: null, uncertainties: null, at: '' });
-  if (headingOf(table, run.timeColumn).quantity === 'temperature') store.change({ task: 'temperature' });
+  const over = headingOf(table, run.timeColumn).quantity;
+  if (over === 'temperature') store.change({ task: 'temperature' });
+  else if (over === 'time' && store.state.task === 'temperature') store.change({ task: 'rate' });
   store.choose('order', { endpointKind: rises(table, run) ? 'free' : 'zero', endpoint: '' });
   chooseSignal({ store }, signalFor(headingOf(table, run.readingColumn)));
 }

@@ -17,7 +17,7 @@ export function howItIsRead({ isTurned, names, labels }: Table, actions: Actions
       { className: 'pair' },
       selectField(
         'runs-stand-in',
-        'Times and readings stand in',
+        'Runs stand in',
         [
           { value: 'columns', label: 'columns' },
           { value: 'rows', label: 'rows' },

@@ -55,14 +55,9 @@ function chosenRun(table: Table, run: Run, { state, check }: Scene, actions: Act
       rowField('first-row', 'From', table, run, 'firstRow', actions),
       rowField('last-row', 'To', table, run, 'lastRow', actions),
     ),
-    h(
-      'div',
-      { className: 'pair' },
-      unitField('time-unit', 'Unit of times', table, run.timeColumn, actions),
-      unitField('reading-unit', 'Unit of readings', table, run.readingColumn, actions),
-    ),
+    ...unitFields(table, run, actions),
     isFollowedInTime(table, run) && h('p', { className: 'hint' }, pointsInWords(table, run)),
-    table.apart !== '' && h('p', { className: 'problem' }, `${table.apart}.`),
+    table.apart !== '' && h('p', { className: 'problem' }, table.apart),
     hint !== '' && problem(hint),
     howItIsRead(table, actions),
     proposal
@@ -77,21 +72,28 @@ function chosenRun(table: Table, run: Run, { state, check }: Scene, actions: Act
 function runField({ stretches }: Table, { firstRow: chosen }: Run, actions: Actions): Child[] {
   if (stretches.length === 0) return [];
   const current = stretches.find(({ firstRow, lastRow }) => chosen >= firstRow && chosen <= lastRow);
-  return [
-    selectField(
-      'run-name',
-      `Run, of ${stretches.length}`,
-      stretches.map(({ name, firstRow }) => ({ value: String(firstRow), label: name })),
-      String(current?.firstRow ?? ''),
-      (value) => {
-        const { firstRow, lastRow } = stretches.find((one) => String(one.firstRow) === value)!;
-        void actions.changeRun({ firstRow, lastRow });
-      },
-    ),
-  ];
+  const field = selectField(
+    'run-name',
+    `Run, of ${stretches.length}`,
+    stretches.map(({ name, firstRow }) => ({ value: String(firstRow), label: name })),
+    String(current?.firstRow ?? ''),
+    (value) => {
+      const { firstRow, lastRow } = stretches.find((one) => String(one.firstRow) === value)!;
+      void actions.changeRun({ firstRow, lastRow });
+    },
+  );
+  return [h('div', { className: 'pair' }, field)];
 }
 
-/** Asked for only where the heading does not say it. */
+/** Asked for only where a heading does not say it. */
+function unitFields(table: Table, { timeColumn, readingColumn }: Run, actions: Actions): Child[] {
+  const fields = [
+    unitField('time-unit', 'Unit of times', table, timeColumn, actions),
+    unitField('reading-unit', 'Unit of readings', table, readingColumn, actions),
+  ];
+  return fields.some(Boolean) ? [h('div', { className: 'pair' }, ...fields)] : [];
+}
+
 function unitField(id: string, label: string, table: Table, column: number, actions: Actions): Child {
   const { units = {} } = table.corrections;
   if (units[column] === undefined && headingOf(table, column).unit !== '') return null;

@@ -82,3 +82,12 @@ test('pointsOf skips rows that are no pair of numbers, columnOf keeps them', () 
   expect(columnOf(table, 2, run)).toEqual([[0], [null], [9], [12]]);
   expect(areaOf(table, 2, run)).toEqual({ sheet: 'Runs', row: 5, column: 2, rows: 4, columns: 1 });
 });
+
+test('pointsOf takes a number stored as text as the functions do, and leaves out what could mean two', () => {
+  const table = tableOf(block(['t / s', 'V / mL'], [0, 0], [10, '16,0'], [20, '1,234'], ['30', 12]));
+  expect(pointsOf(table, proposeRun(table))).toEqual([
+    { time: 0, value: 0 },
+    { time: 10, value: 16 },
+    { time: 30, value: 12 },
+  ]);
+});

@@ -88,3 +88,17 @@ test('temperatures written with their unit are taken as what they are, in kelvin
   await pane.press('Put it in');
   expect(pane.book.valueAt('C2')).toBeCloseTo(80, 8);
 });
+
+test('a run in time beside it brings back the rate', async () => {
+  const run = [0, 1, 2, 3, 4].map((t) => [t, 8 - t]);
+  const beside = [['t / d', 'V / mL'], ...run];
+  pane = await openPane(
+    { Store: beside.map((row, r) => [...(table[r] ?? [null, null, null]), null, ...row]) },
+    'A2',
+  );
+  expect(pane.find('#task-temperature').getAttribute('aria-current')).toBe('step');
+  pane.book.select('E3');
+  await pane.settled();
+  await pane.press('Use Store!E1:F6');
+  expect(pane.find('#task-rate').getAttribute('aria-current')).toBe('step');
+});
