@@ -3,7 +3,8 @@ import { cellName, parseArea, type Area } from '../functions/address';
 import { CellError, type CellRange, type CellValue, type ErrorCode } from '../functions/cell';
 import { drawChart, removeChart, type DrawnChart } from './excel/chart';
 import { excelFiles } from './excel/files';
-import { allSupport, type HostSupport } from './excel/support';
+import { oneEach, spilledInto } from './excel/spills';
+import { allSupport, withoutSpills, type HostSupport } from './excel/support';
 import {
   CellsInUse,
   type CellToWrite,
@@ -26,10 +27,11 @@ interface Snapshot {
   }[];
 }
 
-export function excelPort({ name, files, charts }: HostSupport = allSupport): WorkbookPort {
+export function excelPort({ name, files, charts, spills }: HostSupport = allSupport): WorkbookPort {
   return {
     host: name,
     canChart: charts,
+    ...(!spills && { remark: withoutSpills }),
     ...(files && { files: excelFiles }),
     selection: () => Excel.run(readSelection),
     regionAroundActiveCell: () => Excel.run(readRegion),
@@ -38,7 +40,7 @@ export function excelPort({ name, files, charts }: HostSupport = allSupport): Wo
       Excel.run(async (context) => readArea(context, await sheetNamed(context, area.sheet), area)),
     onSelectionChange: listen,
     occupied: (area) => Excel.run((context) => occupiedCells(context, area)),
-    write: (cells, options) => Excel.run((context) => write(context, cells, options)),
+    write: (cells, options) => Excel.run((context) => write(context, cells, options, spills)),
     undo: (receipt) => Excel.run((context) => putBack(context, receipt)),
     reveal: (area) =>
       Excel.run(async (context) => {
@@ -196,6 +198,7 @@ async function write(
   context: Excel.RequestContext,
   cells: readonly CellToWrite[],
   { overwrite, description, chart }: Parameters<WorkbookPort['write']>[1],
+  canSpill: boolean,
 ): Promise<WriteReceipt> {
   const sheets = new Map<string, Excel.Worksheet>();
   for (const { area } of cells) {
@@ -209,16 +212,20 @@ async function write(
   await context.sync();
   const inUse = targets.flatMap(({ cell, range }) => filledCells(range, reachOf(cell)));
   if (inUse.length > 0 && !overwrite) throw new CellsInUse(inUse);
-  const blocks: Snapshot['blocks'] = targets.map(({ cell, range: { formulas, numberFormat } }) => ({
-    area: reachOf(cell),
-    formulas,
-    numberFormat,
-  }));
+  const blocks: Snapshot['blocks'][number][] = [];
+  for (const { cell, range } of targets) {
+    const area = reachOf(cell);
+    const spilled = inUse.length > 0 && canSpill ? await spilledInto(context, range, area) : [];
+    const formulas = range.formulas.map((row, r) => row.map((one, c) => (spilled[r]?.[c] ? '' : one)));
+    blocks.push({ area, formulas, numberFormat: range.numberFormat });
+  }
   for (const { cell, range } of targets) {
     // what stands where a formula will spill would stop it
     if (inUse.length > 0) range.clear(Excel.ClearApplyTo.contents);
     if (cell.numberFormats) range.numberFormat = cell.numberFormats as (string | null)[][]; // null: as it is
-    fill(rangeOf(sheets.get(cell.area.sheet)!, cell.area), cell);
+    const { content, spills } = cell;
+    if (spills && !canSpill && 'formula' in content) range.formulas = oneEach(content.formula, spills);
+    else fill(rangeOf(sheets.get(cell.area.sheet)!, cell.area), cell);
   }
   const sheet = chart && (await sheetNamed(context, chart.at.sheet));
   const drawn = sheet && drawChart(sheet, (area) => rangeOf(sheet, area), chart);

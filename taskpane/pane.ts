@@ -89,7 +89,7 @@ function oneAtATime(look: () => Promise<void>): () => void {
 }
 
 /** What the views show of the workbook's host; they ask nothing of it. */
-type Host = Pick<WorkbookPort, 'host' | 'files' | 'canChart'>;
+type Host = Pick<WorkbookPort, 'host' | 'remark' | 'files' | 'canChart'>;
 
 type Step = (scene: Scene, actions: Actions, host: Host) => HTMLElement;
 
@@ -109,6 +109,7 @@ export function view(scene: Scene, actions: Actions, host: Host): HTMLElement {
     'div',
     { className: 'flaskpace' },
     h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host.host)),
+    host.remark !== undefined && h('p', { className: 'hint' }, host.remark),
     runStep(scene, actions),
     taskBar(task, actions),
     steps[task](scene, actions, host),

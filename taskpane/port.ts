@@ -68,6 +68,8 @@ export interface WorkbookFiles {
 export interface WorkbookPort {
   /** For the notice line: `Excel`, `local workbook`. */
   readonly host: string;
+  /** What the person must know of this host, where it lacks something. */
+  readonly remark?: string;
   /** Left out where the host gives no files. */
   readonly files?: WorkbookFiles;
   /** Whether charts can be drawn over its cells. */

@@ -24,3 +24,7 @@ export function supportOf(name: string): HostSupport {
     files: has('CompressedFile', '1.1') && has('ExcelApi', '1.8'),
   };
 }
+
+/** What an Excel from before 2020 lacks, and what works there. */
+export const withoutSpills =
+  'In this Excel a formula fills its own cell alone. What is put in from here becomes a formula a cell. Typed by hand, an answer of several cells is entered as an array formula: select the cells, type it, press Ctrl+Shift+Enter.';

@@ -39,6 +39,8 @@ export interface FakeExcel {
   select(reference: string): void;
   /** What Excel draws over its cells. */
   readonly charts: readonly FakeChart[];
+  /** A formula of the first of these cells has filled them all, each with 7, and each tells of it as its own. */
+  spill(reference: string, formula: string): void;
   /** Of one cell. */
   numberFormat(reference: string): string;
 }
@@ -55,6 +57,8 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
   let [shownSheet, selected]: [string, Area] = [names[0], { row: 0, column: 0, rows: 1, columns: 1 }];
   const handlers = new Set<() => Promise<void>>();
   const drawn = fakeCharts();
+  /** Cells that a formula has filled, its own among them, and where it stands. */
+  const spilled = new Map<string, Pick<Area, 'row' | 'column'>>();
   let created: { mock: OfficeMockObject; commit(): void }[] = [];
 
   const grid = <T>({ rows, columns }: Area, pick: (r: number, c: number) => T): T[][] =>
@@ -82,6 +86,10 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
       select: () => pending.push(() => ((shownSheet = sheet), (selected = area))),
       getCell: (r: number, c: number) =>
         rangeAt(sheet, { row: area.row + r, column: area.column + c, rows: 1, columns: 1 }),
+      getSpillParentOrNullObject: () => {
+        const parent = spilled.get(key(sheet, area.row, area.column));
+        return parent ? rangeAt(sheet, { ...parent, rows: 1, columns: 1 }) : nothing();
+      },
       getSurroundingRegion: () => rangeAt(sheet, surrounding(sheet, area)),
     });
     created.push({ mock, commit: () => pending.splice(0).forEach((change) => change()) });
@@ -146,14 +154,13 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
           used.map(([, column]) => column),
         ),
       );
-    const nothing = new OfficeMockObject({
-      rowIndex: 0,
-      columnIndex: 0,
-      rowCount: 0,
-      columnCount: 0,
-    });
-    created.push({ mock: nothing, commit: () => undefined });
-    return settable(nothing, {}, true);
+    return nothing();
+  }
+
+  function nothing(): Loose {
+    const mock = new OfficeMockObject({ rowIndex: 0, columnIndex: 0, rowCount: 0, columnCount: 0 });
+    created.push({ mock, commit: () => undefined });
+    return settable(mock, {}, true);
   }
 
   const workbook = {
@@ -197,6 +204,14 @@ export function fakeExcel(sheets: BenchSheets): FakeExcel {
 
   return {
     charts: drawn.shown,
+    spill(reference, formula) {
+      const { sheet = shownSheet, ...area } = parseArea(reference)!;
+      grid(area, (r, c) => {
+        const place = key(sheet, area.row + r, area.column + c);
+        cells.set(place, { ...cellOf(7), formula });
+        spilled.set(place, area);
+      });
+    },
     select(reference) {
       const { sheet = shownSheet, ...area } = parseArea(reference)!;
       [shownSheet, selected] = [sheet, area];
