@@ -18,7 +18,7 @@ export interface FunctionMetadata {
   readonly parameters: readonly ParameterMetadata[];
   readonly result: { readonly type: 'any'; readonly dimensionality: Dimensionality };
   readonly options?: {
-    /** Where its ranges stand in the sheet, so that a blank can be told from a zero. */
+    /** Where its arguments stand in the sheet, so that a blank can be told from a zero. */
     readonly requiresParameterAddresses?: true;
     /** It is told when its answer is no longer wanted. */
     readonly cancelable?: true;
@@ -61,7 +61,7 @@ function describeFunction(f: CellFunction, helpBase: string | undefined): Functi
 
 function optionsOf(f: CellFunction): Pick<FunctionMetadata, 'options'> {
   const options = {
-    ...(takesRanges(f) ? { requiresParameterAddresses: true as const } : {}),
+    ...(Object.keys(f.parameters).length > 0 ? { requiresParameterAddresses: true as const } : {}),
     ...(mayBeLong(f) ? { cancelable: true as const } : {}),
   };
   return Object.keys(options).length > 0 ? { options } : {};
@@ -88,6 +88,3 @@ export function parameterHelp({ help, unit, bounds, optional, whenOmitted }: Par
 }
 
 const unitlessUnits = new Set(['', '1', 'any', 'text']);
-
-const takesRanges = (f: CellFunction): boolean =>
-  Object.values(f.parameters).some(({ dimension }) => dimension === 'matrix');

@@ -122,14 +122,11 @@ function stopOf(invocation: Invocation): AbortSignal {
   return stop.signal;
 }
 
-/** Excel hands a blank inside a range over as 0, which among other numbers would count as a reading. */
-function hasDoubtfulZero(argument: unknown): boolean {
-  if (!Array.isArray(argument)) return false;
-  const cells = argument.flat();
-  return cells.includes(0) && cells.some((cell) => typeof cell === 'number' && cell !== 0);
-}
+/** Excel hands a blank cell over as 0, by itself or within a range, which would count as a reading. */
+const hasDoubtfulZero = (argument: unknown): boolean =>
+  Array.isArray(argument) ? argument.some((row: unknown[]) => row.includes(0)) : argument === 0;
 
-/** The argument with null for each zero that is a blank cell; as it came where the sheet cannot be read. */
+/** The argument as rows, with null for each zero that is a blank cell; as it came where the sheet cannot be read. */
 async function withBlanks(
   argument: unknown,
   address: string | null | undefined,
@@ -138,9 +135,8 @@ async function withBlanks(
   if (!address || !hasDoubtfulZero(argument)) return argument;
   try {
     const blanks = await blanksIn(address);
-    return (argument as unknown[][]).map((row, r) =>
-      row.map((cell, c) => (cell === 0 && blanks[r]?.[c] ? null : cell)),
-    );
+    const rows = (Array.isArray(argument) ? argument : [[argument]]) as unknown[][];
+    return rows.map((row, r) => row.map((cell, c) => (cell === 0 && blanks[r]?.[c] ? null : cell)));
   } catch {
     return argument;
   }

@@ -126,10 +126,22 @@ describe('a zero that may be a blank', () => {
     expect(blanksIn.mock.calls).toEqual([['Run!A1:A3']]);
   });
 
-  test('costs nothing in columns without zeros, or of zeros alone', () => {
+  test('costs nothing where there is no zero', () => {
     const blanksIn = jest.fn();
-    expect(excelHandler(gaps, host, { blanksIn })(y, [[0], [0]], at)).toEqual([[5], [6], [7], [0], [0]]);
+    expect(excelHandler(gaps, host, { blanksIn })(y, [[1], [2]], at)).toEqual([[5], [6], [7], [1], [2]]);
     expect(blanksIn).not.toHaveBeenCalled();
+  });
+
+  test('is looked at where nothing else stands, too: a single cell, a column of zeros', async () => {
+    const blanksIn = jest.fn(async () => [[true], [false]]);
+    expect(await excelHandler(gaps, host, { blanksIn })([[0], [0]], y, at)).toEqual([
+      ['gap'],
+      [0],
+      [5],
+      [6],
+      [7],
+    ]);
+    expect(await excelHandler(gaps, host, { blanksIn })(0, y, at)).toEqual([['gap'], [5], [6], [7]]);
   });
 
   test('is believed in what is no reference, and where the sheet cannot be read', async () => {

@@ -18,6 +18,10 @@ export const withCell = (args: FunctionCase['args'], cell: CellResult): Function
     return argument.map((row, r) => (r === place ? row.map(() => cell as never) : row));
   });
 
+/** A reference to a cell that holds nothing, where one number is wanted. */
+const blankForNumbers = (args: FunctionCase['args']): FunctionCase['args'] =>
+  args.map((argument) => (typeof argument === 'number' ? [[null]] : argument));
+
 export const functionCases: readonly FunctionCase[] = catalogue.flatMap((f) => {
   const { args } = callIn(f.example.formula);
   const cases: readonly [string, FunctionCase['args']][] = [
@@ -26,6 +30,7 @@ export const functionCases: readonly FunctionCase[] = catalogue.flatMap((f) => {
     ['a true zero in every range', withCell(args, 0)],
     ['words in every range', withCell(args, 'n/a')],
     ['an error cell in every range', withCell(args, new CellError('#DIV/0!'))],
+    ['a blank cell for each single number', blankForNumbers(args)],
     ['nothing at all', []],
   ];
   return cases.map(([title, given]) => ({ f, args: given, title: `${typedName(f)}: ${title}` }));
