@@ -77,7 +77,7 @@ function answerInWords({ result, parameters }: CellFunction): string {
   const unit = result.unit === '1' ? 'a pure number' : `unit: ${asRead(result.unit)}`;
   const detail =
     'detail' in parameters
-      ? '; with detail TRUE a row: value, standard uncertainty, lower and upper 95 % limit, degrees of freedom'
+      ? '; with detail TRUE a row for each number: value, standard uncertainty, lower and upper 95 % limit, degrees of freedom'
       : '';
   return `${shapes[result.shape]}; ${unit}${detail}.`;
 }

@@ -79,7 +79,7 @@ input { font: inherit; padding: 0.45rem 0.6rem; width: 100%; color: inherit; bac
 .way { display: grid; grid-template-columns: repeat(auto-fit, minmax(8.5rem, 1fr)); gap: 0.75rem; padding: 0; list-style: none; counter-reset: step; }
 .way li { padding: 0.5rem 0.7rem; background: var(--card); border: 1px solid var(--rule); border-top: 3px solid var(--press); border-radius: 4px; }
 .way strong { display: block; }
-.way a { display: block; }
+.way a { display: block; font-size: 0.88em; }
 [hidden] { display: none !important; }
 @media (max-width: 30rem) {
   body { padding: 0.75rem 0.75rem 2rem; }

@@ -20,7 +20,7 @@ export default defineFunction({
   summary:
     'Enthalpy, entropy and Gibbs energy of activation, from rate coefficients at several temperatures.',
   equations: {
-    lines: ['k = (k_B T/h) exp(ΔS‡/R) exp(−ΔH‡/(RT))', 'ΔG‡ = ΔH‡ − TΔS‡'],
+    lines: ['k = k_B T/h · exp(ΔS‡/R) · exp(−ΔH‡/(RT))', 'ΔG‡ = ΔH‡ − TΔS‡'],
     where: {
       k: 'rate coefficient',
       k_B: 'Boltzmann constant, 1.380649 × 10⁻²³ J/K',
