@@ -1,7 +1,11 @@
 import { criticalDensity, criticalTemperature, waterDensity } from './water';
 
-/** N, i, j of the release. */
-const terms = [
+/**
+ * N, i, j of the dielectricRelease.
+ *
+ * @example dielectricTerms[1] // [-0.957771379375, 1, 1]
+ */
+export const dielectricTerms = [
   [0.978224486826, 1, 0.25],
   [-0.957771379375, 1, 1],
   [0.237511794148, 1, 2.5],
@@ -15,8 +19,12 @@ const terms = [
   [-1.2317921872e-10, 10, 10],
 ] as const;
 
-/** As the release prints them, older than today's constants: its equation was fitted with these. */
-const release = {
+/**
+ * As the release prints them, older than today's constants: its equation was fitted with these.
+ *
+ * @example dielectricRelease.molarMass // 0.018015268
+ */
+export const dielectricRelease = {
   avogadro: 6.0221367e23, // 1/mol
   boltzmann: 1.380658e-23, // J/K
   vacuumPermittivity: 1 / (4e-7 * Math.PI * 299792458 ** 2), // C²/(J m)
@@ -39,12 +47,12 @@ export function waterDielectricConstant(temperature: number): number {
   const delta = density / criticalDensity;
   const tau = criticalTemperature / temperature;
   let g = 1 + 0.00196096504426 * delta * (temperature / 228 - 1) ** -1.2;
-  for (const [n, i, j] of terms) g += n * delta ** i * tau ** j;
-  const perVolume = (release.avogadro * density) / release.molarMass;
+  for (const [n, i, j] of dielectricTerms) g += n * delta ** i * tau ** j;
+  const perVolume = (dielectricRelease.avogadro * density) / dielectricRelease.molarMass;
   const a =
-    (perVolume * release.dipoleMoment ** 2 * g) /
-    (release.vacuumPermittivity * release.boltzmann * temperature);
-  const b = (perVolume * release.polarizability) / (3 * release.vacuumPermittivity);
+    (perVolume * dielectricRelease.dipoleMoment ** 2 * g) /
+    (dielectricRelease.vacuumPermittivity * dielectricRelease.boltzmann * temperature);
+  const b = (perVolume * dielectricRelease.polarizability) / (3 * dielectricRelease.vacuumPermittivity);
   const root = Math.sqrt(9 + 2 * a + 18 * b + a ** 2 + 10 * a * b + 9 * b ** 2);
   return (1 + a + 5 * b + root) / (4 - 4 * b);
 }

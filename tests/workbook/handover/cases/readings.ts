@@ -14,6 +14,25 @@ export const readings: Cases = {
     becomes: 'live',
     changed: { A3: 4.2, B1: '0.2 mol/L' },
   },
+  'Acidity at a temperature in a cell': {
+    typed: {
+      ...column('A1', [7, 2.5, null, 11]),
+      B1: 30,
+      B2: '21.5 degC',
+      B3: 0.05,
+      C1: '=PACE.ACIDITY(A1:A4,,B1,"OH")',
+      D1: '=PACE.ACIDITY(A1:A4,B3,B2)',
+      E1: '=PACE.ACIDITY(A1:A4,B3,B1,"OH")',
+    },
+    becomes: 'live',
+    changed: { A3: 4.2, B1: 61, B2: '5.5 degC', B3: 0.1 },
+  },
+  'Acidity where water freezes': {
+    typed: { A1: 7, B1: 5, C1: '=PACE.ACIDITY(A1,0.1,B1)' },
+    becomes: 'live',
+    changed: { B1: -5 },
+    then: 'error',
+  },
   'Acidity, out of bounds': {
     typed: { ...column('A1', [3, 2.5]), C1: '=PACE.ACIDITY(A1:A2)' },
     becomes: 'live',
