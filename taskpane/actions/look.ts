@@ -1,6 +1,6 @@
 /** Looking at the sheet: which block is the run, and what stands in it now. */
 import { rises } from '../calls/order';
-import type { RateChoice } from '../choices';
+import { firstChoices, type RateChoice } from '../choices';
 import { findTable } from '../findTable';
 import { withHeadings } from '../place';
 import type { RangeReading } from '../port';
@@ -53,7 +53,9 @@ function beginWith({ store }: Pick<Bench, 'store'>, table: Table): void {
   const run = proposeRun(table);
   store.change({ table, run, survey: null, proposal: null, hint: '', notice: null });
   store.choose('put', { isOwn: false, question: null });
-  store.choose('rate', startingTimes(table, run));
+  // readings used and the rest were meant for the run before
+  const { points, degree, coefficient } = firstChoices.rate;
+  store.choose('rate', { points, degree, coefficient, ...startingTimes(table, run) });
   store.choose('many', { picked: null });
   // runs below each other make no block that one formula could survey
   if (table.stretches.length > 0 && store.state.many.answer === 'survey')

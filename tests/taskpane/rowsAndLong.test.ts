@@ -154,3 +154,13 @@ test('a unit that no heading names is asked for, and stands in what is written',
   await pane.press('Put it in');
   expect(pane.book.valueAt('C1')).toBe('rate at 30 s / (mL/s)');
 });
+
+test('readings used for one table are not carried to another', async () => {
+  const run = [['t / s', 'V / mL'], ...times.map((t) => [t, 2 * t])];
+  pane = await openPane({ Run: run.map((row) => [...row, null, ...row]) }, 'A2');
+  await pane.type('#rate-points', '7');
+  pane.book.select('D3');
+  await pane.settled();
+  await pane.press('Use Run!D1:E8');
+  expect(pane.find<HTMLInputElement>('#rate-points').value).toBe('');
+});
