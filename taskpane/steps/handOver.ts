@@ -1,6 +1,6 @@
 /** A copy of the workbook for someone who installs nothing. */
 import type { Actions } from '../actions';
-import type { HandedCopy } from '../copying';
+import type { CellsAndWhy, HandedCopy } from '../copying';
 import { h, type Child } from '../h';
 import type { WorkbookFiles } from '../port';
 import type { Copying, State } from '../store';
@@ -45,8 +45,8 @@ function said(copying: Copying | null): string {
   if (!copying) return '';
   if (copying.kind === 'making') return `${copying.doing} …`;
   const time = copying.at.toLocaleTimeString([], { hour: '2-digit', minute: '2-digit' });
-  const { live, frozen } = copying.copy;
-  return live + frozen.length > 0
+  const { live, frozen, left } = copying.copy;
+  return live + frozen.length + left.length > 0
     ? `The copy, of the workbook as it was at ${time}:`
     : `No formula of ours stands in this workbook: the copy of ${time} is the same, calculated anew.`;
 }
@@ -69,27 +69,32 @@ const made = (copy: HandedCopy, verb: string, actions: Actions): Child[] => [
     button('Make it again', () => void actions.makeCopy()),
   ),
   copy.frozen.length > 0 && details('What is frozen, and why', copy.frozen),
+  copy.left.length > 0 && details('What still needs the add-in', copy.left),
   copy.failing.length > 0 && details('Which showed an error', [{ why: '', cells: copy.failing }]),
 ];
 
-function counts({ live, frozen, failing }: HandedCopy): HTMLElement | false {
-  const frozenCount = frozen.reduce((sum, { cells }) => sum + cells.length, 0);
-  if (live + frozenCount === 0) return false;
-  return h(
-    'dl',
-    { className: 'counts' },
-    ...counted(live, 'live: they follow their inputs'),
-    ...counted(frozenCount, 'frozen to their value'),
-    ...(failing.length > 0 ? counted(failing.length, 'showed an error before, and still do') : []),
+function counts({ live, frozen, left, failing }: HandedCopy): HTMLElement | false {
+  const rows: readonly (readonly [count: number, meaning: string])[] = [
+    [live, 'live: they follow their inputs'],
+    [cellsIn(frozen), 'frozen to their value'],
+    [cellsIn(left), 'in formats or validations: these still need the add-in'],
+    [failing.length, 'showed an error before, and still do'],
+  ];
+  const shown = rows.filter(([count]) => count > 0);
+  return (
+    shown.length > 0 &&
+    h(
+      'dl',
+      { className: 'counts' },
+      ...shown.flatMap(([count, meaning]) => [h('dt', {}, String(count)), h('dd', {}, meaning)]),
+    )
   );
 }
 
-const counted = (count: number, meaning: string): Child[] => [
-  h('dt', {}, String(count)),
-  h('dd', {}, meaning),
-];
+const cellsIn = (groups: readonly CellsAndWhy[]): number =>
+  groups.reduce((sum, { cells }) => sum + cells.length, 0);
 
-const details = (summary: string, groups: HandedCopy['frozen']): HTMLElement =>
+const details = (summary: string, groups: readonly CellsAndWhy[]): HTMLElement =>
   h(
     'details',
     {},

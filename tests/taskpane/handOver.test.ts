@@ -16,6 +16,7 @@ const copy: HandedCopy = {
     { why: 'a fit', cells: ['A1', 'A2', 'A3', 'A4', 'A5'] },
     { why: 'another', cells: ['B1'] },
   ],
+  left: [{ why: 'a validation: without the add-in it holds nothing back any more', cells: ['Run!A1'] }],
   failing: ["'Gas run'!C9"],
 };
 
@@ -42,9 +43,10 @@ test('the workbook’s file is read whole, its copy told of, and opened beside i
   expect(Buffer.from(makeCopy.mock.calls[0][0]).equals(Buffer.from(file))).toBe(true);
   expect(office.unclosed()).toBe(0);
   expect(pane.text('.counts')).toBe(
-    '3live: they follow their inputs6frozen to their value1showed an error before, and still do',
+    '3live: they follow their inputs6frozen to their value1in formats or validations: these still need the add-in1showed an error before, and still do',
   );
   expect(pane.text('#hand-over')).toContain('a fit: A1, A2, A3, A4 and 1 more');
+  expect(pane.text('#hand-over')).toContain('it holds nothing back any more: Run!A1');
   expect(office.opened).toEqual([]);
   await pane.press('Open the copy');
   expect(office.opened.map((text) => Buffer.from(text, 'base64').equals(Buffer.from(copy.bytes)))).toEqual([
@@ -82,10 +84,18 @@ test('what goes wrong is said: with the file, and with the copy', async () => {
 });
 
 test('a workbook without formulas of ours is said to be one', async () => {
-  await open(async () => ({ ...copy, live: 0, frozen: [], failing: [] }));
+  await open(async () => ({ ...copy, live: 0, frozen: [], left: [], failing: [] }));
   await pane.press('Make the copy');
   await until(() => pane.text('#hand-over [role=status]').startsWith('No formula'));
   expect(pane.text('#hand-over [role=status]')).toContain('No formula of ours');
+});
+
+test('a workbook whose only calls stand in no cell is said to need the add-in still', async () => {
+  await open(async () => ({ ...copy, live: 0, frozen: [], failing: [] }));
+  await pane.press('Make the copy');
+  await until(() => pane.root.querySelector('.counts') !== null);
+  expect(pane.text('.counts')).toBe('1in formats or validations: these still need the add-in');
+  expect(pane.text('#hand-over [role=status]')).not.toContain('No formula of ours');
 });
 
 test('where Excel keeps the file to itself, the other ways are told', async () => {

@@ -1,20 +1,28 @@
-import type { HandedCopy } from '../../taskpane/copying';
+import type { CellsAndWhy, HandedCopy } from '../../taskpane/copying';
 import type { HandedFormula } from '../handover/handed';
 import { placeOf, showsError, type HandedOver } from '../handover/handOver';
 
 /** What the pane tells of a copy. */
-export function reportOf({ bytes, formulas, names }: HandedOver): HandedCopy {
+export function reportOf({ bytes, formulas, names, elsewhere }: HandedOver): HandedCopy {
   const isLive = ({ said }: HandedFormula): boolean => said !== undefined;
-  const byReason = new Map<string, string[]>();
-  const freeze = (why: string, cells: string): void => {
-    byReason.set(why, [...(byReason.get(why) ?? []), cells]);
-  };
-  for (const formula of formulas.filter((one) => !isLive(one))) freeze(formula.why ?? '', placeOf(formula));
-  for (const { name } of names) freeze('a name stands for one value', name);
   return {
     bytes,
     live: formulas.filter(isLive).length,
-    frozen: [...byReason].map(([why, cells]) => ({ why, cells })),
+    frozen: byReason([
+      ...formulas.filter((one) => !isLive(one)).map((one): Reason => [one.why ?? '', placeOf(one)]),
+      ...names.map(({ name }): Reason => ['a name stands for one value', name]),
+    ]),
+    left: byReason(
+      elsewhere.map(({ kind, cells, loss }): Reason => [`${kind}: without the add-in ${loss}`, cells]),
+    ),
     failing: formulas.filter(showsError).map(placeOf),
   };
+}
+
+type Reason = readonly [why: string, cells: string];
+
+function byReason(reasons: readonly Reason[]): CellsAndWhy[] {
+  const grouped = new Map<string, string[]>();
+  for (const [why, cells] of reasons) grouped.set(why, [...(grouped.get(why) ?? []), cells]);
+  return [...grouped].map(([why, cells]) => ({ why, cells }));
 }

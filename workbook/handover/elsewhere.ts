@@ -8,17 +8,19 @@ import type { Package } from '../xlsx/zip';
 import { callsIn } from './calls';
 
 export interface CallElsewhere {
-  /** `a conditional format on 'Gas run'!B2:B9`. */
-  readonly where: string;
+  /** `a conditional format`. */
+  readonly kind: string;
+  /** `'Gas run'!B2:B9`. */
+  readonly cells: string;
   /** As it was typed, without `=`. */
   readonly formula: string;
   /** What a reader without the add-in misses. */
   readonly loss: string;
 }
 
-const kinds: Readonly<Record<string, Pick<CallElsewhere, 'where' | 'loss'>>> = {
-  conditionalFormatting: { where: 'a conditional format', loss: 'it shows no more' },
-  dataValidation: { where: 'a validation', loss: 'it holds nothing back any more' },
+const kinds: Readonly<Record<string, Pick<CallElsewhere, 'kind' | 'loss'>>> = {
+  conditionalFormatting: { kind: 'a conditional format', loss: 'it shows no more' },
+  dataValidation: { kind: 'a validation', loss: 'it holds nothing back any more' },
 };
 
 export const callsElsewhere = (pack: Package, sheets: readonly SheetPart[]): CallElsewhere[] =>
@@ -28,7 +30,7 @@ export const callsElsewhere = (pack: Package, sheets: readonly SheetPart[]): Cal
 function inSheet(xml: string, { name: sheet, path }: SheetPart): CallElsewhere[] {
   if (!/PACE[._]/i.test(xml.slice(xml.lastIndexOf('sheetData>')))) return [];
   const found: CallElsewhere[] = [];
-  let kind: string | undefined;
+  let holder: string | undefined;
   let cells = '';
   let text = '';
   let formulas: string[] = [];
@@ -36,27 +38,25 @@ function inSheet(xml: string, { name: sheet, path }: SheetPart): CallElsewhere[]
     open({ name, attributes }) {
       text = '';
       if (!(localName(name) in kinds)) return;
-      kind = localName(name);
+      holder = localName(name);
       cells = attributes.sqref ?? '';
       formulas = [];
     },
-    text: (more) => void (kind && (text += more)),
+    text: (more) => void (holder && (text += more)),
     close({ name }) {
-      if (kind === undefined) return;
+      if (holder === undefined) return;
       const element = localName(name);
       if (/^(?:formula[12]?|f)$/.test(element)) formulas.push(typedFormula(plainText(text)));
       if (element === 'sqref') cells = text;
-      if (element !== kind) return;
-      for (const formula of new Set(formulas.filter(callsOurs))) {
-        const { where, loss } = kinds[kind];
-        found.push({ where: `${where} on ${quotedSheet(sheet)}!${cells}`, formula, loss });
-      }
-      kind = undefined;
+      if (element !== holder) return;
+      for (const formula of new Set(formulas.filter(callsOurs)))
+        found.push({ ...kinds[holder], cells: `${quotedSheet(sheet)}!${cells}`, formula });
+      holder = undefined;
     },
   });
   return found;
 }
 
 /** `a conditional format on Run!B2:B9 calls PACE.EVENT: without the add-in it shows no more`. */
-export const elsewhereLine = ({ where, formula, loss }: CallElsewhere): string =>
-  `${where} calls ${[...new Set(callsIn(formula).map(({ f }) => typedName(f)))].join(' and ')}: without the add-in ${loss}`;
+export const elsewhereLine = ({ kind, cells, formula, loss }: CallElsewhere): string =>
+  `${kind} on ${cells} calls ${[...new Set(callsIn(formula).map(({ f }) => typedName(f)))].join(' and ')}: without the add-in ${loss}`;

@@ -66,9 +66,9 @@ export function methodSheet(
   for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
   for (const { name: own, refersTo, value } of names)
     rows.push(['a name', own, 'frozen', null, null, `=${refersTo}`, `frozen: it stands for ${value}`]);
-  for (const { where, formula, loss } of elsewhere)
+  for (const { kind, cells, formula, loss } of elsewhere)
     rows.push([
-      where,
+      `${kind} on ${cells}`,
       null,
       'as it was',
       null,

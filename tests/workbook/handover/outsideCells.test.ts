@@ -1,5 +1,6 @@
 /** Calls of ours that stand in tables, conditional formats and validations rather than in cells. */
 import { recalculate } from '../../../workbook/commands/recalculate';
+import { reportOf } from '../../../workbook/copying/report';
 import { elsewhereLine } from '../../../workbook/handover/elsewhere';
 import { handOver, type HandedOver } from '../../../workbook/handover/handOver';
 import { packageOf, rowsOf, textOf, worksheet, type PackageOptions } from '../xlsx/package';
@@ -75,11 +76,19 @@ describe('conditional formats and validations', () => {
   };
 
   test('are told of, each with what is lost, and stay to the letter', async () => {
-    const { bytes, elsewhere } = await handed(options);
+    const copy = await handed(options);
+    const { bytes, elsewhere } = copy;
     expect(elsewhere.map(elsewhereLine)).toEqual([
       "a conditional format on 'My run'!A1:A9 C1 calls PACE.EVENT: without the add-in it shows no more",
       "a validation on 'My run'!A1 calls PACE.EVENT: without the add-in it holds nothing back any more",
       "a conditional format on 'My run'!B2:B3 calls PACE.CONVERSION: without the add-in it shows no more",
+    ]);
+    expect(reportOf(copy).left).toEqual([
+      {
+        why: 'a conditional format: without the add-in it shows no more',
+        cells: ["'My run'!A1:A9 C1", "'My run'!B2:B3"],
+      },
+      { why: 'a validation: without the add-in it holds nothing back any more', cells: ["'My run'!A1"] },
     ]);
     expect(textOf(bytes, 'xl/worksheets/sheet1.xml')).toContain(after);
     expect(textOf(bytes, 'xl/worksheets/sheet3.xml')).toContain('=PACE.EVENT(A1)&gt;0.03');
