@@ -39,11 +39,19 @@ const byQuantity: Readonly<Partial<Record<Quantity, string>>> = {
   absorbance: 'ABSORBANCE',
 };
 
-export function signalFor({ quantity, text }: Heading): string {
-  if (quantity === 'volume' && /\btit(?:re|er)|burette/i.test(text)) return 'TITRE';
+/** @param rises a gas burette fills, while less and less titrant is needed for what reacts away */
+export function signalFor({ quantity, text }: Heading, rises: boolean): string {
+  if (quantity === 'volume' && (!rises || /\btit(?:re|er)|burette/i.test(text))) return 'TITRE';
   if (/\bconductivity\b|^[κΛ](?=\W|$)|\b[mµμ]?S\/cm\b/i.test(text)) return 'CONDUCTIVITY';
   return byQuantity[quantity] ?? asItIs;
 }
+
+/** Where gas is caught in glass. */
+const confined = new Set(['GASVOLUME', 'GASPRESSURE', 'TOTALPRESSURE']);
+
+/** @param suits what the readings look like, where they are taken as they stand */
+export const isConfinedGas = (what: string, suits: string): boolean =>
+  confined.has(what === asItIs ? suits : what);
 
 export const signalNamed = (functionName: string): Signal | undefined =>
   signals.find((signal) => signal.functionName === functionName);

@@ -44,8 +44,8 @@ export function correctTable({ store }: Bench, part: Corrections): void {
   if (part.units === undefined) return beginWith({ store }, found);
   const before = headingOf(table, run.readingColumn).quantity;
   store.change({ table: found, survey: null });
-  const heading = headingOf(found, run.readingColumn);
-  if (heading.quantity !== before) chooseSignal({ store }, signalFor(heading));
+  if (headingOf(found, run.readingColumn).quantity !== before)
+    chooseSignal({ store }, suitingSignal(found, run));
 }
 
 /** The table's first run, and what each step begins with on it. */
@@ -65,8 +65,11 @@ function beginWith({ store }: Pick<Bench, 'store'>, table: Table): void {
   if (over === 'temperature') store.change({ task: 'temperature' });
   else if (over === 'time' && store.state.task === 'temperature') store.change({ task: 'rate' });
   store.choose('order', { endpointKind: rises(table, run) ? 'free' : 'zero', endpoint: '' });
-  chooseSignal({ store }, signalFor(headingOf(table, run.readingColumn)));
+  chooseSignal({ store }, suitingSignal(table, run));
 }
+
+const suitingSignal = (table: Table, run: Run): string =>
+  signalFor(headingOf(table, run.readingColumn), rises(table, run));
 
 /** What was measured, with what the heading says of it. */
 export function chooseSignal({ store }: Pick<Bench, 'store'>, what: string): void {
@@ -150,8 +153,7 @@ export function changeRun({ store }: Bench, part: Partial<Run>): void {
   if (!table || !run) return;
   const next = settledRun(table, run, part);
   store.change({ run: next, survey: null, notice: null });
-  if (next.readingColumn !== run.readingColumn)
-    chooseSignal({ store }, signalFor(headingOf(table, next.readingColumn)));
+  if (next.readingColumn !== run.readingColumn) chooseSignal({ store }, suitingSignal(table, next));
   const turned = rises(table, next) !== rises(table, run);
   if (turned) store.choose('order', { endpointKind: rises(table, next) ? 'free' : 'zero', endpoint: '' });
 }

@@ -17,6 +17,10 @@ export interface Columns {
   readonly uncertainties: number | null;
 }
 
+/** Whether temperatures were chosen, or a heading names them. */
+export const knowsTemperatures = ({ columns }: Table, { temperatures }: TemperatureChoice): boolean =>
+  temperatures !== null || columns.some(({ heading }) => heading.quantity === 'temperature');
+
 /** As chosen, or else the first temperatures and the coefficients, or whatever stands right of them. */
 export function columnsFor({ columns }: Table, choice: TemperatureChoice): Columns {
   const has = (column: number | null): column is number => columns.some((one) => one.column === column);

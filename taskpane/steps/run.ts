@@ -2,11 +2,12 @@
 import { areaName } from '../../functions/address';
 import { shown } from '../../src/errors';
 import type { Actions } from '../actions';
+import { rises } from '../calls/order';
 import { h, type Child } from '../h';
 import { later } from '../later';
 import { columnOf, headingOf, limitsOf, pointsOf, type Run, type Table } from '../runs';
 import type { Scene } from '../scene';
-import { functionOf } from '../signals';
+import { functionOf, isConfinedGas, signalFor } from '../signals';
 import type { State } from '../store';
 import { placeName } from '../turned';
 import { columnField } from './columnField';
@@ -17,7 +18,8 @@ import { howItIsRead } from './howItIsRead';
 /** Drawn again only for another run or block: a table of many columns has long lists to choose from. */
 export function runStep(scene: Scene, actions: Actions): HTMLElement {
   const { table, run, proposal, hint } = scene.state;
-  return later(step('run', 'Run'), [table, run, proposal, hint, isCautioned(scene.state)], () =>
+  const { what } = scene.state.reading;
+  return later(step('run', 'Run'), [table, run, proposal, hint, what, isCautioned(scene.state)], () =>
     table && run ? chosenRun(table, run, scene, actions) : noRun(hint, actions),
   );
 }
@@ -64,7 +66,7 @@ function chosenRun(table: Table, run: Run, { state, check }: Scene, actions: Act
       ? button(`Use ${areaName(proposal.area)} instead`, () => void actions.chooseProposal())
       : button('Use the selected cells', () => void actions.chooseSelection()),
     isFollowedInTime(table, run) && check && findingsList(check),
-    !isCautioned(state) && caution(table, run),
+    !isCautioned(state) && caution(table, run, state.reading),
   ];
 }
 
@@ -147,11 +149,9 @@ function pointsInWords(table: Table, run: Run): string {
     : `${counted}; ${gaps} ${gaps === 1 ? `${place} without a pair of numbers is` : `${place}s without a pair of numbers are`} skipped`;
 }
 
-/** Volume and pressure are how a gas run is read. */
-function caution(table: Table, run: Run): HTMLElement | null {
-  const { quantity, text } = headingOf(table, run.readingColumn);
-  const isGas = quantity === 'pressure' || (quantity === 'volume' && !/titre|titer|burette/i.test(text));
-  if (!isGas) return null;
+function caution(table: Table, run: Run, { what }: State['reading']): HTMLElement | null {
+  const suits = signalFor(headingOf(table, run.readingColumn), rises(table, run));
+  if (!isConfinedGas(what, suits)) return null;
   return h(
     'p',
     { className: 'caution' },

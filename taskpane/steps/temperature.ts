@@ -1,7 +1,12 @@
 /** How rate coefficients move with temperature, and what one would be at another. */
 import { functionNamed } from '../../functions/catalogue';
 import type { Actions } from '../actions';
-import { columnsFor, temperatureFormula, type TemperatureAnswer } from '../calls/temperature';
+import {
+  columnsFor,
+  knowsTemperatures,
+  temperatureFormula,
+  type TemperatureAnswer,
+} from '../calls/temperature';
 import type { TemperatureAnswerKind } from '../choices';
 import { plainNumber } from '../../functions/format';
 import { h, type Child } from '../h';
@@ -34,6 +39,8 @@ export function temperatureStep({ state, temperature: answer }: Scene, actions: 
     'temperature',
     'Temperature',
     ...columnFields(table, columnsFor(table, temperature), actions),
+    !knowsTemperatures(table, temperature) &&
+      h('p', { className: 'warning' }, 'No heading names a temperature: choose the column that holds it.'),
     answer.line.length > 0 &&
       arrheniusPlot(answer, headingOf(table, columnsFor(table, temperature).coefficients)),
     result(...energyInWords(answer)),

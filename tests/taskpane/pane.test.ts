@@ -168,13 +168,6 @@ test('rows and columns can be corrected', async () => {
   expect(text('.result .unit')).toBe('g/s');
 });
 
-test('gas readings come with their caution, others without', async () => {
-  await open({ 'Gas run': gasRun.map((row, r) => [...row, r === 0 ? 'm / g' : 100 - Number(row[0]) / 10]) });
-  expect(text('.caution')).toMatch(/Gas in closed glass/);
-  await choose('#reading-column', '2');
-  expect(root.querySelector('.caution')).toBeNull();
-});
-
 test('an edited reading changes the rate when the pane looks again', async () => {
   await open();
   await tick('#kind-average');

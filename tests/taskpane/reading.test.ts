@@ -23,6 +23,21 @@ async function open(rows: readonly (readonly (string | number)[])[] = gasRun): P
   await pane.tick('#task-reading');
 }
 
+test('gas in glass comes with its caution at every step, mass and titres without', async () => {
+  const caution = (): string | undefined =>
+    pane.root.querySelector('#run .caution')?.textContent ?? undefined;
+  await open(gasRun.map((row, r) => [...row, r === 0 ? 'm / g' : 100 - Number(row[0]) / 10]));
+  await pane.tick('#task-rate');
+  expect(caution()).toMatch(/Gas in closed glass/);
+  await pane.choose('#reading-column', '2');
+  expect(caution()).toBeUndefined();
+  await pane.choose('#reading-column', '1');
+  await pane.tick('#task-reading');
+  await pane.choose('#reading-what', 'TITRE');
+  await pane.tick('#task-rate');
+  expect(caution()).toBeUndefined();
+});
+
 test('a gas run asks for what PACE.GASVOLUME needs, in its words', async () => {
   await open();
   expect(pane.find<HTMLSelectElement>('#reading-what').value).toBe('GASVOLUME');
@@ -109,7 +124,13 @@ test.each([
   ['A', 'ABSORBANCE'],
   ['κ / (mS/cm)', 'CONDUCTIVITY'],
   ['c / (mol/L)', ''],
-])('signalFor(%s) is %s', (heading, name) => expect(signalFor(readHeading(heading))).toBe(name));
+])('signalFor(%s) of readings that rise is %s', (heading, name) =>
+  expect(signalFor(readHeading(heading), true)).toBe(name),
+);
+
+test('a volume that falls is a titre: a gas burette fills', () => {
+  expect(signalFor(readHeading('V / mL'), false)).toBe('TITRE');
+});
 
 test('every signal has a function that takes readings, and every field a help', () => {
   for (const { functionName } of signals) {

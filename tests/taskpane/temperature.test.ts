@@ -27,6 +27,17 @@ test('a table over temperature opens the temperature step, and is not checked as
   expect(pane.find<HTMLSelectElement>('#coefficients').selectedOptions[0].textContent).toBe('B: k / d⁻¹');
 });
 
+test('where no heading names a temperature, none is taken for granted', async () => {
+  pane = await openPane({ Store: [['no.', 'k / d⁻¹'], ...table.slice(1).map(([t, k]) => [t, k])] }, 'A2');
+  await pane.press('Temperature');
+  expect(pane.text('#temperature .warning')).toBe(
+    'No heading names a temperature: choose the column that holds it.',
+  );
+  await pane.choose('#temperatures', '0');
+  expect(pane.root.querySelector('#temperature .warning')).toBeNull();
+  expect(pane.text('#formula')).toBe('=PACE.ARRHENIUS(Store!A2:A5,Store!B2:B5)');
+});
+
 test('the activation energy, its plot and its formula', async () => {
   await open();
   expect(pane.text('.result .value')).toBe('80 kJ/mol');
