@@ -21,14 +21,21 @@ export interface Columns {
 export const knowsTemperatures = ({ columns }: Table, { temperatures }: TemperatureChoice): boolean =>
   temperatures !== null || columns.some(({ heading }) => heading.quantity === 'temperature');
 
-/** As chosen, or else the first temperatures and the coefficients, or whatever stands right of them. */
-export function columnsFor({ columns }: Table, choice: TemperatureChoice): Columns {
+/**
+ * As chosen, or else the first temperatures and the coefficients, or whatever stands right of them.
+ *
+ * @returns `null` for a run in time of which no column is known to hold temperatures: its times would give
+ *   a number all the same
+ */
+export function columnsFor({ columns }: Table, choice: TemperatureChoice): Columns | null {
   const has = (column: number | null): column is number => columns.some((one) => one.column === column);
   const first = (quantity: string): number | undefined =>
     columns.find(({ heading }) => heading.quantity === quantity)?.column;
+  const isRun = first('time') !== undefined;
   const temperatures = has(choice.temperatures)
     ? choice.temperatures
-    : (first('temperature') ?? columns[0].column);
+    : (first('temperature') ?? (isRun ? undefined : columns[0].column));
+  if (temperatures === undefined) return null;
   const others = columns.map(({ column }) => column).filter((column) => column !== temperatures);
   const beside = others.find((column) => column > temperatures) ?? others[0];
   return {
@@ -44,8 +51,10 @@ interface Given {
   readonly uncertainties: Argument;
 }
 
-function givenBy(table: Table, run: Run, choice: TemperatureChoice, pointing: Pointing): Given {
-  const { temperatures, coefficients, uncertainties } = columnsFor(table, choice);
+function givenBy(table: Table, run: Run, choice: TemperatureChoice, pointing: Pointing): Given | null {
+  const columns = columnsFor(table, choice);
+  if (!columns) return null;
+  const { temperatures, coefficients, uncertainties } = columns;
   return {
     measured: [columnArgument(table, run, temperatures), columnArgument(table, run, coefficients)],
     at: argumentOf(choice.at, pointing),
@@ -62,15 +71,17 @@ const coefficientCall = ({ measured, at, uncertainties }: Given, detail: Argumen
   [...measured, at, uncertainties, detail],
 ];
 
+/** @returns `null` while no column is known to hold temperatures */
 export function temperatureFormula(
   table: Table,
   run: Run,
   choice: TemperatureChoice,
   pointing: Pointing,
   detail: boolean,
-): string {
+): string | null {
+  const given = givenBy(table, run, choice, pointing);
   const call = choice.answer === 'energy' ? energyCall : coefficientCall;
-  return formulaText(...call(givenBy(table, run, choice, pointing), detail ? truth(true) : leftOut));
+  return given && formulaText(...call(given, detail ? truth(true) : leftOut));
 }
 
 export interface TemperatureAnswer {
@@ -86,13 +97,15 @@ export interface TemperatureAnswer {
   readonly mark: readonly Point[];
 }
 
+/** @returns `null` while no column is known to hold temperatures */
 export function temperatureAnswer(
   table: Table,
   run: Run,
   choice: TemperatureChoice,
   pointing: Pointing,
-): TemperatureAnswer {
+): TemperatureAnswer | null {
   const given = givenBy(table, run, choice, pointing);
+  if (!given) return null;
   const rows = askForRows(...energyCall(given, truth(true)));
   const energy = answeredEstimate(rows);
   const logFactor = rows.length > 1 ? readEstimate(rows[1]) : null;

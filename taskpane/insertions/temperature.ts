@@ -14,14 +14,15 @@ export function temperatureInsertion(
   table: Table,
   run: Run,
   { temperature, pointedAt, put }: Pick<State, 'temperature' | 'pointedAt' | 'put'>,
-): Insertion {
+): Insertion | null {
   const { withDetail } = put;
   const pointing = { sheet: table.sheet, pointedAt };
   const formula = temperatureFormula(table, run, temperature, pointing, withDetail);
   const columns = columnsFor(table, temperature);
+  if (!columns || formula === null) return null;
   const reads = [columns.temperatures, columns.coefficients].map((column) => areaOf(table, column, run));
   const { unit } = headingOf(table, columns.coefficients);
-  const answer = (): TemperatureAnswer => temperatureAnswer(table, run, temperature, pointing);
+  const answer = (): TemperatureAnswer | null => temperatureAnswer(table, run, temperature, pointing);
   if (temperature.answer === 'energy')
     return {
       ...(withDetail ? twoRows(formula, answer) : oneEnergy(formula, answer)),
@@ -32,7 +33,7 @@ export function temperatureInsertion(
   return {
     name,
     ...oneFormula(formula, { rows: 1, columns: detailColumns(withDetail) + (withDetail ? 1 : 0) }, () =>
-      withWords(estimateFormats(answer().predicted ?? refused, detailColumns(withDetail)), withDetail),
+      withWords(estimateFormats(answer()?.predicted ?? refused, detailColumns(withDetail)), withDetail),
     ),
     headings: [...headingsFor(name, unit, withDetail), ...(withDetail ? ['beyond those measured'] : [])],
     reads,
@@ -49,11 +50,11 @@ const withWords = (formats: NumberFormats, isLonger: boolean): NumberFormats =>
 const energyName = 'activation energy';
 const energyHeading = 'Ea / (kJ/mol)';
 
-type Answer = () => TemperatureAnswer;
+type Answer = () => TemperatureAnswer | null;
 
 const oneEnergy = (formula: string, answer: Answer): Omit<Insertion, 'reads' | 'hasDetail'> => ({
   name: energyName,
-  ...oneFormula(formula, { rows: 1, columns: 1 }, () => estimateFormats(answer().energy, 1)),
+  ...oneFormula(formula, { rows: 1, columns: 1 }, () => estimateFormats(answer()?.energy ?? refused, 1)),
   headings: [energyHeading],
 });
 
@@ -61,7 +62,7 @@ const oneEnergy = (formula: string, answer: Answer): Omit<Insertion, 'reads' | '
 function twoRows(formula: string, answer: Answer): Omit<Insertion, 'reads' | 'hasDetail'> {
   const size = { rows: 2, columns: standardRowHeadings.length };
   const formats = (): NumberFormats => {
-    const { energy, logFactor } = answer();
+    const { energy = refused, logFactor } = answer() ?? {};
     return logFactor
       ? [energy, { ok: logFactor }].flatMap((one) => estimateFormats(one, size.columns))
       : estimateFormats(energy, size.columns);

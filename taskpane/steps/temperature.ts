@@ -5,9 +5,10 @@ import {
   columnsFor,
   knowsTemperatures,
   temperatureFormula,
+  type Columns,
   type TemperatureAnswer,
 } from '../calls/temperature';
-import type { TemperatureAnswerKind } from '../choices';
+import type { TemperatureAnswerKind, TemperatureChoice } from '../choices';
 import { plainNumber } from '../../functions/format';
 import { h, type Child } from '../h';
 import { arrheniusPlot } from '../plots/arrheniusPlot';
@@ -15,7 +16,7 @@ import { headingOf, type Table } from '../runs';
 import type { Scene } from '../scene';
 import { columnField } from './columnField';
 import { estimateLines, result } from './estimate';
-import { selectField, step } from './fields';
+import { selectField, step, type Choice } from './fields';
 import { formulaLine } from './formulaLine';
 import { pointedField } from './pointedField';
 
@@ -26,23 +27,35 @@ const answers: readonly { readonly value: TemperatureAnswerKind; readonly label:
 
 export function temperatureStep({ state, temperature: answer }: Scene, actions: Actions): HTMLElement {
   const { table, run, temperature, put, pointedAt } = state;
-  if (!table || !run || !answer)
+  if (!table || !run)
     return step(
       'temperature',
       'Temperature',
       h('p', { className: 'hint' }, 'Click a cell in a table of temperatures and rate coefficients.'),
     );
-  const pointing = { sheet: table.sheet, pointedAt };
+  const columns = columnsFor(table, temperature);
+  const formula = temperatureFormula(
+    table,
+    run,
+    temperature,
+    { sheet: table.sheet, pointedAt },
+    put.withDetail,
+  );
+  if (!answer || !columns || formula === null)
+    return step(
+      'temperature',
+      'Temperature',
+      ...columnFields(table, temperature, actions),
+      toBeChosen(),
+    );
   const { predicted } = answer;
   const isRefused = predicted && 'refused' in predicted && /^temperature /.test(predicted.refused);
   return step(
     'temperature',
     'Temperature',
-    ...columnFields(table, columnsFor(table, temperature), actions),
-    !knowsTemperatures(table, temperature) &&
-      h('p', { className: 'warning' }, 'No heading names a temperature: choose the column that holds it.'),
-    answer.line.length > 0 &&
-      arrheniusPlot(answer, headingOf(table, columnsFor(table, temperature).coefficients)),
+    ...columnFields(table, columns, actions),
+    !knowsTemperatures(table, temperature) && toBeChosen(),
+    answer.line.length > 0 && arrheniusPlot(answer, headingOf(table, columns.coefficients)),
     result(...energyInWords(answer)),
     pointedField(
       {
@@ -55,7 +68,7 @@ export function temperatureStep({ state, temperature: answer }: Scene, actions: 
       },
       actions,
     ),
-    result(...predictedInWords(table, state, answer)),
+    result(...predictedInWords(headingOf(table, columns.coefficients).unit, answer)),
     selectField(
       'temperature-answer',
       'What to put in',
@@ -63,21 +76,45 @@ export function temperatureStep({ state, temperature: answer }: Scene, actions: 
       temperature.answer,
       (chosen) => void actions.changeTemperature({ answer: chosen as TemperatureAnswerKind }),
     ),
-    formulaLine(temperatureFormula(table, run, temperature, pointing, put.withDetail), actions),
+    formulaLine(formula, actions),
   );
 }
 
-function columnFields(table: Table, chosen: ReturnType<typeof columnsFor>, actions: Actions): Child[] {
+const toBeChosen = (): HTMLElement =>
+  h(
+    'p',
+    { className: 'warning', role: 'status' },
+    'No heading names a temperature: choose the column that holds it.',
+  );
+
+/** One that nobody knows yet stands open. */
+function columnFields(
+  table: Table,
+  chosen: Pick<TemperatureChoice, keyof Columns>,
+  actions: Actions,
+): Child[] {
+  const open = (column: number | null): Choice | undefined =>
+    column === null ? { value: '', label: 'choose' } : undefined;
   const none = { value: '', label: 'none: the same share of each' };
   return [
     h(
       'div',
       { className: 'pair' },
-      columnField('temperatures', 'Temperatures', table, chosen.temperatures, (temperatures) =>
-        actions.changeTemperature({ temperatures }),
+      columnField(
+        'temperatures',
+        'Temperatures',
+        table,
+        chosen.temperatures,
+        (temperatures) => actions.changeTemperature({ temperatures }),
+        open(chosen.temperatures),
       ),
-      columnField('coefficients', 'Rate coefficients', table, chosen.coefficients, (coefficients) =>
-        actions.changeTemperature({ coefficients }),
+      columnField(
+        'coefficients',
+        'Rate coefficients',
+        table,
+        chosen.coefficients,
+        (coefficients) => actions.changeTemperature({ coefficients }),
+        open(chosen.coefficients),
       ),
     ),
     columnField(
@@ -100,15 +137,10 @@ function energyInWords({ energy, logFactor }: TemperatureAnswer): Child[] {
 }
 
 /** What lies outside the temperatures measured is marked, and never without its caution. */
-function predictedInWords(
-  table: Table,
-  { temperature }: Scene['state'],
-  { predicted }: TemperatureAnswer,
-): Child[] {
+function predictedInWords(unit: string, { predicted }: TemperatureAnswer): Child[] {
   if (!predicted) return [];
   if ('refused' in predicted)
     return [!/^temperature /.test(predicted.refused) && h('p', { className: 'problem' }, predicted.refused)];
-  const { unit } = headingOf(table, columnsFor(table, temperature).coefficients);
   return [
     ...estimateLines('rate coefficient at that temperature', predicted.ok, unit),
     predicted.isExtrapolated &&

@@ -38,6 +38,16 @@ test('where no heading names a temperature, none is taken for granted', async ()
   expect(pane.text('#formula')).toBe('=PACE.ARRHENIUS(Store!A2:A5,Store!B2:B5)');
 });
 
+test('of a run in time nothing is worked out until a column is chosen', async () => {
+  pane = await openPane({ Run: [['t / d', 'b'], ...table.slice(1).map(([t, k]) => [t, k])] }, 'A2');
+  await pane.tick('#task-temperature');
+  expect(pane.root.querySelector('#temperature .result, #temperature svg, #formula')).toBeNull();
+  expect(pane.text('#temperature [role=status].warning')).toContain('choose the column');
+  await pane.choose('#temperatures', '0');
+  expect(pane.text('.result .value')).toBe('80 kJ/mol');
+  expect(pane.text('#formula')).toBe('=PACE.ARRHENIUS(Run!A2:A5,Run!B2:B5)');
+});
+
 test('the activation energy, its plot and its formula', async () => {
   await open();
   expect(pane.text('.result .value')).toBe('80 kJ/mol');
