@@ -14,8 +14,8 @@ import { progressBar } from './progress';
 
 const answers: readonly { readonly value: ManyAnswer; readonly label: string }[] = [
   { value: 'survey', label: 'survey: one table, one formula' },
-  { value: 'order', label: 'answer of the Order step, a formula each' },
-  { value: 'rate', label: 'answer of the Rate step, a formula each' },
+  { value: 'order', label: 'Order step’s answer for each run' },
+  { value: 'rate', label: 'Rate step’s answer for each run' },
 ];
 
 export function manyStep({ state, stamps, picked, insertion }: Scene, actions: Actions): HTMLElement {
@@ -96,15 +96,19 @@ function surveyTable(survey: Survey): HTMLElement {
   const { rows, isWhole } = survey;
   const heading = (words: string): HTMLElement => h('th', { scope: 'col' }, words);
   return h(
-    'table',
-    { className: 'survey' },
-    h('caption', {}, isWhole ? 'Survey' : `Survey, stopped after ${rows.length}`),
+    'div',
+    { className: 'scrolled', tabindex: '0', role: 'region', 'aria-label': 'survey' },
     h(
-      'thead',
-      {},
-      h('tr', {}, heading('run'), heading('order'), heading('rate coefficient'), heading('half life')),
+      'table',
+      { className: 'survey' },
+      h('caption', {}, isWhole ? 'Survey' : `Survey, stopped after ${rows.length}`),
+      h(
+        'thead',
+        {},
+        h('tr', {}, heading('run'), heading('order'), heading('rate coefficient'), heading('half life')),
+      ),
+      later(h('tbody'), [survey], () => rows.flatMap(surveyRows)),
     ),
-    later(h('tbody'), [survey], () => rows.flatMap(surveyRows)),
   );
 }
 

@@ -60,7 +60,7 @@ export function orderStep(scene: Scene, actions: Actions): HTMLElement {
     ...endpointFields(order, answer, actions),
     ...drawing(table, run, answer),
     result(...inWords(table, run, order, answer)),
-    verdicts(compared),
+    verdicts(compared, answer),
     selectField(
       'order-answer',
       'What to put in',
@@ -147,8 +147,15 @@ function inShort(answer: Answered<Estimate>, unit: string): string {
   return `${[valueWithUncertainty(value, uncertainty), unit].filter(Boolean).join(' ')}${limits}`;
 }
 
-function verdicts(compared: Answered<readonly OrderLine[]>): HTMLElement {
-  if ('refused' in compared) return h('p', { className: 'hint' }, compared.refused);
+/** What the answer above is refused for is not said again. */
+function verdicts(
+  compared: Answered<readonly OrderLine[]>,
+  { order, coefficient }: OrderAnswer,
+): HTMLElement | false {
+  if ('refused' in compared) {
+    const isSaid = [order, coefficient].some((one) => 'refused' in one && one.refused === compared.refused);
+    return !isSaid && h('p', { className: 'hint' }, compared.refused);
+  }
   const heading = (words: string): HTMLElement => h('th', { scope: 'col' }, words);
   return h(
     'table',

@@ -1,4 +1,5 @@
 /** A field that takes a number, words with a unit, or cells: typed, or pointed at in the sheet. */
+import { asRead } from '../../functions/documented';
 import type { Parameter } from '../../functions/parameters';
 import { isUnit } from '../../src/units';
 import type { Actions } from '../actions';
@@ -31,7 +32,7 @@ export function pointedField(
   return h(
     'div',
     { className: 'field' },
-    h('label', { for: id }, isUnit(unit) ? `${name} / ${unit}` : name),
+    h('label', { for: id }, isUnit(unit) ? `${name} / ${asRead(unit)}` : name),
     h(
       'div',
       { className: 'beside' },

@@ -79,6 +79,14 @@ test('an end that cannot be is refused at its field', async () => {
   expect(pane.find<HTMLButtonElement>('#put-in button.main').disabled).toBe(true);
 });
 
+test('why there is no answer is said once', async () => {
+  await open([['t / min', 'c / (mol/L)'], ...times.map((t) => [t, 32 + t])]);
+  await pane.choose('#endpoint-kind', 'zero');
+  const refused = pane.text('#order .problem');
+  expect(refused).toMatch(/endpoint/);
+  expect(pane.text('#order').split(refused)).toHaveLength(2);
+});
+
 test('a rising run has its end fitted from the start', async () => {
   await open([['t / min', 'V / mL'], ...times.map((t) => [t, 40 * (1 - 0.5 ** (t / 10))])]);
   expect(pane.find<HTMLSelectElement>('#endpoint-kind').value).toBe('free');

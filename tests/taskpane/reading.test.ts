@@ -42,7 +42,7 @@ test('a gas run asks for what PACE.GASVOLUME needs, in its words', async () => {
   await open();
   expect(pane.find<HTMLSelectElement>('#reading-what').value).toBe('GASVOLUME');
   expect(pane.text('.result')).toBe('Still needed: temperature, pressure');
-  expect(pane.text('label[for=reading-temperature]')).toBe('temperature / degC');
+  expect(pane.text('label[for=reading-temperature]')).toBe('temperature / °C');
   expect(pane.text('#reading-pressure-help')).toBe(
     'of the room; one value, or one a reading; unit kPa; above 0',
   );

@@ -92,7 +92,7 @@ function together(saids: readonly Said[]): Pick<Said, 'ofTheDay'> {
 
 function sayCall(call: Call, text: string, scene: Scene): Said {
   const { f } = call;
-  if (!f.builtIn) throw new NotSaid(`${typedName(f)} has no counterpart in built-in functions`);
+  if (!f.builtIn) throw new NotSaid(`${typedName(f)} has no built-in counterpart`);
   const inner: Said[] = [];
   const given = givenTo(call, text, scene, (own, start, calls) => {
     const { said, ofTheDay } = withCallsSaid(own, start, text, calls, scene);
