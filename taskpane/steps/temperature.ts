@@ -42,12 +42,7 @@ export function temperatureStep({ state, temperature: answer }: Scene, actions: 
     put.withDetail,
   );
   if (!answer || !columns || formula === null)
-    return step(
-      'temperature',
-      'Temperature',
-      ...columnFields(table, temperature, actions),
-      toBeChosen(),
-    );
+    return step('temperature', 'Temperature', ...columnFields(table, temperature, actions), toBeChosen());
   const { predicted } = answer;
   const isRefused = predicted && 'refused' in predicted && /^temperature /.test(predicted.refused);
   return step(
