@@ -92,7 +92,8 @@ input { font: inherit; padding: 0.45rem 0.6rem; width: 100%; color: inherit; bac
   h1, h2, h3 { break-after: avoid; }
   figure, tr, pre, .equations { break-inside: avoid; }
   .wide { overflow: visible; }
-  table.cells { width: auto; }
+  table.cells { width: auto; font-size: 8pt; }
+  table.cells th, table.cells td { padding: 0.1rem 0.3rem; }
   .one-function + .one-function { border-top: 1px solid var(--rule); }
   h2:has(+ .one-function) { break-before: page; }
   a { color: inherit; text-decoration: none; }
