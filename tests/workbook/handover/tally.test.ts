@@ -31,16 +31,16 @@ const frozenFunctions = (formulas: readonly HandedFormula[]): string[] => [
   ...new Set(formulas.filter(({ said }) => !said).map(({ functions }) => functions[0].name)),
 ];
 
-test('every example is live, but for fits, simulations and searches, and clock times as text', async () => {
+test('every example is live, but for fits, simulations and searches', async () => {
   const examples = Object.fromEntries(catalogue.map(({ name, example }) => [name, { A1: example.formula }]));
-  expect(frozenFunctions(await handed(book(examples)))).toEqual(['CLOCK', ...noCounterpart]);
+  expect(frozenFunctions(await handed(book(examples)))).toEqual(noCounterpart);
 }, 120_000);
 
 test('on every sheet of the demo all else is live, and each frozen fit has its numbers aside', async () => {
   const formulas = await handed(demoWorkbook());
   const sheets = new Set(formulas.map(({ sheet }) => sheet));
   expect(sheets.size).toBeGreaterThan(5);
-  expect(frozenFunctions(formulas).filter((name) => !noCounterpart.includes(name))).toEqual(['CLOCK']);
+  expect(frozenFunctions(formulas).filter((name) => !noCounterpart.includes(name))).toEqual([]);
   const fits = formulas.filter(({ said, functions }) => !said && functions[0].fits);
   expect(fits.length).toBeGreaterThan(10);
   expect(fits.filter((formula) => formula.fits === undefined)).toEqual([]);

@@ -76,4 +76,58 @@ export const readings: Cases = {
     becomes: 'live',
     changed: { A3: 0.0015, A4: 0.0051 },
   },
+  'Clock times as text': {
+    typed: {
+      ...column('A1', ['23:58:30', '23:59:15.5', null, '0:04:30', 0.0042]),
+      ...column('B1', ['0:00', '5:30', 'n/a', '101:30']),
+      ...column('C1', ['00:30.5', '1:30,25', '02:45.0']),
+      E1: '=PACE.CLOCK(A1:A2,"min","first")',
+      F1: '=PACE.CLOCK(A1:A5)',
+      G1: '=PACE.CLOCK(B1:B4,"h")',
+      H1: '=PACE.CLOCK(C1:C3,"s","first")',
+      I1: '=PACE.CLOCK(A4:A5,"s","first")',
+      J1: '=PACE.CLOCK({"23:58:30";"0:04:30"},"min","first")',
+    },
+    becomes: 'live',
+    changed: { A2: '0:01:10', A3: 0.003, A5: 0.005, B2: '6:07', B4: 0.25, C2: '1:31.125' },
+  },
+  'Durations as text': {
+    typed: {
+      ...column('A1', ['30 s', '4 min 30 s', null, '1 h 2.5 min', '1 h 4 min 10 s']),
+      ...column('B1', ['4min30s', '0.1 h', '250 ms', ' 26 h ']),
+      C1: '=PACE.CLOCK(A1:A5)',
+      D1: '=PACE.CLOCK(A1:A5,"min","first")',
+      E1: '=PACE.CLOCK(B1:B4,"h","first")',
+    },
+    becomes: 'live',
+    changed: { A1: '45.5 s', A2: '5  min  7,25 s', A4: '1 h 31 min', B1: '12min5s', B3: '300 ms' },
+  },
+  'Times as text side by side': {
+    typed: { A1: '0:30', B1: '1:10', C1: '2 min', A3: '=PACE.CLOCK(A1:C1)' },
+    becomes: 'live',
+    changed: { B1: '1:20', C1: '3.5 min' },
+  },
+  'Clock text, another form': {
+    typed: { ...column('A1', ['5:30.0', '6:30.5']), C1: '=PACE.CLOCK(A1:A2)' },
+    becomes: 'live',
+    changed: { A2: 'half past 6:30.5' },
+    then: 'error',
+  },
+  'Clock text, 75 minutes': {
+    typed: { ...column('A1', ['4:15:00', '4:45:00']), C1: '=PACE.CLOCK(A1:A2,"min","first")' },
+    becomes: 'live',
+    changed: { A2: '4:75:00' },
+    then: 'error',
+  },
+  'Clock text, no time': {
+    typed: { ...column('A1', ['4:15:00', null]), C1: '=PACE.CLOCK(A1:A2)' },
+    becomes: 'live',
+    changed: { A2: '12 drops' },
+    then: 'error',
+  },
+  'Clock times with pm': {
+    typed: { ...column('A1', ['11:15 am', '1:15 pm']), C1: '=PACE.CLOCK(A1:A2,"min","first")' },
+    becomes: 'frozen',
+    changed: { A2: '2:15 pm' },
+  },
 };
