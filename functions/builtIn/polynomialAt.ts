@@ -13,7 +13,7 @@ export class PolynomialAt {
   constructor(
     run: SortedRun,
     points: string,
-    private readonly firstCell: string,
+    firstCell: string,
     at: string,
     private readonly degree: number,
   ) {
@@ -41,13 +41,17 @@ export class PolynomialAt {
   /** Slope, slope of one degree more, and the variance of that in units of the readings' own. */
   get slopes(): string[] {
     const { degree, readings } = this;
-    const any = this.fit(this.only(`${this.firstCell}+1`), degree + 1);
     return [
       `INDEX(${this.fit(readings, degree)},1,${degree})`,
       `INDEX(${this.fit(readings, degree + 1)},1,${degree + 1})`,
-      // the same whatever the readings are, so of one that is 1 among zeros
-      `(INDEX(${any},2,${degree + 1})/INDEX(${any},3,2))^2`,
+      `1/INDEX(${this.timesByHigherPowers},5,2)`,
     ];
+  }
+
+  /** What the other powers leave of the times: its sum of squares is the slope's information (Frisch and Waugh 1933). */
+  private get timesByHigherPowers(): string {
+    const powers = Array.from({ length: this.degree }, (_, n) => n + 2).join(',');
+    return `LINEST(${this.times},${this.times}^{${powers}},TRUE,TRUE)`;
   }
 
   /** Coefficients with their statistics, the highest power first. */
