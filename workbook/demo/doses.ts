@@ -19,11 +19,12 @@ export function doses(): SheetModel {
     .block('H4', [['All runs, order 1']], { bold: true })
     .block('H5', [[`=PACE.SURVEY(${t},${all},1)`]], { bold: true })
     .look('I5:O5', { bold: true })
-    .format('I6:I9', '0')
+    .format('H6:I9', '0')
     .format('J6:K9', scientific)
     .format('L6:L9', '0.00')
     .format('M6:M9', scientific)
     .format('N6:N9', '0.0 %')
+    .look('O6:O9', {})
     .block('H12', [['The double dose', ...standardHeadings]], { bold: true })
     .down('H13', ['initial rate / min⁻¹', 'order, fitted'])
     .down('I13', [`=PACE.START(${t},${one},,,TRUE)`, `=PACE.ORDER(${t},${one},,,TRUE)`], {

@@ -24,6 +24,7 @@ interface Place {
 export function createSheet(sheet: SheetModel, calculated: CalculatedBook, looks: LookTable): CreatedSheet {
   const places = new Map<string, Place>();
   let marked = false;
+  const own = new Map(sheet.cells.map((cell) => [`${cell.row},${cell.column}`, cell]));
   const put = (place: Place): void => void places.set(`${place.row},${place.column}`, place);
 
   for (const cell of sheet.cells.filter(({ formula }) => formula === undefined)) put(typedCell(cell, looks));
@@ -39,17 +40,15 @@ export function createSheet(sheet: SheetModel, calculated: CalculatedBook, looks
       for (let column = cell.column; column < cell.column + spill.columns; column++) {
         if (row === cell.row && column === cell.column) continue;
         const value = calculated.shown(sheet.name, row, column);
-        put({
-          row,
-          column,
-          xml: cellXml({ prefix: '', row, column, value, attributes: looks.attributes(cell) }),
-        });
+        const attributes = looks.attributes(own.get(`${row},${column}`) ?? cell);
+        put({ row, column, xml: cellXml({ prefix: '', row, column, value, attributes }) });
       }
     }
   }
   const ordered = [...places.values()].sort((a, b) => a.row - b.row || a.column - b.column);
   return {
-    xml: `<worksheet xmlns="${main}">${dimension(ordered)}${columns(sheet)}<sheetData>${rows(ordered)}</sheetData></worksheet>`,
+    // printed across, as wide as a page
+    xml: `<worksheet xmlns="${main}"><sheetPr><pageSetUpPr fitToPage="1"/></sheetPr>${dimension(ordered)}${columns(sheet)}<sheetData>${rows(ordered)}</sheetData><pageSetup orientation="landscape" fitToHeight="0"/></worksheet>`,
     marked,
   };
 }

@@ -1,5 +1,6 @@
+import * as XLSX from '@e965/xlsx';
 import { recalculate } from '../../../workbook/commands/recalculate';
-import type { BookModel } from '../../../workbook/engine/engine';
+import type { BookModel, CellModel } from '../../../workbook/engine/engine';
 import { calculate } from '../../../workbook/engine/univer/headless';
 import { createWorkbook } from '../../../workbook/xlsx/create';
 import { readWorkbook } from '../../../workbook/xlsx/read';
@@ -87,4 +88,25 @@ test('a workbook where nothing can spill has no part for it', async () => {
   const bytes = await created(book({ Run: { A1: '=1+1' } }));
   expect(Object.keys(partsOf(bytes))).not.toContain('xl/metadata.xml');
   expect(textOf(bytes, '[Content_Types].xml')).not.toContain('metadata');
+});
+
+test('what a result spills into keeps the look it was given; the rest looks as the formula does', async () => {
+  const model = book({ Run: { A1: 40, A2: 25, A3: 20, B1: '=PACE.EVENT(A1:A3)' } });
+  const [run] = model.sheets;
+  const cells = run.cells.map((cell) => (cell.formula ? { ...cell, bold: true } : cell));
+  const shown: CellModel = { row: 1, column: 1, value: null, numberFormat: '0.00%' };
+  const bytes = await created({ ...model, sheets: [{ ...run, cells: [...cells, shown] }] });
+  const { Sheets } = XLSX.read(bytes, { type: 'array', cellNF: true });
+  expect(Sheets.Run.B2).toMatchObject({ v: 0.04, z: '0.00%', w: '4.00%' });
+  const [first, second, third] = ['B1', 'B2', 'B3'].map(
+    (place) => new RegExp(`<c r="${place}" s="(\\d+)"`).exec(rowsOf(bytes))?.[1],
+  );
+  expect(third).toBe(first);
+  expect(second).not.toBe(first);
+});
+
+test('a sheet is printed across, as wide as a page and as long as it takes', async () => {
+  const sheet = textOf(await created(full), 'xl/worksheets/sheet1.xml');
+  expect(sheet).toMatch(/^<\?xml[^>]*>\s*<worksheet [^>]*><sheetPr><pageSetUpPr fitToPage="1"\/><\/sheetPr>/);
+  expect(sheet).toMatch(/<\/sheetData><pageSetup orientation="landscape" fitToHeight="0"\/><\/worksheet>$/);
 });
