@@ -5,6 +5,7 @@
 import { cellName } from '../../functions/address';
 import { addDefaultType, addPart, freePath, relate } from '../xlsx/addPart';
 import { applyEdits, insertion, type Edit } from '../xlsx/edits';
+import { namespacesOf } from '../xlsx/namespaces';
 import { elementsIn, readXml, relationshipsOf, type SheetPart } from '../xlsx/parts';
 import { encodeXml, localName, scanXml, tagStart, xmlText } from '../xlsx/xml';
 import type { Package } from '../xlsx/zip';
@@ -17,8 +18,6 @@ export interface Note {
 
 const author = 'Flaskpace';
 const head = '<?xml version="1.0" encoding="UTF-8" standalone="yes"?>\n';
-const main = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
-const office = 'http://schemas.openxmlformats.org/officeDocument/2006/relationships';
 const commentsType = 'application/vnd.openxmlformats-officedocument.spreadsheetml.comments+xml';
 const drawingType = 'application/vnd.openxmlformats-officedocument.vmlDrawing';
 
@@ -44,6 +43,7 @@ export function addNotes(pack: Package, sheet: SheetPart, notes: readonly Note[]
 function addParts(pack: Package, sheet: SheetPart, notes: readonly Note[]): void {
   const comments = freePath(pack, 'xl/comments', '.xml');
   const drawing = freePath(pack, 'xl/drawings/vmlDrawing', '.vml');
+  const { main, office } = namespacesOf(readXml(pack, sheet.path));
   const list = notes.map((note) => commentXml(note, 0, '')).join('');
   addPart(
     pack,
@@ -55,7 +55,7 @@ function addParts(pack: Package, sheet: SheetPart, notes: readonly Note[]): void
   pack.write(drawing, encodeXml(drawingXml(notes)));
   relate(pack, sheet.path, comments, `${office}/comments`);
   const id = relate(pack, sheet.path, drawing, `${office}/vmlDrawing`);
-  pack.write(sheet.path, encodeXml(withDrawing(readXml(pack, sheet.path), sheet.path, id)));
+  pack.write(sheet.path, encodeXml(withDrawing(readXml(pack, sheet.path), sheet.path, id, office)));
 }
 
 /** What may follow the reference to the drawing; before the first of these it has its place. */
@@ -70,7 +70,7 @@ const after = new Set([
   'extLst',
 ]);
 
-function withDrawing(xml: string, path: string, id: string): string {
+function withDrawing(xml: string, path: string, id: string, office: string): string {
   let place = -1;
   let prefix = '';
   let depth = 0;

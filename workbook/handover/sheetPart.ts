@@ -4,6 +4,7 @@ import { CellError, type CellValue } from '../../functions/cell';
 import { addPart, freePath, relate } from '../xlsx/addPart';
 import { cellXml } from '../xlsx/cellXml';
 import { applyEdits, insertion, type Edit } from '../xlsx/edits';
+import { namespacesOf } from '../xlsx/namespaces';
 import { elementsIn, readXml, type WorkbookParts } from '../xlsx/parts';
 import { encodeXml, localName, scanXml, tagStart, xmlAttribute, xmlText } from '../xlsx/xml';
 import type { Package } from '../xlsx/zip';
@@ -21,14 +22,13 @@ export interface NewSheet {
 }
 
 const head = '<?xml version="1.0" encoding="UTF-8" standalone="yes"?>\n';
-const main = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
-const office = 'http://schemas.openxmlformats.org/officeDocument/2006/relationships';
 const sheetType = 'application/vnd.openxmlformats-officedocument.spreadsheetml.worksheet+xml';
 
 export function addSheet(pack: Package, parts: WorkbookParts, sheet: NewSheet): void {
   const folder = parts.workbook.slice(0, parts.workbook.lastIndexOf('/') + 1);
   const path = freePath(pack, `${folder}worksheets/sheet`, '.xml');
-  addPart(pack, path, sheetXml(sheet), sheetType);
+  const { main, office } = namespacesOf(readXml(pack, parts.workbook));
+  addPart(pack, path, sheetXml(sheet, main), sheetType);
   const id = relate(pack, parts.workbook, path, `${office}/worksheet`);
   const taken = elementsIn(pack, parts.workbook).filter(({ name }) => name === 'sheet');
   const number = taken.reduce((most, { attributes }) => Math.max(most, Number(attributes.sheetId)), 0) + 1;
@@ -46,7 +46,7 @@ export function addSheet(pack: Package, parts: WorkbookParts, sheet: NewSheet): 
   pack.write(parts.workbook, encodeXml(applyEdits(xml, edits)));
 }
 
-function sheetXml({ rows, widths }: NewSheet): string {
+function sheetXml({ rows, widths }: NewSheet, main: string): string {
   const columns = widths.map(
     (width, n) => `<col min="${n + 1}" max="${n + 1}" width="${width}" customWidth="1"/>`,
   );
