@@ -20,7 +20,7 @@ export const fileFormat: FileFormat = {
     const bytes = patchWorkbook(typeCells(original, before, now), now, calculated);
     return hasSameLooks(before, now)
       ? { bytes }
-      : { bytes, missing: 'number formats and bold or wrapped words set here are not in it' };
+      : { bytes, missing: 'bold and wrapped words set here are not in it' };
   },
 };
 
@@ -28,7 +28,7 @@ const hasSameSheets = (before: BookModel, now: BookModel): boolean =>
   JSON.stringify(before.sheets.map(({ name }) => name)) ===
   JSON.stringify(now.sheets.map(({ name }) => name));
 
-const look = ({ numberFormat, bold, wrap }: CellModel): string => JSON.stringify([numberFormat, bold, wrap]);
+const look = ({ bold, wrap }: CellModel): string => JSON.stringify([bold, wrap]);
 
 /** Only of cells that hold something; a new cell without a look of its own has none to lose. */
 function hasSameLooks(before: BookModel, now: BookModel): boolean {
@@ -43,4 +43,4 @@ function hasSameLooks(before: BookModel, now: BookModel): boolean {
   });
 }
 
-const noLook = { numberFormat: undefined, bold: undefined, wrap: undefined } as const;
+const noLook = { bold: undefined, wrap: undefined } as const;

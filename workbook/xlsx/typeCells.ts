@@ -1,10 +1,13 @@
-/** What was typed since a workbook was opened, put into its own package. */
+/** What was typed since a workbook was opened, and the number formats given since, put into its own package. */
 import { CellError } from '../../functions/cell';
 import type { BookModel, CellModel, SheetModel } from '../engine/engine';
+import { AddedNumberFormats, plainNumber } from './addNumberFormats';
 import { dropCalcChain } from './calcChain';
 import { dynamicArrayMark } from './dynamicArrays';
 import { findParts, readXml } from './parts';
+import { restyleSheet, type Restyling } from './restyleSheet';
 import { retypeSheet, type Change } from './retypeSheet';
+import { stylesIn } from './stylesPart';
 import { encodeXml } from './xml';
 import { Package } from './zip';
 
@@ -19,19 +22,28 @@ export function typeCells(bytes: Uint8Array, before: BookModel, now: BookModel):
   const pack = Package.open(bytes);
   const parts = findParts(pack);
   let mark: string | undefined;
+  let formats: AddedNumberFormats | undefined;
   let isChanged = false;
   for (const { name, path } of parts.sheets) {
-    const typed = typedIn(now, name);
-    const changes = changesFrom(typedIn(before, name), typed);
-    if (changes.length === 0) continue;
-    isChanged = true;
-    const xml = retypeSheet(readXml(pack, path), path, {
-      changes,
-      typed: (row, column) => typed.get(placeOf({ row, column }))?.formula,
-      spillMark: () => (mark ??= dynamicArrayMark(pack, parts)),
-    });
-    pack.write(path, encodeXml(xml));
+    const [was, typed] = [typedIn(before, name), typedIn(now, name)];
+    const restyled = restyledFrom(was, typed);
+    const changes = changesFrom(was, typed);
+    if (changes.length > 0) {
+      isChanged = true;
+      const xml = retypeSheet(readXml(pack, path), path, {
+        changes,
+        typed: (row, column) => typed.get(placeOf({ row, column }))?.formula,
+        spillMark: () => (mark ??= dynamicArrayMark(pack, parts)),
+      });
+      pack.write(path, encodeXml(xml));
+    }
+    if (restyled.length > 0) {
+      const all = (formats ??= new AddedNumberFormats(pack, stylesIn(pack, parts)));
+      const xml = restyleSheet(readXml(pack, path), path, restyled, (own, format) => all.look(own, format));
+      pack.write(path, encodeXml(xml));
+    }
   }
+  formats?.write();
   if (isChanged) dropCalcChain(pack, parts);
   return pack.bytes();
 }
@@ -50,6 +62,15 @@ function changesFrom(before: Typed, now: Typed): Change[] {
   const typed = [...now.values()].filter((cell) => !isSameTyping(before.get(placeOf(cell)), cell));
   const emptied = [...before.values()].filter((cell) => !now.has(placeOf(cell)));
   return [...typed, ...emptied.map(({ row, column }) => ({ row, column, value: null }))];
+}
+
+/** A cell that is new and plain has the look of its file's plain cells already. */
+function restyledFrom(before: Typed, now: Typed): Restyling[] {
+  return [...now.values()].flatMap(({ row, column, numberFormat }) =>
+    before.get(placeOf({ row, column }))?.numberFormat === numberFormat
+      ? []
+      : [{ row, column, numberFormat: numberFormat ?? plainNumber }],
+  );
 }
 
 function isSameTyping(a: CellModel | undefined, b: CellModel): boolean {
