@@ -5,7 +5,7 @@ import { childOf, type ScannedCell } from './sheetScan';
 import { plainText, xmlAttribute, xmlText } from './xml';
 
 /** The errors that the format itself knows (ISO/IEC 29500-1, 18.18.11). */
-const filedErrors: ReadonlySet<string> = new Set([
+export const filedErrors: ReadonlySet<string> = new Set([
   '#NULL!',
   '#DIV/0!',
   '#VALUE!',

@@ -6,6 +6,7 @@ import { filedValue } from './cellXml';
 import { callsOurs, typedFormula } from './formulaText';
 import { withIntersections } from './intersection';
 import { SharedFormulas } from './sharedFormulas';
+import { filedErrors } from './cellXml';
 import { childOf, scanSheet, type ScannedCell, type ScannedChild, type ScannedWidth } from './sheetScan';
 import type { CellLook } from './styles';
 
@@ -66,20 +67,10 @@ function cellModel(
   };
 }
 
-const readErrors: ReadonlySet<string> = new Set([
-  '#NULL!',
-  '#DIV/0!',
-  '#VALUE!',
-  '#REF!',
-  '#NAME?',
-  '#NUM!',
-  '#N/A',
-]);
-
 /** Errors that no file should hold are read as #VALUE!, as Excel itself writes them. */
 function valueOf(cell: ScannedCell, sharedStrings: readonly string[]): CellValue {
   const value = filedValue(cell, sharedStrings);
-  if (value instanceof CellError && !readErrors.has(value.code))
+  if (value instanceof CellError && !filedErrors.has(value.code))
     return new CellError((value.code as string) === '#GETTING_DATA' ? '#BUSY!' : '#VALUE!');
   return value;
 }
