@@ -2,6 +2,7 @@
 import { createActions, type Actions } from './actions';
 import { h } from './h';
 import type { CopyMaker } from './copying';
+import { keepingFocus } from './keepFocus';
 import { drawn } from './later';
 import { patch } from './patch';
 import type { WorkbookPort } from './port';
@@ -41,7 +42,9 @@ export function mountPane(
 
   let shown = store.state.notice;
   let isMounted = true;
-  const redraw = onceSoon(() => isMounted && patch(pane, draw(store.state)));
+  const redraw = onceSoon(() => {
+    if (isMounted) keepingFocus(pane, () => patch(pane, draw(store.state)));
+  });
   const stopWatching = store.watch((state) => {
     redraw();
     if (state.notice && state.notice !== shown) notify?.(state.notice.words, state.notice.tone);

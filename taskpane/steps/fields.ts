@@ -156,7 +156,7 @@ export function step(id: string, title: string, ...children: readonly Child[]): 
   return h(
     'section',
     { id, 'aria-labelledby': `${id}-title` },
-    h('h2', { id: `${id}-title` }, title),
+    h('h2', { id: `${id}-title`, tabindex: '-1' }, title),
     ...children,
   );
 }

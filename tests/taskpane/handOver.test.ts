@@ -69,6 +69,14 @@ test('while it is made it can be stopped, and then nothing is given', async () =
   await pane.press('Stop');
 });
 
+test('the keyboard keeps its place when the button under it has gone', async () => {
+  await open(async () => copy);
+  pane.find<HTMLButtonElement>('#hand-over button.main').focus();
+  await pane.press('Make the copy');
+  await until(() => pane.root.querySelector('.counts') !== null);
+  expect(document.activeElement).toBe(pane.find('#hand-over-title'));
+});
+
 test('what goes wrong is said: with the file, and with the copy', async () => {
   await open(async () => copy, { refusal: 'the document is protected' });
   await pane.press('Make the copy');
