@@ -6,6 +6,7 @@ import { plainNumber, valueWithUncertainty } from '../../functions/format';
 import { h, type Child } from '../h';
 import { later } from '../later';
 import { miniature } from '../plots/miniature';
+import { headingOf } from '../runs';
 import type { Scene, Stamp } from '../scene';
 import type { Survey } from '../store';
 import { button, selectField, step } from './fields';
@@ -30,7 +31,7 @@ export function manyStep({ state, stamps, picked, insertion }: Scene, actions: A
     h(
       'p',
       { className: 'hint', role: 'status' },
-      `${picked.length} of ${stamps.length} ${stamps.length === 1 ? 'run' : 'runs'} picked`,
+      `${picked.length} of ${stamps.length} ${stamps.length === 1 ? 'run' : 'runs'} picked${survey ? surveyInWords(survey) : ''}`,
     ),
     h(
       'div',
@@ -59,7 +60,7 @@ export function manyStep({ state, stamps, picked, insertion }: Scene, actions: A
           `Survey ${picked.length === 1 ? 'this run' : `these ${picked.length} runs`} here`,
           () => void actions.surveyRuns(),
         ),
-    survey && surveyTable(survey),
+    survey && surveyTable(survey, headingOf(table, run.timeColumn).unit),
   );
 }
 
@@ -92,7 +93,13 @@ const stampOf = ({ key, name, path }: Stamp, isPicked: boolean, actions: Actions
     ),
   );
 
-function surveyTable(survey: Survey): HTMLElement {
+/** Read out when it is done; in a long table remarks are easily missed. */
+function surveyInWords({ rows }: Survey): string {
+  const remarks = rows.filter(({ flags }) => flags !== '').length;
+  return `; survey below, ${remarks === 0 ? 'no' : remarks} ${remarks === 1 ? 'run' : 'runs'} with a remark`;
+}
+
+function surveyTable(survey: Survey, timeUnit: string): HTMLElement {
   const { rows, isWhole } = survey;
   const heading = (words: string): HTMLElement => h('th', { scope: 'col' }, words);
   return h(
@@ -105,7 +112,14 @@ function surveyTable(survey: Survey): HTMLElement {
       h(
         'thead',
         {},
-        h('tr', {}, heading('run'), heading('order'), heading('rate coefficient'), heading('half life')),
+        h(
+          'tr',
+          {},
+          heading('run'),
+          heading('order'),
+          heading('rate coefficient'),
+          heading(timeUnit ? `half life / ${timeUnit}` : 'half life'),
+        ),
       ),
       later(h('tbody'), [survey], () => rows.flatMap(surveyRows)),
     ),

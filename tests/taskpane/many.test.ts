@@ -33,6 +33,8 @@ test('a survey is seen in the pane before it is written', async () => {
   await pane.press('Survey these 3 runs here');
   for (let wait = 0; wait < 200 && surveyRows().length === 0; wait++) await pane.settled();
   expect(surveyRows()).toEqual(['A110.0693110', 'A210.0346620', 'A310.0462115']);
+  expect(pane.text('#many [role=status]')).toBe('3 of 3 runs picked; survey below, no runs with a remark');
+  expect(pane.text('.survey thead')).toContain('half life / min');
   await pane.tick('#run-2');
   expect(pane.root.querySelector('.survey')).toBeNull();
 });
