@@ -1,4 +1,5 @@
 /** Files in and out of the page: what is saved holds what was typed, and an opened file keeps all else that was in it. */
+import * as XLSX from '@e965/xlsx';
 import { strFromU8, strToU8, unzipSync, zipSync } from 'fflate';
 import { readFile } from 'node:fs/promises';
 import type { CellModel } from '../../../workbook/engine/engine';
@@ -100,6 +101,37 @@ export function filesSuite(sheet: () => BenchPage): void {
     expect(xml).toContain('ref="D5:D6">_xldudf_PACE_EVENT(A1:A2)</f>');
     expect(xml).toContain('<c r="D6"><v>0.02</v></c>');
     expect(strFromU8(parts['xl/charts/chart7.xml'])).toBe(chart);
+  });
+
+  test('what the pane puts into an opened file is saved with its number formats, a spill too', async () => {
+    await sheet().page.evaluate(() =>
+      window.flaskpace.port.write(
+        [
+          {
+            area: { sheet: 'Timing card', row: 4, column: 5, rows: 1, columns: 1 },
+            content: { formula: '=PACE.EVENT(A1:A3)' },
+            spills: { rows: 3, columns: 1 },
+            numberFormats: [['0.0000'], ['0.00E+00'], ['0.0 "1/s"']],
+          },
+        ],
+        { overwrite: false, description: 'rates' },
+      ),
+    );
+    await sheet().shows("'Timing card'!F5:F7", [[0.05], [0.02], [0.025]]);
+    const { bytes } = await saved();
+    const { F5, F6, F7, A1 } = XLSX.read(bytes, { type: 'array', cellNF: true }).Sheets['Timing card'];
+    expect([F5, F6, F7, A1]).toMatchObject([
+      { v: 0.05, z: '0.0000' },
+      { v: 0.02, z: '0.00E+00' },
+      { v: 0.025, z: '0.0 "1/s"' },
+      { v: 20, z: 'General' },
+    ]);
+    const parts = unzipSync(bytes);
+    expect(strFromU8(parts['xl/worksheets/sheet1.xml'])).toContain(
+      'ref="F5:F7">_xldudf_PACE_EVENT(A1:A3)</f>',
+    );
+    expect(strFromU8(parts['xl/charts/chart7.xml'])).toBe(chart);
+    expect(await said()).toBe('saved as timing card.xlsx');
   });
 
   test('work that is not saved is asked about before another book takes its place', async () => {
