@@ -1,12 +1,12 @@
 /** A calibration line read backwards, said in built-in functions. */
-import { eachReading } from './eachReading';
+import { eachReading, type Place } from './eachReading';
 import { standardRowTexts } from './estimate';
 import type { Given } from './given';
 import { Pairs } from './pairs';
-import { NotSaid, type Said } from './said';
+import type { Said } from './said';
+import { standardWeights, type StandardWeights } from './standardWeights';
 
 export function sayStandards(given: Given): Said {
-  if (given.has('uncertainties')) throw new NotSaid('a line weighted by uncertainties has no counterpart');
   const pairs = Pairs.of(given, 'concentrations', 'standards');
   const [origin, detail, replicates] = [
     given.flag('origin'),
@@ -14,11 +14,15 @@ export function sayStandards(given: Given): Said {
     given.number('replicates'),
   ];
   const readings = given.readings('readings');
-  const line = calibration(pairs, origin.value);
-  const holds = [...pairs.holds, ...origin.holds, ...detail.holds, ...replicates.holds];
-  const cells = (y: string): string[] => {
+  const weights = standardWeights(given, pairs);
+  const line = calibration(pairs, weights, origin.value);
+  const holds = [...pairs.holds, ...weights.holds, ...origin.holds, ...detail.holds, ...replicates.holds];
+  const isRow = readings.rows === 1 && readings.columns > 1;
+  const cells = (y: string, place: Place | undefined): string[] => {
     const value = `(${y}-${line.intercept})/${line.slope}`;
-    const scatter = `SQRT(1/${replicates.text}+${line.leverage(value)})`;
+    const own = detail.value && place ? weights.at(isRow ? place.column : place.row) : '1';
+    const variance = own === '1' ? '1' : `${own}^2`;
+    const scatter = `SQRT(${variance}/${replicates.text}+${line.leverage(value)})`;
     return standardRowTexts({
       value,
       uncertainty: `${line.deviation}/ABS(${line.slope})*${scatter}`,
@@ -26,9 +30,12 @@ export function sayStandards(given: Given): Said {
     });
   };
   const say = (n: number): Said =>
-    eachReading(readings, holds, (y) => `IF(AND(${line.isClear},${line.covers(y)}),${cells(y)[n]},NA())`);
+    eachReading(
+      readings,
+      holds,
+      (y, place) => `IF(AND(${line.isClear},${line.covers(y)}),${cells(y, place)[n]},NA())`,
+    );
   if (!detail.value) return say(0);
-  const isRow = readings.rows === 1 && readings.columns > 1;
   return { cell: (row, column) => (isRow ? say(row).cell!(0, column) : say(column).cell!(row, 0)) };
 }
 
@@ -46,18 +53,20 @@ interface Calibration {
   leverage(concentration: string): string;
 }
 
-function calibration(pairs: Pairs, throughOrigin: boolean): Calibration {
+function calibration(pairs: Pairs, { root, square }: StandardWeights, throughOrigin: boolean): Calibration {
   const x = pairs.each(pairs.x);
   const terms = throughOrigin ? [x] : ['1', x];
-  const fit = pairs.fit({ y: pairs.each(pairs.y), terms, weight: pairs.both });
+  const fit = pairs.fit({ y: pairs.each(pairs.y), terms, weight: root });
   const degreesOfFreedom = `(${pairs.count}-${terms.length})`;
   // LINEST counts pairs with a gap among its degrees of freedom
   const share = `SQRT(${pairs.size - terms.length}/MAX(1,${degreesOfFreedom}))`;
   const slope = `INDEX(${fit},1,1)`;
   const reach = `IF(${degreesOfFreedom}>0,TINV(0.05,MAX(1,${degreesOfFreedom}))*INDEX(${fit},2,1)*${share},0)`;
   const [low, high] = ['MIN', 'MAX'].map((f) => `${f}(${throughOrigin ? '0,' : ''}${pairs.some(pairs.y)})`);
-  const centre = throughOrigin ? '0' : `SUM(${x})/${pairs.count}`;
-  const spread = `SUM(${pairs.each(`(${pairs.x}-${centre})^2`)})`;
+  const weighted = (text: string): string => `SUM(${square ? `${square}*` : ''}${text})`;
+  const weight = square ? `SUM(${square})` : pairs.count;
+  const centre = throughOrigin ? '0' : `${weighted(x)}/${weight}`;
+  const spread = weighted(pairs.each(`(${pairs.x}-${centre})^2`));
   return {
     slope,
     intercept: throughOrigin ? '0' : `INDEX(${fit},1,2)`,
@@ -65,6 +74,6 @@ function calibration(pairs: Pairs, throughOrigin: boolean): Calibration {
     degreesOfFreedom,
     isClear: `${degreesOfFreedom}>=0,${spread}>0,ABS(${slope})>${reach}`,
     covers: (y) => `${y}>=${low}-0.1*(${high}-${low}),${y}<=${high}+0.1*(${high}-${low})`,
-    leverage: (value) => `${throughOrigin ? '' : `1/${pairs.count}+`}(${value}-${centre})^2/${spread}`,
+    leverage: (value) => `${throughOrigin ? '' : `1/${weight}+`}(${value}-${centre})^2/${spread}`,
   };
 }
