@@ -101,7 +101,11 @@ export class WorkingsSheet {
       lines[row - 1] = [{ heading: title }];
       rows.forEach((line, r) => {
         lines[row + r] = line.map((cell, column) =>
-          isFormula(cell) ? { ...cell, value: calculated.shown(this.name, row + r, column) } : cell,
+          isFormula(cell)
+            ? { ...cell, value: calculated.shown(this.name, row + r, column) }
+            : isNote(line, column)
+              ? `  ${cell as string}`
+              : cell,
         );
       });
     }
@@ -110,6 +114,10 @@ export class WorkingsSheet {
 }
 
 const widths = Array.from({ length: 10 }, () => 22);
+
+/** Words after the one number of a line, which would run into it. */
+const isNote = (line: readonly WorkingCell[], column: number): boolean =>
+  line.length === 2 && column === 1 && typeof line[0] !== 'string' && typeof line[1] === 'string';
 
 const isFormula = (cell: WorkingCell): cell is { readonly formula: string } =>
   typeof cell === 'object' && cell !== null && 'formula' in cell;
