@@ -2,11 +2,10 @@
 import { columnIndex, parseArea, type Area } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
 import type { CellModel, SheetModel } from '../engine/engine';
-import { filedValue } from './cellXml';
+import { filedErrors, filedValue } from './cellXml';
 import { callsOurs, typedFormula } from './formulaText';
 import { withIntersections } from './intersection';
 import { SharedFormulas } from './sharedFormulas';
-import { filedErrors } from './cellXml';
 import { childOf, scanSheet, type ScannedCell, type ScannedChild, type ScannedWidth } from './sheetScan';
 import type { CellLook } from './styles';
 
