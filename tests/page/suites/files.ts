@@ -173,6 +173,7 @@ export function filesSuite(sheet: () => BenchPage): void {
       const { written } = window as unknown as { written: Blob[] };
       return [...new Uint8Array(await written[0].arrayBuffer())];
     });
+    await sheet().page.evaluate(() => Reflect.deleteProperty(window, 'showSaveFilePicker'));
     expect(cellAt(new Uint8Array(bytes), 0, 16)).toMatchObject({ value: 1 });
   });
 

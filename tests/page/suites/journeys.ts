@@ -142,6 +142,8 @@ export function journeysSuite(sheet: () => BenchPage): void {
     await says('.notice.good', 'written: example of PACE.HALFLIFE');
     await waitUntil(async () => typeof (await cell('H3')) === 'number');
     await press(/^Undo: example/);
+    await press('All functions');
+    await pane('#look-up-words').fill('');
   });
 
   test.each(['Reading', 'Rate', 'Order', 'All runs', 'Temperature', 'Look up'])(
