@@ -3,6 +3,7 @@ import { cellName, parseArea, type Area } from '../functions/address';
 import { CellError, type CellRange, type CellValue, type ErrorCode } from '../functions/cell';
 import { drawChart, removeChart, type DrawnChart } from './excel/chart';
 import { excelFiles } from './excel/files';
+import { documentMemory } from './excel/memory';
 import { oneEach, spilledInto } from './excel/spills';
 import { allSupport, withoutSpills, type HostSupport } from './excel/support';
 import {
@@ -27,12 +28,13 @@ interface Snapshot {
   }[];
 }
 
-export function excelPort({ name, files, charts, spills }: HostSupport = allSupport): WorkbookPort {
+export function excelPort({ name, files, charts, spills, memory }: HostSupport = allSupport): WorkbookPort {
   return {
     host: name,
     canChart: charts,
     ...(!spills && { remark: withoutSpills }),
     ...(files && { files: excelFiles }),
+    ...(memory && { memory: documentMemory }),
     selection: () => Excel.run(readSelection),
     regionAroundActiveCell: () => Excel.run(readRegion),
     activeCell: () => Excel.run(readActiveCell),

@@ -65,6 +65,12 @@ export interface WorkbookFiles {
   give(bytes: Uint8Array): Promise<string | null>;
 }
 
+/** A place in the workbook itself for a few words of ours, which a colleague who opens it finds, too. */
+export interface WorkbookMemory {
+  recall(name: string): string | null;
+  keep(name: string, words: string): Promise<void>;
+}
+
 export interface WorkbookPort {
   /** For the notice line: `Excel`, `local workbook`. */
   readonly host: string;
@@ -72,6 +78,8 @@ export interface WorkbookPort {
   readonly remark?: string;
   /** Left out where the host gives no files. */
   readonly files?: WorkbookFiles;
+  /** Left out where the host has no such place. */
+  readonly memory?: WorkbookMemory;
   /** Whether charts can be drawn over its cells. */
   readonly canChart: boolean;
   /** The selected cells, trimmed to the used part of the sheet; `null` when nothing sensible is selected. */

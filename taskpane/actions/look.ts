@@ -18,6 +18,7 @@ import {
 import { functionOf, knownInputs, signalFor } from '../signals';
 import { unnamed } from '../turned';
 import type { Bench } from './bench';
+import { keptConditions } from './conditions';
 
 export async function selectedBlock({ port }: Bench): Promise<RangeReading | null> {
   const selection = await port.selection();
@@ -26,30 +27,31 @@ export async function selectedBlock({ port }: Bench): Promise<RangeReading | nul
 }
 
 /** @returns why the block is no run; empty when it has become the run */
-export function take({ store }: Bench, block: RangeReading): string {
+export function take(bench: Bench, block: RangeReading): string {
   const table = findTable(block);
   if (typeof table === 'string') return table;
-  beginWith({ store }, table);
+  beginWith(bench, table);
   return '';
 }
 
 /** The same cells, read as the person says. */
-export function correctTable({ store }: Bench, part: Corrections): void {
+export function correctTable(bench: Bench, part: Corrections): void {
+  const { store } = bench;
   const { table, run } = store.state;
   if (!table || !run) return;
   // columns named before are others once the table is turned
   const corrections = part.isTurned === undefined ? { ...table.corrections, ...part } : part;
   const found = findTable(blockOf(table), corrections);
   if (typeof found === 'string') return store.change({ hint: found });
-  if (part.units === undefined) return beginWith({ store }, found);
+  if (part.units === undefined) return beginWith(bench, found);
   const before = headingOf(table, run.readingColumn).quantity;
   store.change({ table: found, survey: null });
-  if (headingOf(found, run.readingColumn).quantity !== before)
-    chooseSignal({ store }, suitingSignal(found, run));
+  if (headingOf(found, run.readingColumn).quantity !== before) chooseSignal(bench, suitingSignal(found, run));
 }
 
 /** The table's first run, and what each step begins with on it. */
-function beginWith({ store }: Pick<Bench, 'store'>, table: Table): void {
+function beginWith(bench: Bench, table: Table): void {
+  const { store } = bench;
   const run = proposeRun(table);
   store.change({ table, run, survey: null, proposal: null, hint: '', notice: null });
   store.choose('put', { isOwn: false, question: null });
@@ -65,17 +67,20 @@ function beginWith({ store }: Pick<Bench, 'store'>, table: Table): void {
   if (over === 'temperature') store.change({ task: 'temperature' });
   else if (over === 'time' && store.state.task === 'temperature') store.change({ task: 'rate' });
   store.choose('order', { endpointKind: rises(table, run) ? 'free' : 'zero', endpoint: '' });
-  chooseSignal({ store }, suitingSignal(table, run));
+  chooseSignal(bench, suitingSignal(table, run));
 }
 
 const suitingSignal = (table: Table, run: Run): string =>
   signalFor(headingOf(table, run.readingColumn), rises(table, run));
 
 /** What was measured, with what the heading says of it. */
-export function chooseSignal({ store }: Pick<Bench, 'store'>, what: string): void {
+export function chooseSignal({ store, port }: Bench, what: string): void {
   const { table, run } = store.state;
   const f = functionOf(what);
-  const inputs = table && run && f ? knownInputs(f, headingOf(table, run.readingColumn)) : {};
+  const inputs =
+    table && run && f
+      ? { ...keptConditions({ port }, what), ...knownInputs(f, headingOf(table, run.readingColumn)) }
+      : {};
   store.choose('reading', { what, inputs });
 }
 
@@ -148,12 +153,13 @@ function startingTimes(table: Table, run: Run): Partial<RateChoice> {
 }
 
 /** A change to the run, with what follows from it: each reading column has its own times. */
-export function changeRun({ store }: Bench, part: Partial<Run>): void {
+export function changeRun(bench: Bench, part: Partial<Run>): void {
+  const { store } = bench;
   const { table, run } = store.state;
   if (!table || !run) return;
   const next = settledRun(table, run, part);
   store.change({ run: next, survey: null, notice: null });
-  if (next.readingColumn !== run.readingColumn) chooseSignal({ store }, suitingSignal(table, next));
+  if (next.readingColumn !== run.readingColumn) chooseSignal(bench, suitingSignal(table, next));
   const turned = rises(table, next) !== rises(table, run);
   if (turned) store.choose('order', { endpointKind: rises(table, next) ? 'free' : 'zero', endpoint: '' });
 }

@@ -10,6 +10,7 @@ import type { Deed, State } from '../store';
 import { turnedArea } from '../turned';
 import type { Bench } from './bench';
 import { adoptColumn } from './adopt';
+import { keepConditions } from './conditions';
 import type { LongWork } from './longWork';
 import { changeRun, reread } from './look';
 
@@ -61,6 +62,7 @@ export function putting(bench: Bench, work: LongWork): Putting {
         return settle();
       }
       store.choose('put', { question: null, isOwn: false });
+      if (store.state.task === 'reading') void keepConditions(bench, store.state.reading);
       const goesOn = insertion.becomesReadings && (await goOnWith(plan, insertion));
       notify('good', `written: ${plan.description}${goesOn ? ', now the readings of this run' : ''}`);
       await port.reveal(plan.target);

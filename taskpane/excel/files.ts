@@ -1,5 +1,6 @@
 /** The workbook as a file: its bytes through Office.js, and a copy opened beside it. */
 import type { WorkbookFiles } from '../port';
+import { answered } from './answered';
 
 /** No host hands over larger slices than all of them do (on an iPad, 64 KiB). */
 const sliceSize = 65_536;
@@ -30,15 +31,6 @@ async function wholeFile(): Promise<Uint8Array> {
   } finally {
     await answered<void>((done) => file.closeAsync(done)); // Office keeps two at most
   }
-}
-
-/** The older part of Office.js answers through a callback. */
-function answered<T>(ask: (done: (result: Office.AsyncResult<T>) => void) => void): Promise<T> {
-  return new Promise((resolve, reject) =>
-    ask(({ status, value, error }) =>
-      status === Office.AsyncResultStatus.Succeeded ? resolve(value) : reject(new Error(error.message)),
-    ),
-  );
 }
 
 /** Divisible by three, so that the pieces join without padding between them; and no more than a call takes arguments. */

@@ -8,10 +8,18 @@ export interface HostSupport {
   readonly charts: boolean;
   /** Gives the workbook's file, and opens another. */
   readonly files: boolean;
+  /** Keeps words of ours with the workbook. */
+  readonly memory: boolean;
 }
 
 /** An Excel of today: what is left out where there is no one to ask. */
-export const allSupport: HostSupport = { name: 'Excel', spills: true, charts: true, files: true };
+export const allSupport: HostSupport = {
+  name: 'Excel',
+  spills: true,
+  charts: true,
+  files: true,
+  memory: true,
+};
 
 /** @param name of the host @see https://learn.microsoft.com/javascript/api/requirement-sets for what came with which set */
 export function supportOf(name: string): HostSupport {
@@ -22,6 +30,7 @@ export function supportOf(name: string): HostSupport {
     spills: has('ExcelApi', '1.12'),
     charts: has('ExcelApi', '1.7'),
     files: has('CompressedFile', '1.1') && has('ExcelApi', '1.8'),
+    memory: has('Settings', '1.1'),
   };
 }
 

@@ -89,6 +89,12 @@ test('where no formula spills, each cell gets its own, and the person is told', 
 
 test('what Excel can do is asked of it once, set by set', () => {
   fakeExcel({ Run: [] });
-  fakeOffice({ lacks: ['ExcelApi 1.12', 'CompressedFile 1.1'] });
-  expect(supportOf('Excel')).toEqual({ name: 'Excel', spills: false, charts: true, files: false });
+  fakeOffice({ lacks: ['ExcelApi 1.12', 'CompressedFile 1.1', 'Settings 1.1'] });
+  expect(supportOf('Excel')).toEqual({
+    name: 'Excel',
+    spills: false,
+    charts: true,
+    files: false,
+    memory: false,
+  });
 });

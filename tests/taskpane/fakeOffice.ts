@@ -10,6 +10,9 @@ export interface OfficeSetting {
   readonly theme?: { readonly isDarkTheme?: boolean; readonly bodyBackgroundColor?: string };
   /** What it answers in place of a file. */
   readonly refusal?: string;
+  /** What the document keeps; one that is protected takes nothing. */
+  readonly settings?: Map<string, unknown>;
+  readonly isProtected?: boolean;
 }
 
 export interface FakeOffice {
@@ -35,6 +38,8 @@ export function fakeOffice({
   platform = 'PC',
   refusal,
   theme,
+  settings = new Map(),
+  isProtected = false,
 }: OfficeSetting = {}): FakeOffice {
   const opened: string[] = [];
   const startups: string[] = [];
@@ -71,6 +76,12 @@ export function fakeOffice({
           isSetSupported: (set: string, version: string) => !lacks.includes(`${set} ${version}`),
         },
         document: {
+          settings: {
+            get: (name: string) => settings.get(name) ?? null,
+            set: (name: string, value: unknown) => void settings.set(name, value),
+            saveAsync: (done: Done) =>
+              isProtected ? fail(done, 'the document is protected') : succeed(done),
+          },
           getFileAsync: (_: unknown, options: { readonly sliceSize: number }, done: Done) =>
             file && !refusal ? succeed(done, openFile(options)) : fail(done, refusal ?? 'there is no file'),
         },
