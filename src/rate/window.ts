@@ -55,7 +55,7 @@ interface Trial {
 /** Windows tried for each width of a window; all of them where it holds fewer readings than that. */
 const triedPerWidth = 32;
 
-/** No more windows of one width than this: their mean is then known to a hundredth or so. */
+/** No more windows of one width than this: the mean of n is known to 1/√n of their scatter, here a sixtieth. */
 const mostTried = 4096;
 
 /** How far apart the windows that are tried begin. */

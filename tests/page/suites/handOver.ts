@@ -2,11 +2,11 @@
 import { readFile } from 'node:fs/promises';
 import { readWorkbook } from '../../../workbook/xlsx/read';
 import type { BenchPage } from '../bench';
+import { handsOn } from '../hands';
 
 export function handOverSuite(sheet: () => BenchPage): void {
   const step = (selector: string) => sheet().page.locator(`#hand-over ${selector}`);
-  const press = (name: string): Promise<void> =>
-    sheet().page.getByRole('complementary').getByRole('button', { name, exact: true }).click();
+  const { press } = handsOn(sheet);
 
   beforeAll(async () => {
     await sheet().show([

@@ -1,5 +1,6 @@
 /** Whole jobs done in the pane, from readings to answers that the sheet has worked out itself. */
 import { waitUntil, type BenchPage } from '../bench';
+import { handsOn } from '../hands';
 import { violations } from './access';
 
 /** At 0 °C and 100 kPa an ideal gas takes 22.710 954 64 L/mol (CODATA 2022). */
@@ -26,13 +27,7 @@ const coefficientAt = (celsius: number): number =>
 const store = [['θ / °C', 'k / d⁻¹'], ...[40, 50, 60, 70].map((t) => [t, coefficientAt(t)])];
 
 export function journeysSuite(sheet: () => BenchPage): void {
-  const pane = (selector: string) => sheet().page.locator(`#pane ${selector}`);
-  const press = (label: RegExp | string): Promise<void> =>
-    sheet().page.getByRole('complementary').getByRole('button', { name: label, exact: true }).click();
-  const says = (selector: string, words: RegExp | string): Promise<void> =>
-    pane(selector).filter({ hasText: words }).first().waitFor();
-  const cell = async (reference: string): Promise<unknown> =>
-    (await sheet().cells(`'Gas run'!${reference}`))[0][0];
+  const { pane, press, says, cell } = handsOn(sheet);
   /** Shows a table and makes it the run. */
   async function work(rows: readonly (readonly (number | string)[])[]): Promise<void> {
     await sheet().show(rows);

@@ -2,6 +2,7 @@
 import { CellError, type CellValue } from '../../../functions/cell';
 import { oneOfEachKind } from '../../taskpane/faultySheets';
 import { waitUntil, type BenchPage, type PageBench } from '../bench';
+import { handsOn } from '../hands';
 
 const times = [0, 10, 20, 30, 40, 50, 60];
 /** Halved in its own time: k = ln 2 / half life. */
@@ -23,13 +24,7 @@ const typed = (cell: CellValue): number | string =>
   cell instanceof CellError ? formulas[cell.code] : ((cell ?? '') as number | string);
 
 export function tablesSuite(sheet: () => BenchPage, bench: () => PageBench): void {
-  const pane = (selector: string) => sheet().page.locator(`#pane ${selector}`);
-  const press = (label: RegExp | string): Promise<void> =>
-    sheet().page.getByRole('complementary').getByRole('button', { name: label, exact: true }).click();
-  const says = (selector: string, words: RegExp | string): Promise<void> =>
-    pane(selector).filter({ hasText: words }).first().waitFor();
-  const cell = async (reference: string): Promise<unknown> =>
-    (await sheet().cells(`'Gas run'!${reference}`))[0][0];
+  const { pane, press, says, cell } = handsOn(sheet);
   /** Shows a table in place of any other; the pane, which has no run then, takes it as one. */
   async function work(rows: readonly (readonly (number | string)[])[]): Promise<void> {
     await sheet().show([['nothing here']]);

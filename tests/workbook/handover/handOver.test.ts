@@ -3,21 +3,13 @@ import { readFileSync, writeFileSync } from 'node:fs';
 import { handOver } from '../../../workbook/handover/handOver';
 import { buildCommands, command, temporaryFolder } from '../commands/command';
 import { packageOf, partsOf, rowsOf, textOf, worksheet } from '../xlsx/package';
+import { fit } from './fit';
 
 const origin = { version: '1.2.3', date: '2026-12-01' };
 const copyOf = async (bytes: Uint8Array): Promise<Uint8Array> => (await handOver(bytes, origin)).bytes;
 
 const readings =
   '<row r="1"><c r="A1"><v>40</v></c><c r="B1" s="0"><f>_xldudf_PACE_EVENT(A1)</f><v>9</v></c></row>';
-const fit =
-  '<row r="1"><c r="A1"><v>0</v></c><c r="B1"><v>8</v></c><c r="C1"><f>_xldudf_PACE_COEFFICIENT(A1:A4,B1:B4,1)</f></c></row>' +
-  [4, 2, 1]
-    .map(
-      (y, n) =>
-        `<row r="${n + 2}"><c r="A${n + 2}"><v>${10 * n + 10}</v></c><c r="B${n + 2}"><v>${y}</v></c></row>`,
-    )
-    .join('');
-
 /** Every formula in the file, of cells and of names. */
 const formulasIn = (bytes: Uint8Array): string =>
   Object.keys(partsOf(bytes))

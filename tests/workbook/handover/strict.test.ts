@@ -1,8 +1,9 @@
 /** "Strict Open XML Spreadsheet" has names of its own (ISO/IEC 29500-1, annex A): what is added goes by them too. */
 import * as XLSX from '@e965/xlsx';
+import { strFromU8 } from 'fflate';
 import { handOver } from '../../../workbook/handover/handOver';
 import { packageOf, partsOf, textOf, worksheet, zipped } from '../xlsx/package';
-import { strFromU8 } from 'fflate';
+import { fit } from './fit';
 
 const strictNames: readonly (readonly [string, string])[] = [
   [
@@ -25,17 +26,8 @@ const strictly = (bytes: Uint8Array): Uint8Array =>
     ),
   );
 
-const frozen =
-  '<row r="1"><c r="A1"><v>0</v></c><c r="B1"><v>8</v></c><c r="C1"><f>_xldudf_PACE_COEFFICIENT(A1:A4,B1:B4,1)</f></c></row>' +
-  [4, 2, 1]
-    .map(
-      (y, n) =>
-        `<row r="${n + 2}"><c r="A${n + 2}"><v>${10 * n + 10}</v></c><c r="B${n + 2}"><v>${y}</v></c></row>`,
-    )
-    .join('');
-
 test('Method, Workings, notes and what points to them are in the workbook’s own namespaces', async () => {
-  const { bytes } = await handOver(strictly(packageOf({ sheets: { Run: worksheet(frozen) } })), {
+  const { bytes } = await handOver(strictly(packageOf({ sheets: { Run: worksheet(fit) } })), {
     version: '1.2.3',
     date: '2026-12-01',
   });
