@@ -77,7 +77,7 @@ function counts({ live, frozen, left, failing }: HandedCopy): HTMLElement | fals
   const rows: readonly (readonly [count: number, meaning: string])[] = [
     [live, 'live: they follow their inputs'],
     [cellsIn(frozen), 'frozen to their value'],
-    [cellsIn(left), 'in formats or validations: these still need the add-in'],
+    [cellsIn(left), 'not in cells: these still need the add-in'],
     [failing.length, 'showed an error before, and still do'],
   ];
   const shown = rows.filter(([count]) => count > 0);

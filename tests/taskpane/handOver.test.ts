@@ -43,7 +43,7 @@ test('the workbook’s file is read whole, its copy told of, and opened beside i
   expect(Buffer.from(makeCopy.mock.calls[0][0]).equals(Buffer.from(file))).toBe(true);
   expect(office.unclosed()).toBe(0);
   expect(pane.text('.counts')).toBe(
-    '3live: they follow their inputs6frozen to their value1in formats or validations: these still need the add-in1showed an error before, and still do',
+    '3live: they follow their inputs6frozen to their value1not in cells: these still need the add-in1showed an error before, and still do',
   );
   expect(pane.text('#hand-over')).toContain('a fit: A1, A2, A3, A4 and 1 more');
   expect(pane.text('#hand-over')).toContain('it holds nothing back any more: Run!A1');
@@ -102,7 +102,7 @@ test('a workbook whose only calls stand in no cell is said to need the add-in st
   await open(async () => ({ ...copy, live: 0, frozen: [], failing: [] }));
   await pane.press('Make the copy');
   await until(() => pane.root.querySelector('.counts') !== null);
-  expect(pane.text('.counts')).toBe('1in formats or validations: these still need the add-in');
+  expect(pane.text('.counts')).toBe('1not in cells: these still need the add-in');
   expect(pane.text('#hand-over [role=status]')).not.toContain('No formula of ours');
 });
 

@@ -13,7 +13,10 @@ export function reportOf({ bytes, formulas, names, elsewhere }: HandedOver): Han
       ...names.map(({ name }): Reason => ['a name stands for one value', name]),
     ]),
     left: byReason(
-      elsewhere.map(({ kind, cells, loss }): Reason => [`${kind}: without the add-in ${loss}`, cells]),
+      elsewhere.map(({ kind, where, loss }): Reason => [
+        `${kind}: without the add-in ${loss}`,
+        where ?? 'the workbook as a whole',
+      ]),
     ),
     failing: formulas.filter(showsError).map(placeOf),
   };

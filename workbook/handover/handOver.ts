@@ -46,7 +46,7 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
   const links = ownLinks(pack, parts);
   patchPackage(pack, parts, book, calculated);
   const world = new World(book, calculated);
-  const taken = new Set(parts.sheets.map(({ name }) => name.toLowerCase()));
+  const taken = new Set([...parts.sheets, ...parts.otherSheets].map(({ name }) => name.toLowerCase()));
   const aside = new WorkingsSheet(freeName('Workings', taken));
   const { formulas, workings } = await checked(
     handFormulas(world, calculated, mergedCells(pack, parts.sheets), aside),
@@ -54,7 +54,7 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
     aside,
   );
   const names = await frozenNames(book);
-  const elsewhere = callsElsewhere(pack, parts.sheets);
+  const elsewhere = callsElsewhere(pack, parts);
   const told = { formulas, names, elsewhere };
   if (formulas.length + names.length + elsewhere.length === 0)
     return { bytes: pack.bytes(), ...told, errors: calculated.errors };

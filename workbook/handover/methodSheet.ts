@@ -13,6 +13,7 @@ import {
   standardGravity,
   vacuumPermittivity,
 } from '../../src/constants';
+import { elsewherePlace } from './elsewhere';
 import type { HandedFormula } from './handed';
 import type { HandedOver } from './handOver';
 import type { NewSheet, SheetCell } from './sheetPart';
@@ -66,15 +67,15 @@ export function methodSheet(
   for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
   for (const { name: own, refersTo, value } of names)
     rows.push(['a name', own, 'frozen', null, null, `=${refersTo}`, `frozen: it stands for ${value}`]);
-  for (const { kind, cells, formula, loss } of elsewhere)
+  for (const call of elsewhere)
     rows.push([
-      `${kind} on ${cells}`,
+      elsewherePlace(call),
       null,
       'as it was',
       null,
       null,
-      `=${formula}`,
-      `left as it was: without the add-in ${loss}`,
+      `=${call.formula}`,
+      `left as it was: without the add-in ${call.loss}`,
     ]);
   for (const f of functionsOf(formulas)) rows.push([], ...functionRows(f));
   rows.push([], headings('Constant', '', 'Value', 'Unit', 'Source'));

@@ -12,6 +12,8 @@ export interface SheetPart {
 export interface WorkbookParts {
   readonly workbook: string;
   readonly sheets: readonly SheetPart[];
+  /** Chart sheets and dialogue sheets, which hold no cells. */
+  readonly otherSheets: readonly SheetPart[];
   readonly sharedStrings?: string;
   readonly styles?: string;
   readonly metadata?: string;
@@ -42,9 +44,16 @@ export function findParts(pack: Package): WorkbookParts {
     throw new NotAWorkbook(`the file is not a workbook: it holds a ${root[0]?.name ?? 'nothing'}`);
   const relations = relationshipsOf(pack, main.path);
   const path = (kind: string): string | undefined => relations.find((r) => r.kind === kind)?.path;
+  const sheets = root
+    .filter(({ name }) => name === 'sheet')
+    .flatMap(({ attributes }) => {
+      const relation = relations.find(({ id }) => id === relationId(attributes));
+      return relation ? [{ name: attributes.name, path: relation.path, kind: relation.kind }] : [];
+    });
   return {
     workbook: main.path,
-    sheets: root.filter(({ name }) => name === 'sheet').flatMap((sheet) => sheetPart(sheet, relations)),
+    sheets: sheets.filter(({ kind }) => kind === 'worksheet'),
+    otherSheets: sheets.filter(({ kind }) => kind !== 'worksheet'),
     sharedStrings: path('sharedStrings'),
     styles: path('styles'),
     metadata: path('sheetMetadata'),
@@ -52,12 +61,9 @@ export function findParts(pack: Package): WorkbookParts {
   };
 }
 
-/** Chart sheets and dialogue sheets hold no cells. */
-function sheetPart({ attributes }: XmlElement, relations: readonly Relationship[]): SheetPart[] {
-  const id = Object.entries(attributes).find(([key]) => key.endsWith(':id'))?.[1];
-  const relation = relations.find((r) => r.id === id);
-  return relation?.kind === 'worksheet' ? [{ name: attributes.name, path: relation.path }] : [];
-}
+/** The relationship by which an element refers to a part, under whatever prefix: `r:id`. */
+export const relationId = (attributes: Readonly<Record<string, string>>): string | undefined =>
+  Object.entries(attributes).find(([key]) => key.endsWith(':id'))?.[1];
 
 export function relationshipsPath(part: string): string {
   const cut = part.lastIndexOf('/') + 1;

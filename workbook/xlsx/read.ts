@@ -44,11 +44,13 @@ function refuseOtherKinds(bytes: Uint8Array): void {
 }
 
 /** Names that Excel keeps for itself (print areas, filters) are no formulas of anybody's. */
+export const isReservedName = (name: string): boolean => name.startsWith('_xlnm.');
+
 function definedNames(pack: Package, workbook: string): DefinedName[] {
   const elements = elementsIn(pack, workbook);
   const sheets = elements.filter(({ name }) => name === 'sheet').map(({ attributes }) => attributes.name);
   return elements
-    .filter(({ name, attributes }) => name === 'definedName' && !attributes.name.startsWith('_xlnm.'))
+    .filter(({ name, attributes }) => name === 'definedName' && !isReservedName(attributes.name))
     .filter(({ text }) => text !== '')
     .map(({ attributes: { name, localSheetId }, text }) => ({
       name,

@@ -17,9 +17,17 @@ export interface PackageOptions {
   /** Content types of such parts by path; a relationship of the workbook's where `kind` is given. */
   readonly described?: readonly { readonly path: string; readonly type: string; readonly kind?: string }[];
   readonly names?: string;
+  /** Behind the worksheets in the workbook's list. */
+  readonly moreSheets?: string;
 }
 
-export function packageOf({ sheets, parts = {}, described = [], names = '' }: PackageOptions): Uint8Array {
+export function packageOf({
+  sheets,
+  parts = {},
+  described = [],
+  names = '',
+  moreSheets = '',
+}: PackageOptions): Uint8Array {
   const list = Object.keys(sheets);
   const overrides = [
     `<Override PartName="/xl/workbook.xml" ContentType="${types}.sheet.main+xml"/>`,
@@ -41,7 +49,7 @@ export function packageOf({ sheets, parts = {}, described = [], names = '' }: Pa
   const files: Record<string, string | Uint8Array> = {
     '[Content_Types].xml': `${head}<Types xmlns="http://schemas.openxmlformats.org/package/2006/content-types"><Default Extension="rels" ContentType="application/vnd.openxmlformats-package.relationships+xml"/><Default Extension="xml" ContentType="application/xml"/><Default Extension="bin" ContentType="application/octet-stream"/>${overrides.join('')}</Types>`,
     '_rels/.rels': `${head}<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships"><Relationship Id="rId1" Type="${office}/officeDocument" Target="xl/workbook.xml"/></Relationships>`,
-    'xl/workbook.xml': `${head}<workbook xmlns="${main}" xmlns:r="${office}"><sheets>${list.map((name, n) => `<sheet name="${name}" sheetId="${n + 1}" r:id="rId${n + 1}"/>`).join('')}</sheets>${names}</workbook>`,
+    'xl/workbook.xml': `${head}<workbook xmlns="${main}" xmlns:r="${office}"><sheets>${list.map((name, n) => `<sheet name="${name}" sheetId="${n + 1}" r:id="rId${n + 1}"/>`).join('')}${moreSheets}</sheets>${names}</workbook>`,
     'xl/_rels/workbook.xml.rels': `${head}<Relationships xmlns="http://schemas.openxmlformats.org/package/2006/relationships">${relations.join('')}</Relationships>`,
     ...Object.fromEntries(list.map((name, n) => [`xl/worksheets/sheet${n + 1}.xml`, sheets[name]])),
     ...parts,
