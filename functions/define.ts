@@ -1,8 +1,7 @@
 /** What a cell function is. Everything the product says or does about one derives from this object. */
-import type { BuiltIn } from './builtIn/said';
+import type { BuiltIn, FitTable } from './builtIn/said';
 import type { CellResult } from './cell';
 import type { Parameter } from './parameters';
-import type { WatchedFits } from './watchedFit';
 
 export type Parameters = Readonly<Record<string, Parameter>>;
 
@@ -65,13 +64,12 @@ export interface Definition<P extends Parameters> {
   /** The same in built-in spreadsheet functions, for a copy that needs no add-in; left out where there is none. */
   readonly builtIn?: BuiltIn;
   /** What it fits, for the same copy: the numbers stay as they were, and a formula tells whether they still fit. */
-  readonly fits?: WatchedFits<Values<P>>;
+  readonly fits?: FitTable;
 }
 
 /** A definition whose parameter types have been checked and can be forgotten. */
-export type CellFunction = Omit<Definition<Parameters>, 'run' | 'fits'> & {
+export type CellFunction = Omit<Definition<Parameters>, 'run'> & {
   readonly run: (values: Readonly<Record<string, unknown>>) => CellResult;
-  readonly fits?: WatchedFits<Readonly<Record<string, unknown>>>;
 };
 
 export const namespace = 'PACE';

@@ -64,6 +64,11 @@ export class Given {
     return this.parameters[name].read(argument?.cells, name) as T;
   }
 
+  /** All that the function itself runs on, on the day of the copy. @throws NotSaid where that is not known */
+  allToday<V>(): V {
+    return Object.fromEntries(this.names.map((name) => [name, this.today(name)])) as V;
+  }
+
   /** Of all parameters. */
   get names(): string[] {
     return Object.keys(this.parameters);

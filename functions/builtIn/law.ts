@@ -1,7 +1,8 @@
 /** Fitted rate laws in a copy: their numbers as they were found, on the sheet "Workings", and whether they still fit. */
 import type { Uncertainties } from '../commonParameters';
-import type { WatchedFit, WatchedFits } from '../watchedFit';
+import type { WatchedLaw, WatchedLaws } from '../watchedLaw';
 import { eachReading } from './eachReading';
+import { stateOfFit } from './fitState';
 import type { Given } from './given';
 import type { Said } from './said';
 import type { Table, WorkingCell } from './workings';
@@ -9,14 +10,9 @@ import type { Table, WorkingCell } from './workings';
 /** Columns of the table. */
 const [name, order, rate, start, endpoint, firstTime, then, now] = [0, 1, 2, 3, 4, 5, 6, 7];
 
-export const asFitted = 'fits as it did';
-export const fitsOtherwise = 'fits otherwise: its readings have changed';
-
-export type AnyFits = WatchedFits<Readonly<Record<string, unknown>>>;
-
-interface FitTable {
+interface LawTable {
   readonly table: Table;
-  readonly found: readonly WatchedFit[];
+  readonly found: readonly WatchedLaw[];
 }
 
 /**
@@ -24,8 +20,8 @@ interface FitTable {
  *
  * @throws NotSaid where the call cannot be told; InvalidInput, NotDetermined and CellError of the fit itself
  */
-export function tableOfFits(fits: AnyFits, given: Given): FitTable {
-  const found = fits.of(Object.fromEntries(given.names.map((one) => [one, given.today(one)])));
+export function tableOfLaws<V>(fits: WatchedLaws<V>, given: Given): LawTable {
+  const found = fits.of(given.allToday<V>());
   const far = given.fromWorkings();
   const of = ['order', 'endpoint', 'uncertainties'].flatMap((one) => {
     const argument = far.names.includes(one) ? far.argument(one) : undefined;
@@ -49,7 +45,7 @@ export function tableOfFits(fits: AnyFits, given: Given): FitTable {
   return { table, found };
 }
 
-function fitRow(fit: WatchedFit, far: Given, own: Table, row: number): WorkingCell[] {
+function fitRow(fit: WatchedLaw, far: Given, own: Table, row: number): WorkingCell[] {
   const { law, residualSumOfSquares } = fit;
   const y = readingsOf(fit, far);
   const cells: WorkingCell[] = [];
@@ -62,22 +58,17 @@ function fitRow(fit: WatchedFit, far: Given, own: Table, row: number): WorkingCe
   cells[then] = residualSumOfSquares;
   cells[now] = { formula: sumOfSquares(fit, y, far, own, row) };
   const [before, after] = [own.cell(row, then), own.cell(row, now)];
-  // a law that meets its readings leaves nothing but their rounding
-  const same = `ABS(${after}-${before})<=0.000000001*${before}+1E-24*SUMSQ(${y})`;
-  return [
-    ...cells,
-    { formula: `IF(ISERROR(${after}),"${fitsOtherwise}",IF(${same},"${asFitted}","${fitsOtherwise}"))` },
-  ];
+  return [...cells, { formula: stateOfFit(before, after, `SUMSQ(${y})`) }];
 }
 
-function readingsOf({ line }: WatchedFit, far: Given): string {
+function readingsOf({ line }: WatchedLaw, far: Given): string {
   if (line === undefined) return far.readings('values').whole;
   const times = far.readings('times');
   const block = far.readings('block');
   return times.columns > 1 ? block.row(line) : block.column(line);
 }
 
-function sumOfSquares(fit: WatchedFit, y: string, far: Given, own: Table, row: number): string {
+function sumOfSquares(fit: WatchedLaw, y: string, far: Given, own: Table, row: number): string {
   const x = far.readings('times').whole;
   const residual = `${y}-(${heightText(fit, own, row, x)})`;
   const weights = far.names.includes('uncertainties') ? far.today<Uncertainties>('uncertainties') : undefined;
@@ -87,7 +78,7 @@ function sumOfSquares(fit: WatchedFit, y: string, far: Given, own: Table, row: n
 }
 
 /** y∞ + (y₀ − y∞)·φ(κt; n), by the numbers of its row. */
-function heightText({ law }: Pick<WatchedFit, 'law'>, own: Table, row: number, time: string): string {
+function heightText({ law }: Pick<WatchedLaw, 'law'>, own: Table, row: number, time: string): string {
   const at = (column: number): string => own.cell(row, column);
   const s = `${at(rate)}*(${time}-${at(firstTime)})`;
   return `${at(endpoint)}+(${at(start)}-${at(endpoint)})*${shareText(law.order, at(order), s)}`;
@@ -105,8 +96,8 @@ function shareText(n: number, cell: string, s: string): string {
 }
 
 /** The fitted law at its own times or at others: live in its numbers. */
-export function sayCurve(fits: AnyFits, given: Given): Said {
-  const { table, found } = tableOfFits(fits, given);
+export function sayCurve<V>(fits: WatchedLaws<V>, given: Given): Said {
+  const { table, found } = tableOfLaws(fits, given);
   const times = given.readings(given.has('attimes') ? 'attimes' : 'times');
   const height = (time: string): string => heightText(found[0], table, 1, time);
   return {

@@ -39,6 +39,11 @@ export class Readings {
     throw new NotSaid(`${text} is worked out within the formula`);
   }
 
+  /** The same, counted row by row. */
+  at(place: number): string {
+    return this.element(Math.floor(place / this.columns), place % this.columns);
+  }
+
   /** The first number, and where it stands: it must stay the first. */
   get first(): First {
     const { area, cells } = this.argument;

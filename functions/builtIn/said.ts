@@ -2,6 +2,7 @@
 import type { Area } from '../address';
 import type { CellRange } from '../cell';
 import type { Given } from './given';
+import type { Table } from './workings';
 
 /** One argument of a call, as it stands in a formula. */
 export interface Argument {
@@ -18,6 +19,13 @@ export type Arguments = Readonly<Record<string, Argument | undefined>>;
 
 /** @throws NotSaid where this call has no counterpart */
 export type BuiltIn = (given: Given) => Said;
+
+/**
+ * What a call fits, as a table on the sheet "Workings": its numbers as they were found, and whether they still fit.
+ *
+ * @throws NotSaid where the call cannot be told; InvalidInput, NotDetermined and CellError of the fit itself
+ */
+export type FitTable = (given: Given) => Table;
 
 /** The result in built-in functions, cell by cell or as one array; at least one of the two. */
 export interface Said {

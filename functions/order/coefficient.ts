@@ -4,7 +4,7 @@ import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow } from '../results';
 import {
   fitKnownLaw,
-  knownLawFits,
+  knownLawTable,
   knownLawParameters,
   lawLines,
   lawMethod,
@@ -53,5 +53,5 @@ export default defineFunction({
     const fit = fitKnownLaw(given);
     return given.detail ? [standardRow(rateCoefficientEstimate(fit))] : fit.rateCoefficient;
   },
-  fits: knownLawFits,
+  fits: knownLawTable,
 });

@@ -1,12 +1,13 @@
 import { heightAt } from '../../src/order/curve';
-import { sayCurve, type AnyFits } from '../builtIn/law';
+import { sayCurve } from '../builtIn/law';
 import { convertColumn } from '../column';
 import { defineFunction } from '../define';
 import { number, optional, readings } from '../parameters';
 import { seriesOf } from '../run';
 import {
   fitKnownLaw,
-  knownLawFits,
+  knownLaw,
+  knownLawTable,
   lawEquations,
   lawMethod,
   lawParameters,
@@ -46,6 +47,6 @@ export default defineFunction({
     const [fit, series] = [fitKnownLaw(given), seriesOf(given.times, given.values)];
     return convertColumn(attimes ?? given.times, (time) => heightAt(fit, series, time));
   },
-  fits: knownLawFits,
-  builtIn: (given) => sayCurve(knownLawFits as AnyFits, given),
+  fits: knownLawTable,
+  builtIn: (given) => sayCurve(knownLaw, given),
 });

@@ -4,7 +4,7 @@ import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow } from '../results';
 import {
   fitKnownLaw,
-  knownLawFits,
+  knownLawTable,
   knownLawParameters,
   lawLines,
   lawMethod,
@@ -44,5 +44,5 @@ export default defineFunction({
     const fit = fitKnownLaw(given);
     return given.detail ? [standardRow(halfLifeEstimate(fit))] : fit.halfLife;
   },
-  fits: knownLawFits,
+  fits: knownLawTable,
 });

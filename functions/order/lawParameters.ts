@@ -1,10 +1,12 @@
 /** What the functions that fit a rate law have in common. */
 import { fitRateLaw, type RateLawFit } from '../../src/order/fit';
+import { tableOfLaws } from '../builtIn/law';
+import type { FitTable } from '../builtIn/said';
 import { detail, endpoint, uncertainties } from '../commonParameters';
 import type { Values } from '../define';
 import { column, number } from '../parameters';
 import { seriesOf, uncertaintiesOf } from '../run';
-import { watched, type WatchedFits } from '../watchedFit';
+import { watched, type WatchedLaws } from '../watchedLaw';
 
 export const runParameters = {
   times: column({ help: 'times of the run', unit: 'time' }),
@@ -32,11 +34,13 @@ export function fitKnownLaw(given: Omit<Values<typeof knownLawParameters>, 'deta
 }
 
 /** What COEFFICIENT, HALFLIFE and CURVE fit alike. */
-export const knownLawFits: WatchedFits<Omit<Values<typeof knownLawParameters>, 'detail'>> = {
+export const knownLaw: WatchedLaws<Omit<Values<typeof knownLawParameters>, 'detail'>> = {
   what: 'Rate law of known order',
   readings: 'values',
   of: (given) => [watched(fitKnownLaw(given), seriesOf(given.times, given.values))],
 };
+
+export const knownLawTable: FitTable = (given) => tableOfLaws(knownLaw, given).table;
 
 /** Of the method, which all state. */
 export const lawMethod =

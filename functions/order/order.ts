@@ -2,14 +2,24 @@ import { fitRateLaw, type RateLawFit } from '../../src/order/fit';
 import { orderEstimate } from '../../src/order/profile';
 import type { Series } from '../../src/series/series';
 import { detail } from '../commonParameters';
+import { tableOfLaws } from '../builtIn/law';
 import { defineFunction, type Values } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow } from '../results';
 import { seriesOf, uncertaintiesOf } from '../run';
-import { watched } from '../watchedFit';
+import { watched, type WatchedLaws } from '../watchedLaw';
 import { lawEquations, lawMethod, lawParameters, runParameters } from './lawParameters';
 
 const parameters = { ...runParameters, ...lawParameters };
+
+const freeLaw: WatchedLaws<Values<typeof parameters>> = {
+  what: 'Rate law of free order',
+  readings: 'values',
+  of(given) {
+    const { fit, series } = fitFreeOrder(given);
+    return [watched(fit, series)];
+  },
+};
 
 export default defineFunction({
   name: 'ORDER',
@@ -46,14 +56,7 @@ export default defineFunction({
     const { fit } = fitFreeOrder(given);
     return detail ? [standardRow(orderEstimate(fit))] : fit.order;
   },
-  fits: {
-    what: 'Rate law of free order',
-    readings: 'values',
-    of(given) {
-      const { fit, series } = fitFreeOrder(given);
-      return [watched(fit, series)];
-    },
-  },
+  fits: (given) => tableOfLaws(freeLaw, given).table,
 });
 
 function fitFreeOrder({ times, values, endpoint, uncertainties }: Values<typeof parameters>): {

@@ -2,9 +2,10 @@ import { compareOrders, type OrderRow, type OrderTable } from '../../src/order/o
 import type { Series } from '../../src/series/series';
 import { orNotAvailable } from '../results';
 import type { CellValue } from '../cell';
+import { tableOfLaws } from '../builtIn/law';
 import { defineFunction, type Values } from '../define';
 import { seriesOf, uncertaintiesOf } from '../run';
-import { watched } from '../watchedFit';
+import { watched, type WatchedLaws } from '../watchedLaw';
 import { lawLines, lawMethod, lawParameters, lawQuantities, runParameters } from './lawParameters';
 
 const headings = [
@@ -20,6 +21,17 @@ const headings = [
 ] as const;
 
 const parameters = { ...runParameters, ...lawParameters };
+
+const allLaws: WatchedLaws<Values<typeof parameters>> = {
+  what: 'Rate laws of simple orders and a free one',
+  readings: 'values',
+  of(given) {
+    const { table, series } = compared(given);
+    return [...table.rows, table.free].flatMap((row) =>
+      row.fit ? [watched(row.fit, series, row === table.free ? 'free order' : `order ${row.order}`)] : [],
+    );
+  },
+};
 
 export default defineFunction({
   name: 'ORDERS',
@@ -60,16 +72,7 @@ export default defineFunction({
     const { rows, free } = compared(given).table;
     return [[...headings], ...rows.map((row) => cells(row)), cells(free, 'only simple orders are weighed')];
   },
-  fits: {
-    what: 'Rate laws of simple orders and a free one',
-    readings: 'values',
-    of(given) {
-      const { table, series } = compared(given);
-      return [...table.rows, table.free].flatMap((row) =>
-        row.fit ? [watched(row.fit, series, row === table.free ? 'free order' : `order ${row.order}`)] : [],
-      );
-    },
-  },
+  fits: (given) => tableOfLaws(allLaws, given).table,
 });
 
 function compared({ times, values, endpoint, uncertainties }: Values<typeof parameters>): {

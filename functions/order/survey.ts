@@ -5,10 +5,11 @@ import { columnsBeside } from '../block';
 import type { CellValue } from '../cell';
 import type { Column } from '../column';
 import { endpoint } from '../commonParameters';
-import { defineFunction } from '../define';
+import { tableOfLaws } from '../builtIn/law';
+import { defineFunction, type Values } from '../define';
 import { block, column, number, optional } from '../parameters';
 import { orNotAvailable } from '../results';
-import { watched } from '../watchedFit';
+import { watched, type WatchedLaws } from '../watchedLaw';
 import { lawEquations, lawMethod } from './lawParameters';
 
 const headings = [
@@ -22,6 +23,25 @@ const headings = [
   'flags',
 ] as const;
 
+const parameters = {
+  times: column({ help: 'times that all runs share', unit: 'time' }),
+  block: block({ help: 'readings, one column a run' }),
+  order: optional(number({ help: 'n of all runs' }), undefined, 'fitted for each run'),
+  endpoint: endpoint(),
+};
+
+const lawsOfRuns: WatchedLaws<Values<typeof parameters>> = {
+  what: 'Rate laws of several runs',
+  readings: 'block',
+  of: ({ times, block, order, endpoint }) =>
+    columnsBeside(block, times, { block: 'block', beside: 'times' }).flatMap((run, line) => {
+      if (run.numbers.every((value, i) => value === null || times.numbers[i] === null)) return [];
+      const series = pairReadings(times.numbers, run.numbers);
+      const { fit } = surveyRun(series, { order: order ?? 'free', endpoint });
+      return fit ? [{ ...watched(fit, series, `run ${line + 1}`), line }] : [];
+    }),
+};
+
 export default defineFunction({
   name: 'SURVEY',
   family: 'order',
@@ -31,12 +51,7 @@ export default defineFunction({
   method: `${lawMethod} One row a run below the headings. Conversion is that of the fitted law at the last reading. A run that cannot be fitted says why among its flags, and the others are not lost.`,
   uncertainty:
     'k has its standard uncertainty from the curvature of the fit and the scatter about it. For 95 % limits of one run: PACE.COEFFICIENT with detail TRUE.',
-  parameters: {
-    times: column({ help: 'times that all runs share', unit: 'time' }),
-    block: block({ help: 'readings, one column a run' }),
-    order: optional(number({ help: 'n of all runs' }), undefined, 'fitted for each run'),
-    endpoint: endpoint(),
-  },
+  parameters,
   result: { unit: 'as the headings say', shape: 'table' },
   example: {
     formula: '=PACE.SURVEY({0;10;20;30;40},{8,16;4,4;2,1;1,0.25;0.5,0.0625},1)',
@@ -56,17 +71,7 @@ export default defineFunction({
     const surveyed = runs.map((run, i) => rowOf(times, run, i + 1, { order: order ?? 'free', endpoint }));
     return [[...headings], ...surveyed];
   },
-  fits: {
-    what: 'Rate laws of several runs',
-    readings: 'block',
-    of: ({ times, block, order, endpoint }) =>
-      columnsBeside(block, times, { block: 'block', beside: 'times' }).flatMap((run, line) => {
-        if (run.numbers.every((value, i) => value === null || times.numbers[i] === null)) return [];
-        const series = pairReadings(times.numbers, run.numbers);
-        const { fit } = surveyRun(series, { order: order ?? 'free', endpoint });
-        return fit ? [{ ...watched(fit, series, `run ${line + 1}`), line }] : [];
-      }),
-  },
+  fits: (given) => tableOfLaws(lawsOfRuns, given).table,
 });
 
 type Law = { readonly order: number | 'free'; readonly endpoint: number | 'free' | undefined };

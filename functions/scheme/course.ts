@@ -1,15 +1,14 @@
-import { courseOf } from '../../src/scheme/course';
 import type { CellValue } from '../cell';
 import { linesBeside } from '../column';
 import { defineFunction } from '../define';
 import {
+  courseAt,
   filled,
   schemeEquations,
   schemeMethod,
   schemeParameters,
   speciesAt,
   stepAt,
-  timesOf,
 } from './schemeParameters';
 
 export default defineFunction({
@@ -52,11 +51,11 @@ export default defineFunction({
   run({ scheme, coefficients, initial, times }) {
     const rates = filled(coefficients, 'coefficients', stepAt(scheme));
     const start = filled(initial, 'initial', speciesAt(scheme));
-    const rows = courseOf(scheme, rates, start, timesOf(times))[Symbol.iterator]();
     const gap = scheme.species.map((): CellValue => '');
-    const lines = times.numbers.map((time): readonly CellValue[] =>
-      time === null ? gap : [...(rows.next().value as Float64Array)],
+    const course = courseAt(scheme, rates, start, times);
+    return linesBeside(
+      times,
+      course.map((row) => (row ? [...row] : gap)),
     );
-    return linesBeside(times, lines);
   },
 });

@@ -8,10 +8,12 @@ import { block } from '../parameters';
 import { CellError, type CellValue } from '../cell';
 import type { Column } from '../column';
 import { detail } from '../commonParameters';
-import { defineFunction } from '../define';
+import { tableOfCourse, type FittedCourse } from '../builtIn/fittedCourse';
+import { defineFunction, type Values } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { standardRow, standardRowHeadings } from '../results';
 import {
+  courseAt,
   filled,
   schemeEquations,
   schemeMethod,
@@ -24,10 +26,13 @@ import {
 /** Beyond this correlation two coefficients are hard to tell apart, which the answer says. */
 const closeCorrelation = 0.95;
 
-const observed = block({
-  help: 'readings, a column a species in order of first appearance; blank where one was not observed',
-  unit: 'as initial',
-});
+const parameters = {
+  ...schemeParameters,
+  observed: block({
+    help: 'readings, a column a species in order of first appearance; blank where one was not observed',
+    unit: 'as initial',
+  }),
+};
 
 export default defineFunction({
   name: 'FITCOURSE',
@@ -36,7 +41,7 @@ export default defineFunction({
   equations: schemeEquations,
   method: `${schemeMethod} The coefficients given are where the search starts. Least squares over all readings as they are, each counting alike, so all columns must be in one unit; coefficients are searched as logarithms, with sensitivities integrated beside the concentrations; where start values lead to a poorer fit than coefficients that suit the length of the run, the better is taken. Limits are those of the profile likelihood. A coefficient that the readings cannot tell, or whose standard uncertainty exceeds itself, is #N/A and says why. With detail: a row a coefficient, and after the standard row the one it is hard to tell from.`,
   uncertainty: uncertaintyOf.profile,
-  parameters: { ...schemeParameters, observed, detail: detail() },
+  parameters: { ...parameters, detail: detail() },
   result: { unit: 'concentration^(1−n) per time', shape: 'table' },
   // A halves every 10, B is not observed
   example: {
@@ -61,37 +66,59 @@ export default defineFunction({
   seeAlso: ['COURSE', 'ORDERS', 'PLAN'],
   reference: 'doi:10.1007/s10543-023-00967-x; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
   isLong: true,
-  run({ scheme, coefficients, initial, times, observed: readings, detail: isDetailed }) {
-    const start = filled(coefficients, 'coefficients', stepAt(scheme));
-    const experiment = {
-      initial: filled(initial, 'initial', speciesAt(scheme)),
-      times: timesOf(times),
-      signals: signalsOf(scheme, times, readings),
-    };
-    const fit = fitMechanism({ scheme, start, experiments: [experiment] });
-    if (isDetailed) return start.map((_, place) => detailedRow(scheme, fit, place));
-    return [fit.coefficients.map(({ value, why }) => (why === '' ? value : new CellError('#N/A', why)))];
+  run({ detail: isDetailed, ...given }) {
+    const { coefficients, ...fit } = fitted(given);
+    if (isDetailed)
+      return coefficients.map((_, place) => detailedRow(given.scheme, { ...fit, coefficients }, place));
+    return [coefficients.map(({ value, why }) => (why === '' ? value : new CellError('#N/A', why)))];
   },
+  fits: (given) => tableOfCourse(fittedCourse, given),
 });
 
-/** One a species that was observed at all. @throws InvalidInput where the block does not fit times and scheme */
-function signalsOf(scheme: Scheme, times: Column, readings: Column): Signal[] {
-  const { species } = scheme;
-  const columns = columnsBeside(readings, times, { block: 'observed', beside: 'times' });
-  if (columns.length !== species.length) {
-    throw new InvalidInput(
-      `observed must have a column for each of ${species.length} species (${species.join(', ')}): got ${columns.length}`,
-    );
-  }
-  return columns
+type Given = Values<typeof parameters>;
+
+function fitted({ scheme, coefficients, initial, times, observed }: Given): MechanismFit {
+  const start = filled(coefficients, 'coefficients', stepAt(scheme));
+  const experiment = {
+    initial: filled(initial, 'initial', speciesAt(scheme)),
+    times: timesOf(times),
+    signals: signalsOf(scheme, times, observed),
+  };
+  return fitMechanism({ scheme, start, experiments: [experiment] });
+}
+
+function fittedCourse(given: Given): FittedCourse {
+  const { scheme, times, observed } = given;
+  const { coefficients } = fitted(given);
+  const values = coefficients.map(({ value }) => value);
+  const start = filled(given.initial, 'initial', speciesAt(scheme));
+  return {
+    ...given,
+    coefficients: coefficients.map(({ value, why }) => (why === '' ? value : null)),
+    observed: columnsOf(scheme, times, observed),
+    course: courseAt(scheme, values, start, times),
+  };
+}
+
+/** One a species that was observed at all. */
+const signalsOf = (scheme: Scheme, times: Column, readings: Column): Signal[] =>
+  columnsOf(scheme, times, readings)
     .map(({ numbers }, j) =>
       followed(
         scheme,
-        species[j],
+        scheme.species[j],
         numbers.filter((_, i) => times.numbers[i] !== null),
       ),
     )
     .filter((signal) => signal.readings.some((reading) => reading !== null));
+
+/** One a species. @throws InvalidInput where the block does not fit times and scheme */
+function columnsOf({ species }: Scheme, times: Column, readings: Column): Column[] {
+  const columns = columnsBeside(readings, times, { block: 'observed', beside: 'times' });
+  if (columns.length === species.length) return columns;
+  throw new InvalidInput(
+    `observed must have a column for each of ${species.length} species (${species.join(', ')}): got ${columns.length}`,
+  );
 }
 
 function detailedRow(scheme: Scheme, fit: MechanismFit, place: number): CellValue[] {

@@ -1,5 +1,6 @@
 /** What the functions that work on a written mechanism have in common. */
 import { InvalidInput, shown } from '../../src/errors';
+import { courseOf } from '../../src/scheme/course';
 import { parseScheme } from '../../src/scheme/parse';
 import { reactionInWords, type Scheme } from '../../src/scheme/scheme';
 import { CellError, shownCell, type CellRange } from '../cell';
@@ -58,6 +59,17 @@ export function timesOf(times: Column): number[] {
       `times must be 0 or later, since initial belongs to time 0: ${placeInWords(place, times)} (${shown(time)})`,
     );
   });
+}
+
+/** The concentration of each species at each time; nothing where there is a gap. */
+export function courseAt(
+  scheme: Scheme,
+  coefficients: readonly number[],
+  initial: readonly number[],
+  times: Column,
+): (Float64Array | null)[] {
+  const rows = courseOf(scheme, coefficients, initial, timesOf(times))[Symbol.iterator]();
+  return times.numbers.map((time) => (time === null ? null : (rows.next().value as Float64Array)));
 }
 
 export const stepAt =

@@ -1,6 +1,5 @@
 /** Fits in a formula that is frozen: their numbers on the sheet "Workings", and whether they still fit. */
 import { CellError } from '../../functions/cell';
-import { tableOfFits } from '../../functions/builtIn/law';
 import { NotSaid } from '../../functions/builtIn/said';
 import { InvalidInput, NotDetermined } from '../../src/errors';
 import { allCalls, callsIn } from './calls';
@@ -16,8 +15,7 @@ export function watchFits(formula: string, position: Position, scene: Scene): st
     try {
       return scene.workings.attempt(() => {
         const given = givenTo(call, text, scene, (own) => ({ text: own }));
-        if (!given.argument(fits.readings)?.area) return [];
-        return [tableOfFits(fits, given).table.cell(0, 0)];
+        return [fits(given).cell(0, 0)];
       });
     } catch (error) {
       const isExpected = [NotSaid, InvalidInput, NotDetermined, CellError].some(

@@ -1,5 +1,5 @@
 /** Small workbooks for tests, typed as a person would: text that starts with = is a formula. */
-import { columnIndex } from '../../../functions/address';
+import { cellName, columnIndex } from '../../../functions/address';
 import type { CellValue } from '../../../functions/cell';
 import type { BookModel, CellModel, DefinedName } from '../../../workbook/engine/engine';
 
@@ -29,6 +29,12 @@ function cellModel(cell: string, content: CellValue): CellModel {
 export function at(cell: string): { row: number; column: number } {
   const [, column, row] = /^([A-Z]+)(\d+)$/.exec(cell)!;
   return { row: Number(row) - 1, column: columnIndex(column) };
+}
+
+/** A row of cells to the right: `row('A2', [1, 2])` is A2 and B2. */
+export function row(first: string, values: readonly CellValue[]): Typed {
+  const { row: own, column: start } = at(first);
+  return Object.fromEntries(values.map((value, i) => [cellName(own, start + i), value]));
 }
 
 /** A column of cells downwards: `column('A2', [1, 2])` is A2 and A3. */

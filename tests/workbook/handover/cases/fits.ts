@@ -1,5 +1,5 @@
 /** Fits, which are frozen, and the curves of fitted laws. */
-import { column } from '../../engine/book';
+import { column, row } from '../../engine/book';
 import type { Cases } from './case';
 import { run } from './run';
 
@@ -7,6 +7,15 @@ const fading = {
   ...column('A2', [0, 5, 10, 15, 20, 30, 40, 60]),
   ...column('B2', [0.82, 0.66, 0.55, 0.43, 0.37, 0.24, 0.17, 0.08]),
   ...column('C2', [0.01, 0.01, 0.01, 0.02, 0.01, 0.01, 0.02, 0.01]),
+};
+
+/** Two steps, of which the last product was not followed; one time is missing. */
+const twoSteps = {
+  ...column('A2', [0, 5, 10, 15, null, 30, 40, 60]),
+  ...column('B2', [8, 4.9, 2.9, 1.8, 1.1, 0.45, 0.2, 0.05]),
+  ...column('C2', [0, 2.8, 4, null, 4.2, 3.7, 3.1, 1.9]),
+  F1: 'A -> B -> C',
+  ...column('F2', [0.05, 0.05]),
 };
 
 export const fits: Cases = {
@@ -43,6 +52,28 @@ export const fits: Cases = {
     },
     becomes: 'frozen',
     changed: { B5: 39 },
+  },
+  'Fit of a mechanism': {
+    typed: {
+      ...twoSteps,
+      G2: '=PACE.FITCOURSE(F1,F2:F3,{8;0;0},A2:A9,B2:D9,TRUE)',
+      G5: '=1/PACE.FITCOURSE("A ->",0.1,8,A2:A9,B2:B9)',
+    },
+    becomes: 'frozen',
+    changed: { B5: 1.95 },
+  },
+  'Fit of a mechanism in rows': {
+    typed: {
+      ...row('A1', [0, 4, 9, 15, 24]),
+      ...row('A2', [5, 3.5, 2.4, 1.8, 1.3]),
+      ...row('A3', [0, 1.4, 2.7, 3.2, 3.6]),
+      F4: 'X <-> Y',
+      F5: 5,
+      F6: 0,
+      H4: '=PACE.FITCOURSE(F4,{0.1;0.1},F5:F6,A1:E1,A2:E3)',
+    },
+    becomes: 'frozen',
+    changed: { F5: 5.2 },
   },
   'Fits of several runs': {
     typed: {
