@@ -7,7 +7,7 @@ import { columnOf, type Run, type Table } from './runs';
 import { placeName } from './turned';
 
 export interface Concern {
-  /** What was seen: `one row holds a number stored as text: "16,0"`. */
+  /** What was seen: `one pair holds a number stored as text: "16,0"`. */
   readonly finding: string;
   /** `row 7` of the sheet, not of the range. */
   readonly where: string;

@@ -76,7 +76,7 @@ function readingsOf({ numbers }: Column): Float64Array {
 function heldHistory(temperatures: Column, times: Column): History {
   requireAsMany(times, temperatures, 'times');
   if (!times.numbers.some((time, i) => time !== null && temperatures.numbers[i] !== null)) {
-    throw new InvalidInput('temperatures and times must hold numbers: no row has both');
+    throw new InvalidInput('temperatures and times must hold numbers: no two make a pair');
   }
   const series = pairReadings(times.numbers, temperatures.numbers);
   if (series.times.length === 1) return { temperatures: series.values };

@@ -55,7 +55,7 @@ export function requireAsMany({ numbers }: Column, temperatures: Column, name: s
 function requireSomePair(temperatures: Column, coefficients: Column): void {
   if (temperatures.numbers.some((value, i) => value !== null && coefficients.numbers[i] !== null)) return;
   throw new InvalidInput(
-    'temperatures and coefficients must hold numbers: no row has both a temperature and a coefficient',
+    'temperatures and coefficients must hold numbers: no temperature and coefficient make a pair',
   );
 }
 

@@ -30,7 +30,7 @@ export function pairReadings(times: Readings, values: Readings): Series {
     if (times[place] !== null && values[place] !== null) kept.push(place);
   }
   if (kept.length === 0)
-    throw new InvalidInput('times and values must hold numbers: no row has both a time and a reading');
+    throw new InvalidInput('times and values must hold numbers: no time and reading make a pair');
   if (!isAscending(kept, times)) kept.sort((a, b) => times[a]! - times[b]! || a - b);
   const series = {
     times: Float64Array.from(kept, (place) => times[place]!),

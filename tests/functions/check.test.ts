@@ -27,7 +27,7 @@ test('PACE.CHECK: a table with a header row, one finding a row', () => {
   expect(header).toEqual(['finding', 'where', 'what it means', 'what to do']);
   expect(rows.map(([finding, where]) => [finding, where])).toEqual([
     ['one reading is exactly 0 among readings that are not: at time 80', 'row 9'],
-    ['one row holds a number stored as text: "0,5"', 'row 5'],
+    ['one pair holds a number stored as text: "0,5"', 'row 5'],
   ]);
   expect(rows.every((row) => row.length === 4)).toBe(true);
 });
@@ -37,7 +37,7 @@ test('PACE.CHECK: an error cell is a finding, not the answer', () => {
     replaced(clean, [3, new CellError('#REF!')]),
     replaced<CellValue>(tens, [5, new CellError('#N/A')]),
   );
-  expect(row[0]).toBe('2 rows show an error: #REF! and #N/A');
+  expect(row[0]).toBe('2 pairs show an error: #REF! and #N/A');
   expect(row[1]).toBe('rows 4 and 6');
 });
 
@@ -45,7 +45,7 @@ test('PACE.CHECK: text that every other function refuses is a finding here', () 
   const values = replaced(clean, [3, '1,234']);
   expect(callFunction(functionNamed('TANGENT')!, [down(tens), down(values), 50])).toBeInstanceOf(CellError);
   const [, row] = checked(values);
-  expect(row.slice(0, 2)).toEqual(['one row holds text that looks like a number: "1,234"', 'row 4']);
+  expect(row.slice(0, 2)).toEqual(['one pair holds text that looks like a number: "1,234"', 'row 4']);
 });
 
 test('PACE.CHECK: a run in a row is counted in columns, and a truth value is only a word', () => {

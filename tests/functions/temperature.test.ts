@@ -67,7 +67,7 @@ describe('PACE.ARRHENIUS', () => {
     ['25,1', '#N/A an activation energy needs coefficients at two temperatures: got 1'],
     [
       '{25;"x"},{"y";2}',
-      '#VALUE! temperatures and coefficients must hold numbers: no row has both a temperature and a coefficient',
+      '#VALUE! temperatures and coefficients must hold numbers: no temperature and coefficient make a pair',
     ],
     ['{25,35;45,55},{1;2;3;4}', '#VALUE! temperatures must be one column or one row: got 2 rows of 2 cells'],
     ['{25;#DIV/0!},{1;2}', '#DIV/0! '],
@@ -182,7 +182,7 @@ describe('PACE.MEANTEMP', () => {
 
   test.each([
     ['{"a";"b"}', '#VALUE! temperatures must hold numbers: none was found'],
-    ['{20;30},{"a";"b"}', '#VALUE! temperatures and times must hold numbers: no row has both'],
+    ['{20;30},{"a";"b"}', '#VALUE! temperatures and times must hold numbers: no two make a pair'],
     ['{20;30},{1;2;3}', '#VALUE! times must be as many as temperatures: got 3 for 2'],
     ['{20;30},{1;1}', '#VALUE! times must differ: all 2 are 1'],
     ['{293;303}', expect.stringMatching(/^#VALUE! temperatures must be in degC: all lie above 200/)],

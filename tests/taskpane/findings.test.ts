@@ -31,3 +31,23 @@ test('checkRun puts what spoils a result first at the top', () => {
   const { concerns } = checked({ 1: 'spilt', 3: new CellError('#DIV/0!') });
   expect(concerns.map(({ where }) => where).slice(0, 2)).toEqual(['row 9', 'row 7']);
 });
+
+test('checkRun names the columns of the sheet where a run stands in rows, and speaks of no row', () => {
+  const odd: Readonly<Record<number, CellValue>> = { 2: '16,0', 4: new CellError('#DIV/0!'), 6: 'spilt' };
+  const places = Array.from({ length: 9 }, (_, i) => i);
+  const cells: CellValue[][] = [
+    ['t / s', ...places.map((i) => 10 * i)],
+    ['c / (mmol/L)', ...places.map((i) => odd[i] ?? 64 * 0.5 ** i)],
+  ];
+  const table = findTable({
+    area: { sheet: 'Runs', row: 4, column: 2, rows: 2, columns: 10 },
+    cells,
+  }) as Table;
+  const { concerns } = checkRun(table, proposeRun(table));
+  // readings begin in column D
+  expect(concerns.map(({ where }) => where)).toEqual(
+    expect.arrayContaining(['column F', 'column H', 'column J']),
+  );
+  const words = concerns.flatMap(({ finding, meaning, advice }) => [finding, meaning, advice]);
+  expect(words.filter((said) => /\brows?\b/.test(said))).toEqual([]);
+});

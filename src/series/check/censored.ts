@@ -19,7 +19,7 @@ export function censored(run: RawRun): Finding | null {
     places,
     finding: `${counted(places.length, 'reading lies', 'readings lie')} beyond what the instrument can see: ${seen}`,
     meaning:
-      'these rows are skipped; among readings near the limit only the seen ones are left, so the reaction seems slower towards its end than it is',
+      'they are skipped; among readings near the limit only the seen ones are left, so the reaction seems slower towards its end than it is',
     advice:
       'end the run at the last time before them; put neither 0 nor the limit nor half of it in their place',
   };

@@ -11,9 +11,9 @@ export function errorCells(run: RawRun): Finding | null {
   return {
     kind: 'error',
     places,
-    finding: `${counted(places.length, 'row shows', 'rows show')} an error: ${seen}`,
+    finding: `${counted(places.length, 'pair shows', 'pairs show')} an error: ${seen}`,
     meaning:
-      'every rate, order or half life from this range answers with that error; the rest of this check leaves the rows out',
+      'every rate, order or half life from this range answers with that error; the rest of this check leaves the pairs out',
     advice: 'mend the formula or the link there, or clear the cell: a blank cell is only a gap',
   };
 }

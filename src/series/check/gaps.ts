@@ -30,7 +30,7 @@ export function gaps(run: RawRun): Finding | null {
     kind: 'gap',
     places,
     finding: `${counted(places.length, 'gap')}: ${said.join('; ')}${quoted}`,
-    meaning: 'these rows are skipped, which harms nothing while enough readings are left around them',
+    meaning: 'they are skipped, which harms nothing while enough readings are left around them',
     advice: 'fill in what was forgotten; leave blank what was never read, and never type 0 for it',
   };
 }

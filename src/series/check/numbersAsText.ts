@@ -16,7 +16,7 @@ const quoted = (run: RawRun, places: readonly number[], holds: (cell: RawCell) =
     4,
   );
 
-const rowsHold = (count: number): string => counted(count, 'row holds', 'rows hold');
+const pairsHold = (count: number): string => counted(count, 'pair holds', 'pairs hold');
 
 /**
  * Numbers stored as text that cannot be taken for one. Rule: a text cell reads as a number with a unit, as
@@ -32,9 +32,9 @@ export function numbersAsText(run: RawRun): Finding | null {
   return {
     kind: 'number as text',
     places,
-    finding: `${rowsHold(places.length)} text that looks like a number: ${quoted(run, places, isUnreadText)}`,
+    finding: `${pairsHold(places.length)} text that looks like a number: ${quoted(run, places, isUnreadText)}`,
     meaning:
-      'such rows are skipped without a word and the result rests on the others; text that could mean two numbers, such as "1,234", is refused',
+      'such pairs are skipped without a word and the result rests on the others; text that could mean two numbers, such as "1,234", is refused',
     advice:
       'retype them as plain numbers with the decimal sign this sheet uses, the unit in the heading; PACE.CLOCK reads clock times',
   };
@@ -47,7 +47,7 @@ export function numbersReadFromText(run: RawRun): Finding | null {
   return {
     kind: 'number read from text',
     places,
-    finding: `${rowsHold(places.length)} a number stored as text: ${quoted(run, places, isReadText)}`,
+    finding: `${pairsHold(places.length)} a number stored as text: ${quoted(run, places, isReadText)}`,
     meaning:
       'PACE functions read it as the number it shows, but a chart, a sum or a slope of the sheet skips it and gives another answer',
     advice: 'turn it into a number: retype it with the decimal sign this sheet uses, or use VALUE',

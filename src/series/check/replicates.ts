@@ -17,7 +17,7 @@ export function replicates({ times, values, places }: Series): Finding | null {
       'every one of them counts in a fit, and between readings their average is used: true replicates make the result better',
     advice:
       copies > 0
-        ? 'make sure that no row was copied twice and that these are not two runs in one column'
+        ? 'make sure that no pair was copied twice and that these are not two runs in one'
         : 'make sure that these are not two runs in one column',
   };
 }

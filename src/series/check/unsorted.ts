@@ -48,7 +48,7 @@ export function unsorted(run: RawRun, misplaced: ReadonlySet<number>): Finding |
       )}`,
       meaning:
         'most likely a slip in typing the time: the reading stands in the wrong part of the run and bends every tangent and fit near it',
-      advice: 'compare the time with the notebook; blank the row if it cannot be settled',
+      advice: 'compare the time with the notebook; blank the pair if it cannot be settled',
     };
   }
   const backwards = places.length === times.filter((time) => time !== null).length - 1;

@@ -68,7 +68,7 @@ test.each<[string, () => unknown, InvalidInput | NotDetermined]>([
   [
     'nothing but gaps',
     () => pairReadings([1, null], [null, 4]),
-    new InvalidInput('times and values must hold numbers: no row has both a time and a reading'),
+    new InvalidInput('times and values must hold numbers: no time and reading make a pair'),
   ],
   [
     'one pair',

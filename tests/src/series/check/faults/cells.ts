@@ -8,7 +8,7 @@ export const cells: readonly Fault[] = [
     name: 'an error cell',
     kind: 'error',
     places: [6],
-    says: /^one row shows an error: #DIV\/0!$/,
+    says: /^one pair shows an error: #DIV\/0!$/,
     values: replaced(clean, [6, { error: '#DIV/0!' }]),
   },
   {
@@ -43,7 +43,7 @@ export const cells: readonly Fault[] = [
     name: 'a number kept as text',
     kind: 'number read from text',
     places: [3],
-    says: /^one row holds a number stored as text: "0,567"$/,
+    says: /^one pair holds a number stored as text: "0,567"$/,
     values: replaced(clean, [3, { text: '0,567', readAs: 0.567 }]),
   },
   {
@@ -94,7 +94,7 @@ export const cells: readonly Fault[] = [
     name: 'no pair at all',
     kind: 'no pairs',
     places: [],
-    says: /^no row has both/,
+    says: /^no time and reading/,
     times: [null, null],
     values: [null, null],
   },
