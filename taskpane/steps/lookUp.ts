@@ -1,7 +1,6 @@
 /** Every function, found by name or words, with its help and its example. */
 import { functionNamed } from '../../functions/catalogue';
 import { signature, typedName, type CellFunction } from '../../functions/define';
-import { howInWords } from '../../functions/documented';
 import { helpAddress } from '../../functions/help/pageName';
 import type { Actions } from '../actions';
 import { h, type Child } from '../h';
@@ -10,6 +9,7 @@ import { parameterHelp } from './parameterHelp';
 import type { Scene } from '../scene';
 import { button, step, textField } from './fields';
 import { formulaLine } from './formulaLine';
+import { howItIsWorkedOut } from './howItIsWorkedOut';
 
 export function lookUpStep({ state: { lookup } }: Scene, actions: Actions): HTMLElement {
   const chosen = functionNamed(lookup.chosen);
@@ -77,13 +77,7 @@ function article(f: CellFunction, actions: Actions): Child[] {
       h('dd', {}, `${f.result.shape}, unit ${f.result.unit}`),
     ),
     f.caution !== undefined && h('p', { className: 'caution' }, f.caution),
-    h(
-      'details',
-      {},
-      h('summary', {}, 'How it is worked out'),
-      h('p', { className: 'hint' }, howInWords(f)),
-      h('p', { className: 'hint' }, f.uncertainty),
-    ),
+    howItIsWorkedOut(f),
     h('p', { className: 'hint' }, `Reference: ${f.reference}`),
     readMore(f),
     h('p', { className: 'what' }, 'Example'),

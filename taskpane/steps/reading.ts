@@ -13,6 +13,7 @@ import { asItIs, fieldsOf, functionOf, signals, unitProblem } from '../signals';
 import { result } from './estimate';
 import { selectField, step } from './fields';
 import { formulaLine } from './formulaLine';
+import { howItIsWorkedOut } from './howItIsWorkedOut';
 import { pointedField } from './pointedField';
 
 const choices = [
@@ -56,6 +57,7 @@ export function readingStep({ state, reading: answer }: Scene, actions: Actions)
     ...drawing(f, table, run, answer),
     result(...inWords(f, table, run, answer)),
     formulaLine(readingFormula(f, table, run, reading, pointing), actions),
+    howItIsWorkedOut(f),
     f.caution !== undefined && h('p', { className: 'caution' }, f.caution),
   );
 }

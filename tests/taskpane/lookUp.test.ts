@@ -34,6 +34,17 @@ test('a name or words find it, and its help comes from its definition', async ()
   expect(pane.find<HTMLInputElement>('#look-up-words').value).toBe('activation energy');
 });
 
+test('its equations are typeset, each with its line for who listens', async () => {
+  await open();
+  await pane.press('PACE.GASVOLUME');
+  const equations = [...pane.root.querySelectorAll('#look-up .typeset math[display="block"]')];
+  const { lines, where } = functionNamed('GASVOLUME')!.equations!;
+  expect(equations.map((one) => one.getAttribute('alttext'))).toEqual(lines);
+  expect(equations[0].querySelector('mfrac')).not.toBeNull();
+  expect(pane.root.querySelectorAll('#look-up .typeset dt math')).toHaveLength(Object.keys(where).length);
+  await pane.press('All functions');
+});
+
 test('what nobody speaks of is said', async () => {
   await open();
   await pane.type('#look-up-words', 'zeppelin');

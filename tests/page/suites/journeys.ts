@@ -130,6 +130,12 @@ export function journeysSuite(sheet: () => BenchPage): void {
     await press('Look up');
     await pane('#look-up-words').fill('half life');
     await press('PACE.HALFLIFE');
+    await pane('#how-halflife summary').click();
+    // a fraction that is set stands one part above the other
+    const [over, under] = await Promise.all(
+      [0, 1].map((part) => pane('#how-halflife mfrac > *').nth(part).boundingBox()),
+    );
+    expect(over!.y + over!.height).toBeLessThanOrEqual(under!.y + 1);
     await sheet().select("'Gas run'!H3");
     await pane('#target').waitFor();
     await waitUntil(async () => (await pane('#target').inputValue()).endsWith('H3'));
