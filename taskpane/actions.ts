@@ -1,6 +1,7 @@
 /** What a person can do in the pane. Actions alone both change the store and ask the workbook. */
 import { areaName } from '../functions/address';
 import { benchOf, guardedBy } from './actions/bench';
+import { choosing } from './actions/chosen';
 import { handingOver } from './actions/handOver';
 import {
   changeRun,
@@ -27,7 +28,7 @@ import type {
   TemperatureChoice,
 } from './choices';
 import type { CopyMaker } from './copying';
-import type { WorkbookPort } from './port';
+import type { ActiveCell, SheetArea, WorkbookPort } from './port';
 import type { Corrections, Run } from './runs';
 import type { Store } from './store';
 
@@ -65,6 +66,10 @@ export interface Actions {
   /** Gives the copy that was made. */
   giveCopy(): Promise<void>;
   copy(text: string): Promise<void>;
+  /** Is told whenever the active cell, or its formula, is another. */
+  follow(cell: ActiveCell | null): void;
+  /** Selects cells that a formula reads. */
+  show(area: SheetArea): Promise<void>;
   /** Reads the sheet again: the selection moved, or the pane came back into view. */
   refresh(): Promise<void>;
 }
@@ -76,6 +81,7 @@ export function createActions(store: Store, port: WorkbookPort, makeCopy?: CopyM
   const work = longWork(bench);
   const { settle, putIn, undoLast } = putting(bench, work);
   const copying = handingOver(bench, makeCopy);
+  const { follow, show } = choosing(bench);
 
   /** A choice is changed, with all that hangs on it. */
   const changing = <Step extends keyof Choices>(step: Step) =>
@@ -167,6 +173,8 @@ export function createActions(store: Store, port: WorkbookPort, makeCopy?: CopyM
       await navigator.clipboard.writeText(text);
       bench.notify('good', 'formula copied');
     }),
+    follow,
+    show: guarded(show),
     refresh: guarded(async () => {
       await reread(bench);
       await lookForProposal(bench);

@@ -3,6 +3,7 @@ import { cellName, parseArea, type Area } from '../functions/address';
 import { CellError, type CellRange, type CellValue, type ErrorCode } from '../functions/cell';
 import { drawChart, removeChart, type DrawnChart } from './excel/chart';
 import { excelFiles } from './excel/files';
+import { onActiveCell, onSelection } from './excel/listening';
 import { documentMemory } from './excel/memory';
 import { oneEach, spilledInto } from './excel/spills';
 import { allSupport, withoutSpills, type HostSupport } from './excel/support';
@@ -40,7 +41,8 @@ export function excelPort({ name, files, charts, spills, memory }: HostSupport =
     activeCell: () => Excel.run(readActiveCell),
     read: (area) =>
       Excel.run(async (context) => readArea(context, await sheetNamed(context, area.sheet), area)),
-    onSelectionChange: listen,
+    onSelectionChange: onSelection,
+    onActiveCell,
     occupied: (area) => Excel.run((context) => occupiedCells(context, area)),
     write: (cells, options) => Excel.run((context) => write(context, cells, options, spills)),
     undo: (receipt) => Excel.run((context) => putBack(context, receipt)),
@@ -153,26 +155,6 @@ async function readActiveCell(context: Excel.RequestContext): Promise<SheetArea 
   sheet.load({ name: true });
   await context.sync();
   return { sheet: sheet.name, ...areaOf(cell) };
-}
-
-/** Registering takes a round trip; whoever stops before it is over is stopped all the same. */
-function listen(listener: () => void): () => void {
-  const registration = Excel.run(async (context) => {
-    const handler = context.workbook.onSelectionChanged.add(async () => listener());
-    await context.sync();
-    return handler;
-  });
-  registration.catch(() => undefined); // the pane works without it, through its own button
-  return () => {
-    registration
-      .then((handler) =>
-        Excel.run(handler.context, async (context) => {
-          handler.remove();
-          await context.sync();
-        }),
-      )
-      .catch(() => undefined);
-  };
 }
 
 async function occupiedCells(context: Excel.RequestContext, area: SheetArea): Promise<string[]> {

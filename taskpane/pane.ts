@@ -8,6 +8,7 @@ import { patch } from './patch';
 import type { WorkbookPort } from './port';
 import type { Task } from './choices';
 import { handOverStep } from './steps/handOver';
+import { inCell } from './steps/inCell';
 import { lookUpStep } from './steps/lookUp';
 import { manyStep } from './steps/many';
 import { orderStep } from './steps/order';
@@ -51,14 +52,14 @@ export function mountPane(
     shown = state.notice;
   });
   const refresh = oneAtATime(() => actions.refresh());
-  const stopListening = port.onSelectionChange(refresh);
+  const stops = [port.onSelectionChange(refresh), port.onActiveCell(actions.follow)];
   window.addEventListener('focus', refresh);
   refresh();
 
   return () => {
     isMounted = false;
     stopWatching();
-    stopListening();
+    stops.forEach((stop) => stop());
     window.removeEventListener('focus', refresh);
     root.replaceChildren();
   };
@@ -113,6 +114,7 @@ export function view(scene: Scene, actions: Actions, host: Host): HTMLElement {
     { className: 'flaskpace' },
     h('header', {}, h('h1', {}, 'Flaskpace'), h('p', {}, host.host)),
     host.remark !== undefined && h('p', { className: 'hint' }, host.remark),
+    inCell(scene.state.chosen, actions),
     runStep(scene, actions),
     taskBar(task, actions),
     steps[task](scene, actions, host),

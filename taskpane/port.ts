@@ -53,6 +53,13 @@ export class CellsInUse extends Error {
   }
 }
 
+/** Where the person is, filled or not. */
+export interface ActiveCell {
+  readonly at: SheetArea;
+  /** As it is typed, with its `=`; `null` where none stands there. */
+  readonly formula: string | null;
+}
+
 /** The workbook as a file, where the host gives it. */
 export interface WorkbookFiles {
   /** What becomes of a file that is given: `opens as a new workbook`. */
@@ -91,6 +98,13 @@ export interface WorkbookPort {
   read(area: SheetArea): Promise<RangeReading>;
   /** @returns a function that stops listening */
   onSelectionChange(listener: () => void): () => void;
+  /**
+   * Tells the active cell, at once and whenever it or its formula is another, where the host says so also while that
+   * is typed; `null` when no sheet is shown. @returns a function that stops
+   */
+  onActiveCell(listener: (cell: ActiveCell | null) => void): () => void;
+  /** Numbers these areas in the sheet, from 1, in place of those before; left out where the host cannot. */
+  mark?(areas: readonly SheetArea[]): void;
   /** Cells of the area that hold something. */
   occupied(area: SheetArea): Promise<readonly string[]>;
   /** Writes all or nothing. @throws CellsInUse unless `overwrite` */
@@ -105,6 +119,6 @@ export interface WorkbookPort {
   ): Promise<WriteReceipt>;
   /** Puts back what a write changed. */
   undo(receipt: WriteReceipt): Promise<void>;
-  /** Shows the cell to the person. */
+  /** Selects these cells, and shows them to the person. */
   reveal(area: SheetArea): Promise<void>;
 }

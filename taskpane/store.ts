@@ -3,7 +3,7 @@ import type { CellRange } from '../functions/cell';
 import type { Surveyed } from './calls/many';
 import { firstChoices, type Choices, type Task } from './choices';
 import type { HandedCopy } from './copying';
-import type { RangeReading, WriteReceipt } from './port';
+import type { RangeReading, SheetArea, WriteReceipt } from './port';
 import type { Run, Table } from './runs';
 
 export interface Notice {
@@ -36,6 +36,12 @@ export interface Deed {
   readonly before: Pick<State, 'table' | 'run' | 'reading'>;
 }
 
+/** A formula of ours in the active cell, or being typed there. */
+export interface Chosen {
+  readonly formula: string;
+  readonly at: SheetArea;
+}
+
 export interface State extends Choices {
   readonly table: Table | null;
   readonly run: Run | null;
@@ -43,6 +49,7 @@ export interface State extends Choices {
   readonly proposal: RangeReading | null;
   /** Why what is selected is no run; empty when there is nothing to say. */
   readonly hint: string;
+  readonly chosen: Chosen | null;
   readonly task: Task;
   /** What stands in the cells that fields point at, by their full names: `'Gas run'!E3`. */
   readonly pointedAt: ReadonlyMap<string, CellRange>;
@@ -59,6 +66,7 @@ export const firstState: State = {
   run: null,
   proposal: null,
   hint: '',
+  chosen: null,
   task: 'rate',
   pointedAt: new Map(),
   survey: null,

@@ -57,6 +57,16 @@ export function localPort(grid: Grid, files: WorkbookFiles): WorkbookPort {
       return reading(area);
     },
     onSelectionChange: (listener) => grid.onSelection(listener),
+    onActiveCell(listener) {
+      const tell = (): void => {
+        const active = grid.active();
+        listener(active && { at: { ...active, rows: 1, columns: 1 }, formula: grid.formula() });
+      };
+      const stops = [grid.onSelection(tell), grid.onTyping(tell), grid.onEdit(tell)];
+      tell();
+      return () => stops.forEach((stop) => stop());
+    },
+    mark: (areas) => grid.mark(areas),
     occupied: async (area) => occupied(area),
     async write(cells, { overwrite, description }) {
       const inUse = cells.flatMap((cell) => occupied(reachOf(cell)));
@@ -79,7 +89,7 @@ export function localPort(grid: Grid, files: WorkbookFiles): WorkbookPort {
     },
     async reveal(area) {
       requireSheet(area.sheet);
-      grid.select({ ...area, rows: 1, columns: 1 });
+      grid.select(area);
     },
   };
 }

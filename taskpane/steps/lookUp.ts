@@ -81,7 +81,7 @@ function article(f: CellFunction, actions: Actions): Child[] {
     h('p', { className: 'hint' }, `Reference: ${f.reference}`),
     readMore(f),
     h('p', { className: 'what' }, 'Example'),
-    formulaLine(f.example.formula, actions),
+    formulaLine({ formula: f.example.formula, sheet: '' }, actions),
   ];
 }
 

@@ -53,7 +53,7 @@ export function manyStep({ state, stamps, picked, insertion }: Scene, actions: A
         { className: 'problem' },
         'one survey takes runs that share their times and stand side by side: pick such, or a formula each',
       ),
-    first !== undefined && formulaLine(first, actions),
+    first !== undefined && formulaLine({ formula: first, sheet: table.sheet }, actions),
     progress
       ? progressBar(progress, actions)
       : button(

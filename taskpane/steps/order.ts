@@ -68,7 +68,7 @@ export function orderStep(scene: Scene, actions: Actions): HTMLElement {
       order.answer,
       (chosen) => void actions.changeOrder({ answer: chosen as OrderAnswerKind }),
     ),
-    formulaLine(formula, actions),
+    formulaLine({ formula, sheet: table.sheet }, actions),
   );
 }
 

@@ -37,7 +37,10 @@ export function rateStep(
     ...drawing(table, run, resolved(rate, pointing), answer, unit),
     result(...inWords(table, run, rate, answer, unit)),
     h('p', { className: 'hint' }, scaleCaution),
-    formulaLine(rateFormula(table, run, rate, pointing, put.withDetail), actions),
+    formulaLine(
+      { formula: rateFormula(table, run, rate, pointing, put.withDetail), sheet: table.sheet },
+      actions,
+    ),
   );
 }
 

@@ -56,7 +56,7 @@ export function readingStep({ state, reading: answer }: Scene, actions: Actions)
     ...inputs(f, reading, answer, actions),
     ...drawing(f, table, run, answer),
     result(...inWords(f, table, run, answer)),
-    formulaLine(readingFormula(f, table, run, reading, pointing), actions),
+    formulaLine({ formula: readingFormula(f, table, run, reading, pointing), sheet: table.sheet }, actions),
     howItIsWorkedOut(f),
     f.caution !== undefined && h('p', { className: 'caution' }, f.caution),
   );

@@ -71,7 +71,7 @@ export function temperatureStep({ state, temperature: answer }: Scene, actions: 
       temperature.answer,
       (chosen) => void actions.changeTemperature({ answer: chosen as TemperatureAnswerKind }),
     ),
-    formulaLine(formula, actions),
+    formulaLine({ formula, sheet: table.sheet }, actions),
   );
 }
 

@@ -4,6 +4,7 @@
  */
 import { longestStart, startBench, type BenchPage, type PageBench } from './bench';
 import { accessSuite } from './suites/access';
+import { chosenSuite } from './suites/chosen';
 import { filesSuite } from './suites/files';
 import { handOverSuite } from './suites/handOver';
 import { helpSuite } from './suites/help';
@@ -26,6 +27,7 @@ afterAll(() => bench?.close());
 describe('the sheet', () => sheetSuite(() => sheet));
 describe('files', () => filesSuite(() => sheet));
 describe('the pane', () => paneSuite(() => sheet));
+describe('a chosen formula', () => chosenSuite(() => sheet));
 describe('whole jobs in the pane', () => journeysSuite(() => sheet));
 describe('handing over', () => handOverSuite(() => sheet));
 describe('tables of any kind', () =>

@@ -19,6 +19,7 @@ const reborn = (cell: CellValue | CrossedError): CellValue =>
 
 export async function portByPage(page: Page): Promise<WorkbookPort> {
   const listeners = new Set<() => void>();
+  let watchers = 0;
   await page.exposeFunction('selectionMoved', () => listeners.forEach((listener) => listener()));
   await page.evaluate(() =>
     window.flaskpace.port.onSelectionChange(
@@ -69,6 +70,17 @@ export async function portByPage(page: Page): Promise<WorkbookPort> {
     onSelectionChange(listener) {
       listeners.add(listener);
       return () => listeners.delete(listener);
+    },
+    onActiveCell(listener) {
+      const name = `activeCell${++watchers}`;
+      void page.exposeFunction(name, listener).then(() =>
+        page.evaluate((one) => {
+          window.flaskpace.port.onActiveCell((cell) =>
+            (window as unknown as Record<string, (cell: unknown) => void>)[one](cell),
+          );
+        }, name),
+      );
+      return () => undefined;
     },
     occupied: (area) => call('occupied', area),
     write: (cells, options) => call<WriteReceipt>('write', cells, options),

@@ -1,7 +1,10 @@
 /** @jest-environment jsdom */
 import { catalogue } from '../../functions/catalogue';
-import { formulaParts } from '../../taskpane/formulaParts';
-import { openPane, type PaneBench } from './paneBench';
+import { cellsRead, formulaParts } from '../../taskpane/formulaParts';
+import { parseArea } from '../../functions/address';
+import type { SheetArea } from '../../taskpane/port';
+import { memoryWorkbook } from './memoryPort';
+import { openPane, openPaneOver, type PaneBench, type PaneHands } from './paneBench';
 
 let pane: PaneBench | undefined;
 afterEach(() => pane?.close());
@@ -69,4 +72,78 @@ test('the parts are reached by arrows, say what they are, and keep saying it thr
   expect(says()).toMatch(/^times: /);
   await pane.tick('#kind-average');
   expect(says()).toBe('Point at a part to see what it is.');
+});
+
+test('cellsRead: each area once, in the order of the formula, on the sheet that is meant', () => {
+  const parts = formulaParts('=PACE.COEFFICIENT(A1:A3,Dye!B1:B3,PACE.ORDER($A$1:$A$3,Dye!B1:B3),C9,,TRUE)');
+  const column = { rows: 3, columns: 1 };
+  expect(cellsRead(parts, 'Run')).toEqual([
+    { name: 'times', area: { sheet: 'Run', row: 0, column: 0, ...column } },
+    { name: 'values', area: { sheet: 'Dye', row: 0, column: 1, ...column } },
+    { name: 'endpoint', area: { sheet: 'Run', row: 8, column: 2, rows: 1, columns: 1 } },
+  ]);
+});
+
+test.each([
+  '=PACE.TANGENT(A1:A9,',
+  '=pace.tangent(A1:A9,B1:B9',
+  '=PACE.TANGENT(PACE.CLOCK(A1:A9)',
+  '=PACE.EVENT(1,2,3,4,5)',
+])('formulaParts of %s, as it is typed, are what is typed', (typed) => {
+  const parts = formulaParts(typed);
+  expect(parts.map(({ text }) => text).join('')).toBe(typed);
+  expect(parts[1].says).toMatch(/^PACE\.(TANGENT|EVENT)\(/);
+});
+
+describe('a formula of ours in the active cell', () => {
+  const marked: (readonly SheetArea[])[] = [];
+  let hands: PaneHands;
+  const { port, select } = memoryWorkbook({
+    Run: [['t / s', 'V / mL'], ...[0, 10, 20, 30, 40].map((t) => [t, 2 * t])],
+  });
+  const put = (reference: string, formula: string): Promise<unknown> =>
+    port.write([{ area: { sheet: 'Run', ...parseArea(reference)! }, content: { formula } }], {
+      overwrite: true,
+      description: '',
+    });
+  const at = async (reference: string): Promise<void> => {
+    select(reference);
+    await hands.settled();
+  };
+  const words = (): string => hands.text('.chosen');
+
+  beforeAll(async () => {
+    await put('D2', '=PACE.TANGENT(A2:A6,B2:B6,20)');
+    await put('D3', '=SUM(B2:B6)');
+    hands = await openPaneOver({ ...port, mark: (areas) => marked.push(areas) });
+  });
+  afterAll(() => hands.close());
+
+  test('is explained, and what it reads is numbered here and in the sheet', async () => {
+    await at('D2');
+    expect(words()).toContain('In cell D2');
+    expect(hands.text('#formula-in-cell')).toBe('=PACE.TANGENT(A2:A6,B2:B6,20)');
+    const numbers = [...hands.root.querySelectorAll<HTMLElement>('#formula-in-cell .part')].map(
+      ({ dataset }) => dataset.number,
+    );
+    expect(numbers).toEqual([undefined, '1', '2', undefined]);
+    expect(marked.at(-1)).toEqual([
+      { sheet: 'Run', ...parseArea('A2:A6') },
+      { sheet: 'Run', ...parseArea('B2:B6') },
+    ]);
+  });
+
+  test('stays chosen while its cells are shown', async () => {
+    await hands.press('2 values');
+    expect((await port.selection())?.area).toEqual({ sheet: 'Run', ...parseArea('B2:B6') });
+    expect(words()).toContain('In cell D2');
+    expect(marked.at(-1)).toHaveLength(2);
+  });
+
+  test.each(['D3', 'A2'])('is gone where another stands, or none: %s', async (other) => {
+    await at('D2');
+    await at(other);
+    expect(words()).toBe('');
+    expect(marked.at(-1)).toEqual([]);
+  });
 });

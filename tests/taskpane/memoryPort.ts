@@ -125,6 +125,16 @@ export function memoryWorkbook(sheets: Sheets): MemoryWorkbook {
       listeners.add(listener);
       return () => listeners.delete(listener);
     },
+    onActiveCell(listener) {
+      const tell = (): void => {
+        const { sheet, row, column } = selected;
+        const formula = cells.get(key(sheet, row, column))?.formula ?? null;
+        listener({ at: { sheet, row, column, rows: 1, columns: 1 }, formula });
+      };
+      listeners.add(tell);
+      tell();
+      return () => listeners.delete(tell);
+    },
     async occupied(of) {
       requireSheet(of.sheet);
       return filled(of);

@@ -206,9 +206,24 @@ export function portContract(
       expect(receipt.area.sheet).toBe('Gas run');
     });
 
-    test('reveal moves to the cell', async () => {
+    test('reveal moves to the cell, and selects all that is named', async () => {
       await port.reveal(area('B4'));
       expect(await port.activeCell()).toEqual(area('B4'));
+      await port.reveal(area('A2:B4'));
+      expect((await port.selection())?.area).toEqual(area('A2:B4'));
+    });
+
+    test('onActiveCell tells the cell and its formula, at once and when it is another', async () => {
+      await port.write([formula('F2', '=1+1')], plain);
+      await bench.select("'Gas run'!F2");
+      const told: unknown[] = [];
+      const stop = port.onActiveCell((cell) => told.push(cell));
+      await until(() => told.length > 0);
+      expect(told.at(-1)).toEqual({ at: area('F2'), formula: '=1+1' });
+      await bench.select("'Gas run'!A2");
+      await until(() => (told.at(-1) as { formula: unknown }).formula === null);
+      expect(told.at(-1)).toEqual({ at: area('A2'), formula: null });
+      stop();
     });
   });
 }
@@ -225,6 +240,11 @@ export function portErrorCells(
     expect(cells[0][1]).toBeInstanceOf(CellError);
     await bench.dispose?.();
   });
+}
+
+/** Gives up after a while: the expectation that follows says what is there instead. */
+async function until(isTrue: () => boolean): Promise<void> {
+  for (let tries = 0; !isTrue() && tries < 200; tries++) await settled();
 }
 
 const settled = (): Promise<void> => new Promise((resolve) => setTimeout(resolve, 20));

@@ -44,12 +44,18 @@ export interface Grid {
   /** One step for the grid's own undo; resolves when all that follows from it is calculated. */
   set(cells: readonly CellToSet[]): Promise<void>;
   active(): GridPlace | null;
+  /** In the active cell, as far as it is typed, with its `=`; `null` where there is none. */
+  formula(): string | null;
   selected(): GridArea | null;
   select(area: GridArea): void;
+  /** Outlines and numbers these areas, in place of those before. */
+  mark(areas: readonly GridArea[]): void;
   /** Puts the keyboard into the grid. */
   focus(): void;
   setDark(isDark: boolean): void;
   onSelection(listener: () => void): Stop;
+  /** What is being typed into a cell is another. */
+  onTyping(listener: () => void): Stop;
   /** Something that a file would hold has changed by hand or by the pane, not by calculation. */
   onEdit(listener: () => void): Stop;
   /** Formulas have come to new values. */

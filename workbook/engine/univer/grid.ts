@@ -12,7 +12,7 @@ import { ILayoutService } from '@univerjs/ui';
 import { merge, Subject } from 'rxjs';
 import type { LongWork } from '../../../functions/longWork';
 import type { BookModel } from '../engine';
-import type { Grid, GridArea, Stop } from '../grid';
+import type { Grid, GridArea, GridPlace, Stop } from '../grid';
 import { nameControls } from './grid/accessibleNames';
 import {
   acceptSpillReferences,
@@ -23,8 +23,10 @@ import {
 import { bookOf, calculatedOf } from './grid/book';
 import { bootGrid } from './grid/boot';
 import { showFittingNumbers } from './grid/fittingNumbers';
+import { markAreas } from './grid/marks';
 import { screenData } from './grid/screenData';
 import { sheetsOf, type Sheets } from './grid/sheets';
+import { followTyping } from './grid/typing';
 import { writeCells } from './grid/write';
 import { forgetMessages } from './register';
 
@@ -77,6 +79,8 @@ export function createGrid(
   enterTakesNoSuggestion(injector);
   showFittingNumbers(injector);
   const stopNaming = nameControls(container);
+  const typing = followTyping(api);
+  const mark = markAreas(injector, () => api.getActiveWorkbook()?.getActiveSheet().refreshCanvas());
 
   const calculation = (): Promise<void> =>
     session.waitForLatestApplied(longestWait).catch(() => undefined) as Promise<void>;
@@ -110,6 +114,19 @@ export function createGrid(
     };
   }
 
+  function active(): GridPlace | null {
+    const primary = selections.getCurrentLastSelection()?.primary;
+    const sheet = sheets.workbook.getActiveSheet();
+    if (!primary) return null;
+    return { sheet: sheet.getName(), row: primary.actualRow, column: primary.actualColumn };
+  }
+
+  function formula(): string | null {
+    const place = active();
+    const text = typing.text ?? (place && sheets.typed(place).formula) ?? '';
+    return text.startsWith('=') ? text : null;
+  }
+
   return {
     open,
     async settled() {
@@ -132,12 +149,8 @@ export function createGrid(
       await writeCells(sheets, injector, cells);
       await calculation();
     },
-    active() {
-      const primary = selections.getCurrentLastSelection()?.primary;
-      const sheet = sheets.workbook.getActiveSheet();
-      if (!primary) return null;
-      return { sheet: sheet.getName(), row: primary.actualRow, column: primary.actualColumn };
-    },
+    active,
+    formula,
     selected,
     select({ sheet: name, row, column, rows, columns }) {
       const book = api.getActiveWorkbook();
@@ -155,10 +168,12 @@ export function createGrid(
       // a cell at the very edge is half hidden
       if (!isSeen) sheet.scrollToCell(Math.max(0, row - 3), Math.max(0, column - 2));
     },
+    mark,
     focus: () => injector.get(ILayoutService).focus(),
     setDark: (dark) => api.toggleDarkMode(dark),
     onSelection: (listener) =>
       stopOf(merge(selections.selectionChanged$, reopened).subscribe(() => isOpening || listener())),
+    onTyping: (listener) => stopOf(typing.changes.subscribe(() => isOpening || listener())),
     onEdit: (listener) =>
       stopOf(
         commands.onCommandExecuted(({ id, params }, options) => {

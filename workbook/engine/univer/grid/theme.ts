@@ -1,5 +1,10 @@
 /** The grid in the colours of the pane. */
+import { markColour } from '../../../../taskpane/markColours';
 import { defaultTheme } from '@univerjs/themes';
+
+const markColours = Object.fromEntries(
+  Object.keys(defaultTheme['loop-color']).map((name, place) => [name, markColour(place)]),
+);
 
 /** From the pale tint of a selected row to the ink of the pane's buttons. */
 export const gridTheme: typeof defaultTheme = {
@@ -16,4 +21,6 @@ export const gridTheme: typeof defaultTheme = {
     800: '#0e3a41',
     900: '#10262a',
   },
+  /** What a formula reads while it is edited. */
+  'loop-color': { ...defaultTheme['loop-color'], ...markColours },
 };
