@@ -4,6 +4,7 @@ import { CellError } from '../../functions/cell';
 import type { CalculatedBook } from '../engine/engine';
 import { calculate } from '../engine/univer/headless';
 import { dropCalcChain } from '../xlsx/calcChain';
+import { dropUnusedLinks } from '../xlsx/externalLinks';
 import { findParts, readXml } from '../xlsx/parts';
 import { patchPackage } from '../xlsx/patch';
 import { readWorkbook } from '../xlsx/read';
@@ -17,7 +18,7 @@ import { isOfTheDay, methodSheet, noteText, type Origin } from './methodSheet';
 import { freezeNames, frozenNames, type FrozenName } from './names';
 import { addNotes } from './notes';
 import { rewriteSheet, type RewrittenCell } from './rewriteSheet';
-import { dropLinks, dropPane, ownLinks } from './ownReferences';
+import { dropPane, ownLinks } from './ownReferences';
 import { respelled } from './respelled';
 import { addSheet } from './sheetPart';
 import { dropColumnFormulas } from './tableColumns';
@@ -75,7 +76,7 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
   freezeNames(pack, parts.workbook, names);
   dropColumnFormulas(pack, parts);
   dropCalcChain(pack, parts);
-  dropLinks(pack, parts, links);
+  dropUnusedLinks(pack, parts.workbook, links);
   return { bytes: pack.bytes(), ...told, errors: calculated.errors };
 }
 

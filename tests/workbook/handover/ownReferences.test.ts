@@ -1,9 +1,9 @@
-/** Nothing of the add-in is left in a copy: not the link that its functions were called through, nor its pane. */
+/** Nothing of the add-in is left in a copy: its pane does not open there. */
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { handOver } from '../../../workbook/handover/handOver';
 import { addInId } from '../../../workbook/handover/ownReferences';
-import { packageOf, partsOf, rowsOf, textOf, worksheet, type PackageOptions } from '../xlsx/package';
+import { packageOf, partsOf, textOf, worksheet, type PackageOptions } from '../xlsx/package';
 
 const relationships = 'http://schemas.openxmlformats.org/package/2006/relationships';
 const office = 'http://schemas.openxmlformats.org/officeDocument/2006/relationships';
@@ -13,57 +13,6 @@ const copyOf = async (options: PackageOptions): Promise<Uint8Array> =>
 test('the number is the one in the manifest', () => {
   const manifest = readFileSync(join(__dirname, '..', '..', '..', 'manifest.xml'), 'utf8');
   expect(/<Id>([^<]+)<\/Id>/.exec(manifest)![1]).toBe(addInId);
-});
-
-describe('links', () => {
-  const relation = (target: string): string =>
-    `<Relationships xmlns="${relationships}"><Relationship Id="rId1" Type="${office}/externalLinkPath" Target="${target}" TargetMode="External"/></Relationships>`;
-  const link =
-    '<externalLink xmlns="http://schemas.openxmlformats.org/spreadsheetml/2006/main"><externalBook xmlns:r="http://schemas.openxmlformats.org/officeDocument/2006/relationships" r:id="rId1"/></externalLink>';
-  const part = (number: number): string => `xl/externalLinks/externalLink${number}.xml`;
-
-  /** One link a target, in this order. */
-  const linked = (formula: string, targets: readonly string[]): PackageOptions => ({
-    sheets: {
-      Run: worksheet(
-        `<row r="1"><c r="A1"><v>40</v></c><c r="B1"><f>[1]!_xldudf_PACE_EVENT(A1)</f></c><c r="C1"><f>${formula}</f><v>7</v></c></row>`,
-      ),
-    },
-    parts: Object.fromEntries(
-      targets.flatMap((target, n) => [
-        [part(n + 1), link],
-        [`xl/externalLinks/_rels/externalLink${n + 1}.xml.rels`, relation(target)],
-      ]),
-    ),
-    described: targets.map((_, n) => ({
-      path: part(n + 1),
-      type: 'application/vnd.openxmlformats-officedocument.spreadsheetml.externalLink+xml',
-      kind: 'externalLink',
-    })),
-    names: `<externalReferences>${targets.map((_, n) => `<externalReference r:id="rId${n + 50}"/>`).join('')}</externalReferences>`,
-  });
-
-  test('one that our functions alone were called through goes, with all that led to it', async () => {
-    const copy = await copyOf(linked('A1*2', ['pace.xlam']));
-    expect(Object.keys(partsOf(copy)).filter((path) => path.includes('externalLink'))).toEqual([]);
-    expect(textOf(copy, 'xl/workbook.xml')).not.toContain('externalReference');
-    expect(textOf(copy, 'xl/_rels/workbook.xml.rels')).not.toContain('externalLink');
-    expect(textOf(copy, '[Content_Types].xml')).not.toContain('externalLink');
-  });
-
-  test.each([
-    ['another formula uses it', '[1]Sheet1!A1', ['data.xlsx']],
-    ['others follow, which would lose their numbers', '[2]Sheet1!A1', ['pace.xlam', 'data.xlsx']],
-  ])('it stays where %s', async (_, formula, targets) => {
-    const options = linked(formula, targets);
-    const [before, copy] = [partsOf(packageOf(options)), partsOf(await copyOf(options))];
-    for (const path of Object.keys(before).filter((name) => name.includes('externalLink')))
-      expect(Buffer.from(copy[path]).equals(Buffer.from(before[path]))).toBe(true);
-    expect(rowsOf(await copyOf(options))).toContain(`<f>${formula}</f>`);
-    expect(textOf(await copyOf(options), 'xl/workbook.xml').match(/<externalReference /g)).toHaveLength(
-      targets.length,
-    );
-  });
 });
 
 describe('panes', () => {
