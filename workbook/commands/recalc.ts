@@ -16,10 +16,11 @@ Exit code  0  done
 `;
 
 void runFileCommand(process.argv.slice(2), usage, async (input) => {
-  const { bytes, formulas, errors } = await recalculate(input);
+  const { bytes, formulas, kept, errors } = await recalculate(input);
+  const others = `${counted(kept, 'formula reaches', 'formulas reach')} another workbook or add-in and keep${kept === 1 ? 's its value' : ' their values'}`;
   return {
     bytes,
-    summary: `${counted(formulas, 'formula', 'formulas')} calculated`,
+    summary: `${counted(formulas, 'formula', 'formulas')} calculated${kept > 0 ? `; ${others}` : ''}`,
     errors: errorLines(errors),
   };
 }).then((code) => {

@@ -7,6 +7,8 @@ import { readWorkbook } from '../xlsx/read';
 export interface Recalculated {
   readonly bytes: Uint8Array;
   readonly formulas: number;
+  /** Formulas that reach another workbook or add-in and keep what the file last showed. */
+  readonly kept: number;
   /** Cells that show an error as a result, in reading order. */
   readonly errors: CalculatedBook['errors'];
 }
@@ -15,12 +17,11 @@ export interface Recalculated {
 export async function recalculate(bytes: Uint8Array): Promise<Recalculated> {
   const book = readWorkbook(bytes);
   const calculated = await calculate(book);
+  const cells = book.sheets.flatMap((sheet) => sheet.cells);
   return {
     bytes: patchWorkbook(bytes, book, calculated),
-    formulas: book.sheets.reduce(
-      (sum, { cells }) => sum + cells.filter(({ formula }) => formula !== undefined).length,
-      0,
-    ),
+    formulas: cells.filter(({ formula }) => formula !== undefined).length,
+    kept: cells.filter(({ outsideFormula }) => outsideFormula !== undefined).length,
     errors: calculated.errors,
   };
 }

@@ -33,6 +33,8 @@ export interface CellModel {
   readonly value: CellValue;
   /** As typed, without `=`: `PACE.TANGENT(A2:A9,B2:B9,30)`. */
   readonly formula?: string;
+  /** One that reaches another workbook or add-in, neither of which is at hand: the value is what the file last showed. */
+  readonly outsideFormula?: string;
   readonly numberFormat?: string;
   readonly bold?: boolean;
   readonly wrap?: boolean;

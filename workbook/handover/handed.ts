@@ -38,13 +38,29 @@ export function handFormulas(
   workings: WorkingsSheet,
 ): HandedFormula[] {
   return world.book.sheets.flatMap(({ name: sheet, cells }) =>
-    cells.flatMap(({ row, column, formula }) =>
-      formula !== undefined && callsOurs(formula)
-        ? [handFormula(formula, { sheet, row, column }, { sheet, world, workings }, calculated, merged)]
-        : [],
-    ),
+    cells.flatMap(({ row, column, value, formula, outsideFormula }) => {
+      const position = { sheet, row, column };
+      if (formula !== undefined && callsOurs(formula))
+        return [handFormula(formula, position, { sheet, world, workings }, calculated, merged)];
+      return outsideFormula !== undefined && callsOurs(outsideFormula)
+        ? [handOutside(outsideFormula, position, value)]
+        : [];
+    }),
   );
 }
+
+const functionsIn = (formula: string): CellFunction[] => [
+  ...new Set(allCalls(callsIn(formula)).map(({ f }) => f)),
+];
+
+const handOutside = (original: string, position: Position, value: CellValue): HandedFormula => ({
+  ...position,
+  original,
+  functions: functionsIn(original),
+  area: { row: position.row, column: position.column, rows: 1, columns: 1 },
+  values: [[value]],
+  why: 'it reaches another workbook or add-in',
+});
 
 function handFormula(
   original: string,
@@ -61,7 +77,7 @@ function handFormula(
   const common = {
     ...position,
     original,
-    functions: [...new Set(allCalls(callsIn(original)).map(({ f }) => f))],
+    functions: functionsIn(original),
     area,
     values: each((r, c) => calculated.shown(sheet, row + r, column + c)),
   };

@@ -14,6 +14,7 @@ import {
   vacuumPermittivity,
 } from '../../src/constants';
 import { elsewherePlace } from './elsewhere';
+import { namesReachingOutside, reachesOutside } from '../xlsx/outside';
 import type { HandedFormula } from './handed';
 import type { HandedOver } from './handOver';
 import type { NewSheet, SheetCell } from './sheetPart';
@@ -135,6 +136,7 @@ function formulaRow(formula: HandedFormula, row: number, world: World): SheetCel
 /** Whether the inputs are still those of the day, in words: a sum over them then, and the same now. */
 function watch(formula: HandedFormula, row: number, world: World): SheetCell[] {
   const { sheet, original, ofTheDay } = formula;
+  if (reachesOutside(original, namesReachingOutside(world.book.names))) return [unwatched, null, null];
   const inputs = ofTheDay?.from ?? world.areasIn(world.spelledOut(original, formula), sheet);
   if (inputs.length === 0) return ['no inputs in cells', null, null];
   const print = fingerprintOf(inputs, sheet, world);

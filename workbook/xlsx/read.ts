@@ -1,5 +1,6 @@
 /** A file's bytes → the workbook: what was typed into its cells. Values of formulas are what the file last showed. */
 import type { BookModel, DefinedName } from '../engine/engine';
+import { namesReachingOutside } from './outside';
 import { typedFormula } from './formulaText';
 import { NotAWorkbook } from './notAWorkbook';
 import { elementsIn, findParts, readXml } from './parts';
@@ -15,7 +16,9 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
   refuseOtherKinds(bytes);
   const pack = Package.open(bytes);
   const parts = findParts(pack);
+  const names = definedNames(pack, parts.workbook);
   const context = {
+    outsideNames: namesReachingOutside(names),
     sharedStrings: readSharedStrings(pack, parts.sharedStrings),
     looks: readLooks(pack, parts.styles),
   };
@@ -25,7 +28,7 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
       name,
       ...readSheet(readXml(pack, path), path, context),
     })),
-    names: definedNames(pack, parts.workbook),
+    names,
     ...(tables.length > 0 ? { tables } : {}),
   };
 }

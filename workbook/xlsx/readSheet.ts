@@ -3,6 +3,7 @@ import { columnIndex, parseArea, type Area } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
 import type { CellModel, SheetModel } from '../engine/engine';
 import { filedErrors, filedValue } from './cellXml';
+import { reachesOutside } from './outside';
 import { callsOurs, typedFormula } from './formulaText';
 import { withIntersections } from './intersection';
 import { SharedFormulas } from './sharedFormulas';
@@ -10,6 +11,8 @@ import { childOf, scanSheet, type ScannedCell, type ScannedChild, type ScannedWi
 import type { CellLook } from './styles';
 
 export interface SheetContext {
+  /** Names, in capitals, that lead out of the workbook. */
+  readonly outsideNames: ReadonlySet<string>;
   readonly sharedStrings: readonly string[];
   readonly looks: readonly CellLook[];
 }
@@ -26,10 +29,11 @@ export function readSheet(
   const { widths } = scanSheet(xml, part, (scanned) => {
     const own = childOf(scanned, 'f');
     const formula = own === undefined ? '' : formulaOf(scanned, own, shared);
-    if (own?.attributes.t === 'array') spills.add(own.attributes.ref);
+    const isOutside = reachesOutside(formula, context.outsideNames);
+    if (own?.attributes.t === 'array' && !isOutside) spills.add(own.attributes.ref);
     // nobody typed what another cell's formula spilled
     if (formula !== '' || !spills.cover(scanned)) {
-      const cell = cellModel(scanned, formula, context);
+      const cell = cellModel(scanned, formula, isOutside, context);
       if (cell) cells.push(cell);
     }
     return false;
@@ -49,6 +53,7 @@ function formulaOf(cell: ScannedCell, own: ScannedChild, shared: SharedFormulas)
 function cellModel(
   scanned: ScannedCell,
   formula: string,
+  isOutside: boolean,
   { sharedStrings, looks }: SheetContext,
 ): CellModel | undefined {
   const { row, column, attributes } = scanned;
@@ -59,7 +64,7 @@ function cellModel(
     row,
     column,
     value,
-    ...(formula === '' ? {} : { formula }),
+    ...(formula === '' ? {} : isOutside && value !== null ? { outsideFormula: formula } : { formula }),
     ...(numberFormat === undefined ? {} : { numberFormat }),
     ...(bold ? { bold } : {}),
     ...(wrap ? { wrap } : {}),
