@@ -11,8 +11,17 @@ export interface Column {
   readonly errors: ReadonlyMap<number, CellError>;
 }
 
+/** Many formulas of a sheet are given the same cells. */
+const known = new WeakMap<CellRange, Column>();
+
 /** @throws InvalidInput for a number written as text that could mean two things */
 export function readColumn(cells: CellRange): Column {
+  const column = known.get(cells) ?? columnOf(cells);
+  known.set(cells, column);
+  return column;
+}
+
+function columnOf(cells: CellRange): Column {
   const flat = cells.flat();
   const shape = { rows: cells.length, columns: cells[0]?.length ?? 0 };
   const errors = new Map<number, CellError>();

@@ -8,7 +8,7 @@ import { callsOurs } from '../xlsx/formulaText';
 import { isArrayFormula } from './arrayFormula';
 import { allCalls, callsIn } from './calls';
 import { sayFormula, type Scene } from './say';
-import { watchFits } from './fits';
+import { FitWatch } from './fits';
 import type { WorkingsSheet } from './workings';
 import type { Position, World } from './world';
 
@@ -37,11 +37,12 @@ export function handFormulas(
   merged: (position: Position) => boolean,
   workings: WorkingsSheet,
 ): HandedFormula[] {
+  const book = { calculated, merged, watch: new FitWatch() };
   return world.book.sheets.flatMap(({ name: sheet, cells }) =>
     cells.flatMap(({ row, column, value, formula, outsideFormula }) => {
       const position = { sheet, row, column };
       if (formula !== undefined && callsOurs(formula))
-        return [handFormula(formula, position, { sheet, world, workings }, calculated, merged)];
+        return [handFormula(formula, position, { sheet, world, workings }, book)];
       return outsideFormula !== undefined && callsOurs(outsideFormula)
         ? [handOutside(outsideFormula, position, value)]
         : [];
@@ -62,12 +63,18 @@ const handOutside = (original: string, position: Position, value: CellValue): Ha
   why: 'it reaches another workbook or add-in',
 });
 
+/** What is the same for all formulas of a book. */
+interface Book {
+  readonly calculated: CalculatedBook;
+  readonly merged: (position: Position) => boolean;
+  readonly watch: FitWatch;
+}
+
 function handFormula(
   original: string,
   position: Position,
   scene: Scene,
-  calculated: CalculatedBook,
-  merged: (position: Position) => boolean,
+  { calculated, merged, watch }: Book,
 ): HandedFormula {
   const { sheet, row, column } = position;
   const { world, workings } = scene;
@@ -93,7 +100,7 @@ function handFormula(
     });
   } catch (error) {
     if (!(error instanceof NotSaid)) throw error;
-    const fits = watchFits(original, position, scene);
+    const fits = watch.placesOf(original, position, scene);
     return { ...common, why: error.message, ...(fits.length > 0 ? { fits } : {}) };
   }
 }

@@ -136,9 +136,14 @@ function wholeOf(said: Said, { f }: Call): string {
 function checked(text: string): string {
   if (text.length >= longest)
     throw new NotSaid(`it would take ${text.length} characters, and a cell holds ${longest - 1}`);
-  const young = tokensOf(text).find(
-    (token) => isFunction(token) && filedModernName(token.value) !== undefined,
-  );
-  if (young) throw new NotSaid(`${young.value} is unknown to older programs`);
+  const young = youngNames(text).find((name) => isCalled(name, text));
+  if (young) throw new NotSaid(`${young} is unknown to older programs`);
   return text;
 }
+
+/** What looks like one: few texts have any, and only those need be taken apart. */
+const youngNames = (text: string): string[] =>
+  (text.match(/[A-Z][A-Z.\d]*(?=\()/gi) ?? []).filter((name) => filedModernName(name) !== undefined);
+
+const isCalled = (name: string, text: string): boolean =>
+  tokensOf(text).some((token) => isFunction(token) && token.value === name);

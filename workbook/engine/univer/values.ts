@@ -25,10 +25,20 @@ import {
 export function argumentFrom(value: BaseValueObject): CellResult | undefined {
   if (!value.isArray()) return value.isNull() ? undefined : cellFrom(value);
   const array = value as ArrayValueObject;
-  return Array.from({ length: array.getRowCount() }, (_, row) =>
-    Array.from({ length: array.getColumnCount() }, (_, column) => cellFrom(array.get(row, column))),
-  );
+  const before = read.get(array);
+  if (before) return before;
+  const cells = cellsFrom(array);
+  read.set(array, cells);
+  return cells;
 }
+
+/** The engine reads a range once a round, however many formulas are given it. */
+const read = new WeakMap<ArrayValueObject, CellRange>();
+
+const cellsFrom = (array: ArrayValueObject): CellRange =>
+  Array.from({ length: array.getRowCount() }, (_, row) =>
+    Array.from({ length: array.getColumnCount() }, (__, column) => cellFrom(array.get(row, column))),
+  );
 
 function cellFrom(value: Nullable<BaseValueObject>): CellValue {
   if (!value || value.isNull()) return null;
