@@ -4,6 +4,7 @@ import type { BookModel, CalculatedBook, CellModel, SheetModel } from '../engine
 import { calculate } from '../engine/univer/headless';
 import { alike } from './alike';
 import { frozen, type HandedFormula } from './handed';
+import { settled } from './settled';
 import type { NewSheet } from './sheetPart';
 import type { WorkingsSheet } from './workings';
 import type { World } from './world';
@@ -30,7 +31,7 @@ export async function checked(
   world: World,
   workings: WorkingsSheet,
 ): Promise<Checked> {
-  const book = settled(world);
+  const book = settled(world, formulas);
   const worked = workings.isEmpty ? undefined : await calculate(withSheet(book, workings.model()));
   const whole = worked ? withSheet(book, workings.values(worked)) : book;
   const groups = alike(
@@ -77,20 +78,6 @@ function isJudged(values: HandedFormula['values'], row: number, column: number):
   return isChosen(row * values[0].length + column, values.length * values[0].length);
 }
 
-/** The book with every formula replaced by what it shows: each of ours is then judged by itself. */
-function settled(world: World): BookModel {
-  const { book } = world;
-  return {
-    ...book,
-    sheets: book.sheets.map((sheet) => ({
-      ...sheet,
-      cells: sheet.cells.flatMap((cell) =>
-        cell.formula === undefined ? [cell] : resultOf(cell, sheet, world),
-      ),
-    })),
-  };
-}
-
 const withSheet = (book: BookModel, sheet: SheetModel): BookModel => ({
   ...book,
   sheets: [...book.sheets, sheet],
@@ -106,13 +93,6 @@ const withFormulasAside = (formulas: readonly HandedFormula[], book: BookModel):
     ],
   })),
 });
-
-function resultOf({ row, column }: CellModel, sheet: SheetModel, world: World): CellModel[] {
-  const area = world.spillAt({ sheet: sheet.name, row, column });
-  return world
-    .cellsIn(area, sheet.name)
-    .flatMap((line, r) => line.map((value, c) => ({ row: row + r, column: column + c, value })));
-}
 
 const cellsAside = ({ row, column, said, values }: HandedFormula): CellModel[] =>
   (said ?? []).flatMap((line, r) =>

@@ -1,7 +1,7 @@
 /** What a formula can see of its workbook on the day of the copy: values, names, tables and how far results spilled. */
 import { areaName, parseArea, type Area } from '../../functions/address';
 import type { CellRange } from '../../functions/cell';
-import { isOperator, isRange, isReference } from '@borgar/fx/xlsx';
+import { isFunction, isOperator, isRange, isReference, type Token } from '@borgar/fx/xlsx';
 import type { BookModel, CalculatedBook } from '../engine/engine';
 import { plainReferences } from '../engine/tables';
 import { applyEdits, type Edit } from '../xlsx/edits';
@@ -14,6 +14,10 @@ export interface Position {
   readonly row: number;
   readonly column: number;
 }
+
+/** It reads what stands in no reference. */
+const wanders = (token: Token): boolean =>
+  isFunction(token) ? /^(?:OFFSET|INDIRECT)$/i.test(token.value) : isOperator(token) && token.value === ':';
 
 export class World {
   private readonly cells = new Map<string, CellRange>();
@@ -74,12 +78,24 @@ export class World {
     return name === undefined ? undefined : parseArea(name);
   }
 
-  /** Every area that a formula reads. */
+  /** Every area that a formula names. */
   areasIn(formula: string, sheet: string): Area[] {
-    const areas = tokensOf(formula)
-      .filter((token) => isReference(token))
-      .flatMap(({ value }) => this.areaOf(value, sheet) ?? this.lineOf(value, sheet) ?? []);
+    const areas = this.referencesIn(formula, sheet).flatMap((area) => area ?? []);
     return [...new Map(areas.map((area) => [areaName(area), area])).values()];
+  }
+
+  /** Every area that a formula as it is typed can read; `undefined` where only working it out would tell. */
+  reads(formula: string, position: Position): Area[] | undefined {
+    const text = this.spelledOut(formula, position);
+    const areas = this.referencesIn(text, position.sheet);
+    const isTold = (area: Area | undefined): area is Area => area !== undefined;
+    return areas.every(isTold) && !tokensOf(text).some(wanders) ? areas : undefined;
+  }
+
+  private referencesIn(text: string, sheet: string): (Area | undefined)[] {
+    return tokensOf(text)
+      .filter((token) => isReference(token))
+      .map(({ value }) => this.areaOf(value, sheet) ?? this.lineOf(value, sheet));
   }
 
   /** Formulas of one column mostly read the same cells: looked up once. */
