@@ -10,7 +10,6 @@ import type { WorkingCell } from './workings';
 /** Σ[(cᵢ + cᵢ₋₁)/2]ᵝ(tᵢ − tᵢ₋₁) up to each reading. */
 export function sayNormalTime(given: Given): Said {
   const run = new SortedRun(given);
-  const { pairs } = run;
   const [exponent, b] = [given.number('exponent'), given.numberFromWorkings('exponent')];
   const title = `Normalised time with the exponent ${b}: ${run.name}`;
   const table = given.workings.table(title, (own) => [
@@ -28,7 +27,7 @@ export function sayNormalTime(given: Given): Said {
   ]);
   const least = `MIN(${run.values})`;
   const allowed = `OR(AND(${exponent.text}>=0,${exponent.text}=INT(${exponent.text})),${least}>0,AND(${exponent.text}>0,${least}>=0))`;
-  const holds = [...pairs.holds, ...holdsOf(exponent), allowed, `MAX(${run.times})>MIN(${run.times})`];
+  const holds = [...run.holds, ...holdsOf(exponent), allowed, `MAX(${run.times})>MIN(${run.times})`];
   const [times, values] = [given.readings('times'), given.readings('values')];
   return {
     cell(row, column) {
@@ -45,13 +44,13 @@ export function sayHalvings(given: Given): Said {
   const run = new SortedRun(given);
   const means = new Means(given, run);
   const [times, values] = means.columns;
-  const { pairs, numbers, size } = run;
+  const { numbers, size } = run;
   if (size < 2) throw new NotSaid('fewer than two readings');
   const end = given.has('endpoint') ? given.number('endpoint') : undefined;
   const from = end?.text ?? '0';
   const first = `(${means.mean(0)}-${from})`;
   const holds = [
-    ...pairs.holds,
+    ...run.holds,
     ...holdsOf(...(end ? [end] : [])),
     `MAX(${run.times})>MIN(${run.times})`,
     // a rising column needs its end

@@ -4,6 +4,7 @@
  */
 import type { Given } from './given';
 import { sure, type Phrase } from './phrase';
+import type { Readings } from './readings';
 import { NotSaid } from './said';
 
 export class Pairs {
@@ -12,18 +13,21 @@ export class Pairs {
   readonly count: string;
   /** How many pairs there is room for. */
   readonly size: number;
-  private readonly separator: ',' | ';';
+  readonly x: string;
+  readonly y: string;
+  /** They lie beside each other, not one below the other. */
+  readonly isRow: boolean;
 
   private constructor(
-    readonly x: string,
-    readonly y: string,
-    readonly rows: number,
-    readonly columns: number,
+    private readonly first: Readings,
+    private readonly second: Readings,
   ) {
-    this.both = `ISNUMBER(${x})*ISNUMBER(${y})`;
+    this.x = first.whole;
+    this.y = second.whole;
+    this.both = `ISNUMBER(${this.x})*ISNUMBER(${this.y})`;
     this.count = `SUM(${this.both})`;
-    this.size = rows * columns;
-    this.separator = columns > 1 ? ';' : ',';
+    this.size = first.rows * first.columns;
+    this.isRow = first.columns > 1;
   }
 
   /** @throws NotSaid where the columns do not lie alike, or hold what a formula cannot judge */
@@ -35,7 +39,7 @@ export class Pairs {
     if (first.rows > 1 && first.columns > 1) throw new NotSaid(`${x} is a block`);
     if (first.rows * first.columns > mostPairs)
       throw new NotSaid(`a column of more than ${mostPairs} pairs would make it slow`);
-    return new Pairs(first.whole, second.whole, first.rows, first.columns);
+    return new Pairs(first, second);
   }
 
   /** An error among the readings is the answer itself. */
@@ -43,10 +47,22 @@ export class Pairs {
     return [`SUM(ISERROR(${this.x})+ISERROR(${this.y}))=0`];
   }
 
+  /** One of them, counted from 0: its x, and whether it is without a gap. */
+  element(n: number): { readonly x: string; readonly isPair: string } {
+    const place: [number, number] = this.isRow ? [0, n] : [n, 0];
+    const [x, y] = [this.first, this.second].map((one) => one.element(...place));
+    return { x, isPair: `ISNUMBER(${x})*ISNUMBER(${y})` };
+  }
+
   /** 1, 2, 3 … beside the pairs, where they stand in cells. */
   get places(): string {
     const first = this.x.replace(/:.*/, '');
-    return this.columns > 1 ? `COLUMN(${this.x})-COLUMN(${first})+1` : `ROW(${this.x})-ROW(${first})+1`;
+    return this.isRow ? `COLUMN(${this.x})-COLUMN(${first})+1` : `ROW(${this.x})-ROW(${first})+1`;
+  }
+
+  /** Of a column that lies as they do: what stands at one of these places. */
+  standingAt(column: string, place: string): string {
+    return `INDEX(${column},${this.isRow ? '1,' : ''}${place})`;
   }
 
   /** Of each pair what the text says, and nothing of one with a gap: for MIN, MAX, SMALL and the like. */
@@ -81,7 +97,7 @@ export class Pairs {
   /** Least squares of y against terms of x, of which the first is a constant: a row of coefficients, last term first. */
   fit({ y, terms, weight }: Fit): string {
     const unit = (n: number): string =>
-      `{${terms.map((_, place) => (place === n ? 1 : 0)).join(this.separator)}}`;
+      `{${terms.map((_, place) => (place === n ? 1 : 0)).join(this.isRow ? ';' : ',')}}`;
     const columns = terms.map((term, n) => (term === '1' ? unit(n) : `${term}*${unit(n)}`)).join('+');
     return `LINEST(${weight}*${y},${weight}*(${columns}),FALSE,TRUE)`;
   }

@@ -1,62 +1,59 @@
-/** Polynomials through the readings nearest to a time, in formulas of the sheet "Workings". */
-import { nearerBy } from '../../src/rate/localPolynomial';
-import type { SortedRun } from './sortedRun';
+/** A polynomial through some readings, by powers of their distance from one time, in formulas. */
+
+/** Places in the statistics that LINEST gives, counted from 1. */
+const [values, uncertainties, sums] = [1, 2, 5];
+const residualSum = 2;
 
 export class PolynomialAt {
-  /** Readings before the window. */
-  readonly first: string;
-  private readonly times: string;
-  readonly readings: string;
-  private readonly numbers: string;
+  private readonly distances: string;
 
-  /** @param firstCell where `first` is worked out */
+  /** @param times and `readings`: ranges of one length */
   constructor(
-    run: SortedRun,
-    points: string,
-    firstCell: string,
+    private readonly times: string,
+    private readonly readings: string,
     at: string,
     private readonly degree: number,
   ) {
-    const { times, values, count } = run;
-    const [ahead, behind] = [
-      `INDEX(${times},${points}+1):INDEX(${times},${count})-${at}`,
-      `${at}-INDEX(${times},1):INDEX(${times},${count}-${points})`,
-    ];
-    this.first = `IF(${count}>${points},SUM(IF(${ahead}<${nearerBy}*(${behind}),1,0)),0)`;
-    const window = (of: string): string => `INDEX(${of},${firstCell}+1):INDEX(${of},${firstCell}+${points})`;
-    this.times = `(${window(times)}-${at})`;
-    this.readings = window(values);
-    this.numbers = window(run.numbers);
+    this.distances = `(${times}-${at})`;
   }
 
-  /** 1 for one reading of the window, by its number, and 0 for all others. */
-  only(number: string): string {
-    return `IF(${this.numbers}=${number},1,0)`;
+  /** At that time, as all that follow. */
+  get height(): string {
+    return `INDEX(${this.fit()},${values},${this.degree + 1})`;
   }
 
-  finerHeight(readings: string): string {
-    return `INDEX(${this.fit(readings, this.degree + 1)},1,${this.degree + 2})`;
+  get slope(): string {
+    return `INDEX(${this.fit()},${values},${this.degree})`;
   }
 
-  /** Slope, slope of one degree more, and the variance of that in units of the readings' own. */
-  get slopes(): string[] {
-    const { degree, readings } = this;
-    return [
-      `INDEX(${this.fit(readings, degree)},1,${degree})`,
-      `INDEX(${this.fit(readings, degree + 1)},1,${degree + 1})`,
-      `1/INDEX(${this.timesByHigherPowers},5,2)`,
-    ];
+  get slopeUncertainty(): string {
+    return `INDEX(${this.fit('TRUE,TRUE')},${uncertainties},${this.degree})`;
   }
 
-  /** What the other powers leave of the times: its sum of squares is the slope's information (Frisch and Waugh 1933). */
-  private get timesByHigherPowers(): string {
-    const powers = Array.from({ length: this.degree }, (_, n) => n + 2).join(',');
-    return `LINEST(${this.times},${this.times}^{${powers}},TRUE,TRUE)`;
+  /** In units of the readings' own variance. */
+  get heightVariance(): string {
+    return `1/${leftOver(`ISNUMBER(${this.times})*1`, this.powers(1), 'FALSE')}`;
   }
 
-  /** Coefficients with their statistics, the highest power first. */
-  private fit(readings: string, degree: number): string {
-    const powers = Array.from({ length: degree }, (_, n) => n + 1).join(',');
-    return `LINEST(${readings},${this.times}^{${powers}},TRUE,TRUE)`;
+  /** In units of the readings' own variance; of degree 2 or more. */
+  get slopeVariance(): string {
+    return `1/${leftOver(this.distances, this.powers(2), 'TRUE')}`;
+  }
+
+  /** Coefficients, the highest power first; with `statistics`, the rows below them too. */
+  private fit(statistics?: string): string {
+    return `LINEST(${this.readings},${this.powers(1)}${statistics === undefined ? '' : `,${statistics}`})`;
+  }
+
+  private powers(from: number): string {
+    const list = Array.from({ length: this.degree + 1 - from }, (_, n) => n + from);
+    return `${this.distances}^{${list.join()}}`;
   }
 }
+
+/**
+ * What others leave of a term: its sum of squares is what the readings tell of the term's coefficient
+ * (R. Frisch and F. V. Waugh, Econometrica 1 (1933) 387).
+ */
+const leftOver = (term: string, others: string, constant: 'TRUE' | 'FALSE'): string =>
+  `INDEX(LINEST(${term},${others},${constant},TRUE),${sums},${residualSum})`;

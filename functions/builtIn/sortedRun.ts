@@ -4,79 +4,116 @@ import { Pairs } from './pairs';
 import type { Phrase } from './phrase';
 import type { Table, WorkingCell } from './workings';
 
-/** Of the table: below how many there are, which way they go, and the headings. */
-const firstRow = 3;
+/** Rows of the table. */
+const [readings, way, misplaced, headings, firstRow] = [0, 1, 2, 3, 4];
+/** And its columns. */
+const [number, asItStands, inOrder, place, reading] = [0, 1, 2, 3, 4];
 
 export class SortedRun {
-  /** The columns where they stand, to say of what must hold of them. */
-  readonly pairs: Pairs;
   /** For titles of what rests on it. */
   readonly name: string;
   /** Readings that there is room for. */
   readonly size: number;
+  private readonly pairs: Pairs;
   private readonly table: Table;
 
-  constructor(
-    private readonly given: Given,
-    x = 'times',
-    y = 'values',
-  ) {
-    this.pairs = Pairs.of(given, x, y);
-    this.size = this.pairs.size;
+  constructor(given: Given, x = 'times', y = 'values') {
     const pairs = Pairs.of(given.fromWorkings(), x, y);
+    this.pairs = Pairs.of(given, x, y);
+    this.size = pairs.size;
     this.name = `${pairs.y} over ${pairs.x}`;
     this.table = given.workings.table(`Run: ${this.name}, in the order of time, without gaps`, (own) => [
-      [{ formula: pairs.count }, 'readings'],
-      [{ formula: pairs.trend() }, '1 where they rise, -1 where they fall'],
-      [{ heading: 'time' }, { heading: 'reading' }, { heading: 'number' }],
-      ...sorted(pairs, own),
+      ...head(pairs, own),
+      ...Array.from({ length: pairs.size }, (_, n) => line(pairs, own, n)),
     ]);
   }
 
+  /** An error among the readings makes it one, and all that rests on it. */
   get count(): string {
-    return this.table.cell(0, 0);
+    return this.table.cell(readings, 0);
+  }
+
+  /** That there is no error among the readings. */
+  get holds(): string[] {
+    return [`ISNUMBER(${this.count})`];
   }
 
   /** The times in order, with empty text below the last. */
   get times(): string {
-    return this.table.range(firstRow, 0, this.size);
+    return this.column(inOrder);
   }
 
   get values(): string {
-    return this.table.range(firstRow, 1, this.size);
+    return this.column(reading);
   }
 
   /** 1, 2, 3 … beside them. */
   get numbers(): string {
-    return this.table.range(firstRow, 2, this.size);
+    return this.column(number);
   }
 
-  time = (n: number): string => this.table.cell(firstRow + n, 0);
-  value = (n: number): string => this.table.cell(firstRow + n, 1);
+  get lastTime(): string {
+    return `INDEX(${this.times},${this.count})`;
+  }
+
+  time = (n: number): string => this.table.cell(firstRow + n, inOrder);
+  value = (n: number): string => this.table.cell(firstRow + n, reading);
 
   /** 1 where the run rises or is level, −1 where it falls. */
   get direction(): string {
-    return this.table.cell(1, 0);
+    return this.table.cell(way, 0);
   }
 
   /** As given, or by the trend. */
-  get stoichiometricNumber(): Phrase {
-    if (this.given.has('coefficient')) return this.pairs.stoichiometricNumber(this.given);
+  stoichiometricNumber(given: Given): Phrase {
+    if (given.has('coefficient')) return this.pairs.stoichiometricNumber(given);
     return { text: this.direction, holds: [] };
+  }
+
+  private column(n: number): string {
+    return this.table.range(firstRow, n, this.size);
   }
 }
 
-function sorted(pairs: Pairs, own: Table): WorkingCell[][] {
-  return Array.from({ length: pairs.size }, (_, n): WorkingCell[] => {
-    const [first, time] = [own.cell(firstRow, 0), own.cell(firstRow + n, 0)];
-    const beyond = (text: string): string => `IF(${own.cell(0, 0)}<${n + 1},"",${text})`;
-    // equal times stay in their order
-    const among = n === 0 ? '1' : `${n + 2}-MATCH(${time},${first}:${time},0)`;
-    const places = pairs.some(`IF(${pairs.x}=${time},${pairs.places},"")`);
-    return [
-      { formula: beyond(`SMALL(${pairs.some(pairs.x)},${n + 1})`) },
-      { formula: beyond(`INDEX(${pairs.y},SMALL(${places},${among}))`) },
-      n + 1,
-    ];
+function head(pairs: Pairs, own: Table): WorkingCell[][] {
+  const rows: WorkingCell[][] = [];
+  rows[readings] = [{ formula: `IF(${pairs.holds.join()},${pairs.count},#VALUE!)` }, 'readings'];
+  rows[way] = [{ formula: pairs.trend() }, '1 where they rise, -1 where they fall'];
+  rows[misplaced] = [{ formula: outOfPlace(own, pairs.size) }, 'of them behind a gap or a later time'];
+  rows[headings] = ['number', 'time as it stands', 'time in order', 'its place', 'reading'].map(
+    (heading) => ({ heading }),
+  );
+  return rows;
+}
+
+function outOfPlace(own: Table, size: number): string {
+  if (size === 1) return '0';
+  const [before, here] = [0, 1].map((from) => own.range(firstRow + from, asItStands, size - 1));
+  return `SUM(IF(ISNUMBER(${here}),IF(ISNUMBER(${before}),IF(${here}<${before},1,0),1),0))`;
+}
+
+/** A run that is in order already, as most are, is only copied: no cell then looks through the others. */
+function line(pairs: Pairs, own: Table, n: number): WorkingCell[] {
+  const { x, isPair } = pairs.element(n);
+  const here = (column: number): string => own.cell(firstRow + n, column);
+  const before = (column: number): string => own.cell(firstRow + n - 1, column);
+  const standing = own.range(firstRow, asItStands, pairs.size);
+  const isOrdered = `${own.cell(misplaced, 0)}=0`;
+  const known = (formula: string): WorkingCell => ({
+    formula: `IF(${own.cell(readings, 0)}<${here(number)},"",${formula})`,
   });
+  const first = `MATCH(${here(inOrder)},${standing},0)`;
+  const next = `INDEX(${standing},${before(place)}+1):INDEX(${standing},${pairs.size})`;
+  // equal times stay in their order
+  const found =
+    n === 0
+      ? first
+      : `IF(${here(inOrder)}=${before(inOrder)},${before(place)}+MATCH(${here(inOrder)},${next},0),${first})`;
+  return [
+    n + 1,
+    { formula: `IF(${isPair},${x},"")` },
+    known(`IF(${isOrdered},${x},SMALL(${standing},${here(number)}))`),
+    known(`IF(${isOrdered},${here(number)},${found})`),
+    known(pairs.standingAt(pairs.y, here(place))),
+  ];
 }

@@ -72,10 +72,7 @@ function row(
   // of equal standards the one that stands nearer in their order
   const own = (column: number, nearest: 'MAX' | 'MIN'): string => {
     const among = pairs.some(`IF(${y}=${at(column)},${places},"")`);
-    const value =
-      u === undefined
-        ? `ABS(${at(column)})`
-        : `INDEX(${u},${pairs.columns > 1 ? '1,' : ''}${nearest}(${among}))`;
+    const value = u === undefined ? `ABS(${at(column)})` : pairs.standingAt(u, `${nearest}(${among})`);
     return `IF(ISNUMBER(${at(column)}),${value},"")`;
   };
   const share = `(${at(reading)}-${at(below)})/(${at(above)}-${at(below)})`;

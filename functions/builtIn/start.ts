@@ -15,7 +15,7 @@ const [late, limit, third, early, used, slope, uncertainty] = [0, 1, 2, 3, 4, 5,
 
 export function sayStart(given: Given): Said {
   const run = new SortedRun(given);
-  const nu = run.stoichiometricNumber;
+  const nu = run.stoichiometricNumber(given);
   const [share, detail] = [given.number('share'), given.flag('detail')];
   const far = given.numberFromWorkings('share');
   const table = given.workings.table(`Initial rate, share ${far}: ${run.name}`, (own) => rows(run, own, far));
@@ -25,12 +25,7 @@ export function sayStart(given: Given): Said {
     uncertainty: `${of(uncertainty)}/ABS(${nu.text})`,
     degreesOfFreedom: `(${of(used)}-3)`,
   });
-  const holds = [
-    ...run.pairs.holds,
-    ...holdsOf(share, nu),
-    ...detail.holds,
-    `MAX(${run.times})>MIN(${run.times})`,
-  ];
+  const holds = [...run.holds, ...holdsOf(share, nu), ...detail.holds, `MAX(${run.times})>MIN(${run.times})`];
   const say = (column: number): string => where(holds, `IF(ISNUMBER(${of(third)}),${cells[column]},NA())`);
   return detail.value ? { cell: (_, column) => say(column) } : oneValue(say(0));
 }

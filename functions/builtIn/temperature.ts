@@ -170,7 +170,7 @@ export function sayMeanTemp(given: Given): Said {
   const isHistory = `MAX(${run.times})>MIN(${run.times})`;
   // a single reading is its own mean
   const whole = `IF(${run.count}=1,${run.value(0)},IF(${isHistory},${mean},#VALUE!))`;
-  return oneValue(where([...holds, ...run.pairs.holds, `${run.count}>0`], whole));
+  return oneValue(where([...holds, ...run.holds, `${run.count}>0`], whole));
 }
 
 /** How long each reading stands for: from halfway to the time before until halfway to the next, shared by those of one time. */

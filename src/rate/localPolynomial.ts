@@ -146,12 +146,17 @@ function finish(fit: LocalFit, squares: number, scale: number, degreesOfFreedom:
   fit.degreesOfFreedom = degreesOfFreedom;
 }
 
+/** Two readings count as equally near where rounding of times, to this share of them, could decide. */
+export const timeRounding = 1e-13;
+
 /**
- * A reading ahead is nearer than one behind when it is so by more than rounding: 0.3 and 0.1 are as far from 0.2.
+ * From when on a window does without its first reading and has the next one ahead: halfway between the two, and
+ * later by more than rounding, so that of readings as near the earlier counts.
  *
- * @example nearerBy // 0.999999999999
+ * @example turningTime(0.1, 0.3) > 0.2 // true
  */
-export const nearerBy = 1 - 1e-12;
+export const turningTime = (first: number, ahead: number): number =>
+  (first + ahead) / 2 + timeRounding * (Math.abs(first) + Math.abs(ahead));
 
 /**
  * The window of the `count` points nearest to a time, ties to the earlier; times in ascending order.
@@ -162,6 +167,6 @@ export const nearerBy = 1 - 1e-12;
  */
 export function nearestWindow(times: Float64Array, count: number, at: number, from = 0): number {
   let first = from;
-  while (first + count < times.length && times[first + count] - at < nearerBy * (at - times[first])) first++;
+  while (first + count < times.length && at >= turningTime(times[first], times[first + count])) first++;
   return first;
 }

@@ -72,6 +72,8 @@ test('nearestWindow: the nearest readings, a tie to the earlier, one-sided at th
   expect(nearestWindow(times, 2, 1.5)).toBe(1);
   expect(nearestWindow(times, 2, 2)).toBe(1); // 1 and 3 are as near
   expect(nearestWindow(Float64Array.of(0.1, 0.2, 0.3), 2, 0.2)).toBe(0); // so are 0.1 and 0.3, whatever rounding says
+  const clock = Float64Array.from({ length: 5 }, (_, n) => 46357 + (3600 * 9 + n) / 86400); // seconds after 9:00, as dates
+  expect([1, 2, 3].map((n) => nearestWindow(clock, 2, clock[n]))).toEqual([0, 1, 2]);
   expect(nearestWindow(times, 3, 0)).toBe(0);
   expect(nearestWindow(times, 3, 10)).toBe(3);
   expect(nearestWindow(times, 3, 6.9)).toBe(3); // 4, 10 and 3 are 2.9, 3.1 and 3.9 away

@@ -113,6 +113,18 @@ export const rate: Cases = {
     becomes: 'live',
     changed: { B4: 27, A9: 230 },
   },
+  'Rates, order and gaps later': {
+    typed: {
+      ...run,
+      D1: 5,
+      D2: '=PACE.TANGENT(A2:A9,B2:B9,65,D1)',
+      D3: '=PACE.TANGENT(A2:A9,B2:B9,40,4,1,-2,TRUE)',
+      D4: '=PACE.START(A2:A9,B2:B9,0.5,,TRUE)',
+      D6: '=PACE.ALONG(A2:A9,B2:B9,D1)',
+    },
+    becomes: 'live',
+    changed: { A3: 95, A4: 60, B8: null, D1: 4 },
+  },
   'Rates along a row': {
     typed: {
       ...Object.fromEntries(
