@@ -16,11 +16,15 @@ export function columnName(column: number): string {
   return name;
 }
 
+/** Of a column, `AB`, or of a cell in it, `AB12`. */
 export function columnIndex(name: string): number {
   let index = 0;
-  for (const letter of name.toUpperCase()) index = index * 26 + letter.charCodeAt(0) - 64;
+  for (let at = 0; name.charCodeAt(at) >= firstLetter; at++) index = index * 26 + (name.charCodeAt(at) & 31);
   return index - 1;
 }
+
+/** The last five bits of a letter count from 1, small or capital. */
+const firstLetter = 'A'.charCodeAt(0);
 
 export const cellName = (row: number, column: number): string => `${columnName(column)}${row + 1}`;
 

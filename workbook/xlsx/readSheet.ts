@@ -60,10 +60,11 @@ function cellModel(
   const { bold, wrap, numberFormat } = looks[Number(attributes.s ?? 0)] ?? {};
   const value = valueOf(scanned, sharedStrings);
   if (value === null && formula === '' && !bold && !wrap) return undefined;
+  const plain: CellModel = { row, column, value };
+  // nearly every cell of a large sheet: a spread would make it larger
+  if (formula === '' && numberFormat === undefined && !bold && !wrap) return plain;
   return {
-    row,
-    column,
-    value,
+    ...plain,
     ...(formula === '' ? {} : isOutside && value !== null ? { outsideFormula: formula } : { formula }),
     ...(numberFormat === undefined ? {} : { numberFormat }),
     ...(bold ? { bold } : {}),

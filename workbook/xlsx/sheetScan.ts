@@ -70,21 +70,16 @@ export function scanSheet(
   const rows: ScannedRow[] = [];
   const widths: ScannedWidth[] = [];
   let prefix = '';
-  let data: Holder | undefined;
+  let data: Held | undefined;
   let dimension: ScannedSheet['dimension'];
-  let row: ScannedRow | undefined;
-  let cell: ScannedCell | undefined;
+  let row: HeldRow | undefined;
+  let cell: HeldCell | undefined;
   let child: ScannedChild | undefined;
   let lastColumn = -1;
   let depth = 0;
   /** Whether what comes next is text of a cell: not the space between elements, nor a phonetic hint. */
   let isText = false;
   let isHint = false;
-
-  const holder = (end: number, closed: boolean): Holder => {
-    const start = tagStart(xml, end);
-    return { start, openEnd: end, contentEnd: closed ? start : -1, end: closed ? end : -1, closed };
-  };
 
   scanXml(xml, part, {
     open({ name: full, attributes, isSelfClosing }, end) {
@@ -97,19 +92,19 @@ export function scanSheet(
         widths.push({ first: Number(min) - 1, last: Number(max) - 1, width: Number(width) });
       } else if (name === 'sheetData' && depth === 2) {
         prefix = full.slice(0, full.length - name.length);
-        data = holder(end, isSelfClosing);
+        data = new Held(xml, end, isSelfClosing);
       } else if (!data || data.end >= 0) {
         return;
       } else if (name === 'row' && depth === 3) {
         const number = attributes.r === undefined ? (rows.at(-1)?.row ?? -1) + 1 : Number(attributes.r) - 1;
-        row = { ...holder(end, isSelfClosing), row: number, cells: [], countsCells: false };
+        row = new HeldRow(xml, end, isSelfClosing, number);
         rows.push(row);
         lastColumn = -1;
       } else if (name === 'c' && depth === 4 && row) {
-        const named = attributes.r === undefined ? undefined : columnIndex(attributes.r.replace(/\d+$/, ''));
+        const named = attributes.r === undefined ? undefined : columnIndex(attributes.r);
         row.countsCells ||= named === undefined;
         lastColumn = named ?? lastColumn + 1;
-        cell = { ...holder(end, isSelfClosing), row: row.row, column: lastColumn, attributes, children: [] };
+        cell = new HeldCell(xml, end, isSelfClosing, row.row, lastColumn, attributes);
       } else if (depth === 5 && cell) {
         child = { start: tagStart(xml, end), end: -1, name, attributes, text: '' };
         cell.children.push(child);
@@ -127,15 +122,15 @@ export function scanSheet(
         child = undefined;
       }
       if (depth === 4 && cell) {
-        shut(cell, xml, end);
+        cell.shut(xml, end);
         if (keeps(cell)) row?.cells.push(cell);
         cell = undefined;
       }
       if (depth === 3 && row) {
-        shut(row, xml, end);
+        row.shut(xml, end);
         row = undefined;
       }
-      if (depth === 2 && data && data.end < 0) shut(data, xml, end);
+      if (depth === 2 && data && data.end < 0) data.shut(xml, end);
       depth -= 1;
     },
     text(text) {
@@ -145,8 +140,54 @@ export function scanSheet(
   return { prefix, rows, data, dimension, widths };
 }
 
-function shut(element: Holder, xml: string, end: number): void {
-  if (element.closed) return;
-  element.contentEnd = tagStart(xml, end);
-  element.end = end;
+/** Classes, since a sheet has millions of cells: put together from parts, they would take most of the time of reading it. */
+class Held implements Holder {
+  readonly start: number;
+  contentEnd: number;
+  end: number;
+
+  constructor(
+    xml: string,
+    readonly openEnd: number,
+    readonly closed: boolean,
+  ) {
+    this.start = tagStart(xml, openEnd);
+    this.contentEnd = closed ? this.start : -1;
+    this.end = closed ? openEnd : -1;
+  }
+
+  shut(xml: string, end: number): void {
+    if (this.closed) return;
+    this.contentEnd = tagStart(xml, end);
+    this.end = end;
+  }
+}
+
+class HeldRow extends Held implements ScannedRow {
+  readonly cells: ScannedCell[] = [];
+  countsCells = false;
+
+  constructor(
+    xml: string,
+    openEnd: number,
+    closed: boolean,
+    readonly row: number,
+  ) {
+    super(xml, openEnd, closed);
+  }
+}
+
+class HeldCell extends Held implements ScannedCell {
+  readonly children: ScannedChild[] = [];
+
+  constructor(
+    xml: string,
+    openEnd: number,
+    closed: boolean,
+    readonly row: number,
+    readonly column: number,
+    readonly attributes: ScannedCell['attributes'],
+  ) {
+    super(xml, openEnd, closed);
+  }
 }
