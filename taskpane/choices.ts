@@ -21,6 +21,10 @@ export interface ReadingChoice {
   readonly what: string;
   /** By the function's own parameters. */
   readonly inputs: Readonly<Record<string, string>>;
+  /** Which runs are converted; `null` for all where they stand under each other, else the chosen one. */
+  readonly runs: 'this' | 'all' | null;
+  /** Of all runs that stand under each other: one column through them, or times and answers of each side by side. */
+  readonly layout: 'column' | 'pairs';
 }
 
 /** The reading at infinite time: left out, which means 0, or a number or cell, or fitted. */
@@ -79,7 +83,7 @@ export interface PutChoice {
 }
 
 export const firstChoices: Choices = {
-  reading: { what: '', inputs: {} },
+  reading: { what: '', inputs: {}, runs: null, layout: 'column' },
   rate: { kind: 'tangent', from: '', to: '', time: '', points: '', degree: '', coefficient: '' },
   order: { order: '1', endpointKind: 'zero', endpoint: '', answer: 'coefficient' },
   many: { picked: null, answer: 'survey' },

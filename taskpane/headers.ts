@@ -116,6 +116,12 @@ export function withUnit(heading: Heading, unit: string): Heading {
   };
 }
 
+/** What a heading says besides its unit: `A1` of `A1 / mL`. */
+export function nameOf({ text, unit }: Heading): string {
+  const matches = forms.map((form) => form.exec(text));
+  return matches.find((match) => match && unit !== '' && bare(match[2]) === unit)?.[1].trim() ?? text;
+}
+
 /** Is this cell a unit and nothing else, as on a row of units under the names? */
 export const isUnitOnly = (text: string): boolean => quantityOfUnit(bare(text)) !== 'unknown';
 

@@ -53,7 +53,7 @@ export async function firstFree(
   port: WorkbookPort,
   table: Table,
   chosen: Run,
-  { size, isAlongRun = false, beside = chosen }: Insertion,
+  { size, isAlongRun = false, isApart = false, beside = chosen }: Insertion,
 ): Promise<string> {
   const asRead = (area: SheetArea): SheetArea => (table.isTurned ? turnedArea(area) : area);
   const whole = asRead(table.area);
@@ -63,7 +63,7 @@ export async function firstFree(
     const answer = asRead({ ...one, row: 0, column: 0, ...size });
     const top = Math.max(beside.firstRow - 1, 0);
     const strip = { ...answer, row: top, rows: answer.rows + 1, column: end };
-    const column = await freeColumn(port, strip, asRead);
+    const column = await freeColumn(port, strip, asRead, isApart);
     return areaName(asRead({ ...one, row: beside.firstRow, column }));
   }
   // a row left blank keeps it apart from the table, and its heading stands above it
@@ -75,11 +75,14 @@ export async function firstFree(
 /**
  * Where a strip of that height, moved along, first meets empty cells as wide as it is: next to the table or
  * to what was written there before, or else with a blank column on either side, so that it touches nothing.
+ *
+ * @param isApart it must touch nothing
  */
 async function freeColumn(
   port: WorkbookPort,
   strip: SheetArea,
   asRead: (area: SheetArea) => SheetArea,
+  isApart = false,
 ): Promise<number> {
   const reach = Math.min(farthest, lastColumn - strip.column + 1);
   const taken = new Set<number>();
@@ -92,9 +95,10 @@ async function freeColumn(
   const columnsFrom = (first: number, count: number): number[] =>
     Array.from({ length: count }, (_, place) => first + place);
   const fits = (column: number): boolean => {
-    const isJoined = !columnsFrom(strip.column, column - strip.column).some(isFree);
+    const isJoined = !isApart && !columnsFrom(strip.column, column - strip.column).some(isFree);
     return (isJoined || isFree(column - 1)) && columnsFrom(column, strip.columns + 1).every(isFree);
   };
   const end = strip.column + reach;
-  return columnsFrom(strip.column, reach).find(fits) ?? end;
+  const first = isApart ? 1 : 0;
+  return columnsFrom(strip.column + first, reach - first).find(fits) ?? end;
 }

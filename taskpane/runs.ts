@@ -60,6 +60,10 @@ export interface Run {
   readonly lastRow: number;
 }
 
+/** Whether they are readings of the same run, whatever rows of it count. */
+export const isSameRun = (a: Run, b: Run): boolean =>
+  a.readingColumn === b.readingColumn && a.firstRow === b.firstRow;
+
 /** The block that the table was found in. */
 export const blockOf = ({ area, cells, isTurned }: Table): RangeReading => ({
   area,

@@ -3,6 +3,7 @@ import { allRuns, pickedRuns, type OneOfMany } from './calls/many';
 import { compareOrders, givenBy, orderAnswer, type OrderAnswer, type OrderLine } from './calls/order';
 import { rateAnswer, type RateAnswer } from './calls/rate';
 import { readingAnswer, type ReadingAnswer } from './calls/reading';
+import { convertedRuns, type ConvertedRun } from './calls/readings';
 import { temperatureAnswer, type TemperatureAnswer } from './calls/temperature';
 import {
   firstChoices,
@@ -25,6 +26,8 @@ export interface Scene {
   /** Each is `null` while there is no run. */
   readonly check: Check | null;
   readonly reading: ReadingAnswer | null;
+  /** All runs that the reading step converts. */
+  readonly readings: readonly ConvertedRun[];
   readonly rate: RateAnswer | null;
   readonly order: OrderAnswer | null;
   readonly orders: Answered<readonly OrderLine[]> | null;
@@ -60,6 +63,10 @@ export function createScenes(): (state: State) => Scene {
   const reading = remembered((table: Table, run: Run, choice: ReadingChoice, pointedAt: State['pointedAt']) =>
     readingAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
   );
+  const readings = remembered(
+    (table: Table, run: Run, choice: ReadingChoice, pointedAt: State['pointedAt']) =>
+      convertedRuns(table, run, choice, { sheet: table.sheet, pointedAt }),
+  );
   const order = remembered((table: Table, run: Run, choice: OrderChoice, pointedAt: State['pointedAt']) =>
     orderAnswer(table, run, choice, { sheet: table.sheet, pointedAt }),
   );
@@ -85,6 +92,9 @@ export function createScenes(): (state: State) => Scene {
       },
       get reading() {
         return table && run && reading(table, run, state.reading, pointedAt);
+      },
+      get readings() {
+        return table && run ? readings(table, run, state.reading, pointedAt) : [];
       },
       get rate() {
         return table && run && rate(table, run, state.rate, pointedAt);

@@ -32,6 +32,8 @@ export type Copying =
 /** What was written at one go, and what the pane was about before: both can be brought back. */
 export interface Deed {
   readonly description: string;
+  /** All that it filled. */
+  readonly area: SheetArea;
   readonly receipts: readonly WriteReceipt[];
   readonly before: Pick<State, 'table' | 'run' | 'reading'>;
 }

@@ -1,6 +1,6 @@
 /** Putting a formula into the sheet, and taking it back. */
 import { areaName } from '../../functions/address';
-import { readingAnswer } from '../calls/reading';
+import { convertedRuns } from '../calls/readings';
 import { currentInsertion } from '../insertions/current';
 import type { Insertion } from '../insertions/insertion';
 import { firstFree } from '../place';
@@ -9,7 +9,7 @@ import { CellsInUse, type SheetArea, type WriteReceipt } from '../port';
 import type { Deed, State } from '../store';
 import { turnedArea } from '../turned';
 import type { Bench } from './bench';
-import { adoptColumn } from './adopt';
+import { adoptColumns } from './adopt';
 import { keepConditions } from './conditions';
 import type { LongWork } from './longWork';
 import { changeRun, reread } from './look';
@@ -89,19 +89,19 @@ export function putting(bench: Bench, work: LongWork): Putting {
       await one(bits[0]);
       return true;
     } finally {
-      const deed = { description, receipts, before: { table, run, reading } };
+      const deed = { description, area, receipts, before: { table, run, reading } };
       if (receipts.length > 0) store.change({ deeds: [...deeds, deed] });
     }
   }
 
   /** @returns whether the run now has the column just written as its readings */
-  async function goOnWith(plan: Plan, { headings }: Insertion): Promise<boolean> {
+  async function goOnWith(plan: Plan, insertion: Insertion): Promise<boolean> {
     const { table, run, reading, pointedAt } = store.state;
-    const answer = table && run && readingAnswer(table, run, reading, { sheet: table.sheet, pointedAt });
-    if (answer?.kind !== 'column') return false;
-    const readingColumn = await adoptColumn(bench, plan, headings[0], answer.cells);
+    if (!table || !run) return false;
+    const converted = convertedRuns(table, run, reading, { sheet: table.sheet, pointedAt });
+    const readingColumn = await adoptColumns(bench, plan, insertion, converted);
     if (readingColumn === null) return false;
-    changeRun(bench, { readingColumn, timeColumn: run!.timeColumn });
+    changeRun(bench, { readingColumn, timeColumn: run.timeColumn });
     return true;
   }
 
@@ -131,10 +131,8 @@ const inBits = (cells: readonly PlannedCell[]): (readonly PlannedCell[])[] =>
   );
 
 /** The run has gone on with the column that is taken away. */
-function meansWritten({ receipts }: Deed, { table, run }: State): boolean {
-  return receipts.some(({ area }) => {
-    if (!table || !run || area.sheet !== table.sheet) return false;
-    const { column, columns } = table.isTurned ? turnedArea(area) : area;
-    return run.readingColumn >= column && run.readingColumn < column + columns;
-  });
+function meansWritten({ area }: Deed, { table, run }: State): boolean {
+  if (!table || !run || area.sheet !== table.sheet) return false;
+  const { column, columns } = table.isTurned ? turnedArea(area) : area;
+  return run.readingColumn >= column && run.readingColumn < column + columns;
 }

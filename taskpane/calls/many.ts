@@ -45,7 +45,11 @@ function runsBesideEachOther(table: Table, run: Run): readonly OneOfMany[] {
 }
 
 /** Picked one by one, or else all that were read as the chosen run was. */
-export function pickedRuns(table: Table, run: Run, { picked }: ManyChoice): readonly OneOfMany[] {
+export function pickedRuns(
+  table: Table,
+  run: Run,
+  { picked }: Pick<ManyChoice, 'picked'>,
+): readonly OneOfMany[] {
   const all = allRuns(table, run);
   if (picked) return all.filter(({ key }) => picked.includes(key));
   const { quantity, unit } = headingOf(table, run.readingColumn);

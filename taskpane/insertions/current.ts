@@ -3,7 +3,7 @@ import type { Insertion } from './insertion';
 import { manyInsertion } from './many';
 import { exampleInsertion } from './example';
 import { orderInsertion } from './order';
-import { readingInsertion } from './reading';
+import { readingsInsertion } from './readings';
 import { rateInsertion } from './rate';
 import { temperatureInsertion } from './temperature';
 
@@ -15,6 +15,6 @@ export function currentInsertion(state: State): Insertion | null {
   if (task === 'order') return orderInsertion(table, run, state, put.withDetail);
   if (task === 'many') return manyInsertion(table, run, state);
   if (task === 'temperature') return temperatureInsertion(table, run, state);
-  if (task === 'reading') return readingInsertion(table, run, state);
+  if (task === 'reading') return readingsInsertion(table, run, state);
   return rateInsertion(table, run, state, put.withDetail);
 }

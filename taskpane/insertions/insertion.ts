@@ -44,6 +44,8 @@ export interface Insertion {
   readonly isAlongRun?: boolean;
   /** The run it begins beside, where that is not the chosen one. */
   readonly beside?: Run;
+  /** Whether a blank column must keep it apart from the table, which it would else seem to belong to. */
+  readonly isApart?: boolean;
   /** Whether it goes to the active cell, rather than beside the run. */
   readonly isAtActiveCell?: boolean;
   /** Whether the run goes on with the column it puts in. */

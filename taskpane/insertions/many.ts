@@ -2,6 +2,7 @@ import { areaName } from '../../functions/address';
 import { isOneBlock, pickedRuns, surveyLaw, type OneOfMany } from '../calls/many';
 import { columnArgument, type Argument } from '../calls/argument';
 import { askForRows, formulaText } from '../calls/call';
+import { nameOf } from '../headers';
 import { everyRow, tableColumns, type NumberFormats } from '../numberFormats';
 import { areaOf, type Run, type Table } from '../runs';
 import type { State } from '../store';
@@ -34,7 +35,7 @@ const readsOfAll = (table: Table, runs: readonly OneOfMany[]): Insertion['reads'
   runs.flatMap(({ run }) => readsOf(table, run));
 
 /** `a survey of 12 runs`. */
-const counted = (name: string, count: number): string =>
+export const counted = (name: string, count: number): string =>
   `${name} of ${count} ${count === 1 ? 'run' : 'runs'}`;
 
 /** Where runs stand apart or have times of their own there is no block to survey. */
@@ -100,7 +101,7 @@ function inRows(table: Table, runs: readonly OneOfMany[], each: readonly Inserti
 }
 
 /** Columns beside each other, under the name of each run; rows below each other where runs stand in rows. */
-function inLines(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
+export function inLines(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
   const [{ size }] = each;
   const { isTurned } = table;
   return {
@@ -114,14 +115,14 @@ function inLines(table: Table, runs: readonly OneOfMany[], each: readonly Insert
       ? { ...size, rows: size.rows * each.length }
       : { ...size, columns: size.columns * each.length },
     headings: each.flatMap(({ headings }, place) =>
-      headings.map((heading) => `${runs[place].heading.text}: ${heading}`),
+      headings.map((heading) => `${nameOf(runs[place].heading)}: ${heading}`),
     ),
     reads: readsOfAll(table, runs),
   };
 }
 
 /** One column through all runs, each answer in the rows of its own run. */
-function inStretches(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
+export function inStretches(table: Table, runs: readonly OneOfMany[], each: readonly Insertion[]): Insertion {
   const top = runs[0].run.firstRow;
   const { lastRow } = runs[runs.length - 1].run;
   const { isTurned } = table;
@@ -141,7 +142,7 @@ function inStretches(table: Table, runs: readonly OneOfMany[], each: readonly In
   };
 }
 
-const moved = (part: Part, [down, right]: readonly [number, number]): Part => ({
+export const moved = (part: Part, [down, right]: readonly [number, number]): Part => ({
   ...part,
   down: part.down + down,
   right: part.right + right,

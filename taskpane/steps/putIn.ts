@@ -81,14 +81,14 @@ export function putInStep(
 }
 
 function preview(plan: Plan, inUse: readonly string[]): Child[] {
-  const headings = plan.cells.flatMap(({ content }) => ('value' in content ? [String(content.value)] : []));
+  const headings = plan.cells.flatMap(({ content }) => ('value' in content ? [`“${content.value}”`] : []));
   return [
     h(
       'p',
       { className: 'hint' },
       'Fills ',
       h('span', { className: 'where' }, areaName(plan.area)),
-      headings.length > 0 && `, under “${headings.join('”, “')}”`,
+      headings.length > 0 && `, under ${list(headings)}`,
     ),
     inUse.length > 0 && h('p', { className: 'warning' }, `Not empty now: ${list(inUse)}`),
   ];

@@ -1,5 +1,6 @@
 /** What was measured, and the amount or concentration that it stands for. */
 import type { Actions } from '../actions';
+import { pickedRuns } from '../calls/many';
 import { convertedHeading, readingFormula, type ReadingAnswer } from '../calls/reading';
 import type { ReadingChoice } from '../choices';
 import { plainNumber } from '../../functions/format';
@@ -11,7 +12,7 @@ import type { CellFunction } from '../../functions/define';
 import type { Scene } from '../scene';
 import { asItIs, fieldsOf, functionOf, signals, unitProblem } from '../signals';
 import { result } from './estimate';
-import { selectField, step } from './fields';
+import { choiceOfOne, selectField, step } from './fields';
 import { formulaLine } from './formulaLine';
 import { howItIsWorkedOut } from './howItIsWorkedOut';
 import { pointedField } from './pointedField';
@@ -21,7 +22,8 @@ const choices = [
   ...signals.map(({ functionName, label }) => ({ value: functionName, label })),
 ];
 
-export function readingStep({ state, reading: answer }: Scene, actions: Actions): HTMLElement {
+export function readingStep(scene: Scene, actions: Actions): HTMLElement {
+  const { state, reading: answer } = scene;
   const { table, run, reading } = state;
   if (!table || !run || !answer)
     return step('reading', 'Reading', h('p', { className: 'hint' }, 'Choose a run first.'));
@@ -53,13 +55,55 @@ export function readingStep({ state, reading: answer }: Scene, actions: Actions)
     what,
     h('p', { className: 'hint' }, f.summary),
     problem !== '' && h('p', { className: 'warning' }, problem),
+    ...whichRuns(scene, actions),
     ...inputs(f, reading, answer, actions),
     ...drawing(f, table, run, answer),
-    result(...inWords(f, table, run, answer)),
+    result(...inWords(f, table, run, answer), ...refusals(scene)),
     formulaLine({ formula: readingFormula(f, table, run, reading, pointing), sheet: table.sheet }, actions),
     howItIsWorkedOut(f),
     f.caution !== undefined && h('p', { className: 'caution' }, f.caution),
   );
+}
+
+/** Asked only where several are read alike. */
+function whichRuns({ state: { table, run, reading }, readings }: Scene, actions: Actions): Child[] {
+  const alike = pickedRuns(table!, run!, { picked: null });
+  if (alike.length < 2) return [];
+  const isAll = readings.length > 1;
+  return [
+    choiceOfOne(
+      'reading-runs',
+      'Convert',
+      [
+        ['all', `all ${alike.length} runs`],
+        ['this', 'this run'],
+      ],
+      isAll ? 'all' : 'this',
+      (runs) => void actions.changeReading({ runs }),
+    ),
+    isAll &&
+      table!.stretches.length > 0 &&
+      choiceOfOne(
+        'reading-layout',
+        'Laid out',
+        [
+          ['column', 'in one column, each in its own rows'],
+          ['pairs', 'side by side, each with its times'],
+        ],
+        reading.layout,
+        (layout) => void actions.changeReading({ layout }),
+      ),
+  ];
+}
+
+/** Of the other runs, where they are refused for another reason than the chosen one. */
+function refusals({ reading, readings }: Scene): Child[] {
+  const own = reading?.kind === 'refused' ? reading.words : '';
+  const refused = readings.flatMap(({ name, answer }) =>
+    answer.kind === 'refused' && answer.words !== own ? [`${name}: ${answer.words}`] : [],
+  );
+  const more = refused.length > 1 ? `; and ${refused.length - 1} more` : '';
+  return [refused.length > 0 && h('p', { className: 'problem' }, `${refused[0]}${more}`)];
 }
 
 /** What must be known first; what has a default can be opened. */

@@ -1,4 +1,4 @@
-import { isUnitOnly, rateUnit, readHeading } from '../../taskpane/headers';
+import { isUnitOnly, nameOf, rateUnit, readHeading } from '../../taskpane/headers';
 
 test.each([
   ['V / mL', 'volume', 'mL'],
@@ -50,4 +50,13 @@ test.each([
   ['Remarks', 't / s', 'reading unit per s'],
 ])('rateUnit of %j against %j is %j', (reading, time, unit) => {
   expect(rateUnit(readHeading(reading), readHeading(time))).toBe(unit);
+});
+
+test.each([
+  ['A1 / mL', 'A1'],
+  ['first tablet (mL)', 'first tablet'],
+  ['A1', 'A1'],
+  ['A, first tablet', 'A, first tablet'],
+])('nameOf(%s): what tells a run from others is %s', (text, name) => {
+  expect(nameOf(readHeading(text))).toBe(name);
 });

@@ -74,6 +74,34 @@ export function tablesSuite(sheet: () => BenchPage, bench: () => PageBench): voi
     await press(/^Undo: /);
   });
 
+  test('runs under each other are converted at one go, as they are laid out, and taken back', async () => {
+    // at 0 °C and 100 kPa an ideal gas takes 22.710 954 64 L/mol (CODATA 2022)
+    const gas = long.map((row, r) =>
+      r === 0 ? ['run', 't / s', 'V / mL'] : [...row.slice(0, 2), 22.71095464 * r],
+    );
+    await work(gas);
+    await press('Reading');
+    await pane('#reading-temperature').fill('273.15 K');
+    await pane('#reading-pressure').fill('1 bar');
+    await pane('#reading-layout-pairs').check();
+    await says('#put-in .where', "'Gas run'!E1:H8");
+    await press('Put it in');
+    await says('.notice.good', 'written: n(gas) of 2 runs');
+    await waitUntil(async () => typeof (await cell('H8')) === 'number');
+    expect(await sheet().cells("'Gas run'!G8:H8")).toEqual([[60, expect.closeTo(0.014, 9)]]);
+    await press(/^Undo: n\(gas\) of 2 runs/);
+    await pane('#reading-layout-column').check();
+    await press('Put it in and go on with it');
+    await says('.notice.good', 'now the readings of this run');
+    await waitUntil(async () => typeof (await cell('D15')) === 'number');
+    expect(await cell('D8')).toBeCloseTo(0.007, 9);
+    expect(await cell('D15')).toBeCloseTo(0.014, 9);
+    await press(/^Undo: n\(gas\) of 2 runs/);
+    await waitUntil(async () => (await cell('D15')) === null);
+    expect(await cell('D1')).toBeNull();
+    await press('Rate');
+  });
+
   test('rows of runs that are mixed are said to be, with what to do', async () => {
     const [headings, ...rows] = long;
     await work([headings, ...rows.sort((a, b) => Number(a[1]) - Number(b[1]))]);
