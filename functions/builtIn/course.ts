@@ -5,7 +5,7 @@ import { holdsOf } from './phrase';
 import { SortedRun } from './sortedRun';
 import { NotSaid, type Said } from './said';
 import { where } from './text';
-import type { WorkingCell } from './workings';
+import { headingRow, type WorkingCell } from './workings';
 
 /** Σ[(cᵢ + cᵢ₋₁)/2]ᵝ(tᵢ − tᵢ₋₁) up to each reading. */
 export function sayNormalTime(given: Given): Said {
@@ -13,7 +13,7 @@ export function sayNormalTime(given: Given): Said {
   const [exponent, b] = [given.number('exponent'), given.numberFromWorkings('exponent')];
   const title = `Normalised time with the exponent ${b}: ${run.name}`;
   const table = given.workings.table(title, (own) => [
-    ['time', 'normalised time'].map((heading) => ({ heading })),
+    headingRow('time', 'normalised time'),
     ...Array.from({ length: run.size }, (_, n): WorkingCell[] => {
       if (n === 0) return [{ formula: run.time(0) }, 0];
       const step = `(${run.time(n)}-${run.time(n - 1)})`;

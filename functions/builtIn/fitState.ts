@@ -2,6 +2,7 @@
 
 export const asFitted = 'fits as it did';
 export const fitsOtherwise = 'fits otherwise: its readings have changed';
+export const startsOtherwise = 'cannot be told: times or start have changed';
 
 /**
  * @param then the cell that holds the sum of squares of the day

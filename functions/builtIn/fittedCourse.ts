@@ -1,9 +1,9 @@
 /** A fitted mechanism in a copy: on the sheet "Workings", its course as it was found beside the readings of now. */
 import type { Scheme } from '../../src/scheme/scheme';
 import type { Column } from '../column';
-import { stateOfFit } from './fitState';
+import { startsOtherwise, stateOfFit } from './fitState';
 import type { Given } from './given';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 
 export interface FittedCourse {
   readonly scheme: Scheme;
@@ -16,8 +16,6 @@ export interface FittedCourse {
   /** The concentration of each species at each time; nothing where there is no time. */
   readonly course: readonly (ArrayLike<number> | null)[];
 }
-
-export const startsOtherwise = 'cannot be told: times or start have changed';
 
 /** @throws as any {@link FitTable} */
 export function tableOfCourse<V>(fittedOf: (values: V) => FittedCourse, given: Given): Table {
@@ -33,15 +31,15 @@ export function tableOfCourse<V>(fittedOf: (values: V) => FittedCourse, given: G
     const changes = [[startThen, startNow], course.times].map(([then, now]) => unlike(then, now)).join('+');
     const state = stateOfFit(own.cell(1, 0), own.cell(1, 1), course.scale);
     return [
-      headings('sum of squares then', 'sum of squares now', 'state'),
+      headingRow('sum of squares then', 'sum of squares now', 'state'),
       [
         sumOfSquares(fitted),
         { formula: course.sumOfSquares },
         { formula: `IF(${changes}=0,${state},"${startsOtherwise}")` },
       ],
-      headings('rate coefficient', 'of'),
+      headingRow('rate coefficient', 'of'),
       ...scheme.reactions.map(({ words }, n): WorkingCell[] => [coefficients[n] ?? 'cannot be told', words]),
-      headings('start then', 'start now', 'of'),
+      headingRow('start then', 'start now', 'of'),
       ...scheme.species.map((one, j): WorkingCell[] => [initial.numbers[j], numberIn(start.at(j)), one]),
     ];
   });
@@ -69,7 +67,11 @@ function courseTable(title: string, fitted: FittedCourse, far: Given): CourseTab
   const isTurned = time.columns > 1;
   const read = (i: number, j: number): string => (isTurned ? readings.element(j, i) : readings.element(i, j));
   const table = far.workings.table(title, () => [
-    headings('time then', 'time now', ...scheme.species.flatMap((one) => [`${one}, read`, `${one}, fitted`])),
+    headingRow(
+      'time then',
+      'time now',
+      ...scheme.species.flatMap((one) => [`${one}, read`, `${one}, fitted`]),
+    ),
     ...course.map((heights, i): WorkingCell[] => [
       times.numbers[i],
       numberIn(time.at(i)),
@@ -94,8 +96,6 @@ const sumOfSquares = ({ observed, course }: FittedCourse): number =>
       numbers.map((value, i) => (value === null ? 0 : (value - (course[i]?.[j] ?? value)) ** 2)),
     )
     .reduce((sum, square) => sum + square, 0);
-
-const headings = (...words: readonly string[]): WorkingCell[] => words.map((heading) => ({ heading }));
 
 const numberIn = (cell: string): WorkingCell => ({ formula: `IF(ISNUMBER(${cell}),${cell},"")` });
 

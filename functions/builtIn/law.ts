@@ -5,7 +5,7 @@ import { eachReading } from './eachReading';
 import { stateOfFit } from './fitState';
 import type { Given } from './given';
 import type { Said } from './said';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 
 /** Columns of the table. */
 const [name, order, rate, start, endpoint, firstTime, then, now] = [0, 1, 2, 3, 4, 5, 6, 7];
@@ -29,7 +29,7 @@ export function tableOfLaws<V>(fits: WatchedLaws<V>, given: Given): LawTable {
   });
   const [x, y] = ['times', fits.readings].map((one) => far.readings(one).whole);
   const table = given.workings.table([`${fits.what}: ${y} over ${x}`, ...of].join(', '), (own) => [
-    [
+    headingRow(
       'fit',
       'order n',
       'κ, per time',
@@ -39,7 +39,7 @@ export function tableOfLaws<V>(fits: WatchedLaws<V>, given: Given): LawTable {
       'sum of squares then',
       'sum of squares now',
       'state',
-    ].map((heading) => ({ heading })),
+    ),
     ...found.map((fit, n) => fitRow(fit, far, own, n + 1)),
   ]);
   return { table, found };

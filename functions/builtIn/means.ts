@@ -1,7 +1,7 @@
 /** A run with its replicates averaged, on the sheet "Workings": each time once. */
 import type { Given } from './given';
 import type { SortedRun } from './sortedRun';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 
 export class Means {
   private readonly table: Table;
@@ -11,7 +11,7 @@ export class Means {
     readonly run: SortedRun,
   ) {
     this.table = given.workings.table(`Means at each time: ${run.name}`, (own) => [
-      ['time', 'mean reading', 'readings'].map((heading) => ({ heading })),
+      headingRow('time', 'mean reading', 'readings'),
       ...Array.from({ length: run.size }, (_, n) => row(run, own, n + 1)),
     ]);
   }

@@ -3,7 +3,7 @@ import { studentFactorText } from './estimate';
 import type { Given } from './given';
 import { Means } from './means';
 import type { SortedRun } from './sortedRun';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 
 /** Rows of the table. */
 const [inner, deviation, freedom, factor, headings, firstRow] = [0, 1, 2, 3, 4, 5];
@@ -43,7 +43,7 @@ export class SingleScatter {
     const weights = `(${shares(times, to)}-(${shares(times, from)}))`;
     const each = (text: string): string => `SUM(IF(ISNUMBER(${times}),${text},0))`;
     const own = given.workings.table(`From ${from} to ${to}: ${this.run.name}`, () => [
-      ['change', 'its variance factor'].map((heading) => ({ heading })),
+      headingRow('change', 'its variance factor'),
       [each(`${weights}*${means}`), each(`${weights}^2/${counts}`)].map((formula) => ({ formula })),
     ]);
     return { value: own.cell(1, 0), spread: own.cell(1, 1) };
@@ -73,7 +73,7 @@ function head(own: Table, size: number): WorkingCell[][] {
     { formula: `IF(${m}>0,${studentFactorText(own.cell(freedom, 0))},0)` },
     'Student’s factor for 95 %',
   ];
-  rows[headings] = ['share of the later', 'scatter squared'].map((heading) => ({ heading }));
+  rows[headings] = headingRow('share of the later', 'scatter squared');
   return rows;
 }
 

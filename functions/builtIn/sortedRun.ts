@@ -2,7 +2,7 @@
 import type { Given } from './given';
 import { Pairs } from './pairs';
 import type { Phrase } from './phrase';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 
 /** Rows of the table. */
 const [readings, way, misplaced, headings, firstRow] = [0, 1, 2, 3, 4];
@@ -80,9 +80,7 @@ function head(pairs: Pairs, own: Table): WorkingCell[][] {
   rows[readings] = [{ formula: `IF(${pairs.holds.join()},${pairs.count},#VALUE!)` }, 'readings'];
   rows[way] = [{ formula: pairs.trend() }, '1 where they rise, -1 where they fall'];
   rows[misplaced] = [{ formula: outOfPlace(own, pairs.size) }, 'of them behind a gap or a later time'];
-  rows[headings] = ['number', 'time as it stands', 'time in order', 'its place', 'reading'].map(
-    (heading) => ({ heading }),
-  );
+  rows[headings] = headingRow('number', 'time as it stands', 'time in order', 'its place', 'reading');
   return rows;
 }
 

@@ -4,7 +4,7 @@ import type { Given } from './given';
 import { Pairs } from './pairs';
 import { NotSaid } from './said';
 import { fixedArea } from './text';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 
 export interface StandardWeights {
   /** The root of each standard's weight; 0 leaves one out. */
@@ -44,8 +44,13 @@ function uncertaintiesAt(given: Given, isRelative: boolean): Table {
   );
   const title = `Uncertainties of ${text}: those of ${pairs.y} over ${pairs.x} are ${u ?? 'relative'}`;
   return given.workings.table(title, (own) => [
-    ['reading', 'standard below', 'standard above', 'its uncertainty', 'its uncertainty', 'uncertainty'].map(
-      (heading) => ({ heading }),
+    headingRow(
+      'reading',
+      'standard below',
+      'standard above',
+      'its uncertainty',
+      'its uncertainty',
+      'uncertainty',
     ),
     ...readings.map((cell, n) => row(pairs, u, (column) => own.cell(1 + n, column), cell)),
   ]);

@@ -4,7 +4,7 @@
  */
 import { studentFactorText } from './estimate';
 import type { Given } from './given';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 import type { Windows } from './windows';
 
 /** Rows of the table. */
@@ -49,7 +49,7 @@ function head(own: Table, size: number): WorkingCell[][] {
   ];
   rows[freedom] = [{ formula: `SUM(${column(left)})` }, 'degrees of freedom'];
   rows[factor] = [{ formula: studentFactorText(own.cell(freedom, 0)) }, 'Student’s factor for 95 %'];
-  rows[headings] = ['window begins with', 'missed by', 'freedom left'].map((heading) => ({ heading }));
+  rows[headings] = headingRow('window begins with', 'missed by', 'freedom left');
   return rows;
 }
 

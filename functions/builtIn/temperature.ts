@@ -8,7 +8,7 @@ import { Pairs } from './pairs';
 import { SortedRun } from './sortedRun';
 import { oneValue, type Said } from './said';
 import { numberText, where } from './text';
-import type { WorkingCell } from './workings';
+import { headingRow, type WorkingCell } from './workings';
 
 /** ln(k/scale) as a straight line in 1/T − 1/centre, by weighted least squares. */
 class LineOverTemperature {
@@ -177,7 +177,7 @@ export function sayMeanTemp(given: Given): Said {
 function holdingTimes(given: Given, run: SortedRun): string {
   const { times, size } = run;
   const table = given.workings.table(`Time that each reading stands for: ${run.name}`, () => [
-    ['time', 'stands for'].map((heading) => ({ heading })),
+    headingRow('time', 'stands for'),
     ...Array.from({ length: size }, (_, n): WorkingCell[] => {
       const time = run.time(n);
       const beside = (nearest: 'MAX' | 'MIN', side: '<' | '>'): string => {

@@ -6,7 +6,7 @@ import { Readings } from './readings';
 import { NotSaid } from './said';
 import { mostParts, numberOf, partOf, timeForm, withoutFigures, type TimeForm } from './timeForm';
 import { fixedArea, numberText, quoted } from './text';
-import type { Table, WorkingCell } from './workings';
+import { headingRow, type Table, type WorkingCell } from './workings';
 
 export interface TimeTexts {
   /** In days, one below the other. */
@@ -43,7 +43,7 @@ export function timeTexts(given: Given): TimeTexts {
   };
   const title = area ? fixedArea(area) : all.join('; ');
   const table = given.workings.table(`Times as text: ${title}`, (own) => [
-    [
+    headingRow(
       'reading',
       'as text',
       'without figures',
@@ -52,7 +52,7 @@ export function timeTexts(given: Given): TimeTexts {
       'third',
       'days',
       '1 where it can be read',
-    ].map((heading) => ({ heading })),
+    ),
     ...forms.map((one, n) => row(own, n + 1, source(n), one)),
   ]);
   const origin = table.area(all.length, 1);

@@ -8,6 +8,9 @@ import type { CellValue } from '../cell';
 /** A value, a heading, or a formula as it is typed, without `=`. */
 export type WorkingCell = CellValue | { readonly heading: string } | { readonly formula: string };
 
+export const headingRow = (...words: readonly string[]): { readonly heading: string }[] =>
+  words.map((heading) => ({ heading }));
+
 /** A table on that sheet, which formulas anywhere can name: rows and columns count from its own first cell. */
 export interface Table {
   cell(row: number, column: number): string;

@@ -4,8 +4,8 @@ import type { BookModel, CalculatedBook, CellModel, SheetModel } from '../engine
 import { calculate } from '../engine/univer/headless';
 import { alike } from './alike';
 import { frozen, type HandedFormula } from './handed';
+import type { NewSheet } from './newSheet';
 import { settled } from './settled';
-import type { NewSheet } from './sheetPart';
 import type { WorkingsSheet } from './workings';
 import type { World } from './world';
 

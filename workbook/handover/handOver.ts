@@ -3,11 +3,13 @@ import { areaName, quotedSheet } from '../../functions/address';
 import { CellError } from '../../functions/cell';
 import type { CalculatedBook } from '../engine/engine';
 import { calculate } from '../engine/univer/headless';
+import { AddedLooks } from '../xlsx/addLooks';
 import { dropCalcChain } from '../xlsx/calcChain';
 import { dropUnusedLinks } from '../xlsx/externalLinks';
 import { findParts, readXml } from '../xlsx/parts';
 import { patchPackage } from '../xlsx/patch';
 import { readWorkbook } from '../xlsx/read';
+import { stylesIn } from '../xlsx/stylesPart';
 import { encodeXml } from '../xlsx/xml';
 import { Package } from '../xlsx/zip';
 import { checked } from './check';
@@ -71,8 +73,10 @@ export async function handOver(bytes: Uint8Array, origin: Origin): Promise<Hande
       .map((formula) => ({ row: formula.row, column: formula.column, text: noteText(formula, origin) }));
     if (notes.length > 0) addNotes(pack, sheet, notes);
   }
-  addSheet(pack, parts, methodSheet(freeName('Method', taken), told, world, origin));
-  if (workings) addSheet(pack, parts, workings);
+  const looks = new AddedLooks(pack, stylesIn(pack, parts));
+  addSheet(pack, parts, methodSheet(freeName('Method', taken), told, world, origin), looks);
+  if (workings) addSheet(pack, parts, workings, looks);
+  looks.write();
   freezeNames(pack, parts.workbook, names);
   dropColumnFormulas(pack, parts);
   dropCalcChain(pack, parts);

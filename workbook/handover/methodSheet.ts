@@ -1,5 +1,6 @@
 /** The sheet "Method": what each formula was and is now, how it is worked out, with which constants. */
 import { areaName, cellName } from '../../functions/address';
+import { headingRow } from '../../functions/builtIn/workings';
 import { CellError } from '../../functions/cell';
 import { signature, typedName, type CellFunction } from '../../functions/define';
 import { howInWords } from '../../functions/documented';
@@ -17,9 +18,10 @@ import { elsewherePlace } from './elsewhere';
 import { namesReachingOutside, reachesOutside } from '../xlsx/outside';
 import type { HandedFormula } from './handed';
 import type { HandedOver } from './handOver';
-import type { NewSheet, SheetCell } from './sheetPart';
+import type { NewSheet, SheetCell } from './newSheet';
 import { fingerprintOf, fingerprintTolerance } from './stale';
 import type { World } from './world';
+import { wrapped } from './wrapped';
 
 /** Said of the copy itself. */
 export interface Origin {
@@ -40,8 +42,6 @@ const constants: readonly (readonly [string, number, string, string])[] = [
   ['standard acceleration of free fall', standardGravity, 'm/s²', 'exact; 3rd CGPM (1901)'],
 ];
 
-const headings = (...words: string[]): SheetCell[] => words.map((heading) => ({ heading }));
-
 export function methodSheet(
   name: string,
   { formulas, names, elsewhere }: Pick<HandedOver, 'formulas' | 'names' | 'elsewhere'>,
@@ -49,42 +49,53 @@ export function methodSheet(
   { version, date }: Origin,
 ): NewSheet {
   const rows: SheetCell[][] = [
-    headings('Method'),
+    headingRow('Method'),
     [`A copy that needs no add-in, made by Flaskpace ${version} on ${date}.`],
     ...wrapped(
       'What calls of PACE functions could be said in built-in functions is live and follows its inputs. The rest is frozen to the value it had; the column State tells whether its inputs are still those of that day. What needs more than one cell stands on the sheet Workings.',
+      lineLength,
     ).map((line): SheetCell[] => [line]),
     [],
-    headings(
+    headingRow(
       'Sheet',
       'Cells',
       'State',
-      'Inputs then',
-      'Inputs now',
       'Formula as it was',
       'What became of it',
+      'Inputs then',
+      'Inputs now',
     ),
   ];
+  const fixedRows = rows.length;
   for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
   for (const { name: own, refersTo, value } of names)
-    rows.push(['a name', own, 'frozen', null, null, `=${refersTo}`, `frozen: it stands for ${value}`]);
+    rows.push(['a name', own, 'frozen', `=${refersTo}`, `frozen: it stands for ${value}`]);
   for (const call of elsewhere)
     rows.push([
       elsewherePlace(call),
       null,
       'as it was',
-      null,
-      null,
       `=${call.formula}`,
       `left as it was: without the add-in ${call.loss}`,
     ]);
   for (const f of functionsOf(formulas)) rows.push([], ...functionRows(f));
-  rows.push([], headings('Constant', '', 'Value', 'Unit', 'Source'));
+  rows.push([], headingRow('Constant', '', 'Value', 'Unit', 'Source'));
   rows.push(
     ...constants.map(([what, value, unit, source]): SheetCell[] => [what, null, value, unit, source]),
   );
-  return { name, rows, widths: [18, 14, 28, 16, 16, 50, 70] };
+  return { name, rows, columns, fixedRows, warnings: [changed] };
 }
+
+/** As they are headed. The formulas and what became of them are the long ones. */
+const columns = [
+  { width: 20, wraps: true },
+  { width: 12 },
+  { width: 21, isExact: true },
+  { width: 46, wraps: true },
+  { width: 46, wraps: true },
+  { width: 13 },
+  { width: 13 },
+];
 
 const functionsOf = (formulas: readonly HandedFormula[]): CellFunction[] => [
   ...new Set(formulas.flatMap(({ functions }) => functions)),
@@ -93,7 +104,7 @@ const functionsOf = (formulas: readonly HandedFormula[]): CellFunction[] => [
 /** Each text in lines of its own: cells to the right of it stay empty, so that it can be read to its end. */
 function functionRows(f: CellFunction): SheetCell[][] {
   const under = (label: string, text: string): SheetCell[][] =>
-    wrapped(text).map((line, n) => [n === 0 ? label : null, null, line]);
+    wrapped(text, lineLength).map((line, n) => [n === 0 ? label : null, null, line]);
   return [
     [{ heading: typedName(f) }, null, f.summary],
     ...under('typed as', signature(f)),
@@ -104,18 +115,7 @@ function functionRows(f: CellFunction): SheetCell[][] {
 }
 
 /** Characters in a line. */
-const lineLength = 150;
-
-function wrapped(text: string): string[] {
-  const lines = [''];
-  for (const word of text.split(' ')) {
-    const last = lines[lines.length - 1];
-    if (last === '') lines[lines.length - 1] = word;
-    else if (last.length + word.length < lineLength) lines[lines.length - 1] = `${last} ${word}`;
-    else lines.push(word);
-  }
-  return lines;
-}
+const lineLength = 110;
 
 export const unwatched = 'not watched';
 export const unchanged = 'inputs as they were';
@@ -124,13 +124,13 @@ export const changed = 'inputs have changed';
 function formulaRow(formula: HandedFormula, row: number, world: World): SheetCell[] {
   const { sheet, original, said, why, ofTheDay, fits, area } = formula;
   const place: SheetCell[] = [sheet, areaName(area)];
-  if (!isOfTheDay(formula))
-    return [...place, 'live', null, null, `=${original}`, 'said in built-in functions'];
+  if (!isOfTheDay(formula)) return [...place, 'live', `=${original}`, 'said in built-in functions'];
   const now = said
     ? `said in built-in functions, but as on the day of the copy: ${ofTheDay?.what}`
     : `frozen: ${why}`;
   const where = fits ? `; what was fitted stands from ${fits.join(' and ').replace(/\$/g, '')} on` : '';
-  return [...place, ...watch(formula, row, world), `=${original}`, now + where];
+  const [state, ...inputs] = watch(formula, row, world);
+  return [...place, state, `=${original}`, now + where, ...inputs];
 }
 
 /** Whether the inputs are still those of the day, in words: a sum over them then, and the same now. */
@@ -138,10 +138,10 @@ function watch(formula: HandedFormula, row: number, world: World): SheetCell[] {
   const { sheet, original, ofTheDay } = formula;
   if (reachesOutside(original, namesReachingOutside(world.book.names))) return [unwatched, null, null];
   const inputs = ofTheDay?.from ?? world.areasIn(world.spelledOut(original, formula), sheet);
-  if (inputs.length === 0) return ['no inputs in cells', null, null];
+  if (inputs.length === 0) return ['no inputs in cells'];
   const print = fingerprintOf(inputs, sheet, world);
-  if (!print || print.formula.length > 8000) return [unwatched, null, null];
-  const [then, now] = [cellName(row - 1, 3), cellName(row - 1, 4)];
+  if (!print || print.formula.length > 8000) return [unwatched];
+  const [then, now] = [cellName(row - 1, 5), cellName(row - 1, 6)];
   const same = `IF(ISERROR(${now}),FALSE,ABS(${now}-${then})<${fingerprintTolerance}*MAX(1,ABS(${then})))`;
   return [
     { formula: `IF(${same},"${unchanged}","${changed}")`, value: unchanged },

@@ -4,17 +4,22 @@
  */
 import { cellName } from '../../functions/address';
 import { addDefaultType, addPart, freePath, relate } from '../xlsx/addPart';
+import { columnWidths } from '../xlsx/columnWidths';
 import { applyEdits, insertion, type Edit } from '../xlsx/edits';
 import { namespacesOf } from '../xlsx/namespaces';
 import { elementsIn, readXml, relationshipsOf, type SheetPart } from '../xlsx/parts';
 import { encodeXml, localName, scanXml, tagStart, xmlText } from '../xlsx/xml';
 import type { Package } from '../xlsx/zip';
+import { wrapped } from './wrapped';
 
 export interface Note {
   readonly row: number;
   readonly column: number;
   readonly text: string;
 }
+
+/** Of a column, in characters. */
+type WidthOf = (column: number) => number;
 
 const author = 'Flaskpace';
 const head = '<?xml version="1.0" encoding="UTF-8" standalone="yes"?>\n';
@@ -23,12 +28,13 @@ const drawingType = 'application/vnd.openxmlformats-officedocument.vmlDrawing';
 
 /** A cell that has a note already keeps that one alone. */
 export function addNotes(pack: Package, sheet: SheetPart, notes: readonly Note[]): void {
+  const widthOf = columnWidths(readXml(pack, sheet.path), sheet.path);
   const relations = relationshipsOf(pack, sheet.path);
   const comments = relations.find(({ kind }) => kind === 'comments')?.path;
   const drawing = relations.find(({ kind }) => kind === 'vmlDrawing')?.path;
   // comments without a place to show them, or the other way round: not a file to guess about
   if ((comments === undefined) !== (drawing === undefined)) return;
-  if (comments === undefined || drawing === undefined) return addParts(pack, sheet, notes);
+  if (comments === undefined || drawing === undefined) return addParts(pack, sheet, notes, widthOf);
   const taken = new Set(
     elementsIn(pack, comments)
       .filter(({ name }) => name === 'comment')
@@ -37,10 +43,10 @@ export function addNotes(pack: Package, sheet: SheetPart, notes: readonly Note[]
   const free = notes.filter(({ row, column }) => !taken.has(cellName(row, column)));
   if (free.length === 0) return;
   extendComments(pack, comments, free);
-  extendDrawing(pack, drawing, free);
+  extendDrawing(pack, drawing, free, widthOf);
 }
 
-function addParts(pack: Package, sheet: SheetPart, notes: readonly Note[]): void {
+function addParts(pack: Package, sheet: SheetPart, notes: readonly Note[], widthOf: WidthOf): void {
   const comments = freePath(pack, 'xl/comments', '.xml');
   const drawing = freePath(pack, 'xl/drawings/vmlDrawing', '.vml');
   const { main, office } = namespacesOf(readXml(pack, sheet.path));
@@ -52,7 +58,7 @@ function addParts(pack: Package, sheet: SheetPart, notes: readonly Note[]): void
     commentsType,
   );
   addDefaultType(pack, 'vml', drawingType);
-  pack.write(drawing, encodeXml(drawingXml(notes)));
+  pack.write(drawing, encodeXml(drawingXml(notes, widthOf)));
   relate(pack, sheet.path, comments, `${office}/comments`);
   const id = relate(pack, sheet.path, drawing, `${office}/vmlDrawing`);
   pack.write(sheet.path, encodeXml(withDrawing(readXml(pack, sheet.path), sheet.path, id, office)));
@@ -113,22 +119,31 @@ function extendComments(pack: Package, path: string, notes: readonly Note[]): vo
 }
 
 /** The drawing is older than the format, and seldom well-formed enough to read: ours goes before its end. */
-function extendDrawing(pack: Package, path: string, notes: readonly Note[]): void {
+function extendDrawing(pack: Package, path: string, notes: readonly Note[], widthOf: WidthOf): void {
   const xml = readXml(pack, path);
   const end = xml.lastIndexOf('</xml>');
   if (end < 0) return;
   const ids = [...xml.matchAll(/_s(\d+)"/g)].map(([, id]) => Number(id));
   const first = ids.reduce((most, id) => Math.max(most, id), 1024) + 1;
   const type = xml.includes('id="_x0000_t202"') ? '' : shapeType;
-  const shapes = notes.map((note, n) => shapeXml(note, first + n)).join('');
+  const shapes = notes.map((note, n) => shapeXml(note, first + n, widthOf)).join('');
   pack.write(path, encodeXml(applyEdits(xml, [insertion(end, type + shapes)])));
 }
 
 const shapeType =
   '<v:shapetype id="_x0000_t202" coordsize="21600,21600" o:spt="202" path="m,l,21600r21600,l21600,xe"><v:stroke joinstyle="miter"/><v:path gradientshapeok="t" o:connecttype="rect"/></v:shapetype>';
 
-const drawingXml = (notes: readonly Note[]): string =>
-  `<xml xmlns:v="urn:schemas-microsoft-com:vml" xmlns:o="urn:schemas-microsoft-com:office:office" xmlns:x="urn:schemas-microsoft-com:office:excel"><o:shapelayout v:ext="edit"><o:idmap v:ext="edit" data="1"/></o:shapelayout>${shapeType}${notes.map((note, n) => shapeXml(note, 1025 + n)).join('')}</xml>`;
+const drawingXml = (notes: readonly Note[], widthOf: WidthOf): string =>
+  `<xml xmlns:v="urn:schemas-microsoft-com:vml" xmlns:o="urn:schemas-microsoft-com:office:office" xmlns:x="urn:schemas-microsoft-com:office:excel"><o:shapelayout v:ext="edit"><o:idmap v:ext="edit" data="1"/></o:shapelayout>${shapeType}${notes.map((note, n) => shapeXml(note, 1025 + n, widthOf)).join('')}</xml>`;
 
-const shapeXml = ({ row, column }: Note, id: number): string =>
-  `<v:shape id="_x0000_s${id}" type="#_x0000_t202" style="position:absolute;margin-left:60pt;margin-top:2pt;width:260pt;height:90pt;z-index:${id};visibility:hidden" fillcolor="#ffffe1" o:insetmode="auto"><v:fill color2="#ffffe1"/><v:shadow on="t" color="black" obscured="t"/><v:path o:connecttype="none"/><v:textbox style="mso-direction-alt:auto"><div style="text-align:left"></div></v:textbox><x:ClientData ObjectType="Note"><x:MoveWithCells/><x:SizeWithCells/><x:Anchor>${column + 1}, 15, ${row}, 2, ${column + 6}, 15, ${row + 6}, 4</x:Anchor><x:AutoFill>False</x:AutoFill><x:Row>${row}</x:Row><x:Column>${column}</x:Column></x:ClientData></v:shape>`;
+/** Characters in a line of a note, and how high that is, in points. */
+const line = { length: 60, height: 15 };
+
+/** A note covers as many cells as its text needs, from the column beside its own on. */
+function shapeXml({ row, column, text }: Note, id: number, widthOf: WidthOf): string {
+  const lines = text.split('\n').flatMap((paragraph) => wrapped(paragraph, line.length));
+  const rows = lines.length + 1;
+  let [end, width] = [column + 1, 0];
+  for (; width < line.length && end < column + 20; end++) width += widthOf(end);
+  return `<v:shape id="_x0000_s${id}" type="#_x0000_t202" style="position:absolute;margin-left:60pt;margin-top:2pt;width:330pt;height:${rows * line.height}pt;z-index:${id};visibility:hidden" fillcolor="#ffffe1" o:insetmode="auto"><v:fill color2="#ffffe1"/><v:shadow on="t" color="black" obscured="t"/><v:path o:connecttype="none"/><v:textbox style="mso-direction-alt:auto"><div style="text-align:left"></div></v:textbox><x:ClientData ObjectType="Note"><x:MoveWithCells/><x:SizeWithCells/><x:Anchor>${column + 1}, 15, ${row}, 2, ${end}, 15, ${row + rows}, 2</x:Anchor><x:AutoFill>False</x:AutoFill><x:Row>${row}</x:Row><x:Column>${column}</x:Column></x:ClientData></v:shape>`;
+}

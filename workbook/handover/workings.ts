@@ -1,10 +1,11 @@
 /** The sheet "Workings" of a copy: its tables one below the other, each under its title. */
 import { quotedSheet } from '../../functions/address';
 import type { CellValue } from '../../functions/cell';
+import { fitsOtherwise, startsOtherwise } from '../../functions/builtIn/fitState';
 import { fixedArea } from '../../functions/builtIn/text';
 import type { Table, WorkingCell, Workings } from '../../functions/builtIn/workings';
 import type { CalculatedBook, SheetModel } from '../engine/engine';
-import type { NewSheet, SheetCell } from './sheetPart';
+import type { NewSheet, SheetCell } from './newSheet';
 
 type Rows = readonly (readonly WorkingCell[])[];
 
@@ -101,23 +102,18 @@ export class WorkingsSheet {
       lines[row - 1] = [{ heading: title }];
       rows.forEach((line, r) => {
         lines[row + r] = line.map((cell, column) =>
-          isFormula(cell)
-            ? { ...cell, value: calculated.shown(this.name, row + r, column) }
-            : isNote(line, column)
-              ? `  ${cell as string}`
-              : cell,
+          isFormula(cell) ? { ...cell, value: calculated.shown(this.name, row + r, column) } : cell,
         );
       });
     }
-    return { name: this.name, rows: Array.from(lines, (line) => line ?? []), widths };
+    return { name: this.name, rows: Array.from(lines, (line) => line ?? []), columns, warnings };
   }
 }
 
-const widths = Array.from({ length: 10 }, () => 22);
+const warnings = [fitsOtherwise, startsOtherwise];
 
-/** Words after the one number of a line, which would run into it. */
-const isNote = (line: readonly WorkingCell[], column: number): boolean =>
-  line.length === 2 && column === 1 && typeof line[0] !== 'string' && typeof line[1] === 'string';
+/** Wide enough for nine digits: a spreadsheet rounds what it shows to the width. */
+const columns = Array.from({ length: 10 }, () => ({ width: 13 }));
 
 const isFormula = (cell: WorkingCell): cell is { readonly formula: string } =>
   typeof cell === 'object' && cell !== null && 'formula' in cell;

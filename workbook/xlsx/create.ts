@@ -35,7 +35,7 @@ export function createWorkbook(book: BookModel, calculated: CalculatedBook): Uin
     ...Object.fromEntries(
       sheets.map(({ xml }, place) => [`xl/worksheets/sheet${place + 1}.xml`, head + xml]),
     ),
-    'xl/styles.xml': head + looks.xml(),
+    'xl/styles.xml': head + looks.xml(main),
     ...(spills ? { 'xl/metadata.xml': metadataPart } : {}),
   };
   const entries = Object.entries(files).map(

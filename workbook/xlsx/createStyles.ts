@@ -4,8 +4,6 @@ import { xmlAttribute } from './xml';
 
 type Look = Pick<CellModel, 'numberFormat' | 'bold' | 'wrap'>;
 
-const main = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
-
 /** Formats of one's own are numbered from here (ISO/IEC 29500-1, 18.8.30). */
 const firstOwnFormat = 164;
 
@@ -31,7 +29,8 @@ export class LookTable {
     return this.looks.push(look) - 1;
   }
 
-  xml(): string {
+  /** @param main the namespace of the workbook that it is for */
+  xml(main: string): string {
     const formats = this.formats.map(
       (code, n) => `<numFmt numFmtId="${firstOwnFormat + n}" formatCode="${xmlAttribute(code)}"/>`,
     );

@@ -1,9 +1,10 @@
 /** What was typed since a workbook was opened, and the number formats given since, put into its own package. */
 import { CellError } from '../../functions/cell';
 import type { BookModel, CellModel, SheetModel } from '../engine/engine';
-import { AddedNumberFormats, plainNumber } from './addNumberFormats';
+import { AddedNumberFormats } from './addNumberFormats';
 import { dropCalcChain } from './calcChain';
 import { dynamicArrayMark } from './dynamicArrays';
+import { plainNumber } from './formatCodes';
 import { findParts, readXml } from './parts';
 import { restyleSheet, type Restyling } from './restyleSheet';
 import { retypeSheet, type Change } from './retypeSheet';
