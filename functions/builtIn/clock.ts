@@ -15,23 +15,34 @@ export function sayClock(given: Given): Said {
   return isRow ? { cell: (_, column) => cell!(column, 0) } : { cell, whole };
 }
 
-/** @param mayPassMidnight where no time is a duration */
-function elapsed(given: Given, times: Readings, alike: readonly string[], mayPassMidnight: boolean): Said {
+/** From here on a number of days is a date. */
+const firstDate = '366';
+
+/** @param areClocks where no time is a duration */
+function elapsed(given: Given, times: Readings, alike: readonly string[], areClocks: boolean): Said {
   const unit = given.word('unit');
   const seconds = convertUnit(1, unit.value, 's', 'unit');
   const inUnit = (days: string): string =>
     `ROUND(${days}*86400,6)${seconds === 1 ? '' : `/${numberText(seconds)}`}`;
   const always = [...alike, ...times.none('<', '0'), ...unit.holds];
-  // from 366 days on, a number is a date
-  const noDates = times.none('>=', '366');
+  const noDates = times.none('>=', firstDate);
   if (!given.has('start')) return eachReading(times, [...always, ...noDates], inUnit);
   if (!given.isWord('start', 'first')) throw new NotSaid('start is not "first"');
   if (times.rows > 1 && times.columns > 1) throw new NotSaid('times are a block');
-  const first = times.first;
-  if (!mayPassMidnight) {
-    const since = (time: string): string => inUnit(`(${time}-${first.text})`);
-    return eachReading(times, [...always, ...noDates, ...first.holds], since);
-  }
+  const { first, today } = times;
+  const areDates = today.length > 0 && today.every((time) => time >= Number(firstDate));
+  if (!areDates && areClocks && today.every((time) => time < 1)) return pastMidnight(times, always, inUnit);
+  // clock times of a day and more pass no midnight, as long as there are any
+  const isLong = areClocks ? times.none('>=', '1').map((none) => `NOT(${none})`) : [];
+  const kind = areDates ? times.none('<', firstDate) : [...noDates, ...isLong];
+  return eachReading(times, [...always, ...kind, ...first.holds], (time) =>
+    inUnit(`(${time}-${first.text})`),
+  );
+}
+
+/** A step back by more than half a day starts the next one. */
+function pastMidnight(times: Readings, always: readonly string[], inUnit: (days: string) => string): Said {
+  const { first } = times;
   const count = times.rows * times.columns;
   const steps = count > 1 ? `${times.without('first')}-${times.without('last')}` : '0';
   const holds = [

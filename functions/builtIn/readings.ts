@@ -59,6 +59,11 @@ export class Readings {
     return { row, column, text: fixedArea(one), holds: [`ISNUMBER(${fixedArea(one)})`, ...none] };
   }
 
+  /** The numbers among them on the day of the copy. */
+  get today(): number[] {
+    return this.argument.cells?.flat().filter((cell) => typeof cell === 'number') ?? [];
+  }
+
   /** All of them, where they stand. */
   get whole(): string {
     const { area, text } = this.argument;

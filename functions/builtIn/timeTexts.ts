@@ -4,8 +4,9 @@ import type { CellValue } from '../cell';
 import type { Given } from './given';
 import { Readings } from './readings';
 import { NotSaid } from './said';
-import { mostParts, numberOf, partOf, timeForm, withoutFigures, type TimeForm } from './timeForm';
-import { fixedArea, numberText, quoted } from './text';
+import { timeForm, type TimeForm } from './timeForm';
+import { numberOf, partOf, withoutFigures } from './timeParts';
+import { fixedArea, quoted } from './text';
 import { headingRow, type Table, type WorkingCell } from './workings';
 
 export interface TimeTexts {
@@ -18,9 +19,10 @@ export interface TimeTexts {
   readonly isRow: boolean;
 }
 
-/** Columns of the table. */
-const [reading, text, form, firstPart] = [0, 1, 2, 3];
-const [days, isRead] = [firstPart + mostParts, firstPart + mostParts + 1];
+/** Columns of the table; the numbers of a text come last. */
+const [reading, text, form, days, isRead, firstPart] = [0, 1, 2, 3, 4, 5];
+
+const ordinals = ['first', 'second', 'third', 'fourth', 'fifth', 'sixth'];
 
 /** Whether any of the times is such a text. */
 export const hasTimeTexts = (given: Given): boolean =>
@@ -41,18 +43,10 @@ export function timeTexts(given: Given): TimeTexts {
     const cell = fixedArea({ ...area, row, column, rows: 1, columns: 1 });
     return { formula: `IF(OR(ISTEXT(${cell}),ISNUMBER(${cell}),ISERROR(${cell})),${cell},"")` };
   };
+  const numbers = ordinals.slice(0, Math.max(...forms.map((one) => one?.size ?? 0)));
   const title = area ? fixedArea(area) : all.join('; ');
   const table = given.workings.table(`Times as text: ${title}`, (own) => [
-    headingRow(
-      'reading',
-      'as text',
-      'without figures',
-      'first',
-      'second',
-      'third',
-      'days',
-      '1 where it can be read',
-    ),
+    headingRow('reading', 'as text', 'without figures', 'days', '1 where it can be read', ...numbers),
     ...forms.map((one, n) => row(own, n + 1, source(n), one)),
   ]);
   const origin = table.area(all.length, 1);
@@ -62,7 +56,7 @@ export function timeTexts(given: Given): TimeTexts {
     days: new Readings({ text: fixedArea(own), area: own, cells: values }, 'times'),
     holds: [`COUNTIF(${table.range(1, isRead, all.length)},1)=${all.length}`],
     isRow: cells.length === 1 && all.length > 1,
-    areClocks: forms.every((one) => one === undefined || one.isClock),
+    areClocks: forms.every((one) => one === undefined || one.kind === 'clock'),
   };
 }
 
@@ -76,30 +70,28 @@ function row(own: Table, n: number, source: WorkingCell, one: TimeForm | undefin
     source,
     { formula: `IF(ISTEXT(${at(reading)}),TRIM(SUBSTITUTE(${at(reading)},",",".")),"")` },
     { formula: withoutFigures(at(text)) },
-    ...Array.from({ length: mostParts }, (_, k): WorkingCell =>
-      one && k < one.seconds.length ? { formula: partOf(at(text), one, k) } : null,
-    ),
     {
       formula: `IF(${isTime},${inDays},IF(OR(ISNUMBER(${at(reading)}),ISERROR(${at(reading)})),${at(reading)},""))`,
     },
     { formula: `IF(${isTime},${one ? canBeRead(at, one) : '0'},1)` },
+    ...(one ? placesOf(one).map((k) => ({ formula: partOf(at(text), one, k) })) : []),
   ];
 }
 
 type At = (column: number) => string;
 
-const partsOf = (at: At, { seconds }: TimeForm): string[] => seconds.map((_, k) => at(firstPart + k));
+const placesOf = ({ size }: TimeForm): number[] => Array.from({ length: size }, (_, k) => k);
 
-function daysOf(at: At, one: TimeForm): string {
-  const seconds = partsOf(at, one).map((part, k) => `${numberOf(part)}*${numberText(one.seconds[k])}`);
-  return `IF(${at(isRead)}=1,(${seconds.join('+')})/86400,"")`;
-}
+const numbersOf = (at: At, one: TimeForm): string[] => placesOf(one).map((k) => numberOf(at(firstPart + k)));
 
-/** 1 where the text has kept its form, and a clock's minutes and seconds are below 60. */
+const daysOf = (at: At, one: TimeForm): string =>
+  `IF(${at(isRead)}=1,${one.days(numbersOf(at, one), at(text))},"")`;
+
+/** 1 where the text has kept its form, and its numbers make a time. */
 function canBeRead(at: At, one: TimeForm): string {
-  const parts = partsOf(at, one);
   const isKept = `OR(${one.spellings.map((spelling) => `EXACT(${at(form)},${quoted(spelling)})`).join(',')})`;
-  const below = one.isClock ? parts.slice(1).map((part) => `${numberOf(part)}<60`) : [];
-  const isWithin = below.length > 0 ? `IF(AND(${below.join(',')}),1,0)` : '1';
-  return `IF(AND(${isKept},${parts.map((part) => `${part}<>""`).join(',')}),${isWithin},0)`;
+  const areThere = placesOf(one).map((k) => `${at(firstPart + k)}<>""`);
+  const within = one.within(numbersOf(at, one));
+  const isWithin = within.length > 0 ? `IF(AND(${within.join(',')}),1,0)` : '1';
+  return `IF(AND(${isKept},${areThere.join(',')}),${isWithin},0)`;
 }

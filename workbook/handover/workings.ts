@@ -106,14 +106,17 @@ export class WorkingsSheet {
         );
       });
     }
-    return { name: this.name, rows: Array.from(lines, (line) => line ?? []), columns, warnings };
+    const rows = Array.from(lines, (line) => line ?? []);
+    const widest = rows.reduce((most, line) => Math.max(most, line.length), 0);
+    const columns = Array.from({ length: widest }, () => ({ width }));
+    return { name: this.name, rows, columns, warnings };
   }
 }
 
 const warnings = [fitsOtherwise, startsOtherwise];
 
-/** Wide enough for nine digits: a spreadsheet rounds what it shows to the width. */
-const columns = Array.from({ length: 10 }, () => ({ width: 13 }));
+/** Enough for six digits with their exponent. */
+const width = 13;
 
 const isFormula = (cell: WorkingCell): cell is { readonly formula: string } =>
   typeof cell === 'object' && cell !== null && 'formula' in cell;

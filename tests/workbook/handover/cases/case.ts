@@ -11,7 +11,7 @@ export interface Case {
   readonly unwatched?: true;
   /** The change is none of those that a flag is raised for. */
   readonly flagStaysDown?: true;
-  /** What PACE makes of that: an error, or numbers as before. */
+  /** What the copy makes of that: an error, or what PACE makes of it. */
   readonly then?: 'error';
 }
 

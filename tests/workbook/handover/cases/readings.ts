@@ -169,9 +169,86 @@ export const readings: Cases = {
     changed: { A2: '12 drops' },
     then: 'error',
   },
-  'Clock times with pm': {
-    typed: { ...column('A1', ['11:15 am', '1:15 pm']), C1: '=PACE.CLOCK(A1:A2,"min","first")' },
+  'Clock times with am and pm': {
+    typed: {
+      ...column('A1', ['11:15 am', '1:15 pm', null, '1:15:30.5 PM']),
+      ...column('B1', ['11:58p.m.', '12:03a.m.']),
+      C1: '=PACE.CLOCK(A1:A2,"min","first")',
+      D1: '=PACE.CLOCK(A1:A4)',
+      E1: '=PACE.CLOCK(B1:B2,"s","first")',
+    },
+    becomes: 'live',
+    changed: { A1: '12:20 am', A2: '2:25 am', A4: '12:00:01 AM', B1: '11:59p.m.' },
+  },
+  'Clock times with pm, 13 hours': {
+    typed: { ...column('A1', ['11:15 am', '1:15 pm']), C1: '=PACE.CLOCK(A1:A2,"min")' },
+    becomes: 'live',
+    changed: { A2: '13:15 pm' },
+    then: 'error',
+  },
+  'Clock times that lose their pm': {
+    typed: { ...column('A1', ['11:15 am', '1:15 pm']), C1: '=PACE.CLOCK(A1:A2,"min")' },
+    becomes: 'live',
+    // the function itself could read this; a copy keeps to the form of its day
+    changed: { A2: '13:15' },
+    then: 'error',
+  },
+  'Times with primes': {
+    typed: {
+      ...column('A1', ['5\'30"', "6' 15.5''", '7′', '8′ 20″', "9'05", '12 min']),
+      C1: '=PACE.CLOCK(A1:A6)',
+      D1: '=PACE.CLOCK(A1:A6,"min","first")',
+    },
+    becomes: 'live',
+    changed: { A1: '4\'02.25"', A2: "6' 16''", A3: '75′', A5: "10'45" },
+  },
+  'Times with primes, three figures': {
+    typed: { ...column('A1', ['5\'30"', '6\'15"']), C1: '=PACE.CLOCK(A1:A2)' },
+    becomes: 'live',
+    changed: { A2: '6\'150"' },
+    then: 'error',
+  },
+  'Times with a date': {
+    typed: {
+      ...column('A1', ['2026-02-28 23:50', '2026-03-01T00:10:30.5Z', null, '2026-03-02', 46084.25]),
+      ...column('B1', ['2026-03-02 11:15 am', '2026-03-02 1:15 pm']),
+      D1: '=PACE.CLOCK(A1:A5,"h","first")',
+      E1: '=PACE.CLOCK(B1:B2,"min","first")',
+    },
+    becomes: 'live',
+    changed: { A1: '2024-02-29 00:00', A2: '2026-03-01T01:10:30Z', A5: 46085.5, B2: '2026-03-03 12:15 am' },
+  },
+  'Times with a date that is none': {
+    typed: {
+      ...column('A1', ['2026-02-28 23:50', '2026-03-01 00:10']),
+      C1: '=PACE.CLOCK(A1:A2,"h","first")',
+    },
+    becomes: 'live',
+    changed: { A2: '2026-02-29 00:10' },
+    then: 'error',
+  },
+  'Times of which one loses its date': {
+    typed: {
+      ...column('A1', ['2026-02-28 23:50', '2026-03-01 00:10']),
+      C1: '=PACE.CLOCK(A1:A2,"h","first")',
+    },
+    becomes: 'live',
+    changed: { A2: 0.5 },
+    then: 'error',
+  },
+  'Dates and long clock times as numbers': {
+    typed: {
+      ...column('A1', [46083.5, 46083.75, null, 46085.125]),
+      ...column('B1', [0.5, 1.25, 3.0625]),
+      D1: '=PACE.CLOCK(A1:A4,"h","first")',
+      E1: '=PACE.CLOCK(B1:B3,"h","first")',
+    },
+    becomes: 'live',
+    changed: { A2: 46084, A3: 46084.5, B1: 0.25 },
+  },
+  'Times in words that no formula reads': {
+    typed: { ...column('A1', ['1 h, 5 min', '1 h, 15 min']), C1: '=PACE.CLOCK(A1:A2,"min","first")' },
     becomes: 'frozen',
-    changed: { A2: '2:15 pm' },
+    changed: { A2: '1 h, 16 min' },
   },
 };
