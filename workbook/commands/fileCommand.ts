@@ -3,7 +3,7 @@ import { cellName, quotedSheet } from '../../functions/address';
 import type { CellError, ErrorCode } from '../../functions/cell';
 import type { CalculatedBook } from '../engine/engine';
 import { NotAWorkbook } from '../xlsx/notAWorkbook';
-import { FileTrouble, readInput, requireOutput, writeWhole } from './files';
+import { FileTrouble, readInput, requireNameOfKind, requireOutput, writeWhole } from './files';
 
 export const exitCode = { done: 0, someErrors: 1, notDone: 2 } as const;
 
@@ -38,6 +38,7 @@ export async function runFileCommand(
     const bytes = await readInput(input);
     await requireOutput(output, input);
     const { bytes: made, summary, details = [], errors } = await make(bytes);
+    requireNameOfKind(output, made);
     await writeWhole(output, made);
     for (const line of errors) process.stderr.write(`${line}\n`);
     process.stdout.write([`${output}: ${summary}`, ...details, ''].join('\n'));

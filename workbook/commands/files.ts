@@ -2,6 +2,7 @@
 import { randomUUID } from 'node:crypto';
 import { open, readFile, realpath, rename, rm, stat } from 'node:fs/promises';
 import { basename, dirname, join, resolve } from 'node:path';
+import { kindNamed, kindOf } from '../xlsx/kinds';
 
 /** The file cannot be used; the message says which and why. */
 export class FileTrouble extends Error {
@@ -27,6 +28,15 @@ export async function requireOutput(output: string, input: string): Promise<void
   if (there && (await isSame(output, input))) {
     throw new FileTrouble(`OUT must be another file than IN, which is never changed: both are ${output}`);
   }
+}
+
+/** @throws FileTrouble where Excel would not open `made` under that name */
+export function requireNameOfKind(output: string, made: Uint8Array): void {
+  const [own, given] = [kindOf(made), kindNamed(output)];
+  if (own && given && own !== given)
+    throw new FileTrouble(
+      `OUT must end in ${own.extension}, as its kind of workbook does, or Excel will not open it: got ${output}`,
+    );
 }
 
 /** One file can go by two names: a link, another spelling of its path. */

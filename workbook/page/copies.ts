@@ -1,4 +1,5 @@
 import type { WorkbookFiles } from '../../taskpane/port';
+import { kindOf, plainKind } from '../xlsx/kinds';
 import type { Documents } from './documents';
 import { saveFile } from './files';
 
@@ -8,10 +9,11 @@ export const pageFiles = (documents: Documents): WorkbookFiles => ({
   verb: 'Save the copy…',
   read: () => documents.file(),
   async give(bytes) {
-    const name = await saveFile(copyName(documents.name), async () => bytes);
+    const name = await saveFile(copyName(documents.name, kindOf(bytes)), async () => bytes);
     return name && `the copy is saved as ${name}`;
   },
 });
 
-/** @example copyName('Week 3.xlsx') // 'Week 3 handed over.xlsx' */
-export const copyName = (name: string): string => `${name.replace(/\.xls[xm]$/i, '')} handed over.xlsx`;
+/** @example copyName('Week 3.xlsm', kindOf(bytes)) // 'Week 3 handed over.xlsm' */
+export const copyName = (name: string, { extension } = plainKind): string =>
+  `${name.replace(/\.xl\w+$/i, '')} handed over${extension}`;

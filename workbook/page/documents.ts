@@ -9,6 +9,8 @@ export interface FileFormat {
   /** @throws an Error whose words say what is wrong with the file */
   read(bytes: Uint8Array): BookModel;
   create(book: BookModel, calculated: CalculatedBook): Uint8Array;
+  /** What the updated file can be called: one that has to be made anew is an .xlsx. */
+  nameOf(name: string, before: BookModel, now: BookModel): string;
   /** The original with what has changed since, and everything else in it as it was. */
   update(original: Uint8Array, before: BookModel, now: BookModel, calculated: CalculatedBook): Updated;
 }
@@ -108,7 +110,9 @@ export function documentsOf(
   /** @returns whether it was saved */
   async function save(): Promise<boolean> {
     let missing: string | undefined;
-    const name = await saveFile(shown.name, async () => {
+    const { original } = shown;
+    const suggested = original ? format.nameOf(shown.name, original.book, grid.book()) : shown.name;
+    const name = await saveFile(suggested, async () => {
       const file = await fileNow();
       missing = file.missing;
       return file.bytes;

@@ -1,6 +1,7 @@
 /** Workbooks as .xlsx files. */
 import type { BookModel, CellModel } from '../engine/engine';
 import { createWorkbook } from '../xlsx/create';
+import { plainKind } from '../xlsx/kinds';
 import { patchWorkbook } from '../xlsx/patch';
 import { readWorkbook } from '../xlsx/read';
 import { typeCells } from '../xlsx/typeCells';
@@ -9,6 +10,8 @@ import type { FileFormat } from './documents';
 export const fileFormat: FileFormat = {
   read: readWorkbook,
   create: createWorkbook,
+  nameOf: (name, before, now) =>
+    hasSameSheets(before, now) ? name : name.replace(/\.xl\w+$/i, plainKind.extension),
   update(original, before, now, calculated) {
     if (!hasSameSheets(before, now)) {
       return {

@@ -1,5 +1,6 @@
 /** Files in and out through the browser. */
 import { h } from '../../taskpane/h';
+import { kindNamed, plainKind, workbookKinds } from '../xlsx/kinds';
 
 export interface OpenedFile {
   readonly name: string;
@@ -8,7 +9,8 @@ export interface OpenedFile {
 
 /** Asks for one workbook. @returns `null` when the person thought better of it */
 export function chooseFile(): Promise<OpenedFile | null> {
-  const input = h('input', { type: 'file', accept: `.xlsx,${mediaType}` });
+  const accept = workbookKinds.flatMap(({ extension, mediaType }) => [extension, mediaType]).join(',');
+  const input = h('input', { type: 'file', accept });
   return new Promise((resolve, reject) => {
     input.oncancel = () => resolve(null);
     input.onchange = () => {
@@ -22,8 +24,6 @@ export function chooseFile(): Promise<OpenedFile | null> {
     input.click();
   });
 }
-
-const mediaType = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
 
 /** The part of the file picker that is used; not every browser has one. */
 interface SavePicker {
@@ -46,11 +46,14 @@ export async function saveFile(
   bytes: () => Promise<Uint8Array>,
 ): Promise<string | null> {
   const { showSaveFilePicker } = window as SavePicker;
+  const { extension, mediaType } = kindNamed(suggestedName) ?? plainKind;
+  const blobOf = (content: Uint8Array): Blob =>
+    new Blob([content as Uint8Array<ArrayBuffer>], { type: mediaType });
   if (!showSaveFilePicker) return download(suggestedName, blobOf(await bytes()));
   try {
     const place = await showSaveFilePicker.call(window, {
       suggestedName,
-      types: [{ description: 'Workbook', accept: { [mediaType]: ['.xlsx'] } }],
+      types: [{ description: 'Workbook', accept: { [mediaType]: [extension] } }],
     });
     const content = blobOf(await bytes()); // before the file is opened for writing, which empties it
     const file = await place.createWritable();
@@ -62,8 +65,6 @@ export async function saveFile(
     throw error;
   }
 }
-
-const blobOf = (bytes: Uint8Array): Blob => new Blob([bytes as Uint8Array<ArrayBuffer>], { type: mediaType });
 
 function download(name: string, content: Blob): string {
   const address = URL.createObjectURL(content);

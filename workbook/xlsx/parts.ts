@@ -35,10 +35,11 @@ export function elementsIn(pack: Package, path: string): XmlElement[] {
 
 /** @throws NotAWorkbook where the package is of another kind */
 export function findParts(pack: Package): WorkbookParts {
-  if (!pack.has('_rels/.rels')) throw new NotAWorkbook('the file is a zip package, but not a workbook');
   const main = relationshipsOf(pack, '').find(({ kind }) => kind === 'officeDocument');
   if (!main || !pack.has(main.path))
     throw new NotAWorkbook('the file is an Office package without a workbook in it');
+  if (main.path.endsWith('.bin'))
+    throw new NotAWorkbook('the file is a binary workbook, .xlsb: save it as .xlsx first');
   const root = elementsIn(pack, main.path);
   if (root[0]?.name !== 'workbook')
     throw new NotAWorkbook(`the file is not a workbook: it holds a ${root[0]?.name ?? 'nothing'}`);

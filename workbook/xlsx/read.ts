@@ -3,6 +3,7 @@ import type { BookModel, DefinedName } from '../engine/engine';
 import { namesReachingOutside } from './outside';
 import { typedFormula } from './formulaText';
 import { NotAWorkbook } from './notAWorkbook';
+import { refuseOtherKinds, refuseOtherPackages } from './otherKinds';
 import { elementsIn, findParts, readXml } from './parts';
 import { readSheet } from './readSheet';
 import { readSharedStrings } from './sharedStrings';
@@ -15,7 +16,10 @@ import { Package } from './zip';
 export function readWorkbook(bytes: Uint8Array): BookModel {
   refuseOtherKinds(bytes);
   const pack = Package.open(bytes);
+  refuseOtherPackages(pack);
   const parts = findParts(pack);
+  if (parts.sheets.length === 0)
+    throw new NotAWorkbook('the workbook has no sheet with cells: there is nothing to calculate');
   const names = definedNames(pack, parts.workbook);
   const context = {
     outsideNames: namesReachingOutside(names),
@@ -31,19 +35,6 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
     names,
     ...(tables.length > 0 ? { tables } : {}),
   };
-}
-
-/** The first bytes tell the kind; the name of a file can lie. */
-function refuseOtherKinds(bytes: Uint8Array): void {
-  const starts = (...head: number[]): boolean => head.every((byte, place) => bytes[place] === byte);
-  if (bytes.length === 0) throw new NotAWorkbook('the file is empty');
-  if (starts(0xd0, 0xcf, 0x11, 0xe0)) {
-    throw new NotAWorkbook(
-      'the file is protected with a password, or in the old .xls form: save it as .xlsx without a password first',
-    );
-  }
-  if (!starts(0x50, 0x4b))
-    throw new NotAWorkbook('the file is not an .xlsx workbook: that is a zip package, and this is not');
 }
 
 /** Names that Excel keeps for itself (print areas, filters) are no formulas of anybody's. */

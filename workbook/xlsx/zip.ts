@@ -5,6 +5,7 @@
 import { deflateSync, inflateSync } from 'fflate';
 import { crc32 } from './crc32';
 import { NotAWorkbook } from './notAWorkbook';
+import { directoryAt, measuresOf } from './zip64';
 
 interface Entry {
   readonly name: string;
@@ -83,14 +84,11 @@ export class Package {
 function readEntries(bytes: Uint8Array): Entry[] {
   const view = new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength);
   try {
-    const end = endOfDirectory(view);
-    const count = view.getUint16(end + 10, true);
-    let at = view.getUint32(end + 16, true);
-    return Array.from({ length: count }, () => {
-      const entry = readEntry(bytes, view, at);
-      at += entry.central.length;
-      return entry;
-    });
+    const { count, start } = directoryAt(view, endOfDirectory(view));
+    const entries: Entry[] = [];
+    for (let at = start; entries.length < count; at += centralLength(view, at))
+      entries.push(readEntry(bytes, view, at));
+    return entries;
   } catch (error) {
     if (error instanceof RangeError) throw new NotAWorkbook(broken);
     throw error;
@@ -105,28 +103,28 @@ function endOfDirectory(view: DataView): number {
   throw new NotAWorkbook(broken);
 }
 
+const centralLength = (view: DataView, at: number): number =>
+  length.central + [28, 30, 32].reduce((sum, field) => sum + view.getUint16(at + field, true), 0);
+
 function readEntry(bytes: Uint8Array, view: DataView, at: number): Entry {
   if (view.getUint32(at, true) !== signature.central) throw new NotAWorkbook(broken);
   const flags = view.getUint16(at + 8, true);
   if (flags & flag.encrypted)
     throw new NotAWorkbook('the file is protected with a password: save it without one first');
-  const nameLength = view.getUint16(at + 28, true);
-  const tail = nameLength + view.getUint16(at + 30, true) + view.getUint16(at + 32, true);
-  const name = new TextDecoder().decode(
-    bytes.subarray(at + length.central, at + length.central + nameLength),
-  );
-  const local = view.getUint32(at + 42, true);
+  const nameEnd = at + length.central + view.getUint16(at + 28, true);
+  const name = new TextDecoder().decode(bytes.subarray(at + length.central, nameEnd));
+  const whole = bytes.subarray(at, at + centralLength(view, at));
+  const { size, packedSize, offset: local, central } = measuresOf(whole);
   if (view.getUint32(local, true) !== signature.local) throw new NotAWorkbook(broken);
   const start = local + length.local + view.getUint16(local + 26, true) + view.getUint16(local + 28, true);
-  const packedSize = view.getUint32(at + 20, true);
   if (start + packedSize > bytes.length) throw new NotAWorkbook(broken);
   return {
     name,
-    central: bytes.subarray(at, at + length.central + tail),
+    central,
     flags,
     method: view.getUint16(at + 10, true),
     checksum: view.getUint32(at + 16, true),
-    size: view.getUint32(at + 24, true),
+    size,
     packed: bytes.subarray(start, start + packedSize),
   };
 }

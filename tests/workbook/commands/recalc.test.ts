@@ -8,7 +8,7 @@ import {
   writeFileSync,
 } from 'node:fs';
 import { dirname } from 'node:path';
-import { packageOf, rowsOf, worksheet } from '../xlsx/package';
+import { packageOf, rowsOf, withMacros, worksheet } from '../xlsx/package';
 import { buildCommands, recalc, temporaryFolder } from './command';
 
 const good = packageOf({
@@ -113,9 +113,9 @@ describe('not done', () => {
   test.each<[string, string | Uint8Array, RegExp]>([
     ['cut off', good.slice(0, 300), /cut off or damaged/],
     [
-      'with a password',
+      'of an older program',
       new Uint8Array([0xd0, 0xcf, 0x11, 0xe0, 0xa1, 0xb1, 0x1a, 0xe1, 0, 0]),
-      /password.*\.xls/,
+      /not an \.xlsx workbook: it is a file of an older Office program/,
     ],
     ['of text', 't,V\n0,0\n', /not an \.xlsx/],
     ['empty', '', /empty/],
@@ -138,6 +138,13 @@ describe('not done', () => {
     expectRefusal([input, folder.path('nowhere/out.xlsx')], /folder of .* does not exist/);
     mkdirSync(folder.path('out.xlsx'));
     expectRefusal([input, folder.path('out.xlsx')], /is not a file/);
+  });
+
+  test('OUT by a name under which Excel would not open it', () => {
+    const input = file('in.xlsx', withMacros(good));
+    expectRefusal([input, folder.path('out.xlsx')], /OUT must end in \.xlsm, .*: got .*out\.xlsx/);
+    expectRefusal([file('in.xlsm', good), folder.path('out.xlsm')], /OUT must end in \.xlsx/);
+    expect(recalc(input, folder.path('out.xlsm')).code).toBe(0);
   });
 
   test('a refused calculation leaves an old OUT alone', () => {

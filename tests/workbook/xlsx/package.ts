@@ -66,6 +66,19 @@ export function zipped(files: Readonly<Record<string, string | Uint8Array>>): Ui
   return zipSync(Object.fromEntries(entries) as Zippable);
 }
 
+/** The same as a workbook with macros: an .xlsm. */
+export const withMacros = (bytes: Uint8Array): Uint8Array =>
+  zipped(
+    Object.fromEntries(
+      Object.entries(partsOf(bytes)).map(([path, part]) => [
+        path,
+        path === '[Content_Types].xml'
+          ? strFromU8(part).replace(`${types}.sheet.main`, 'application/vnd.ms-excel.sheet.macroEnabled.main')
+          : part,
+      ]),
+    ),
+  );
+
 export const partsOf = (bytes: Uint8Array): Record<string, Uint8Array> => unzipSync(bytes);
 
 export const textOf = (bytes: Uint8Array, path: string): string => strFromU8(partsOf(bytes)[path]);
