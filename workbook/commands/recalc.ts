@@ -17,7 +17,7 @@ Exit code  0  done
 
 void runFileCommand(process.argv.slice(2), usage, async (input) => {
   const { bytes, formulas, kept, errors } = await recalculate(input);
-  const others = `${counted(kept, 'formula reaches', 'formulas reach')} another workbook or add-in and keep${kept === 1 ? 's its value' : ' their values'}`;
+  const others = `${counted(kept, 'formula keeps its value', 'formulas keep their values')}, since another workbook or add-in, or dates from 1904, would be needed`;
   return {
     bytes,
     summary: `${counted(formulas, 'formula', 'formulas')} calculated${kept > 0 ? `; ${others}` : ''}`,

@@ -7,7 +7,7 @@ import { readWorkbook } from '../xlsx/read';
 export interface Recalculated {
   readonly bytes: Uint8Array;
   readonly formulas: number;
-  /** Formulas that reach another workbook or add-in and keep what the file last showed. */
+  /** Formulas that need another workbook or add-in, or dates from 1904, and keep what the file last showed. */
   readonly kept: number;
   /** Cells that show an error as a result, in reading order. */
   readonly errors: CalculatedBook['errors'];

@@ -33,12 +33,19 @@ export interface CellModel {
   readonly value: CellValue;
   /** As typed, without `=`: `PACE.TANGENT(A2:A9,B2:B9,30)`. */
   readonly formula?: string;
-  /** One that reaches another workbook or add-in, neither of which is at hand: the value is what the file last showed. */
+  /**
+   * One that needs what is not at hand (another workbook or add-in, a calendar from 1904): the value is what the
+   * file last showed.
+   */
   readonly outsideFormula?: string;
   readonly numberFormat?: string;
   readonly bold?: boolean;
   readonly wrap?: boolean;
 }
+
+/** Whether a cell has nothing but a look. */
+export const isEmptyCell = ({ value, formula }: Pick<CellModel, 'value' | 'formula'>): boolean =>
+  value === null && formula === undefined;
 
 /** A formula's outcome after a calculation. */
 export interface Calculated {

@@ -60,7 +60,7 @@ const handOutside = (original: string, position: Position, value: CellValue): Ha
   functions: functionsIn(original),
   area: { row: position.row, column: position.column, rows: 1, columns: 1 },
   values: [[value]],
-  why: 'it reaches another workbook or add-in',
+  why: 'it needs another workbook or add-in, or dates from 1904',
 });
 
 /** What is the same for all formulas of a book. */

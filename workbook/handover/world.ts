@@ -2,7 +2,7 @@
 import { areaName, parseArea, type Area } from '../../functions/address';
 import type { CellRange } from '../../functions/cell';
 import { isFunction, isOperator, isRange, isReference, type Token } from '@borgar/fx/xlsx';
-import type { BookModel, CalculatedBook } from '../engine/engine';
+import { isEmptyCell, type BookModel, type CalculatedBook } from '../engine/engine';
 import { plainReferences } from '../engine/tables';
 import { applyEdits, type Edit } from '../xlsx/edits';
 import { callsOurs } from '../xlsx/formulaText';
@@ -126,7 +126,9 @@ export class World {
     if (first === undefined) return undefined;
     const named = parseArea(`${place}A1`)?.sheet;
     const cells = this.book.sheets.find(({ name }) => name === (named ?? sheet))?.cells ?? [];
-    const rows = cells.reduce((most, { row }) => Math.max(most, row + 1), 1);
+    const rows = cells
+      .filter((cell) => !isEmptyCell(cell))
+      .reduce((most, { row }) => Math.max(most, row + 1), 1);
     return parseArea(`${place}${first}1:${last}${rows}`);
   }
 }

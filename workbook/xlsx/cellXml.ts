@@ -74,8 +74,12 @@ export function formulaXml(
   return `<${prefix}f${tag.join('')}>${xmlText(text)}</${prefix}f>`;
 }
 
-/** What the file shows for the cell now. */
-export function filedValue(cell: ScannedCell, sharedStrings: readonly string[]): CellValue {
+/** What the file shows for the cell now. @param dayZero of a date that is spelled out, ms */
+export function filedValue(
+  cell: ScannedCell,
+  sharedStrings: readonly string[],
+  dayZero = daysFrom1900,
+): CellValue {
   const text = childOf(cell, 'v')?.text;
   switch (cell.attributes.t) {
     case 'str':
@@ -89,7 +93,7 @@ export function filedValue(cell: ScannedCell, sharedStrings: readonly string[]):
     case 'e':
       return new CellError((text ?? '#VALUE!') as ErrorCode);
     case 'd':
-      return text === undefined ? null : serialDate(text);
+      return text === undefined ? null : serialDate(text, dayZero);
     default:
       return text === undefined || text.trim() === '' ? null : finite(Number(text));
   }
@@ -100,10 +104,14 @@ const finite = (value: number): number | null => (Number.isFinite(value) ? value
 
 const day = 86_400_000; // ms
 
+/** Dates are counted in days, from either of two (ISO/IEC 29500-1, 18.17.4.1). */
+export const daysFrom1900 = Date.UTC(1899, 11, 30);
+export const daysFrom1904 = Date.UTC(1904, 0, 1);
+
 /** A date as the standard spells it, `2026-12-01T08:00:00`, in days as cells count them. */
-function serialDate(text: string): number | null {
+function serialDate(text: string, dayZero: number): number | null {
   const time = Date.parse(/T.*(?:Z|[+-]\d\d:\d\d)$|^[^T]*$/.test(text) ? text : `${text}Z`);
-  return finite((time - Date.UTC(1899, 11, 30)) / day);
+  return finite((time - dayZero) / day);
 }
 
 /** Whether a cell that shows `filed` need not be touched to show `value`. */

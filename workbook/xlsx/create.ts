@@ -5,13 +5,13 @@ import { createSheet } from './createSheet';
 import { LookTable } from './createStyles';
 import { metadataContentType, metadataPart, metadataRelationship } from './dynamicArrays';
 import { filedFormula } from './formulaText';
+import { transitional } from './namespaces';
 import { encodeXml, xmlAttribute, xmlText } from './xml';
 
 const head = '<?xml version="1.0" encoding="UTF-8" standalone="yes"?>\n';
 const package_ = 'http://schemas.openxmlformats.org/package/2006';
-const office = 'http://schemas.openxmlformats.org/officeDocument/2006/relationships';
 const spreadsheet = 'application/vnd.openxmlformats-officedocument.spreadsheetml';
-const main = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
+const { main, office } = transitional;
 
 /** The same workbook gives the same bytes, on any day: the zip's earliest date. */
 const noTime = new Date(1980, 0, 1);
@@ -30,13 +30,13 @@ export function createWorkbook(book: BookModel, calculated: CalculatedBook): Uin
         target: `worksheets/sheet${place + 1}.xml`,
       })),
       { type: `${office}/styles`, target: 'styles.xml' },
-      ...(spills ? [{ type: metadataRelationship, target: 'metadata.xml' }] : []),
+      ...(spills ? [{ type: metadataRelationship(office), target: 'metadata.xml' }] : []),
     ]),
     ...Object.fromEntries(
       sheets.map(({ xml }, place) => [`xl/worksheets/sheet${place + 1}.xml`, head + xml]),
     ),
     'xl/styles.xml': head + looks.xml(main),
-    ...(spills ? { 'xl/metadata.xml': metadataPart } : {}),
+    ...(spills ? { 'xl/metadata.xml': metadataPart(main) } : {}),
   };
   const entries = Object.entries(files).map(
     ([name, xml]) => [name, [encodeXml(xml), { mtime: noTime }]] as const,

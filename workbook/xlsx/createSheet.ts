@@ -5,9 +5,8 @@ import { isSpill, type CalculatedBook, type CellModel, type SheetModel } from '.
 import { cellXml, formulaXml } from './cellXml';
 import type { LookTable } from './createStyles';
 import { callsOurs, filedFormula } from './formulaText';
+import { transitional } from './namespaces';
 import { xmlText } from './xml';
-
-const main = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
 
 export interface CreatedSheet {
   readonly xml: string;
@@ -48,7 +47,7 @@ export function createSheet(sheet: SheetModel, calculated: CalculatedBook, looks
   const ordered = [...places.values()].sort((a, b) => a.row - b.row || a.column - b.column);
   return {
     // printed across, as wide as a page
-    xml: `<worksheet xmlns="${main}"><sheetPr><pageSetUpPr fitToPage="1"/></sheetPr>${dimension(ordered)}${columns(sheet)}<sheetData>${rows(ordered)}</sheetData><pageSetup orientation="landscape" fitToHeight="0"/></worksheet>`,
+    xml: `<worksheet xmlns="${transitional.main}"><sheetPr><pageSetUpPr fitToPage="1"/></sheetPr>${dimension(ordered)}${columns(sheet)}<sheetData>${rows(ordered)}</sheetData><pageSetup orientation="landscape" fitToHeight="0"/></worksheet>`,
     marked,
   };
 }

@@ -5,24 +5,23 @@
 import { applyEdits, insertion, type Edit } from './edits';
 import { elementsOf, encodeXml, localName, scanXml, tagStart } from './xml';
 import { addPart, relate } from './addPart';
+import { namespacesOf } from './namespaces';
 import { readXml, type WorkbookParts } from './parts';
 import type { Package } from './zip';
 
-const main = 'http://schemas.openxmlformats.org/spreadsheetml/2006/main';
 const arrays = 'http://schemas.microsoft.com/office/spreadsheetml/2017/dynamicarray';
 const extension = '{bdbb8cdc-fa1e-496e-a857-3c3f30c029c3}';
 
 export const metadataContentType =
   'application/vnd.openxmlformats-officedocument.spreadsheetml.sheetMetadata+xml';
-export const metadataRelationship =
-  'http://schemas.openxmlformats.org/officeDocument/2006/relationships/sheetMetadata';
+export const metadataRelationship = (office: string): string => `${office}/sheetMetadata`;
 
 const metadataType =
   '<metadataType name="XLDAPR" minSupportedVersion="120000" copy="1" pasteAll="1" pasteValues="1" merge="1" splitFirst="1" rowColShift="1" clearFormats="1" clearComments="1" assign="1" coerce="1" cellMeta="1"/>';
 const futureMetadata = `<futureMetadata name="XLDAPR" count="1"><bk><extLst><ext uri="${extension}"><xda:dynamicArrayProperties xmlns:xda="${arrays}" fDynamic="1" fCollapsed="0"/></ext></extLst></bk></futureMetadata>`;
 
 /** A whole part for a workbook that had none; its first entry is the one, so `cm="1"`. */
-export const metadataPart = `<?xml version="1.0" encoding="UTF-8" standalone="yes"?>
+export const metadataPart = (main: string): string => `<?xml version="1.0" encoding="UTF-8" standalone="yes"?>
 <metadata xmlns="${main}"><metadataTypes count="1">${metadataType}</metadataTypes>${futureMetadata}<cellMetadata count="1"><bk><rc t="1" v="0"/></bk></cellMetadata></metadata>`;
 
 /** @returns the `cm` of a cell that spills, with the part behind it put into the package where it was missing */
@@ -39,8 +38,9 @@ export function dynamicArrayMark(pack: Package, parts: WorkbookParts): string {
 
 function addMetadata(pack: Package, parts: WorkbookParts): void {
   const path = `${parts.workbook.slice(0, parts.workbook.lastIndexOf('/') + 1)}metadata.xml`;
-  addPart(pack, path, metadataPart, metadataContentType);
-  relate(pack, parts.workbook, path, metadataRelationship);
+  const { main, office } = namespacesOf(readXml(pack, parts.workbook));
+  addPart(pack, path, metadataPart(main), metadataContentType);
+  relate(pack, parts.workbook, path, metadataRelationship(office));
 }
 
 /** `xml` is left out where the part knows dynamic arrays already. */

@@ -5,7 +5,7 @@ export interface Namespaces {
 }
 
 /** ISO/IEC 29500-4, which nearly every program writes. */
-const transitional: Namespaces = {
+export const transitional: Namespaces = {
   main: 'http://schemas.openxmlformats.org/spreadsheetml/2006/main',
   office: 'http://schemas.openxmlformats.org/officeDocument/2006/relationships',
 };

@@ -1,5 +1,5 @@
 /** Formulas that reach outside their workbook: a file names other workbooks by number, `[2]Data!A1`. */
-import { isReference, tokenize, type Token } from '@borgar/fx/xlsx';
+import { isFunction, isReference, tokenize, type Token } from '@borgar/fx/xlsx';
 import type { DefinedName } from '../engine/engine';
 import { filedPrefix } from '../engine/names';
 
@@ -38,6 +38,16 @@ export function namesReachingOutside(
   );
   return found.size === known.size ? found : namesReachingOutside(names, found);
 }
+
+const dayFunctions = new Set(
+  'DATE DATEDIF DATEVALUE DAY DAYS360 EDATE EOMONTH ISOWEEKNUM MONTH NETWORKDAYS NETWORKDAYS.INTL NOW TEXT TODAY WEEKDAY WEEKNUM WORKDAY WORKDAY.INTL YEAR YEARFRAC'.split(
+    ' ',
+  ),
+);
+
+/** Whether what it comes to hangs on the day from which dates are counted. */
+export const countsDays = (formula: string): boolean =>
+  tokenize(formula).some((token) => isFunction(token) && dayFunctions.has(token.value.toUpperCase()));
 
 export const linkNumbersIn = (formula: string): number[] =>
   tokensOf(formula)

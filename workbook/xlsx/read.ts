@@ -7,7 +7,7 @@ import { refuseOtherKinds, refuseOtherPackages } from './otherKinds';
 import { elementsIn, findParts, readXml } from './parts';
 import { readSheet } from './readSheet';
 import { readSharedStrings } from './sharedStrings';
-import { readLooks } from './styles';
+import { isOn, readLooks } from './styles';
 import { readTables } from './tables';
 import { plainText } from './xml';
 import { Package } from './zip';
@@ -23,6 +23,9 @@ export function readWorkbook(bytes: Uint8Array): BookModel {
   const names = definedNames(pack, parts.workbook);
   const context = {
     outsideNames: namesReachingOutside(names),
+    is1904: elementsIn(pack, parts.workbook).some(
+      ({ name, attributes }) => name === 'workbookPr' && isOn(attributes.date1904 ?? '0'),
+    ),
     sharedStrings: readSharedStrings(pack, parts.sharedStrings),
     looks: readLooks(pack, parts.styles),
   };

@@ -2,8 +2,8 @@
 import { columnIndex, parseArea, type Area } from '../../functions/address';
 import { CellError, type CellValue } from '../../functions/cell';
 import type { CellModel, SheetModel } from '../engine/engine';
-import { filedErrors, filedValue } from './cellXml';
-import { reachesOutside } from './outside';
+import { daysFrom1900, daysFrom1904, filedErrors, filedValue } from './cellXml';
+import { countsDays, reachesOutside } from './outside';
 import { callsOurs, typedFormula } from './formulaText';
 import { withIntersections } from './intersection';
 import { SharedFormulas } from './sharedFormulas';
@@ -14,6 +14,8 @@ export interface SheetContext {
   /** Names, in capitals, that lead out of the workbook. */
   readonly outsideNames: ReadonlySet<string>;
   readonly sharedStrings: readonly string[];
+  /** Dates count days from 1904, and formulas here would take them for such from 1900. */
+  readonly is1904: boolean;
   readonly looks: readonly CellLook[];
 }
 
@@ -29,7 +31,8 @@ export function readSheet(
   const { widths } = scanSheet(xml, part, (scanned) => {
     const own = childOf(scanned, 'f');
     const formula = own === undefined ? '' : formulaOf(scanned, own, shared);
-    const isOutside = reachesOutside(formula, context.outsideNames);
+    const isOutside =
+      reachesOutside(formula, context.outsideNames) || (context.is1904 && countsDays(formula));
     if (own?.attributes.t === 'array' && !isOutside) spills.add(own.attributes.ref);
     // nobody typed what another cell's formula spilled
     if (formula !== '' || !spills.cover(scanned)) {
@@ -54,12 +57,12 @@ function cellModel(
   scanned: ScannedCell,
   formula: string,
   isOutside: boolean,
-  { sharedStrings, looks }: SheetContext,
+  { sharedStrings, looks, is1904 }: SheetContext,
 ): CellModel | undefined {
   const { row, column, attributes } = scanned;
   const { bold, wrap, numberFormat } = looks[Number(attributes.s ?? 0)] ?? {};
-  const value = valueOf(scanned, sharedStrings);
-  if (value === null && formula === '' && !bold && !wrap) return undefined;
+  const value = valueOf(scanned, sharedStrings, is1904 ? daysFrom1904 : daysFrom1900);
+  if (value === null && formula === '' && !bold && !wrap && numberFormat === undefined) return undefined;
   const plain: CellModel = { row, column, value };
   // nearly every cell of a large sheet: a spread would make it larger
   if (formula === '' && numberFormat === undefined && !bold && !wrap) return plain;
@@ -73,8 +76,8 @@ function cellModel(
 }
 
 /** Errors that no file should hold are read as #VALUE!, as Excel itself writes them. */
-function valueOf(cell: ScannedCell, sharedStrings: readonly string[]): CellValue {
-  const value = filedValue(cell, sharedStrings);
+function valueOf(cell: ScannedCell, sharedStrings: readonly string[], dayZero: number): CellValue {
+  const value = filedValue(cell, sharedStrings, dayZero);
   if (value instanceof CellError && !filedErrors.has(value.code))
     return new CellError((value.code as string) === '#GETTING_DATA' ? '#BUSY!' : '#VALUE!');
   return value;

@@ -39,7 +39,7 @@ export class StyleLists {
     private readonly pack: Package,
     private readonly path: string,
   ) {
-    this.xml = readXml(pack, path);
+    this.xml = opened(readXml(pack, path));
     this.scan();
   }
 
@@ -71,10 +71,17 @@ export class StyleLists {
 
   /** @returns its number in the list; an element that was added already is not added again */
   add(name: ListName, element: string): number {
-    const added = this.added.get(name) ?? [];
+    const added = this.added.get(name) ?? this.firstOf(name);
     this.added.set(name, added);
     const known = added.indexOf(element);
     return this.in(name).length + (known >= 0 ? known : added.push(element) - 1);
+  }
+
+  /** Cells without a look of their own have the first of the list, and looks without a font its first font. */
+  private firstOf(name: ListName): string[] {
+    if (this.in(name).length > 0) return [];
+    if (name === 'fonts') return [`<${this.prefix}font/>`];
+    return name === 'cellXfs' ? [`<${this.prefix}xf numFmtId="0"/>`] : [];
   }
 
   write(): void {
@@ -104,3 +111,6 @@ export class StyleLists {
     return Math.max(this.rootEnd, ...before);
   }
 }
+
+/** `<styleSheet/>` has room for nothing. */
+const opened = (xml: string): string => xml.replace(/<([\w.:-]*styleSheet)(\s[^>]*)?\/>\s*$/, '<$1$2></$1>');

@@ -38,4 +38,6 @@ export function readLooks(pack: Package, path: string | undefined): CellLook[] {
   });
 }
 
-const isOn = (value: string | undefined): boolean => value === undefined || value === '1' || value === 'true';
+/** Of an attribute that is a flag. */
+export const isOn = (value: string | undefined): boolean =>
+  value === undefined || value === '1' || value === 'true';

@@ -1,6 +1,6 @@
 /** What was typed since a workbook was opened, and the number formats given since, put into its own package. */
 import { CellError } from '../../functions/cell';
-import type { BookModel, CellModel, SheetModel } from '../engine/engine';
+import { isEmptyCell, type BookModel, type CellModel, type SheetModel } from '../engine/engine';
 import { AddedNumberFormats } from './addNumberFormats';
 import { dropCalcChain } from './calcChain';
 import { dynamicArrayMark } from './dynamicArrays';
@@ -61,21 +61,21 @@ function typedIn(book: BookModel, name: string): Typed {
 
 function changesFrom(before: Typed, now: Typed): Change[] {
   const typed = [...now.values()].filter((cell) => !isSameTyping(before.get(placeOf(cell)), cell));
-  const emptied = [...before.values()].filter((cell) => !now.has(placeOf(cell)));
+  const emptied = [...before.values()].filter((cell) => !isEmptyCell(cell) && !now.has(placeOf(cell)));
   return [...typed, ...emptied.map(({ row, column }) => ({ row, column, value: null }))];
 }
 
 /** A cell that is new and plain has the look of its file's plain cells already. */
 function restyledFrom(before: Typed, now: Typed): Restyling[] {
-  return [...now.values()].flatMap(({ row, column, numberFormat }) =>
-    before.get(placeOf({ row, column }))?.numberFormat === numberFormat
-      ? []
-      : [{ row, column, numberFormat: numberFormat ?? plainNumber }],
-  );
+  return [...new Map([...before, ...now])].flatMap(([place, { row, column }]) => {
+    const numberFormat = now.get(place)?.numberFormat;
+    if (before.get(place)?.numberFormat === numberFormat) return [];
+    return [{ row, column, numberFormat: numberFormat ?? plainNumber }];
+  });
 }
 
 function isSameTyping(a: CellModel | undefined, b: CellModel): boolean {
-  if (a === undefined) return false;
+  if (a === undefined) return isEmptyCell(b);
   if (a.formula !== undefined || b.formula !== undefined) return a.formula === b.formula;
   if (a.value instanceof CellError && b.value instanceof CellError) return a.value.code === b.value.code;
   return a.value === b.value;

@@ -3,7 +3,9 @@ import * as XLSX from '@e965/xlsx';
 import { strFromU8, strToU8, unzipSync, zipSync } from 'fflate';
 import { readFile } from 'node:fs/promises';
 import type { CellModel } from '../../../workbook/engine/engine';
+import { kindOf } from '../../../workbook/xlsx/kinds';
 import { readWorkbook } from '../../../workbook/xlsx/read';
+import { withMacros } from '../../workbook/xlsx/package';
 import type { BenchPage } from '../bench';
 
 export function filesSuite(sheet: () => BenchPage): void {
@@ -76,9 +78,9 @@ export function filesSuite(sheet: () => BenchPage): void {
 
   test('a file that is no workbook gets one sentence, and the sheet stays', async () => {
     const before = await sheet().cells("'Gas run'!A1:B9");
-    await choose('notes.xlsx', strToU8('PK?'));
+    await choose('notes.xlsx', strToU8('t / s,V / mL\n0,1.5\n'));
     await sheet()
-      .page.locator('#strip .said.bad', { hasText: /^the file was not opened: / })
+      .page.locator('#strip .said.bad', { hasText: /^the file was not opened: .* text, such as a \.csv: / })
       .waitFor();
     expect((await said()).split('\n')).toHaveLength(1);
     expect(await sheet().cells("'Gas run'!A1:B9")).toEqual(before);
@@ -134,6 +136,29 @@ export function filesSuite(sheet: () => BenchPage): void {
     expect(await said()).toBe('saved as timing card.xlsx');
   });
 
+  test('a number format on an empty cell is saved, and taken away again', async () => {
+    const format = (numberFormat: string): Promise<unknown> =>
+      sheet().page.evaluate(
+        (numberFormats) =>
+          window.flaskpace.port.write(
+            [
+              {
+                area: { sheet: 'Timing card', row: 8, column: 7, rows: 1, columns: 1 },
+                content: { value: null },
+                numberFormats,
+              },
+            ],
+            { overwrite: true, description: 'a format' },
+          ),
+        [[numberFormat]],
+      );
+    const inFile = async (): Promise<string | undefined> => cellAt((await saved()).bytes, 8, 7)?.numberFormat;
+    await format('0.000');
+    expect(await inFile()).toBe('0.000');
+    await format('General');
+    expect(await inFile()).toBeUndefined();
+  });
+
   test('work that is not saved is asked about before another book takes its place', async () => {
     await sheet().type("'Timing card'!A3", '100');
     await press('Demo');
@@ -141,6 +166,15 @@ export function filesSuite(sheet: () => BenchPage): void {
     expect(await sheet().page.title()).toBe('• timing card.xlsx – Flaskpace');
     await press('Demo');
     await sheet().page.getByRole('button', { name: 'Go on without saving' }).click();
+    await sheet().page.waitForFunction(() => document.title === 'demo.xlsx – Flaskpace');
+  });
+
+  test('a workbook with macros keeps its name and its kind', async () => {
+    await choose('card.xlsm', withMacros(timingCard));
+    await sheet().page.waitForFunction(() => document.title.startsWith('card.xlsm'));
+    const { name, bytes } = await saved();
+    expect([name, kindOf(bytes)?.extension]).toEqual(['card.xlsm', '.xlsm']);
+    await press('Demo');
     await sheet().page.waitForFunction(() => document.title === 'demo.xlsx – Flaskpace');
   });
 

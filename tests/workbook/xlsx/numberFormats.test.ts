@@ -73,6 +73,65 @@ test('formats that the file or the standard knows are named again, under a prefi
   expect(readWorkbook(bytes).sheets[0].cells.map(({ numberFormat }) => numberFormat)).toContain('0.0E+0');
 });
 
+describe('an empty cell', () => {
+  const cellsOf = (bytes: Uint8Array): Record<string, string | undefined> =>
+    Object.fromEntries(
+      readWorkbook(bytes).sheets[0].cells.map(({ row, column, numberFormat }) => [
+        XLSX.utils.encode_cell({ r: row, c: column }),
+        numberFormat,
+      ]),
+    );
+  const retyped = (bytes: Uint8Array, change: (cells: readonly CellModel[]) => CellModel[]): Uint8Array => {
+    const before = readWorkbook(bytes);
+    const [sheet] = before.sheets;
+    return typeCells(bytes, before, { ...before, sheets: [{ ...sheet, cells: change(sheet.cells) }] });
+  };
+
+  test('has the format that it is given, and one that the file gave it', () => {
+    const empty = { row: 3, column: 1, value: null, numberFormat: '0.000' };
+    const bytes = retyped(opened(styles('')), (cells) => [...cells, empty]);
+    expect(rowsOf(bytes)).toBe(`${rows}<row r="4"><c r="B4" s="2"/></row>`);
+    expect(cellsOf(bytes)).toEqual({ A1: '0.00', B1: undefined, C1: '0.00', B4: '0.000' });
+  });
+
+  test('loses it with the cell, and keeps it without', () => {
+    const bytes = opened(styles(''));
+    const cleared = retyped(bytes, (cells) => cells.filter(({ column }) => column !== 2));
+    expect(cellsOf(cleared)).toEqual({ A1: '0.00', B1: undefined });
+    expect(Buffer.from(retyped(bytes, (cells) => [...cells])).equals(bytes)).toBe(true);
+  });
+
+  test('keeps it when its number goes', () => {
+    const emptied = retyped(opened(styles('')), (cells) =>
+      cells.map((cell) => (cell.column === 0 ? { ...cell, value: null } : cell)),
+    );
+    expect(rowsOf(emptied)).toBe(rows.replace('<c r="A1" s="1"><v>1.5</v></c>', '<c r="A1" s="1"/>'));
+  });
+});
+
+describe('styles without looks for cells', () => {
+  const fonts = '<fonts count="1"><font/></fonts>';
+  test.each([
+    [
+      'with fonts',
+      `<styleSheet xmlns="${main}">${fonts}<dxfs count="0"/></styleSheet>`,
+      /<\/fonts><cellXfs count="2">/,
+    ],
+    ['with nothing', `<styleSheet xmlns="${main}"/>`, /<\/numFmts><cellXfs count="2">/],
+    [
+      'under a prefix',
+      `<x:styleSheet xmlns:x="${main}"></x:styleSheet>`,
+      /<\/x:numFmts><x:cellXfs count="2">/,
+    ],
+  ])('%s get a list of them in its place, plain cells first', (_, xml, place) => {
+    const bytes = formatted(opened(xml), { B1: '0.0 "m"' });
+    expect(textOf(bytes, 'xl/styles.xml')).toMatch(place);
+    const { A1, B1 } = XLSX.read(bytes, { type: 'array', cellNF: true }).Sheets.Run;
+    expect(B1).toMatchObject({ z: '0.0 "m"', v: 3 });
+    expect(A1).toMatchObject({ v: 1.5 });
+  });
+});
+
 test('a format is taken away: the number is shown as it is', () => {
   const bytes = formatted(opened(styles('')), { A1: undefined });
   expect(XLSX.read(bytes, { type: 'array', cellNF: true }).Sheets.Run.A1).toMatchObject({ z: 'General' });

@@ -64,7 +64,7 @@ test('handed over, a call of ours is frozen to it, and the rest stays', async ()
     version: '1.2.3',
     date: '2026-12-01',
   });
-  expect(formulas.map(({ why }) => why)).toEqual(['it reaches another workbook or add-in']);
+  expect(formulas.map(({ why }) => why)).toEqual(['it needs another workbook or add-in, or dates from 1904']);
   expect(rowsOf(bytes)).toBe(
     '<row r="1"><c r="A1"><v>7</v></c><c r="B1"><f>[2]Data!A1</f><v>8</v></c></row>',
   );

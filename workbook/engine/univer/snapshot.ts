@@ -8,7 +8,7 @@ import {
 } from '@univerjs/core';
 import type { IDefinedNamesServiceParam } from '@univerjs/engine-formula';
 import { CellError } from '../../../functions/cell';
-import type { BookModel, CellModel, SheetModel } from '../engine';
+import { isEmptyCell, type BookModel, type CellModel, type SheetModel } from '../engine';
 import { withoutHash } from '../anchorText';
 
 export const unitId = 'book';
@@ -45,7 +45,8 @@ export function definedNameEntries(book: BookModel): IDefinedNamesServiceParam[]
 
 function worksheetData(sheet: SheetModel, place: number): Partial<IWorksheetData> {
   const cellData: Record<number, Record<number, ICellData>> = {};
-  for (const cell of sheet.cells) (cellData[cell.row] ??= {})[cell.column] = engineCell(cell);
+  for (const cell of sheet.cells)
+    if (!isEmptyCell(cell)) (cellData[cell.row] ??= {})[cell.column] = engineCell(cell);
   return {
     id: sheetId(place),
     name: sheet.name,

@@ -21,13 +21,14 @@ function sheetModel(sheets: Sheets, sheet: Worksheet): SheetModel {
     const typed = sheets.formula(sheet, row, column);
     const style = styles.getStyleByCell(cell);
     const pattern = style?.n?.pattern;
-    if (value === null && typed === undefined) return;
+    const hasFormat = pattern !== undefined && pattern !== plainFormat;
+    if (value === null && typed === undefined && !hasFormat) return;
     cells.push({
       row,
       column,
       value,
       ...(typed === undefined ? {} : { formula: typed.replace(/^=/, '') }),
-      ...(pattern && pattern !== plainFormat ? { numberFormat: pattern } : {}),
+      ...(hasFormat ? { numberFormat: pattern } : {}),
       ...(style?.bl ? { bold: true } : {}),
       ...(style?.tb === WrapStrategy.WRAP ? { wrap: true } : {}),
     });
