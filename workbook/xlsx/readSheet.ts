@@ -31,8 +31,7 @@ export function readSheet(
   const { widths } = scanSheet(xml, part, (scanned) => {
     const own = childOf(scanned, 'f');
     const formula = own === undefined ? '' : formulaOf(scanned, own, shared);
-    const isOutside =
-      reachesOutside(formula, context.outsideNames) || (context.is1904 && countsDays(formula));
+    const isOutside = formula !== '' && needsOthers(formula, context);
     if (own?.attributes.t === 'array' && !isOutside) spills.add(own.attributes.ref);
     // nobody typed what another cell's formula spilled
     if (formula !== '' || !spills.cover(scanned)) {
@@ -44,6 +43,9 @@ export function readSheet(
   const columnWidths = widthsByColumn(widths, cells);
   return { cells, ...(Object.keys(columnWidths).length > 0 ? { columnWidths } : {}) };
 }
+
+const needsOthers = (formula: string, { outsideNames, is1904 }: SheetContext): boolean =>
+  reachesOutside(formula, outsideNames) || (is1904 && countsDays(formula));
 
 /** A plain formula takes one cell of a range where it wants one value; ours are meant as they would be typed. */
 function formulaOf(cell: ScannedCell, own: ScannedChild, shared: SharedFormulas): string {
