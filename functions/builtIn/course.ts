@@ -11,6 +11,7 @@ import { headingRow, type WorkingCell } from './workings';
 export function sayNormalTime(given: Given): Said {
   const run = new SortedRun(given);
   const [exponent, b] = [given.number('exponent'), given.numberFromWorkings('exponent')];
+  run.requireShort();
   const title = `Normalised time with the exponent ${b}: ${run.name}`;
   const table = given.workings.table(title, (own) => [
     headingRow('time', 'normalised time'),

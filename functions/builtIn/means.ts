@@ -10,6 +10,7 @@ export class Means {
     given: Given,
     readonly run: SortedRun,
   ) {
+    run.requireShort();
     this.table = given.workings.table(`Means at each time: ${run.name}`, (own) => [
       headingRow('time', 'mean reading', 'readings'),
       ...Array.from({ length: run.size }, (_, n) => row(run, own, n + 1)),

@@ -2,6 +2,7 @@
  * Two columns that belong together, in array formulas: a pair with a gap counts as nothing. Gaps and order are
  * those of the day a formula is worked out, not of the day it was written.
  */
+import { pairReadings, type Series } from '../../src/series/series';
 import type { Given } from './given';
 import { sure, type Phrase } from './phrase';
 import type { Readings } from './readings';
@@ -30,15 +31,17 @@ export class Pairs {
     this.isRow = first.columns > 1;
   }
 
-  /** @throws NotSaid where the columns do not lie alike, or hold what a formula cannot judge */
-  static of(given: Given, x: string, y: string): Pairs {
+  /**
+   * @param most of them; more would take too long
+   * @throws NotSaid where the columns do not lie alike, or hold what a formula cannot judge
+   */
+  static of(given: Given, x: string, y: string, most = mostPairs): Pairs {
     const [first, second] = [given.quantityReadings(x), given.quantityReadings(y)];
     if (!first.isPlaced || !second.isPlaced) throw new NotSaid('a column is worked out within the formula');
     if (first.rows !== second.rows || first.columns !== second.columns)
       throw new NotSaid(`${x} and ${y} do not lie alike`);
     if (first.rows > 1 && first.columns > 1) throw new NotSaid(`${x} is a block`);
-    if (first.rows * first.columns > mostPairs)
-      throw new NotSaid(`a column of more than ${mostPairs} pairs would make it slow`);
+    requireAtMost(most, first.rows * first.columns);
     return new Pairs(first, second);
   }
 
@@ -52,6 +55,12 @@ export class Pairs {
     const place: [number, number] = this.isRow ? [0, n] : [n, 0];
     const [x, y] = [this.first, this.second].map((one) => one.element(...place));
     return { x, isPair: `ISNUMBER(${x})*ISNUMBER(${y})` };
+  }
+
+  /** On the day of the copy; nothing where there is no pair, or an error among them. */
+  get today(): Series | undefined {
+    const [x, y] = [this.first.numbers, this.second.numbers];
+    return x && y && x.some((one, n) => one !== null && y[n] !== null) ? pairReadings(x, y) : undefined;
   }
 
   /** 1, 2, 3 … beside the pairs, where they stand in cells. */
@@ -110,5 +119,10 @@ interface Fit {
   readonly weight: string;
 }
 
-/** Each cell of a column works through all pairs. */
-const mostPairs = 500;
+/** @throws NotSaid */
+export function requireAtMost(most: number, pairs: number): void {
+  if (pairs > most) throw new NotSaid(`a column of more than ${most} pairs would make it slow`);
+}
+
+/** Where each cell that asks, or each line of a table, works through all pairs. */
+export const mostPairs = 500;

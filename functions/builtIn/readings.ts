@@ -1,5 +1,6 @@
 /** A range of readings in a formula: one by one, or as a whole. */
 import type { Area } from '../address';
+import { CellError } from '../cell';
 import { numberInText } from '../column';
 import type { Bounds } from '../parameters';
 import { NotSaid, type Argument } from './said';
@@ -102,6 +103,13 @@ export class Readings {
     const count = this.rows * this.columns;
     if (count < 2) throw new NotSaid('one reading has no steps');
     return end === 'first' ? this.stretch(1, count - 1) : this.stretch(0, count - 2);
+  }
+
+  /** On the day of the copy, one by one, with nothing for a gap; nothing at all where they are not known. */
+  get numbers(): (number | null)[] | undefined {
+    const cells = this.argument.cells?.flat();
+    if (cells?.some((cell) => cell instanceof CellError)) return undefined;
+    return cells?.map((cell) => (typeof cell === 'number' ? cell : null));
   }
 
   /** Whether single readings can be named. */

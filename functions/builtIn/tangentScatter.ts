@@ -18,6 +18,7 @@ export class TangentScatter {
   /** @param degree of the finer polynomials */
   constructor(given: Given, windows: Windows, degree: number) {
     const { run } = windows;
+    run.requireShort();
     this.table = given.workings.table(`Scatter about degree ${degree}, ${windows.name}`, (own) => [
       ...head(own, run.size),
       ...Array.from({ length: run.size }, (_, n) => line(own, windows, degree, n)),

@@ -176,6 +176,7 @@ export function sayMeanTemp(given: Given): Said {
 /** How long each reading stands for: from halfway to the time before until halfway to the next, shared by those of one time. */
 function holdingTimes(given: Given, run: SortedRun): string {
   const { times, size } = run;
+  run.requireShort();
   const table = given.workings.table(`Time that each reading stands for: ${run.name}`, () => [
     headingRow('time', 'stands for'),
     ...Array.from({ length: size }, (_, n): WorkingCell[] => {

@@ -1,14 +1,15 @@
 /** The readings nearest to any time, on the sheet "Workings": with which of them a window of so many begins. */
-import { timeRounding } from '../../src/rate/localPolynomial';
+import { timeRounding, turningTime } from '../../src/rate/localPolynomial';
 import { tangentWindow, type TangentWindow } from '../../src/rate/tangent';
-import { pairReadings } from '../../src/series/series';
+import { pairReadings, type Series } from '../../src/series/series';
+import type { CellValue } from '../cell';
 import type { Column } from '../column';
 import type { Given } from './given';
 import { isNumberText } from './phrase';
 import { PolynomialAt } from './polynomialAt';
 import type { SortedRun } from './sortedRun';
 import { numberText } from './text';
-import type { Table, WorkingCell } from './workings';
+import { workingFormula, type Table, type WorkingCell } from './workings';
 
 /** Rows of the table. */
 const [wanted, used, headings, firstRow] = [0, 1, 2, 3];
@@ -33,10 +34,20 @@ export class Windows {
   ) {
     const width = given.has('points') ? asGiven(given) : asChosen(given);
     this.name = `windows of ${width.name}: ${run.name}`;
-    this.table = given.workings.table(`Where to begin, ${this.name}`, (own) => [
-      ...head(own, run, width.points()),
-      ...Array.from({ length: run.size }, (_, n) => [{ formula: beginning(run, own, n) }]),
-    ]);
+    this.table = given.workings.table(`Where to begin, ${this.name}`, (own) => {
+      const { today } = run;
+      const points = width.today();
+      // a number that is known lets each line name the one reading that it waits for
+      const ahead = (n: number): string | undefined =>
+        width.points ? `INDEX(${run.times},${own.cell(used, 0)}+${n})` : timeOf(run, n + points - 1);
+      return [
+        ...head(own, run, width.points ?? points),
+        [workingFormula(run.time(0), today?.times[0])],
+        ...Array.from({ length: run.size - 1 }, (_, n) =>
+          beginning(run.time(n), ahead(n + 1), today && beginningToday(today, points, n + 1)),
+        ),
+      ];
+    });
     const enough = `${this.points}>${given.constant('degree').value}`;
     this.holds = [
       ...width.holds,
@@ -65,22 +76,26 @@ export class Windows {
 
 interface Width {
   readonly name: string;
-  readonly points: () => WorkingCell;
+  /** How many readings, on the day of the copy. */
+  readonly today: () => number;
+  /** Where that number follows a cell. */
+  readonly points?: WorkingCell;
   readonly holds: readonly string[];
 }
 
 function asGiven(given: Given): Width {
   const [{ holds }, points] = [given.number('points'), given.numberFromWorkings('points')];
+  const today = (): number => Number(given.argument('points')?.cells?.[0][0]);
   return isNumberText(points)
-    ? { name: `${points} readings`, points: () => Number(points), holds }
-    : { name: `as many readings as ${points} says`, points: () => ({ formula: points }), holds };
+    ? { name: `${points} readings`, today, holds }
+    : { name: `as many readings as ${points} says`, today, points: { formula: points }, holds };
 }
 
 function asChosen(given: Given): Width {
   const { value, holds } = given.constant('degree');
   return {
     name: `as many readings as chosen for degree ${value} on the day of the copy`,
-    points: () => windowOfTheDay(given).points,
+    today: () => windowOfTheDay(given).points,
     holds,
   };
 }
@@ -93,11 +108,14 @@ function head(own: Table, { count }: SortedRun, points: WorkingCell): WorkingCel
   return rows;
 }
 
-/** The first window serves from the beginning, each of the others from when it is nearer than the one before. */
-function beginning({ count, times, time }: SortedRun, own: Table, n: number): string {
-  if (n === 0) return time(0);
-  const last = `${own.cell(used, 0)}+${n}`;
-  const [left, ahead] = [time(n - 1), `INDEX(${times},${last})`];
+const timeOf = ({ size, time }: SortedRun, n: number): string | undefined => (n < size ? time(n) : undefined);
+
+/** From when on the window without this reading and with the one ahead is nearer; nothing where none is ahead. */
+function beginning(left: string, ahead: string | undefined, today?: CellValue): WorkingCell[] {
+  if (ahead === undefined) return [];
   const turning = `(${left}+${ahead})/2+${numberText(timeRounding)}*(ABS(${left})+ABS(${ahead}))`;
-  return `IF(${last}>${count},"",${turning})`;
+  return [workingFormula(`IF(ISNUMBER(${ahead}),${turning},"")`, today)];
 }
+
+const beginningToday = ({ times }: Series, points: number, n: number): CellValue =>
+  n + points > times.length ? '' : turningTime(times[n - 1], times[n + points - 1]);

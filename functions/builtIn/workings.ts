@@ -5,8 +5,17 @@
 import type { Area } from '../address';
 import type { CellValue } from '../cell';
 
-/** A value, a heading, or a formula as it is typed, without `=`. */
-export type WorkingCell = CellValue | { readonly heading: string } | { readonly formula: string };
+export interface WorkingFormula {
+  /** As it is typed, without `=`. */
+  readonly formula: string;
+  /** What it comes to on the day of the copy, where that is known without working it out. */
+  readonly today?: CellValue;
+}
+
+export type WorkingCell = CellValue | { readonly heading: string } | WorkingFormula;
+
+export const workingFormula = (formula: string, today?: CellValue): WorkingFormula =>
+  today === undefined ? { formula } : { formula, today };
 
 export const headingRow = (...words: readonly string[]): { readonly heading: string }[] =>
   words.map((heading) => ({ heading }));

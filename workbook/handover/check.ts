@@ -32,7 +32,9 @@ export async function checked(
   workings: WorkingsSheet,
 ): Promise<Checked> {
   const book = settled(world, formulas);
-  const worked = workings.isEmpty ? undefined : await calculate(withSheet(book, workings.model()));
+  const worked = workings.isEmpty
+    ? undefined
+    : await workings.workedOut((sheet) => calculate(withSheet(book, sheet)));
   const whole = worked ? withSheet(book, workings.values(worked)) : book;
   const groups = alike(
     formulas.filter(({ said }) => said),
@@ -118,7 +120,7 @@ function firstOff(
 }
 
 /** @param size the largest number of the whole result: a 0 among rates can come out as their rounding */
-function isSame(ours: CellValue, theirs: CellValue, size: number): boolean {
+export function isSame(ours: CellValue, theirs: CellValue, size: number): boolean {
   if (typeof ours === 'number' && typeof theirs === 'number')
     return Math.abs(ours - theirs) <= tolerance * Math.max(Math.abs(ours), size / 1000);
   if (ours instanceof CellError) return theirs instanceof CellError && theirs.code === ours.code;

@@ -3,8 +3,9 @@ import { quotedSheet } from '../../functions/address';
 import type { CellValue } from '../../functions/cell';
 import { fitsOtherwise, startsOtherwise } from '../../functions/builtIn/fitState';
 import { fixedArea } from '../../functions/builtIn/text';
-import type { Table, WorkingCell, Workings } from '../../functions/builtIn/workings';
-import type { CalculatedBook, SheetModel } from '../engine/engine';
+import type { Table, WorkingCell, WorkingFormula, Workings } from '../../functions/builtIn/workings';
+import type { CalculatedBook, CellModel, SheetModel } from '../engine/engine';
+import { isSame } from './check';
 import type { NewSheet, SheetCell } from './newSheet';
 
 type Rows = readonly (readonly WorkingCell[])[];
@@ -27,7 +28,12 @@ const introduction: readonly SheetCell[][] = [
 export class WorkingsSheet {
   private placed: readonly Placed[] = [];
 
-  constructor(readonly name: string) {}
+  /** What names the sheet in a formula. */
+  private readonly ownName: RegExp;
+
+  constructor(readonly name: string) {
+    this.ownName = new RegExp(`(?<![\\w.'])${quotedSheet(name)}!`, 'g');
+  }
 
   get isEmpty(): boolean {
     return this.placed.length === 0;
@@ -71,28 +77,53 @@ export class WorkingsSheet {
 
   /** A formula of the sheet itself need not name it. */
   private atHome(cell: WorkingCell): WorkingCell {
-    if (!isFormula(cell)) return cell;
-    const own = new RegExp(`(?<![\\w.'])${quotedSheet(this.name)}!`, 'g');
-    return { formula: cell.formula.replace(own, '') };
+    return isFormula(cell) ? { ...cell, formula: cell.formula.replace(this.ownName, '') } : cell;
   }
 
-  /** For the engine here to work out. */
-  model(): SheetModel {
-    return {
-      name: this.name,
-      cells: this.placed.flatMap(({ row, rows }) =>
-        rows.flatMap((line, r) => line.map((cell, column) => ({ row: row + r, column, ...contentOf(cell) }))),
+  /**
+   * By an engine, as part of the workbook. Where the values of a table's lines are known, a few of them are worked
+   * out all the same; if one comes to something else, none is believed.
+   */
+  async workedOut(calculate: (sheet: SheetModel) => Promise<CalculatedBook>): Promise<CalculatedBook> {
+    const calculated = await calculate(this.model(fewLines));
+    const isAsKnown = this.placed.every(({ row, rows }) =>
+      rows.every((line, r) =>
+        line.every(
+          (cell, column) =>
+            !isKnown(cell) || isSame(cell.today, calculated.shown(this.name, row + r, column), 0),
+        ),
       ),
-    };
+    );
+    return isAsKnown ? calculated : calculate(this.model(Infinity));
+  }
+
+  /** @param most lines of each table that are worked out although their values are known */
+  private model(most: number): SheetModel {
+    const cells = this.placed.flatMap(({ row, rows }) => {
+      const chosen = linesToWorkOut(rows, most);
+      return rows.flatMap((line, r) =>
+        line.map((cell, column): CellModel => {
+          const content = isKnown(cell) && !chosen.has(r) ? { value: cell.today } : contentOf(cell);
+          return { row: row + r, column, ...content };
+        }),
+      );
+    });
+    return { name: this.name, cells };
   }
 
   /** What it came to. */
   values(calculated: CalculatedBook): SheetModel {
-    const { name, cells } = this.model();
-    return {
-      name,
-      cells: cells.map(({ row, column }) => ({ row, column, value: calculated.shown(name, row, column) })),
-    };
+    const { name, placed } = this;
+    const cells = placed.flatMap(({ row, rows }) =>
+      rows.flatMap((line, r) =>
+        line.map((_, column) => ({
+          row: row + r,
+          column,
+          value: calculated.shown(name, row + r, column),
+        })),
+      ),
+    );
+    return { name, cells };
   }
 
   /** For the file, each formula with what it came to. */
@@ -102,7 +133,9 @@ export class WorkingsSheet {
       lines[row - 1] = [{ heading: title }];
       rows.forEach((line, r) => {
         lines[row + r] = line.map((cell, column) =>
-          isFormula(cell) ? { ...cell, value: calculated.shown(this.name, row + r, column) } : cell,
+          isFormula(cell)
+            ? { formula: cell.formula, value: calculated.shown(this.name, row + r, column) }
+            : cell,
         );
       });
     }
@@ -118,8 +151,21 @@ const warnings = [fitsOtherwise, startsOtherwise];
 /** Enough for six digits with their exponent. */
 const width = 13;
 
-const isFormula = (cell: WorkingCell): cell is { readonly formula: string } =>
+const isFormula = (cell: WorkingCell): cell is WorkingFormula =>
   typeof cell === 'object' && cell !== null && 'formula' in cell;
+
+const isKnown = (cell: WorkingCell): cell is Required<WorkingFormula> =>
+  isFormula(cell) && cell.today !== undefined;
+
+/** Of a table whose values are known. */
+const fewLines = 6;
+
+/** Spread over all that are known, the first two and the last among them. */
+function linesToWorkOut(rows: Rows, most: number): ReadonlySet<number> {
+  const known = rows.flatMap((line, r) => (line.some(isKnown) ? [r] : []));
+  const step = Math.max(1, Math.ceil(known.length / most));
+  return new Set(known.filter((_, n) => n < 2 || n === known.length - 1 || n % step === 0));
+}
 
 function contentOf(cell: WorkingCell): { readonly value: CellValue; readonly formula?: string } {
   if (isFormula(cell)) return { value: null, formula: cell.formula };

@@ -125,6 +125,25 @@ export const rate: Cases = {
     becomes: 'live',
     changed: { A3: 95, A4: 60, B8: null, D1: 4 },
   },
+  'Rates of a long run': {
+    typed: {
+      ...column(
+        'A1',
+        Array.from({ length: 700 }, (_, n) => n * 0.5),
+      ),
+      ...column(
+        'B1',
+        Array.from({ length: 700 }, (_, n) => 40 * 0.995 ** n + 0.1 * Math.sin(13 * n)),
+      ),
+      D1: 21,
+      D2: '=PACE.TANGENT(A1:A700,B1:B700,100.3,D1)',
+      D3: '=PACE.TANGENT(A1:A700,B1:B700,100,31,2,,TRUE)',
+      D4: '=PACE.START(A1:A700,B1:B700,,,TRUE)',
+      J1: '=PACE.ALONG(A1:A700,B1:B700,15)',
+    },
+    becomes: 'live',
+    changed: { B150: null, A230: 90.25, A231: 90.25, D1: 20 },
+  },
   'Rates along a row': {
     typed: {
       ...Object.fromEntries(
