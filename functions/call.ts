@@ -4,14 +4,20 @@ import { cellErrorOf } from './cellError';
 import type { Column } from './column';
 import { typedName, type CellFunction } from './define';
 import { InvalidInput } from '../src/errors';
+import type { Tell } from '../src/progress';
 
 /**
  * @param args in the order of the parameters; `undefined` or `null` where left out
+ * @param tell takes how far it is while it runs
  * @returns the result, with nothing in it that a cell cannot show; never throws
  */
-export function callFunction(f: CellFunction, args: readonly (CellResult | undefined)[]): CellResult {
+export function callFunction(
+  f: CellFunction,
+  args: readonly (CellResult | undefined)[],
+  tell?: Tell,
+): CellResult {
   try {
-    return presentable(f.run(readArguments(f, args)));
+    return presentable(f.run(readArguments(f, args), tell));
   } catch (error) {
     return cellErrorOf(error);
   }

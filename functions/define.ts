@@ -1,4 +1,5 @@
 /** What a cell function is. Everything the product says or does about one derives from this object. */
+import type { Tell } from '../src/progress';
 import type { BuiltIn, FitTable } from './builtIn/said';
 import type { CellResult } from './cell';
 import type { Parameter } from './parameters';
@@ -60,7 +61,8 @@ export interface Definition<P extends Parameters> {
    * another thread where there is one.
    */
   readonly isLong?: true | { readonly fromCells: number };
-  readonly run: (values: Values<P>) => CellResult;
+  /** @param tell takes how far it is, where it takes long */
+  readonly run: (values: Values<P>, tell?: Tell) => CellResult;
   /** The same in built-in spreadsheet functions, for a copy that needs no add-in; left out where there is none. */
   readonly builtIn?: BuiltIn;
   /** What it fits, for the same copy: the numbers stay as they were, and a formula tells whether they still fit. */
@@ -69,7 +71,7 @@ export interface Definition<P extends Parameters> {
 
 /** A definition whose parameter types have been checked and can be forgotten. */
 export type CellFunction = Omit<Definition<Parameters>, 'run'> & {
-  readonly run: (values: Readonly<Record<string, unknown>>) => CellResult;
+  readonly run: (values: Readonly<Record<string, unknown>>, tell?: Tell) => CellResult;
 };
 
 export const namespace = 'PACE';

@@ -6,6 +6,7 @@ import { callFunction } from './call';
 import { functionNamed } from './catalogue';
 import { CellError, isRange, type CellResult, type CellValue, type ErrorCode } from './cell';
 import { typedName, type CellFunction } from './define';
+import type { Progress } from '../src/progress';
 
 /** Whatever does a function's work somewhere else. */
 export interface LongWork {
@@ -19,6 +20,8 @@ export interface Underway {
   readonly name: string;
   /** How many others wait for it. */
   readonly waiting: number;
+  /** Nothing where the function has not said. */
+  readonly progress?: Progress;
   stop(): void;
 }
 
@@ -36,6 +39,12 @@ export interface Answer {
   readonly result: Plain;
 }
 
+/** Of a job that is under way. */
+export interface HowFar {
+  readonly id: number;
+  readonly progress: Progress;
+}
+
 const plainCell = (cell: CellValue): PlainCell =>
   cell instanceof CellError ? { code: cell.code, message: cell.message } : cell;
 
@@ -51,12 +60,13 @@ const fromPlain = (plain: Plain): CellResult =>
     : cellOf(plain as PlainCell);
 
 /** On the other thread: does a job. */
-export function answerJob({ id, name, args }: Job): Answer {
+export function answerJob({ id, name, args }: Job, tell?: (howFar: HowFar) => void): Answer {
   const f = functionNamed(name);
   const result = f
     ? callFunction(
         f,
         args.map((argument) => (argument === undefined ? undefined : fromPlain(argument))),
+        tell && ((progress) => tell({ id, progress })),
       )
     : new CellError('#NAME?', `there is no function ${name}`);
   return { id, result: toPlain(result) };
@@ -69,7 +79,7 @@ export const ready = 'ready';
 export interface WorkerLike {
   postMessage(job: Job): void;
   terminate(): void;
-  onmessage: ((event: { readonly data: Answer | typeof ready }) => void) | null;
+  onmessage: ((event: { readonly data: Answer | HowFar | typeof ready }) => void) | null;
   onerror: ((event: unknown) => void) | null;
 }
 
@@ -96,7 +106,7 @@ const tookTooLong = (): CellError =>
  * takes its worker with it, as does one that breaks it or never ends; where none can be started the work is done
  * here after all. Every answer comes, as an error if need be.
  *
- * @param tell what is under way, at every start, and `null` when nothing is any more
+ * @param tell what is under way, at every start and as it goes on, and `null` when nothing is any more
  */
 export function workerWork(
   startWorker: () => WorkerLike,
@@ -114,7 +124,7 @@ export function workerWork(
     current = queue.shift();
     if (!current) return tell(null);
     const waiting = current;
-    tell({ name: typedName(waiting.f), waiting: queue.length, stop: () => stop(waiting) });
+    say(waiting);
     if (isUseless) return doHere(waiting);
     try {
       worker ??= started();
@@ -126,12 +136,17 @@ export function workerWork(
     }
   }
 
+  const say = (waiting: Waiting, progress?: Progress): void =>
+    tell({ name: typedName(waiting.f), waiting: queue.length, progress, stop: () => stop(waiting) });
+
   function started(): WorkerLike {
     const fresh = startWorker();
     let isReady = false;
     fresh.onmessage = ({ data }) => {
       if (data === ready) isReady = true;
-      else if (current?.job.id === data.id) finish(current, fromPlain(data.result));
+      else if (current?.job.id !== data.id) return;
+      else if ('progress' in data) say(current, data.progress);
+      else finish(current, fromPlain(data.result));
     };
     fresh.onerror = () => {
       if (fresh !== worker) return;

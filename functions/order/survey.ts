@@ -1,5 +1,6 @@
 import { InvalidInput } from '../../src/errors';
 import { surveyRun, type SurveyedRun } from '../../src/order/survey';
+import { nthOf } from '../../src/progress';
 import { pairReadings } from '../../src/series/series';
 import { columnsBeside } from '../block';
 import type { CellValue } from '../cell';
@@ -66,9 +67,12 @@ export default defineFunction({
   seeAlso: ['COEFFICIENT', 'ORDERS', 'CHECK'],
   reference: 'doi:10.1351/goldbook.O04322',
   isLong: true,
-  run({ times, block, order, endpoint }) {
+  run({ times, block, order, endpoint }, tell) {
     const runs = columnsBeside(block, times, { block: 'block', beside: 'times' });
-    const surveyed = runs.map((run, i) => rowOf(times, run, i + 1, { order: order ?? 'free', endpoint }));
+    const surveyed = runs.map((run, i) => {
+      tell?.(nthOf('run', i, runs.length));
+      return rowOf(times, run, i + 1, { order: order ?? 'free', endpoint });
+    });
     return [[...headings], ...surveyed];
   },
   fits: (given) => tableOfLaws(lawsOfRuns, given).table,

@@ -1,5 +1,6 @@
 import { InvalidInput } from '../../src/errors';
 import { planAgainst } from '../../src/plan/rival';
+import type { Tell } from '../../src/progress';
 import { planForCoefficient, type PlannedRun } from '../../src/plan/sampling';
 import type { CellValue } from '../cell';
 import { defineFunction } from '../define';
@@ -50,9 +51,9 @@ export default defineFunction({
   reference:
     'doi:10.1093/biomet/62.1.57; Atkinson, Donev and Tobias, Optimum Experimental Designs (2007), 17',
   isLong: true,
-  run({ order, coefficient, initial, noise, samples, goal }) {
+  run({ order, coefficient, initial, noise, samples, goal }, tell) {
     const run = { order, rateCoefficient: coefficient, initial, noise, samples };
-    if (typeof goal === 'number') return againstRival(run, goal);
+    if (typeof goal === 'number') return againstRival(run, goal, tell);
     if (goal.toLowerCase() !== 'coefficient') {
       throw new InvalidInput(`goal must be "coefficient" or another order: got the text "${goal}"`);
     }
@@ -61,8 +62,8 @@ export default defineFunction({
   },
 });
 
-function againstRival(run: PlannedRun, rival: number): CellValue[][] {
-  const { times, power } = planAgainst(run, rival);
+function againstRival(run: PlannedRun, rival: number, tell?: Tell): CellValue[][] {
+  const { times, power } = planAgainst(run, rival, tell);
   return withAnswer(`chance to rule out order ${rival}`, times, power);
 }
 

@@ -48,11 +48,11 @@ export default defineFunction({
   seeAlso: ['FITCOURSE', 'CURVE', 'PLAN'],
   reference: 'doi:10.1007/s10543-023-00967-x; doi:10.1351/goldbook.O04322',
   isLong: true,
-  run({ scheme, coefficients, initial, times }) {
+  run({ scheme, coefficients, initial, times }, tell) {
     const rates = filled(coefficients, 'coefficients', stepAt(scheme));
     const start = filled(initial, 'initial', speciesAt(scheme));
     const gap = scheme.species.map((): CellValue => '');
-    const course = courseAt(scheme, rates, start, times);
+    const course = courseAt(scheme, rates, start, times, tell);
     return linesBeside(
       times,
       course.map((row) => (row ? [...row] : gap)),

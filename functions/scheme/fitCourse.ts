@@ -1,5 +1,6 @@
 import { InvalidInput } from '../../src/errors';
 import { coefficientEstimate } from '../../src/scheme/coefficientLimits';
+import type { Tell } from '../../src/progress';
 import { followed, type Signal } from '../../src/scheme/experiment';
 import { fitMechanism, type MechanismFit } from '../../src/scheme/fitMechanism';
 import { reactionInWords, type Scheme } from '../../src/scheme/scheme';
@@ -66,10 +67,13 @@ export default defineFunction({
   seeAlso: ['COURSE', 'ORDERS', 'PLAN'],
   reference: 'doi:10.1007/s10543-023-00967-x; Bates and Watts, Nonlinear Regression Analysis (1988), 6.1',
   isLong: true,
-  run({ detail: isDetailed, ...given }) {
-    const { coefficients, ...fit } = fitted(given);
+  run({ detail: isDetailed, ...given }, tell) {
+    const { coefficients, ...fit } = fitted(given, tell);
     if (isDetailed)
-      return coefficients.map((_, place) => detailedRow(given.scheme, { ...fit, coefficients }, place));
+      return coefficients.map((_, place) => {
+        tell?.({ doing: `limits of coefficient ${place + 1} of ${coefficients.length}` });
+        return detailedRow(given.scheme, { ...fit, coefficients }, place);
+      });
     return [coefficients.map(({ value, why }) => (why === '' ? value : new CellError('#N/A', why)))];
   },
   fits: (given) => tableOfCourse(fittedCourse, given),
@@ -77,14 +81,14 @@ export default defineFunction({
 
 type Given = Values<typeof parameters>;
 
-function fitted({ scheme, coefficients, initial, times, observed }: Given): MechanismFit {
+function fitted({ scheme, coefficients, initial, times, observed }: Given, tell?: Tell): MechanismFit {
   const start = filled(coefficients, 'coefficients', stepAt(scheme));
   const experiment = {
     initial: filled(initial, 'initial', speciesAt(scheme)),
     times: timesOf(times),
     signals: signalsOf(scheme, times, observed),
   };
-  return fitMechanism({ scheme, start, experiments: [experiment] });
+  return fitMechanism({ scheme, start, experiments: [experiment], tell });
 }
 
 function fittedCourse(given: Given): FittedCourse {

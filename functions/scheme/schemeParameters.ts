@@ -1,10 +1,12 @@
 /** What the functions that work on a written mechanism have in common. */
 import { InvalidInput, shown } from '../../src/errors';
+import type { Tell } from '../../src/progress';
 import { courseOf } from '../../src/scheme/course';
 import { parseScheme } from '../../src/scheme/parse';
 import { reactionInWords, type Scheme } from '../../src/scheme/scheme';
 import { CellError, shownCell, type CellRange } from '../cell';
 import { placeInWords, type Column } from '../column';
+import { plainNumber } from '../format';
 import { column, required, type Parameter } from '../parameters';
 
 /** One cell with the whole mechanism, or a step a cell. */
@@ -67,8 +69,13 @@ export function courseAt(
   coefficients: readonly number[],
   initial: readonly number[],
   times: Column,
+  tell?: Tell,
 ): (Float64Array | null)[] {
-  const rows = courseOf(scheme, coefficients, initial, timesOf(times))[Symbol.iterator]();
+  const asked = timesOf(times);
+  const end = asked.reduce((latest, time) => Math.max(latest, time), 0);
+  const watch = (time: number): void =>
+    tell?.({ doing: `at time ${plainNumber(time, 3)} of ${plainNumber(end, 3)}`, share: time / end });
+  const rows = courseOf(scheme, coefficients, initial, asked, { watch })[Symbol.iterator]();
   return times.numbers.map((time) => (time === null ? null : (rows.next().value as Float64Array)));
 }
 

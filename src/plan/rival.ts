@@ -3,6 +3,7 @@ import { InvalidInput, NotDetermined, requireFinite, shown } from '../errors';
 import { studentQuantile, studentTail } from '../numerics/studentT';
 import { fitRateLaw } from '../order/fit';
 import { reducedTimeTo, shareLeft } from '../order/law';
+import type { Tell } from '../progress';
 import { pairReadings } from '../series/series';
 import { longestPlan, reducedRate, requirePlannedRun, type PlannedRun } from './sampling';
 
@@ -19,12 +20,13 @@ export interface DiscriminationPlan {
  * The times at which the best curve of a rival order, c₀ and k fitted, misses the true one most.
  *
  * @param rival the order to be ruled out
+ * @param tell takes what is being done; how far it is nobody knows
  * @throws InvalidInput for numbers that make no run or an order that is no rival; NotDetermined with fewer than
  *   three readings, which two parameters can always meet
  * @see A. C. Atkinson and V. V. Fedorov, Biometrika 62 (1975) 57, doi:10.1093/biomet/62.1.57 (T-optimality)
  * @example planAgainst({ order: 1, rateCoefficient: 0.1, initial: 1, noise: 0.01, samples: 3 }, 2).times[0] // 0
  */
-export function planAgainst(run: PlannedRun, rival: number): DiscriminationPlan {
+export function planAgainst(run: PlannedRun, rival: number, tell?: Tell): DiscriminationPlan {
   requirePlannedRun(run);
   requireFinite({ rival });
   const { order, initial, noise, samples } = run;
@@ -34,7 +36,7 @@ export function planAgainst(run: PlannedRun, rival: number): DiscriminationPlan 
     throw new NotDetermined(`to tell two orders apart takes 3 readings or more: got ${samples}`);
   const longest = reducedTimeTo(2 ** -longestPlan, order);
   const reduced = forAll(
-    mostMissed(order, rival, Math.min(samples, mostSearched), longest),
+    mostMissed(order, rival, Math.min(samples, mostSearched), longest, tell),
     samples,
     longest,
   );
@@ -104,7 +106,7 @@ const gridPlaces = 240;
  * Readings are moved to where the rival's best curve misses most, as long as that makes it miss more; then
  * each is moved by ever smaller steps.
  */
-function mostMissed(order: number, rival: number, samples: number, longest: number): number[] {
+function mostMissed(order: number, rival: number, samples: number, longest: number, tell?: Tell): number[] {
   // the first reading stays at the start, from where the rival's curve is counted
   let times = Array.from({ length: samples }, (_, i) => (longest * i) / (samples - 1) / 2);
   let missed = missedBy(times, order, rival);
@@ -116,6 +118,7 @@ function mostMissed(order: number, rival: number, samples: number, longest: numb
     return true;
   };
   for (let round = 0; round < 100; round++) {
+    tell?.({ doing: `moving readings to where the orders differ most, round ${round + 1}` });
     const target = furthest(missed.at, longest);
     const byMiss = times
       .map((time, i) => [Math.abs(missed.at(time)), i] as const)
@@ -123,6 +126,7 @@ function mostMissed(order: number, rival: number, samples: number, longest: numb
     if (!byMiss.some(([, i]) => i > 0 && tryWith(replaced(times, i, target)))) break;
   }
   for (let step = longest / gridPlaces; step > longest * 1e-5; step /= 2) {
+    tell?.({ doing: 'moving each reading by smaller and smaller steps' });
     for (let i = 1; i < samples; i++) {
       for (const sign of [-1, 1]) {
         const moved = Math.min(longest, Math.max(0, times[i] + sign * step));

@@ -7,6 +7,7 @@
  */
 import { InvalidInput, NotDetermined } from '../errors';
 import type { LeastSquaresModel } from '../numerics/leastSquares';
+import type { Tell } from '../progress';
 import { trajectoryOf } from './course';
 import { readingsOf, type Experiment, type Reading } from './experiment';
 import type { Scheme } from './scheme';
@@ -25,6 +26,8 @@ export interface MechanismProblem {
   readonly tolerance?: number;
   /** Called now and then; may throw to end the work. */
   readonly watch?: (time: number, steps: number) => void;
+  /** Takes what is being done; how far the search is nobody knows. */
+  readonly tell?: Tell;
   /** What has been done so far; one object for all that belongs to a fit. */
   readonly work?: { done: number };
 }

@@ -21,9 +21,12 @@ const clearlyDeeper = 1e-3;
 export function lowestPlace(model: MechanismModel): LeastSquaresFit {
   const { problem, searched } = model;
   const coarse = new MechanismModel({ ...problem, tolerance: coarseTolerance }, searched);
+  problem.tell?.({ doing: 'searching from the coefficients given' });
   const own = attempt(coarse, coarse.start);
+  problem.tell?.({ doing: 'searching from coefficients that suit the run' });
   const other = attempt(coarse, startOfRuns(problem, searched));
   if (own instanceof NotDetermined && other instanceof NotDetermined) throw own;
+  problem.tell?.({ doing: 'fitting to the last digits' });
   return fitLeastSquares(model, better(own, other).parameters);
 }
 

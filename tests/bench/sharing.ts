@@ -4,7 +4,7 @@ import { sharingCaller, type Caller } from '../../functions/caller';
 import { functionNamed } from '../../functions/catalogue';
 import { series } from './fits';
 
-const alone: Pick<Caller, 'call'> = { call: callFunction };
+const alone: Pick<Caller, 'call'> = { call: (f, args) => callFunction(f, args) };
 const asCells = (numbers: Iterable<number>): number[][] => Array.from(numbers, (number) => [number]);
 const runs = series.map(({ times, values }) => [asCells(times), asCells(values)] as const);
 

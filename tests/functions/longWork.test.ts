@@ -1,6 +1,6 @@
 import { sharingCaller } from '../../functions/caller';
 import { functionNamed } from '../../functions/catalogue';
-import { CellError } from '../../functions/cell';
+import { CellError, type CellResult } from '../../functions/cell';
 import {
   answerJob,
   ready,
@@ -10,6 +10,7 @@ import {
   type WorkerLike,
 } from '../../functions/longWork';
 import { excelHandler } from '../../functions/runtime';
+import type { Progress } from '../../src/progress';
 
 /** A worker that answers when it is told to; what crosses is cloned, as between threads. */
 function fakeWorkers() {
@@ -32,7 +33,10 @@ function fakeWorkers() {
     },
     answer(which = 0): void {
       const { worker, jobs } = workers[which];
-      worker.onmessage!({ data: structuredClone<Answer>(answerJob(jobs.shift()!)) });
+      const answer = answerJob(jobs.shift()!, (howFar) =>
+        worker.onmessage!({ data: structuredClone(howFar) }),
+      );
+      worker.onmessage!({ data: structuredClone<Answer>(answer) });
     },
   };
 }
@@ -170,4 +174,59 @@ test('what is under way is told, with a way to stop it', async () => {
   stop();
   expect(await answers[1]).toMatchObject({ code: '#N/A' });
   expect(told).toEqual(['PACE.EVENT and 0 more', 'PACE.PLAN and 0 more', null]);
+});
+
+/** All that a function says of itself while it works out its answer. */
+async function saidBy(name: string, args: readonly CellResult[]): Promise<(Progress | undefined)[]> {
+  const fake = fakeWorkers();
+  const said: (Progress | undefined)[] = [];
+  const work = workerWork(fake.start, (underway) => underway && said.push(underway.progress));
+  const answer = work.run(functionNamed(name)!, args);
+  fake.answer();
+  expect(await answer).not.toBeInstanceOf(CellError);
+  return said;
+}
+
+test('a survey tells which run it is at, and the share of runs that are done', async () => {
+  const times = [[0], [10], [20], [30], [40]];
+  const block = times.map(([t]) => [1, 2, 3, 4].map((half) => 8 * 0.5 ** (t / (10 * half))));
+  expect(await saidBy('SURVEY', [times, block, 1])).toEqual([
+    undefined,
+    { doing: 'run 1 of 4', share: 0 },
+    { doing: 'run 2 of 4', share: 0.25 },
+    { doing: 'run 3 of 4', share: 0.5 },
+    { doing: 'run 4 of 4', share: 0.75 },
+  ]);
+});
+
+test('a course tells the time that it has come to', async () => {
+  // two species that chase each other for long
+  const said = await saidBy('COURSE', [
+    'X -> 2 X; X + Y -> 2 Y; Y ->',
+    [[1], [1], [1]],
+    [[1], [0.5]],
+    [[500]],
+  ]);
+  const shares = said.slice(1).map((one) => one!.share!);
+  expect(shares.length).toBeGreaterThan(3);
+  expect(shares).toEqual([...shares].sort((a, b) => a - b));
+  expect(shares[0]).toBeGreaterThan(0);
+  expect(shares.at(-1)).toBeLessThan(1);
+  said.slice(1).forEach((one) => expect(one!.doing).toMatch(/^at time [\d.]+ of 500$/));
+  expect(Number(said.at(-1)!.doing.split(' ')[2]) / 500).toBeCloseTo(shares.at(-1)!, 2);
+});
+
+test('a search says what it does, and pretends to no share', async () => {
+  const times = [[0], [5], [10], [20], [30]];
+  const observed = times.map(([t], i) => [8 * Math.exp(-0.07 * t) + 0.01 * (-1) ** i, null]);
+  const said = await saidBy('FITCOURSE', ['A -> B', [[0.1]], [[8], [0]], times, observed, true]);
+  expect(said.slice(1).map((one) => one!.doing)).toEqual([
+    'searching from the coefficients given',
+    'searching from coefficients that suit the run',
+    'fitting to the last digits',
+    'limits of coefficient 1 of 1',
+  ]);
+  const planning = await saidBy('PLAN', [1, 0.1, 1, 0.01, 4, 2]);
+  expect(planning[1]!.doing).toMatch(/^moving readings to where the orders differ most/);
+  for (const one of [...said, ...planning]) expect(one?.share).toBeUndefined();
 });

@@ -7,6 +7,7 @@ import { supportOf } from '../../taskpane/excel/support';
 import { officeIsDark } from '../../taskpane/excel/theme';
 import { h } from '../../taskpane/h';
 import { hostName, notice } from '../../taskpane/host';
+import { longWorkBar } from '../../taskpane/longWorkBar';
 import { mountPane } from '../../taskpane/pane';
 import '../../taskpane/pane.css';
 import { startWorker } from '../../taskpane/startWorker';
@@ -20,7 +21,7 @@ associateAll(globalThis, {
     await Office.onReady();
     return blanksIn(address);
   },
-  caller: sharingCaller(workerWork(startWorker)),
+  caller: sharingCaller(workerWork(startWorker, longWorkBar(document.getElementById('long-work')!))),
 });
 
 async function start(root: HTMLElement): Promise<void> {

@@ -1,6 +1,7 @@
 /** The local workbook: a grid with every PACE function live, and the pane beside it. */
 import { workerWork } from '../../functions/longWork';
 import { h } from '../../taskpane/h';
+import { longWorkBar } from '../../taskpane/longWorkBar';
 import { mountPane } from '../../taskpane/pane';
 import { startWorker } from '../../taskpane/startWorker';
 import { followTheme } from '../../taskpane/theme';
@@ -17,7 +18,6 @@ import './page.css';
 import { moveBetween } from './regions';
 import { offerToScripts } from './scripting';
 import { fillStrip } from './strip';
-import { waitingFor } from './waitingFor';
 
 const part = (id: string): HTMLElement => document.getElementById(id)!;
 
@@ -28,7 +28,7 @@ async function start(): Promise<void> {
   const demo = demoWorkbook();
   const grid = createGrid(gridElement, demo, {
     isDark,
-    longWork: workerWork(startWorker, waitingFor(part('long-work'))),
+    longWork: workerWork(startWorker, longWorkBar(part('long-work'))),
   });
 
   const strip = fillStrip(part('strip'), {

@@ -1,5 +1,6 @@
 /** The sheet on the page: every function live, typed with help, recalculated, and honest about errors. */
 import { waitUntil, type BenchPage } from '../bench';
+import { violations } from './access';
 
 export function sheetSuite(sheet: () => BenchPage): void {
   // less to calculate than the demo, for those who need some cells and no more
@@ -41,6 +42,30 @@ export function sheetSuite(sheet: () => BenchPage): void {
       [2, 6],
     ]);
     expect(sheet().page.workers()).toHaveLength(1);
+  });
+
+  test('a long calculation says how far it is, and can be stopped', async () => {
+    const bar = sheet().page.locator('#long-work progress');
+    // runs that fade, each in its own time, and that a curve does not meet to the last digit
+    const reading = (row: number, run: number): number =>
+      Math.exp(-row / (20 + run)) + 0.002 * Math.sin(row * run);
+    const rows = Array.from({ length: 150 }, (_, row) => row);
+    const block = rows.map((row) => [row, ...rows.slice(1, 121).map((run) => reading(row, run))]);
+    await sheet().show(block);
+    await sheet().type("'Gas run'!DS3", '=PACE.SURVEY(A1:A150,B1:DQ150)');
+    await bar.waitFor();
+    await sheet()
+      .page.locator('#long-work', { hasText: /calculating PACE\.SURVEY.*run \d+ of 120/s })
+      .waitFor();
+    const first = Number(await bar.getAttribute('aria-valuenow'));
+    await waitUntil(async () => Number(await bar.getAttribute('aria-valuenow')) > first);
+    expect(Number(await bar.getAttribute('aria-valuenow'))).toBeGreaterThan(first);
+    expect(await violations(sheet(), ['#long-work'])).toEqual([]);
+    await sheet().page.locator('#long-work button').click();
+    const shown = async (): Promise<unknown> => (await sheet().cells("'Gas run'!DS3"))[0][0];
+    await waitUntil(async () => (await shown()) !== null);
+    expect(await shown()).toMatchObject({ code: '#N/A' });
+    await sheet().page.locator('#long-work progress').waitFor({ state: 'detached' });
   });
 
   test('Enter puts in what was typed, whatever the list of names suggests', async () => {
