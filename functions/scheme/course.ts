@@ -1,3 +1,4 @@
+import { sayCourse } from '../builtIn/closedCourse';
 import type { CellValue } from '../cell';
 import { linesBeside } from '../column';
 import { defineFunction } from '../define';
@@ -16,7 +17,7 @@ export default defineFunction({
   family: 'mechanism',
   summary: 'Concentration of every species of a written mechanism over time, a column each.',
   equations: schemeEquations,
-  method: `${schemeMethod} Columns stand in the order in which the scheme first names the species; a row of times is answered in rows. Times may stand in any order.`,
+  method: `${schemeMethod} Where the equations have a closed form (first-order steps of one reactant, A <-> B, A -> B -> C, one step of second order), that is used instead. Columns stand in the order in which the scheme first names the species; a row of times is answered in rows. Times may stand in any order.`,
   uncertainty:
     'None is given: the course follows exactly from the coefficients you give. Numbers of the integration are good to about eight digits.',
   parameters: schemeParameters,
@@ -58,4 +59,5 @@ export default defineFunction({
       course.map((row) => (row ? [...row] : gap)),
     );
   },
+  builtIn: sayCourse,
 });

@@ -1,6 +1,7 @@
 /** What the functions that work on a written mechanism have in common. */
 import { InvalidInput, shown } from '../../src/errors';
 import type { Tell } from '../../src/progress';
+import { closedCourseOf } from '../../src/scheme/closedCourse';
 import { courseOf } from '../../src/scheme/course';
 import { parseScheme } from '../../src/scheme/parse';
 import { reactionInWords, type Scheme } from '../../src/scheme/scheme';
@@ -75,7 +76,8 @@ export function courseAt(
   const end = asked.reduce((latest, time) => Math.max(latest, time), 0);
   const watch = (time: number): void =>
     tell?.({ doing: `at time ${plainNumber(time, 3)} of ${plainNumber(end, 3)}`, share: time / end });
-  const rows = courseOf(scheme, coefficients, initial, asked, { watch })[Symbol.iterator]();
+  const given = [scheme, coefficients, initial, asked] as const;
+  const rows = (closedCourseOf(...given) ?? courseOf(...given, { watch }))[Symbol.iterator]();
   return times.numbers.map((time) => (time === null ? null : (rows.next().value as Float64Array)));
 }
 

@@ -54,8 +54,7 @@ export function trajectoryOf(
   times: ArrayLike<number>,
   options: CourseOptions = {},
 ): Trajectory {
-  requireCoefficients(scheme, coefficients);
-  requireInitial(scheme, initial);
+  requireCourse(scheme, coefficients, initial, times);
   const order = ascending(times);
   const sorted = Float64Array.from(order, (place) => times[place]);
   const system = new MassAction(scheme, Float64Array.from(coefficients), spent * highest(initial));
@@ -67,6 +66,23 @@ export function trajectoryOf(
     states: Array.from(place, (i) => found.states[i]),
     sensitivities: found.sensitivities.length > 0 ? Array.from(place, (i) => found.sensitivities[i]) : [],
   };
+}
+
+/**
+ * What every course must be given.
+ *
+ * @throws InvalidInput where something is missing or out of range
+ * @example requireCourse(parseScheme('A -> B'), [1], [1, 0], [0, 10]) // undefined
+ */
+export function requireCourse(
+  scheme: Scheme,
+  coefficients: ArrayLike<number>,
+  initial: ArrayLike<number>,
+  times: ArrayLike<number>,
+): void {
+  requireCoefficients(scheme, coefficients);
+  requireInitial(scheme, initial);
+  requireTimes(times);
 }
 
 function requireCoefficients(scheme: Scheme, coefficients: ArrayLike<number>): void {
@@ -101,17 +117,18 @@ function requireInitial({ species }: Scheme, initial: ArrayLike<number>): void {
   });
 }
 
-/** Places of the times, earliest first. @throws InvalidInput for one before 0 */
-function ascending(times: ArrayLike<number>): number[] {
-  const order = Array.from(times, (_, place) => place);
-  for (const place of order) {
-    if (Number.isFinite(times[place]) && times[place] >= 0) continue;
+function requireTimes(times: ArrayLike<number>): void {
+  Array.from(times).forEach((time, place) => {
+    if (Number.isFinite(time) && time >= 0) return;
     throw new InvalidInput(
-      `times must be 0 or later, since initial belongs to time 0: row ${place + 1} (${shown(times[place])})`,
+      `times must be 0 or later, since initial belongs to time 0: row ${place + 1} (${shown(time)})`,
     );
-  }
-  return order.sort((one, other) => times[one] - times[other]);
+  });
 }
+
+/** Places of the times, earliest first. */
+const ascending = (times: ArrayLike<number>): number[] =>
+  Array.from(times, (_, place) => place).sort((one, other) => times[one] - times[other]);
 
 const highest = (values: ArrayLike<number>): number =>
   Array.from(values).reduce((largest, value) => Math.max(largest, value), 0) || 1;

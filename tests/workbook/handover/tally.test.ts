@@ -21,7 +21,6 @@ const noCounterpart = [
   'HALFLIFE',
   'OVERLAYORDER',
   'SURVEY',
-  'COURSE',
   'FITCOURSE',
   'PLAN',
   'CHECK',

@@ -5,6 +5,7 @@ import { fits } from './fits';
 import { formulas } from './formulas';
 import { gas } from './gas';
 import { linear } from './linear';
+import { mechanisms } from './mechanisms';
 import { rate } from './rate';
 import { readings } from './readings';
 import { temperature } from './temperature';
@@ -17,5 +18,6 @@ export const cases: Cases = {
   ...rate,
   ...course,
   ...fits,
+  ...mechanisms,
   ...temperature,
 };
