@@ -12,6 +12,9 @@ import type { World } from './world';
 /** Relative; what two ways of writing one sum differ by is a thousand times less. */
 const tolerance = 1e-9;
 
+/** Of a sum of numbers, relative to the largest of them. */
+const rounding = 1e-12;
+
 /** Columns to the right, beyond what any sheet of readings uses. */
 const aside = 8000;
 
@@ -42,12 +45,11 @@ export async function checked(
   );
   const first = groups.flatMap((group) => group.filter((_, place) => isChosen(place, group.length)));
   const isFirst = new Set(first);
-  const off = await judged(first, whole);
+  const scales = new Map(groups.flatMap((group) => group.map((formula) => [formula, largestAlike(group)])));
+  const judged = (some: readonly HandedFormula[]): Promise<Found> => foundOff(some, whole, world, scales);
+  const off = await judged(first);
   const doubtful = groups.filter((group) => group.some((formula) => off.has(formula))).flat();
-  const rest = await judged(
-    doubtful.filter((formula) => !isFirst.has(formula)),
-    whole,
-  );
+  const rest = await judged(doubtful.filter((formula) => !isFirst.has(formula)));
   return {
     formulas: formulas.map((formula) => {
       const why = off.get(formula) ?? rest.get(formula);
@@ -61,16 +63,23 @@ export async function checked(
 const isChosen = (place: number, all: number): boolean =>
   all <= mostJudged || place === all - 1 || place % Math.ceil(all / mostJudged) === 0;
 
-/** @returns of those that came to something else, to what */
-async function judged(
+/** Formulas that came to something else, with what that was. */
+type Found = ReadonlyMap<HandedFormula, string>;
+
+/** Of each column of a result, the largest number that formulas alike show there. */
+type Sizes = readonly number[];
+
+async function foundOff(
   formulas: readonly HandedFormula[],
   book: BookModel,
-): Promise<ReadonlyMap<HandedFormula, string>> {
+  world: World,
+  sizes: ReadonlyMap<HandedFormula, Sizes>,
+): Promise<Found> {
   if (formulas.length === 0) return new Map();
   const calculated = await calculate(withFormulasAside(formulas, book));
   return new Map(
     formulas.flatMap((formula) => {
-      const off = firstOff(formula, calculated);
+      const off = firstOff(formula, calculated, sizes.get(formula)!, world);
       return off === undefined ? [] : [[formula, off]];
     }),
   );
@@ -104,32 +113,51 @@ const cellsAside = ({ row, column, said, values }: HandedFormula): CellModel[] =
   );
 
 function firstOff(
-  { sheet, row, column, said, values }: HandedFormula,
+  formula: HandedFormula,
   calculated: CalculatedBook,
+  sizes: Sizes,
+  world: World,
 ): string | undefined {
-  if (!said) return undefined;
-  const size = largest(values);
+  const { sheet, row, column, values } = formula;
   for (const [r, line] of values.entries()) {
     for (const [c, ours] of line.entries()) {
       if (!isJudged(values, r, c)) continue;
       const theirs = calculated.formula(sheet, row + r, aside + column + c)?.value ?? null;
-      if (!isSame(ours, theirs, size)) return `built-in functions give ${shown(theirs)} for ${shown(ours)}`;
+      if (isSame(ours, theirs, sizes[c]) || isRoundingOfZero(ours, theirs, formula, world)) continue;
+      return `built-in functions give ${shown(theirs)} for ${shown(ours)}`;
     }
   }
   return undefined;
 }
 
-/** @param size the largest number of the whole result: a 0 among rates can come out as their rounding */
+/** @param size the largest number among others of its kind: what ought to be 0 can come out as their rounding */
 export function isSame(ours: CellValue, theirs: CellValue, size: number): boolean {
   if (typeof ours === 'number' && typeof theirs === 'number')
-    return Math.abs(ours - theirs) <= tolerance * Math.max(Math.abs(ours), size / 1000);
+    return Math.abs(ours - theirs) <= Math.max(tolerance * Math.abs(ours), rounding * size);
   if (ours instanceof CellError) return theirs instanceof CellError && theirs.code === ours.code;
   return (ours ?? '') === (theirs ?? '');
 }
 
-const largest = (values: HandedFormula['values']): number =>
-  values
-    .flat()
-    .reduce<number>((most, value) => (typeof value === 'number' ? Math.max(most, Math.abs(value)) : most), 0);
+/** The slope of a level run is 0 here, and some 1E-17 where the same sum is taken in another order. */
+function isRoundingOfZero(ours: CellValue, theirs: CellValue, formula: HandedFormula, world: World): boolean {
+  if (ours !== 0 || typeof theirs !== 'number') return false;
+  const { original, sheet } = formula;
+  const read = world
+    .areasIn(world.spelledOut(original, formula), sheet)
+    .map((area) => largest(world.cellsIn(area, sheet).flat()));
+  return Math.abs(theirs) <= rounding * Math.max(0, ...read);
+}
+
+/** A lone row has no others of its kind: there the whole result is the measure. */
+function largestAlike(group: readonly HandedFormula[]): Sizes {
+  const rows = group.flatMap(({ values }) => values);
+  return rows[0].map((_, c) => largest(rows.length === 1 ? rows[0] : rows.map((row) => row[c])));
+}
+
+const largest = (values: readonly CellValue[]): number =>
+  values.reduce<number>(
+    (most, value) => (typeof value === 'number' ? Math.max(most, Math.abs(value)) : most),
+    0,
+  );
 
 const shown = (value: CellValue): string => (value instanceof CellError ? value.code : JSON.stringify(value));

@@ -15,7 +15,6 @@ interface Placed {
   /** Of its first cell, below the title. */
   readonly row: number;
   readonly rows: Rows;
-  readonly own: Table;
 }
 
 const introduction: readonly SheetCell[][] = [
@@ -26,7 +25,8 @@ const introduction: readonly SheetCell[][] = [
 ];
 
 export class WorkingsSheet {
-  private placed: readonly Placed[] = [];
+  private readonly placed: Placed[] = [];
+  private readonly byTitle = new Map<string, Table>();
 
   /** What names the sheet in a formula. */
   private readonly ownName: RegExp;
@@ -46,18 +46,18 @@ export class WorkingsSheet {
 
   /** Tables that the work adds are taken back where it fails. */
   attempt<T>(work: () => T): T {
-    const before = this.placed;
+    const before = this.placed.length;
     try {
       return work();
     } catch (error) {
-      this.placed = before;
+      for (const { title } of this.placed.splice(before)) this.byTitle.delete(title);
       throw error;
     }
   }
 
   private table(title: string, rows: (own: Table) => Rows): Table {
-    const known = this.placed.find((table) => table.title === title);
-    if (known) return known.own;
+    const known = this.byTitle.get(title);
+    if (known) return known;
     const last = this.placed.at(-1);
     const row = last ? last.row + last.rows.length + 2 : introduction.length + 2;
     const area = { sheet: this.name, row, column: 0 };
@@ -68,10 +68,8 @@ export class WorkingsSheet {
       cell: (r, column) => range(r, column, 1),
       area: (height, width) => ({ ...area, rows: height, columns: width }),
     };
-    this.placed = [
-      ...this.placed,
-      { title, row, rows: rows(own).map((line) => line.map((cell) => this.atHome(cell))), own },
-    ];
+    this.placed.push({ title, row, rows: rows(own).map((line) => line.map((cell) => this.atHome(cell))) });
+    this.byTitle.set(title, own);
     return own;
   }
 

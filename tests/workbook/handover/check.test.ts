@@ -51,3 +51,17 @@ test('a formula that reads another kind of cell is judged by itself', async () =
   all.splice(1, 0, handed(times.length, `1/A${times.length + 1}`)); // at a place that is passed over
   expect((await frozenAmong(all)).map(({ row }) => row)).toEqual([times.length]);
 });
+
+test('a slope of 0 may come out as the rounding of what it was read from, and as no more', async () => {
+  const level = (said: string): HandedFormula => ({ ...handed(4, said), values: [[0]] }); // of a reading of 5
+  expect(await frozenAmong([level('4E-12')])).toEqual([]);
+  const [frozen] = await frozenAmong([level('6E-12')]);
+  expect(frozen.why).toBe('built-in functions give 6e-12 for 0');
+});
+
+test('among larger ones alike, a number that is all rounding need not agree with another rounding', async () => {
+  const small = (said: string): HandedFormula => ({ ...handed(4, said), values: [[3e-14]] });
+  const others = times.slice(10).map((_, n) => handed(n + 10, `1/A${n + 11}`)); // the largest is 1/11
+  expect(await frozenAmong([small('1E-14'), ...others])).toEqual([]);
+  expect(await frozenAmong([small('1E-14')])).toHaveLength(1);
+});
