@@ -5,8 +5,16 @@ import type { CellValue } from './cell';
 import { linesBeside, placeInWords, type Column } from './column';
 import type { Uncertainties } from './commonParameters';
 
-export const seriesOf = (times: Column, values: Column): Series =>
-  pairReadings(times.numbers, values.numbers);
+/** Formulas filled down ask about one run, and much of what is found out about a run is kept with it. */
+const known = new WeakMap<Column, WeakMap<Column, Series>>();
+
+export function seriesOf(times: Column, values: Column): Series {
+  const beside = known.get(times) ?? new WeakMap<Column, Series>();
+  known.set(times, beside);
+  const series = beside.get(values) ?? pairReadings(times.numbers, values.numbers);
+  beside.set(values, series);
+  return series;
+}
 
 /**
  * The standard uncertainty of each reading that was kept, in the order of the series.

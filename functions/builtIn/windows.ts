@@ -1,9 +1,10 @@
 /** The readings nearest to any time, on the sheet "Workings": with which of them a window of so many begins. */
 import { timeRounding, turningTime } from '../../src/rate/localPolynomial';
 import { tangentWindow, type TangentWindow } from '../../src/rate/tangent';
-import { pairReadings, type Series } from '../../src/series/series';
+import type { Series } from '../../src/series/series';
 import type { CellValue } from '../cell';
 import type { Column } from '../column';
+import { seriesOf } from '../run';
 import type { Given } from './given';
 import { isNumberText } from './phrase';
 import { PolynomialAt } from './polynomialAt';
@@ -17,9 +18,7 @@ const [wanted, used, headings, firstRow] = [0, 1, 2, 3];
 /** The window that the data choose on the day of the copy; without scatter where the run has none to judge by. */
 export function windowOfTheDay(given: Given): TangentWindow {
   const [times, values] = [given.today<Column>('times'), given.today<Column>('values')];
-  return tangentWindow(pairReadings(times.numbers, values.numbers), {
-    degree: given.constant('degree').value,
-  });
+  return tangentWindow(seriesOf(times, values), { degree: given.constant('degree').value });
 }
 
 export class Windows {

@@ -54,12 +54,28 @@ export function tangentWindow(
       throw new InvalidInput(`points must not exceed the ${count} readings there are: got ${points}`);
   }
   const nu = stoichiometricNumberFor(series, stoichiometricNumber);
-  if (points !== undefined) return { points, degree, stoichiometricNumber: nu };
-  const chosen = defaultWindow(series, degree);
-  const window = { points: chosen, degree, stoichiometricNumber: nu };
-  return canBendMore(series, chosen, degree)
-    ? { ...window, scatter: scatterAlong(series, chosen, degree + 1) }
-    : window;
+  const width = points === undefined ? widthChosenBy(series, degree) : { points };
+  return { ...width, degree, stoichiometricNumber: nu };
+}
+
+type Width = Pick<TangentWindow, 'points' | 'scatter'>;
+
+/** By degree. Tangents of one run mostly come in a column, and the choice is most of their work. */
+const chosen = new WeakMap<Series, Map<number, Width>>();
+
+function widthChosenBy(series: Series, degree: number): Width {
+  const widths = chosen.get(series) ?? new Map<number, Width>();
+  chosen.set(series, widths);
+  const width = widths.get(degree) ?? chooseWidth(series, degree);
+  widths.set(degree, width);
+  return width;
+}
+
+function chooseWidth(series: Series, degree: number): Width {
+  const points = defaultWindow(series, degree);
+  return canBendMore(series, points, degree)
+    ? { points, scatter: scatterAlong(series, points, degree + 1) }
+    : { points };
 }
 
 /** Every window can carry one degree more and leave scatter to judge by. */
