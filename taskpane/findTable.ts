@@ -48,7 +48,7 @@ function gridIn({ area: stands, cells: standing }: RangeReading, isTurned: boole
   const first = firstRowOfNumbers(cells);
   if (first < 0)
     return cells.flat().some(isNumber)
-      ? `a run needs a ${line} of times and a ${line} of readings, side by side: ${areaName(stands)} has one ${line} of numbers`
+      ? `a run needs a ${line} of times and a ${line} of readings, side by side: ${areaName(stands)} has one ${line} of numbers${timesInWords(cells)}`
       : `a run is made of numbers: ${areaName(stands)} holds none`;
   const last = cells.length - 1 - [...cells].reverse().findIndex((row) => row.some(isFigure));
   const lines = Array.from({ length: area.columns }, (_, place) => {
@@ -71,6 +71,15 @@ function gridIn({ area: stands, cells: standing }: RangeReading, isTurned: boole
     firstRow: area.row + first,
     lastRow: area.row + last,
   };
+}
+
+/** Dates that were typed as words look like numbers to a person. */
+function timesInWords(cells: CellRange): string {
+  const words = cells.slice(1).flat().filter(isText);
+  const dated = words.filter((word) => /\d.*[-/.:]\s*\d/.test(word));
+  return dated.length < 2
+    ? ''
+    : `; “${dated[0].trim()}” is text: type times as numbers, or as a date that the sheet knows`;
 }
 
 const named = ({ column, heading }: TableColumn): TableColumn => ({ column, heading });

@@ -2,6 +2,7 @@
 import { areaName } from '../../functions/address';
 import { shown } from '../../src/errors';
 import type { Actions } from '../actions';
+import { runningTimeFormula } from '../calls/clock';
 import { rises } from '../calls/order';
 import { h, type Child } from '../h';
 import { later } from '../later';
@@ -13,6 +14,7 @@ import { placeName } from '../turned';
 import { columnField } from './columnField';
 import { findingsList } from './findings';
 import { button, selectField, step, textField, type Choice } from './fields';
+import { formulaLine } from './formulaLine';
 import { howItIsRead } from './howItIsRead';
 
 /** Drawn again only for another run or block: a table of many columns has long lists to choose from. */
@@ -58,6 +60,7 @@ function chosenRun(table: Table, run: Run, { state, check }: Scene, actions: Act
       rowField('last-row', 'To', table, run, 'lastRow', actions),
     ),
     ...unitFields(table, run, actions),
+    ...clockTimes(table, run, actions),
     isFollowedInTime(table, run) && h('p', { className: 'hint' }, pointsInWords(table, run)),
     table.apart !== '' && h('p', { className: 'problem' }, table.apart),
     hint !== '' && problem(hint),
@@ -107,6 +110,20 @@ function unitField(id: string, label: string, table: Table, column: number, acti
     whenEmpty: 'heading says none',
     onInput: (unit) => void actions.correctTable({ units: { ...units, [column]: unit } }),
   });
+}
+
+/** A sheet counts clock times and dates in days, and words not at all. */
+function clockTimes(table: Table, run: Run, actions: Actions): Child[] {
+  const formula = runningTimeFormula(table, run);
+  if (formula === null) return [];
+  return [
+    h(
+      'p',
+      { className: 'warning' },
+      'These look like clock times or dates. For minutes since the first reading, put this into a free column with the heading “t / min”, and choose that column as Times:',
+    ),
+    formulaLine({ formula, sheet: table.sheet, id: 'clock-formula' }, actions),
+  ];
 }
 
 /** So many rows still make a list that can be picked from; beyond, every nth. */

@@ -102,6 +102,15 @@ export function tablesSuite(sheet: () => BenchPage, bench: () => PageBench): voi
     await press('Rate');
   });
 
+  test('clock times are offered a formula that makes minutes of them', async () => {
+    await work([['time', 'c / mM'], ...times.map((t, i) => [46329 + (9 * 60 + t) / 1440, 8 * 0.5 ** i])]);
+    await says('#clock-formula', '=PACE.CLOCK(\'Gas run\'!A2:A8,"min","first")');
+    await sheet().type("'Gas run'!C1", 't / min');
+    await sheet().type("'Gas run'!C2", await pane('#clock-formula').innerText());
+    await waitUntil(async () => typeof (await cell('C8')) === 'number');
+    expect(await cell('C8')).toBeCloseTo(60, 5);
+  });
+
   test('rows of runs that are mixed are said to be, with what to do', async () => {
     const [headings, ...rows] = long;
     await work([headings, ...rows.sort((a, b) => Number(a[1]) - Number(b[1]))]);
