@@ -2,6 +2,7 @@ import { InvalidInput } from '../../src/errors';
 import { overlayExponent, type OverlayRun } from '../../src/order/overlay';
 import { pairReadings } from '../../src/series/series';
 import type { Column } from '../column';
+import { NotSaid } from '../builtIn/said';
 import { defineFunction } from '../define';
 import { uncertaintyOf } from '../uncertaintyOf';
 import { column } from '../parameters';
@@ -56,6 +57,11 @@ export default defineFunction({
       overlayExponent(runOf(times1, products1, reactants1, '1'), runOf(times2, products2, reactants2, '2')),
     ),
   ],
+  builtIn: () => {
+    throw new NotSaid(
+      'its exponent is searched for, about a curve whose degree is found by trial, which no built-in function does',
+    );
+  },
 });
 
 /** Only times at which both product and reactant are known. */

@@ -75,6 +75,18 @@ export const fits: Cases = {
     becomes: 'frozen',
     changed: { F5: 5.2 },
   },
+  'Overlay of two runs': {
+    typed: {
+      ...column('A1', [0, 1, 2, 3, 4]),
+      ...column('B1', [0, 4, 6.1, 7, 7.5]),
+      ...column('C1', [8, 4, 1.9, 1, 0.5]),
+      ...column('D1', [0, 2, 2.9, 3.5, 3.8]),
+      ...column('E1', [4, 2, 1.1, 0.5, 0.2]),
+      G1: '=PACE.OVERLAYORDER(A1:A5,B1:B5,C1:C5,A1:A5,D1:D5,E1:E5)',
+    },
+    becomes: 'frozen',
+    changed: { D3: 3 },
+  },
   'Fits of several runs': {
     typed: {
       ...fading,
