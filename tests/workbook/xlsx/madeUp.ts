@@ -86,7 +86,9 @@ export function madeUp(seed: number): MadeUp {
     if (!area) return;
     merged.push(area);
     const [first, ...others] = placesIn(area);
-    put(first, chance(0.5) ? number() : `<f>${one(formulas)}</f>${stale()}`);
+    // said in built-in functions, the last would be an array formula, which cannot stand here
+    const text = chance(0.5) ? one(formulas) : '_xldudf_PACE_BETWEEN({0;1;2},{0;2;4},0.5,1.5)';
+    put(first, chance(0.3) ? number() : `<f>${text}</f>${stale()}`);
     if (chance(0.5)) others.forEach((other) => put(other, '', ' s="0"'));
   }
 
