@@ -1,31 +1,36 @@
 /** What is read off a run reading by reading, said in built-in functions. */
+import { InvalidInput, NotDetermined } from '../../src/errors';
+import { normalisedTimes } from '../../src/order/normalisedTime';
+import type { CellValue } from '../cell';
 import type { Given } from './given';
 import { Means } from './means';
 import { holdsOf } from './phrase';
 import { SortedRun } from './sortedRun';
 import { NotSaid, type Said } from './said';
 import { where } from './text';
-import { headingRow, type WorkingCell } from './workings';
+import { headingRow, workingFormula, type WorkingCell } from './workings';
 
 /** Σ[(cᵢ + cᵢ₋₁)/2]ᵝ(tᵢ − tᵢ₋₁) up to each reading. */
 export function sayNormalTime(given: Given): Said {
   const run = new SortedRun(given);
   const [exponent, b] = [given.number('exponent'), given.numberFromWorkings('exponent')];
-  run.requireShort();
+  run.requireShort(true);
   const title = `Normalised time with the exponent ${b}: ${run.name}`;
-  const table = given.workings.table(title, (own) => [
-    headingRow('time', 'normalised time'),
-    ...Array.from({ length: run.size }, (_, n): WorkingCell[] => {
-      if (n === 0) return [{ formula: run.time(0) }, 0];
-      const step = `(${run.time(n)}-${run.time(n - 1)})`;
-      const mean = `((${run.value(n - 1)}+${run.value(n)})/2)`;
-      const sum = `${own.cell(n, 1)}+IF(${b}=0,1,${mean}^${b})*${step}`;
-      const known = (formula: string): WorkingCell => ({
-        formula: `IF(ISNUMBER(${run.time(n)}),${formula},"")`,
-      });
-      return [known(run.time(n)), known(sum)];
-    }),
-  ]);
+  const table = given.workings.table(title, (own) => {
+    const today = normalisedToday(given, run);
+    return [
+      headingRow('time', 'normalised time'),
+      [workingFormula(run.time(0), run.today?.times[0]), 0],
+      ...Array.from({ length: run.size - 1 }, (_, n): WorkingCell[] => {
+        const step = `(${run.time(n + 1)}-${run.time(n)})`;
+        const mean = `((${run.value(n)}+${run.value(n + 1)})/2)`;
+        const sum = `${own.cell(n + 1, 1)}+IF(${b}=0,1,${mean}^${b})*${step}`;
+        return [run.time(n + 1), sum].map((formula, column) =>
+          workingFormula(`IF(ISNUMBER(${run.time(n + 1)}),${formula},"")`, today?.[column][n + 1]),
+        );
+      }),
+    ];
+  });
   const least = `MIN(${run.values})`;
   const allowed = `OR(AND(${exponent.text}>=0,${exponent.text}=INT(${exponent.text})),${least}>0,AND(${exponent.text}>0,${least}>=0))`;
   const holds = [...run.holds, ...holdsOf(exponent), allowed, `MAX(${run.times})>MIN(${run.times})`];
@@ -38,6 +43,18 @@ export function sayNormalTime(given: Given): Said {
       return where(holds, `IF(ISNUMBER(${time})*ISNUMBER(${value}),${own},"")`);
     },
   };
+}
+
+/** Times and normalised times, empty below the last; nothing where they cannot be. */
+function normalisedToday(given: Given, { today, size }: SortedRun): CellValue[][] | undefined {
+  if (!today) return undefined;
+  try {
+    const normalised = normalisedTimes(today, given.today<number>('exponent'));
+    return [today.times, normalised].map((known) => Array.from({ length: size }, (_, n) => known[n] ?? ''));
+  } catch (error) {
+    if (error instanceof InvalidInput || error instanceof NotDetermined) return undefined;
+    throw error;
+  }
 }
 
 /** The times that each halving of the distance from the end took. */

@@ -2,6 +2,7 @@
 import { standardRowTexts } from './estimate';
 import type { Given } from './given';
 import { holdsOf } from './phrase';
+import { Means } from './means';
 import { Pairs } from './pairs';
 import { SingleScatter } from './singleScatter';
 import { SortedRun } from './sortedRun';
@@ -27,7 +28,7 @@ export function sayBetween(given: Given): Said {
 
 /** The five cells of the standard row. */
 function averageWithScatter(given: Given, perTime: string): string[] {
-  const scatter = new SingleScatter(given, new SortedRun(given));
+  const scatter = new SingleScatter(given, new Means(given, new SortedRun(given)));
   const change = scatter.change(given);
   return standardRowTexts({
     value: `${change.value}/${perTime}`,

@@ -1,8 +1,7 @@
 /** The scatter of single readings without a model of the run (src/rate/average.ts, with its source), on "Workings". */
 import { studentFactorText } from './estimate';
 import type { Given } from './given';
-import { Means } from './means';
-import type { SortedRun } from './sortedRun';
+import type { Means } from './means';
 import { headingRow, type Table, type WorkingCell } from './workings';
 
 /** Rows of the table. */
@@ -10,14 +9,13 @@ const [inner, deviation, freedom, factor, headings, firstRow] = [0, 1, 2, 3, 4, 
 
 export class SingleScatter {
   private readonly table: Table;
-  private readonly means: Means;
 
   constructor(
     given: Given,
-    private readonly run: SortedRun,
+    private readonly means: Means,
   ) {
-    const means = new Means(given, run);
-    this.means = means;
+    const { run } = means;
+    run.requireShort();
     this.table = given.workings.table(`Scatter of single readings: ${run.name}`, (own) => [
       ...head(own, run.size),
       ...Array.from({ length: run.size }, (_, n) => row(means, own, n)),
@@ -42,7 +40,7 @@ export class SingleScatter {
     const [times, means, counts] = this.means.columns;
     const weights = `(${shares(times, to)}-(${shares(times, from)}))`;
     const each = (text: string): string => `SUM(IF(ISNUMBER(${times}),${text},0))`;
-    const own = given.workings.table(`From ${from} to ${to}: ${this.run.name}`, () => [
+    const own = given.workings.table(`From ${from} to ${to}: ${this.means.run.name}`, () => [
       headingRow('change', 'its variance factor'),
       [each(`${weights}*${means}`), each(`${weights}^2/${counts}`)].map((formula) => ({ formula })),
     ]);

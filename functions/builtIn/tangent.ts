@@ -55,9 +55,8 @@ export function sayTangent(given: Given): Said {
   const [tangents, time] = [new Tangents(given), given.number('time')];
   const { run, pooled } = tangents;
   const row = pooled?.rowAt(given.numberFromWorkings('time')) ?? tangents.row(time.text);
-  const isInside = `AND(${time.text}>=${run.time(0)},${time.text}<=${run.lastTime})`;
   const say = (column: number): string =>
-    where([...tangents.holds, ...holdsOf(time)], `IF(${isInside},${row[column]},NA())`);
+    where([...tangents.holds, ...holdsOf(time)], `IF(${run.within(time.text)},${row[column]},NA())`);
   return {
     ...(tangents.hasDetail ? { cell: (_, column) => say(column) } : oneValue(say(0))),
     ...ofTheDay(given),

@@ -139,6 +139,8 @@ export const rate: Cases = {
       D2: '=PACE.TANGENT(A1:A700,B1:B700,100.3,D1)',
       D3: '=PACE.TANGENT(A1:A700,B1:B700,100,31,2,,TRUE)',
       D4: '=PACE.START(A1:A700,B1:B700,,,TRUE)',
+      E7: '=PACE.HALVINGS(A1:A700,B1:B700,-0.2)',
+      L1: '=PACE.NORMALTIME(A1:A700,B1:B700,1.5)',
       J1: '=PACE.ALONG(A1:A700,B1:B700,15)',
     },
     becomes: 'live',
