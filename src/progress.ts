@@ -8,7 +8,11 @@ export interface Progress {
 
 export type Tell = (progress: Progress) => void;
 
-/** The next of several things that take about as long each. @example nthOf('run', 4, 96) // { doing: 'run 5 of 96', share: 0.041666666666666664 } */
+/**
+ * The next of several things that take about as long each.
+ *
+ * @example nthOf('run', 4, 8).share // 0.5
+ */
 export const nthOf = (what: string, place: number, count: number): Progress => ({
   doing: `${what} ${place + 1} of ${count}`,
   share: place / count,
