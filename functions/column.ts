@@ -89,19 +89,27 @@ export function convertColumn(
   column: Column,
   convert: (value: number, place: number) => CellValue,
 ): CellResult {
-  const converted = column.numbers.map(
-    (value, place) =>
-      column.errors.get(place) ?? (value === null ? '' : convertOne(column, convert, value, place)),
-  );
-  return inRows(converted, column.rows, column.columns);
+  return inRows(convertedEach(column, convert), column.rows, column.columns);
 }
 
-function convertOne(
+/** Nothing but text "" for a gap; the error of a cell, or of a reading that cannot tell, in its place. */
+function convertedEach<T>(
   column: Column,
-  convert: (value: number, place: number) => CellValue,
+  convert: (value: number, place: number) => T,
+): (T | CellError | '')[] {
+  return column.numbers.map((value, place) => {
+    const error = column.errors.get(place);
+    if (error) return error;
+    return value === null ? '' : convertOne(column, convert, value, place);
+  });
+}
+
+function convertOne<T>(
+  column: Column,
+  convert: (value: number, place: number) => T,
   value: number,
   place: number,
-): CellValue {
+): T | CellError {
   try {
     return convert(value, place);
   } catch (error) {
@@ -119,13 +127,14 @@ export function convertToRows(
   column: Column,
   convert: (value: number, place: number) => readonly CellValue[],
 ): CellResult {
-  const found = column.numbers.map((value, place) => (value === null ? null : convert(value, place)));
-  const width = found.find((cells) => cells !== null)?.length ?? 1;
-  const lines = found.map(
-    (cells, place) => cells ?? new Array<CellValue>(width).fill(column.errors.get(place) ?? ''),
-  );
+  const found = convertedEach(column, convert);
+  const width = found.find(isLine)?.length ?? 1;
+  const lines = found.map((cells) => (isLine(cells) ? cells : new Array<CellValue>(width).fill(cells)));
   return linesBeside(column, lines);
 }
+
+const isLine = (cells: CellValue | readonly CellValue[]): cells is readonly CellValue[] =>
+  Array.isArray(cells);
 
 /** Lines that belong to the cells of one column or row, set beside it: lines down a column, or turned beside a row. */
 export function linesBeside(

@@ -8,7 +8,7 @@ import { hasTimeTexts, timeTexts } from './timeTexts';
 import type { Readings } from './readings';
 
 export function sayClock(given: Given): Said {
-  if (!hasTimeTexts(given)) return elapsed(given, given.readings('times'), [], true);
+  if (!hasTimeTexts(given)) return elapsed(given, given.readings('times', true), [], true);
   const { days, holds, areClocks, isRow } = timeTexts(given);
   const { cell, whole } = elapsed(given, days, holds, areClocks);
   // the sheet "Workings" has them one below the other

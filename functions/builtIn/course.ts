@@ -33,14 +33,14 @@ export function sayNormalTime(given: Given): Said {
   });
   const least = `MIN(${run.values})`;
   const allowed = `OR(AND(${exponent.text}>=0,${exponent.text}=INT(${exponent.text})),${least}>0,AND(${exponent.text}>0,${least}>=0))`;
-  const holds = [...run.holds, ...holdsOf(exponent), allowed, `MAX(${run.times})>MIN(${run.times})`];
+  const holds = [...run.holds, `${run.different}>1`, ...holdsOf(exponent), allowed];
   const [times, values] = [given.readings('times'), given.readings('values')];
   return {
     cell(row, column) {
       const [time, value] = [times.element(row, column), values.element(row, column)];
       // readings of one time share theirs
       const own = `INDEX(${table.range(1, 1, run.size)},MATCH(${time},${run.times},0))`;
-      return where(holds, `IF(ISNUMBER(${time})*ISNUMBER(${value}),${own},"")`);
+      return where(holds, `IF(ISNUMBER(${time})*ISNUMBER(${value}),IFERROR(${own},NA()),"")`);
     },
   };
 }
@@ -68,9 +68,8 @@ export function sayHalvings(given: Given): Said {
   const from = end?.text ?? '0';
   const first = `(${means.mean(0)}-${from})`;
   const holds = [
-    ...run.holds,
     ...holdsOf(...(end ? [end] : [])),
-    `MAX(${run.times})>MIN(${run.times})`,
+    `${run.different}>1`,
     // a rising column needs its end
     ...(end ? [] : [`OR(${run.direction}<0,MAX(${run.values})=MIN(${run.values}))`]),
     `${first}<>0`,
@@ -89,5 +88,5 @@ export function sayHalvings(given: Given): Said {
     const isOver = halving === 1 ? 'FALSE' : `AND(${place}=${placeOf(2 * left)},${share(0)}<=0)`;
     return `IF(${place}>${size},NA(),IF(${isOver},NA(),${found}))`;
   };
-  return { cell: (row) => where(holds, `${reached(row + 1)}-${reached(row)}`) };
+  return { cell: (row) => where(run.holds, where(holds, `${reached(row + 1)}-${reached(row)}`)) };
 }

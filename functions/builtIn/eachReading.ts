@@ -13,16 +13,21 @@ export interface Place {
 /**
  * @param holds what must hold for all, besides the bounds of the readings
  * @param convert the formula of one reading
+ * @param tells what must hold for the readings to tell anything at all
  */
 export function eachReading(
   readings: Readings,
   holds: readonly string[],
   convert: (reading: string, place: Place | undefined) => string,
+  tells?: string,
 ): Said {
   const say = (x: string, place?: Place): string => {
     const answer = convert(x, place);
     const all = [...readings.holds, ...holds];
-    return where(all, isNumberText(x) ? answer : `IF(ISNUMBER(${x}),${answer},IF(ISERROR(${x}),${x},""))`);
+    const gap = `IF(${readings.isNumberAsText(x)},#VALUE!,"")`;
+    const known = `IF(ISNUMBER(${x}),${answer},IF(ISERROR(${x}),${x},${gap}))`;
+    const each = isNumberText(x) ? answer : known;
+    return where(all, tells === undefined ? each : `IF(${tells},${each},NA())`);
   };
   const whole = (): string => say(readings.whole);
   if (!readings.isPlaced) return { whole };

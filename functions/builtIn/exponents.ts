@@ -9,7 +9,7 @@ import { numberText, where } from './text';
 const mostReactants = 2;
 
 export function sayExponents(given: Given): Said {
-  const [rates, block] = [given.quantityReadings('rates'), given.quantityReadings('concentrations')];
+  const [rates, block] = [given.column('rates'), given.column('concentrations')];
   const detail = given.flag('detail');
   if (rates.columns > 1 || block.rows !== rates.rows) throw new NotSaid('runs do not lie in rows');
   if (block.columns > mostReactants) throw new NotSaid(`more than ${mostReactants} reactants`);
@@ -25,7 +25,7 @@ export function sayExponents(given: Given): Said {
   const design = [unit(0), ...logs.map((log, n) => `${log}*${unit(n + 1)}`)].join('+');
   const fit = `LINEST(${each(`LN(${r})`)},${known}*(${design}),FALSE,TRUE)`;
   const holds = [
-    `SUM(${[r, ...columns].map((column) => `ISERROR(${column})`).join('+')})=0`,
+    `${rates.doubt}+${block.doubt}=0`,
     `SUM(${each([r, ...columns].map((column) => `(${column}<=0)`).join('+'))})=0`,
     ...detail.holds,
   ];

@@ -26,10 +26,13 @@ export function sayGasVolume(given: Given): Said {
     const taken = [...column(t, head), ...vapour(t, wet)];
     const dry = [p, ...taken.map(({ text }) => text)].join('-');
     const amount = `${taken.length > 0 ? `(${dry})` : p}*${v}*${cubicMetres}/(${gasConstant}*${t})`;
-    const positive = taken.length > 0 ? [`${dry}>0`] : [];
-    return where([...holdsOf(...taken), ...positive], amount);
+    return taken.length > 0 ? where([onlyWhere(holdsOf(...taken), `${dry}>0`)], amount) : amount;
   });
 }
+
+/** A condition that cannot be worked out unless others hold. */
+const onlyWhere = (holds: readonly string[], then: string): string =>
+  `IF(AND(${holds.join(',')}),${then},FALSE)`;
 
 /** The water that stands in the tube. */
 function column(t: string, head: Phrase): Phrase[] {
@@ -98,16 +101,15 @@ export function sayMassLoss(given: Given): Said {
   const [hidden] = u ? masses.none('<=', `${start.text}-3.29*${u}`) : [];
   const visible = hidden?.replace(/=0$/, '>0');
   const holds = [...holdsOf(start, perMole), ...(readability?.holds ?? []), ...detail.holds];
-  const seen = (text: string): string => (visible ? `IF(${visible},${text},NA())` : text);
   const amount = (m: string): string => `(${start.text}-${m})/${perMole.text}`;
-  if (!detail.value) return eachReading(masses, holds, (m) => seen(amount(m)));
+  if (!detail.value) return eachReading(masses, holds, amount, visible);
   const cells = (m: string): string[] => {
     if (!u) return [amount(m), 'NA()', 'NA()', 'NA()', 'NA()'];
     const own = `${u}/${perMole.text}`;
     return [amount(m), own, `${amount(m)}-${reach}*${own}`, `${amount(m)}+${reach}*${own}`, '"∞"'];
   };
   const isRow = masses.rows === 1 && masses.columns > 1;
-  const say = (n: number): Said => eachReading(masses, holds, (m) => seen(cells(m)[n]));
+  const say = (n: number): Said => eachReading(masses, holds, (m) => cells(m)[n], visible);
   return { cell: (row, column) => (isRow ? say(row).cell!(0, column) : say(column).cell!(row, 0)) };
 }
 
@@ -119,7 +121,10 @@ function molarMassText(given: Given): Phrase {
   const vapour = saturationPressureText(temperature.text);
   return {
     text: `(${gas.text}+${numberText(molarMass('H2O'))}*${vapour}/(${pressure.text}-${vapour}))`,
-    holds: [...holdsOf(gas, temperature, pressure), `${pressure.text}>${vapour}`],
+    holds: [
+      ...holdsOf(gas, temperature, pressure),
+      onlyWhere(vapourHolds(temperature.text), `${pressure.text}>${vapour}`),
+    ],
   };
 }
 

@@ -7,7 +7,7 @@ import { isLeftOut, requireWithin, type Parameter } from '../parameters';
 import { sure, type Phrase } from './phrase';
 import { Readings } from './readings';
 import { NotSaid, type Argument, type Arguments, type OfTheDay } from './said';
-import { converted, numberBefore, tidy, within } from './quantities';
+import { converted, isNumber, numberBefore, tidy, within } from './quantities';
 import { numberText, quoted } from './text';
 import type { Workings } from './workings';
 
@@ -108,7 +108,7 @@ export class Given {
     if (cell !== undefined && typeof cell !== 'number') throw new NotSaid(`${name} is not a number`);
     const { bounds = {} } = this.parameters[name];
     if (cell !== undefined && !argument.area) return sure(numberText(requireWithin(cell, bounds, name, '1')));
-    return { text: argument.text, holds: [`ISNUMBER(${argument.text})`, ...within(argument.text, bounds)] };
+    return { text: argument.text, holds: [...isNumber(argument.text), ...within(argument.text, bounds)] };
   }
 
   /** A number on which the form of the formula depends: taken as it is on the day of the copy. */
@@ -118,7 +118,8 @@ export class Given {
     const cell = this.single(argument, name);
     if (typeof cell !== 'number') throw new NotSaid(`${name} is not known to be a number`);
     requireWithin(cell, this.parameters[name].bounds ?? {}, name, '1');
-    return { value: cell, holds: argument.area ? [`${argument.text}=${numberText(cell)}`] : [] };
+    const same = [...isNumber(argument.text), `${argument.text}=${numberText(cell)}`];
+    return { value: cell, holds: argument.area ? same : [] };
   }
 
   /** In the unit `to`: a bare number is one of the parameter's own unit, text carries its own. */
@@ -141,7 +142,8 @@ export class Given {
     const given = new Readings(argument, name, bounds);
     if (cells.flat().some((cell) => typeof cell !== 'number'))
       throw new NotSaid(`${name} holds cells that are not numbers`);
-    const all = argument.area ? [`COUNT(${given.whole})=${cells.flat().length}`] : [];
+    // an error among them is the answer itself
+    const all = argument.area ? [`COUNT(${given.whole})+0*SUM(${given.whole})=${cells.flat().length}`] : [];
     return {
       at: (row, column) => converted(given.element(row, column), unit, to),
       holds: [...all, ...given.holds],
@@ -149,14 +151,14 @@ export class Given {
     };
   }
 
-  /** A fraction, for which TRUE stands for 1. */
+  /** A fraction, for which TRUE stands for 1; in a cell, as it is typed. */
   fraction(name: string): Phrase {
     const argument = this.argument(name);
     const cell = argument && this.single(argument, name);
-    if (!argument || typeof cell !== 'boolean') return this.number(name);
-    if (!argument.area) return sure(cell ? '1' : '0');
-    const text = `N(${argument.text})`;
-    return { text, holds: within(text, this.parameters[name].bounds ?? {}) };
+    if (typeof cell === 'boolean' && !argument?.area) return sure(cell ? '1' : '0');
+    if (!argument?.area || typeof cell === 'string') return this.number(name);
+    const text = `(1*${argument.text})`;
+    return { text, holds: [isNoText(argument.text), ...within(text, this.parameters[name].bounds ?? {})] };
   }
 
   /** One quantity in a unit that another argument names: a bare number is one of that unit. */
@@ -188,7 +190,12 @@ export class Given {
       ?.cells?.flat()
       .some((cell) => typeof cell === 'string' && /\d/.test(cell));
     if (texts) throw new NotSaid(`${name} holds numbers with their unit as text`);
-    return this.readings(name);
+    return this.readings(name, true);
+  }
+
+  /** A column, whose kind says whether a cell may carry its unit. */
+  column(name: string): Readings {
+    return this.parameters[name].kind === 'quantities' ? this.quantityReadings(name) : this.readings(name);
   }
 
   /** A text in the parameter's own unit, in another. */
@@ -218,7 +225,7 @@ export class Given {
     if (cell !== undefined && !area) {
       return sure(numberText(tidy(convertQuantity(requireWithin(cell, bounds, name, unit), unit, to))));
     }
-    return { text: converted(text, unit, to), holds: [`ISNUMBER(${text})`, ...within(text, bounds)] };
+    return { text: converted(text, unit, to), holds: [...isNumber(text), ...within(text, bounds)] };
   }
 
   /** A word or unit that the formula is built on; where a cell holds it, it must stay as it is. */
@@ -238,13 +245,14 @@ export class Given {
     if (cell !== true && cell !== false && cell !== 0 && cell !== 1)
       throw new NotSaid(`${name} is neither TRUE nor FALSE`);
     const value = Boolean(cell);
-    return { value, holds: argument.area ? [value ? argument.text : `NOT(${argument.text})`] : [] };
+    const same = [isNoText(argument.text), `1*${argument.text}=${Number(value)}`];
+    return { value, holds: argument.area ? same : [] };
   }
 
-  readings(name: string): Readings {
+  readings(name: string, mayHaveUnits = false): Readings {
     const argument = this.argument(name);
     if (!argument) throw new NotSaid(`${name} was left out`);
-    return new Readings(argument, name, this.parameters[name].bounds);
+    return new Readings(argument, name, this.parameters[name].bounds, mayHaveUnits);
   }
 
   private fallback(name: string): unknown {
@@ -260,3 +268,6 @@ export class Given {
     return cells[0][0];
   }
 }
+
+/** Of a cell that holds TRUE, FALSE or a number; an error there is the answer itself. */
+const isNoText = (text: string): string => `NOT(ISTEXT(${text}))`;

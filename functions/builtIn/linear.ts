@@ -42,7 +42,9 @@ export function sayTitre(given: Given): Said {
 export function sayRemaining(given: Given): Said {
   const formed = given.readings('formed');
   const [initial, ratio] = [given.number('initial'), given.number('ratio')];
-  const most = `1.05*${initial.text}${ratio.text === '1' ? '' : `/${ratio.text}`}`;
+  // judged before the ratio is: a 0 must not come in the way
+  const perProduct = isNumberText(ratio.text) ? ratio.text : `IF(${ratio.text}>0,${ratio.text},1)`;
+  const most = `1.05*${initial.text}${ratio.text === '1' ? '' : `/${perProduct}`}`;
   return eachReading(
     formed,
     [...holdsOf(initial, ratio), ...formed.none('>', most)],

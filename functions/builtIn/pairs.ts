@@ -36,7 +36,7 @@ export class Pairs {
    * @throws NotSaid where the columns do not lie alike, or hold what a formula cannot judge
    */
   static of(given: Given, x: string, y: string, most = mostPairs): Pairs {
-    const [first, second] = [given.quantityReadings(x), given.quantityReadings(y)];
+    const [first, second] = [given.column(x), given.column(y)];
     if (!first.isPlaced || !second.isPlaced) throw new NotSaid('a column is worked out within the formula');
     if (first.rows !== second.rows || first.columns !== second.columns)
       throw new NotSaid(`${x} and ${y} do not lie alike`);
@@ -45,9 +45,18 @@ export class Pairs {
     return new Pairs(first, second);
   }
 
-  /** An error among the readings is the answer itself. */
   get holds(): string[] {
-    return [`SUM(ISERROR(${this.x})+ISERROR(${this.y}))=0`];
+    return [`${this.doubt}=0`, `${this.count}>0`];
+  }
+
+  /** 0 where every cell is a number or a gap, and an error among them itself. */
+  get doubt(): string {
+    return `${this.first.doubt}+${this.second.doubt}`;
+  }
+
+  /** How many different x there are. */
+  get different(): string {
+    return `SUM(IF(FREQUENCY(${this.some(this.x)},${this.x})>0,1,0))`;
   }
 
   /** One of them, counted from 0: its x, and whether it is without a gap. */
@@ -87,7 +96,7 @@ export class Pairs {
   /** The sign of the slope through all pairs; 1 for a level column. */
   trend(): string {
     const x = this.each(this.x);
-    return `IF(SUM((${x}-SUM(${x})/${this.count})*${this.each(this.y)})<0,-1,1)`;
+    return `IF(SUM((${x}-SUM(${x})/MAX(1,${this.count}))*${this.each(this.y)})<0,-1,1)`;
   }
 
   /** As given, or by the trend. */

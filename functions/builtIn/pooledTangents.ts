@@ -19,6 +19,12 @@ export class PooledTangents {
     this.scatter = new TangentScatter(given, windows, degree + 1);
   }
 
+  /** That one degree more can be told. */
+  get fits(): string[] {
+    const { run, points } = this.windows;
+    return [`MIN(${run.different},${points})>${this.degree + 1}`];
+  }
+
   /** The standard row at the time that was given, as the sheet "Workings" names it. */
   rowAt(time: string): string[] {
     const table = this.table(`Tangent at ${time}`, () => [this.line(time)]);

@@ -4,6 +4,9 @@ import type { Bounds } from '../parameters';
 import { NotSaid } from './said';
 import { numberText, quoted } from './text';
 
+/** That it is a number; an error there is the answer itself, which the second condition passes on. */
+export const isNumber = (text: string): string[] => [`ISNUMBER(${text})`, `${text}<>""`];
+
 /** The conditions of a bound, for a text that is not known to keep it. */
 export function within(text: string, { above, atLeast, below, atMost, whole }: Bounds): string[] {
   const holds: string[] = [];

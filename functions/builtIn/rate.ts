@@ -20,7 +20,13 @@ export function sayBetween(given: Given): Said {
   const isInside = `AND(${pairs.within(from.text)},${pairs.within(to.text)})`;
   const say = (column: number): string =>
     where(
-      [...pairs.holds, ...holdsOf(from, to, nu), ...detail.holds, `${from.text}<>${to.text}`],
+      [
+        ...pairs.holds,
+        `${pairs.different}>1`,
+        ...holdsOf(from, to, nu),
+        ...detail.holds,
+        `${from.text}<>${to.text}`,
+      ],
       `IF(${isInside},${cells[column]},NA())`,
     );
   return detail.value ? { cell: (_, column) => say(column) } : oneValue(say(0));

@@ -6,6 +6,7 @@ import type { Bounds } from '../parameters';
 import { NotSaid, type Argument } from './said';
 import { cellOf, fixedArea, numberText, valueText } from './text';
 import { isNumberText, type Phrase } from './phrase';
+import { isNumber } from './quantities';
 
 interface First extends Phrase {
   readonly row: number;
@@ -21,6 +22,7 @@ export class Readings {
     private readonly argument: Argument,
     name: string,
     private readonly bounds: Bounds = {},
+    private readonly mayHaveUnits = false,
   ) {
     const { cells } = argument;
     this.rows = cells?.length ?? 1;
@@ -57,7 +59,7 @@ export class Readings {
     const one = { ...area, row: area.row + row, column: area.column + column, rows: 1, columns: 1 };
     const before = this.rows > 1 ? { ...area, rows: row } : { ...area, columns: column };
     const none = place > 0 ? [`COUNT(${fixedArea(before)})=0`] : [];
-    return { row, column, text: fixedArea(one), holds: [`ISNUMBER(${fixedArea(one)})`, ...none] };
+    return { row, column, text: fixedArea(one), holds: [...isNumber(fixedArea(one)), ...none] };
   }
 
   /** The numbers among them on the day of the copy. */
@@ -69,6 +71,21 @@ export class Readings {
   get whole(): string {
     const { area, text } = this.argument;
     return area ? fixedArea(area) : text;
+  }
+
+  /**
+   * Whether a text there is a number, which programs pass over and PACE reads: without point and comma, whose
+   * meaning differs from country to country, or by its first figure where a unit may follow.
+   */
+  isNumberAsText(text: string): string {
+    const plain = `SUBSTITUTE(SUBSTITUTE(${text},".",""),",","")`;
+    return `ISNUMBER(VALUE(${this.mayHaveUnits ? `LEFT(TRIM(SUBSTITUTE(${plain},"-","")),1)` : plain}))`;
+  }
+
+  /** 0 where each is a number or a gap, and an error among them itself. */
+  get doubt(): string {
+    const all = this.whole;
+    return `0*SUM(${all})+SUM(ISTEXT(${all})*${this.isNumberAsText(all)})`;
   }
 
   /** Where they lie. @throws NotSaid for readings that lie nowhere */

@@ -4,6 +4,7 @@ import type { CellValue } from '../cell';
 import type { Given } from './given';
 import { mostPairs, Pairs, requireAtMost } from './pairs';
 import type { Phrase } from './phrase';
+import { where } from './text';
 import { headingRow, workingFormula, type Table, type WorkingCell } from './workings';
 
 /**
@@ -19,7 +20,7 @@ const longestRun = 5000;
 const mostSearched = 2000;
 
 /** Rows of the table. */
-const [readings, way, misplaced, headings, firstRow] = [0, 1, 2, 3, 4];
+const [readings, way, different, misplaced, headings, firstRow] = [0, 1, 2, 3, 4, 5];
 /** And its columns. */
 const [number, asItStands, inOrder, place, reading] = [0, 1, 2, 3, 4];
 
@@ -52,9 +53,14 @@ export class SortedRun {
     return this.table.cell(readings, 0);
   }
 
-  /** That there is no error among the readings. */
+  /** That there are any; an error among them is the answer itself. */
   get holds(): string[] {
-    return [`ISNUMBER(${this.count})`];
+    return [`${this.count}>0`];
+  }
+
+  /** How many different times there are. */
+  get different(): string {
+    return this.table.cell(different, 0);
   }
 
   /** The times in order, with empty text below the last. */
@@ -102,8 +108,9 @@ export class SortedRun {
 
 function head(pairs: Pairs, own: Table): WorkingCell[][] {
   const rows: WorkingCell[][] = [];
-  rows[readings] = [{ formula: `IF(${pairs.holds.join()},${pairs.count},#VALUE!)` }, 'readings'];
+  rows[readings] = [{ formula: where([`${pairs.doubt}=0`], pairs.count) }, 'readings'];
   rows[way] = [{ formula: pairs.trend() }, '1 where they rise, -1 where they fall'];
+  rows[different] = [{ formula: differentTimes(own, pairs.size) }, 'different times'];
   rows[misplaced] = [{ formula: outOfPlace(own, pairs.size) }, 'of them behind a gap or a later time'];
   rows[headings] = headingRow('number', 'time as it stands', 'time in order', 'its place', 'reading');
   return rows;
@@ -113,6 +120,13 @@ function outOfPlace(own: Table, size: number): string {
   if (size === 1) return '0';
   const [before, here] = [0, 1].map((from) => own.range(firstRow + from, asItStands, size - 1));
   return `SUM(IF(ISNUMBER(${here}),IF(ISNUMBER(${before}),IF(${here}<${before},1,0),1),0))`;
+}
+
+function differentTimes(own: Table, size: number): string {
+  const first = `MIN(1,${own.cell(readings, 0)})`;
+  if (size === 1) return first;
+  const [before, here] = [0, 1].map((from) => own.range(firstRow + from, inOrder, size - 1));
+  return `${first}+SUM(IF(ISNUMBER(${here}),IF(${here}>${before},1,0),0))`;
 }
 
 function lines(pairs: Pairs, own: Table): WorkingCell[][] {

@@ -24,7 +24,7 @@ export function standardWeights(given: Given, pairs: Pairs): StandardWeights {
   return {
     root: pairs.each(`1/${u}`),
     square: pairs.each(`1/${u}^2`),
-    holds: [`SUM(${pairs.each(isWrong)})=0`],
+    holds: [`0*SUM(${u})+SUM(${pairs.each(isWrong)})=0`],
     at: (place) => uncertaintiesAt(given, isRelative).cell(1 + place, uncertainty),
   };
 }

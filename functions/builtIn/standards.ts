@@ -34,6 +34,7 @@ export function sayStandards(given: Given): Said {
       readings,
       holds,
       (y, place) => `IF(AND(${line.isClear},${line.covers(y)}),${cells(y, place)[n]},NA())`,
+      line.isEnough,
     );
   if (!detail.value) return say(0);
   return { cell: (row, column) => (isRow ? say(row).cell!(0, column) : say(column).cell!(row, 0)) };
@@ -45,6 +46,8 @@ interface Calibration {
   /** Of a single reading about the line. */
   readonly deviation: string;
   readonly degreesOfFreedom: string;
+  /** That there are standards enough for a line. */
+  readonly isEnough: string;
   /** That the slope can be told from 0. */
   readonly isClear: string;
   /** That a reading lies among the standards, or up to a tenth of their range beyond. */
@@ -72,7 +75,8 @@ function calibration(pairs: Pairs, { root, square }: StandardWeights, throughOri
     intercept: throughOrigin ? '0' : `INDEX(${fit},1,2)`,
     deviation: `INDEX(${fit},3,2)*${share}`,
     degreesOfFreedom,
-    isClear: `${degreesOfFreedom}>=0,${spread}>0,ABS(${slope})>${reach}`,
+    isEnough: throughOrigin ? `${spread}>0` : `${pairs.different}>1`,
+    isClear: `ABS(${slope})>${reach}`,
     covers: (y) => `${y}>=${low}-0.1*(${high}-${low}),${y}<=${high}+0.1*(${high}-${low})`,
     leverage: (value) => `${throughOrigin ? '' : `1/${weight}+`}(${value}-${centre})^2/${spread}`,
   };

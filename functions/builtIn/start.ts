@@ -25,7 +25,7 @@ export function sayStart(given: Given): Said {
     uncertainty: `${of(uncertainty)}/ABS(${nu.text})`,
     degreesOfFreedom: `(${of(used)}-3)`,
   });
-  const holds = [...run.holds, ...holdsOf(share, nu), ...detail.holds, `MAX(${run.times})>MIN(${run.times})`];
+  const holds = [...run.holds, ...holdsOf(share, nu), ...detail.holds, `${run.different}>1`];
   const say = (column: number): string => where(holds, `IF(ISNUMBER(${of(third)}),${cells[column]},NA())`);
   return detail.value ? { cell: (_, column) => say(column) } : oneValue(say(0));
 }

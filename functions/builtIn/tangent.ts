@@ -10,7 +10,7 @@ import { Windows, windowOfTheDay } from './windows';
 
 /** What all tangents of a run have in common. */
 class Tangents {
-  readonly holds: readonly string[];
+  private readonly holds: readonly string[];
   readonly run: SortedRun;
   readonly hasDetail: boolean;
   /** Where the window was chosen from the data, with its limits from the scatter of the whole run. */
@@ -27,9 +27,23 @@ class Tangents {
     this.degree = degree.value;
     this.nu = nu.text;
     this.hasDetail = detail.value;
-    this.holds = [...run.holds, ...windows.holds, ...holdsOf(nu), ...degree.holds, ...detail.holds];
+    this.holds = [
+      ...run.holds,
+      `${run.different}>1`,
+      ...windows.holds,
+      ...holdsOf(nu),
+      ...degree.holds,
+      ...detail.holds,
+    ];
     if (detail.value && !given.has('points') && windowOfTheDay(given).scatter)
       this.pooled = new PooledTangents(given, windows, degree.value, nu.text);
+  }
+
+  /** What a cell says, where there are times enough for a tangent, and readings enough for its window. */
+  where(others: readonly string[], text: string): string {
+    const { run, windows, degree, pooled } = this;
+    const fits = [...windows.fits, ...(pooled?.fits ?? [])];
+    return where([...this.holds, ...others], `IF(${run.different}>${degree},${where(fits, text)},NA())`);
   }
 
   /** The rate at a time, and with detail the rest of the standard row, from the scatter in the window. */
@@ -56,7 +70,7 @@ export function sayTangent(given: Given): Said {
   const { run, pooled } = tangents;
   const row = pooled?.rowAt(given.numberFromWorkings('time')) ?? tangents.row(time.text);
   const say = (column: number): string =>
-    where([...tangents.holds, ...holdsOf(time)], `IF(${run.within(time.text)},${row[column]},NA())`);
+    tangents.where(holdsOf(time), `IF(${run.within(time.text)},${row[column]},NA())`);
   return {
     ...(tangents.hasDetail ? { cell: (_, column) => say(column) } : oneValue(say(0))),
     ...ofTheDay(given),
@@ -64,7 +78,7 @@ export function sayTangent(given: Given): Said {
 }
 
 export function sayAlong(given: Given): Said {
-  const [times, values] = [given.quantityReadings('times'), given.quantityReadings('values')];
+  const [times, values] = [given.column('times'), given.column('values')];
   const tangents = new Tangents(given);
   const { pooled } = tangents;
   const isRow = times.rows === 1 && times.columns > 1;
@@ -74,7 +88,7 @@ export function sayAlong(given: Given): Said {
       const place: [number, number] = isRow ? [0, n] : [n, 0];
       const [time, value] = [times.element(...place), values.element(...place)];
       const cells = pooled?.rowAlong(time) ?? tangents.row(time);
-      return where(tangents.holds, `IF(ISNUMBER(${time})*ISNUMBER(${value}),${cells[part]},"")`);
+      return tangents.where([], `IF(ISNUMBER(${time})*ISNUMBER(${value}),${cells[part]},"")`);
     },
     ...ofTheDay(given),
   };

@@ -44,7 +44,7 @@ class LineOverTemperature {
     const u = Pairs.of(given, 'coefficients', 'uncertainties').y;
     return {
       weight: this.pairs.each(`${y}/${u}`),
-      holds: [`SUM(${this.pairs.each(`IF(ISNUMBER(${u}),IF(${u}>0,0,1),1)`)})=0`],
+      holds: [`0*SUM(${u})+SUM(${this.pairs.each(`IF(ISNUMBER(${u}),IF(${u}>0,0,1),1)`)})=0`],
     };
   }
 
@@ -149,7 +149,7 @@ export function sayMeanTemp(given: Given): Said {
   const t = celsius.whole;
   const perKelvin = `${energy.text}/${gasConstant}`;
   const plausible = celsius.none('<=', '200').map((hold) => hold.replace(/=0$/, '>0'));
-  const holds = [...celsius.holds, ...plausible, ...energy.holds, `SUM(${`ISERROR(${t})`}*1)=0`];
+  const holds = [`${celsius.doubt}=0`, ...celsius.holds, ...plausible, ...energy.holds];
   const of = (temperatures: string, mean: (share: string) => string): string => {
     // from the highest temperature down, so that no exponential vanishes
     const highest = `(MAX(${temperatures})+${celsiusZero})`;
@@ -167,10 +167,9 @@ export function sayMeanTemp(given: Given): Said {
   const run = new SortedRun(given, 'times', 'temperatures');
   const held = holdingTimes(given, run);
   const mean = of(run.values, (share) => `SUM(IF(ISNUMBER(${run.times}),${held}*${share},0))/SUM(${held})`);
-  const isHistory = `MAX(${run.times})>MIN(${run.times})`;
   // a single reading is its own mean
-  const whole = `IF(${run.count}=1,${run.value(0)},IF(${isHistory},${mean},#VALUE!))`;
-  return oneValue(where([...holds, ...run.holds, `${run.count}>0`], whole));
+  const whole = `IF(${run.count}=1,${run.value(0)},${where([`${run.different}>1`], mean)})`;
+  return oneValue(where([...holds, ...run.holds], whole));
 }
 
 /** How long each reading stands for: from halfway to the time before until halfway to the next, shared by those of one time. */
@@ -208,5 +207,6 @@ export function sayTimeTo(given: Given): Said {
   const departure = `IF(ABS(${z})<0.0001,1+${z}/2+${z}^2/6+${z}^3/24,(EXP(${z})-1)/${z})`;
   const time = `(${span})*${departure}/(${k.text}*${initial.text}^(${order.text}-1))`;
   if (order.text === '1') return oneValue(where([...holds, ...initial.holds], first));
-  return oneValue(where([...holds, ...initial.holds], `IF(${order.text}=1,${first},${time})`));
+  // what is left to go wrong is a time too long for a cell
+  return oneValue(where([...holds, ...initial.holds], `IF(${order.text}=1,${first},IFERROR(${time},NA()))`));
 }

@@ -15,7 +15,6 @@ export function sayUnit(given: Given): Said {
   const order = given.number('order');
   if (isNumberText(order.text)) return oneValue(where(holds, unit(given.constant('order').value)));
   const list = orders.map(unit).join(',');
-  return oneValue(
-    where([...order.holds, ...holds], `INDEX({${list}},1,MATCH(${order.text},{${orders.join(',')}},0))`),
-  );
+  const place = `MATCH(${order.text},{${orders.join(',')}},0)`;
+  return oneValue(where([...order.holds, ...holds, `ISNUMBER(${place})`], `INDEX({${list}},1,${place})`));
 }

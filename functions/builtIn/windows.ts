@@ -25,6 +25,8 @@ export class Windows {
   /** For titles of what rests on them. */
   readonly name: string;
   readonly holds: readonly string[];
+  /** That there are readings enough for them. */
+  readonly fits: readonly string[];
   private readonly table: Table;
 
   constructor(
@@ -47,11 +49,10 @@ export class Windows {
         ),
       ];
     });
-    const enough = `${this.points}>${given.constant('degree').value}`;
-    this.holds = [
-      ...width.holds,
+    this.holds = width.holds;
+    this.fits = [
       ...(given.has('points') ? [`${this.table.cell(wanted, 0)}<=${run.count}`] : []),
-      enough,
+      `${this.points}>${given.constant('degree').value}`,
     ];
   }
 

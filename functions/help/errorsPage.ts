@@ -1,6 +1,7 @@
 /** What any function may say, and what helps. */
 import type { Refusal } from '../define';
 import { page, table } from './html';
+import { refused } from '../refusals';
 import { refusalRow } from './refusals';
 
 export const anyRefusals: readonly Refusal[] = [
@@ -51,7 +52,7 @@ export const anyRefusals: readonly Refusal[] = [
 ];
 
 export function errorsPage(): string {
-  const rows = anyRefusals.map(refusalRow);
+  const rows = anyRefusals.map(refused).map(refusalRow);
   const body = [
     '<h1>When a cell shows an error</h1>',
     '<p class="lead">A function says what is wrong instead of guessing. Rest the pointer on the cell’s mark to read its words.</p>',

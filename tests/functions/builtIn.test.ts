@@ -49,7 +49,8 @@ test('a conversion takes each reading by its own cell, and all of them within an
     aliquot: literal('10', 10),
   });
   const guard = 'COUNTIF($A$2:$A$3,"<0")=0';
-  expect(said.cell!(1, 0)).toBe(`IF(${guard},IF(ISNUMBER(A3),0.02*A3/10,IF(ISERROR(A3),A3,"")),#VALUE!)`);
+  const gap = 'IF(ISNUMBER(VALUE(SUBSTITUTE(SUBSTITUTE(A3,".",""),",",""))),#VALUE!,"")';
+  expect(said.cell!(1, 0)).toBe(`IF(${guard},IF(ISNUMBER(A3),0.02*A3/10,IF(ISERROR(A3),A3,${gap})),#VALUE!)`);
   expect(said.whole!()).toContain('0.02*$A$2:$A$3/10');
 });
 

@@ -6,7 +6,7 @@ import { anyRefusals } from '../../functions/help/errorsPage';
 import { exampleSheet } from '../../functions/help/exampleSheet';
 import { helpFiles } from '../../functions/help/files';
 import { escaped } from '../../functions/help/html';
-import { wordsOf } from '../../functions/help/refusals';
+import { wordsOf } from '../../functions/refusals';
 import { byMeasurement, byQuestion, job } from '../../functions/help/ways';
 import { callIn } from '../../functions/literal';
 

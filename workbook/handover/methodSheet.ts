@@ -4,6 +4,7 @@ import { headingRow } from '../../functions/builtIn/workings';
 import { CellError } from '../../functions/cell';
 import { signature, typedName, type CellFunction } from '../../functions/define';
 import { howInWords } from '../../functions/documented';
+import { refusalsOf } from '../../functions/refusals';
 import {
   avogadroConstant,
   boltzmannConstant,
@@ -15,6 +16,8 @@ import {
   vacuumPermittivity,
 } from '../../src/constants';
 import { elsewherePlace } from './elsewhere';
+import { errorRows } from './errorRows';
+import { labelled, lineLength } from './labelled';
 import { namesReachingOutside, reachesOutside } from '../xlsx/outside';
 import type { HandedFormula } from './handed';
 import type { HandedOver } from './handOver';
@@ -78,6 +81,7 @@ export function methodSheet(
       `=${call.formula}`,
       `left as it was: without the add-in ${call.loss}`,
     ]);
+  rows.push([], ...errorRows());
   for (const f of functionsOf(formulas)) rows.push([], ...functionRows(f));
   rows.push([], headingRow('Constant', '', 'Value', 'Unit', 'Source'));
   rows.push(
@@ -101,21 +105,16 @@ const functionsOf = (formulas: readonly HandedFormula[]): CellFunction[] => [
   ...new Set(formulas.flatMap(({ functions }) => functions)),
 ];
 
-/** Each text in lines of its own: cells to the right of it stay empty, so that it can be read to its end. */
 function functionRows(f: CellFunction): SheetCell[][] {
-  const under = (label: string, text: string): SheetCell[][] =>
-    wrapped(text, lineLength).map((line, n) => [n === 0 ? label : null, null, line]);
   return [
     [{ heading: typedName(f) }, null, f.summary],
-    ...under('typed as', signature(f)),
-    ...under('unit', f.result.unit),
-    ...under('worked out by', howInWords(f)),
-    ...under('source', f.reference),
+    ...labelled('typed as', signature(f)),
+    ...labelled('unit', f.result.unit),
+    ...labelled('worked out by', howInWords(f)),
+    ...labelled('source', f.reference),
+    ...refusalsOf(f).flatMap(({ error: { code, message } }) => labelled(code, message)),
   ];
 }
-
-/** Characters in a line. */
-const lineLength = 110;
 
 export const unwatched = 'not watched';
 export const unchanged = 'inputs as they were';

@@ -1,0 +1,4 @@
+/** Rates: what a copy shows when an input turns bad, or good again. */
+import { sweep } from './sweep/sweep';
+
+sweep('rate');

@@ -1,0 +1,4 @@
+/** Readings that become amounts: what a copy shows when an input turns bad, or good again. */
+import { sweep } from './sweep/sweep';
+
+sweep('reading');
