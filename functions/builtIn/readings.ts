@@ -1,6 +1,6 @@
 /** A range of readings in a formula: one by one, or as a whole. */
 import type { Area } from '../address';
-import { CellError } from '../cell';
+import { CellError, type CellRange, type CellValue } from '../cell';
 import { numberInText } from '../column';
 import type { Bounds } from '../parameters';
 import { NotSaid, type Argument } from './said';
@@ -27,11 +27,8 @@ export class Readings {
     const { cells } = argument;
     this.rows = cells?.length ?? 1;
     this.columns = cells?.[0]?.length ?? 1;
-    const flat = cells?.flat() ?? [];
-    if (flat.some((cell) => typeof cell === 'string' && numberInText(cell, () => name) !== null))
-      throw new NotSaid(`${name} holds numbers written as text`);
-    if (flat.some((cell) => typeof cell === 'boolean'))
-      throw new NotSaid(`${name} holds TRUE or FALSE, which some programs take for numbers`);
+    const odd = cells && oddIn(cells, name);
+    if (odd) throw new NotSaid(`${name} holds ${odd}`);
   }
 
   /** The reading itself, which moves with a copied formula. */
@@ -162,3 +159,20 @@ export class Readings {
 
 /** Numbers and what is between them: nothing that a cell could change. */
 const isConstant = (text: string): boolean => /^[\d.E+\-*/()]+$/.test(text);
+
+/** Formulas filled down read the same cells. */
+const known = new WeakMap<CellRange, string>();
+
+/** What other programs could take for something else. @throws InvalidInput for a number as text that could mean two things */
+function oddIn(cells: CellRange, name: string): string {
+  const odd = known.get(cells) ?? findOdd(cells.flat(), name);
+  known.set(cells, odd);
+  return odd;
+}
+
+function findOdd(cells: readonly CellValue[], name: string): string {
+  if (cells.some((cell) => typeof cell === 'string' && numberInText(cell, () => name) !== null))
+    return 'numbers written as text';
+  const isTruth = cells.some((cell) => typeof cell === 'boolean');
+  return isTruth ? 'TRUE or FALSE, which some programs take for numbers' : '';
+}

@@ -45,7 +45,11 @@ export async function checked(
   );
   const first = groups.flatMap((group) => group.filter((_, place) => isChosen(place, group.length)));
   const isFirst = new Set(first);
-  const scales = new Map(groups.flatMap((group) => group.map((formula) => [formula, largestAlike(group)])));
+  const scales = new Map<HandedFormula, Sizes>();
+  for (const group of groups) {
+    const sizes = largestAlike(group);
+    for (const formula of group) scales.set(formula, sizes);
+  }
   const judged = (some: readonly HandedFormula[]): Promise<Found> => foundOff(some, whole, world, scales);
   const off = await judged(first);
   const doubtful = groups.filter((group) => group.some((formula) => off.has(formula))).flat();
