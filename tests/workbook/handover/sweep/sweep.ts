@@ -41,7 +41,8 @@ export function sweep(...families: readonly Family[]): void {
     copy.find((one) => one.sheet === sheet && one.row === row && one.column === column)!;
 
   test('every function that follows its inputs is called', () => {
-    const live = catalogue.filter((f) => f.builtIn && !f.fits && families.includes(f.family));
+    // one that looks at none of its arguments only says why it cannot be said
+    const live = catalogue.filter((f) => f.builtIn?.length && !f.fits && families.includes(f.family));
     expect([...new Set(own.map((call) => callIn(call).f.name))].sort()).toEqual(
       live.map((f) => f.name).sort(),
     );
