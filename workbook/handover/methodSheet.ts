@@ -1,5 +1,5 @@
 /** The sheet "Method": what each formula was and is now, how it is worked out, with which constants. */
-import { areaName, cellName } from '../../functions/address';
+import { areaName } from '../../functions/address';
 import { headingRow } from '../../functions/builtIn/workings';
 import { CellError } from '../../functions/cell';
 import { signature, typedName, type CellFunction } from '../../functions/define';
@@ -18,11 +18,10 @@ import {
 import { elsewherePlace } from './elsewhere';
 import { errorRows } from './errorRows';
 import { labelled, lineLength } from './labelled';
-import { namesReachingOutside, reachesOutside } from '../xlsx/outside';
 import type { HandedFormula } from './handed';
 import type { HandedOver } from './handOver';
 import type { NewSheet, SheetCell } from './newSheet';
-import { fingerprintOf, fingerprintTolerance } from './stale';
+import { changed, InputWatch } from './inputWatch';
 import type { World } from './world';
 import { wrapped } from './wrapped';
 
@@ -70,7 +69,8 @@ export function methodSheet(
     ),
   ];
   const fixedRows = rows.length;
-  for (const formula of formulas) rows.push(formulaRow(formula, rows.length + 1, world));
+  const watch = new InputWatch(world);
+  for (const formula of formulas) rows.push(formulaRow(formula, rows.length, watch));
   for (const { name: own, refersTo, value } of names)
     rows.push(['a name', own, 'frozen', `=${refersTo}`, `frozen: it stands for ${value}`]);
   for (const call of elsewhere)
@@ -89,6 +89,9 @@ export function methodSheet(
   );
   return { name, rows, columns, fixedRows, warnings: [changed] };
 }
+
+/** Where the column "Inputs then" stands. */
+const inputsColumn = 5;
 
 /** As they are headed. The formulas and what became of them are the long ones. */
 const columns = [
@@ -116,11 +119,8 @@ function functionRows(f: CellFunction): SheetCell[][] {
   ];
 }
 
-export const unwatched = 'not watched';
-export const unchanged = 'inputs as they were';
-export const changed = 'inputs have changed';
-
-function formulaRow(formula: HandedFormula, row: number, world: World): SheetCell[] {
+/** @param row counted from 0 */
+function formulaRow(formula: HandedFormula, row: number, watch: InputWatch): SheetCell[] {
   const { sheet, original, said, why, ofTheDay, fits, area } = formula;
   const place: SheetCell[] = [sheet, areaName(area)];
   if (!isOfTheDay(formula)) return [...place, 'live', `=${original}`, 'said in built-in functions'];
@@ -128,25 +128,8 @@ function formulaRow(formula: HandedFormula, row: number, world: World): SheetCel
     ? `said in built-in functions, but as on the day of the copy: ${ofTheDay?.what}`
     : `frozen: ${why}`;
   const where = fits ? `; what was fitted stands from ${fits.join(' and ').replace(/\$/g, '')} on` : '';
-  const [state, ...inputs] = watch(formula, row, world);
+  const [state, ...inputs] = watch.cells(formula, row, inputsColumn);
   return [...place, state, `=${original}`, now + where, ...inputs];
-}
-
-/** Whether the inputs are still those of the day, in words: a sum over them then, and the same now. */
-function watch(formula: HandedFormula, row: number, world: World): SheetCell[] {
-  const { sheet, original, ofTheDay } = formula;
-  if (reachesOutside(original, namesReachingOutside(world.book.names))) return [unwatched, null, null];
-  const inputs = ofTheDay?.from ?? world.areasIn(world.spelledOut(original, formula), sheet);
-  if (inputs.length === 0) return ['no inputs in cells'];
-  const print = fingerprintOf(inputs, sheet, world);
-  if (!print || print.formula.length > 8000) return [unwatched];
-  const [then, now] = [cellName(row - 1, 5), cellName(row - 1, 6)];
-  const same = `IF(ISERROR(${now}),FALSE,ABS(${now}-${then})<${fingerprintTolerance}*MAX(1,ABS(${then})))`;
-  return [
-    { formula: `IF(${same},"${unchanged}","${changed}")`, value: unchanged },
-    print.value,
-    { formula: print.formula, value: print.value },
-  ];
 }
 
 /** Whether it stays, in whole or in part, as it was on the day of the copy: it is watched, and has a note. */

@@ -5,7 +5,7 @@ import type { BookModel, CalculatedBook } from '../../../workbook/engine/engine'
 import { calculate } from '../../../workbook/engine/univer/headless';
 import { handOver, type HandedOver } from '../../../workbook/handover/handOver';
 import { asFitted, fitsOtherwise, startsOtherwise } from '../../../functions/builtIn/fitState';
-import { changed, unchanged, unwatched } from '../../../workbook/handover/methodSheet';
+import { changed, unchanged, unwatched } from '../../../workbook/handover/inputWatch';
 import { createWorkbook } from '../../../workbook/xlsx/create';
 import { book, type Typed } from '../engine/book';
 import { cases } from './cases/cases';
