@@ -36,6 +36,7 @@ export class Given {
     const { sheet } = this.workings;
     const named = this.names.map((name) => {
       const argument = this.laidOut(name);
+      if (argument?.fromAfar !== undefined) return [name, { ...argument, text: argument.fromAfar }];
       if (!argument?.area) return [name, argument];
       const area = { sheet, ...argument.area };
       return [name, { ...argument, area, text: areaName(area) }];
@@ -46,7 +47,8 @@ export class Given {
   /** A number as the sheet "Workings" names it; what must hold of it is said where the formula stands. */
   numberFromWorkings(name: string): string {
     const argument = this.argument(name);
-    if (argument && !argument.cells) throw new NotSaid(`${name} is worked out within the formula`);
+    if (argument && !argument.cells && argument.fromAfar === undefined)
+      throw new NotSaid(`${name} is worked out within the formula`);
     return this.fromWorkings().number(name).text;
   }
 

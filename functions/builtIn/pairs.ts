@@ -106,12 +106,6 @@ export class Pairs {
     return { text, holds: [...holds, `${text}<>0`] };
   }
 
-  /** That a value of x lies among the pairs. */
-  within(at: string): string {
-    const all = this.some(this.x);
-    return `AND(${at}>=MIN(${all}),${at}<=MAX(${all}))`;
-  }
-
   /** Least squares of y against terms of x, of which the first is a constant: a row of coefficients, last term first. */
   fit({ y, terms, weight }: Fit): string {
     const unit = (n: number): string =>

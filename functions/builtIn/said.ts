@@ -8,6 +8,8 @@ import type { Table } from './workings';
 export interface Argument {
   /** `$F$1`, `B2:B11`, `F1+273`; in brackets where an operator beside it would tear it apart. */
   readonly text: string;
+  /** Of an expression: as any other sheet has to spell it; nothing where it depends on the cell it stands in. */
+  readonly fromAfar?: string;
   /** Of a plain reference; its sheet only where the reference names one. */
   readonly area?: Area;
   /** What stands there on the day of the copy; unknown of an expression. */

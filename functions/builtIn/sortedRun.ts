@@ -85,6 +85,9 @@ export class SortedRun {
   time = (n: number): string => this.table.cell(firstRow + n, inOrder);
   value = (n: number): string => this.table.cell(firstRow + n, reading);
 
+  /** In a table with a line for each reading: empty below the last. */
+  known = (n: number, formula: string): string => `IF(ISNUMBER(${this.time(n)}),${formula},"")`;
+
   /** 1 where the run rises or is level, −1 where it falls. */
   get direction(): string {
     return this.table.cell(way, 0);

@@ -1,14 +1,16 @@
 /** Rate coefficients over temperature, said in built-in functions. */
 import { boltzmannConstant, celsiusZero, gasConstant, planckConstant } from '../../src/constants';
+import { holdingTimes } from '../../src/temperature/meanKinetic';
 import { temperatureRounding } from '../../src/temperature/measured';
 import { standardRowTexts } from './estimate';
 import type { Given } from './given';
+import { OneTime } from './oneTime';
 import { holdsOf } from './phrase';
 import { Pairs } from './pairs';
 import { SortedRun } from './sortedRun';
 import { oneValue, type Said } from './said';
 import { numberText, where } from './text';
-import { headingRow, type WorkingCell } from './workings';
+import { headingRow, workingFormula, type WorkingCell } from './workings';
 
 /** ln(k/scale) as a straight line in 1/T − 1/centre, by weighted least squares. */
 class LineOverTemperature {
@@ -165,7 +167,7 @@ export function sayMeanTemp(given: Given): Said {
     );
   }
   const run = new SortedRun(given, 'times', 'temperatures');
-  const held = holdingTimes(given, run);
+  const held = heldIn(given, run);
   const mean = of(run.values, (share) => `SUM(IF(ISNUMBER(${run.times}),${held}*${share},0))/SUM(${held})`);
   // a single reading is its own mean
   const whole = `IF(${run.count}=1,${run.value(0)},${where([`${run.different}>1`], mean)})`;
@@ -173,24 +175,22 @@ export function sayMeanTemp(given: Given): Said {
 }
 
 /** How long each reading stands for: from halfway to the time before until halfway to the next, shared by those of one time. */
-function holdingTimes(given: Given, run: SortedRun): string {
-  const { times, size } = run;
-  run.requireShort();
-  const table = given.workings.table(`Time that each reading stands for: ${run.name}`, () => [
-    headingRow('time', 'stands for'),
-    ...Array.from({ length: size }, (_, n): WorkingCell[] => {
-      const time = run.time(n);
-      const beside = (nearest: 'MAX' | 'MIN', side: '<' | '>'): string => {
-        const last = nearest === 'MAX' ? 'MIN' : 'MAX';
-        const all = `IF(ISNUMBER(${times}),IF(${times}${side}${time},${times},""),"")`;
-        return `IF(${time}=${last}(${times}),${time},${nearest}(${all}))`;
-      };
-      const known = (formula: string): WorkingCell => ({ formula: `IF(ISNUMBER(${time}),${formula},"")` });
-      const held = `(${beside('MIN', '>')}-${beside('MAX', '<')})/2/COUNTIF(${times},${time})`;
-      return [known(time), known(held)];
-    }),
-  ]);
-  return table.range(1, 1, size);
+function heldIn(given: Given, run: SortedRun): string {
+  const { times, size, today } = run;
+  const oneTime = new OneTime(given, run);
+  const table = given.workings.table(`Time that each reading stands for: ${run.name}`, () => {
+    const held = today && holdingTimes(today.times);
+    return [
+      headingRow('stands for'),
+      ...Array.from({ length: size }, (_, n): WorkingCell[] => {
+        const before = `INDEX(${times},MAX(1,${oneTime.first(n)}-1))`;
+        const next = `INDEX(${times},MIN(${run.count},${oneTime.last(n)}+1))`;
+        const own = run.known(n, `(${next}-${before})/2/${oneTime.count(n)}`);
+        return [workingFormula(own, held && (held[n] ?? ''))];
+      }),
+    ];
+  });
+  return table.range(1, 0, size);
 }
 
 export function sayTimeTo(given: Given): Said {

@@ -10,7 +10,7 @@ import { isNumberText } from './phrase';
 import { PolynomialAt } from './polynomialAt';
 import type { SortedRun } from './sortedRun';
 import { numberText } from './text';
-import { workingFormula, type Table, type WorkingCell } from './workings';
+import { workingFormula, type Table, type WorkingCell, type WorkingFormula } from './workings';
 
 /** Rows of the table. */
 const [wanted, used, headings, firstRow] = [0, 1, 2, 3];
@@ -37,15 +37,16 @@ export class Windows {
     this.name = `windows of ${width.name}: ${run.name}`;
     this.table = given.workings.table(`Where to begin, ${this.name}`, (own) => {
       const { today } = run;
-      const points = width.today();
+      const points = width.points();
+      const pointsToday = isFixed(points) ? points : points.today;
       // a number that is known lets each line name the one reading that it waits for
       const ahead = (n: number): string | undefined =>
-        width.points ? `INDEX(${run.times},${own.cell(used, 0)}+${n})` : timeOf(run, n + points - 1);
+        isFixed(points) ? timeOf(run, n + points - 1) : `INDEX(${run.times},${own.cell(used, 0)}+${n})`;
       return [
-        ...head(own, run, width.points ?? points),
+        ...head(own, run, points),
         [workingFormula(run.time(0), today?.times[0])],
         ...Array.from({ length: run.size - 1 }, (_, n) =>
-          beginning(run.time(n), ahead(n + 1), today && beginningToday(today, points, n + 1)),
+          beginning(run.time(n), ahead(n + 1), today && beginningToday(today, pointsToday, n + 1)),
         ),
       ];
     });
@@ -76,26 +77,25 @@ export class Windows {
 
 interface Width {
   readonly name: string;
-  /** How many readings, on the day of the copy. */
-  readonly today: () => number;
-  /** Where that number follows a cell. */
-  readonly points?: WorkingCell;
+  /** How many readings: as on the day of the copy, or as a cell says. */
+  readonly points: () => number | WorkingFormula;
   readonly holds: readonly string[];
 }
 
+const isFixed = (points: number | WorkingFormula): points is number => typeof points === 'number';
+
 function asGiven(given: Given): Width {
-  const [{ holds }, points] = [given.number('points'), given.numberFromWorkings('points')];
-  const today = (): number => Number(given.argument('points')?.cells?.[0][0]);
-  return isNumberText(points)
-    ? { name: `${points} readings`, today, holds }
-    : { name: `as many readings as ${points} says`, today, points: { formula: points }, holds };
+  const [{ holds }, text] = [given.number('points'), given.numberFromWorkings('points')];
+  if (isNumberText(text)) return { name: `${text} readings`, points: () => Number(text), holds };
+  const today = given.argument('points')?.cells?.[0][0];
+  return { name: `as many readings as ${text} says`, points: () => workingFormula(text, today), holds };
 }
 
 function asChosen(given: Given): Width {
   const { value, holds } = given.constant('degree');
   return {
     name: `as many readings as chosen for degree ${value} on the day of the copy`,
-    today: () => windowOfTheDay(given).points,
+    points: () => windowOfTheDay(given).points,
     holds,
   };
 }
@@ -117,5 +117,8 @@ function beginning(left: string, ahead: string | undefined, today?: CellValue): 
   return [workingFormula(`IF(ISNUMBER(${ahead}),${turning},"")`, today)];
 }
 
-const beginningToday = ({ times }: Series, points: number, n: number): CellValue =>
-  n + points > times.length ? '' : turningTime(times[n - 1], times[n + points - 1]);
+/** Nothing where the number of readings is not known. */
+function beginningToday({ times }: Series, points: CellValue | undefined, n: number): CellValue | undefined {
+  if (typeof points !== 'number') return undefined;
+  return n + points > times.length ? '' : turningTime(times[n - 1], times[n + points - 1]);
+}

@@ -12,7 +12,8 @@ export function argumentOf(text: string, sheet: string, world: World): Argument 
   if (area) return { text, area, cells: world.cellsIn(area, sheet) };
   if (tokensOf(text).some(({ type }) => type === 'range_beam'))
     throw new NotSaid('it takes a whole column or row');
-  return { text: whole(text) };
+  const fromAfar = world.fromAfar(text, sheet);
+  return { text: whole(text), ...(fromAfar === undefined ? {} : { fromAfar: whole(fromAfar) }) };
 }
 
 /** In brackets unless it is one piece: a word, a number, one call. */

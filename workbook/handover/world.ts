@@ -19,6 +19,12 @@ export interface Position {
 const wanders = (token: Token): boolean =>
   isFunction(token) ? /^(?:OFFSET|INDIRECT)$/i.test(token.value) : isOperator(token) && token.value === ':';
 
+/** What it comes to depends on where it stands. */
+const isOfItsPlace = (token: Token): boolean =>
+  isFunction(token)
+    ? /^(?:ROW|COLUMN|CELL|SHEET|INDIRECT)$/i.test(token.value)
+    : isOperator(token) && token.value === '@';
+
 export class World {
   private readonly cells = new Map<string, CellRange>();
 
@@ -76,6 +82,19 @@ export class World {
     if (area) return area;
     const name = this.nameOf(text, sheet);
     return name === undefined ? undefined : parseArea(name);
+  }
+
+  /** An expression as any other sheet has to spell it; `undefined` where it means something else there. */
+  fromAfar(text: string, sheet: string): string | undefined {
+    const tokens = tokensOf(text);
+    if (tokens.some(isOfItsPlace)) return undefined;
+    const edits: Edit[] = [];
+    for (const { value, loc } of tokens.filter((token) => isReference(token))) {
+      const area = this.areaOf(value, sheet);
+      if (!area) return undefined;
+      edits.push({ start: loc[0], end: loc[1], text: areaName({ sheet, ...area }) });
+    }
+    return applyEdits(text, edits);
   }
 
   /** Every area that a formula names. */

@@ -1,7 +1,19 @@
 /** Rates of a run. */
-import { column } from '../../engine/book';
+import { column, type Typed } from '../../engine/book';
 import type { Cases } from './case';
 import { run } from './run';
+
+/** Invented: so many times in A, readings in B. */
+const longRun = (count: number): Typed => ({
+  ...column(
+    'A1',
+    Array.from({ length: count }, (_, n) => n * 0.5),
+  ),
+  ...column(
+    'B1',
+    Array.from({ length: count }, (_, n) => 40 * 0.995 ** n + 0.1 * Math.sin(13 * n)),
+  ),
+});
 
 export const rate: Cases = {
   'Average rate': {
@@ -38,6 +50,27 @@ export const rate: Cases = {
     becomes: 'live',
     changed: { B3: 15, B4: null, D1: 50, A15: 12 },
   },
+  'Average rate, order and ties later': {
+    typed: {
+      ...run,
+      D1: 30,
+      D2: '=PACE.BETWEEN(A2:A9,B2:B9,0,D1)',
+      D3: '=PACE.BETWEEN(A2:A9,B2:B9,D1+60,D1*8,2)',
+      D4: '=PACE.BETWEEN(A2:A9,B2:B9,D1+10,D1,,TRUE)',
+    },
+    becomes: 'live',
+    changed: { A3: 95, A4: 90, A5: 240, B2: 3, B8: null, D1: 25 },
+  },
+  'Average rate of a long run': {
+    typed: {
+      D1: 100.3,
+      D2: '=PACE.BETWEEN(A1:A1200,B1:B1200,0,D1)',
+      D3: '=PACE.BETWEEN(A1:A1200,B1:B1200,D1*2,599.5)',
+      ...longRun(1200),
+    },
+    becomes: 'live',
+    changed: { B201: null, A202: 100.5, A204: 100.5, A230: 90.25, A231: 90.25, A1190: 700, D1: 100.4 },
+  },
   'Average rate, beyond the run': {
     typed: { ...run, D1: 30, D2: '=PACE.BETWEEN(A2:A9,B2:B9,0,D1)' },
     becomes: 'live',
@@ -69,6 +102,7 @@ export const rate: Cases = {
       D2: '=PACE.TANGENT(A2:A9,B2:B9,60)',
       D3: '=PACE.TANGENT(A2:A9,B2:B9,D1,,,-2,TRUE)',
       D4: '=PACE.TANGENT(A2:A9,B2:B9,0,,1,,TRUE)',
+      D5: '=PACE.TANGENT(A2:A9,B2:B9,D1+25,,,-2,TRUE)',
       D6: '=PACE.ALONG(A2:A9,B2:B9)',
       F6: '=PACE.ALONG(A2:A9,B2:B9,,,,TRUE)',
     },
@@ -125,16 +159,27 @@ export const rate: Cases = {
     becomes: 'live',
     changed: { A3: 95, A4: 60, B8: null, D1: 4 },
   },
+  'Rates, inputs worked out within': {
+    typed: {
+      ...run,
+      D1: 2,
+      D2: '=PACE.TANGENT(A2:A9,B2:B9,65,D1*2)',
+      D3: '=PACE.TANGENT(A2:A9,B2:B9,D1*35,MAX($D$1:D1)+2,2,,TRUE)',
+      D4: '=PACE.BETWEEN(A2:A9,B2:B9,D1,D1*45,,TRUE)',
+      D5: '=PACE.START(A2:A9,B2:B9,D1/5,,TRUE)',
+      K2: '=PACE.ALONG(A2:A9,B2:B9,D1+2)',
+    },
+    becomes: 'live',
+    changed: { A3: 95, B4: 27, D1: 3 },
+  },
+  'Rates, points by their place': {
+    typed: { ...run, D5: '=PACE.TANGENT(A2:A9,B2:B9,65,ROW())' },
+    becomes: 'frozen',
+    changed: { B4: 27 },
+  },
   'Rates of a long run': {
     typed: {
-      ...column(
-        'A1',
-        Array.from({ length: 700 }, (_, n) => n * 0.5),
-      ),
-      ...column(
-        'B1',
-        Array.from({ length: 700 }, (_, n) => 40 * 0.995 ** n + 0.1 * Math.sin(13 * n)),
-      ),
+      ...longRun(700),
       D1: 21,
       D2: '=PACE.TANGENT(A1:A700,B1:B700,100.3,D1)',
       D3: '=PACE.TANGENT(A1:A700,B1:B700,100,31,2,,TRUE)',

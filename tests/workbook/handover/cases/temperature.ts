@@ -66,6 +66,21 @@ export const temperature: Cases = {
     becomes: 'live',
     changed: { A2: 'lost', B7: 14, B5: 11 },
   },
+  'Mean temperature of a long log': {
+    typed: {
+      D1: '=PACE.MEANTEMP(B1:B1200,A1:A1200)',
+      ...column(
+        'A1',
+        Array.from({ length: 1200 }, (_, n) => n * 0.5),
+      ),
+      ...column(
+        'B1',
+        Array.from({ length: 1200 }, (_, n) => 25 + 8 * Math.sin(n / 50)),
+      ),
+    },
+    becomes: 'live',
+    changed: { B1: null, B201: 60, A202: 100.5, A204: 100.5, A230: 90.25, A1190: 700, A1191: 700 },
+  },
   'Time to a conversion': {
     typed: {
       A1: 0.5,
