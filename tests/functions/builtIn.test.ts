@@ -91,14 +91,9 @@ test.each<[string, string, Readonly<Record<string, Argument>>, RegExp]>([
   ],
   [
     'columns that lie differently',
-    'BETWEEN',
-    {
-      times: range('A1:A3', 0, 1, 2),
-      values: range('B1:B2', 3, 2),
-      from: literal('0', 0),
-      to: literal('1', 1),
-    },
-    /times and values do not lie alike/,
+    'ARRHENIUS',
+    { temperatures: range('A1:A3', 25, 35, 45), coefficients: range('B1:B2', 1, 2) },
+    /temperatures and coefficients do not lie alike/,
   ],
 ])('%s: not said, with the reason', (_, name, args, words) => {
   expect(() => say(name, args)).toThrow(NotSaid);
