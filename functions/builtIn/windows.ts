@@ -119,6 +119,7 @@ function beginning(left: string, ahead: string | undefined, today?: CellValue): 
 
 /** Nothing where the number of readings is not known. */
 function beginningToday({ times }: Series, points: CellValue | undefined, n: number): CellValue | undefined {
-  if (typeof points !== 'number') return undefined;
+  // any other number of readings is refused, whatever stands here
+  if (typeof points !== 'number' || !Number.isInteger(points) || points < 1) return undefined;
   return n + points > times.length ? '' : turningTime(times[n - 1], times[n + points - 1]);
 }
