@@ -156,7 +156,7 @@ const isKnown = (cell: WorkingCell): cell is Required<WorkingFormula> =>
   isFormula(cell) && cell.today !== undefined;
 
 /** Of a table whose values are known. */
-const fewLines = 6;
+const fewLines = 3;
 
 /** Spread over all that are known, the first two and the last among them. */
 function linesToWorkOut(rows: Rows, most: number): ReadonlySet<number> {
